@@ -1,0 +1,1 @@
+export { isPanelUnit, PANEL_UNITS, type PanelUnit, type UnitKind } from './units/panel-unit';
