@@ -1,0 +1,17 @@
+import * as imaging from './index';
+
+it('exports exactly these names', () => {
+  expect(Object.keys(imaging).sort()).toEqual([
+    'ARUCO_MODULES_PER_SIDE',
+    'COUPON_LAYOUT_VERSION',
+    'MAX_COLUMNS',
+    'MAX_ROWS',
+    'arucoModules',
+    'cellAddress',
+    'couponLayout',
+    'letteringStrokesMm',
+    'letteringWidthMm',
+    'parseCellAddress',
+    'rowLetter',
+  ]);
+});
