@@ -1,0 +1,3 @@
+const { databaseProject } = require('../cli/jest/projects.cjs');
+
+module.exports = databaseProject('api', __dirname, { setupFiles: ['reflect-metadata'] });

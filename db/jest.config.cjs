@@ -1,0 +1,3 @@
+const { databaseProject } = require('../apps/cli/jest/projects.cjs');
+
+module.exports = databaseProject('db', __dirname);

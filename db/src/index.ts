@@ -1,0 +1,1 @@
+export * as schema from './schema';

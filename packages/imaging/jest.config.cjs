@@ -1,0 +1,3 @@
+const { nodeProject } = require('../../apps/cli/jest/projects.cjs');
+
+module.exports = nodeProject('imaging', __dirname);
