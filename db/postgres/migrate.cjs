@@ -1,10 +1,9 @@
 // Brings a database to the present schema: our migrations first, then those of the job queue, each as the role that owns them.
 // Plain CommonJS because it runs unbuilt (tests, first start) as well as from the compiled package.
-const { existsSync } = require('node:fs');
+const { existsSync, readFileSync } = require('node:fs');
 const { join } = require('node:path');
 const { drizzle } = require('drizzle-orm/postgres-js');
 const { migrate } = require('drizzle-orm/postgres-js/migrator');
-const { Logger, runMigrations } = require('graphile-worker');
 const postgres = require('postgres');
 
 const MIGRATIONS_FOLDER = join(__dirname, '..', 'migrations');
@@ -23,6 +22,7 @@ async function migrateAll(migratorUrl) {
       await migrate(drizzle(client), { migrationsFolder: MIGRATIONS_FOLDER });
     }
     await migrateQueue(client, migratorUrl);
+    await client.begin((tx) => tx.unsafe(readFileSync(join(__dirname, 'queue.sql'), 'utf8')));
   } finally {
     await client.end();
   }
@@ -30,22 +30,24 @@ async function migrateAll(migratorUrl) {
 
 /** The queue's installer says CREATE SCHEMA even when it exists, which takes CREATE on the database: lent for that moment only. */
 async function migrateQueue(client, migratorUrl) {
+  // Loaded here, because every start of the api imports this file and hardly any migrates.
+  const { Logger, runMigrations } = require('graphile-worker');
   const [{ database, isInstalled }] = await client`
     select current_database() as database, to_regclass(${`${QUEUE_SCHEMA}.migrations`}) is not null as "isInstalled"`;
   if (!isInstalled) await client`grant create on database ${client(database)} to proofplate_worker`;
   try {
     const url = new URL(migratorUrl);
     url.searchParams.set('options', '-c role=proofplate_worker');
-    await runMigrations({ connectionString: url.href, schema: QUEUE_SCHEMA, logger: quietLogger() });
+    await runMigrations({ connectionString: url.href, schema: QUEUE_SCHEMA, logger: new Logger(logProblems) });
   } finally {
     if (!isInstalled) await client`revoke create on database ${client(database)} from proofplate_worker`;
   }
 }
 
-function quietLogger() {
-  return new Logger(() => (level, message) => {
+function logProblems() {
+  return (level, message) => {
     if (level === 'error' || level === 'warning') console.error(`job queue: ${message}`);
-  });
+  };
 }
 
 module.exports = { migrateAll };
