@@ -11,8 +11,8 @@ CREATE TABLE "caution" (
 	"shop_id" uuid NOT NULL,
 	"id" uuid NOT NULL,
 	"level" text NOT NULL,
-	"title" text NOT NULL,
-	"reason" text NOT NULL,
+	"subject" text NOT NULL,
+	"text" text NOT NULL,
 	"source" text NOT NULL,
 	"shipped_key" text,
 	"applies_to" jsonb NOT NULL,
@@ -152,7 +152,7 @@ CREATE TABLE "effect" (
 	"shop_id" uuid NOT NULL,
 	"id" uuid NOT NULL,
 	"name" text NOT NULL,
-	"shipped_key" text,
+	"key" text NOT NULL,
 	"criteria" jsonb DEFAULT '[]'::jsonb NOT NULL,
 	"notes" text DEFAULT '' NOT NULL,
 	"archived_at" timestamp with time zone,
@@ -160,7 +160,8 @@ CREATE TABLE "effect" (
 	"created_by" uuid,
 	"version" integer DEFAULT 1 NOT NULL,
 	CONSTRAINT "effect_shop_id_id_pk" PRIMARY KEY("shop_id","id"),
-	CONSTRAINT "effect_name_unique" UNIQUE("shop_id","name")
+	CONSTRAINT "effect_name_unique" UNIQUE("shop_id","name"),
+	CONSTRAINT "effect_key_unique" UNIQUE("shop_id","key")
 );
 --> statement-breakpoint
 ALTER TABLE "effect" ENABLE ROW LEVEL SECURITY;--> statement-breakpoint
@@ -289,7 +290,7 @@ CREATE TABLE "machine" (
 	"version" integer DEFAULT 1 NOT NULL,
 	CONSTRAINT "machine_shop_id_id_pk" PRIMARY KEY("shop_id","id"),
 	CONSTRAINT "machine_name_unique" UNIQUE("shop_id","name"),
-	CONSTRAINT "machine_source_kind" CHECK ("machine"."source_kind" in ('fibre Q-switched','fibre MOPA','CO2','UV','green','diode','ultrafast'))
+	CONSTRAINT "machine_source_kind" CHECK ("machine"."source_kind" in ('fibre-q-switched','fibre-mopa','co2','uv','green','diode','ultrafast'))
 );
 --> statement-breakpoint
 ALTER TABLE "machine" ENABLE ROW LEVEL SECURITY;--> statement-breakpoint
@@ -506,7 +507,7 @@ CREATE TABLE "recipe" (
 	"thickness_to_mm" double precision,
 	"part_diameter_from_mm" double precision,
 	"part_diameter_to_mm" double precision,
-	"feature_kind" text DEFAULT 'filled area' NOT NULL,
+	"feature_kind" text DEFAULT 'filled-area' NOT NULL,
 	"feature_size_from_mm" double precision,
 	"feature_size_to_mm" double precision,
 	"material_group_id" uuid,
@@ -516,7 +517,7 @@ CREATE TABLE "recipe" (
 	"version" integer DEFAULT 1 NOT NULL,
 	CONSTRAINT "recipe_shop_id_id_pk" PRIMARY KEY("shop_id","id"),
 	CONSTRAINT "recipe_code_unique" UNIQUE("shop_id","code"),
-	CONSTRAINT "recipe_feature_kind" CHECK ("recipe"."feature_kind" in ('filled area','stroke text','single line','code'))
+	CONSTRAINT "recipe_feature_kind" CHECK ("recipe"."feature_kind" in ('filled-area','stroke-text','single-line','code'))
 );
 --> statement-breakpoint
 ALTER TABLE "recipe" ENABLE ROW LEVEL SECURITY;--> statement-breakpoint
@@ -558,7 +559,7 @@ CREATE TABLE "revision" (
 	CONSTRAINT "revision_recipe_unique" UNIQUE("shop_id","recipe_id","id"),
 	CONSTRAINT "revision_number_unique" UNIQUE("shop_id","recipe_id","number"),
 	CONSTRAINT "revision_state" CHECK ("revision"."state" in ('draft','in_review','returned','scheduled','approved','superseded','withdrawn')),
-	CONSTRAINT "revision_route" CHECK ("revision"."route" in ('coupons','earlier experience','customer-given','transferred')),
+	CONSTRAINT "revision_route" CHECK ("revision"."route" in ('coupons','earlier-experience','customer-given','transferred')),
 	CONSTRAINT "revision_number_from_submit" CHECK (("revision"."state" = 'draft') = ("revision"."number" is null)),
 	CONSTRAINT "revision_hash_from_submit" CHECK ("revision"."state" = 'draft' or "revision"."content_hash" is not null)
 );
@@ -609,7 +610,7 @@ CREATE TABLE "run" (
 	CONSTRAINT "run_shop_id_id_pk" PRIMARY KEY("shop_id","id"),
 	CONSTRAINT "run_code_unique" UNIQUE("shop_id","code"),
 	CONSTRAINT "run_client_unique" UNIQUE("shop_id","client_id"),
-	CONSTRAINT "run_kind" CHECK ("run"."kind" in ('production','confirmation','daily check')),
+	CONSTRAINT "run_kind" CHECK ("run"."kind" in ('production','confirmation','daily-check')),
 	CONSTRAINT "run_state" CHECK ("run"."state" in ('started','finished','abandoned')),
 	CONSTRAINT "run_counts" CHECK ("run"."good_count" >= 0 and "run"."scrap_count" >= 0)
 );

@@ -16,7 +16,7 @@ import {
 } from 'drizzle-orm/pg-core';
 import { authorship, editVersion, moment, shopPolicy, tenantKey } from '../columns';
 import { lens, machine, machineProfile, powerCalibration } from './machines';
-import { effect, finish, material } from './materials';
+import { type CriterionRow, effect, finish, material } from './materials';
 import { member } from './people';
 
 /** A plate of test cells: planned, marked, inspected, sealed. */
@@ -47,7 +47,7 @@ export const coupon = pgTable(
     unknownFields: jsonb().$type<string[]>().notNull().default([]),
     isInvented: boolean().notNull().default(false),
     sourceNote: text().notNull().default(''),
-    criteria: jsonb().$type<{ quantity: string; comparison: string; value: number | string; unit: string; note?: string }[]>(),
+    criteria: jsonb().$type<CriterionRow[]>(),
     criteriaRecordedAt: moment(),
     acknowledgedCautionIds: jsonb().$type<string[]>().notNull().default([]),
     markingStartedAt: moment(),

@@ -1,7 +1,16 @@
 export { cell, cellRating, coupon, couponCorrection, measurement, photo, testGrid } from './coupons';
 export { ledgerEvent, ledgerHead } from './ledger';
 export { lens, machine, machineLens, machineProfile, powerCalibration } from './machines';
-export { type CautionScopeRow, caution, effect, finish, material, materialGroup, materialGroupMaterial } from './materials';
+export {
+  type CautionScopeRow,
+  type CriterionRow,
+  caution,
+  effect,
+  finish,
+  material,
+  materialGroup,
+  materialGroupMaterial,
+} from './materials';
 export { accountEvent, invitation, member, passwordReset, person, refreshToken, session, signInThrottle, trainingRecord } from './people';
 export { recipe, revision, revisionEvidence, signOff } from './recipes';
 export { deviation, hold, run, settingRequest } from './runs';

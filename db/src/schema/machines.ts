@@ -16,7 +16,7 @@ import {
 import { authorship, editVersion, moment, shopPolicy, tenantKey } from '../columns';
 import { member } from './people';
 
-const SOURCE_KINDS = sql.raw(`('fibre Q-switched','fibre MOPA','CO2','UV','green','diode','ultrafast')`);
+const SOURCE_KINDS = sql.raw(`('fibre-q-switched','fibre-mopa','co2','uv','green','diode','ultrafast')`);
 
 export const lens = pgTable(
   'lens',

@@ -86,12 +86,9 @@ export const effect = pgTable(
   {
     ...tenantKey(),
     name: text().notNull(),
-    /** Key of the shipped effect this one is; null where the shop added it. */
-    shippedKey: text(),
-    criteria: jsonb()
-      .$type<{ quantity: string; comparison: string; value: number | string; unit: string; note?: string }[]>()
-      .notNull()
-      .default([]),
+    /** Key of a shipped effect, or one of the shop's own; cautions refer to it. */
+    key: text().notNull(),
+    criteria: jsonb().$type<CriterionRow[]>().notNull().default([]),
     notes: text().notNull().default(''),
     archivedAt: moment(),
     createdAt: moment().notNull().defaultNow(),
@@ -101,6 +98,7 @@ export const effect = pgTable(
   (t) => [
     primaryKey({ columns: [t.shopId, t.id] }),
     unique('effect_name_unique').on(t.shopId, t.name),
+    unique('effect_key_unique').on(t.shopId, t.key),
     foreignKey({ columns: [t.shopId], foreignColumns: [shop.id], name: 'effect_shop_fk' }),
     foreignKey({ columns: [t.shopId, t.createdBy], foreignColumns: [member.shopId, member.id], name: 'effect_author_fk' }),
     shopPolicy('effect'),
@@ -113,9 +111,9 @@ export const caution = pgTable(
   {
     ...tenantKey(),
     level: text().notNull(),
-    /** What to do, first. */
-    title: text().notNull(),
-    reason: text().notNull(),
+    /** What to do, first; then why. */
+    subject: text().notNull(),
+    text: text().notNull(),
     source: text().notNull(),
     /** Key of the shipped caution; shipped ones may be tightened, never removed. */
     shippedKey: text(),
@@ -135,13 +133,15 @@ export const caution = pgTable(
   ],
 );
 
-/** Empty lists mean "any"; every named list must match. */
+/** An acceptance criterion; `upper` belongs to 'between'. */
+export type CriterionRow = { quantity: string; comparison: string; value: number; upper?: number; unit: string };
+
+/** Every condition that is given must hold; an empty scope holds always. */
 export type CautionScopeRow = {
-  always?: boolean;
   families?: string[];
   materialIds?: string[];
   finishIds?: string[];
-  effectIds?: string[];
   sourceKinds?: string[];
-  roundParts?: boolean;
+  effectKeys?: string[];
+  roundPart?: boolean;
 };

@@ -55,7 +55,7 @@ export const run = pgTable(
     foreignKey({ columns: [t.shopId, t.lensFittedId], foreignColumns: [lens.shopId, lens.id], name: 'run_lens_fk' }),
     foreignKey({ columns: [t.shopId, t.createdBy], foreignColumns: [member.shopId, member.id], name: 'run_author_fk' }),
     foreignKey({ columns: [t.shopId, t.deviationId], foreignColumns: [deviation.shopId, deviation.id], name: 'run_deviation_fk' }),
-    check('run_kind', sql`${t.kind} in ('production','confirmation','daily check')`),
+    check('run_kind', sql`${t.kind} in ('production','confirmation','daily-check')`),
     check('run_state', sql`${t.state} in ('started','finished','abandoned')`),
     check('run_counts', sql`${t.goodCount} >= 0 and ${t.scrapCount} >= 0`),
     index('run_recent').on(t.shopId, t.startedAt),
