@@ -1,0 +1,1 @@
+export { mean } from './descriptive/mean';
