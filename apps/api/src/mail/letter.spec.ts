@@ -1,0 +1,72 @@
+import { composeLetter } from './compose-letter';
+import { escapeHtml, oneLine, writeMail } from './letter';
+import type { Mail } from './mail-kinds';
+import { mailLinks } from './mail-links';
+
+const links = mailLinks('https://proofs.example.invalid');
+const EVIL = `Mallory <img src=x onerror="alert(1)">\r\nBcc: everyone@example.invalid`;
+const to = { name: EVIL, address: 'lead@example.invalid' };
+const revision = {
+  to,
+  shopName: EVIL,
+  recipeId: 'r/1',
+  revisionId: 'v?1',
+  recipeCode: 'R-0001',
+  recipeTitle: EVIL,
+  revisionNumber: 3,
+  by: EVIL,
+};
+const MAILS: Mail[] = [
+  {
+    kind: 'invitation',
+    payload: { to, shopName: EVIL, invitedBy: EVIL, role: 'operator', token: 'secret+/=', expiresAt: '2030-01-02T03:04:05Z' },
+  },
+  { kind: 'password-reset', payload: { to, token: 'secret+/=', expiresAt: '2030-01-02T03:04:05Z' } },
+  { kind: 'revision-submitted', payload: { ...revision, comment: EVIL } },
+  { kind: 'revision-approved', payload: revision },
+  { kind: 'revision-returned', payload: { ...revision, reason: EVIL } },
+  { kind: 'revision-withdrawn', payload: { ...revision, reason: EVIL } },
+  { kind: 'hold-placed', payload: { to, shopName: EVIL, subject: EVIL, reason: EVIL, by: EVIL } },
+];
+
+describe.each(MAILS.map((mail) => [mail.kind, mail] as const))('the mail %s', (_, mail) => {
+  const written = writeMail(composeLetter(mail, links));
+
+  it('has a subject of one line', () => {
+    expect(written.subject).not.toMatch(/[\r\n]/);
+    expect(written.subject.length).toBeGreaterThan(5);
+  });
+
+  it('shows typed text as text', () => {
+    expect(written.html).not.toContain('<img');
+    expect(written.html).toContain('&lt;img');
+  });
+
+  it('says the same in both parts', () => {
+    const url = /https:\/\/\S+/.exec(written.text)?.[0] ?? '';
+    expect(url).not.toBe('');
+    expect(written.html).toContain(`href="${escapeHtml(url)}"`);
+  });
+});
+
+describe('links in mail', () => {
+  it('carry a secret in the fragment only, and give it back unchanged', () => {
+    for (const href of [links.acceptInvitation('secret+/=&x'), links.resetPassword('secret+/=&x')]) {
+      const url = new URL(href);
+      expect(url.search).toBe('');
+      expect(url.pathname).not.toContain('secret');
+      expect(new URLSearchParams(url.hash.slice(1)).get('token')).toBe('secret+/=&x');
+    }
+  });
+
+  it('stay on our own origin whatever an id looks like', () => {
+    expect(new URL(links.revision('//evil.example', '../..')).origin).toBe('https://proofs.example.invalid');
+  });
+});
+
+describe('oneLine', () => {
+  it('takes out everything that could end a header line', () => {
+    expect(oneLine('a\r\nb\u2028c\u0000d\u202ee')).toBe('a b c d e');
+    expect(oneLine('x'.repeat(500))).toHaveLength(200);
+  });
+});
