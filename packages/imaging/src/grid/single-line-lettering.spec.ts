@@ -22,7 +22,7 @@ describe('letteringStrokesMm', () => {
 
   it('sets glyphs side by side without touching', () => {
     const [first, second] = [letteringStrokesMm('H', 12), letteringStrokesMm('HH', 12).slice(3)];
-    expect(Math.min(...second.flat().map((point) => point.xMm))).toBe(Math.max(...first.flat().map((point) => point.xMm)) + 4);
+    expect(Math.min(...second.flat().map((point) => point.xMm))).toBe(Math.max(...first.flat().map((point) => point.xMm)) + 3);
   });
 
   it.each(['', 'a', 'C 1', 'É', 'constructor'])('refuses %p', (text) => {

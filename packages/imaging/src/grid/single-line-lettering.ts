@@ -1,9 +1,9 @@
 export type PointMm = { readonly xMm: number; readonly yMm: number };
 
-/** Glyphs stand on a raster 8 wide and 12 high; two glyphs are 4 apart. */
+/** Glyphs stand on a raster 8 wide and 12 high; two glyphs are 3 apart. */
 const GLYPH_WIDTH = 8;
 const GLYPH_HEIGHT = 12;
-const GLYPH_SPACING = 4;
+const GLYPH_SPACING = 3;
 
 /**
  * Own single-line capitals, so that the artwork needs no font on the machine. A point is two hexadecimal digits, x then y
@@ -50,7 +50,7 @@ const STROKES: Readonly<Record<string, string>> = {
 };
 
 /**
- * Width of a line of lettering.                                 w = h (8 n + 4 (n - 1)) / 12
+ * Width of a line of lettering.                                 w = h (8 n + 3 (n - 1)) / 12
  *
  * @param text     1 or more of A to Z, 0 to 9 and hyphen
  * @param heightMm height of the capitals, mm, finite, > 0
