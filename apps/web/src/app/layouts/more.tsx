@@ -1,0 +1,61 @@
+import { chakra } from '@chakra-ui/react';
+import { Link } from 'react-router';
+import { ChevronRightIcon } from '../../components/icons';
+import { Page, Panel } from '../../components/page';
+import { paths } from '../../lib/paths';
+import { useSession } from '../../lib/session';
+import { barFor, ROLE_WORDS } from './navigation';
+
+const RowLink = chakra(Link, {
+  base: {
+    display: 'flex',
+    alignItems: 'center',
+    gap: '3',
+    minHeight: 'glove',
+    px: '4',
+    fontSize: 'lg',
+    _hover: { bg: 'bg.subtle' },
+  },
+});
+
+/** What the bottom bar has no place for. */
+export function Component() {
+  const { person, member, shop } = useSession();
+  const { rest } = barFor(member.role);
+  return (
+    <Page title="More" meta={<span>{shop.name}</span>}>
+      <Panel as="nav" aria-label="More pages">
+        <chakra.ul>
+          {rest.map(({ to, label, icon: Icon }) => (
+            <chakra.li key={to} borderBottom="1px solid">
+              <RowLink to={to}>
+                <Icon />
+                {label}
+                <Trailing />
+              </RowLink>
+            </chakra.li>
+          ))}
+          <li>
+            <RowLink to={paths.account}>
+              <chakra.span minW="0">
+                {person.name}
+                <chakra.span display="block" fontSize="sm" lineHeight="sm" color="fg.muted">
+                  {ROLE_WORDS[member.role]}, account and sign-out
+                </chakra.span>
+              </chakra.span>
+              <Trailing />
+            </RowLink>
+          </li>
+        </chakra.ul>
+      </Panel>
+    </Page>
+  );
+}
+
+function Trailing() {
+  return (
+    <chakra.span ml="auto" color="fg.muted" lineHeight="none">
+      <ChevronRightIcon />
+    </chakra.span>
+  );
+}

@@ -1,0 +1,23 @@
+import { chakra } from '@chakra-ui/react';
+
+const Anchor = chakra('a', {
+  base: {
+    position: 'fixed',
+    left: '4',
+    top: '-16',
+    zIndex: 'status',
+    px: '4',
+    py: '3',
+    bg: 'bg.panel',
+    color: 'brand.fg',
+    fontWeight: 'semibold',
+    border: '1px solid',
+    borderColor: 'border.emphasized',
+    borderRadius: 'md',
+    _focusVisible: { top: '4' },
+  },
+});
+
+export function SkipLink() {
+  return <Anchor href="#content">Skip to the content</Anchor>;
+}

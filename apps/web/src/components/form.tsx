@@ -1,0 +1,95 @@
+import { chakra } from '@chakra-ui/react';
+import { type FormEvent, type ReactNode, useRef, useState } from 'react';
+import { type FieldErrors, type FieldPath, type FieldValues, type UseFormProps, type UseFormReturn, useForm } from 'react-hook-form';
+import { ProblemError } from '../lib/api';
+import { showFieldProblems } from '../lib/form-problem';
+import { useIdempotencyKey } from '../lib/idempotency-key';
+import { ErrorSummary, type SummaryEntry } from './error-summary';
+import { ProblemNotice } from './problem-notice';
+
+/** react-hook-form as every form here uses it: after a refused submit the summary takes the focus, not the first field. */
+export function useSummaryForm<T extends FieldValues>(options: UseFormProps<T>): UseFormReturn<T> {
+  return useForm<T>({ mode: 'onSubmit', reValidateMode: 'onChange', shouldFocusError: false, ...options });
+}
+
+export type FormProps<T extends FieldValues> = {
+  form: UseFormReturn<T>;
+  /** Label of every field by its name: for the summary, and to find the fields that a refusal names. */
+  labels: Readonly<Record<string, string>>;
+  /** Sends the values; a thrown ProblemError is shown and everything typed stays. */
+  onSubmit: (values: T, submit: { idempotencyKey: string }) => Promise<unknown>;
+  /** Words for a refusal that no field can show; undefined falls back to the server's own words. */
+  explain?: (problem: ProblemError) => { what: string; todo?: ReactNode } | undefined;
+  children: ReactNode;
+};
+
+export function Form<T extends FieldValues>({ form, labels, onSubmit, explain, children }: FormProps<T>) {
+  const [problem, setProblem] = useState<ProblemError>();
+  const summary = useRef<HTMLDivElement>(null);
+  const notice = useRef<HTMLDivElement>(null);
+  const idempotencyKey = useIdempotencyKey();
+  // The names of `labels` are the form's own fields.
+  const names = Object.keys(labels) as FieldPath<T>[];
+
+  const submit = async (values: T) => {
+    setProblem(undefined);
+    try {
+      await onSubmit(values, { idempotencyKey: idempotencyKey.current() });
+      idempotencyKey.renew();
+    } catch (error) {
+      if (error instanceof ProblemError && error.status !== 0) idempotencyKey.renew();
+      const rest = showFieldProblems(error, form.setError, names);
+      setProblem(rest);
+      focusSoon(rest === undefined ? summary : notice);
+    }
+  };
+  const handleSubmit = (event: FormEvent) => void form.handleSubmit(submit, () => focusSoon(summary))(event);
+
+  return (
+    <chakra.form noValidate onSubmit={handleSubmit} display="grid" gap="4" maxW="form">
+      <ErrorSummary ref={summary} entries={form.formState.isSubmitted ? summaryEntries(form.formState.errors, labels) : []} />
+      {problem !== undefined && (
+        <div ref={notice} tabIndex={-1}>
+          <FormProblem problem={problem} explanation={explain?.(problem)} />
+        </div>
+      )}
+      {children}
+    </chakra.form>
+  );
+}
+
+function FormProblem({ problem, explanation }: { problem: ProblemError; explanation: { what: string; todo?: ReactNode } | undefined }) {
+  if (problem.status === 0) {
+    return (
+      <ProblemNotice
+        what="No answer came from the server."
+        safe="What you typed is still here. Whether it was saved is not known."
+        todo="Send it again when the connection is back: it is carried out once."
+      />
+    );
+  }
+  return <ProblemNotice what={explanation?.what ?? problem.detail} safe="What you typed is still here." todo={explanation?.todo} />;
+}
+
+function summaryEntries(errors: FieldErrors, labels: Readonly<Record<string, string>>): SummaryEntry[] {
+  return Object.entries(labels).flatMap(([name, label]) => {
+    const message = messageAt(errors, name);
+    return message === undefined ? [] : [{ name, label, message }];
+  });
+}
+
+/** Message of the field with a dotted name. */
+export function messageAt(errors: FieldErrors, name: string): string | undefined {
+  let node: unknown = errors;
+  for (const step of name.split('.')) node = isRecord(node) ? node[step] : undefined;
+  return isRecord(node) && typeof node.message === 'string' && node.message !== '' ? node.message : undefined;
+}
+
+function isRecord(value: unknown): value is Record<string, unknown> {
+  return typeof value === 'object' && value !== null;
+}
+
+/** The notice is drawn after this event; then it can take the focus. */
+function focusSoon(target: { current: HTMLElement | null }) {
+  setTimeout(() => target.current?.focus());
+}

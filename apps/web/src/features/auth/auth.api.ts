@@ -1,0 +1,54 @@
+import { request } from '../../lib/api';
+import { closeSession, openSession, REQUESTED_BY, type Role, type SessionAnswer, type UnitSystem } from '../../lib/session';
+import { forgetAllReads } from '../../lib/swr';
+
+export type SignUp = {
+  shopName: string;
+  name: string;
+  email: string;
+  password: string;
+  unitSystem: UnitSystem;
+  timeZone: string;
+  locale: string;
+};
+export type InvitationPreview = { shopName: string; email: string; role: Role; isKnownPerson: boolean };
+
+export async function signUp(body: SignUp, idempotencyKey: string): Promise<void> {
+  openSession(await request<SessionAnswer>('post', '/api/auth/sign-up', { body, idempotencyKey, headers: REQUESTED_BY }));
+}
+
+export async function signIn(body: { email: string; password: string; shopId?: string }): Promise<void> {
+  openSession(await request<SessionAnswer>('post', '/api/auth/sign-in', { body, headers: REQUESTED_BY }));
+}
+
+export async function signOut(): Promise<void> {
+  await request<void>('post', '/api/auth/sign-out', { headers: REQUESTED_BY });
+  await leave();
+}
+
+export async function signOutEverywhere(): Promise<void> {
+  await request<void>('post', '/api/auth/sign-out-everywhere', { headers: REQUESTED_BY });
+  await leave();
+}
+
+export async function requestPasswordReset(email: string): Promise<void> {
+  await request<void>('post', '/api/auth/forgot-password', { body: { email } });
+}
+
+export async function resetPassword(body: { token: string; password: string }): Promise<void> {
+  await request<void>('post', '/api/auth/reset-password', { body });
+}
+
+/** A POST, so that the token of the invitation stands in no log of addresses. */
+export function previewInvitation(token: string): Promise<InvitationPreview> {
+  return request<InvitationPreview>('post', '/api/auth/invitation-preview', { body: { token } });
+}
+
+export async function acceptInvitation(body: { token: string; name?: string; password: string }): Promise<void> {
+  openSession(await request<SessionAnswer>('post', '/api/auth/accept-invitation', { body, headers: REQUESTED_BY }));
+}
+
+async function leave(): Promise<void> {
+  closeSession({ hasEnded: false });
+  await forgetAllReads();
+}

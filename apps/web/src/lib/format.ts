@@ -1,0 +1,102 @@
+// Numbers and times as the shop reads them. A number keeps its unit with a thin space, a true minus, × and µ.
+
+const NARROW_NO_BREAK_SPACE = '\u202F';
+const MINUS = '\u2212';
+const MICRO = '\u00B5';
+
+export type NumberFormatOptions = {
+  locale?: string | undefined;
+  /** Fixed number of decimals. */
+  decimals?: number | undefined;
+  significantDigits?: number | undefined;
+  /** Shows + before a positive number, as for offsets and differences. */
+  isSigned?: boolean | undefined;
+};
+
+/** "0.030", "−17", "+0.5". */
+export function formatNumber(
+  value: number,
+  { locale = 'en', decimals, significantDigits, isSigned = false }: NumberFormatOptions = {},
+): string {
+  const text = new Intl.NumberFormat(locale, {
+    useGrouping: false,
+    signDisplay: isSigned ? 'exceptZero' : 'negative',
+    ...(decimals === undefined ? {} : { minimumFractionDigits: decimals, maximumFractionDigits: decimals }),
+    ...(significantDigits === undefined
+      ? {}
+      : { minimumSignificantDigits: significantDigits, maximumSignificantDigits: significantDigits }),
+    ...(decimals === undefined && significantDigits === undefined ? { maximumFractionDigits: 6 } : {}),
+  }).format(value);
+  return text.replace('-', MINUS);
+}
+
+/** "900 mm/s" with a narrow no-break space; without a unit the number alone. */
+export function formatQuantity(value: number, unit: string, options?: NumberFormatOptions): string {
+  const number = formatNumber(value, options);
+  return unit === '' ? number : `${number}${NARROW_NO_BREAK_SPACE}${formatUnit(unit)}`;
+}
+
+/** Unit as printed: "um" becomes "µm", "J/cm^2" becomes "J/cm²". */
+export function formatUnit(unit: string): string {
+  return unit
+    .replace(/\bu(?=(?:m|s|J|W)\b)/g, MICRO)
+    .replace(/\^2/g, '²')
+    .replace(/\^3/g, '³');
+}
+
+/** "81 × 72 mm". */
+export function formatSize(width: number, height: number, unit: string, options?: NumberFormatOptions): string {
+  return `${formatNumber(width, options)} × ${formatQuantity(height, unit, options)}`;
+}
+
+/** "−26 %". */
+export function formatPercentChange(fraction: number, options?: NumberFormatOptions): string {
+  return formatQuantity(fraction * 100, '%', { decimals: 0, isSigned: true, ...options });
+}
+
+/** "14 May 2026" in the shop's zone. */
+export function formatDate(time: string | Date, timeZone: string): string {
+  const { day, month, year } = parts(time, { timeZone, day: 'numeric', month: 'short', year: 'numeric' });
+  return `${day} ${month} ${year}`;
+}
+
+/** "14 May 2026 10:12 CET": a time that somebody signed or measured at always carries its zone. */
+export function formatTime(time: string | Date, timeZone: string): string {
+  const { hour, minute, timeZoneName } = parts(time, {
+    timeZone,
+    hour: '2-digit',
+    minute: '2-digit',
+    hourCycle: 'h23',
+    timeZoneName: 'short',
+  });
+  return `${formatDate(time, timeZone)} ${hour}:${minute} ${timeZoneName}`;
+}
+
+/** "09:24", for today's entries beside a date or a zone. */
+export function formatClock(time: string | Date, timeZone: string): string {
+  const { hour, minute } = parts(time, { timeZone, hour: '2-digit', minute: '2-digit', hourCycle: 'h23' });
+  return `${hour}:${minute}`;
+}
+
+/** "12 min 13 s", "1 h 5 min". */
+export function formatDuration(seconds: number): string {
+  const whole = Math.round(seconds);
+  const pieces: [number, string][] = [
+    [Math.floor(whole / 3600), 'h'],
+    [Math.floor((whole % 3600) / 60), 'min'],
+    [whole % 60, 's'],
+  ];
+  const shown = pieces.filter(([amount]) => amount > 0).slice(0, 2);
+  return (shown.length === 0 ? [[0, 's'] as const] : shown).map(([amount, unit]) => `${amount}${NARROW_NO_BREAK_SPACE}${unit}`).join(' ');
+}
+
+/** "1 recipe", "57 recipes". */
+export function formatCount(count: number, one: string, many = `${one}s`): string {
+  return `${count} ${count === 1 ? one : many}`;
+}
+
+function parts(time: string | Date, options: Intl.DateTimeFormatOptions): Record<string, string> {
+  // British English gives zone abbreviations of Europe and the order day, month, year.
+  const formatted = new Intl.DateTimeFormat('en-GB', options).formatToParts(new Date(time));
+  return Object.fromEntries(formatted.map(({ type, value }) => [type, type === 'month' ? value.replace('Sept', 'Sep') : value]));
+}

@@ -1,0 +1,41 @@
+// Every address of the application, so that a renamed page is renamed once.
+
+export const paths = {
+  home: '/',
+  machine: '/machine',
+  coupons: '/coupons',
+  planCoupon: '/coupons/plan',
+  coupon: (code: string) => `/coupons/${encodeURIComponent(code)}`,
+  recipes: '/recipes',
+  recipe: (code: string) => `/recipes/${encodeURIComponent(code)}`,
+  compareRevisions: (code: string) => `/recipes/${encodeURIComponent(code)}/compare`,
+  signOffs: '/sign-off',
+  signOff: (revisionId: string) => `/sign-off/${encodeURIComponent(revisionId)}`,
+  runs: '/runs',
+  run: (code: string) => `/runs/${encodeURIComponent(code)}`,
+  equipment: '/equipment',
+  machineDetail: (id: string) => `/equipment/machines/${encodeURIComponent(id)}`,
+  materials: '/materials',
+  material: (id: string) => `/materials/${encodeURIComponent(id)}`,
+  people: '/people',
+  ledger: '/ledger',
+  shopSettings: '/shop-settings',
+  account: '/account',
+  more: '/more',
+  signIn: '/sign-in',
+  signUp: '/sign-up',
+  acceptInvitation: '/accept-invitation',
+  forgotPassword: '/forgot-password',
+  resetPassword: '/reset-password',
+} as const;
+
+/** The sign-in page that leads back to where the person was. */
+export function signInFrom(here: string): string {
+  return here === paths.home ? paths.signIn : `${paths.signIn}?next=${encodeURIComponent(here)}`;
+}
+
+/** A `next` address of our own; anything else leads home, so that a crafted link cannot send a person elsewhere. */
+export function safeNext(next: string | null): string {
+  if (next === null || !/^\/(?![/\\])/.test(next)) return paths.home;
+  return next;
+}

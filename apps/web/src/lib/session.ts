@@ -1,0 +1,102 @@
+// Who is signed in. The access token lives in this module's memory only; the refresh cookie is out of reach of scripts.
+import { useSyncExternalStore } from 'react';
+
+export type Role = 'trainee' | 'operator' | 'lead' | 'owner';
+export type UnitSystem = 'metric' | 'imperial';
+
+export type Session = {
+  person: { id: string; name: string; email: string };
+  member: { id: string; role: Role; printedName: string };
+  shop: { id: string; name: string; unitSystem: UnitSystem; timeZone: string; locale: string };
+  shops: readonly { id: string; name: string }[];
+};
+
+export type SessionAnswer = Session & { accessToken: string; expiresAt: string };
+
+export type SessionState =
+  | { status: 'unknown' }
+  /** `hasEnded`: there was a session and the server no longer takes it. */
+  | { status: 'signed-out'; hasEnded: boolean }
+  /** The server could not be reached, so nobody knows yet. */
+  | { status: 'unreachable' }
+  | { status: 'signed-in'; session: Session };
+
+const REFRESH_PATH = '/api/auth/refresh';
+const REFRESH_LOCK = 'proofplate.refresh';
+
+/** Shown by every request that uses the refresh cookie; a page of another origin cannot set it. */
+export const REQUESTED_BY = { 'X-Requested-By': 'proofplate' } as const;
+
+let state: SessionState = { status: 'unknown' };
+let accessToken: string | undefined;
+let refreshing: Promise<boolean> | undefined;
+const listeners = new Set<() => void>();
+
+export function useSessionState(): SessionState {
+  return useSyncExternalStore(subscribe, () => state);
+}
+
+/** The session of a page that is shown to signed-in people only. */
+export function useSession(): Session {
+  const current = useSessionState();
+  if (current.status !== 'signed-in') throw new Error('useSession is for pages below the shop layout');
+  return current.session;
+}
+
+export function currentAccessToken(): string | undefined {
+  return accessToken;
+}
+
+export function openSession({ accessToken: token, expiresAt: _expiresAt, ...session }: SessionAnswer): void {
+  accessToken = token;
+  change({ status: 'signed-in', session });
+}
+
+/** Takes over changed names of the shop or the person without a new token. */
+export function updateSession(session: Session): void {
+  if (state.status === 'signed-in') change({ status: 'signed-in', session });
+}
+
+export function closeSession({ hasEnded }: { hasEnded: boolean }): void {
+  accessToken = undefined;
+  change({ status: 'signed-out', hasEnded });
+}
+
+/** Fetches a new access token; calls at the same time share one request. False when there is no session any more. */
+export function refreshSession(): Promise<boolean> {
+  refreshing ??= acrossTabs(refreshOnce).finally(() => {
+    refreshing = undefined;
+  });
+  return refreshing;
+}
+
+async function refreshOnce(): Promise<boolean> {
+  const wasSignedIn = state.status === 'signed-in';
+  const response = await fetch(REFRESH_PATH, { method: 'POST', headers: REQUESTED_BY, credentials: 'same-origin' }).catch(() => undefined);
+  if (response?.ok) {
+    openSession((await response.json()) as SessionAnswer);
+    return true;
+  }
+  // A server that is away or in trouble says nothing about the session: what is on the screen stays.
+  if (response === undefined || response.status >= 500 || response.status === 429) {
+    if (!wasSignedIn) change({ status: 'unreachable' });
+    return false;
+  }
+  closeSession({ hasEnded: wasSignedIn });
+  return false;
+}
+
+/** The refresh token is used up by its use: two tabs must not send the same one. */
+async function acrossTabs(work: () => Promise<boolean>): Promise<boolean> {
+  return navigator.locks === undefined ? await work() : await navigator.locks.request(REFRESH_LOCK, work);
+}
+
+function change(next: SessionState): void {
+  state = next;
+  for (const listener of listeners) listener();
+}
+
+function subscribe(listener: () => void): () => void {
+  listeners.add(listener);
+  return () => listeners.delete(listener);
+}
