@@ -50,7 +50,7 @@ describe('physicalValue and panelValue', () => {
     expect(() => physicalValue(50, { panelUnit: 'percentFromMinimum', storedUnit: 'kHz', rangeHigh: 200 })).toThrow('rangeLow is missing');
     expect(() => physicalValue(50, { panelUnit: 'ppi', storedUnit: 'kHz' })).toThrow('speedMmPerS is missing');
     expect(() => physicalValue(50, { panelUnit: 'W', storedUnit: 'percentFromZero' })).toThrow('rangeHigh is missing');
-    expect(() => physicalValue(0, { panelUnit: 'lpi', storedUnit: 'um' })).toThrow('value must be finite and above zero');
+    expect(() => physicalValue(0, { panelUnit: 'lpi', storedUnit: 'um' })).toThrow('value must be a finite number above 0');
     expect(() => physicalValue(5, { panelUnit: 'kHz', storedUnit: 'um' })).toThrow('kHz does not convert to um');
     expect(() => panelValue(5, { panelUnit: 'W', storedUnit: 'um' })).toThrow('W does not convert to um');
   });

@@ -1,6 +1,7 @@
+import { requireFinite } from '../arguments/require-finite';
+import { requirePositive } from '../arguments/require-positive';
 import type { PanelUnit } from './panel-unit';
 import { percentOfRange, rangeAsPercent } from './percent-of-range';
-import { requireFinite, requirePositive } from './require-number';
 import { MM_PER_INCH } from './spacing-units';
 import { tidy } from './tidy';
 
@@ -46,10 +47,10 @@ const SIZE: Partial<Record<PanelUnit, readonly [kind: string, numerator: number,
  * Source: docs/science/units.md
  */
 export function physicalValue(value: number, scale: PanelScale): number {
-  requireFinite('value', value);
+  requireFinite({ value });
   const { panelUnit, storedUnit } = scale;
   if (panelUnit === 'lpi' || panelUnit === 'lpcm') {
-    requirePositive('value', value);
+    requirePositive({ value });
     return plainValue(perCentimetreOrInch(panelUnit) / value, 'um', storedUnit);
   }
   if (panelUnit === 'ppi') return plainValue((value * requireSpeed(scale)) / MM_PER_INCH, 'Hz', storedUnit);
@@ -72,10 +73,10 @@ export function physicalValue(value: number, scale: PanelScale): number {
  * Source: docs/science/units.md
  */
 export function panelValue(physical: number, scale: PanelScale): number {
-  requireFinite('physical', physical);
+  requireFinite({ physical });
   const { panelUnit, storedUnit } = scale;
   if (panelUnit === 'lpi' || panelUnit === 'lpcm') {
-    requirePositive('physical', physical);
+    requirePositive({ physical });
     return tidy(perCentimetreOrInch(panelUnit) / plainValue(physical, storedUnit, 'um'));
   }
   if (panelUnit === 'ppi') return tidy((plainValue(physical, storedUnit, 'Hz') * MM_PER_INCH) / requireSpeed(scale));
@@ -116,12 +117,12 @@ function requireRange({ panelUnit, storedUnit, rangeLow, rangeHigh }: PanelScale
 function requireFullPower({ storedUnit, rangeHigh }: PanelScale): number {
   if (!isShare(storedUnit)) throw new RangeError(`W does not convert to ${storedUnit}`);
   if (rangeHigh === undefined) throw new RangeError('rangeHigh is missing: watts need the power at 100 %');
-  requirePositive('rangeHigh', rangeHigh);
+  requirePositive({ rangeHigh });
   return rangeHigh;
 }
 
 function requireSpeed({ speedMmPerS }: PanelScale): number {
   if (speedMmPerS === undefined) throw new RangeError('speedMmPerS is missing: pulses per inch become a frequency only at a scan speed');
-  requirePositive('speedMmPerS', speedMmPerS);
+  requirePositive({ speedMmPerS });
   return speedMmPerS;
 }

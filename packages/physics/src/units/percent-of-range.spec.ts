@@ -30,7 +30,7 @@ describe('percentOfRange', () => {
 
   it('refuses a range without width and a percent that is no number', () => {
     expect(() => percentOfRange({ low: 20, high: 20, percent: 50 })).toThrow('high must be above low, got 20 to 20');
-    expect(() => percentOfRange({ low: 0, high: 20, percent: Number.NaN })).toThrow('percent must be a finite number, got NaN');
+    expect(() => percentOfRange({ low: 0, high: 20, percent: Number.NaN })).toThrow('percent must be a finite number, but is NaN');
     expect(() => rangeAsPercent({ low: -5, high: 0, value: -1 })).toThrow('high must not be 0');
   });
 });

@@ -1,4 +1,4 @@
-import { requireFinite } from './require-number';
+import { requireFinite } from '../arguments/require-finite';
 
 export type PercentOfRange = { fromMinimum: number; fromZero: number };
 
@@ -16,7 +16,7 @@ export type PercentOfRange = { fromMinimum: number; fromZero: number };
  */
 export function percentOfRange({ low, high, percent }: { low: number; high: number; percent: number }): PercentOfRange {
   requireRange(low, high);
-  requireFinite('percent', percent);
+  requireFinite({ percent });
   return { fromMinimum: low + (percent / 100) * (high - low), fromZero: (percent / 100) * high };
 }
 
@@ -34,13 +34,13 @@ export function percentOfRange({ low, high, percent }: { low: number; high: numb
  */
 export function rangeAsPercent({ low, high, value }: { low: number; high: number; value: number }): PercentOfRange {
   requireRange(low, high);
-  requireFinite('value', value);
+  requireFinite({ value });
   if (high === 0) throw new RangeError('high must not be 0 for a percent from zero');
   return { fromMinimum: ((value - low) / (high - low)) * 100, fromZero: (value / high) * 100 };
 }
 
 function requireRange(low: number, high: number): void {
-  requireFinite('low', low);
-  requireFinite('high', high);
+  requireFinite({ low });
+  requireFinite({ high });
   if (high <= low) throw new RangeError(`high must be above low, got ${low} to ${high}`);
 }

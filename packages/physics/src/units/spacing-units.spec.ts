@@ -15,6 +15,6 @@ describe('spacingUnits', () => {
   });
 
   it('refuses a spacing of zero', () => {
-    expect(() => spacingUnits(0)).toThrow('spacingMm must be finite and above zero, got 0');
+    expect(() => spacingUnits(0)).toThrow('spacingMm must be a finite number above 0, but is 0');
   });
 });

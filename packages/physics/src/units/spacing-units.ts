@@ -1,4 +1,4 @@
-import { requirePositive } from './require-number';
+import { requirePositive } from '../arguments/require-positive';
 
 /** Exact by definition of the inch (1959). */
 export const MM_PER_INCH = 25.4;
@@ -14,6 +14,6 @@ export type SpacingUnits = { inch: number; linesPerInch: number; linesPerCm: num
  * Source: inch = 25.4 mm exactly; docs/science/units.md
  */
 export function spacingUnits(spacingMm: number): SpacingUnits {
-  requirePositive('spacingMm', spacingMm);
+  requirePositive({ spacingMm });
   return { inch: spacingMm / MM_PER_INCH, linesPerInch: MM_PER_INCH / spacingMm, linesPerCm: 10 / spacingMm, linesPerMm: 1 / spacingMm };
 }

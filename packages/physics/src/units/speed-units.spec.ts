@@ -12,6 +12,6 @@ describe('speedUnits', () => {
   });
 
   it('refuses what is no number', () => {
-    expect(() => speedUnits(Number.POSITIVE_INFINITY)).toThrow('speedMmPerS must be a finite number, got Infinity');
+    expect(() => speedUnits(Number.POSITIVE_INFINITY)).toThrow('speedMmPerS must be a finite number, but is Infinity');
   });
 });

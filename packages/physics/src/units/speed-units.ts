@@ -1,4 +1,4 @@
-import { requireFinite } from './require-number';
+import { requireFinite } from '../arguments/require-finite';
 import { MM_PER_INCH } from './spacing-units';
 
 export type SpeedUnits = { metresPerMinute: number; inchesPerSecond: number; millimetresPerMinute: number };
@@ -12,6 +12,6 @@ export type SpeedUnits = { metresPerMinute: number; inchesPerSecond: number; mil
  * Source: inch = 25.4 mm exactly; docs/science/units.md
  */
 export function speedUnits(speedMmPerS: number): SpeedUnits {
-  requireFinite('speedMmPerS', speedMmPerS);
+  requireFinite({ speedMmPerS });
   return { metresPerMinute: speedMmPerS * 0.06, inchesPerSecond: speedMmPerS / MM_PER_INCH, millimetresPerMinute: speedMmPerS * 60 };
 }
