@@ -1,10 +1,46 @@
+export type { DecimalSign, Fill, PanelUnit } from '@proofplate/physics';
+export { canonicalForm, NotCanonicalError } from './canonical/canonical-form';
+export { CONTENT_FORMAT, contentHash, contentText } from './canonical/content-text';
 export {
   CAUTION_LEVEL_LABELS,
   type Caution,
   type CautionLevel,
   type CautionScope,
 } from './cautions/caution';
+export { type CautionSubject, cautionsFor, isForbidden } from './cautions/cautions-for';
+export { parameterClassOf, type SettingItem, type ShopClasses, settingItemLabel } from './diff/parameter-class';
+export { sameValue } from './diff/same-value';
+export { type ChangeSide, type ChangeSize, type SettingChange, settingDiff } from './diff/setting-diff';
+export { hasEssentialChange, type StepChange, stepsDiff } from './diff/steps-diff';
+export { cellAddress, findCell, rowLetters } from './grid/cell-address';
+export { type CrossedGrid, cellsOfGrid, type GridCell, type GridFactor } from './grid/cells-of-grid';
+export { LEVEL_SPACING_LABELS, type LevelRequest, type LevelSpacing, type Levels, levels, MAX_LEVELS } from './grid/levels';
+export { runOrder } from './grid/run-order';
+export { emptyPanelFor } from './panel/empty-panel';
+export { acceptEntered, type Entry, type EntryContext, type EntryRefusal, enterValue } from './panel/enter-value';
 export type { Panel, PanelField } from './panel/panel';
+export { showNumber } from './panel/show-number';
+export { type ShownValue, showValue } from './panel/show-value';
+export { isShowable, nearestShowable, roundToPanel } from './panel/showable';
+export { CALIBRATION_FREQUENCY_TOLERANCE, type MeasuredCalibration, type WorkPowerInput, workPower } from './power/work-power';
+export { matchesWords, wordsOf } from './search/matches-words';
+export {
+  COUPON_ACTION_LABELS,
+  COUPON_STATE_LABELS,
+  type CouponAction,
+  type CouponState,
+  isCitable,
+  nextCouponState,
+} from './states/coupon-state';
+export type { Moved } from './states/moves';
+export {
+  isEditable,
+  nextRevisionState,
+  REVISION_ACTION_LABELS,
+  REVISION_STATE_LABELS,
+  type RevisionAction,
+  type RevisionState,
+} from './states/revision-state';
 export { COMPARISON_LABELS, COMPARISONS, type Comparison, type Criterion } from './vocabulary/criteria';
 export { codesOf, isCodeOf, type Labels } from './vocabulary/labelled';
 export {
@@ -19,7 +55,6 @@ export {
   type FeatureKind,
   FILL_LABELS,
   FILLS,
-  type Fill,
   OUTCOME_LABELS,
   OUTCOMES,
   type Outcome,
@@ -55,6 +90,7 @@ export {
   QUANTITIES,
   type QuantityMeaning,
 } from './vocabulary/measurements';
+export { criterionText, meetsCriterion } from './vocabulary/meets-criterion';
 export {
   PARAMETER_CLASS_LABELS,
   PARAMETER_KEYS,

@@ -1,3 +1,4 @@
+import type { Fill } from '@proofplate/physics';
 import { codesOf, type Labels } from './labelled';
 
 /** Closed lists of the records, each code with its words. */
@@ -13,7 +14,6 @@ export const SOURCE_KIND_LABELS: Labels<SourceKind> = {
   ultrafast: 'Ultrafast (picosecond, femtosecond)',
 };
 
-export type Fill = 'one direction' | 'both directions' | 'crossed' | 'outline';
 export const FILL_LABELS: Labels<Fill> = {
   'one direction': 'One direction',
   'both directions': 'Both directions',

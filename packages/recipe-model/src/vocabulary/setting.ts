@@ -1,5 +1,5 @@
-import type { PanelUnit } from '@proofplate/physics';
-import type { Assist, Fill, StepPurpose } from './lists';
+import type { Fill, PanelUnit } from '@proofplate/physics';
+import type { Assist, StepPurpose } from './lists';
 import type { ParameterKey } from './parameters';
 
 /** Exactly what the person typed in the panel's unit; this is what is signed, and it is never recomputed. */
