@@ -7,6 +7,7 @@ import { tmpdir } from 'node:os';
 import { dirname, join, resolve } from 'node:path';
 import { blockedFolder, isRoot, serverAccount } from './account.mjs';
 import { findBinDir } from './binaries.mjs';
+import { portOfRunning } from './postmaster.mjs';
 
 export { ensurePostgres, findBinDir } from './binaries.mjs';
 
@@ -86,7 +87,7 @@ export async function startCluster({ dir, port, durable = false, superuserPasswo
   makeFolders(root, walArchive);
   if (!existsSync(join(pgData, 'PG_VERSION'))) initialise({ bin, root, pgData, durable, superuserPassword });
 
-  const runningPort = portOfRunning(bin, pgData);
+  const runningPort = await portOfRunning(pgData);
   const usedPort = runningPort ?? port ?? (await freePort());
   const socketDir = runningPort === undefined ? makeSocketFolder(root) : undefined;
   if (socketDir) {
@@ -178,15 +179,6 @@ function makeSocketFolder(root) {
   mkdirSync(folder, { recursive: true, mode: 0o700 });
   giveToServer(folder);
   return folder;
-}
-
-function portOfRunning(bin, pgData) {
-  try {
-    asServer(join(bin, 'pg_ctl'), ['-D', pgData, 'status']);
-  } catch {
-    return undefined;
-  }
-  return Number(readFileSync(join(pgData, 'postmaster.pid'), 'utf8').split('\n')[3]);
 }
 
 function giveToServer(path) {
