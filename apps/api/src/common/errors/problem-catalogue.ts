@@ -1,0 +1,69 @@
+/** What a problem type means and how to get past it. docs/problems.md lists the same texts; a test compares both. */
+export type ProblemText = { readonly title: string; readonly status: number; readonly meaning: string };
+
+const problem = (status: number, title: string, meaning: string): ProblemText => ({ status, title, meaning });
+
+/** Problem types by code, the last part of their `type` URI. A module that adds an error class adds its line here. */
+export const PROBLEMS: Readonly<Record<string, ProblemText>> = {
+  'bad-request': problem(
+    400,
+    'The request cannot be read',
+    'The body is no JSON, or a header field has a form that this server does not know. Repair it.',
+  ),
+  'idempotency-key-required': problem(
+    400,
+    'This call needs an Idempotency-Key',
+    'Creating and signing calls carry the header Idempotency-Key: 8 to 128 visible characters, new for each act, the same for each retry.',
+  ),
+  'not-signed-in': problem(401, 'Sign in first', 'The access token is missing, wrong or over. Refresh the session or sign in again.'),
+  'wrong-credentials': problem(401, 'E-mail or password is not right', 'Check both. A forgotten password can be reset by mail.'),
+  'session-over': problem(401, 'This session is over', 'It was ended, replaced or has run out. Sign in again.'),
+  'not-permitted': problem(403, 'Your role does not allow this', 'Ask an owner of the shop for the act or for another role.'),
+  'wrong-origin': problem(403, 'The request came from another site', 'Session calls are accepted from the pages of this server only.'),
+  'password-not-confirmed': problem(403, 'The password is not right', 'A signed act needs the password of the person who signs.'),
+  'not-found': problem(
+    404,
+    'There is no such thing here',
+    'It does not exist in this shop, or no longer. Other shops’ things are never shown.',
+  ),
+  'method-not-allowed': problem(405, 'This cannot be done here', 'The address exists, but not for this method.'),
+  conflict: problem(409, 'This clashes with what is stored', 'Look at the present state, then decide again.'),
+  'already-exists': problem(409, 'This exists already', 'Something with the same name or key is stored. Use it, or choose another name.'),
+  'still-in-use': problem(409, 'Something else refers to this', 'Remove or change what refers to it first, or archive it.'),
+  'request-in-flight': problem(
+    409,
+    'The same request is still being worked on',
+    'Send it again in a moment with the same Idempotency-Key.',
+  ),
+  'last-owner': problem(409, 'A shop keeps at least one owner', 'Make somebody else an owner first.'),
+  'already-member': problem(409, 'This person is in the shop already', 'Change the role of the member instead of inviting again.'),
+  'invitation-not-usable': problem(409, 'This invitation cannot be used', 'It was used, taken back or has run out. Ask for a new one.'),
+  'reset-not-usable': problem(409, 'This link cannot be used', 'It was used or has run out. Ask for a new one.'),
+  'address-taken': problem(
+    409,
+    'The address cannot be used for a new shop',
+    'Sign in with it, or reset its password, or use another address.',
+  ),
+  'stale-version': problem(
+    412,
+    'Somebody changed this in the meantime',
+    'The answer carries the present state. Look at it, then make the change again.',
+  ),
+  'too-large': problem(413, 'This is too large', 'Send less at once. The limits are 256 kB for data and 25 MB for a photo.'),
+  'unsupported-type': problem(415, 'This kind of content is not accepted', 'Send JSON, or a photo as form data where a photo is expected.'),
+  'invalid-fields': problem(422, 'Some fields need another look', 'Each entry of errors names one field and says how to put it right.'),
+  'idempotency-key-reused': problem(422, 'This Idempotency-Key belongs to another request', 'Use a new key for a new act.'),
+  'version-required': problem(428, 'Say which version you are changing', 'Edits carry the header If-Match with the ETag that was read.'),
+  'too-many-tries': problem(429, 'Too many tries', 'Wait for the time named in Retry-After.'),
+  'internal-error': problem(
+    500,
+    'Something went wrong on our side',
+    'It was written down under the id in instance. Try again; tell the id to whoever runs this server.',
+  ),
+  'try-again': problem(503, 'Too busy at the moment', 'Nothing was changed. Try again after the time named in Retry-After.'),
+  'took-too-long': problem(
+    503,
+    'This took too long',
+    'The request was given up at its deadline. Read the present state before trying again.',
+  ),
+};

@@ -1,0 +1,5 @@
+import { Module } from '@nestjs/common';
+import { ProblemsController } from './problems.controller';
+
+@Module({ controllers: [ProblemsController] })
+export class ProblemsModule {}

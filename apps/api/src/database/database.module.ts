@@ -1,0 +1,29 @@
+import { Global, Inject, Injectable, Module, type OnApplicationShutdown } from '@nestjs/common';
+import { createDb, type DbHandle } from '@proofplate/db';
+import { Env } from '../config/env.validation';
+import { Codes } from './codes.repository';
+import { Outbox } from './outbox.repository';
+import { DATABASE, UnitOfWork } from './unit-of-work';
+
+/** Closes the pool after the last request has been answered. */
+@Injectable()
+class DatabaseShutdown implements OnApplicationShutdown {
+  constructor(@Inject(DATABASE) private readonly handle: DbHandle) {}
+
+  async onApplicationShutdown(): Promise<void> {
+    await this.handle.end();
+  }
+}
+
+@Global()
+@Module({
+  providers: [
+    { provide: DATABASE, inject: [Env], useFactory: (env: Env) => createDb(env.DATABASE_URL, { max: env.DATABASE_POOL_SIZE }) },
+    DatabaseShutdown,
+    UnitOfWork,
+    Codes,
+    Outbox,
+  ],
+  exports: [DATABASE, UnitOfWork, Codes, Outbox],
+})
+export class DatabaseModule {}
