@@ -14,6 +14,7 @@ const NAMES = [
   'depthForFluenceLoss',
   'depthForSpotGrowth',
   'depthOfFocus',
+  'derivedNumbers',
   'dutyCycle',
   'filledRectangleTime',
   'fluenceRatioAtOffset',

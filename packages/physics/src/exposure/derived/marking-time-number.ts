@@ -1,0 +1,29 @@
+import { type FilledRectangle, filledRectangleTime } from '../filled-rectangle-time';
+import { type DerivedNumber, derive } from './derived-number';
+import type { MarkParameters, Quantity } from './mark-parameters';
+
+const DESCRIBED = {
+  key: 'markingTime',
+  unit: 's',
+  formula: 'lines, jumps, delays and pauses of the filled rectangle, all passes',
+  source: 'docs/science/marking-time.md',
+};
+
+/** Time of the rectangle given, with the overheads of the scan head. */
+export function markingTimeNumber(mark: MarkParameters): DerivedNumber {
+  const { area, fill, speedMmPerS, lineSpacingUm, passes } = mark;
+  if (fill === 'outline') return { ...DESCRIBED, missingBecause: 'outline only: no area is filled' };
+  if (area === undefined) return { ...DESCRIBED, missingBecause: 'the size of the filled area is not given' };
+  const inputs: Record<Exclude<keyof FilledRectangle, 'fill'>, Quantity> = {
+    widthMm: area.widthMm,
+    heightMm: area.heightMm,
+    jumpSpeedMmPerS: area.jumpSpeedMmPerS,
+    lineOverheadMs: area.lineOverheadMs,
+    jumpSettleMs: area.jumpSettleMs,
+    pauseBetweenMs: area.pauseBetweenMs,
+    speedMmPerS,
+    lineSpacingUm,
+    passes,
+  };
+  return derive(DESCRIBED, inputs, { compute: (known) => filledRectangleTime({ ...known, fill }).totalS });
+}
