@@ -1,0 +1,9 @@
+import { BEAM } from './entries/beam';
+import { CALIBRATION } from './entries/calibration';
+import { PULSES } from './entries/pulses';
+import { SCANNING } from './entries/scanning';
+import { UNITS } from './entries/units';
+import type { FormulaEntry } from './formula-entry';
+
+/** Every formula that the packages can be checked against. */
+export const FORMULAS: readonly FormulaEntry[] = [...BEAM, ...PULSES, ...SCANNING, ...CALIBRATION, ...UNITS];
