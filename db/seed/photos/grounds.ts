@@ -34,7 +34,7 @@ export type Ground = {
 };
 
 const GROUNDS: Readonly<Record<GroundKind, Ground>> = {
-  'stainless brushed': ground([75, 0.2, 2.6], 'brushed', 1.5, 0.2, [22, 0.6, 1], { rimLab: [62, 5, 17], rim: 0.75 }),
+  'stainless brushed': ground([75, 0.2, 2.6], 'brushed', 1.5, 0.2, [22, 0.6, 1], { rimLab: [60, 6, 20], rim: 0.85 }),
   'anodised black': ground([21, 0, -1.2], 'blasted', 0.9, 0.16, [79, 0, 2], { brightens: true, rimLab: [33, 0, 1], rim: 0.2 }),
   'anodised clear': ground([78, -0.4, 0.6], 'blasted', 0.55, 0.16, [27, 0.4, 0.6], { rimLab: [62, 0.5, 2], rim: 0.25 }),
   'brass turned': ground([74, 4, 31], 'turned', 1, 0.22, [27, 6, 12], { rimLab: [50, 12, 30], rim: 0.5 }),

@@ -60,7 +60,9 @@ export function modelMark(kind: MarkKind, exposure: Exposure, random: Random): M
   const decades = effectiveDecades(process, exposure);
   const texture = textureOf(process, exposure, decades, random);
   const [lightness, a, b] = colourAt(process.path, decades);
-  const lab: Lab = [lightness + 0.8 * spread(random), a + 0.4 * spread(random), b + 0.4 * spread(random)];
+  // Bare ground doesn't scatter: marks differ from each other only where there is a mark.
+  const scatter = unit(0.1 + (decades - (process.path[0]?.[0] ?? 0)) / 0.3);
+  const lab: Lab = [lightness + 0.8 * scatter * spread(random), a + 0.4 * scatter * spread(random), b + 0.4 * scatter * spread(random)];
   const contrast = contrastTo(groundOf(process.ground).lab, lab);
   const deltaETarget = Math.hypot(lab[0] - process.target[0], lab[1] - process.target[1], lab[2] - process.target[2]);
   const flaw = 2.4 * texture.overburn + 1.3 * texture.banding + 1.1 * texture.mottle;

@@ -1,6 +1,9 @@
 import type { RectMm, StrokesMm } from '@proofplate/imaging';
 import { type Lab, type LinearRgb, labToLinearRgb, linearRgbToLab } from './colour';
 
+// Taken out of Math once: the look-up of a global costs more than the call where a test runner wraps it.
+const { ceil, floor, hypot, max, min, sqrt } = Math;
+
 /** A flat plate as it would be scanned: linear light, three values per pixel, row by row, plate axes. */
 export type PlateRaster = { readonly widthPx: number; readonly heightPx: number; readonly pxPerMm: number; readonly rgb: Float32Array };
 
@@ -18,10 +21,10 @@ export function blend(raster: PlateRaster, index: number, colour: LinearRgb, opa
 /** Calls back for every pixel within `marginMm` of a rectangle; cover falls off over one pixel at the edge. */
 export function visitRect(raster: PlateRaster, rect: RectMm, marginMm: number, visit: Visit): void {
   const { pxPerMm, widthPx, heightPx } = raster;
-  const left = Math.max(0, Math.floor((rect.xMm - marginMm) * pxPerMm));
-  const right = Math.min(widthPx - 1, Math.ceil((rect.xMm + rect.widthMm + marginMm) * pxPerMm));
-  const top = Math.max(0, Math.floor((rect.yMm - marginMm) * pxPerMm));
-  const bottom = Math.min(heightPx - 1, Math.ceil((rect.yMm + rect.heightMm + marginMm) * pxPerMm));
+  const left = max(0, floor((rect.xMm - marginMm) * pxPerMm));
+  const right = min(widthPx - 1, ceil((rect.xMm + rect.widthMm + marginMm) * pxPerMm));
+  const top = max(0, floor((rect.yMm - marginMm) * pxPerMm));
+  const bottom = min(heightPx - 1, ceil((rect.yMm + rect.heightMm + marginMm) * pxPerMm));
   for (let y = top; y <= bottom; y += 1) {
     const yMm = (y + 0.5) / pxPerMm;
     const down = covered(yMm, rect.yMm, rect.heightMm, pxPerMm);
@@ -45,7 +48,7 @@ export function fillAreas(raster: PlateRaster, areas: readonly RectMm[], lab: La
     });
   }
   for (const [index, cover] of covers) {
-    blend(raster, index, colour, Math.min(1, cover), flicker());
+    blend(raster, index, colour, min(1, cover), flicker());
   }
 }
 
@@ -55,8 +58,8 @@ export function drawStrokes(raster: PlateRaster, strokes: StrokesMm, penMm: numb
   for (const stroke of strokes) {
     const xs = stroke.map((point) => point.xMm);
     const ys = stroke.map((point) => point.yMm);
-    const [xMm, yMm] = [Math.min(...xs), Math.min(...ys)];
-    const box = { xMm, yMm, widthMm: Math.max(...xs) - xMm, heightMm: Math.max(...ys) - yMm };
+    const [xMm, yMm] = [min(...xs), min(...ys)];
+    const box = { xMm, yMm, widthMm: max(...xs) - xMm, heightMm: max(...ys) - yMm };
     visitRect(raster, box, penMm, (index, _, atXMm, atYMm) => {
       const cover = clamp((penMm / 2 - distanceMm(stroke, atXMm, atYMm)) * raster.pxPerMm + 0.5);
       if (cover > 0) {
@@ -74,13 +77,13 @@ export function measureRect(raster: PlateRaster, rect: RectMm, insetMm: number):
     widthMm: rect.widthMm - 2 * insetMm,
     heightMm: rect.heightMm - 2 * insetMm,
   };
-  const blockMm = Math.max(0.1, 2 / raster.pxPerMm);
+  const blockMm = max(0.1, 2 / raster.pxPerMm);
   const blocks = new Map<number, [number, number, number, number]>();
   visitRect(raster, inner, 0, (index, cover, xMm, yMm) => {
     if (cover < 1) {
       return;
     }
-    const key = Math.floor((yMm - inner.yMm) / blockMm) * 1024 + Math.floor((xMm - inner.xMm) / blockMm);
+    const key = floor((yMm - inner.yMm) / blockMm) * 1024 + floor((xMm - inner.xMm) / blockMm);
     const block = blocks.get(key) ?? [0, 0, 0, 0];
     blocks.set(key, block);
     for (let channel = 0; channel < 3; channel += 1) {
@@ -89,7 +92,7 @@ export function measureRect(raster: PlateRaster, rect: RectMm, insetMm: number):
     block[3] += 1;
   });
   const means = [...blocks.values()].map(([red, green, blue, count]): LinearRgb => [red / count, green / count, blue / count]);
-  const mean = (values: readonly number[]) => values.reduce((sum, value) => sum + value, 0) / Math.max(1, values.length);
+  const mean = (values: readonly number[]) => values.reduce((sum, value) => sum + value, 0) / max(1, values.length);
   const lightness = means.map((colour) => linearRgbToLab(colour)[0]);
   const centre = mean(lightness);
   return {
@@ -98,16 +101,16 @@ export function measureRect(raster: PlateRaster, rect: RectMm, insetMm: number):
       mean(means.map((colour) => colour[1])),
       mean(means.map((colour) => colour[2])),
     ]),
-    evenness: Math.sqrt(mean(lightness.map((value) => (value - centre) ** 2))),
+    evenness: sqrt(mean(lightness.map((value) => (value - centre) ** 2))),
   };
 }
 
 export function clamp(value: number): number {
-  return Math.min(1, Math.max(0, value));
+  return min(1, max(0, value));
 }
 
 function covered(atMm: number, startMm: number, lengthMm: number, pxPerMm: number): number {
-  return clamp(Math.min(atMm - startMm, startMm + lengthMm - atMm) * pxPerMm + 0.5);
+  return clamp(min(atMm - startMm, startMm + lengthMm - atMm) * pxPerMm + 0.5);
 }
 
 function distanceMm(stroke: StrokesMm[number], xMm: number, yMm: number): number {
@@ -120,7 +123,7 @@ function distanceMm(stroke: StrokesMm[number], xMm: number, yMm: number): number
     }
     const [dx, dy] = [to.xMm - from.xMm, to.yMm - from.yMm];
     const along = clamp(((xMm - from.xMm) * dx + (yMm - from.yMm) * dy) / (dx * dx + dy * dy || 1));
-    nearest = Math.min(nearest, Math.hypot(xMm - from.xMm - along * dx, yMm - from.yMm - along * dy));
+    nearest = min(nearest, hypot(xMm - from.xMm - along * dx, yMm - from.yMm - along * dy));
   }
   return nearest;
 }
