@@ -7,7 +7,7 @@ export const GROUND_KINDS = [
   'brass turned',
   'titanium satin',
   'powder coat blue',
-  'acrylic clear',
+  'acrylic smoke',
   'slate natural',
 ] as const;
 export type GroundKind = (typeof GROUND_KINDS)[number];
@@ -40,7 +40,7 @@ const GROUNDS: Readonly<Record<GroundKind, Ground>> = {
   'brass turned': ground([74, 4, 31], 'turned', 1, 0.22, [27, 6, 12], { rimLab: [50, 12, 30], rim: 0.5 }),
   'titanium satin': ground([66, 0.4, 3], 'brushed', 0.9, 0.16, [29, 2, 1], { rimLab: [58, 5, 22], rim: 0.5 }),
   'powder coat blue': ground([30, 3, -26], 'coated', 1, 0.1, [76, 0, 3], { brightens: true, rimLab: [22, 4, -14], rim: 0.45 }),
-  'acrylic clear': ground([42, -2, -2.5], 'glossy', 1, 0.22, [88, -0.5, 0.8], { brightens: true, rimLab: [60, -1, 0], rim: 0.2 }),
+  'acrylic smoke': ground([42, -2, -2.5], 'glossy', 1, 0.22, [88, -0.5, 0.8], { brightens: true, rimLab: [60, -1, 0], rim: 0.2 }),
   'slate natural': ground([29, -0.8, -3], 'riven', 1, 0.08, [69, 0, 1.2], { brightens: true, rimLab: [38, 0, 1], rim: 0.25 }),
 };
 

@@ -1,6 +1,6 @@
 import type { Lab } from './colour';
 import type { GroundKind } from './grounds';
-import type { MarkOutcome } from './mark-model';
+import type { MarkOutcome } from './mark-outcome';
 
 export const MARK_KINDS = [
   'anodised black bleach',
@@ -171,7 +171,7 @@ export const MARK_PROCESSES: Readonly<Record<MarkKind, MarkProcess>> = {
   },
   // Cast sheet frosts white in the beam's track; too slow, and it runs and turns clear again.
   'acrylic frost': {
-    ground: 'acrylic clear',
+    ground: 'acrylic smoke',
     path: [
       [-1.6, 42, -2, -2.5],
       [-1.2, 52, -1.6, -1.6],

@@ -2,25 +2,9 @@ import type { CellTexture } from './burn-cell';
 import { type Lab, luminanceOf } from './colour';
 import { type GroundKind, groundOf } from './grounds';
 import { type DoseColour, MARK_PROCESSES, type MarkKind, type MarkProcess } from './mark-kinds';
+import type { MarkOutcome } from './mark-outcome';
 import type { Random } from './noise';
 
-export const MARK_OUTCOMES = [
-  'no mark',
-  'faint',
-  'uneven',
-  'banded',
-  'good',
-  'wrong colour',
-  'overburnt',
-  'charred',
-  'burr',
-  'halo',
-  'melted',
-  'cracked',
-  'warped',
-  'peeled',
-] as const;
-export type MarkOutcome = (typeof MARK_OUTCOMES)[number];
 export type Rating = 0 | 1 | 2 | 3 | 4 | 5;
 
 export type Exposure = {
