@@ -31,6 +31,7 @@ function verdict(rows) {
 async function oneRepeat(repeat) {
   const carryOn = gate();
   const idle = gate();
+  const givenUp = gate();
   const outcomeOfA = outcomeOf(
     pool.begin(async (tx) => {
       const [{ pid }] = await tx`select pg_backend_pid() as pid, set_config('app.tenant', 'A', true)`;
@@ -39,6 +40,7 @@ async function oneRepeat(repeat) {
       idle.open(pid);
       await carryOn.opened;
       if ((await outcomeOf(tx`insert into journal values ('A', ${repeat})`)) === 'done') figures.lateStatementsThatRan += 1;
+      givenUp.open();
       throw new Error('A gives up, which makes the driver roll back');
     }),
   );
@@ -49,6 +51,9 @@ async function oneRepeat(repeat) {
   const outcomesOfB = started.map((mine, index) => outcomeOf(transactionB({ writer: `B${index}`, index, repeat, mine, finish })));
   await Promise.race([Promise.all(started.map(({ opened }) => opened)), Promise.all(outcomesOfB)]);
   carryOn.open();
+  // Its caller hears at once that the connection is lost; its code and the driver's rollback come later.
+  await givenUp.opened;
+  await new Promise((resolve) => setTimeout(resolve, 5));
   if ((await outcomeOfA) === 'failed') figures.reportedByA += 1;
   finish.open();
   const ended = await Promise.all(outcomesOfB);
