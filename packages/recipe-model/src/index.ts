@@ -8,6 +8,7 @@ export {
   type CautionScope,
 } from './cautions/caution';
 export { type CautionSubject, cautionsFor, isForbidden } from './cautions/cautions-for';
+export { CAUTION_DEFERENCE, SHIPPED_CAUTIONS } from './cautions/shipped-cautions';
 export { parameterClassOf, type SettingItem, type ShopClasses, settingItemLabel } from './diff/parameter-class';
 export { sameValue } from './diff/same-value';
 export { type ChangeSide, type ChangeSize, type SettingChange, settingDiff } from './diff/setting-diff';
@@ -102,6 +103,7 @@ export {
 export type { PhysicalProfile, PulseEnergyLimit } from './vocabulary/profile';
 export type { LimitsOfUse, Range, RecipeScope, RevisionContent } from './vocabulary/revision-content';
 export { ROLE_LABELS, ROLES, type Role, roleAtLeast } from './vocabulary/roles';
+export { rangesOverlap, scopesOverlap } from './vocabulary/scopes-overlap';
 export type {
   DelaysUs,
   EnteredValue,

@@ -37,7 +37,7 @@ export type MaterialFamily =
   | 'carbon-fibre-composite'
   | 'wood'
   | 'mdf'
-  | 'leather'
+  | 'chrome-free-leather'
   | 'chrome-tanned-leather'
   | 'paper'
   | 'textile'
@@ -96,7 +96,7 @@ export const MATERIAL_FAMILIES: Readonly<Record<MaterialFamily, FamilyMeaning>> 
   'carbon-fibre-composite': { label: 'Carbon-fibre composite', synonyms: ['cfrp', 'carbon fibre', 'carbon fiber'] },
   wood: { label: 'Wood', synonyms: ['plywood', 'birch ply', 'oak', 'walnut', 'bamboo', 'veneer'] },
   mdf: { label: 'MDF', synonyms: ['fibreboard', 'medium density fibreboard', 'hdf', 'chipboard'] },
-  leather: { label: 'Leather, declared free of chrome', synonyms: ['vegetable-tanned leather', 'chrome-free leather'] },
+  'chrome-free-leather': { label: 'Leather, declared free of chrome', synonyms: ['vegetable-tanned leather'] },
   'chrome-tanned-leather': { label: 'Leather, chrome-tanned or not declared', synonyms: ['leather', 'suede', 'nubuck'] },
   paper: { label: 'Paper, card', synonyms: ['card', 'cardboard', 'paperboard'] },
   textile: { label: 'Textile', synonyms: ['fabric', 'cotton', 'denim', 'felt', 'wool'] },
