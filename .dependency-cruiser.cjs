@@ -10,6 +10,7 @@ const ROWS = [
   ['members'],
   ['auth'],
   ['machines', 'lenses', 'materials', 'photos'],
+  ['photos'],
   ['coupons'],
   ['recipes'],
   ['sign-offs'],
@@ -62,7 +63,10 @@ module.exports = {
       severity: 'error',
       comment: 'mappers, policies, states and diffs hold no Nest and no I/O',
       from: { path: '^apps/api/src/.*(?:\\.mapper|\\.policy|-state|-diff)\\.ts$' },
-      to: { path: '(?:node_modules/(?:@nestjs/(?!swagger)|drizzle|postgres)|\\.service\\.ts$|\\.repository\\.ts$)' },
+      to: {
+        path: '(?:node_modules/(?:@nestjs/(?!swagger)|drizzle|postgres)|\\.service\\.ts$|\\.repository\\.ts$)',
+        dependencyTypesNot: ['type-only'],
+      },
     },
     ...higher,
     {
@@ -96,7 +100,7 @@ module.exports = {
   ],
   options: {
     doNotFollow: { path: 'node_modules' },
-    exclude: { path: '(?:/dist/|/generated/|\\.data/)' },
+    exclude: { path: '(?:/dist/|/generated/|\\.data/|jest\\.config\\.cjs$)' },
     tsPreCompilationDeps: true,
     enhancedResolveOptions: {
       exportsFields: ['exports'],
