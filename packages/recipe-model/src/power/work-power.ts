@@ -26,7 +26,7 @@ export type WorkPowerInput = {
  * @returns watts with their basis, or null with the reason in words; never zero in place of unknown
  * @throws RangeError if the calibration's points are too few or not in order
  * Valid for sources that are linear in their percent where not calibrated.
- * Source: own definition; docs/science/power.md
+ * Source: own definition; docs/science/work-power.md
  */
 export function workPower({ profile, calibration, parameters }: WorkPowerInput): WorkPower {
   const percent = parameters.powerPercent?.physical;
