@@ -102,6 +102,8 @@ export const tokens = {
     full: { value: '100%' },
     screen: { value: '100dvh' },
   },
+  // A shorthand without a colour would take the text's; this one takes the hairline's until borderColor says otherwise.
+  borders: { hairline: { value: '1px solid var(--pp-colors-border)' } },
   radii: { sm: px(2), md: px(4), full: { value: '9999px' } },
   zIndex: {
     sticky: { value: '2' },

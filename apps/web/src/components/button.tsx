@@ -12,7 +12,7 @@ const buttonRecipe = defineRecipe({
     position: 'relative',
     overflow: 'hidden',
     borderRadius: 'md',
-    border: '1px solid',
+    border: 'hairline',
     fontWeight: 'semibold',
     lineHeight: 'xl',
     textDecoration: 'none',

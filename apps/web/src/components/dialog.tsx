@@ -12,7 +12,7 @@ const Frame = chakra('dialog', {
     overflow: 'auto',
     color: 'fg',
     bg: 'bg.panel',
-    border: '1px solid',
+    border: 'hairline',
     borderRadius: 'md',
     boxShadow: 'popover',
     _backdrop: { bg: 'rgba(20, 22, 26, 0.45)' },
@@ -74,7 +74,7 @@ export function Dialog({ title, isTitleHidden = false, width = 'narrow', place =
         </chakra.div>
       )}
       {actions !== undefined && (
-        <Flex gap="2" wrap="wrap" justify="flex-end" px="5" py="4" borderTop="1px solid">
+        <Flex gap="2" wrap="wrap" justify="flex-end" px="5" py="4" borderTop="hairline">
           {actions}
         </Flex>
       )}

@@ -16,7 +16,7 @@ export function ErrorSummary({ entries, ref }: { entries: readonly SummaryEntry[
       aria-labelledby="error-summary-title"
       p="4"
       bg="oxide.subtle"
-      border="1px solid"
+      border="hairline"
       borderColor="oxide.emphasized"
       borderRadius="md"
     >

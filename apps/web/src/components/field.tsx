@@ -65,7 +65,7 @@ export function Field({ name, label, help, error, unit, isOptional = false, chil
 }
 
 const boxBase = {
-  border: '1px solid',
+  border: 'hairline',
   borderColor: 'border.emphasized',
   borderRadius: 'md',
   bg: 'bg.panel',

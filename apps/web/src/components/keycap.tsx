@@ -6,7 +6,7 @@ export const Keycap = chakra('kbd', {
     fontSize: '13px',
     fontWeight: 'semibold',
     lineHeight: '18px',
-    border: '1px solid',
+    border: 'hairline',
     borderColor: 'border',
     borderBottomWidth: '2px',
     borderRadius: 'sm',

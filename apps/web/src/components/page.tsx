@@ -81,7 +81,7 @@ function Breadcrumbs({ crumbs }: { crumbs: readonly Crumb[] }) {
 
 /** A card: white on paper, one hairline. */
 export const Panel = chakra('section', {
-  base: { bg: 'bg.panel', border: '1px solid', borderColor: 'border', borderRadius: 'md' },
+  base: { bg: 'bg.panel', border: 'hairline', borderColor: 'border', borderRadius: 'md' },
 });
 
 /** Content of one column of form fields. */

@@ -16,7 +16,7 @@ export type ProblemNoticeProps = {
 /** Every failure says what happened, what is safe and what to do. */
 export function ProblemNotice({ what, safe, todo, actions }: ProblemNoticeProps) {
   return (
-    <Flex role="alert" gap="3" p="4" bg="oxide.subtle" border="1px solid" borderColor="oxide.emphasized" borderRadius="md">
+    <Flex role="alert" gap="3" p="4" bg="oxide.subtle" border="hairline" borderColor="oxide.emphasized" borderRadius="md">
       <Box color="oxide.fg" pt="1" lineHeight="none">
         <StateShape state="fails" />
       </Box>

@@ -17,7 +17,7 @@ const Choice = chakra('button', {
     minHeight: { base: '46px', lg: '38px' },
     px: '3.5',
     flexGrow: '1',
-    borderRight: '1px solid',
+    borderRight: 'hairline',
     cursor: 'pointer',
     outlineOffset: '-3px !important',
     _hover: { bg: 'bg.subtle' },
@@ -35,7 +35,7 @@ export function Segmented<T extends string>({ label, choices, value, onChange, i
       aria-label={label}
       display={isWide ? 'flex' : 'inline-flex'}
       maxW="full"
-      border="1px solid"
+      border="hairline"
       borderColor="border.emphasized"
       borderRadius="md"
       bg="bg.panel"

@@ -16,9 +16,9 @@ export function SkeletonBlock({ height, width = 'full', label = 'Loading' }: { h
 /** Rows of a list in their final height. */
 export function SkeletonTable({ rows = 8, label = 'Loading the list' }: SkeletonTableProps) {
   return (
-    <Box role="status" aria-label={label} bg="bg.panel" border="1px solid" borderRadius="md">
+    <Box role="status" aria-label={label} bg="bg.panel" border="hairline" borderRadius="md">
       {Array.from({ length: rows }, (_, row) => (
-        <Box key={row} height="rowTarget" px="3" display="flex" alignItems="center" borderTop={row === 0 ? undefined : '1px solid'}>
+        <Box key={row} height="rowTarget" px="3" display="flex" alignItems="center" borderTop={row === 0 ? undefined : 'hairline'}>
           <Bone height="4" width={row % 3 === 0 ? '38%' : row % 3 === 1 ? '54%' : '46%'} />
         </Box>
       ))}

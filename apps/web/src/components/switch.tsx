@@ -37,7 +37,7 @@ export function Switch({ label, isOn, onChange, help, isDisabled = false }: Swit
           width="36px"
           height="20px"
           borderRadius="full"
-          border="1px solid"
+          border="hairline"
           borderColor={isOn ? 'brand.solid' : 'border.emphasized'}
           bg={isOn ? 'brand.solid' : 'bg.panel'}
         >

@@ -6,7 +6,7 @@ export function fieldNameFromPointer(pointer: string): string {
   return pointer
     .replace(/^#?\/?/, '')
     .split('/')
-    .map((step) => step.replace(/~1/g, '/').replace(/~0/g, '~'))
+    .map((step) => decodeURIComponent(step).replace(/~1/g, '/').replace(/~0/g, '~'))
     .join('.');
 }
 

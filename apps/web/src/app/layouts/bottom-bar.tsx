@@ -34,7 +34,7 @@ export function BottomBar({ role }: { role: Role }) {
       bottom="0"
       zIndex="bar"
       bg="bg.panel"
-      borderTop="1px solid"
+      borderTop="hairline"
       css={{ '@media print': { display: 'none' } }}
     >
       <chakra.ul display="grid" gridAutoFlow="column" gridAutoColumns="1fr">

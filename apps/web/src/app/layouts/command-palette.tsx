@@ -41,7 +41,7 @@ export function CommandPalette({ role, onClose }: CommandPaletteProps) {
 
   return (
     <Dialog title="Find" isTitleHidden width="wide" place="top" onClose={onClose}>
-      <chakra.label display="flex" alignItems="center" gap="2" px="4" borderBottom="1px solid">
+      <chakra.label display="flex" alignItems="center" gap="2" px="4" borderBottom="hairline">
         <FindIcon />
         <chakra.input
           role="combobox"

@@ -20,7 +20,7 @@ export function KeyList({ onClose }: { onClose: () => void }) {
           </chakra.div>
         ))}
       </chakra.dl>
-      <chakra.div mt="5" pt="4" borderTop="1px solid">
+      <chakra.div mt="5" pt="4" borderTop="hairline">
         <Switch
           label="Single-key shortcuts"
           isOn={areSingleKeysOn}

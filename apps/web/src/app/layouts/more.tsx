@@ -27,7 +27,7 @@ export function Component() {
       <Panel as="nav" aria-label="More pages">
         <chakra.ul>
           {rest.map(({ to, label, icon: Icon }) => (
-            <chakra.li key={to} borderBottom="1px solid">
+            <chakra.li key={to} borderBottom="hairline">
               <RowLink to={to}>
                 <Icon />
                 {label}

@@ -48,7 +48,7 @@ const FindButton = chakra('button', {
     width: 'full',
     px: '2',
     mb: '3',
-    border: '1px solid',
+    border: 'hairline',
     borderColor: 'border.emphasized',
     borderRadius: 'md',
     bg: 'bg.panel',
@@ -72,7 +72,7 @@ export function Rail({ session, onFind }: RailProps) {
       top="0"
       height="screen"
       overflowY="auto"
-      borderRight="1px solid"
+      borderRight="hairline"
       px="3"
       pt="6"
       pb="4"
@@ -128,7 +128,7 @@ const AccountLink = chakra(NavLink, {
 
 function PersonLink({ session }: { session: Session }) {
   return (
-    <Box mt="auto" pt="2" borderTop="1px solid">
+    <Box mt="auto" pt="2" borderTop="hairline">
       <AccountLink to={paths.account}>
         <Flex
           boxSize="8"

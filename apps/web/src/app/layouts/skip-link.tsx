@@ -11,7 +11,7 @@ const Anchor = chakra('a', {
     bg: 'bg.panel',
     color: 'brand.fg',
     fontWeight: 'semibold',
-    border: '1px solid',
+    border: 'hairline',
     borderColor: 'border.emphasized',
     borderRadius: 'md',
     _focusVisible: { top: '4' },
