@@ -73,6 +73,7 @@ describe('the exports of recipe-model', () => {
       'nearestShowable',
       'nextCouponState',
       'nextRevisionState',
+      'panelProblems',
       'parameterClassOf',
       'rangesOverlap',
       'roleAtLeast',

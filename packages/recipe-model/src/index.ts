@@ -20,6 +20,7 @@ export { runOrder } from './grid/run-order';
 export { emptyPanelFor } from './panel/empty-panel';
 export { acceptEntered, type Entry, type EntryContext, type EntryRefusal, enterValue } from './panel/enter-value';
 export type { Panel, PanelField } from './panel/panel';
+export { type PanelProblem, panelProblems } from './panel/panel-problems';
 export { showNumber } from './panel/show-number';
 export { type ShownValue, showValue } from './panel/show-value';
 export { isShowable, nearestShowable, roundToPanel } from './panel/showable';

@@ -40,7 +40,10 @@ describe('enterValue', () => {
         { value: 850, unit: 'lpi' },
       ],
     });
-    expect(enterValue(DENSITY, '0.03 mm')).toMatchObject({ reason: 'panel cannot show', nearest: [{ value: 840 }, { value: 850 }] });
+    expect(enterValue(DENSITY, '0.03 mm')).toMatchObject({
+      message: 'Lines: the panel cannot show 0.03 mm (846.667 lines/in). Nearest that it can: 840 lines/in or 850 lines/in.',
+      nearest: [{ value: 840 }, { value: 850 }],
+    });
     expect(enterValue(SPACING, '0.0302')).toMatchObject({ nearest: [{ value: 0.03 }, { value: 0.0305 }] });
     expect(enterValue(WIDTH, '25')).toMatchObject({ nearest: [{ value: 20 }, { value: 30 }] });
   });
@@ -75,12 +78,20 @@ describe('enterValue', () => {
   it('turns pulses per inch into a frequency only at a scan speed', () => {
     const field: PanelField = { parameter: 'frequencyKhz', label: 'Pulses', unit: 'ppi', minimum: 10, maximum: 5000, step: 10 };
     expect(enterValue(field, '500', { speedMmPerS: 254 })).toMatchObject({ value: { physical: 5 } });
-    expect(enterValue(field, '500')).toMatchObject({ reason: 'not convertible', message: expect.stringContaining('scan speed') });
+    expect(enterValue(field, '500')).toMatchObject({
+      reason: 'not convertible',
+      message: 'Pulses: pulses per inch need the scan speed. Set the speed first.',
+    });
   });
 
   it('says so where a percent has no range', () => {
     const field: PanelField = { parameter: 'speedMmPerS', label: 'Speed', unit: 'percentFromZero' };
-    expect(enterValue(field, '50')).toMatchObject({ reason: 'not convertible', message: expect.stringContaining('rangeHigh is missing') });
+    expect(enterValue(field, '50')).toMatchObject({ reason: 'not convertible', message: expect.stringContaining('Complete the field') });
+    const power: PanelField = { parameter: 'powerPercent', label: 'Power', unit: 'percentFromZero' };
+    expect(enterValue(power, '12 W')).toMatchObject({
+      reason: 'not convertible',
+      message: 'Power cannot be turned from watts into what this panel shows. Type it in percent of range, from zero.',
+    });
   });
 
   it('suggests only values that it then accepts', () => {

@@ -6,6 +6,9 @@ import { panelScale } from './panel-scale';
 import { showNumber } from './show-number';
 import { isShowable, nearestShowable } from './showable';
 
+/** Digits of a converted number in a message; enough to recognise it. */
+const CONVERTED_DIGITS = 6;
+
 export type EntryContext = {
   decimalSign?: DecimalSign;
   /** Scan speed of the same setting: pulses per inch need it. */
@@ -62,11 +65,11 @@ export function acceptEntered(field: PanelField, entered: EnteredValue, context:
   try {
     const physical = physicalValue(entered.value, panelScale(field, entered.unit, context.speedMmPerS));
     const shown = entered.unit === field.unit ? entered.value : panelValue(physical, panelScale(field, field.unit, context.speedMmPerS));
-    if (!isShowable(field, shown)) return cannotShow(field, shown, context.decimalSign);
+    if (!isShowable(field, shown)) return cannotShow(field, { shown, entered }, context.decimalSign);
     return { kind: 'accepted', value: { entered: { value: entered.value, unit: entered.unit }, physical } };
   } catch (error) {
     if (!(error instanceof RangeError)) throw error;
-    return refused('not convertible', `${field.label} cannot be converted: ${error.message}.`);
+    return refused('not convertible', missingWords(field, entered.unit, context));
   }
 }
 
@@ -84,15 +87,30 @@ function impossible(field: PanelField, value: number, why: string): EntryRefusal
   return { ...refused('impossible', `${field.label} ${why}.${nearestWords(nearest)}`), nearest };
 }
 
-function cannotShow(field: PanelField, shown: number, decimalSign?: DecimalSign): EntryRefusal {
+function cannotShow(
+  field: PanelField,
+  { shown, entered }: { shown: number; entered: EnteredValue },
+  decimalSign?: DecimalSign,
+): EntryRefusal {
   const nearest = nearestShowable(field, shown).map((value) => ({ value, unit: field.unit }));
-  const symbol = PANEL_UNITS[field.unit].symbol;
-  const wanted = `${showNumber(shown, decimalSign)} ${symbol}`;
+  const typed = `${showNumber(entered.value, decimalSign)} ${PANEL_UNITS[entered.unit].symbol}`;
+  const here = `${showNumber(Number(shown.toPrecision(CONVERTED_DIGITS)), decimalSign)} ${PANEL_UNITS[field.unit].symbol}`;
+  const wanted = entered.unit === field.unit ? typed : `${typed} (${here})`;
   const limits = limitWords(field, shown, decimalSign);
   return {
     ...refused('panel cannot show', `${field.label}: the panel cannot show ${wanted}.${limits}${nearestWords(nearest, decimalSign)}`),
     nearest,
   };
+}
+
+/** Why a unit has no physical value here, and what to do about it. */
+function missingWords(field: PanelField, typedUnit: PanelUnit, { speedMmPerS }: EntryContext): string {
+  const isPulseDensity = typedUnit === 'ppi' || field.unit === 'ppi';
+  if (isPulseDensity && speedMmPerS === undefined) return `${field.label}: pulses per inch need the scan speed. Set the speed first.`;
+  if (typedUnit !== field.unit) {
+    return `${field.label} cannot be turned from ${PANEL_UNITS[typedUnit].label} into what this panel shows. Type it in ${PANEL_UNITS[field.unit].label}.`;
+  }
+  return `${field.label}: the machine’s panel does not say which range ${PANEL_UNITS[field.unit].label} belong to. Complete the field on the machine’s page.`;
 }
 
 function limitWords(field: PanelField, shown: number, decimalSign?: DecimalSign): string {
