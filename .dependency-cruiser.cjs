@@ -10,7 +10,6 @@ const ROWS = [
   ['members'],
   ['auth'],
   ['machines', 'lenses', 'materials', 'photos'],
-  ['photos'],
   ['coupons'],
   ['recipes'],
   ['sign-offs'],
