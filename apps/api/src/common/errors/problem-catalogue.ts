@@ -44,6 +44,12 @@ export const PROBLEMS: Readonly<Record<string, ProblemText>> = {
     'The address cannot be used for a new shop',
     'Sign in with it, or reset its password, or use another address.',
   ),
+  'coupon-sealed': problem(
+    409,
+    'The coupon is sealed',
+    'A sealed coupon and its photos never change. Add a correction, or mark a new coupon.',
+  ),
+  'photo-not-ready': problem(409, 'The photo is not ready', 'Wait until it is processed. A refused photo says what to do instead.'),
   'stale-version': problem(
     412,
     'Somebody changed this in the meantime',
@@ -51,6 +57,16 @@ export const PROBLEMS: Readonly<Record<string, ProblemText>> = {
   ),
   'too-large': problem(413, 'This is too large', 'Send less at once. The limits are 256 kB for data and 25 MB for a photo.'),
   'unsupported-type': problem(415, 'This kind of content is not accepted', 'Send JSON, or a photo as form data where a photo is expected.'),
+  'unsupported-photo': problem(
+    415,
+    'This is not a photo that can be kept',
+    'Send a JPEG, PNG or WebP picture, as form data with one field named file.',
+  ),
+  'heic-photo': problem(
+    415,
+    'HEIC photos cannot be opened here',
+    'Set the phone’s camera to save JPEG and take the photo again, or open it on the phone and share or export it as JPEG.',
+  ),
   'invalid-fields': problem(422, 'Some fields need another look', 'Each entry of errors names one field and says how to put it right.'),
   'idempotency-key-reused': problem(422, 'This Idempotency-Key belongs to another request', 'Use a new key for a new act.'),
   'version-required': problem(428, 'Say which version you are changing', 'Edits carry the header If-Match with the ETag that was read.'),
@@ -61,6 +77,11 @@ export const PROBLEMS: Readonly<Record<string, ProblemText>> = {
     'It was written down under the id in instance. Try again; tell the id to whoever runs this server.',
   ),
   'try-again': problem(503, 'Too busy at the moment', 'Nothing was changed. Try again after the time named in Retry-After.'),
+  'storage-unavailable': problem(
+    503,
+    'Photos cannot be stored or read at the moment',
+    'Everything else works. Try the photo again after the time named in Retry-After.',
+  ),
   'took-too-long': problem(
     503,
     'This took too long',

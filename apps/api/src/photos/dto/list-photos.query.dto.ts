@@ -1,0 +1,3 @@
+import { PageQuery } from '../../common/pagination/page';
+
+export class ListPhotosQuery extends PageQuery {}
