@@ -26,11 +26,13 @@ function plan(patch) {
   return patch
     .split(/^--- .*\n/m)
     .slice(1)
-    .map((section) => {
+    .flatMap((section) => {
       const target = /^\+\+\+ b\/(.+)\n/.exec(section)?.[1];
       if (!target) throw new Error('A patch has a section without a file name.');
       const path = join(driverFolder, target);
-      return { path, text: patched(readFileSync(path, 'utf8'), hunksOf(section), target) };
+      const original = readFileSync(path, 'utf8');
+      const text = patched(original, hunksOf(section), target);
+      return text === original ? [] : [{ path, text }];
     });
 }
 

@@ -1,5 +1,5 @@
 // npm start: everything a fresh clone needs, then the product on one port. Ctrl-C stops it all; the next start finds its data.
-import { existsSync, mkdirSync } from 'node:fs';
+import { existsSync, mkdirSync, statSync } from 'node:fs';
 import { createServer } from 'node:net';
 import { join } from 'node:path';
 import { freePort, usableFolder } from '../../../db/postgres/cluster.mjs';
@@ -33,15 +33,15 @@ try {
 async function start() {
   requireNode();
   if (!Number.isInteger(port) || port < 1 || port > 65_535) throw new Error('PORT must be a whole number from 1 to 65535.');
-  await requireFreePort();
-  ensurePackages(say);
   ensurePostgres(say);
-  buildWhenChanged(say);
-
   const folder = openDataFolder();
   const children = new Children(folder);
-  children.claim();
+  await children.claim();
   running.children = children;
+  await requireFreePort();
+  ensurePackages(say);
+  buildWhenChanged(say);
+
   const secrets = loadSecrets(folder);
   const { cluster, urls } = await openDatabase({ folder, secrets });
   running.cluster = cluster;
@@ -62,6 +62,7 @@ function openDataFolder() {
   if (reason) say(`Note: ${reason}`);
   const folder = reason ? dir : join(dir, '..');
   mkdirSync(folder, { recursive: true });
+  if (statSync(folder).uid !== process.getuid?.()) throw new Error(`${folder} belongs to somebody else; choose another PROOFPLATE_DATA.`);
   return folder;
 }
 

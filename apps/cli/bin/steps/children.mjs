@@ -14,10 +14,11 @@ export class Children {
   }
 
   /** Refuses a second start on the same data; ends what a killed start left behind. */
-  claim() {
+  async claim() {
     const left = existsSync(this.record) ? JSON.parse(readFileSync(this.record, 'utf8')) : { starter: 0, children: [] };
     if (isOurs(left.starter)) throw new Error(`Proofplate is running already on this data (process ${left.starter}).`);
     for (const pid of left.children.filter(isOurs)) process.kill(pid, 'SIGKILL');
+    while (left.children.some(isOurs)) await new Promise((resolve) => setTimeout(resolve, 50));
     this.#write();
   }
 
