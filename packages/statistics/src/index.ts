@@ -1,1 +1,2 @@
 export { mean } from './descriptive/mean';
+export { leastSquares } from './linalg/least-squares';
