@@ -40,3 +40,25 @@ export function expectReference(name: string, key: string, compute: (inputs: Num
     },
   );
 }
+
+/** One test for each reference record of `name`: every key it states must come out, lists element by element. */
+export function expectReferences<Inputs>(name: string, compute: (inputs: Inputs) => Readonly<Record<string, unknown>>): void {
+  const records = referenceRecords<Inputs, Readonly<Record<string, unknown>>>(name);
+  it.each(records.map((record) => [JSON.stringify(record.inputs), record] as const))(
+    'gives the reference numbers for %s',
+    (_inputs, record) => {
+      const actual = compute(record.inputs);
+      for (const [key, expected] of Object.entries(record.expected)) {
+        if (typeof expected === 'number') expectWithin(Number(actual[key]), expected, record.tolerance.rel ?? 0);
+        else if (Array.isArray(expected)) expectListWithin(actual[key], expected, record.tolerance.rel ?? 0);
+        else expect(actual[key]).toBe(expected);
+      }
+    },
+  );
+}
+
+function expectListWithin(actual: unknown, expected: readonly number[], relative: number): void {
+  if (!Array.isArray(actual)) throw new Error('a list is expected');
+  expect(actual).toHaveLength(expected.length);
+  for (const [index, value] of expected.entries()) expectWithin(Number(actual[index]), value, relative);
+}
