@@ -1,9 +1,11 @@
 import { BEAM } from './entries/beam';
 import { CALIBRATION } from './entries/calibration';
+import { CAUSTIC } from './entries/caustic';
 import { PULSES } from './entries/pulses';
 import { SCANNING } from './entries/scanning';
+import { TRANSFER } from './entries/transfer';
 import { UNITS } from './entries/units';
 import type { FormulaEntry } from './formula-entry';
 
 /** Every formula that the packages can be checked against. */
-export const FORMULAS: readonly FormulaEntry[] = [...BEAM, ...PULSES, ...SCANNING, ...CALIBRATION, ...UNITS];
+export const FORMULAS: readonly FormulaEntry[] = [...BEAM, ...CAUSTIC, ...PULSES, ...SCANNING, ...TRANSFER, ...CALIBRATION, ...UNITS];
