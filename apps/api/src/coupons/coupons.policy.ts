@@ -1,0 +1,27 @@
+import { type CouponState, roleAtLeast } from '@proofplate/recipe-model';
+import type { Actor } from '../common/actor';
+
+export type CouponActionName =
+  | 'mark'
+  | 'photograph'
+  | 'record-criteria'
+  | 'rate'
+  | 'measure'
+  | 'inspect'
+  | 'seal'
+  | 'correct'
+  | 'draft-recipe'
+  | 'plan-next';
+
+const ALWAYS: readonly CouponActionName[] = ['plan-next'];
+const BY_STATE: Readonly<Record<CouponState, readonly CouponActionName[]>> = {
+  planned: ['mark', 'record-criteria'],
+  marked: ['photograph', 'record-criteria', 'rate', 'measure', 'inspect', 'draft-recipe'],
+  inspected: ['photograph', 'rate', 'measure', 'seal', 'draft-recipe'],
+  sealed: ['correct', 'draft-recipe'],
+};
+
+/** What the member may do with a coupon. */
+export function couponActions(actor: Pick<Actor, 'role'>, coupon: { readonly state: CouponState }): CouponActionName[] {
+  return roleAtLeast(actor.role, 'operator') ? [...BY_STATE[coupon.state], ...ALWAYS] : [];
+}

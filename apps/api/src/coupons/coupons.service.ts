@@ -1,0 +1,38 @@
+import { Injectable } from '@nestjs/common';
+import type { Actor } from '../common/actor';
+import { type Tx, UnitOfWork } from '../database/unit-of-work';
+import { CouponNotFoundError } from './coupons.errors';
+import { toCouponDto, type WholeCoupon } from './coupons.mapper';
+import { CouponsRepository, type StoredCoupon } from './coupons.repository';
+import type { CouponDto } from './dto/coupon.dto';
+
+@Injectable()
+export class CouponsService {
+  constructor(
+    private readonly unitOfWork: UnitOfWork,
+    private readonly coupons: CouponsRepository,
+  ) {}
+
+  async get(actor: Actor, id: string): Promise<CouponDto> {
+    return this.unitOfWork.read(actor, (tx) => this.getDto(tx, actor, id));
+  }
+
+  /** The answer of every act on a coupon. @throws CouponNotFoundError also for another shop's coupon */
+  async getDto(tx: Tx, actor: Actor, id: string): Promise<CouponDto> {
+    return toCouponDto(await this.getWhole(tx, actor.shopId, id), actor);
+  }
+
+  /** A coupon with its grids and cells. @throws CouponNotFoundError also for another shop's coupon */
+  async getWhole(tx: Tx, shopId: string, id: string): Promise<WholeCoupon> {
+    const view = await this.coupons.findView(tx, shopId, id);
+    if (view === undefined) throw new CouponNotFoundError();
+    return { view, grids: await this.coupons.grids(tx, shopId, id), cells: await this.coupons.cells(tx, shopId, id) };
+  }
+
+  /** Locks the coupon before its parts. @throws CouponNotFoundError also for another shop's coupon */
+  async lock(tx: Tx, shopId: string, id: string): Promise<StoredCoupon> {
+    const row = await this.coupons.lock(tx, shopId, id);
+    if (row === undefined) throw new CouponNotFoundError();
+    return row;
+  }
+}
