@@ -8,7 +8,10 @@ export type Dose = { readonly value: number; readonly missingBecause: null } | {
  *
  * @param unknownFields fields of a plate burnt earlier that nobody knows any more
  */
-export function cellDose({ values, fill, power }: ParameterSet, unknownFields: readonly string[] = []): Dose {
+export function cellDose(
+  { values, fill, power }: Pick<ParameterSet, 'values' | 'fill' | 'power'>,
+  unknownFields: readonly string[] = [],
+): Dose {
   if (unknownFields.includes('fill')) return absent('It is not known how the cells were filled.');
   if (fill === 'outline') return absent('Outline only: no area is filled.');
   if (values.wobbleDiameterUm !== undefined) return absent('Wobble: the spot travels farther than the scan speed says.');

@@ -63,17 +63,14 @@ export type CouponView = {
 };
 
 const sameShop = coupon.shopId;
+/** A cursor carries milliseconds, so the order must not be finer than that. */
+export const createdToTheMs = sql`date_trunc('milliseconds', ${coupon.createdAt})`;
 
 @Injectable()
 export class CouponsRepository {
   async findView(tx: Tx, shopId: string, id: string): Promise<CouponView | undefined> {
     const [view] = await this.views(tx, and(eq(coupon.shopId, shopId), eq(coupon.id, id)), 1);
     return view;
-  }
-
-  /** Newest first. */
-  async listViews(tx: Tx, isWanted: SQL | undefined, limit: number): Promise<CouponView[]> {
-    return this.views(tx, isWanted, limit);
   }
 
   async grids(tx: Tx, shopId: string, couponId: string): Promise<StoredGrid[]> {
@@ -106,7 +103,8 @@ export class CouponsRepository {
     return row === undefined ? undefined : toStoredCoupon(row);
   }
 
-  private async views(tx: Tx, isWanted: SQL | undefined, limit: number): Promise<CouponView[]> {
+  /** Coupons with all that they name, newest first. The condition must hold the shop. */
+  async views(tx: Tx, isWanted: SQL | undefined, limit: number): Promise<CouponView[]> {
     const rows = await tx
       .select({
         coupon,
@@ -155,7 +153,7 @@ export class CouponsRepository {
       .leftJoin(inspector, and(eq(inspector.shopId, sameShop), eq(inspector.id, coupon.inspectedBy)))
       .leftJoin(sealer, and(eq(sealer.shopId, sameShop), eq(sealer.id, coupon.sealedBy)))
       .where(isWanted)
-      .orderBy(sql`${coupon.createdAt} desc, ${coupon.id} desc`)
+      .orderBy(sql`${createdToTheMs} desc, ${coupon.id} desc`)
       .limit(limit);
     return rows.map(({ measuredSpotUm, ...row }) => ({
       ...row,
