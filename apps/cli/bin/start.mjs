@@ -129,6 +129,8 @@ function announce({ folder, fakes, signIns }) {
   if (signIns.length > 0) say('\nDemo sign-ins (an invented shop)');
   for (const { role, email, password } of signIns) say(`  ${role.padEnd(10)} ${email}  ${password}`);
   say('\nCtrl-C stops everything.');
+  // For a program that started this one, as the journeys of npm test do.
+  process.send?.({ origin, viewerUrl: fakes.viewerUrl, signIns, folder });
 }
 
 function fail(reason) {

@@ -29,12 +29,12 @@ export { ensurePostgres };
 
 /** Path of a Chromium, installed first when it is missing. */
 export function ensureChromium(say) {
-  const find = () => [process.env.CHROMIUM, ...CHROMIUM_PATHS].find((path) => path && existsSync(path));
+  const find = () => [process.env.CHROMIUM_BIN, ...CHROMIUM_PATHS].find((path) => path && existsSync(path));
   const present = find();
   if (present) return present;
   installDebianPackages(['chromium'], say);
   const installed = find();
-  if (!installed) throw new Error('Chromium is not installed: apt-get install chromium (or set CHROMIUM to its path).');
+  if (!installed) throw new Error('Chromium is not installed: apt-get install chromium (or set CHROMIUM_BIN to its path).');
   return installed;
 }
 
