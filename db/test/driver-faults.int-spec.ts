@@ -64,9 +64,9 @@ describe.each(BUILDS_AND_POOLS)('a dying connection, $build build, pool of $pool
 
 describe.each(BUILDS)('a killed postmaster under writers, %s build', (build) => {
   it('loses no acknowledged row, leaves none half-written, and every writer works again after the restart', async () => {
-    const parent = mkdtempSync(join(tmpdir(), 'proofplate-kill-'));
+    const folder = mkdtempSync(join(tmpdir(), 'proofplate-kill-'));
     try {
-      const figures = await runFault('killed-postmaster', [build, join(parent, 'cluster'), 8, POSTMASTER_KILLS]);
+      const figures = await runFault('killed-postmaster', [build, folder, 8, POSTMASTER_KILLS]);
 
       expect(figures).toMatchObject({
         writersThatRecovered: WRITERS * POSTMASTER_KILLS,
@@ -77,7 +77,7 @@ describe.each(BUILDS)('a killed postmaster under writers, %s build', (build) => 
       });
       expect(figures.acknowledged).toBeGreaterThan(0);
     } finally {
-      rmSync(parent, { recursive: true, force: true });
+      rmSync(folder, { recursive: true, force: true });
     }
   });
 });

@@ -19,7 +19,12 @@ let cluster;
 let pool;
 await runProgram(async () => {
   cluster = await startCluster({ dir: folder, durable: true, superuserPassword: PASSWORD });
-  pool = await openPool({ build, url: cluster.url(), max: Number(poolSize) });
+  try {
+    pool = await openPool({ build, url: cluster.url(), max: Number(poolSize) 
+  } finally {
+    cluster.stop('immediate');
+  }
+});
   await pool`create table ledger (id bigint, half int)`;
   for (let repeat = 0; repeat < Number(repeats); repeat += 1) await oneRepeat();
   const verdict = await compareWithStored();
