@@ -185,6 +185,18 @@ describe('photos', () => {
     expect(await received()).toEqual([]);
   });
 
+  it('that are refused half-way leave no connection hanging', async () => {
+    const listening = await startPhotoApp(app.get(Env));
+    await listening.listen(0, '127.0.0.1');
+    const form = new FormData();
+    form.set('file', new Blob([Buffer.from('<!doctype html>'), Buffer.alloc(8_000_000)]), 'plate.jpg');
+    const url = `${await listening.getUrl()}/api/coupons/${shop.couponId}/photos`;
+    const answer = await fetch(url, { method: 'POST', body: form, headers: calledBy(ann) });
+    expect([answer.status, await answer.json()]).toEqual([415, expect.objectContaining({ type: '/problems/unsupported-photo' })]);
+    // closing waits for open requests, and jest for closing
+    await listening.close();
+  });
+
   it('refuse a request without a file', async () => {
     const url = `/api/coupons/${shop.couponId}/photos`;
     const json = await app.inject({ method: 'POST', url, payload: { file: 'x' }, headers: calledBy(ann) });

@@ -78,5 +78,21 @@ async function receive(request: FastifyRequest): Promise<ReceivedFile> {
   if (Number(request.headers['content-length']) > UPLOAD_LIMIT_BYTES + MULTIPART_OVERHEAD_BYTES) throw new PhotoTooLargeError();
   const part = await request.file();
   if (part === undefined) throw new PhotoFileMissingError('Choose a photo to send.');
-  return receivePhotoFile(part.file, () => part.file.truncated);
+  try {
+    return await receivePhotoFile(part.file, () => part.file.truncated);
+  } catch (error) {
+    passOverRest(request);
+    throw error;
+  }
+}
+
+/** Half a request left unread would hold the connection, and most clients read no answer before they have sent all: so up to the limit is read away. */
+function passOverRest({ raw }: FastifyRequest): void {
+  let leftBytes = UPLOAD_LIMIT_BYTES + MULTIPART_OVERHEAD_BYTES;
+  raw.unpipe();
+  raw.on('data', (chunk: Buffer) => {
+    leftBytes -= chunk.length;
+    if (leftBytes < 0) raw.destroy();
+  });
+  raw.resume();
 }
