@@ -20,16 +20,13 @@ let pool;
 await runProgram(async () => {
   cluster = await startCluster({ dir: folder, durable: true, superuserPassword: PASSWORD });
   try {
-    pool = await openPool({ build, url: cluster.url(), max: Number(poolSize) 
+    pool = await openPool({ build, url: cluster.url(), max: Number(poolSize) });
+    await pool`create table ledger (id bigint, half int)`;
+    for (let repeat = 0; repeat < Number(repeats); repeat += 1) await oneRepeat();
+    return { ...figures, ...(await compareWithStored()), uncaught };
   } finally {
     cluster.stop('immediate');
   }
-});
-  await pool`create table ledger (id bigint, half int)`;
-  for (let repeat = 0; repeat < Number(repeats); repeat += 1) await oneRepeat();
-  const verdict = await compareWithStored();
-  cluster.stop('immediate');
-  return { ...figures, ...verdict, uncaught };
 });
 
 async function compareWithStored() {
