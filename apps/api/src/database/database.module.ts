@@ -2,7 +2,6 @@ import { Global, Inject, Injectable, Module, type OnApplicationShutdown } from '
 import { createDb, type DbHandle } from '@proofplate/db';
 import { Env } from '../config/env.validation';
 import { Codes } from './codes.repository';
-import { Outbox } from './outbox.repository';
 import { DATABASE, UnitOfWork } from './unit-of-work';
 
 /** Closes the pool after the last request has been answered. */
@@ -22,8 +21,7 @@ class DatabaseShutdown implements OnApplicationShutdown {
     DatabaseShutdown,
     UnitOfWork,
     Codes,
-    Outbox,
   ],
-  exports: [DATABASE, UnitOfWork, Codes, Outbox],
+  exports: [DATABASE, UnitOfWork, Codes],
 })
 export class DatabaseModule {}

@@ -12,6 +12,9 @@ import { claimKey, keepAnswer } from './idempotency.repository';
 export type { Actor } from '../common/actor';
 export type { Tx };
 
+/** What can run one statement: a transaction, or the pool outside of one. */
+export type Executor = Pick<Tx, 'execute'>;
+
 /** Injection token of the pool. */
 export const DATABASE = Symbol('database');
 
@@ -46,6 +49,14 @@ export class UnitOfWork {
   /** A use case that only reads. */
   async read<T>(actor: Tenant, work: (tx: Tx) => Promise<T>, options: Omit<RunOptions, 'readOnly'> = {}): Promise<T> {
     return this.run(actor, work, { ...options, readOnly: true });
+  }
+
+  /**
+   * For what is known before any shop is: each statement stands for itself and tables of shops fail closed. The functions of accounts
+   * are whole acts, so none of them needs a transaction around it.
+   */
+  async outsideShop<T>(work: (db: Executor) => Promise<T>): Promise<T> {
+    return work(this.handle.db);
   }
 
   private async transact<T>(actor: Tenant, work: (tx: Tx) => Promise<T>, options: RunOptions): Promise<T> {

@@ -20,6 +20,7 @@ export const PROBLEMS: Readonly<Record<string, ProblemText>> = {
   'session-over': problem(401, 'This session is over', 'It was ended, replaced or has run out. Sign in again.'),
   'not-permitted': problem(403, 'Your role does not allow this', 'Ask an owner of the shop for the act or for another role.'),
   'wrong-origin': problem(403, 'The request came from another site', 'Session calls are accepted from the pages of this server only.'),
+  'no-shop': problem(403, 'You are in no shop', 'Ask for an invitation, or sign up a shop of your own.'),
   'password-not-confirmed': problem(403, 'The password is not right', 'A signed act needs the password of the person who signs.'),
   'not-found': problem(
     404,
@@ -50,6 +51,16 @@ export const PROBLEMS: Readonly<Record<string, ProblemText>> = {
     'A sealed coupon and its photos never change. Add a correction, or mark a new coupon.',
   ),
   'photo-not-ready': problem(409, 'The photo is not ready', 'Wait until it is processed. A refused photo says what to do instead.'),
+  'never-mark': problem(
+    409,
+    'This must not be marked',
+    'A caution of the shop says never. The answer carries it with its reason and source. Choose another material, or ask the laser safety officer.',
+  ),
+  'caution-loosened': problem(
+    409,
+    'A caution only gets tighter',
+    'Nobody loosens or removes a caution. Add one of the shop’s own beside it.',
+  ),
   'stale-version': problem(
     412,
     'Somebody changed this in the meantime',

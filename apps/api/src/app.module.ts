@@ -1,0 +1,39 @@
+import { type DynamicModule, Module } from '@nestjs/common';
+import { LoggerModule } from 'nestjs-pino';
+import { AuthModule } from './auth/auth.module';
+import { logSettings } from './common/http/logging';
+import { ProblemsModule } from './common/problems.module';
+import { ConfigModule } from './config/config.module';
+import { Env } from './config/env.validation';
+import { DatabaseModule } from './database/database.module';
+import { HealthModule } from './health/health.module';
+import { LedgerModule } from './ledger/ledger.module';
+import { LensesModule } from './lenses/lenses.module';
+import { MachinesModule } from './machines/machines.module';
+import { MaterialsModule } from './materials/materials.module';
+import { MembersModule } from './members/members.module';
+import { ShopsModule } from './shops/shops.module';
+
+/** Every module of the api, lowest row of the import law first. */
+@Module({})
+export class AppModule {
+  static register(env: Env): DynamicModule {
+    return {
+      module: AppModule,
+      imports: [
+        ConfigModule.register(env),
+        LoggerModule.forRootAsync({ inject: [Env], useFactory: logSettings }),
+        DatabaseModule,
+        ProblemsModule,
+        HealthModule,
+        LedgerModule,
+        ShopsModule,
+        MembersModule,
+        AuthModule,
+        MachinesModule,
+        LensesModule,
+        MaterialsModule,
+      ],
+    };
+  }
+}

@@ -1,0 +1,18 @@
+import { Module } from '@nestjs/common';
+import { LedgerModule } from '../ledger/ledger.module';
+import { MailModule } from '../mail/mail.module';
+import { ShopsModule } from '../shops/shops.module';
+import { InvitationsController } from './invitations.controller';
+import { InvitationsRepository } from './invitations.repository';
+import { InvitationsService } from './invitations.service';
+import { MembersController } from './members.controller';
+import { MembersRepository } from './members.repository';
+import { MembersService } from './members.service';
+
+@Module({
+  imports: [LedgerModule, MailModule, ShopsModule],
+  controllers: [MembersController, InvitationsController],
+  providers: [MembersService, MembersRepository, InvitationsService, InvitationsRepository],
+  exports: [MembersService, InvitationsService],
+})
+export class MembersModule {}

@@ -1,0 +1,100 @@
+import { Injectable } from '@nestjs/common';
+import type { Role } from '@proofplate/recipe-model';
+import { uuidv7 } from 'uuidv7';
+import { NotFoundError, StaleError } from '../common/errors/domain-error';
+import { decodeCursor, type Page, pageOf } from '../common/pagination/page';
+import { type Actor, type Tx, UnitOfWork } from '../database/unit-of-work';
+import { LedgerService } from '../ledger/ledger.service';
+import { ListMembersQuery } from './dto/list-members.query.dto';
+import { MemberDto } from './dto/member.dto';
+import { UpdateMemberDto } from './dto/update-member.dto';
+import { AlreadyMemberError, LastOwnerError } from './members.errors';
+import { roleOf, toMemberDto } from './members.mapper';
+import { type MemberRow, MembersRepository } from './members.repository';
+
+export type Joining = { readonly shopId: string; readonly personId: string; readonly role: Role; readonly printedName: string };
+
+@Injectable()
+export class MembersService {
+  constructor(
+    private readonly unitOfWork: UnitOfWork,
+    private readonly repository: MembersRepository,
+    private readonly ledger: LedgerService,
+  ) {}
+
+  /** Makes a person a member, or a removed member active again. @throws AlreadyMemberError for an active one */
+  async join(tx: Tx, joining: Joining): Promise<{ readonly id: string; readonly printedName: string; readonly role: Role }> {
+    const row = await this.repository.insertOrRestore(tx, { id: uuidv7(), ...joining });
+    if (row === undefined) throw new AlreadyMemberError();
+    return { id: row.id, printedName: row.printedName, role: roleOf(row.role) };
+  }
+
+  /** True when an active member has this address. */
+  async hasAddress(tx: Tx, shopId: string, email: string): Promise<boolean> {
+    const wanted = email.toLowerCase();
+    const memberIds = [...(await this.repository.addresses(tx))]
+      .filter(([, address]) => address.toLowerCase() === wanted)
+      .map(([id]) => id);
+    for (const id of memberIds) if ((await this.repository.find(tx, shopId, id))?.state === 'active') return true;
+    return false;
+  }
+
+  async list(actor: Actor, query: ListMembersQuery): Promise<Page<MemberDto>> {
+    const [name, id] = decodeCursor(query.cursor, ['string', 'string']) ?? [];
+    const after = typeof name === 'string' && typeof id === 'string' ? { after: [name, id] as const } : {};
+    return this.unitOfWork.read(actor, async (tx) => {
+      const rows = await this.repository.list(tx, actor.shopId, { state: query.state, ...after }, query.limit + 1);
+      const addresses = await this.repository.addresses(tx);
+      const item = ({ row }: (typeof rows)[number]) => toMemberDto(row, addresses.get(row.id), actor);
+      return pageOf(rows, query.limit, { item, cursor: ({ row, sortName }) => [sortName, row.id] });
+    });
+  }
+
+  async get(actor: Actor, id: string): Promise<MemberDto> {
+    return this.unitOfWork.read(actor, async (tx) => this.toDto(tx, actor, await this.getRow(tx, actor.shopId, id)));
+  }
+
+  async update(actor: Actor, id: string, version: number, dto: UpdateMemberDto): Promise<MemberDto> {
+    return this.unitOfWork.run(actor, async (tx) => {
+      const owners = await this.repository.lockOwners(tx, actor.shopId);
+      const before = await this.getActiveRow(tx, actor.shopId, id);
+      if (dto.role !== undefined && dto.role !== 'owner' && isLastOwner(owners, id)) throw new LastOwnerError();
+      const after = await this.repository.update(tx, { shopId: actor.shopId, id, version }, dto);
+      if (after === undefined) throw new StaleError(await this.toDto(tx, actor, before));
+      await this.ledger.record(tx, { actor, action: 'member.changed', ...subject(id), before: told(before), after: told(after) });
+      return this.toDto(tx, actor, after);
+    });
+  }
+
+  /** Ends the membership and, at once, every session in this shop. What the member did and signed stays. */
+  async remove(actor: Actor, id: string): Promise<void> {
+    await this.unitOfWork.run(actor, async (tx) => {
+      const owners = await this.repository.lockOwners(tx, actor.shopId);
+      const before = await this.getActiveRow(tx, actor.shopId, id);
+      if (isLastOwner(owners, id)) throw new LastOwnerError();
+      await this.repository.markRemoved(tx, actor.shopId, id);
+      await this.repository.endSessions(tx, id, 'member removed');
+      await this.ledger.record(tx, { actor, action: 'member.removed', ...subject(id), before: told(before) });
+    });
+  }
+
+  private async getRow(tx: Tx, shopId: string, id: string): Promise<MemberRow> {
+    const row = await this.repository.find(tx, shopId, id);
+    if (row === undefined) throw new NotFoundError();
+    return row;
+  }
+
+  private async getActiveRow(tx: Tx, shopId: string, id: string): Promise<MemberRow> {
+    const row = await this.getRow(tx, shopId, id);
+    if (row.state !== 'active') throw new NotFoundError('This member was removed. Invite the person again if they come back.');
+    return row;
+  }
+
+  private async toDto(tx: Tx, actor: Actor, row: MemberRow): Promise<MemberDto> {
+    return toMemberDto(row, (await this.repository.addresses(tx)).get(row.id), actor);
+  }
+}
+
+const subject = (id: string) => ({ subjectType: 'member', subjectId: id });
+const told = ({ role, printedName }: MemberRow) => ({ role, printedName });
+const isLastOwner = (owners: readonly string[], id: string) => owners.length === 1 && owners[0] === id;
