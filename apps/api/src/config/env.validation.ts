@@ -19,7 +19,7 @@ export class Env {
   /** PostgreSQL as the api's role: no owner, no bypass of row-level security. */
   @IsString() @MinLength(1) DATABASE_URL = 'postgres://proofplate_app@127.0.0.1:5432/proofplate';
   /** PostgreSQL as the queue owner's role: used by the worker process only. */
-  @IsString() @MinLength(1) WORKER_DATABASE_URL = 'postgres://proofplate_app@127.0.0.1:5432/proofplate';
+  @IsString() @MinLength(1) WORKER_DATABASE_URL = 'postgres://proofplate_worker@127.0.0.1:5432/proofplate';
   /** Connections that one api process may hold. */
   @Type(() => Number) @IsInt() @Min(1) @Max(100) DATABASE_POOL_SIZE = 10;
 
