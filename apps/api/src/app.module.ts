@@ -12,6 +12,7 @@ import { LensesModule } from './lenses/lenses.module';
 import { MachinesModule } from './machines/machines.module';
 import { MaterialsModule } from './materials/materials.module';
 import { MembersModule } from './members/members.module';
+import { PhotosModule } from './photos/photos.module';
 import { ShopsModule } from './shops/shops.module';
 
 /** Every module of the api, lowest row of the import law first. */
@@ -33,6 +34,7 @@ export class AppModule {
         MachinesModule,
         LensesModule,
         MaterialsModule,
+        PhotosModule,
       ],
     };
   }
