@@ -1,0 +1,5 @@
+import { PartialType } from '@nestjs/swagger';
+import { CreateLensDto } from './create-lens.dto';
+
+/** Only what is given changes. */
+export class UpdateLensDto extends PartialType(CreateLensDto) {}
