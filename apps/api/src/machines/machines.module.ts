@@ -1,0 +1,26 @@
+import { Module } from '@nestjs/common';
+import { LedgerModule } from '../ledger/ledger.module';
+import { CalibrationsController } from './calibrations.controller';
+import { CalibrationsRepository } from './calibrations.repository';
+import { CalibrationsService } from './calibrations.service';
+import { MachineLensesController } from './machine-lenses.controller';
+import { MachineLensesRepository } from './machine-lenses.repository';
+import { MachineLensesService } from './machine-lenses.service';
+import { MachinesController } from './machines.controller';
+import { MachinesRepository } from './machines.repository';
+import { MachinesService } from './machines.service';
+
+@Module({
+  imports: [LedgerModule],
+  controllers: [MachinesController, MachineLensesController, CalibrationsController],
+  providers: [
+    MachinesService,
+    MachineLensesService,
+    CalibrationsService,
+    MachinesRepository,
+    MachineLensesRepository,
+    CalibrationsRepository,
+  ],
+  exports: [MachinesService, MachineLensesService, CalibrationsService],
+})
+export class MachinesModule {}
