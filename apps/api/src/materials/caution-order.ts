@@ -1,0 +1,22 @@
+import { type Caution, type CautionScope, type CautionSubject, cautionsFor } from '@proofplate/recipe-model';
+
+/** The cautions for a piece of work: never first, then those that name its material, then the narrower before the general. */
+export function orderedCautionsFor(subject: CautionSubject, cautions: readonly Caution[]): Caution[] {
+  const byNarrowness = [...cautions].sort((a, b) => narrowness(b.appliesTo) - narrowness(a.appliesTo));
+  return cautionsFor(subject, byNarrowness);
+}
+
+/** Those of them that name the material or its family: what a list of materials shows in the row. */
+export function cautionsNaming(subject: CautionSubject, cautions: readonly Caution[]): Caution[] {
+  return orderedCautionsFor(
+    subject,
+    cautions.filter(({ appliesTo }) => namesMaterial(appliesTo)),
+  );
+}
+
+const namesMaterial = ({ families, materialIds }: CautionScope) => families !== undefined || materialIds !== undefined;
+
+function narrowness(scope: CautionScope): number {
+  const others = [scope.finishIds, scope.sourceKinds, scope.effectKeys, scope.roundPart].filter((condition) => condition !== undefined);
+  return (namesMaterial(scope) ? 10 : 0) + others.length;
+}

@@ -1,0 +1,35 @@
+import type { Caution } from '@proofplate/recipe-model';
+import { ConflictError, NotFoundError } from '../common/errors/domain-error';
+
+const NAMES = { material: 'material', finish: 'finish', effect: 'effect', group: 'group of materials', caution: 'caution' } as const;
+export type CatalogueKind = keyof typeof NAMES;
+
+export class NotInCatalogueError extends NotFoundError {
+  constructor(kind: CatalogueKind) {
+    super(`This ${NAMES[kind]} is not in the shop, or no longer. Go back to Materials.`);
+  }
+}
+
+export class ArchivedError extends ConflictError {
+  constructor(kind: CatalogueKind) {
+    super(`The ${NAMES[kind]} is archived. Restore it first.`);
+  }
+}
+
+/** A `never` caution applies: nothing is planned, drafted or run. Carries every such caution with its reason and source. */
+export class ForbiddenByCautionError extends ConflictError {
+  override readonly code = 'never-mark';
+  override readonly title = 'This must not be marked';
+
+  constructor(cautions: readonly Caution[]) {
+    const subjects = cautions.map(({ subject, source }) => `${subject} (${source})`).join(' ');
+    super(`${subjects} Choose another material, or ask the laser safety officer.`, {
+      cautions: cautions.map(({ id, subject, text, source }) => ({ id, subject, text, source })),
+    });
+  }
+}
+
+export class CautionLoosenedError extends ConflictError {
+  override readonly code = 'caution-loosened';
+  override readonly title = 'A caution only gets tighter';
+}
