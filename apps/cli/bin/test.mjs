@@ -35,7 +35,9 @@ async function runAll() {
 }
 
 async function gate(name, check) {
-  const problem = await check();
+  const problem = await Promise.resolve()
+    .then(check)
+    .catch((error) => String(error?.message ?? error));
   if (problem) throw new Error(`${problem}\n\nStopped at: ${name}`);
   count.passed += 1;
   say(`ok  ${name}  (${elapsedS()} s)`);

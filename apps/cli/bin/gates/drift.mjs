@@ -18,7 +18,10 @@ export function openApiDrift() {
     return `The api has changed and its client has not: run "npm run openapi" and commit\n${changed.map((path) => relative(CHECKOUT, path)).join('\n')}`;
   } finally {
     // A check leaves the working tree as it was.
-    for (const [index, text] of committed.entries()) if (text !== undefined) writeFileSync(API_FILES[index], text);
+    for (const [index, text] of committed.entries()) {
+      if (text === undefined) rmSync(API_FILES[index], { force: true });
+      else writeFileSync(API_FILES[index], text);
+    }
   }
 }
 

@@ -5,6 +5,8 @@ import { join } from 'node:path';
 import { CHECKOUT } from './checkout.mjs';
 
 const STOP_LIMIT_MS = 15_000;
+/** The S3 client announces the end of its support for Node 20 at every start; docs/dependencies.md says it once. */
+const NODE_OPTIONS = ['--disable-warning=NodeVersionSupportWarning'];
 
 export class Children {
   constructor(folder) {
@@ -24,7 +26,7 @@ export class Children {
 
   /** Starts a Node program; `onLoss` hears when it ends without being asked to. */
   run({ name, program, args = [], env = {}, onLoss }) {
-    const child = spawn(process.execPath, [join(CHECKOUT, program), ...args], {
+    const child = spawn(process.execPath, [...NODE_OPTIONS, join(CHECKOUT, program), ...args], {
       cwd: CHECKOUT,
       env: { ...process.env, ...env },
       detached: true,
