@@ -2,7 +2,7 @@ import { randomUUID } from 'node:crypto';
 import type { INestApplicationContext } from '@nestjs/common';
 import { NestFactory } from '@nestjs/core';
 import { createDb, type DbHandle } from '@proofplate/db';
-import { cloneDatabase, type TestDatabase } from '@proofplate/db/testing';
+import { cloneDatabase, type TestDatabase, testClusterUrl } from '@proofplate/db/testing';
 import postgres from 'postgres';
 import sharp from 'sharp';
 import { Env } from '../src/config/env.validation';
@@ -108,6 +108,24 @@ describe('the worker process', () => {
     expect(arrived('late@example.invalid')).toBe(false);
     await superuser`select graphile_worker.add_job('jobs.release-dead-locks')`;
     await until(() => arrived('late@example.invalid'));
+  });
+
+  it('goes on by itself after its database was away', async () => {
+    const { shopId } = await makePhotoShop(superuser);
+    const admin = postgres(testClusterUrl(), { max: 1 });
+    const workers = () =>
+      admin<{ pid: number }[]>`select pid from pg_stat_activity where datname = ${database.name} and usename = 'proofplate_worker'`;
+    try {
+      await unitOfWork.run({ shopId }, (tx) => outbox.add(tx, mailTo(shopId, 'before@example.invalid')));
+      await admin`alter database ${admin(database.name)} allow_connections false`;
+      await admin`select pg_terminate_backend(pid) from pg_stat_activity where datname = ${database.name} and usename = 'proofplate_worker'`;
+      await until(async () => (await workers()).length === 0);
+      await admin`alter database ${admin(database.name)} allow_connections true`;
+      await unitOfWork.run({ shopId }, (tx) => outbox.add(tx, mailTo(shopId, 'back@example.invalid')));
+      await until(() => sink.mails.some((mail) => [mail.to].flat()[0]?.text.includes('back@example.invalid')));
+    } finally {
+      await admin.end();
+    }
   });
 
   it('begins nothing more once it is told to stop', async () => {
