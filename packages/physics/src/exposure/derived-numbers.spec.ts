@@ -143,6 +143,12 @@ describe('derivedNumbers', () => {
     expect(valueFor(unknown, 'pulsePitch')).toBe(10);
   });
 
+  it('tells a number that the mode rules out from one that an input would bring', () => {
+    const bare = { ...continuous, spot: { unknownBecause: 'the spot was never measured' } };
+    expect(numberOf(bare, 'peakFluence')).toMatchObject({ missingBecause: 'continuous beam: there are no pulses', isRuledOutByMode: true });
+    expect(numberOf(bare, 'averageIrradiance')).toMatchObject({ missingBecause: 'the spot was never measured', isRuledOutByMode: false });
+  });
+
   it('flags pulses that merge and lines that leave gaps', () => {
     expect(numberOf({ ...pulsed, frequencyKhz: 10_000 }, 'gaussianPeakPower')).toHaveProperty(
       'outOfRange',

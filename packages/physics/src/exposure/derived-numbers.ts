@@ -17,8 +17,9 @@ import { spotNumbers } from './derived/spot-numbers';
  * @param mark  parameters, units in the names; each quantity is a number in the range of the function that uses it, or
  *              `{ unknownBecause }`. No frequency: continuous beam. Diameters are 1/e^2, power is at the workpiece.
  * @returns the same keys in the same order for every mark. A number that an unknown or the mode rules out has no value but
- *          `missingBecause`: pulse numbers of a continuous beam, areal numbers of an outline, numbers by scan speed with
- *          wobble. A number outside the validity of its formula carries `outOfRange`. The spot is the one at the focus offset.
+ *          `missingBecause`, and `isRuledOutByMode` when no input would bring it: pulse numbers of a continuous beam, areal
+ *          numbers of an outline, numbers by scan speed with wobble. A number outside the validity of its formula carries
+ *          `outOfRange`. The spot is the one at the focus offset.
  * @throws RangeError naming the argument and its value, if a known quantity is out of range
  * Valid as each entry's formula; see its source.
  * Source: docs/science/beam.md, pulses.md, scanning.md, marking-time.md

@@ -1,4 +1,4 @@
-import type { Quantity } from './mark-parameters';
+import type { Quantity, Unknown } from './mark-parameters';
 
 type Described = {
   readonly key: string;
@@ -18,11 +18,19 @@ export type PresentNumber = Described & {
   readonly outOfRange?: string;
 };
 
-export type AbsentNumber = Described & { readonly value?: undefined; readonly missingBecause: string };
+export type AbsentNumber = Described & {
+  readonly value?: undefined;
+  readonly missingBecause: string;
+  /** True when the number has no meaning in this mode; false when an input would bring it. */
+  readonly isRuledOutByMode: boolean;
+};
 
 export type DerivedNumber = PresentNumber | AbsentNumber;
 
-/** Computes a number when all its inputs are known; else says which ones are not, and why. */
+/**
+ * Computes a number when all its inputs are known; else says which ones are not, and why. A reason of the mode stands alone: with it no
+ * further input would help.
+ */
 export function derive<Name extends string>(
   described: Described,
   inputs: Readonly<Record<Name, Quantity>>,
@@ -31,27 +39,37 @@ export function derive<Name extends string>(
     readonly outOfRange?: (known: Readonly<Record<NoInfer<Name>, number>>) => string | undefined;
   },
 ): DerivedNumber {
-  const reasons = new Set<string>();
+  const unknowns: Unknown[] = [];
   const known: Partial<Record<Name, number>> = {};
   for (const name in inputs) {
     const quantity: Quantity = inputs[name];
     if (typeof quantity === 'number') known[name] = quantity;
-    else reasons.add(quantity.unknownBecause);
+    else unknowns.push(quantity);
   }
-  if (!isComplete(known, reasons)) return { ...described, missingBecause: [...reasons].join('; ') };
+  if (!isComplete(known, unknowns)) return absent(described, ...unknowns);
   const outOfRange = rule.outOfRange?.(known);
   return { ...described, value: rule.compute(known), inputs: known, ...(outOfRange === undefined ? {} : { outOfRange }) };
 }
 
-/** Without a reason every name has been filled in. */
+/** Without an unknown every name has been filled in. */
 function isComplete<Name extends string>(
   known: Partial<Record<Name, number>>,
-  reasons: ReadonlySet<string>,
+  unknowns: readonly Unknown[],
 ): known is Record<Name, number> {
-  return reasons.size === 0;
+  return unknowns.length === 0;
+}
+
+/** A number without a value, and why. */
+export function absent(described: Described, ...unknowns: readonly Unknown[]): AbsentNumber {
+  const byMode = unknowns.filter((unknown) => unknown.isRuledOutByMode === true);
+  const telling = byMode.length > 0 ? byMode : unknowns;
+  const reasons = new Set(telling.map((unknown) => unknown.unknownBecause));
+  return { ...described, missingBecause: [...reasons].join('; '), isRuledOutByMode: byMode.length > 0 };
 }
 
 /** A derived number as an input of the next one: its reason is handed on. */
 export function quantityOf(derived: DerivedNumber): Quantity {
-  return derived.missingBecause === undefined ? derived.value : { unknownBecause: derived.missingBecause };
+  return derived.missingBecause === undefined
+    ? derived.value
+    : { unknownBecause: derived.missingBecause, isRuledOutByMode: derived.isRuledOutByMode };
 }

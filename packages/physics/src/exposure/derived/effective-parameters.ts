@@ -1,5 +1,5 @@
 import { scansPerPass } from '../fill';
-import type { MarkParameters, Quantity } from './mark-parameters';
+import type { MarkParameters, Quantity, Unknown } from './mark-parameters';
 
 /** The parameters as the mode lets them count: what the mode has no meaning for carries the reason. */
 export type EffectiveParameters = {
@@ -20,10 +20,10 @@ export type EffectiveParameters = {
   readonly scans: Quantity;
 };
 
-const CONTINUOUS: Quantity = { unknownBecause: 'continuous beam: there are no pulses' };
-const PULSED: Quantity = { unknownBecause: 'pulsed beam: the peak irradiance of the pulse counts' };
-const OUTLINE: Quantity = { unknownBecause: 'outline only: no area is filled' };
-const WOBBLE: Quantity = { unknownBecause: 'wobble: the spot travels farther than the scan speed says' };
+const CONTINUOUS: Quantity = { unknownBecause: 'continuous beam: there are no pulses', isRuledOutByMode: true };
+const PULSED: Quantity = { unknownBecause: 'pulsed beam: the peak irradiance of the pulse counts', isRuledOutByMode: true };
+export const OUTLINE: Unknown = { unknownBecause: 'outline only: no area is filled', isRuledOutByMode: true };
+const WOBBLE: Quantity = { unknownBecause: 'wobble: the spot travels farther than the scan speed says', isRuledOutByMode: true };
 const NO_PULSE_WIDTH: Quantity = { unknownBecause: 'the pulse width is not given' };
 
 export function effectiveParameters(mark: MarkParameters): EffectiveParameters {

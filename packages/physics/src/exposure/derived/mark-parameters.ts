@@ -1,7 +1,11 @@
 import type { Fill } from '../fill';
 
 /** A quantity that is not known, with the reason a person can read: it is never replaced by zero. */
-export type Unknown = { readonly unknownBecause: string };
+export type Unknown = {
+  readonly unknownBecause: string;
+  /** True when the mode gives the quantity no meaning, so that nobody goes looking for it. */
+  readonly isRuledOutByMode?: boolean;
+};
 
 export type Quantity = number | Unknown;
 

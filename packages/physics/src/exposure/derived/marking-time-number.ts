@@ -1,5 +1,6 @@
 import { type FilledRectangle, filledRectangleTime } from '../filled-rectangle-time';
-import { type DerivedNumber, derive } from './derived-number';
+import { absent, type DerivedNumber, derive } from './derived-number';
+import { OUTLINE } from './effective-parameters';
 import type { MarkParameters, Quantity } from './mark-parameters';
 
 const DESCRIBED = {
@@ -12,8 +13,8 @@ const DESCRIBED = {
 /** Time of the rectangle given, with the overheads of the scan head. */
 export function markingTimeNumber(mark: MarkParameters): DerivedNumber {
   const { area, fill, speedMmPerS, lineSpacingUm, passes } = mark;
-  if (fill === 'outline') return { ...DESCRIBED, missingBecause: 'outline only: no area is filled' };
-  if (area === undefined) return { ...DESCRIBED, missingBecause: 'the size of the filled area is not given' };
+  if (fill === 'outline') return absent(DESCRIBED, OUTLINE);
+  if (area === undefined) return absent(DESCRIBED, { unknownBecause: 'the size of the filled area is not given' });
   const inputs: Record<Exclude<keyof FilledRectangle, 'fill'>, Quantity> = {
     widthMm: area.widthMm,
     heightMm: area.heightMm,

@@ -1,7 +1,7 @@
 import { focusedSpotDiameter } from '../../beam/focused-spot-diameter';
 import { rayleighLength } from '../../beam/rayleigh-length';
 import { spotDiameterAtOffset } from '../../beam/spot-diameter-at-offset';
-import { type DerivedNumber, derive, quantityOf } from './derived-number';
+import { absent, type DerivedNumber, derive, quantityOf } from './derived-number';
 import type { MarkSpot, Quantity } from './mark-parameters';
 
 const SOURCE = 'ISO 11146-1; docs/science/beam.md';
@@ -27,7 +27,7 @@ export function spotNumbers(spot: MarkSpot, focusOffsetMm: Quantity): SpotNumber
 
 function focalSpotOf(spot: MarkSpot): DerivedNumber {
   const described = { key: 'focalSpot', unit: 'µm', source: SOURCE };
-  if ('unknownBecause' in spot) return { ...described, formula: 'd0 = 4 M² λ f / (π D)', missingBecause: spot.unknownBecause };
+  if ('unknownBecause' in spot) return absent({ ...described, formula: 'd0 = 4 M² λ f / (π D)' }, spot);
   if ('spotDiameterUm' in spot) {
     const { spotDiameterUm } = spot;
     return { ...described, formula: 'd0 as measured', source: 'measured spot', value: spotDiameterUm, inputs: { spotDiameterUm } };
