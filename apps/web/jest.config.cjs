@@ -3,7 +3,7 @@ const { tsJest } = require('../cli/jest/projects.cjs');
 module.exports = {
   displayName: 'web',
   rootDir: __dirname,
-  testEnvironment: 'jest-environment-jsdom',
+  testEnvironment: '<rootDir>/src/testing/environment.cjs',
   testMatch: ['<rootDir>/src/**/*.spec.{ts,tsx}'],
   testEnvironmentOptions: { customExportConditions: ['@proofplate/source', 'browser', 'require', 'default'] },
   transform: tsJest('<rootDir>/tsconfig.jest.json'),

@@ -8,6 +8,9 @@ export const VIEWPORTS = {
 };
 export const COLOUR_SCHEMES = ['light', 'dark'];
 
+/** Fades of the controls after a change of mode (120 ms) are over by then. */
+const SETTLED_MS = 250;
+
 /**
  * Pictures of the page as it stands, in every size and both modes: `<folder>/<name>-<size>-<mode>.png`.
  * `prepare` runs before each picture, for pages that need a click to look their part.
@@ -21,6 +24,7 @@ export async function takeScreenshots(page, { name, folder, prepare, sizes = Obj
       await page.emulateMedia({ colorScheme });
       await prepare?.(page);
       await page.evaluate(() => document.fonts.ready);
+      await page.waitForTimeout(SETTLED_MS);
       const path = join(folder, `${name}-${size}-${colorScheme}.png`);
       await page.screenshot({ path, fullPage, animations: 'disabled' });
       files.push(path);

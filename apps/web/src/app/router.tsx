@@ -33,6 +33,8 @@ export const routes = [
               { path: paths.home, element: <Navigate to={paths.machine} replace /> },
               { path: paths.more, lazy: () => import('./layouts/more') },
               { path: paths.account, lazy: () => import('../routes/account') },
+              { path: paths.people, lazy: () => import('../routes/people') },
+              { path: paths.shopSettings, lazy: () => import('../routes/shop-settings') },
               { path: '*', Component: NotFoundPage },
             ],
           },

@@ -10,8 +10,8 @@ export type Column<T> = {
   /** Numbers stand at the right. */
   align?: 'start' | 'end';
   width?: string;
-  /** On a phone the row becomes a card: 'title' leads it, 'hidden' leaves the column out, the rest shows as name and value. */
-  onPhone?: 'title' | 'fact' | 'hidden';
+  /** On a phone the row becomes a card: 'title' leads it, 'picture' stands in its corner, 'hidden' is left out, 'fact' shows name and value. */
+  onPhone?: 'title' | 'picture' | 'fact' | 'hidden';
 };
 
 export type DataTableProps<T> = {
@@ -50,7 +50,7 @@ export function DataTable<T>({ label, columns, rows, rowKey, density = 'target',
         lineHeight="sm"
       >
         <chakra.thead role="rowgroup" display={{ base: 'none', sm: 'table-header-group' }} position="sticky" top="0" zIndex="sticky">
-          <tr role="row">
+          <chakra.tr role="row">
             {columns.map(({ key, header, isHeaderHidden, align, width }) => (
               <chakra.th
                 key={key}
@@ -72,7 +72,7 @@ export function DataTable<T>({ label, columns, rows, rowKey, density = 'target',
                 {isHeaderHidden === true ? <chakra.span srOnly>{header}</chakra.span> : header}
               </chakra.th>
             ))}
-          </tr>
+          </chakra.tr>
         </chakra.thead>
         <chakra.tbody role="rowgroup" display={{ base: 'grid', sm: 'table-row-group' }} gap="3">
           {rows.map((row) => (
@@ -80,6 +80,7 @@ export function DataTable<T>({ label, columns, rows, rowKey, density = 'target',
               key={rowKey(row)}
               role="row"
               display={{ base: 'block', sm: 'table-row' }}
+              position="relative"
               bg={isHighlighted?.(row) === true ? 'straw.subtle' : { base: 'bg.panel', sm: 'transparent' }}
               border={{ base: 'hairline', sm: 'none' }}
               borderRadius={{ base: 'md', sm: 'none' }}
@@ -96,6 +97,8 @@ export function DataTable<T>({ label, columns, rows, rowKey, density = 'target',
   );
 }
 
+const PICTURE_PLACE = { position: { base: 'absolute', sm: 'static' }, top: '3', right: '3' } as const;
+
 function Cell<T>({ column, row, height }: { column: Column<T>; row: T; height: string }) {
   const { header, isHeaderHidden, cell, align, onPhone = 'fact' } = column;
   const isFact = onPhone === 'fact' && isHeaderHidden !== true;
@@ -103,6 +106,7 @@ function Cell<T>({ column, row, height }: { column: Column<T>; row: T; height: s
     <chakra.td
       role="cell"
       display={onPhone === 'hidden' ? { base: 'none', sm: 'table-cell' } : CELL_DISPLAY}
+      {...(onPhone === 'picture' ? PICTURE_PLACE : {})}
       alignItems="center"
       justifyContent={isFact ? 'space-between' : 'flex-start'}
       gap="4"

@@ -1,5 +1,5 @@
 import { chakra } from '@chakra-ui/react';
-import { useState } from 'react';
+import { useId, useState } from 'react';
 import { RemovableChip } from './chip';
 
 export type FacetValue = { value: string; label: string; count: number };
@@ -72,9 +72,11 @@ function FacetGroup({ facet, chosen, onChange }: FacetGroupProps) {
 type FacetRowProps = { value: FacetValue; isChosen: boolean; onToggle: (isOn: boolean) => void };
 
 function FacetRow({ value: { label, count }, isChosen, onToggle }: FacetRowProps) {
+  const id = useId();
   const isEmpty = count === 0 && !isChosen;
   return (
     <chakra.label
+      htmlFor={id}
       display="grid"
       gridTemplateColumns="26px 1fr auto"
       alignItems="center"
@@ -84,7 +86,7 @@ function FacetRow({ value: { label, count }, isChosen, onToggle }: FacetRowProps
       color={isEmpty ? 'fg.subtle' : 'fg'}
       fontWeight={isChosen ? 'semibold' : 'normal'}
     >
-      <Checkbox checked={isChosen} disabled={isEmpty} onChange={(event) => onToggle(event.currentTarget.checked)} />
+      <Checkbox id={id} checked={isChosen} disabled={isEmpty} onChange={(event) => onToggle(event.currentTarget.checked)} />
       {label}
       <chakra.span color="fg.muted">{count}</chakra.span>
     </chakra.label>

@@ -14,7 +14,7 @@ export function FactList({ facts }: { facts: readonly Fact[] }) {
           </chakra.dt>
           <chakra.dd textAlign="right" fontWeight="semibold" py="1" minW="0" overflowWrap="anywhere">
             {value}
-            {unit !== undefined && <chakra.span fontWeight="normal" color="fg.muted">{`\u202F${unit}`}</chakra.span>}
+            {unit !== undefined && <chakra.span fontWeight="normal" color="fg.muted">{`\u00A0${unit}`}</chakra.span>}
           </chakra.dd>
         </Fragment>
       ))}

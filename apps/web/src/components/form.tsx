@@ -1,5 +1,5 @@
 import { chakra } from '@chakra-ui/react';
-import { type FormEvent, type ReactNode, useRef, useState } from 'react';
+import { type FormEvent, type ReactNode, useCallback, useEffect, useRef, useState } from 'react';
 import { type FieldErrors, type FieldPath, type FieldValues, type UseFormProps, type UseFormReturn, useForm } from 'react-hook-form';
 import { ProblemError } from '../lib/api';
 import { showFieldProblems } from '../lib/form-problem';
@@ -25,8 +25,7 @@ export type FormProps<T extends FieldValues> = {
 
 export function Form<T extends FieldValues>({ form, labels, onSubmit, explain, children }: FormProps<T>) {
   const [problem, setProblem] = useState<ProblemError>();
-  const summary = useRef<HTMLDivElement>(null);
-  const notice = useRef<HTMLDivElement>(null);
+  const { summary, notice, focusNext } = useRefusalFocus();
   const idempotencyKey = useIdempotencyKey();
   // The names of `labels` are the form's own fields.
   const names = Object.keys(labels) as FieldPath<T>[];
@@ -37,13 +36,13 @@ export function Form<T extends FieldValues>({ form, labels, onSubmit, explain, c
       await onSubmit(values, { idempotencyKey: idempotencyKey.current() });
       idempotencyKey.renew();
     } catch (error) {
-      if (error instanceof ProblemError && error.status !== 0) idempotencyKey.renew();
+      if (error instanceof ProblemError && isAnswered(error)) idempotencyKey.renew();
       const rest = showFieldProblems(error, form.setError, names);
       setProblem(rest);
-      focusSoon(rest === undefined ? summary : notice);
+      focusNext(rest === undefined ? 'summary' : 'notice');
     }
   };
-  const handleSubmit = (event: FormEvent) => void form.handleSubmit(submit, () => focusSoon(summary))(event);
+  const handleSubmit = (event: FormEvent) => void form.handleSubmit(submit, () => focusNext('summary'))(event);
 
   return (
     <chakra.form noValidate onSubmit={handleSubmit} display="grid" gap="4" maxW="form">
@@ -58,6 +57,25 @@ export function Form<T extends FieldValues>({ form, labels, onSubmit, explain, c
   );
 }
 
+/** Moves the focus to the summary or the notice as soon as it is drawn, at every refusal anew. */
+function useRefusalFocus() {
+  const summary = useRef<HTMLDivElement>(null);
+  const notice = useRef<HTMLDivElement>(null);
+  const pending = useRef<'summary' | 'notice'>(undefined);
+  // Without dependencies: the errors arrive a render or two after the refusal is known.
+  useEffect(() => {
+    if (pending.current === undefined) return;
+    const target = (pending.current === 'summary' ? summary : notice).current;
+    if (target === null) return;
+    target.focus();
+    pending.current = undefined;
+  });
+  const focusNext = useCallback((target: 'summary' | 'notice') => {
+    pending.current = target;
+  }, []);
+  return { summary, notice, focusNext };
+}
+
 function FormProblem({ problem, explanation }: { problem: ProblemError; explanation: { what: string; todo?: ReactNode } | undefined }) {
   if (problem.status === 0) {
     return (
@@ -68,7 +86,8 @@ function FormProblem({ problem, explanation }: { problem: ProblemError; explanat
       />
     );
   }
-  return <ProblemNotice what={explanation?.what ?? problem.detail} safe="What you typed is still here." todo={explanation?.todo} />;
+  const { what, todo } = explanation ?? { what: `${problem.title}.`, todo: problem.detail };
+  return <ProblemNotice what={what} safe="What you typed is still here." todo={todo} />;
 }
 
 function summaryEntries(errors: FieldErrors, labels: Readonly<Record<string, string>>): SummaryEntry[] {
@@ -89,7 +108,7 @@ function isRecord(value: unknown): value is Record<string, unknown> {
   return typeof value === 'object' && value !== null;
 }
 
-/** The notice is drawn after this event; then it can take the focus. */
-function focusSoon(target: { current: HTMLElement | null }) {
-  setTimeout(() => target.current?.focus());
+/** The same key goes out again while the first request may still be at work. */
+function isAnswered({ status, code }: ProblemError): boolean {
+  return status !== 0 && status < 500 && code !== 'request-in-flight';
 }

@@ -31,26 +31,28 @@ export function Page({ title, name, crumbs, meta, actions, isTitleHidden = false
         <chakra.header mb="4">
           {crumbs !== undefined && <Breadcrumbs crumbs={crumbs} />}
           <Flex align="flex-start" justify="space-between" gap="3" wrap="wrap">
-            <chakra.h1 minW="0" overflowWrap="anywhere" py={{ base: '1.5', lg: '0.5' }}>
-              {title}
-              {name !== undefined && (
-                <chakra.span fontWeight="normal" color="fg.muted">
-                  {' '}
-                  {name}
-                </chakra.span>
+            <chakra.div minW="0">
+              <chakra.h1 overflowWrap="anywhere" py={{ base: '1', lg: '0.5' }}>
+                {title}
+                {name !== undefined && (
+                  <chakra.span fontWeight="normal" color="fg.muted">
+                    {' '}
+                    {name}
+                  </chakra.span>
+                )}
+              </chakra.h1>
+              {meta !== undefined && (
+                <Flex wrap="wrap" columnGap="5" fontSize="sm" lineHeight="sm" color="fg.muted">
+                  {meta}
+                </Flex>
               )}
-            </chakra.h1>
+            </chakra.div>
             {actions !== undefined && (
               <Flex gap="2" wrap="wrap" align="center">
                 {actions}
               </Flex>
             )}
           </Flex>
-          {meta !== undefined && (
-            <Flex wrap="wrap" columnGap="5" fontSize="sm" lineHeight="sm" color="fg.muted">
-              {meta}
-            </Flex>
-          )}
         </chakra.header>
       )}
       {children}

@@ -8,8 +8,8 @@ export type Method = 'get' | 'post' | 'put' | 'patch' | 'delete';
 export type RequestOptions = {
   query?: Query | undefined;
   body?: unknown;
-  /** Version of the record that the change starts from (the ETag it was read with). */
-  ifMatch?: string | undefined;
+  /** Version of the record that the change starts from, as it was read. */
+  version?: number | undefined;
   /** One per submitted form, so that a repeated request is carried out once. */
   idempotencyKey?: string | undefined;
   headers?: Readonly<Record<string, string>> | undefined;
@@ -21,16 +21,7 @@ export const api: ApiClient = createApiClient({ baseUrl: globalThis.location.ori
 
 /** One request by method and path; throws `ProblemError`. The type of the answer is the caller's claim, as with the api's own DTOs. */
 export async function request<T>(method: Method, path: string, options: RequestOptions = {}): Promise<T> {
-  return (await requestWithETag<T>(method, path, options)).data;
-}
-
-/** As `request`, with the version of the record for a later `ifMatch`. */
-export async function requestWithETag<T>(
-  method: Method,
-  path: string,
-  options: RequestOptions = {},
-): Promise<{ data: T; etag: string | undefined }> {
-  const { data, response } = await untyped.request(method, path, {
+  const { data } = await untyped.request(method, path, {
     params: { query: definedOnly(options.query) },
     headers: requestHeaders(options),
     ...(options.body === undefined ? {} : { body: options.body }),
@@ -38,12 +29,12 @@ export async function requestWithETag<T>(
     ...(options.signal === undefined ? {} : { signal: options.signal }),
   });
   // The server's DTO types end at the wire; the caller names the one it asked for.
-  return { data: data as T, etag: response.headers.get('etag') ?? undefined };
+  return data as T;
 }
 
 // The typed client takes literal paths only; SWR keys and hooks hold them as strings.
 const untyped = api as unknown as {
-  request(method: Method, path: string, init: Record<string, unknown>): Promise<{ data?: unknown; response: Response }>;
+  request(method: Method, path: string, init: Record<string, unknown>): Promise<{ data?: unknown }>;
 };
 
 async function fetchWithSession(original: Request): Promise<Response> {
@@ -61,9 +52,9 @@ function withToken(request: Request, token: string | undefined): Request {
   return request;
 }
 
-function requestHeaders({ ifMatch, idempotencyKey, headers }: RequestOptions): Record<string, string> {
+function requestHeaders({ version, idempotencyKey, headers }: RequestOptions): Record<string, string> {
   return {
-    ...(ifMatch === undefined ? {} : { 'If-Match': ifMatch }),
+    ...(version === undefined ? {} : { 'If-Match': `"v${version}"` }),
     ...(idempotencyKey === undefined ? {} : { 'Idempotency-Key': idempotencyKey }),
     ...headers,
   };

@@ -2,7 +2,7 @@
 import { useSyncExternalStore } from 'react';
 
 export type Role = 'trainee' | 'operator' | 'lead' | 'owner';
-export type UnitSystem = 'metric' | 'imperial';
+export type UnitSystem = 'metric' | 'inch';
 
 export type Session = {
   person: { id: string; name: string; email: string };
@@ -52,9 +52,11 @@ export function openSession({ accessToken: token, expiresAt: _expiresAt, ...sess
   change({ status: 'signed-in', session });
 }
 
-/** Takes over changed names of the shop or the person without a new token. */
-export function updateSession(session: Session): void {
-  if (state.status === 'signed-in') change({ status: 'signed-in', session });
+/** Takes over changed facts of the shop without a new token. */
+export function updateShop({ name, unitSystem, timeZone, locale }: Omit<Session['shop'], 'id'>): void {
+  if (state.status !== 'signed-in') return;
+  const { session } = state;
+  change({ status: 'signed-in', session: { ...session, shop: { id: session.shop.id, name, unitSystem, timeZone, locale } } });
 }
 
 export function closeSession({ hasEnded }: { hasEnded: boolean }): void {

@@ -3,8 +3,9 @@ import { Link } from 'react-router';
 import { ChevronRightIcon } from '../../components/icons';
 import { Page, Panel } from '../../components/page';
 import { paths } from '../../lib/paths';
+import { roleWord } from '../../lib/roles';
 import { useSession } from '../../lib/session';
-import { barFor, ROLE_WORDS } from './navigation';
+import { barFor } from './navigation';
 
 const RowLink = chakra(Link, {
   base: {
@@ -40,7 +41,7 @@ export function Component() {
               <chakra.span minW="0">
                 {person.name}
                 <chakra.span display="block" fontSize="sm" lineHeight="sm" color="fg.muted">
-                  {ROLE_WORDS[member.role]}, account and sign-out
+                  {roleWord(member.role)}, account and sign-out
                 </chakra.span>
               </chakra.span>
               <Trailing />

@@ -12,6 +12,7 @@ import {
   SignOffIcon,
 } from '../../components/icons';
 import { paths } from '../../lib/paths';
+import { ROLES } from '../../lib/roles';
 import type { Role } from '../../lib/session';
 
 export type NavigationEntry = {
@@ -25,7 +26,7 @@ export type NavigationEntry = {
   from: Role;
 };
 
-const ROLE_ORDER: readonly Role[] = ['trainee', 'operator', 'lead', 'owner'];
+const ROLE_ORDER: readonly Role[] = ROLES.map(({ value }) => value);
 const BAR_PLACES = 4;
 
 const ENTRIES: readonly NavigationEntry[] = [
@@ -52,5 +53,3 @@ export function barFor(role: Role): { bar: readonly NavigationEntry[]; rest: rea
   const bar = entries.filter(({ group }) => group === 'work').slice(0, BAR_PLACES);
   return { bar, rest: entries.filter((entry) => !bar.includes(entry)) };
 }
-
-export const ROLE_WORDS: Record<Role, string> = { trainee: 'trainee', operator: 'operator', lead: 'lead operator', owner: 'owner' };

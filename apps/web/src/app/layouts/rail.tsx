@@ -3,8 +3,9 @@ import { Link, NavLink } from 'react-router';
 import { FindIcon, PlateMarkIcon } from '../../components/icons';
 import { Keycap } from '../../components/keycap';
 import { paths } from '../../lib/paths';
+import { roleWord } from '../../lib/roles';
 import type { Session } from '../../lib/session';
-import { type NavigationEntry, navigationFor, ROLE_WORDS } from './navigation';
+import { type NavigationEntry, navigationFor } from './navigation';
 
 const BrandLink = chakra(Link, {
   base: { display: 'flex', alignItems: 'center', gap: '2.5', px: '2', fontWeight: 'bold', fontSize: 'lg', color: 'fg', borderRadius: 'md' },
@@ -147,7 +148,7 @@ function PersonLink({ session }: { session: Session }) {
           <chakra.span fontWeight="semibold" display="block">
             {session.person.name}
           </chakra.span>
-          <chakra.span color="fg.muted">{ROLE_WORDS[session.member.role]}</chakra.span>
+          <chakra.span color="fg.muted">{roleWord(session.member.role)}</chakra.span>
         </Box>
       </AccountLink>
     </Box>

@@ -64,8 +64,7 @@ function CellGround({ cell, view: { fill }, scale, hatchId }: Pick<PlateCellProp
           <text
             x={xMm + widthMm / 2}
             y={yMm + heightMm * 0.62}
-            fontSize={digitSizeMm(fill.text, widthMm)}
-            fontWeight="600"
+            style={lettering(digitSizeMm(fill.text, widthMm))}
             textAnchor="middle"
             fill={inkOn(colour)}
           >
@@ -83,8 +82,7 @@ function RatingDigit({ cell, rating }: { cell: LayoutCell; rating: number }) {
     <text
       x={xMm + widthMm * 0.92}
       y={yMm + heightMm * 0.92}
-      fontSize={widthMm * 0.34}
-      fontWeight="700"
+      style={lettering(widthMm * 0.34)}
       textAnchor="end"
       fill="#ffffff"
       stroke="#14161A"
@@ -94,6 +92,11 @@ function RatingDigit({ cell, rating }: { cell: LayoutCell; rating: number }) {
       {rating}
     </text>
   );
+}
+
+/** As a style, since the reset gives every element the font of its parent; one pixel is one millimetre here. */
+function lettering(sizeMm: number) {
+  return { fontSize: `${sizeMm}px`, fontWeight: 600 };
 }
 
 function digitSizeMm(text: string, cellMm: number): number {

@@ -7,8 +7,9 @@ import { BLANK, type PlateCells, type PlateCellView, type PlateLayout } from './
 import type { ResponseScale } from './response-scale';
 
 const MARGIN_MM = 3;
-/** The ring has to survive at 40 px. */
-const RING_WEIGHT = 1.7;
+/** The ring has to survive at 40 px, so it grows with the plate. */
+const RING_WEIGHT_PER_MM = 1 / 22;
+const LEAST_RING_WEIGHT = 1.7;
 
 export type PlateThumbnailProps = {
   layout: Pick<PlateLayout, 'cells'>;
@@ -59,7 +60,9 @@ export function PlateThumbnail({ layout, cells, scale, chosen, groundColour, lab
           isRatingShown={false}
         />
       ))}
-      {chosenCell !== undefined && <PlateRing rect={chosenCell.rect} weight={RING_WEIGHT} />}
+      {chosenCell !== undefined && (
+        <PlateRing rect={chosenCell.rect} weight={Math.max(LEAST_RING_WEIGHT, frame.widthMm * RING_WEIGHT_PER_MM)} />
+      )}
     </chakra.svg>
   );
 }

@@ -1,5 +1,5 @@
 import { chakra } from '@chakra-ui/react';
-import type { LayoutCell } from '@proofplate/imaging';
+import type { LayoutCell, RectMm } from '@proofplate/imaging';
 import { type KeyboardEvent, type MouseEvent, useId, useMemo, useRef } from 'react';
 import { PlateCell } from './plate-cell';
 import { addressAfterKey } from './plate-keys';
@@ -77,7 +77,8 @@ function PlateGrid({ layout, cells, label, scale, chosen, isRatingShown = true, 
   const grid = useRef<SVGGElement>(null);
   const rows = useMemo(() => Array.from({ length: layout.rows }, (_, row) => layout.cells.filter((cell) => cell.row === row)), [layout]);
   const isGrid = on.onChoose !== undefined;
-  const stop = chosen ?? layout.cells[0]?.address;
+  const stopCell = layout.cells.find(({ address }) => address === chosen) ?? layout.cells[0];
+  const stop = stopCell?.address;
 
   const handleKeyDown = (event: KeyboardEvent<SVGGElement>) => {
     if (stop === undefined || event.altKey) return;
@@ -111,7 +112,7 @@ function PlateGrid({ layout, cells, label, scale, chosen, isRatingShown = true, 
             onClick: handleClick,
           }
         : { 'aria-hidden': true })}
-      css={{ '& [role=gridcell]': { cursor: 'pointer', outline: 'none' }, '& [role=gridcell]:focus-visible': FOCUS_RING }}
+      css={GRID_STYLE}
     >
       {rows.map((rowCells, row) => (
         <g key={rowCells[0]?.address ?? row} {...(isGrid ? { role: 'row', 'aria-rowindex': row + 1 } : {})}>
@@ -127,11 +128,36 @@ function PlateGrid({ layout, cells, label, scale, chosen, isRatingShown = true, 
           })}
         </g>
       ))}
+      {isGrid && stopCell !== undefined && <FocusFrame rect={stopCell.rect} />}
     </chakra.g>
   );
 }
 
-const FOCUS_RING = { outline: '2px solid', outlineColor: 'brand.focusRing', outlineOffset: '5px' } as const;
+// An outline is drawn in whole pixels of the drawing, which are millimetres here: far too thick. The focus has a rectangle instead.
+const GRID_STYLE = {
+  '& [role=gridcell]': { cursor: 'pointer', outline: 'none' },
+  '& [data-focus]': { visibility: 'hidden' },
+  '&:has([role=gridcell]:focus-visible) [data-focus]': { visibility: 'visible' },
+} as const;
+
+const FOCUS_REACH_MM = 1.05;
+
+function FocusFrame({ rect }: { rect: RectMm }) {
+  return (
+    <chakra.rect
+      data-focus=""
+      x={rect.xMm - FOCUS_REACH_MM}
+      y={rect.yMm - FOCUS_REACH_MM}
+      width={`${rect.widthMm + 2 * FOCUS_REACH_MM}`}
+      height={`${rect.heightMm + 2 * FOCUS_REACH_MM}`}
+      rx={0.6}
+      fill="none"
+      stroke="#1D3F78"
+      strokeWidth="0.35"
+      pointerEvents="none"
+    />
+  );
+}
 
 /** Diagonal lines on the metal: nothing was measured here. */
 export function Hatch({ id }: { id: string }) {

@@ -1,6 +1,7 @@
 import { chakra } from '@chakra-ui/react';
 import { FactList } from '../../../components/fact-list';
 import { Panel } from '../../../components/page';
+import { roleWord } from '../../../lib/roles';
 import { useSession } from '../../../lib/session';
 
 export function AccountFacts() {
@@ -15,7 +16,7 @@ export function AccountFacts() {
           { label: 'Signs as', value: member.printedName },
           { label: 'E-mail', value: person.email },
           { label: 'Shop', value: shop.name },
-          { label: 'Role', value: member.role },
+          { label: 'Role', value: roleWord(member.role) },
         ]}
       />
     </Panel>

@@ -6,6 +6,7 @@ import { ProblemNotice } from '../../../components/problem-notice';
 import { SkeletonForm } from '../../../components/skeletons';
 import type { ProblemError } from '../../../lib/api';
 import { paths } from '../../../lib/paths';
+import { roleWord } from '../../../lib/roles';
 import { type InvitationPreview, previewInvitation } from '../auth.api';
 import { AcceptInvitationForm } from '../forms/accept-invitation-form';
 
@@ -17,7 +18,7 @@ export function Invitation({ token }: { token: string }) {
   return (
     <>
       <chakra.p mb="4">
-        <b>{data.shopName}</b> invites <b>{data.email}</b> as {data.role}.
+        <b>{data.shopName}</b> invites <b>{data.email}</b> as {roleWord(data.role)}.
       </chakra.p>
       <Panel p={{ base: '4', sm: '6' }}>
         <AcceptInvitationForm token={token} invitation={data} />

@@ -42,9 +42,9 @@ export function AcceptInvitationForm({ token, invitation }: AcceptInvitationForm
   );
 }
 
-function explain({ status }: ProblemError) {
-  if (status === 401) return { what: 'The password is not the one you use in your other shop.', todo: 'Try again.' };
-  if (status === 404 || status === 410)
+function explain({ code }: ProblemError) {
+  if (code === 'wrong-credentials') return { what: 'The password is not the one you use in your other shop.', todo: 'Try again.' };
+  if (code === 'invitation-not-usable')
     return { what: 'This invitation was used, withdrawn or is too old.', todo: 'Ask the owner for a new one.' };
   return undefined;
 }

@@ -32,7 +32,7 @@ export function ResetPasswordForm({ token, onDone }: ResetPasswordFormProps) {
   );
 }
 
-function explainToken({ status }: ProblemError) {
-  if (status === 404 || status === 410) return { what: 'This link was used or is too old.', todo: 'Ask for a new one.' };
+function explainToken({ code }: ProblemError) {
+  if (code === 'reset-not-usable') return { what: 'This link was used or is too old.', todo: 'Ask for a new one.' };
   return undefined;
 }

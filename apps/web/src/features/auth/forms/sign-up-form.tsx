@@ -4,7 +4,8 @@ import { SelectField, TextField } from '../../../components/field';
 import { Form, useSummaryForm } from '../../../components/form';
 import { PasswordField } from '../../../components/password-field';
 import type { UnitSystem } from '../../../lib/session';
-import { deviceTimeZone, timeZones } from '../../../lib/time-zones';
+import { NUMBER_STYLE_OPTIONS, UNIT_SYSTEM_OPTIONS, zoneOptions } from '../../../lib/shop-options';
+import { deviceTimeZone } from '../../../lib/time-zones';
 import { signUp } from '../auth.api';
 import { emailRules, nameRules, newPasswordRules, PASSWORD_HELP } from './credentials';
 
@@ -63,13 +64,18 @@ export function SignUpForm() {
         {...form.register('password', newPasswordRules)}
       />
       <chakra.div display="grid" gridTemplateColumns={{ base: '1fr', sm: '1fr 1fr' }} gap="4">
-        <SelectField label={LABELS.unitSystem} options={UNIT_OPTIONS} error={errors.unitSystem?.message} {...form.register('unitSystem')} />
-        <SelectField label={LABELS.locale} options={LOCALE_OPTIONS} error={errors.locale?.message} {...form.register('locale')} />
+        <SelectField
+          label={LABELS.unitSystem}
+          options={UNIT_SYSTEM_OPTIONS}
+          error={errors.unitSystem?.message}
+          {...form.register('unitSystem')}
+        />
+        <SelectField label={LABELS.locale} options={NUMBER_STYLE_OPTIONS} error={errors.locale?.message} {...form.register('locale')} />
       </chakra.div>
       <SelectField
         label={LABELS.timeZone}
         help="Signatures carry the local time with this zone."
-        options={timeZones().map((zone) => ({ value: zone, label: zone.replaceAll('_', ' ') }))}
+        options={zoneOptions()}
         error={errors.timeZone?.message}
         {...form.register('timeZone')}
       />
@@ -79,17 +85,6 @@ export function SignUpForm() {
     </Form>
   );
 }
-
-const UNIT_OPTIONS = [
-  { value: 'metric', label: 'metric: mm, mm/s' },
-  { value: 'imperial', label: 'imperial: in, in/s' },
-];
-
-/** The locale decides the decimal sign of typed and shown numbers, nothing else. */
-const LOCALE_OPTIONS = [
-  { value: 'en-GB', label: '1.5 with a point' },
-  { value: 'de-DE', label: '1,5 with a comma' },
-];
 
 function deviceLocale(): string {
   return new Intl.NumberFormat(navigator.language).format(1.5).includes(',') ? 'de-DE' : 'en-GB';
