@@ -6,6 +6,7 @@ import { LedgerService } from '../ledger/ledger.service';
 import type { CreateMachineLensDto, MachineLensDto, MachineLensListDto, UpdateMachineLensDto } from './dto/machine-lens.dto';
 import { toMachineLensDto } from './machine-lenses.mapper';
 import { MachineLensesRepository, type MachineLensRow, type MachineLensValues, type MachineLensView } from './machine-lenses.repository';
+import { MachineArchivedError } from './machines.errors';
 import { MachinesService } from './machines.service';
 
 /** Lenses on a machine: working distance, how focus is found, the spot where somebody measured one. */
@@ -30,7 +31,8 @@ export class MachineLensesService {
     const values = { ...NOTHING_KNOWN, ...givenOnly(dto) };
     refuseIncompleteSpot(values);
     return this.unitOfWork.run(actor, async (tx) => {
-      await this.machines.getMachineWithProfile(tx, actor.shopId, machineId);
+      const { machine } = await this.machines.getMachineWithProfile(tx, actor.shopId, machineId);
+      if (machine.archivedAt !== null) throw new MachineArchivedError();
       if (!(await this.pairs.isLensInUse(tx, actor.shopId, lensId)))
         throw new InvalidError('One field needs another look.', [
           { pointer: '#/lensId', detail: 'This lens is not in use in the shop. Choose another one.' },
