@@ -60,15 +60,15 @@ END $$;--> statement-breakpoint
 CREATE FUNCTION account_session(p_session uuid, p_version int)
   RETURNS TABLE (person_id uuid, email text, person_name text, shop_id uuid, member_id uuid, role text, printed_name text)
   LANGUAGE plpgsql SECURITY DEFINER SET search_path = pg_catalog, public, pg_temp AS $$
-DECLARE found session%ROWTYPE; owner_ person%ROWTYPE;
+DECLARE held session%ROWTYPE; owner_ person%ROWTYPE;
 BEGIN
-  SELECT * INTO found FROM session s WHERE s.id = p_session AND s.ended_at IS NULL AND s.expires_at > now();
+  SELECT * INTO held FROM session s WHERE s.id = p_session AND s.ended_at IS NULL AND s.expires_at > now();
   IF NOT FOUND THEN RETURN; END IF;
-  SELECT * INTO owner_ FROM person p WHERE p.id = found.person_id AND p.session_version = p_version;
+  SELECT * INTO owner_ FROM person p WHERE p.id = held.person_id AND p.session_version = p_version;
   IF NOT FOUND THEN RETURN; END IF;
-  PERFORM set_config('app.shop_id', found.shop_id::text, true);
+  PERFORM set_config('app.shop_id', held.shop_id::text, true);
   RETURN QUERY SELECT owner_.id, owner_.email, owner_.name, m.shop_id, m.id, m.role, m.printed_name
-    FROM member m WHERE m.shop_id = found.shop_id AND m.id = found.member_id AND m.state = 'active';
+    FROM member m WHERE m.shop_id = held.shop_id AND m.id = held.member_id AND m.state = 'active';
 END $$;--> statement-breakpoint
 
 -- Uses a refresh token. rotated: p_new_hash is its successor. grace: used a moment ago, here is the sealed successor it got.

@@ -4,7 +4,7 @@ import { and, eq, sql } from 'drizzle-orm';
 const { idempotencyKey } = schema;
 
 type Claim = { readonly shopId: string; readonly memberId: string; readonly route: string; readonly key: string };
-export type StoredAnswer = { readonly requestHash: string; readonly responseBody: unknown };
+export type StoredAnswer = { readonly requestHash: string; readonly answer: unknown };
 
 /** How long a repeat waits for the first request to finish before it is told that this one is still in flight. */
 const WAIT_FOR_FIRST_MS = 500;
@@ -22,12 +22,15 @@ export async function claimKey(tx: Tx, claim: Claim & { readonly requestHash: st
     .select({ requestHash: idempotencyKey.requestHash, responseBody: idempotencyKey.responseBody })
     .from(idempotencyKey)
     .where(isClaim(claim));
-  return stored;
+  return stored === undefined ? undefined : { requestHash: stored.requestHash, answer: parsed(stored.responseBody) };
 }
 
-/** Keeps the answer beside the effect, in the same transaction. */
-export async function keepAnswer(tx: Tx, claim: Claim, responseBody: unknown): Promise<void> {
-  await tx.update(idempotencyKey).set({ responseBody, responseStatus: 201 }).where(isClaim(claim));
+/** Keeps the answer beside the effect, in the same transaction: as one JSON text, because jsonb would reorder its members. */
+export async function keepAnswer(tx: Tx, claim: Claim, answer: unknown): Promise<void> {
+  await tx
+    .update(idempotencyKey)
+    .set({ responseBody: { json: JSON.stringify(answer) }, responseStatus: 201 })
+    .where(isClaim(claim));
 }
 
 const isClaim = (claim: Claim) =>
@@ -43,4 +46,9 @@ async function setLockTimeout(tx: Tx, value: string): Promise<{ lockTimeout: str
     sql`select current_setting('lock_timeout') as before, set_config('lock_timeout', ${value}, true)`,
   );
   return { lockTimeout: row?.before ?? '0' };
+}
+
+function parsed(kept: unknown): unknown {
+  if (typeof kept === 'object' && kept !== null && 'json' in kept && typeof kept.json === 'string') return JSON.parse(kept.json);
+  return null;
 }

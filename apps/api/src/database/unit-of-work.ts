@@ -3,7 +3,7 @@ import type { DbHandle, Tx } from '@proofplate/db';
 import { sql } from 'drizzle-orm';
 import { UnavailableError } from '../common/errors/domain-error';
 import { IdempotencyKeyReusedError, RequestInFlightError } from '../common/errors/request.errors';
-import { sqlStateOf } from '../common/filters/framework-problem';
+import { isConnectionLoss, sqlStateOf } from '../common/filters/framework-problem';
 import { remainingMs } from '../common/http/deadline';
 import { type IdempotencyContext, idempotencyStorage } from '../common/idempotency/idempotency-context';
 import { expectLastActs, runLastActs } from './before-commit';
@@ -29,8 +29,6 @@ export type RunOptions = {
 
 const DEFAULT_STATEMENT_TIMEOUT_MS = 3_000;
 const LOCK_NOT_AVAILABLE = '55P03';
-/** A backend that was told to go: its transaction is rolled back, so a read may be repeated. */
-const BACKEND_TERMINATED = '57P01';
 
 /** Opens transactions. One use case, one transaction, bound to one shop by row-level security. */
 @Injectable()
@@ -63,7 +61,7 @@ export class UnitOfWork {
     try {
       return await this.attempt(actor, work, options);
     } catch (error) {
-      const mayRepeat = options.readOnly === true && sqlStateOf(error) === BACKEND_TERMINATED;
+      const mayRepeat = options.readOnly === true && isConnectionLoss(error);
       if (mayRepeat) return this.attempt(actor, work, options);
       throw error;
     }
@@ -113,5 +111,5 @@ async function once<T>(
   if (stored.requestHash !== context.requestHash) throw new IdempotencyKeyReusedError();
   context.replayed = true;
   // the stored body is the JSON of what this same route answered, so it has the shape of T as the client sees it
-  return stored.responseBody as T;
+  return stored.answer as T;
 }

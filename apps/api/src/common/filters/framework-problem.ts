@@ -62,6 +62,14 @@ export function sqlStateOf(error: unknown): string | undefined {
     .find((code) => code !== undefined && /^[0-9A-Z]{5}$/.test(code));
 }
 
+/** What is left of a statement whose connection went away under it. The server has rolled its transaction back. */
+const CONNECTION_LOSSES = ['57P01', 'CONNECTION_CLOSED', 'CONNECTION_DESTROYED', 'ECONNRESET', 'EPIPE'];
+
+/** True when the failure is the loss of a connection, which says nothing about the statement itself. */
+export function isConnectionLoss(error: unknown): boolean {
+  return causes(error).some((link) => CONNECTION_LOSSES.includes(textOf(link, 'code') ?? ''));
+}
+
 function causes(error: unknown): object[] {
   const chain: object[] = [];
   let link = error;
