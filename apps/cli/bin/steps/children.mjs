@@ -6,7 +6,7 @@ import { CHECKOUT } from './checkout.mjs';
 
 const STOP_LIMIT_MS = 15_000;
 /** The S3 client announces the end of its support for Node 20 at every start; docs/dependencies.md says it once. */
-const NODE_OPTIONS = ['--disable-warning=NodeVersionSupportWarning'];
+const QUIET = { AWS_SDK_JS_NODE_VERSION_SUPPORT_WARNING_DISABLED: 'true' };
 
 export class Children {
   constructor(folder) {
@@ -26,9 +26,9 @@ export class Children {
 
   /** Starts a Node program; `onLoss` hears when it ends without being asked to. */
   run({ name, program, args = [], env = {}, onLoss }) {
-    const child = spawn(process.execPath, [...NODE_OPTIONS, join(CHECKOUT, program), ...args], {
+    const child = spawn(process.execPath, [join(CHECKOUT, program), ...args], {
       cwd: CHECKOUT,
-      env: { ...process.env, ...env },
+      env: { ...QUIET, ...process.env, ...env },
       detached: true,
       stdio: ['ignore', 'inherit', 'inherit', 'ipc'],
     });
