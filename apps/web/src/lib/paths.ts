@@ -8,6 +8,8 @@ export const paths = {
   coupon: (code: string) => `/coupons/${encodeURIComponent(code)}`,
   recipes: '/recipes',
   recipe: (code: string) => `/recipes/${encodeURIComponent(code)}`,
+  recipeRevision: (recipeId: string, revisionId: string) =>
+    `/recipes/${encodeURIComponent(recipeId)}/revisions/${encodeURIComponent(revisionId)}`,
   compareRevisions: (code: string) => `/recipes/${encodeURIComponent(code)}/compare`,
   signOffs: '/sign-off',
   signOff: (revisionId: string) => `/sign-off/${encodeURIComponent(revisionId)}`,

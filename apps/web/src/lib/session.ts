@@ -8,7 +8,8 @@ export type Session = {
   person: { id: string; name: string; email: string };
   member: { id: string; role: Role; printedName: string };
   shop: { id: string; name: string; unitSystem: UnitSystem; timeZone: string; locale: string };
-  shops: readonly { id: string; name: string }[];
+  /** Every shop the person works in, this one included. */
+  shops: readonly { id: string; name: string; role: Role }[];
 };
 
 export type SessionAnswer = Session & { accessToken: string; expiresAt: string };

@@ -2,6 +2,7 @@ import { chakra } from '@chakra-ui/react';
 import { Page, Panel } from '../components/page';
 import { AccountFacts } from '../features/auth/components/account-facts';
 import { ColourModeChoice } from '../features/auth/components/colour-mode-choice';
+import { OtherShops } from '../features/auth/components/other-shops';
 import { SignOutPanel } from '../features/auth/components/sign-out-panel';
 
 export function Component() {
@@ -15,6 +16,7 @@ export function Component() {
           </chakra.h2>
           <ColourModeChoice />
         </Panel>
+        <OtherShops />
         <SignOutPanel />
       </chakra.div>
     </Page>

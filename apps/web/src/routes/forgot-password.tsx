@@ -16,7 +16,7 @@ export function Component() {
           <div role="status">
             <chakra.h2 mb="2">Look into your mail</chakra.h2>
             <p>
-              If <b>{sentTo}</b> belongs to somebody here, a link to set a new password is on its way. It works once and for one hour.
+              If <b>{sentTo}</b> belongs to somebody here, a link to set a new password is on its way. It works once, for half an hour.
             </p>
           </div>
         )}

@@ -14,7 +14,7 @@ const WRONG: readonly [label: string, message: string][] = [
   ['Name of the shop', 'Enter the name that stands on set-up sheets'],
   ['Your name', 'Enter your name as it shall stand under what you sign'],
   ['E-mail', 'Enter an address like name@shop.example'],
-  ['Password', 'Use 12 characters or more'],
+  ['Password', 'Use 15 characters or more'],
 ];
 
 let server: ReturnType<typeof fakeServer>;

@@ -1,14 +1,16 @@
-import { chakra } from '@chakra-ui/react';
-import { Link } from 'react-router';
-import { ChevronRightIcon } from '../../components/icons';
+import { chakra, defineRecipe } from '@chakra-ui/react';
+import { Link, useOutletContext } from 'react-router';
+import { ChevronRightIcon, FindIcon } from '../../components/icons';
 import { Page, Panel } from '../../components/page';
 import { paths } from '../../lib/paths';
 import { roleWord } from '../../lib/roles';
 import { useSession } from '../../lib/session';
 import { barFor } from './navigation';
+import type { ShopOutlet } from './shop-layout';
 
-const RowLink = chakra(Link, {
+const rowRecipe = defineRecipe({
   base: {
+    width: 'full',
     display: 'flex',
     alignItems: 'center',
     gap: '3',
@@ -18,15 +20,24 @@ const RowLink = chakra(Link, {
     _hover: { bg: 'bg.subtle' },
   },
 });
+const RowLink = chakra(Link, rowRecipe);
+const RowButton = chakra('button', rowRecipe);
 
 /** What the bottom bar has no place for. */
 export function Component() {
   const { person, member, shop } = useSession();
   const { rest } = barFor(member.role);
+  const { onFind } = useOutletContext<ShopOutlet>();
   return (
     <Page title="More" meta={<span>{shop.name}</span>}>
       <Panel as="nav" aria-label="More pages">
         <chakra.ul>
+          <chakra.li borderBottom="hairline">
+            <RowButton type="button" onClick={onFind} cursor="pointer">
+              <FindIcon />
+              Find
+            </RowButton>
+          </chakra.li>
           {rest.map(({ to, label, icon: Icon }) => (
             <chakra.li key={to} borderBottom="hairline">
               <RowLink to={to}>

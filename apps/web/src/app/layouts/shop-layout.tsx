@@ -15,6 +15,9 @@ import { SkipLink } from './skip-link';
 const CommandPalette = lazy(async () => ({ default: (await import('./command-palette')).CommandPalette }));
 const KeyList = lazy(async () => ({ default: (await import('./key-list')).KeyList }));
 
+/** What the frame lends to its own pages. */
+export type ShopOutlet = { onFind: () => void };
+
 /** Frame of every page for signed-in people. */
 export function ShopLayout() {
   const state = useSessionState();
@@ -54,7 +57,7 @@ function ShopFrame({ session }: { session: Session }) {
           pt={{ base: '4', sm: '5', lg: '6' }}
           pb={{ base: '184px', lg: '6' }}
         >
-          <Outlet />
+          <Outlet context={{ onFind: handleFind } satisfies ShopOutlet} />
         </chakra.main>
       </Box>
       <BottomBar role={session.member.role} />

@@ -11,14 +11,14 @@ export type SignUp = {
   timeZone: string;
   locale: string;
 };
-export type InvitationPreview = { shopName: string; email: string; role: Role; isKnownPerson: boolean };
+export type InvitationPreview = { shopName: string; email: string; role: Role; hasAccount: boolean };
 
 export async function signUp(body: SignUp, idempotencyKey: string): Promise<void> {
-  openSession(await request<SessionAnswer>('post', '/api/auth/sign-up', { body, idempotencyKey, headers: REQUESTED_BY }));
+  await enter(await request<SessionAnswer>('post', '/api/auth/sign-up', { body, idempotencyKey, headers: REQUESTED_BY }));
 }
 
 export async function signIn(body: { email: string; password: string; shopId?: string }): Promise<void> {
-  openSession(await request<SessionAnswer>('post', '/api/auth/sign-in', { body, headers: REQUESTED_BY }));
+  await enter(await request<SessionAnswer>('post', '/api/auth/sign-in', { body, headers: REQUESTED_BY }));
 }
 
 export async function signOut(): Promise<void> {
@@ -45,7 +45,13 @@ export function previewInvitation(token: string): Promise<InvitationPreview> {
 }
 
 export async function acceptInvitation(body: { token: string; name?: string; password: string }): Promise<void> {
-  openSession(await request<SessionAnswer>('post', '/api/auth/accept-invitation', { body, headers: REQUESTED_BY }));
+  await enter(await request<SessionAnswer>('post', '/api/auth/accept-invitation', { body, headers: REQUESTED_BY }));
+}
+
+/** Whoever comes in sees nothing that was read for whoever was here before. */
+async function enter(answer: SessionAnswer): Promise<void> {
+  await forgetAllReads();
+  openSession(answer);
 }
 
 async function leave(): Promise<void> {

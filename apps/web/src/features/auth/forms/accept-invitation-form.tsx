@@ -14,12 +14,12 @@ export type AcceptInvitationFormProps = { token: string; invitation: InvitationP
 export function AcceptInvitationForm({ token, invitation }: AcceptInvitationFormProps) {
   const form = useSummaryForm({ defaultValues: { name: '', password: '' } });
   const { errors, isSubmitting } = form.formState;
-  const { isKnownPerson } = invitation;
+  const { hasAccount } = invitation;
   const submit = ({ name, password }: { name: string; password: string }) =>
-    acceptInvitation(isKnownPerson ? { token, password } : { token, name, password });
+    acceptInvitation(hasAccount ? { token, password } : { token, name, password });
   return (
     <Form form={form} labels={LABELS} onSubmit={submit} explain={explain}>
-      {!isKnownPerson && (
+      {!hasAccount && (
         <TextField
           label={LABELS.name}
           autoComplete="name"
@@ -30,10 +30,10 @@ export function AcceptInvitationForm({ token, invitation }: AcceptInvitationForm
       )}
       <PasswordField
         label={LABELS.password}
-        autoComplete={isKnownPerson ? 'current-password' : 'new-password'}
-        help={isKnownPerson ? 'The password you use in your other shop.' : PASSWORD_HELP}
+        autoComplete={hasAccount ? 'current-password' : 'new-password'}
+        help={hasAccount ? 'The password you use in your other shop.' : PASSWORD_HELP}
         error={errors.password?.message}
-        {...form.register('password', isKnownPerson ? { required: 'Enter your password' } : newPasswordRules)}
+        {...form.register('password', hasAccount ? { required: 'Enter your password' } : newPasswordRules)}
       />
       <Button type="submit" kind="primary" size="touch" shape="wide" isBusy={isSubmitting}>
         Join {invitation.shopName}

@@ -1,7 +1,7 @@
 // Rules that the forms of this feature share; the server holds the same ones and decides.
 
-export const PASSWORD_MIN_LENGTH = 12;
-export const PASSWORD_HELP = `At least ${PASSWORD_MIN_LENGTH} characters. Several words are good; any characters and pasting are fine.`;
+export const PASSWORD_MIN_LENGTH = 15;
+export const PASSWORD_HELP = `At least ${PASSWORD_MIN_LENGTH} characters. A few words in a row are fine, and so is pasting.`;
 
 export const emailRules = {
   required: 'Enter the e-mail address you sign in with',

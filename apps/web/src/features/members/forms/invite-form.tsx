@@ -23,7 +23,7 @@ export function InviteForm({ onInvited }: { onInvited: (email: string) => void }
         autoComplete="off"
         autoCapitalize="none"
         spellCheck={false}
-        help="A link to join goes there. It works for seven days."
+        help="A link to join goes there. It works once, for three days."
         error={errors.email?.message}
         {...form.register('email', {
           required: 'Enter the address of the person',
