@@ -1,5 +1,5 @@
 import { sql } from 'drizzle-orm';
-import { check, foreignKey, index, integer, jsonb, pgTable, primaryKey, text, unique, uniqueIndex, uuid } from 'drizzle-orm/pg-core';
+import { check, date, foreignKey, index, integer, jsonb, pgTable, primaryKey, text, unique, uniqueIndex, uuid } from 'drizzle-orm/pg-core';
 import { authorship, editVersion, moment, shopPolicy, tenantKey } from '../columns';
 import { lens, machine } from './machines';
 import { effect, finish, material } from './materials';
@@ -104,6 +104,9 @@ export const settingRequest = pgTable(
     materialId: uuid(),
     finishId: uuid(),
     effectId: uuid(),
+    /** Job that the setting is for, as the shop calls it. */
+    jobReference: text().notNull().default(''),
+    neededOn: date(),
     note: text().notNull().default(''),
     state: text().notNull().default('open'),
     answer: text(),
@@ -122,6 +125,7 @@ export const settingRequest = pgTable(
     foreignKey({ columns: [t.shopId, t.createdBy], foreignColumns: [member.shopId, member.id], name: 'setting_request_author_fk' }),
     foreignKey({ columns: [t.shopId, t.answeredBy], foreignColumns: [member.shopId, member.id], name: 'setting_request_answered_by_fk' }),
     check('setting_request_state', sql`${t.state} in ('open','answered','closed')`),
+    index('setting_request_recent').on(t.shopId, t.state, t.createdAt),
     shopPolicy('setting_request'),
   ],
 );
