@@ -6,19 +6,22 @@ import type { NestFastifyApplication } from '@nestjs/platform-fastify';
 import { DocumentBuilder, SwaggerModule } from '@nestjs/swagger';
 import { AppModule } from './app.module';
 import { configureApp, createAdapter } from './app.setup';
+import { PROBLEMS } from './common/errors/problem-catalogue';
+import { problemPage } from './common/errors/problem-page';
 import { readEnv } from './config/env.validation';
 
-/** Same path from src and from dist. */
-const TARGET = join(__dirname, '..', '..', '..', 'packages', 'api-client', 'openapi.json');
+/** The same folder from src and from dist. */
+const ROOT = join(__dirname, '..', '..', '..');
 
-/** Writes the description of the api. Opens no connection and listens nowhere. */
+/** Writes what the api says of itself: its operations for the client, its problems for people. Opens no connection and listens nowhere. */
 async function writeDescription(): Promise<void> {
   const env = readEnv({ NODE_ENV: 'test', LOG_LEVEL: 'silent' });
   const app = await NestFactory.create<NestFastifyApplication>(AppModule.register(env), createAdapter(env), { logger: ['error'] });
   await configureApp(app);
   const settings = new DocumentBuilder().setTitle('Proofplate').setVersion('1').addBearerAuth().build();
   const description = SwaggerModule.createDocument(app, settings);
-  writeFileSync(TARGET, `${JSON.stringify(description, null, 2)}\n`);
+  writeFileSync(join(ROOT, 'packages', 'api-client', 'openapi.json'), `${JSON.stringify(description, null, 2)}\n`);
+  writeFileSync(join(ROOT, 'docs', 'problems.md'), problemPage(PROBLEMS));
   await app.close();
 }
 

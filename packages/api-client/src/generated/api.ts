@@ -3429,8 +3429,8 @@ export interface operations {
                 cursor?: string;
                 /** @description true: the archived ones instead of those in use */
                 archived?: boolean;
-                /** @description Only this family */
-                family?: "stainless-steel" | "carbon-steel" | "galvanised-steel" | "aluminium" | "titanium" | "brass" | "copper" | "bronze" | "copper-beryllium" | "nickel-alloy" | "precious-metal" | "magnesium" | "zirconium" | "zinc" | "lead-or-cadmium" | "hard-metal" | "acrylic" | "polycarbonate" | "abs" | "pvc" | "fluoropolymer" | "polyethylene" | "polypropylene" | "polystyrene" | "pet" | "polyamide" | "pom" | "peek" | "polyurethane" | "silicone" | "rubber" | "chlorinated-rubber" | "brominated-laminate" | "glass-fibre-composite" | "carbon-fibre-composite" | "wood" | "mdf" | "chrome-free-leather" | "chrome-tanned-leather" | "paper" | "textile" | "cork" | "glass" | "ceramic" | "stone" | "shell" | "coated-unknown" | "lithium-cell" | "unknown";
+                /** @description Only these families; give it once for each */
+                family?: ("stainless-steel" | "carbon-steel" | "galvanised-steel" | "aluminium" | "titanium" | "brass" | "copper" | "bronze" | "copper-beryllium" | "nickel-alloy" | "precious-metal" | "magnesium" | "zirconium" | "zinc" | "lead-or-cadmium" | "hard-metal" | "acrylic" | "polycarbonate" | "abs" | "pvc" | "fluoropolymer" | "polyethylene" | "polypropylene" | "polystyrene" | "pet" | "polyamide" | "pom" | "peek" | "polyurethane" | "silicone" | "rubber" | "chlorinated-rubber" | "brominated-laminate" | "glass-fibre-composite" | "carbon-fibre-composite" | "wood" | "mdf" | "chrome-free-leather" | "chrome-tanned-leather" | "paper" | "textile" | "cork" | "glass" | "ceramic" | "stone" | "shell" | "coated-unknown" | "lithium-cell" | "unknown")[];
                 /** @description Words to find in name, grade, designation or supplier */
                 q?: string;
             };

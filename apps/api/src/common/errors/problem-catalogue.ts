@@ -61,6 +61,11 @@ export const PROBLEMS: Readonly<Record<string, ProblemText>> = {
     'A caution only gets tighter',
     'Nobody loosens or removes a caution. Add one of the shop’s own beside it.',
   ),
+  'coupon-state': problem(
+    409,
+    'The coupon is past this, or not there yet',
+    'Load the coupon again: it goes from planned to marked, inspected and sealed.',
+  ),
   'stale-version': problem(
     412,
     'Somebody changed this in the meantime',
