@@ -5,6 +5,7 @@ import { logSettings } from './common/http/logging';
 import { ProblemsModule } from './common/problems.module';
 import { ConfigModule } from './config/config.module';
 import { Env } from './config/env.validation';
+import { CouponsModule } from './coupons/coupons.module';
 import { DatabaseModule } from './database/database.module';
 import { HealthModule } from './health/health.module';
 import { LedgerModule } from './ledger/ledger.module';
@@ -35,6 +36,7 @@ export class AppModule {
         LensesModule,
         MaterialsModule,
         PhotosModule,
+        CouponsModule,
       ],
     };
   }

@@ -20,8 +20,9 @@ export function cellDose(
   const lineSpacingUm = values.lineSpacingUm?.physical;
   if (speedMmPerS === undefined) return absent('The scan speed is not known.');
   if (lineSpacingUm === undefined) return absent('The line spacing is not known.');
-  const passes = values.passes?.physical;
-  if (passes === undefined) return absent('The number of passes is not known.');
+  if (unknownFields.includes('passes')) return absent('The number of passes is not known.');
+  // a panel that shows no passes marks once
+  const passes = values.passes?.physical ?? 1;
   return {
     value: arealDose({ powerW: power.watts, speedMmPerS, lineSpacingUm, scans: passes * scansPerPass(fill) }),
     missingBecause: null,

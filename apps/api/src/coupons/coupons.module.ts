@@ -1,15 +1,42 @@
 import { Module } from '@nestjs/common';
 import { LedgerModule } from '../ledger/ledger.module';
+import { MachinesModule } from '../machines/machines.module';
+import { CouponArtworkController } from './coupon-artwork.controller';
+import { CouponArtworkService } from './coupon-artwork.service';
 import { CouponListRepository } from './coupon-list.repository';
 import { CouponListService } from './coupon-list.service';
+import { CouponMarkingController } from './coupon-marking.controller';
+import { CouponMarkingRepository } from './coupon-marking.repository';
+import { CouponMarkingService } from './coupon-marking.service';
+import { CouponPlanCatalogueService } from './coupon-plan-catalogue.service';
+import { CouponPlanGroundService } from './coupon-plan-ground.service';
+import { CouponPlansController } from './coupon-plans.controller';
+import { CouponPlansRepository } from './coupon-plans.repository';
+import { CouponPlansService } from './coupon-plans.service';
+import { CouponConfirmationService } from './coupon-plans-confirmation.service';
+import { CouponStoreService } from './coupon-plans-store.service';
 import { CouponsController } from './coupons.controller';
 import { CouponsRepository } from './coupons.repository';
 import { CouponsService } from './coupons.service';
 
 @Module({
-  imports: [LedgerModule],
-  controllers: [CouponsController],
-  providers: [CouponsService, CouponsRepository, CouponListService, CouponListRepository],
+  imports: [LedgerModule, MachinesModule],
+  controllers: [CouponsController, CouponPlansController, CouponMarkingController, CouponArtworkController],
+  providers: [
+    CouponsService,
+    CouponsRepository,
+    CouponListService,
+    CouponListRepository,
+    CouponPlansService,
+    CouponConfirmationService,
+    CouponStoreService,
+    CouponPlanGroundService,
+    CouponPlanCatalogueService,
+    CouponPlansRepository,
+    CouponMarkingService,
+    CouponMarkingRepository,
+    CouponArtworkService,
+  ],
   exports: [CouponsService],
 })
 export class CouponsModule {}

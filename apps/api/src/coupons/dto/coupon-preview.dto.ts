@@ -1,0 +1,57 @@
+import { ApiProperty } from '@nestjs/swagger';
+import { DoseDto, GridFactorDto, PlateSizeDto } from './coupon.dto';
+import { ParameterSetDto } from './parameter-set.dto';
+
+export class PreviewCellDto {
+  @ApiProperty({ description: 'Row letter and column number' }) address: string;
+  @ApiProperty({ description: 'Row from 0' }) rowIndex: number;
+  @ApiProperty({ description: 'Column from 0' }) columnIndex: number;
+  @ApiProperty({ description: 'Place in the order of marking, from 1' }) runOrder: number;
+  @ApiProperty({ type: DoseDto, description: 'Areal dose' }) dose: DoseDto;
+}
+
+export class PlanWarningDto {
+  @ApiProperty({
+    description: 'dose, lines-apart, spots-apart, pulse-energy, out-of-range, no-dose, plate-too-large, no-labels, slow',
+  })
+  code: string;
+  @ApiProperty({ description: 'What the matter is' }) title: string;
+  @ApiProperty({ description: 'Why, and the way out' }) detail: string;
+  @ApiProperty({ type: [String], description: 'Cells that it is about; empty: the whole plate' }) addresses: string[];
+}
+
+export class PlanCautionDto {
+  @ApiProperty({ format: 'uuid', description: 'Id of the caution' }) id: string;
+  @ApiProperty({ description: 'What to do' }) subject: string;
+  @ApiProperty({ description: 'Why' }) text: string;
+  @ApiProperty({ description: 'Where it comes from' }) source: string;
+}
+
+export class MarkingTimeDto {
+  @ApiProperty({ type: Number, nullable: true, description: 'Time of all cells, s; null: see missingBecause' }) totalS: number | null;
+  @ApiProperty({ type: Number, nullable: true, description: 'Of it with the beam on, s' }) beamOnS: number | null;
+  @ApiProperty({ type: String, nullable: true, description: 'Why the time is not known' }) missingBecause: string | null;
+}
+
+export class DoseCautionDto {
+  @ApiProperty({ description: 'Dose from which cells are flagged, J/mm²' }) doseJPerMm2: number;
+  @ApiProperty({ description: 'Where the number comes from' }) source: string;
+}
+
+/** What a plan would give. Nothing is stored. */
+export class CouponPreviewDto {
+  @ApiProperty({ description: 'Rows of cells' }) rows: number;
+  @ApiProperty({ description: 'Columns of cells' }) columns: number;
+  @ApiProperty({ type: GridFactorDto, nullable: true, description: 'What varies down the rows' }) rowFactor: GridFactorDto | null;
+  @ApiProperty({ type: GridFactorDto, nullable: true, description: 'What varies across the columns' }) columnFactor: GridFactorDto | null;
+  @ApiProperty({ type: ParameterSetDto, description: 'The same in every cell' }) baseSetting: ParameterSetDto;
+  @ApiProperty({ type: [PreviewCellDto], description: 'Cells, row by row' }) cells: PreviewCellDto[];
+  @ApiProperty({ type: PlateSizeDto, description: 'Size of the plate' }) plate: PlateSizeDto;
+  @ApiProperty({ type: MarkingTimeDto, description: 'Marking time of all cells, labels not counted' }) markingTime: MarkingTimeDto;
+  @ApiProperty({ enum: ['calibration', 'not calibrated', 'mixed', 'unknown'], description: 'Where the watts come from' })
+  powerBasis: 'calibration' | 'not calibrated' | 'mixed' | 'unknown';
+  @ApiProperty({ type: Number, nullable: true, description: 'Spot on the work in the base setting, µm' }) spotUm: number | null;
+  @ApiProperty({ type: DoseCautionDto, nullable: true, description: 'Dose that is flagged' }) doseCaution: DoseCautionDto | null;
+  @ApiProperty({ type: [PlanWarningDto], description: 'What to look at before marking' }) warnings: PlanWarningDto[];
+  @ApiProperty({ type: [PlanCautionDto], description: 'Cautions for this work, to be read before it' }) cautions: PlanCautionDto[];
+}
