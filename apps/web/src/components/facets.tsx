@@ -88,7 +88,7 @@ function FacetRow({ value: { label, count }, isChosen, onToggle }: FacetRowProps
     >
       <Checkbox id={id} checked={isChosen} disabled={isEmpty} onChange={(event) => onToggle(event.currentTarget.checked)} />
       {label}
-      <chakra.span color="fg.muted">{count}</chakra.span>
+      <chakra.span color="fg.muted">{`\u00A0${count}`}</chakra.span>
     </chakra.label>
   );
 }
