@@ -9,7 +9,7 @@ let server: ReturnType<typeof fakeServer>;
 beforeEach(() => openSession({ ...makeSessionAnswer(), accessToken: 'old' }));
 afterEach(() => {
   server.restore();
-  closeSession({ hasEnded: false });
+  closeSession('left');
 });
 
 const onlyWith =

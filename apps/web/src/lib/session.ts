@@ -14,10 +14,12 @@ export type Session = {
 
 export type SessionAnswer = Session & { accessToken: string; expiresAt: string };
 
+/** none: nobody was signed in. left: the person signed out. ended: the server no longer takes the session. */
+export type SignedOutReason = 'none' | 'left' | 'ended';
+
 export type SessionState =
   | { status: 'unknown' }
-  /** `hasEnded`: there was a session and the server no longer takes it. */
-  | { status: 'signed-out'; hasEnded: boolean }
+  | { status: 'signed-out'; reason: SignedOutReason }
   /** The server could not be reached, so nobody knows yet. */
   | { status: 'unreachable' }
   | { status: 'signed-in'; session: Session };
@@ -60,9 +62,9 @@ export function updateShop({ name, unitSystem, timeZone, locale }: Omit<Session[
   change({ status: 'signed-in', session: { ...session, shop: { id: session.shop.id, name, unitSystem, timeZone, locale } } });
 }
 
-export function closeSession({ hasEnded }: { hasEnded: boolean }): void {
+export function closeSession(reason: SignedOutReason): void {
   accessToken = undefined;
-  change({ status: 'signed-out', hasEnded });
+  change({ status: 'signed-out', reason });
 }
 
 /** Fetches a new access token; calls at the same time share one request. False when there is no session any more. */
@@ -85,7 +87,7 @@ async function refreshOnce(): Promise<boolean> {
     if (!wasSignedIn) change({ status: 'unreachable' });
     return false;
   }
-  closeSession({ hasEnded: wasSignedIn });
+  closeSession(wasSignedIn ? 'ended' : 'none');
   return false;
 }
 

@@ -32,7 +32,7 @@ let server: ReturnType<typeof fakeServer>;
 beforeEach(() => openSession(makeSessionAnswer('owner')));
 afterEach(() => {
   server.restore();
-  closeSession({ hasEnded: false });
+  closeSession('left');
 });
 
 async function openPage(handlers: Parameters<typeof fakeServer>[0] = {}) {

@@ -15,7 +15,7 @@ const serve = (handlers: Parameters<typeof fakeServer>[0]) => {
   server = fakeServer(handlers);
 };
 
-beforeEach(() => closeSession({ hasEnded: false }));
+beforeEach(() => closeSession('left'));
 afterEach(() => server.restore());
 
 async function signIn(at = '/sign-in') {

@@ -12,7 +12,7 @@ export function Component() {
   if (state.status === 'signed-in') return <Navigate to={safeNext(search.get('next'))} replace />;
   return (
     <Page title="Sign in">
-      {state.status === 'signed-out' && state.hasEnded && (
+      {state.status === 'signed-out' && state.reason === 'ended' && (
         <chakra.p role="status" mb="4">
           Your session ended. Sign in and you come back to where you were.
         </chakra.p>

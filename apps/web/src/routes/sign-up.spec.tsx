@@ -18,7 +18,7 @@ const WRONG: readonly [label: string, message: string][] = [
 ];
 
 let server: ReturnType<typeof fakeServer>;
-beforeEach(() => closeSession({ hasEnded: false }));
+beforeEach(() => closeSession('left'));
 afterEach(() => server.restore());
 
 async function openPage() {

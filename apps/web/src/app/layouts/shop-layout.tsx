@@ -5,7 +5,7 @@ import { Button } from '../../components/button';
 import { ProblemNotice } from '../../components/problem-notice';
 import { SkeletonBlock } from '../../components/skeletons';
 import { StatusLineProvider } from '../../components/status-line';
-import { signInFrom } from '../../lib/paths';
+import { paths, signInFrom } from '../../lib/paths';
 import { refreshSession, type Session, useSessionState } from '../../lib/session';
 import { useShortcut } from '../../lib/shortcuts';
 import { BottomBar } from './bottom-bar';
@@ -26,7 +26,8 @@ export function ShopLayout() {
     if (state.status === 'unknown') void refreshSession();
   }, [state.status]);
 
-  if (state.status === 'signed-out') return <Navigate to={signInFrom(pathname + search)} replace />;
+  if (state.status === 'signed-out')
+    return <Navigate to={state.reason === 'left' ? paths.signIn : signInFrom(pathname + search)} replace />;
   if (state.status === 'signed-in') return <ShopFrame session={state.session} />;
   return (
     <chakra.main px={{ base: '4', sm: '6', lg: '10' }} py="6">

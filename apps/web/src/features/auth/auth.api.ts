@@ -1,17 +1,12 @@
+import type { components } from '@proofplate/api-client';
 import { request } from '../../lib/api';
-import { closeSession, openSession, REQUESTED_BY, type Role, type SessionAnswer, type UnitSystem } from '../../lib/session';
+import { closeSession, openSession, REQUESTED_BY, type SessionAnswer } from '../../lib/session';
 import { forgetAllReads } from '../../lib/swr';
 
-export type SignUp = {
-  shopName: string;
-  name: string;
-  email: string;
-  password: string;
-  unitSystem: UnitSystem;
-  timeZone: string;
-  locale: string;
-};
-export type InvitationPreview = { shopName: string; email: string; role: Role; hasAccount: boolean };
+type Schemas = components['schemas'];
+
+export type SignUp = Schemas['SignUpDto'];
+export type InvitationPreview = Schemas['InvitationPreviewDto'];
 
 export async function signUp(body: SignUp, idempotencyKey: string): Promise<void> {
   await enter(await request<SessionAnswer>('post', '/api/auth/sign-up', { body, idempotencyKey, headers: REQUESTED_BY }));
@@ -55,6 +50,6 @@ async function enter(answer: SessionAnswer): Promise<void> {
 }
 
 async function leave(): Promise<void> {
-  closeSession({ hasEnded: false });
+  closeSession('left');
   await forgetAllReads();
 }

@@ -1,42 +1,26 @@
+import type { components } from '@proofplate/api-client';
 import type { SWRResponse } from 'swr';
 import { type ProblemError, request } from '../../lib/api';
 import type { Role } from '../../lib/session';
 import { revalidate, useRead } from '../../lib/swr';
 
-export type Member = {
-  id: string;
-  printedName: string;
-  email: string | null;
-  role: Role;
-  state: 'active' | 'removed';
-  createdAt: string;
-  version: number;
-  allowedActions: readonly string[];
-};
+type Schemas = components['schemas'];
 
-export type Invitation = {
-  id: string;
-  email: string;
-  role: Role;
-  state: 'open' | 'expired' | 'accepted' | 'revoked';
-  invitedBy: string;
-  createdAt: string;
-  expiresAt: string;
-  allowedActions: readonly string[];
-};
-
-type Page<T> = { items: readonly T[]; nextCursor: string | null };
+export type Member = Schemas['MemberDto'];
+export type Invitation = Schemas['InvitationDto'];
+type MemberPage = Schemas['MemberPageDto'];
+type InvitationPage = Schemas['InvitationPageDto'];
 
 const MEMBERS = '/api/members';
 const INVITATIONS = '/api/invitations';
 const MOST_PEOPLE_AT_ONCE = 100;
 
-export function useMembers(): SWRResponse<Page<Member>, ProblemError> {
-  return useRead<Page<Member>>(MEMBERS, { limit: MOST_PEOPLE_AT_ONCE });
+export function useMembers(): SWRResponse<MemberPage, ProblemError> {
+  return useRead<MemberPage>(MEMBERS, { limit: MOST_PEOPLE_AT_ONCE });
 }
 
-export function useInvitations(): SWRResponse<Page<Invitation>, ProblemError> {
-  return useRead<Page<Invitation>>(INVITATIONS, { limit: MOST_PEOPLE_AT_ONCE });
+export function useInvitations(): SWRResponse<InvitationPage, ProblemError> {
+  return useRead<InvitationPage>(INVITATIONS, { limit: MOST_PEOPLE_AT_ONCE });
 }
 
 export async function invite(body: { email: string; role: Role }, idempotencyKey: string): Promise<void> {

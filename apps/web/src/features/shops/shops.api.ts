@@ -1,33 +1,16 @@
+import type { components } from '@proofplate/api-client';
 import type { SWRResponse } from 'swr';
 import { type ProblemError, request } from '../../lib/api';
-import { type UnitSystem, updateShop } from '../../lib/session';
+import { updateShop } from '../../lib/session';
 import { revalidate, useRead } from '../../lib/swr';
 
-export type ShopPolicy = {
-  minimumConfirmationMarks: number;
-  authorMaySign: boolean;
-  reviewEveryDays: number;
-  overdueBlocks: boolean;
-  photoRequired: boolean;
-  calibrationAgeDays: number;
-  powerShiftPercent: number;
-  secondFactorForSigning: boolean;
-};
+type Schemas = components['schemas'];
 
-export type Shop = {
-  id: string;
-  name: string;
-  unitSystem: UnitSystem;
-  timeZone: string;
-  locale: string;
-  policy: ShopPolicy;
-  version: number;
-  allowedActions: readonly string[];
-};
+export type ShopPolicy = Schemas['ShopPolicyDto'];
+export type Shop = Schemas['ShopDto'];
+export type ShopChange = Schemas['UpdateShopDto'];
 
 const SHOP = '/api/shop';
-
-export type ShopChange = Partial<Pick<Shop, 'name' | 'unitSystem' | 'timeZone' | 'locale' | 'policy'>> & { password?: string };
 
 export function useShop(): SWRResponse<Shop, ProblemError> {
   // Never in the background: a form must start from the version it shows, or a save would hide somebody else's change.
