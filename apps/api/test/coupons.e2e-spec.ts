@@ -106,6 +106,15 @@ describe('GET /api/coupons/:id', () => {
   });
 });
 
+describe('GET /api/coupons/:code', () => {
+  it('finds the coupon of the caller’s own shop by its code', async () => {
+    const [coupon] = coupons;
+    expect((await get(`/api/coupons/${coupon?.code.toLowerCase()}`)).json<CouponDto>().id).toBe(coupon?.id);
+    const theirs = (await get(`/api/coupons/${coupon?.code}`, elsewhere.operator.headers)).json<CouponDto>();
+    expect(theirs).toMatchObject({ code: coupon?.code, title: 'not ours' });
+  });
+});
+
 describe('downloads of a coupon', () => {
   it('gives the artwork in millimetres with one group per cell in run order', async () => {
     const coupon = await created<CouponDto>(test, shop.operator, '/api/coupons', planBody(shop));
@@ -155,6 +164,7 @@ describe('rights', () => {
 
   it('show another shop nothing', async () => {
     for (const url of urls().slice(3)) expectProblem(await get(url, elsewhere.operator.headers), 404, 'not-found');
-    expectProblem(await get('/api/coupons/C-0001'), 404, 'not-found');
+    expectProblem(await get('/api/coupons/C-9999'), 404, 'not-found');
+    expectProblem(await get('/api/coupons/nothing'), 404, 'not-found');
   });
 });

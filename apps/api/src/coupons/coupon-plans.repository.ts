@@ -8,7 +8,7 @@ const { cell, cellRating, coupon, recipe, revision, testGrid } = schema;
 
 export type NewCoupon = Pick<StoredCoupon, 'code' | 'title' | 'purpose' | 'materialId' | 'finishId' | 'effectId' | 'machineId'> &
   Pick<StoredCoupon, 'profileId' | 'lensId' | 'calibrationId' | 'lot' | 'thicknessMm' | 'storedAt' | 'notes' | 'acknowledgedCautionIds'> &
-  Partial<Pick<StoredCoupon, 'state' | 'confirmsRevisionId' | 'isImported' | 'unknownFields' | 'markedAt' | 'ambientNotes'>>;
+  Partial<Pick<StoredCoupon, 'state' | 'confirmsRevisionId' | 'isImported' | 'unknownFields' | 'markedAt' | 'markedBy' | 'ambientNotes'>>;
 export type NewGrid = Omit<StoredGrid, 'shopId' | 'id' | 'couponId' | 'number' | 'createdAt' | 'createdBy'>;
 export type NewCell = Pick<StoredCell, 'address' | 'rowIndex' | 'columnIndex' | 'runOrder' | 'parameters'> &
   Partial<Pick<StoredCell, 'markState' | 'markNote'>>;

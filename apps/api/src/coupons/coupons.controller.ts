@@ -3,7 +3,6 @@ import { ApiBearerAuth, ApiOkResponse, ApiOperation, ApiProduces, ApiTags } from
 import type { Actor } from '../common/actor';
 import { AtLeast } from '../common/decorators/at-least.decorator';
 import { CurrentMember } from '../common/decorators/current-member.decorator';
-import { IdPipe } from '../common/pipes/id.pipe';
 import { CouponListService } from './coupon-list.service';
 import { CouponsService } from './coupons.service';
 import { CouponDto, CouponPageDto } from './dto/coupon.dto';
@@ -47,9 +46,9 @@ export class CouponsController {
 
   @Get(':couponId')
   @AtLeast('operator')
-  @ApiOperation({ summary: 'One coupon with its grids and cells' })
+  @ApiOperation({ summary: 'One coupon with its grids and cells, by id or by code' })
   @ApiOkResponse({ type: CouponDto })
-  get(@CurrentMember() actor: Actor, @Param('couponId', IdPipe) couponId: string) {
+  get(@CurrentMember() actor: Actor, @Param('couponId') couponId: string) {
     return this.coupons.get(actor, couponId);
   }
 }

@@ -3,6 +3,8 @@ import { LedgerModule } from '../ledger/ledger.module';
 import { MachinesModule } from '../machines/machines.module';
 import { CouponArtworkController } from './coupon-artwork.controller';
 import { CouponArtworkService } from './coupon-artwork.service';
+import { CouponImportController } from './coupon-import.controller';
+import { CouponImportService } from './coupon-import.service';
 import { CouponListRepository } from './coupon-list.repository';
 import { CouponListService } from './coupon-list.service';
 import { CouponMarkingController } from './coupon-marking.controller';
@@ -21,7 +23,7 @@ import { CouponsService } from './coupons.service';
 
 @Module({
   imports: [LedgerModule, MachinesModule],
-  controllers: [CouponsController, CouponPlansController, CouponMarkingController, CouponArtworkController],
+  controllers: [CouponsController, CouponPlansController, CouponMarkingController, CouponArtworkController, CouponImportController],
   providers: [
     CouponsService,
     CouponsRepository,
@@ -36,6 +38,7 @@ import { CouponsService } from './coupons.service';
     CouponMarkingService,
     CouponMarkingRepository,
     CouponArtworkService,
+    CouponImportService,
   ],
   exports: [CouponsService],
 })

@@ -73,6 +73,15 @@ export class CouponsRepository {
     return view;
   }
 
+  /** The id behind a code that people read. */
+  async findIdByCode(tx: Tx, shopId: string, code: string): Promise<string | undefined> {
+    const [row] = await tx
+      .select({ id: coupon.id })
+      .from(coupon)
+      .where(and(eq(coupon.shopId, shopId), eq(coupon.code, code)));
+    return row?.id;
+  }
+
   async grids(tx: Tx, shopId: string, couponId: string): Promise<StoredGrid[]> {
     const rows = await tx
       .select()

@@ -1,10 +1,13 @@
 import { Injectable } from '@nestjs/common';
 import type { Actor } from '../common/actor';
+import { IdPipe } from '../common/pipes/id.pipe';
 import { type Tx, UnitOfWork } from '../database/unit-of-work';
 import { CouponNotFoundError } from './coupons.errors';
 import { toCouponDto, type WholeCoupon } from './coupons.mapper';
 import { CouponsRepository, type StoredCoupon } from './coupons.repository';
 import type { CouponDto } from './dto/coupon.dto';
+
+const CODE = /^C-\d{4,9}$/u;
 
 @Injectable()
 export class CouponsService {
@@ -13,8 +16,15 @@ export class CouponsService {
     private readonly coupons: CouponsRepository,
   ) {}
 
-  async get(actor: Actor, id: string): Promise<CouponDto> {
-    return this.unitOfWork.read(actor, (tx) => this.getDto(tx, actor, id));
+  /** By id, or by the code that stands on the plate and in addresses. */
+  async get(actor: Actor, idOrCode: string): Promise<CouponDto> {
+    return this.unitOfWork.read(actor, async (tx) => {
+      const code = idOrCode.toUpperCase();
+      if (!CODE.test(code)) return this.getDto(tx, actor, new IdPipe().transform(idOrCode));
+      const id = await this.coupons.findIdByCode(tx, actor.shopId, code);
+      if (id === undefined) throw new CouponNotFoundError();
+      return this.getDto(tx, actor, id);
+    });
   }
 
   /** The answer of every act on a coupon. @throws CouponNotFoundError also for another shop's coupon */
