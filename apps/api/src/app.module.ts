@@ -5,6 +5,7 @@ import { logSettings } from './common/http/logging';
 import { ProblemsModule } from './common/problems.module';
 import { ConfigModule } from './config/config.module';
 import { Env } from './config/env.validation';
+import { CouponInspectionModule } from './coupons/coupon-inspection.module';
 import { CouponsModule } from './coupons/coupons.module';
 import { DatabaseModule } from './database/database.module';
 import { HealthModule } from './health/health.module';
@@ -37,6 +38,7 @@ export class AppModule {
         MaterialsModule,
         PhotosModule,
         CouponsModule,
+        CouponInspectionModule,
       ],
     };
   }

@@ -20,7 +20,11 @@ type Verdict = Omit<CellVerdictDto, 'rank'>;
  */
 export function cellVerdicts(
   cellIds: readonly string[],
-  found: { readonly criteria: readonly Criterion[]; readonly ratings: readonly JudgedRating[]; readonly measurements: readonly JudgedMeasurement[] },
+  found: {
+    readonly criteria: readonly Criterion[];
+    readonly ratings: readonly JudgedRating[];
+    readonly measurements: readonly JudgedMeasurement[];
+  },
 ): CellVerdictDto[] {
   const ratings = groupByCell(found.ratings);
   const measurements = groupByCell(standing(found.measurements));

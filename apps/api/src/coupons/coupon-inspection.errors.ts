@@ -6,7 +6,9 @@ export class CriteriaFirstError extends ConflictError {
   override readonly title = 'Record the acceptance criteria first';
 
   constructor() {
-    super('Criteria are recorded before anything is rated or measured, so that results cannot bend them. Record them on the coupon’s page.');
+    super(
+      'Criteria are recorded before anything is rated or measured, so that results cannot bend them. Record them on the coupon’s page.',
+    );
   }
 }
 

@@ -66,6 +66,22 @@ export const PROBLEMS: Readonly<Record<string, ProblemText>> = {
     'The coupon is past this, or not there yet',
     'Load the coupon again: it goes from planned to marked, inspected and sealed.',
   ),
+  'criteria-first': problem(
+    409,
+    'Record the acceptance criteria first',
+    'Criteria are recorded before anything is rated or measured, so that results cannot bend them.',
+  ),
+  'criteria-fixed': problem(
+    409,
+    'The criteria stay as they were recorded',
+    'Something was rated or measured already. Plan another coupon to judge by other criteria.',
+  ),
+  'inspection-incomplete': problem(
+    409,
+    'The inspection is not complete',
+    'The answer lists everything that is missing. Rate each cell, or say why nobody does.',
+  ),
+  'not-ready-to-seal': problem(409, 'The coupon cannot be sealed yet', 'The answer lists everything that is missing.'),
   'stale-version': problem(
     412,
     'Somebody changed this in the meantime',
