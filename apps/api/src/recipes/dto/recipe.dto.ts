@@ -22,6 +22,8 @@ export class RecipeFaceDto {
   @ApiProperty({ description: 'Column of the cell from 0' }) columnIndex: number;
   @ApiProperty({ description: 'Rows of the plate' }) rows: number;
   @ApiProperty({ description: 'Columns of the plate' }) columns: number;
+  @ApiProperty({ description: 'Side of a cell, mm' }) cellMm: number;
+  @ApiProperty({ description: 'Gap between cells, mm' }) gapMm: number;
   @ApiProperty({ type: EvidencePhotoDto, nullable: true, description: 'Newest photo that is ready' }) photo: EvidencePhotoDto | null;
 }
 
