@@ -19,7 +19,8 @@ export type SettingRow = {
 
 export type SettingCardProps = {
   code: string;
-  revision: number;
+  /** null: a draft has no number yet. */
+  revision: number | null;
   state: MarkState;
   /** "In the order of Bench 2's panel". */
   caption: ReactNode;
@@ -33,10 +34,11 @@ export type SettingCardProps = {
 /** The nameplate with what is dialled at the machine. */
 export function SettingCard({ code, revision, state, caption, rows, ticked = NONE, onTick }: SettingCardProps) {
   const next = onTick === undefined ? undefined : rows.find(({ key }) => !ticked.has(key))?.key;
+  const revisionWords = revision === null ? 'draft' : `revision ${revision}`;
   const isLarge = rows.length <= ROWS_AT_FULL_SIZE;
   return (
     <chakra.section
-      aria-label={`Setting of ${code} revision ${revision}`}
+      aria-label={`Setting of ${code} ${revisionWords}`}
       position="relative"
       bg="bg.panel"
       border="hairline"
@@ -51,7 +53,7 @@ export function SettingCard({ code, revision, state, caption, rows, ticked = NON
         <chakra.h2>
           {code}{' '}
           <chakra.span fontWeight="normal" color="fg.muted">
-            revision {revision}
+            {revisionWords}
           </chakra.span>
         </chakra.h2>
         <StateMark state={state} />
