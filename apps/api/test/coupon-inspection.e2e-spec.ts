@@ -34,16 +34,6 @@ const seal = async () => {
   return calls.seal();
 };
 
-describe('a coupon', () => {
-  it('is found by the code that people read, in its own shop only', async () => {
-    const read = (code: string, headers: Record<string, string>) => test.app.inject({ url: `/api/coupons/by-code/${code}`, headers });
-    expect((await read(coupon.code.toLowerCase(), shop.operator.headers)).json<CouponDto>().id).toBe(coupon.id);
-    expectProblem(await read('C-9999', shop.operator.headers), 404, 'not-found');
-    const other = await read(coupon.code, elsewhere.operator.headers);
-    expect(other.statusCode).toBe(404);
-  });
-});
-
 describe('acceptance criteria', () => {
   it('are proposed by the effect, recorded with their units, and may be recorded anew until the first result', async () => {
     const before = await calls.read();

@@ -25,14 +25,6 @@ export class CouponInspectionController {
     private readonly corrections: CouponCorrectionsService,
   ) {}
 
-  @Get('by-code/:code')
-  @AtLeast('operator')
-  @ApiOperation({ summary: 'One coupon by the code that people read' })
-  @ApiOkResponse({ type: CouponDto })
-  getByCode(@CurrentMember() actor: Actor, @Param('code') code: string) {
-    return this.inspection.getByCode(actor, code);
-  }
-
   @Get(':couponId/inspection')
   @AtLeast('operator')
   @ApiOperation({ summary: 'What was found on the cells: criteria, ratings, measurements, verdicts, corrections, and what is missing' })

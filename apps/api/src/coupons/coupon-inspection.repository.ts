@@ -14,14 +14,6 @@ const nextVersion = sql`${coupon.version} + 1`;
 
 @Injectable()
 export class CouponInspectionRepository {
-  async findIdByCode(tx: Tx, shopId: string, code: string): Promise<string | undefined> {
-    const [row] = await tx
-      .select({ id: coupon.id })
-      .from(coupon)
-      .where(and(eq(coupon.shopId, shopId), eq(coupon.code, code)));
-    return row?.id;
-  }
-
   /** Keeps the coupon from changing its state until the transaction ends; several people may hold it at once. */
   async hold(tx: Tx, shopId: string, id: string): Promise<StoredCoupon | undefined> {
     const [row] = await tx.select().from(coupon).where(isCoupon(shopId, id)).for('share');

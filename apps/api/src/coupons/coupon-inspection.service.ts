@@ -7,9 +7,7 @@ import { criteriaAsStored, criteriaProblems } from '../materials/effect-criteria
 import { CouponInspectionReader } from './coupon-inspection.reader';
 import { CouponInspectionRepository } from './coupon-inspection.repository';
 import { requireOpenForCriteria } from './coupon-inspection-state';
-import { CouponNotFoundError } from './coupons.errors';
 import { CouponsService } from './coupons.service';
-import type { CouponDto } from './dto/coupon.dto';
 import type { InspectionDto } from './dto/inspection.dto';
 import type { RecordCriteriaDto } from './dto/record-criteria.dto';
 
@@ -22,15 +20,6 @@ export class CouponInspectionService {
     private readonly reader: CouponInspectionReader,
     private readonly ledger: LedgerService,
   ) {}
-
-  /** The coupon with the code that people read. */
-  async getByCode(actor: Actor, code: string): Promise<CouponDto> {
-    return this.unitOfWork.read(actor, async (tx) => {
-      const id = await this.repository.findIdByCode(tx, actor.shopId, code.trim().toUpperCase());
-      if (id === undefined) throw new CouponNotFoundError();
-      return this.coupons.getDto(tx, actor, id);
-    });
-  }
 
   async get(actor: Actor, couponId: string): Promise<InspectionDto> {
     return this.unitOfWork.read(actor, (tx) => this.reader.read(tx, actor, couponId));
