@@ -15,6 +15,7 @@ import { MachinesModule } from './machines/machines.module';
 import { MaterialsModule } from './materials/materials.module';
 import { MembersModule } from './members/members.module';
 import { PhotosModule } from './photos/photos.module';
+import { RecipesModule } from './recipes/recipes.module';
 import { ShopsModule } from './shops/shops.module';
 
 /** Every module of the api, lowest row of the import law first. */
@@ -39,6 +40,7 @@ export class AppModule {
         PhotosModule,
         CouponsModule,
         CouponInspectionModule,
+        RecipesModule,
       ],
     };
   }

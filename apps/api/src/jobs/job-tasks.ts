@@ -2,6 +2,7 @@
 export type JobPayloads = {
   'mail.send': { readonly outboxId: string };
   'photos.develop': { readonly photoId: string };
+  'revisions.take-effect': { readonly revisionId: string };
 };
 
 export type TaskName = keyof JobPayloads;

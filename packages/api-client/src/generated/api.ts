@@ -979,6 +979,507 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/api/coupons": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Coupons of the shop with the faces of their plates, newest first */
+        get: operations["CouponsController_list"];
+        put?: never;
+        /** Plan a coupon with a crossed grid */
+        post: operations["CouponPlansController_create"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/coupons/facets": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** What the list can be narrowed by, with counts */
+        get: operations["CouponsController_facets"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/coupons/export.csv": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** The same list as CSV, all pages */
+        get: operations["CouponsController_exportCsv"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/coupons/{couponId}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** One coupon with its grids and cells, by id or by code */
+        get: operations["CouponsController_get"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/coupons/preview": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** What a plan would give: cells with dose, warnings, marking time, plate size; nothing is stored */
+        post: operations["CouponPlansController_preview"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/coupons/confirmation": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Plan a coupon of equal cells that is to prove a draft */
+        post: operations["CouponPlansController_confirm"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/coupons/{couponId}/marking/start": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** The labels are marked; the cells come next */
+        post: operations["CouponMarkingController_start"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/coupons/{couponId}/marking/cells": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Say what became of a cell: marked, differs or skipped */
+        post: operations["CouponMarkingController_markCell"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/coupons/{couponId}/marking/undo": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Take back what was said of a cell */
+        post: operations["CouponMarkingController_undo"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/coupons/{couponId}/marking/finish": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** The plate is marked: planned → marked */
+        post: operations["CouponMarkingController_finish"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/coupons/{couponId}/artwork.svg": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Artwork of the plate, 1 unit = 1 mm, with corner marks, letters, code and cells */
+        get: operations["CouponArtworkController_artwork"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/coupons/{couponId}/cells.csv": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Cells of the coupon in run order, with what the panel shows */
+        get: operations["CouponArtworkController_cells"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/coupons/import/preview": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** What an import would store: cells, unknown fields, and every refused row with its reason */
+        post: operations["CouponImportController_preview"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/coupons/import": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Enter a plate that was burnt before it was logged here */
+        post: operations["CouponImportController_create"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/coupons/{couponId}/inspection": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** What was found on the cells: criteria, ratings, measurements, verdicts, corrections, and what is missing */
+        get: operations["CouponInspectionController_get"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/coupons/{couponId}/criteria": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        /** Record what a mark must meet, before anything is rated or measured */
+        put: operations["CouponInspectionController_recordCriteria"];
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/coupons/{couponId}/inspect": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Finish the inspection: every cell is rated, skipped, or named with the reason */
+        post: operations["CouponInspectionController_inspect"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/coupons/{couponId}/seal": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Seal the coupon: it can be cited, and nothing of it changes any more */
+        post: operations["CouponInspectionController_seal"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/coupons/{couponId}/corrections": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Say beside a sealed coupon what is right instead, and why */
+        post: operations["CouponInspectionController_correct"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/coupons/{couponId}/ratings": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        /**
+         * Save your own ratings of cells, all or none
+         * @description Each names the version that you saw, so a repeat after a lost answer is refused with what is stored, not stored twice.
+         */
+        put: operations["CouponRatingsController_saveRatings"];
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/coupons/{couponId}/measurements": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Add measurements of cells, all or none */
+        post: operations["CouponRatingsController_addMeasurements"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/recipes": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Recipes of the shop with counts for every choice; what needs the caller first */
+        get: operations["RecipesController_list"];
+        put?: never;
+        /** Begin a recipe whose setting does not come from a coupon */
+        post: operations["RecipesController_create"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/recipes/from-cell": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Draft a recipe from a cell: a new recipe, or a draft of one with the same five keys */
+        post: operations["RecipesController_fromCell"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/recipes/{recipeId}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** One recipe with its ladder, its holds and the approved revision */
+        get: operations["RecipesController_get"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        /** Change the title; the scope only while nothing was submitted */
+        patch: operations["RecipesController_update"];
+        trace?: never;
+    };
+    "/api/recipes/{recipeId}/drafts": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Propose a change: a draft that copies an earlier revision */
+        post: operations["RecipesController_createDraft"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/revisions/compare": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Two to four revisions side by side, of one recipe or of several */
+        get: operations["RecipeRevisionsController_compare"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/revisions/{revisionId}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** One revision, whole */
+        get: operations["RecipeRevisionsController_get"];
+        put?: never;
+        post?: never;
+        /** Discard a draft */
+        delete: operations["RecipeRevisionsController_remove"];
+        options?: never;
+        head?: never;
+        /** Change a draft; every value is read by the rules of the machine’s panel */
+        patch: operations["RecipeRevisionsController_update"];
+        trace?: never;
+    };
+    "/api/revisions/{revisionId}/evidence": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        /** Say which cells a draft rests on and which proved it */
+        put: operations["RecipeRevisionsController_setEvidence"];
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/revisions/{revisionId}/evidence/candidates": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Cells that a draft could cite */
+        get: operations["RecipeRevisionsController_candidates"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
 }
 export type webhooks = Record<string, never>;
 export interface components {
@@ -2189,6 +2690,2225 @@ export interface components {
              */
             foundBy: "hand" | "marks";
         };
+        CouponMaterialDto: {
+            /**
+             * Format: uuid
+             * @description Id
+             */
+            id: string;
+            /** @description Name in the shop */
+            name: string;
+            /**
+             * @description Family of the material
+             * @enum {string}
+             */
+            family: "stainless-steel" | "carbon-steel" | "galvanised-steel" | "aluminium" | "titanium" | "brass" | "copper" | "bronze" | "copper-beryllium" | "nickel-alloy" | "precious-metal" | "magnesium" | "zirconium" | "zinc" | "lead-or-cadmium" | "hard-metal" | "acrylic" | "polycarbonate" | "abs" | "pvc" | "fluoropolymer" | "polyethylene" | "polypropylene" | "polystyrene" | "pet" | "polyamide" | "pom" | "peek" | "polyurethane" | "silicone" | "rubber" | "chlorinated-rubber" | "brominated-laminate" | "glass-fibre-composite" | "carbon-fibre-composite" | "wood" | "mdf" | "chrome-free-leather" | "chrome-tanned-leather" | "paper" | "textile" | "cork" | "glass" | "ceramic" | "stone" | "shell" | "coated-unknown" | "lithium-cell" | "unknown";
+        };
+        NamedDto: {
+            /**
+             * Format: uuid
+             * @description Id
+             */
+            id: string;
+            /** @description Name in the shop */
+            name: string;
+        };
+        CouponEffectDto: {
+            /**
+             * Format: uuid
+             * @description Id
+             */
+            id: string;
+            /** @description Name in the shop */
+            name: string;
+            /** @description Key of the effect */
+            key: string;
+        };
+        CouponMachineDto: {
+            /**
+             * Format: uuid
+             * @description Id
+             */
+            id: string;
+            /** @description Name in the shop */
+            name: string;
+            /**
+             * @description Kind of laser source
+             * @enum {string}
+             */
+            sourceKind: "fibre-q-switched" | "fibre-mopa" | "co2" | "uv" | "green" | "diode" | "ultrafast";
+        };
+        CouponLensDto: {
+            /**
+             * Format: uuid
+             * @description Id
+             */
+            id: string;
+            /** @description Name in the shop */
+            name: string;
+            /** @description Focal length, mm */
+            focalLengthMm: number;
+            /** @description Side of the marking field, mm */
+            fieldSizeMm: number;
+            /** @description Spot measured on this machine, µm; null: not measured */
+            measuredSpotUm: number | null;
+        };
+        CouponFaceDto: {
+            /** @description Rows of cells */
+            rows: number;
+            /** @description Columns of cells */
+            columns: number;
+            /**
+             * @description What the values are: mean rating, or dose in J/mm² before anybody rated
+             * @enum {string}
+             */
+            shows: "rating" | "dose";
+            /** @description One per cell; null: none */
+            values: (number | null)[];
+        };
+        CouponSummaryDto: {
+            /**
+             * Format: uuid
+             * @description Id of the coupon
+             */
+            id: string;
+            /** @description Code that people read, such as C-0117 */
+            code: string;
+            /** @description What the coupon is for, in the shop’s words; may be empty */
+            title: string;
+            /**
+             * @description Looking for a setting, or proving one
+             * @enum {string}
+             */
+            purpose: "exploration" | "confirmation";
+            /**
+             * @description State
+             * @enum {string}
+             */
+            state: "planned" | "marked" | "inspected" | "sealed";
+            /** @description Material */
+            material: components["schemas"]["CouponMaterialDto"];
+            /** @description Finish */
+            finish: components["schemas"]["NamedDto"];
+            /** @description Effect that is wanted */
+            effect: components["schemas"]["CouponEffectDto"];
+            /** @description Machine */
+            machine: components["schemas"]["CouponMachineDto"];
+            /** @description Lens */
+            lens: components["schemas"]["CouponLensDto"];
+            /** @description Lot of the material; may be empty */
+            lot: string;
+            /** @description Thickness of the plate, mm */
+            thicknessMm: number | null;
+            /** @description Where the plate is kept; may be empty */
+            storedAt: string;
+            /** @description true: burnt before it was logged here */
+            isImported: boolean;
+            /** @description true: invented for the demo shop */
+            isInvented: boolean;
+            /**
+             * Format: date-time
+             * @description When it was entered
+             */
+            createdAt: string;
+            /** @description Who entered it */
+            createdBy: string;
+            /**
+             * Format: date-time
+             * @description When it was marked
+             */
+            markedAt: string | null;
+            /** @description Face of the first grid */
+            face: components["schemas"]["CouponFaceDto"] | null;
+            /** @description Cells on the plate */
+            cellCount: number;
+            /** @description Cells that somebody rated */
+            ratedCount: number;
+            /** @description Best rating so far */
+            bestRating: number | null;
+        };
+        CouponPageDto: {
+            /** @description The items of this page, in order */
+            items: components["schemas"]["CouponSummaryDto"][];
+            /** @description Send as cursor for the next page; null at the end */
+            nextCursor: string | null;
+        };
+        CouponFacetValueDto: {
+            /** @description Code or id of the value */
+            value: string;
+            /** @description The value in words */
+            label: string;
+            /** @description Coupons that have it, with the other choices held */
+            count: number;
+        };
+        CouponFacetsDto: {
+            /** @description States */
+            states: components["schemas"]["CouponFacetValueDto"][];
+            /** @description Materials */
+            materials: components["schemas"]["CouponFacetValueDto"][];
+            /** @description Effects */
+            effects: components["schemas"]["CouponFacetValueDto"][];
+            /** @description Machines */
+            machines: components["schemas"]["CouponFacetValueDto"][];
+            /** @description Coupons that fit all choices */
+            matchCount: number;
+            /** @description Coupons of the shop */
+            totalCount: number;
+        };
+        CouponProfileDto: {
+            /**
+             * Format: uuid
+             * @description Id of the profile version
+             */
+            id: string;
+            /** @description Version of the machine’s profile */
+            number: number;
+            /** @description Version of its physical part; evidence holds within one */
+            physicalNumber: number;
+            /** @description Source and scan head */
+            physical: components["schemas"]["PhysicalProfileDto"];
+            /** @description The fields of the control in its order */
+            panel: components["schemas"]["PanelDto"];
+        };
+        CouponCalibrationDto: {
+            /**
+             * Format: uuid
+             * @description Id of the power calibration
+             */
+            id: string;
+            /**
+             * Format: date
+             * @description Day of the reading
+             */
+            measuredOn: string;
+        };
+        ConfirmedRevisionDto: {
+            /**
+             * Format: uuid
+             * @description Id of the revision that the coupon is to prove
+             */
+            id: string;
+            /**
+             * Format: uuid
+             * @description Id of its recipe
+             */
+            recipeId: string;
+            /** @description Code of its recipe */
+            recipeCode: string;
+            /** @description Number of the revision; null: still a draft */
+            number: number | null;
+            /** @description State of the revision */
+            state: string;
+        };
+        CouponActDto: {
+            /**
+             * Format: date-time
+             * @description When
+             */
+            at: string;
+            /** @description Name of the member; null: not known */
+            by: string | null;
+        };
+        /**
+         * @description The parameter that varies
+         * @enum {string}
+         */
+        ParameterKey: "powerPercent" | "speedMmPerS" | "frequencyKhz" | "pulseWidthNs" | "lineSpacingUm" | "passes" | "focusOffsetMm" | "hatchAngleDeg" | "angleStepDeg" | "wobbleDiameterUm" | "wobbleFrequencyKhz";
+        /**
+         * @description The unit in which it was typed
+         * @enum {string}
+         */
+        PanelUnit: "percentFromZero" | "percentFromMinimum" | "mm/s" | "m/s" | "in/s" | "m/min" | "mm/min" | "kHz" | "Hz" | "um" | "mm" | "in" | "lpi" | "lpcm" | "ppi" | "W" | "ns" | "us" | "count" | "deg";
+        EnteredValueDto: {
+            /** @description The number as typed */
+            value: number;
+            /** @description The unit in which it was typed */
+            unit: components["schemas"]["PanelUnit"];
+        };
+        SetValueDto: {
+            /** @description What was typed, in the panel’s unit; never recomputed */
+            entered: components["schemas"]["EnteredValueDto"];
+            /** @description The same in the parameter’s own unit */
+            physical: number;
+        };
+        GridFactorDto: {
+            /** @description The parameter that varies */
+            parameter: components["schemas"]["ParameterKey"];
+            /**
+             * @description Equal steps, equal ratios, or levels as listed
+             * @enum {string}
+             */
+            spacing: "steps" | "ratios" | "list";
+            /** @description The levels in order */
+            levels: components["schemas"]["SetValueDto"][];
+        };
+        ParameterValuesDto: {
+            /** @description Power; absent: not set */
+            powerPercent?: components["schemas"]["SetValueDto"];
+            /** @description Scan speed; absent: not set */
+            speedMmPerS?: components["schemas"]["SetValueDto"];
+            /** @description Pulse frequency; absent: not set */
+            frequencyKhz?: components["schemas"]["SetValueDto"];
+            /** @description Pulse width; absent: not set */
+            pulseWidthNs?: components["schemas"]["SetValueDto"];
+            /** @description Line spacing; absent: not set */
+            lineSpacingUm?: components["schemas"]["SetValueDto"];
+            /** @description Passes; absent: not set */
+            passes?: components["schemas"]["SetValueDto"];
+            /** @description Focus offset; absent: not set */
+            focusOffsetMm?: components["schemas"]["SetValueDto"];
+            /** @description Fill angle; absent: not set */
+            hatchAngleDeg?: components["schemas"]["SetValueDto"];
+            /** @description Angle step; absent: not set */
+            angleStepDeg?: components["schemas"]["SetValueDto"];
+            /** @description Wobble diameter; absent: not set */
+            wobbleDiameterUm?: components["schemas"]["SetValueDto"];
+            /** @description Wobble frequency; absent: not set */
+            wobbleFrequencyKhz?: components["schemas"]["SetValueDto"];
+        };
+        /**
+         * @description How the area is scanned
+         * @enum {string}
+         */
+        Fill: "one direction" | "both directions" | "crossed" | "outline";
+        /**
+         * @description Assist, cover gas, air
+         * @enum {string}
+         */
+        Assist: "none" | "air" | "nitrogen" | "argon" | "oxygen" | "water-film" | "marking-spray" | "masking-tape";
+        DelaysDto: {
+            /** @description Laser-on delay, µs */
+            laserOn?: number;
+            /** @description Laser-off delay, µs */
+            laserOff?: number;
+            /** @description Jump delay, µs */
+            jump?: number;
+            /** @description Corner delay, µs */
+            corner?: number;
+        };
+        WorkPowerDto: {
+            /** @description Average power at the work, W; null: not known, see reason */
+            watts: number | null;
+            /**
+             * @description Where the watts come from
+             * @enum {string}
+             */
+            basis?: "calibration" | "not calibrated";
+            /** @description Why the watts are not known */
+            reason?: string;
+        };
+        ParameterSetDto: {
+            /** @description Values by parameter */
+            values: components["schemas"]["ParameterValuesDto"];
+            /** @description How the area is scanned */
+            fill: components["schemas"]["Fill"];
+            /** @description Assist, cover gas, air */
+            assist: components["schemas"]["Assist"];
+            /** @description Delays of the scan head, µs */
+            delaysUs?: components["schemas"]["DelaysDto"];
+            /** @description Average power at the work */
+            power: components["schemas"]["WorkPowerDto"];
+        };
+        PlateSizeDto: {
+            /** @description Width, mm */
+            widthMm: number;
+            /** @description Height, mm */
+            heightMm: number;
+        };
+        TestGridDto: {
+            /**
+             * Format: uuid
+             * @description Id of the grid
+             */
+            id: string;
+            /** @description Number of the grid on the coupon, from 1 */
+            number: number;
+            /** @description Rows of cells */
+            rows: number;
+            /** @description Columns of cells */
+            columns: number;
+            /** @description What varies down the rows; null: nothing */
+            rowFactor: components["schemas"]["GridFactorDto"] | null;
+            /** @description What varies across the columns; null: nothing */
+            columnFactor: components["schemas"]["GridFactorDto"] | null;
+            /** @description The same in every cell */
+            baseSetting: components["schemas"]["ParameterSetDto"];
+            /** @description Setting of corner marks, letters and code, marked first */
+            labelStep: components["schemas"]["ParameterSetDto"] | null;
+            /** @description Side of a cell, mm */
+            cellMm: number;
+            /** @description Gap between cells, mm */
+            gapMm: number;
+            /** @description Version of the plate’s geometry */
+            layoutVersion: string;
+            /** @description Seed of the random run order; null: row by row */
+            runOrderSeed: number | null;
+            /**
+             * @description Who draws the fill lines
+             * @enum {string}
+             */
+            fillDrawnBy: "machine" | "artwork";
+            /** @description Size of the plate */
+            plate: components["schemas"]["PlateSizeDto"];
+        };
+        DoseDto: {
+            /** @description Areal dose, J/mm²; null: see missingBecause */
+            value: number | null;
+            /** @description Why there is no dose */
+            missingBecause: string | null;
+        };
+        CouponCellDto: {
+            /**
+             * Format: uuid
+             * @description Id of the cell
+             */
+            id: string;
+            /**
+             * Format: uuid
+             * @description Id of its grid
+             */
+            gridId: string;
+            /** @description Row letter and column number, such as B4 */
+            address: string;
+            /** @description Row from 0 */
+            rowIndex: number;
+            /** @description Column from 0 */
+            columnIndex: number;
+            /** @description Place in the order of marking, from 1 */
+            runOrder: number;
+            /** @description As planned */
+            parameters: components["schemas"]["ParameterSetDto"];
+            /** @description As really marked, only where it differs */
+            actualParameters: components["schemas"]["ParameterSetDto"] | null;
+            /**
+             * @description What became of the cell
+             * @enum {string}
+             */
+            markState: "planned" | "marked" | "differs" | "skipped";
+            /** @description Why it was skipped or differs */
+            markNote: string;
+            /**
+             * Format: date-time
+             * @description When it was marked
+             */
+            markedAt: string | null;
+            /** @description Areal dose of what was really marked */
+            dose: components["schemas"]["DoseDto"];
+            /** @description Number of the stored version */
+            version: number;
+        };
+        CouponDto: {
+            /**
+             * Format: uuid
+             * @description Id of the coupon
+             */
+            id: string;
+            /** @description Code that people read, such as C-0117 */
+            code: string;
+            /** @description What the coupon is for, in the shop’s words; may be empty */
+            title: string;
+            /**
+             * @description Looking for a setting, or proving one
+             * @enum {string}
+             */
+            purpose: "exploration" | "confirmation";
+            /**
+             * @description State
+             * @enum {string}
+             */
+            state: "planned" | "marked" | "inspected" | "sealed";
+            /** @description Material */
+            material: components["schemas"]["CouponMaterialDto"];
+            /** @description Finish */
+            finish: components["schemas"]["NamedDto"];
+            /** @description Effect that is wanted */
+            effect: components["schemas"]["CouponEffectDto"];
+            /** @description Machine */
+            machine: components["schemas"]["CouponMachineDto"];
+            /** @description Lens */
+            lens: components["schemas"]["CouponLensDto"];
+            /** @description Lot of the material; may be empty */
+            lot: string;
+            /** @description Thickness of the plate, mm */
+            thicknessMm: number | null;
+            /** @description Where the plate is kept; may be empty */
+            storedAt: string;
+            /** @description true: burnt before it was logged here */
+            isImported: boolean;
+            /** @description true: invented for the demo shop */
+            isInvented: boolean;
+            /**
+             * Format: date-time
+             * @description When it was entered
+             */
+            createdAt: string;
+            /** @description Who entered it */
+            createdBy: string;
+            /**
+             * Format: date-time
+             * @description When it was marked
+             */
+            markedAt: string | null;
+            /** @description Profile version of the machine that marks it */
+            profile: components["schemas"]["CouponProfileDto"];
+            /** @description Power calibration it was planned with */
+            calibration: components["schemas"]["CouponCalibrationDto"] | null;
+            /** @description Revision that it is to prove */
+            confirms: components["schemas"]["ConfirmedRevisionDto"] | null;
+            /** @description Room, temperature and the like; may be empty */
+            ambientNotes: string;
+            /** @description Notes; may be empty */
+            notes: string;
+            /** @description Fields that nobody knows any more */
+            unknownFields: string[];
+            /** @description Where numbers of a published or rendered plate come from; may be empty */
+            sourceNote: string;
+            /** @description Acceptance criteria as recorded; null: not yet */
+            criteria: components["schemas"]["StoredCriterionDto"][] | null;
+            /**
+             * Format: date-time
+             * @description When the criteria were recorded
+             */
+            criteriaRecordedAt: string | null;
+            /** @description Cautions that were acknowledged when it was planned */
+            acknowledgedCautionIds: string[];
+            /**
+             * Format: date-time
+             * @description When marking began
+             */
+            markingStartedAt: string | null;
+            /** @description Who marked it, and when */
+            marked: components["schemas"]["CouponActDto"] | null;
+            /** @description Who finished the inspection, and when */
+            inspected: components["schemas"]["CouponActDto"] | null;
+            /** @description Who sealed it, and when */
+            sealed: components["schemas"]["CouponActDto"] | null;
+            /** @description Grids on the plate */
+            grids: components["schemas"]["TestGridDto"][];
+            /** @description Cells, row by row */
+            cells: components["schemas"]["CouponCellDto"][];
+            /** @description Number of the stored version; the ETag is "v" and this number */
+            version: number;
+            /** @description What the caller may do */
+            allowedActions: string[];
+        };
+        PlannedFactorDto: {
+            /** @description The parameter that varies */
+            parameter: components["schemas"]["ParameterKey"];
+            /** @description First level, in the panel’s unit */
+            from: number;
+            /** @description Last level, in the panel’s unit */
+            to: number;
+            /** @description How many levels */
+            count: number;
+            /**
+             * @description Equal steps or equal ratios
+             * @enum {string}
+             */
+            spacing: "steps" | "ratios";
+        };
+        TypedValueDto: {
+            /** @description The number as typed */
+            value: number;
+            /** @description The unit in which it was typed */
+            unit: components["schemas"]["PanelUnit"];
+        };
+        TypedValuesDto: {
+            /** @description Power as typed; absent: not set */
+            powerPercent?: components["schemas"]["TypedValueDto"];
+            /** @description Scan speed as typed; absent: not set */
+            speedMmPerS?: components["schemas"]["TypedValueDto"];
+            /** @description Pulse frequency as typed; absent: not set */
+            frequencyKhz?: components["schemas"]["TypedValueDto"];
+            /** @description Pulse width as typed; absent: not set */
+            pulseWidthNs?: components["schemas"]["TypedValueDto"];
+            /** @description Line spacing as typed; absent: not set */
+            lineSpacingUm?: components["schemas"]["TypedValueDto"];
+            /** @description Passes as typed; absent: not set */
+            passes?: components["schemas"]["TypedValueDto"];
+            /** @description Focus offset as typed; absent: not set */
+            focusOffsetMm?: components["schemas"]["TypedValueDto"];
+            /** @description Fill angle as typed; absent: not set */
+            hatchAngleDeg?: components["schemas"]["TypedValueDto"];
+            /** @description Angle step as typed; absent: not set */
+            angleStepDeg?: components["schemas"]["TypedValueDto"];
+            /** @description Wobble diameter as typed; absent: not set */
+            wobbleDiameterUm?: components["schemas"]["TypedValueDto"];
+            /** @description Wobble frequency as typed; absent: not set */
+            wobbleFrequencyKhz?: components["schemas"]["TypedValueDto"];
+        };
+        TypedDelaysDto: {
+            /** @description The laser-on delay, µs */
+            laserOn?: number;
+            /** @description The laser-off delay, µs */
+            laserOff?: number;
+            /** @description The jump delay, µs */
+            jump?: number;
+            /** @description The corner delay, µs */
+            corner?: number;
+        };
+        TypedSettingDto: {
+            /** @description Values by parameter */
+            values: components["schemas"]["TypedValuesDto"];
+            /** @description How the area is scanned */
+            fill: components["schemas"]["Fill"];
+            /** @description Assist, cover gas, air */
+            assist: components["schemas"]["Assist"];
+            /** @description Delays of the scan head, µs */
+            delaysUs?: components["schemas"]["TypedDelaysDto"];
+        };
+        PlanCouponDto: {
+            /** @description What the coupon is for, in the shop’s words */
+            title?: string;
+            /**
+             * Format: uuid
+             * @description Material
+             */
+            materialId: string;
+            /**
+             * Format: uuid
+             * @description Finish
+             */
+            finishId: string;
+            /**
+             * Format: uuid
+             * @description Effect that is wanted
+             */
+            effectId: string;
+            /**
+             * Format: uuid
+             * @description Machine
+             */
+            machineId: string;
+            /**
+             * Format: uuid
+             * @description Lens, one of the machine’s
+             */
+            lensId: string;
+            /** @description Thickness of the plate, mm */
+            thicknessMm?: number | null;
+            /** @description Lot of the material */
+            lot?: string;
+            /** @description Where the plate will be kept */
+            storedAt?: string;
+            /** @description Notes */
+            notes?: string;
+            /** @description Cautions that the planner has read and taken in */
+            acknowledgedCautionIds?: string[];
+            /** @description What varies across the columns */
+            columns: components["schemas"]["PlannedFactorDto"];
+            /** @description What varies down the rows; absent: one row */
+            rows?: components["schemas"]["PlannedFactorDto"];
+            /** @description The same in every cell; what varies may be left out of it */
+            base: components["schemas"]["TypedSettingDto"];
+            /** @description Setting of corner marks, letters and code */
+            labelStep?: components["schemas"]["TypedSettingDto"];
+            /** @description Seed of the random run order; null or absent: row by row */
+            runOrderSeed?: number | null;
+            /** @description Side of a cell, mm */
+            cellMm: number;
+            /** @description Gap between cells, mm */
+            gapMm: number;
+            /**
+             * @description Who draws the fill lines
+             * @enum {string}
+             */
+            fillDrawnBy: "machine" | "artwork";
+            /** @description Dose from which cells are flagged, J/mm²; absent: the lowest dose that went wrong on this material before */
+            doseCautionJPerMm2?: number | null;
+        };
+        PreviewCellDto: {
+            /** @description Row letter and column number */
+            address: string;
+            /** @description Row from 0 */
+            rowIndex: number;
+            /** @description Column from 0 */
+            columnIndex: number;
+            /** @description Place in the order of marking, from 1 */
+            runOrder: number;
+            /** @description Areal dose */
+            dose: components["schemas"]["DoseDto"];
+        };
+        MarkingTimeDto: {
+            /** @description Time of all cells, s; null: see missingBecause */
+            totalS: number | null;
+            /** @description Of it with the beam on, s */
+            beamOnS: number | null;
+            /** @description Why the time is not known */
+            missingBecause: string | null;
+        };
+        DoseCautionDto: {
+            /** @description Dose from which cells are flagged, J/mm² */
+            doseJPerMm2: number;
+            /** @description Where the number comes from */
+            source: string;
+        };
+        PlanWarningDto: {
+            /** @description dose, lines-apart, spots-apart, pulse-energy, out-of-range, no-dose, plate-too-large, no-labels, slow */
+            code: string;
+            /** @description What the matter is */
+            title: string;
+            /** @description Why, and the way out */
+            detail: string;
+            /** @description Cells that it is about; empty: the whole plate */
+            addresses: string[];
+        };
+        PlanCautionDto: {
+            /**
+             * Format: uuid
+             * @description Id of the caution
+             */
+            id: string;
+            /** @description What to do */
+            subject: string;
+            /** @description Why */
+            text: string;
+            /** @description Where it comes from */
+            source: string;
+        };
+        CouponPreviewDto: {
+            /** @description Rows of cells */
+            rows: number;
+            /** @description Columns of cells */
+            columns: number;
+            /** @description What varies down the rows */
+            rowFactor: components["schemas"]["GridFactorDto"] | null;
+            /** @description What varies across the columns */
+            columnFactor: components["schemas"]["GridFactorDto"] | null;
+            /** @description The same in every cell */
+            baseSetting: components["schemas"]["ParameterSetDto"];
+            /** @description Cells, row by row */
+            cells: components["schemas"]["PreviewCellDto"][];
+            /** @description Size of the plate */
+            plate: components["schemas"]["PlateSizeDto"];
+            /** @description Marking time of all cells, labels not counted */
+            markingTime: components["schemas"]["MarkingTimeDto"];
+            /**
+             * @description Where the watts come from
+             * @enum {string}
+             */
+            powerBasis: "calibration" | "not calibrated" | "mixed" | "unknown";
+            /** @description Spot on the work in the base setting, µm */
+            spotUm: number | null;
+            /** @description Dose that is flagged */
+            doseCaution: components["schemas"]["DoseCautionDto"] | null;
+            /** @description What to look at before marking */
+            warnings: components["schemas"]["PlanWarningDto"][];
+            /** @description Cautions for this work, to be read before it */
+            cautions: components["schemas"]["PlanCautionDto"][];
+        };
+        ConfirmRevisionDto: {
+            /**
+             * Format: uuid
+             * @description Draft or revision in review that is to be proved
+             */
+            revisionId: string;
+            /** @description How many equal cells */
+            count: number;
+            /** @description Which mark step the cells carry, from 1; absent: the first */
+            stepNumber?: number;
+            /** @description Lot of the material; another lot proves more */
+            lot?: string;
+            /** @description Thickness of the plate, mm */
+            thicknessMm?: number | null;
+            /** @description Where the plate will be kept */
+            storedAt?: string;
+            /** @description Notes */
+            notes?: string;
+            /**
+             * @description Side of a cell, mm
+             * @default 5
+             */
+            cellMm: number;
+            /**
+             * @description Gap between cells, mm
+             * @default 1.2
+             */
+            gapMm: number;
+            /** @description Setting of corner marks, letters and code */
+            labelStep?: components["schemas"]["TypedSettingDto"];
+            /** @description Cautions that the planner has read and taken in */
+            acknowledgedCautionIds?: string[];
+        };
+        MarkCellDto: {
+            /**
+             * Format: uuid
+             * @description The cell
+             */
+            cellId: string;
+            /** @description Version of the cell that was seen */
+            cellVersion: number;
+            /**
+             * @description marked: as planned; differs: with other values; skipped: not marked
+             * @enum {string}
+             */
+            outcome: "marked" | "differs" | "skipped";
+            /** @description Only with differs: the values that were really used, where they differ */
+            actual?: components["schemas"]["TypedValuesDto"];
+            /** @description Why; needed when skipped */
+            note?: string;
+        };
+        MarkedCellDto: {
+            /** @description The cell as it stands now */
+            cell: components["schemas"]["CouponCellDto"];
+            /** @description Cells that are marked or skipped */
+            doneCount: number;
+            /** @description Cells on the plate */
+            cellCount: number;
+        };
+        UndoMarkDto: {
+            /**
+             * Format: uuid
+             * @description The cell that is to be marked again
+             */
+            cellId: string;
+            /** @description Version of the cell that was seen */
+            cellVersion: number;
+        };
+        FinishMarkingDto: {
+            /** @description Room, temperature and the like; absent: unchanged */
+            ambientNotes?: string;
+            /** @description Where the plate is kept; absent: unchanged */
+            storedAt?: string;
+        };
+        KnownFactorDto: {
+            /** @description The parameter that varies */
+            parameter: components["schemas"]["ParameterKey"];
+            /** @description The levels in order, one per row or column */
+            levels: components["schemas"]["TypedValueDto"][];
+        };
+        KnownGridDto: {
+            /** @description Rows of cells */
+            rows: number;
+            /** @description Columns of cells */
+            columns: number;
+            /** @description What varies down the rows; absent: nobody knows */
+            rowFactor?: components["schemas"]["KnownFactorDto"];
+            /** @description What varies across the columns; absent: nobody knows */
+            columnFactor?: components["schemas"]["KnownFactorDto"];
+        };
+        ImportCouponDto: {
+            /** @description What the coupon is for, in the shop’s words */
+            title?: string;
+            /**
+             * Format: uuid
+             * @description Material
+             */
+            materialId: string;
+            /**
+             * Format: uuid
+             * @description Finish
+             */
+            finishId: string;
+            /**
+             * Format: uuid
+             * @description Effect that is wanted
+             */
+            effectId: string;
+            /**
+             * Format: uuid
+             * @description Machine
+             */
+            machineId: string;
+            /**
+             * Format: uuid
+             * @description Lens, one of the machine’s
+             */
+            lensId: string;
+            /** @description Thickness of the plate, mm */
+            thicknessMm?: number | null;
+            /** @description Lot of the material */
+            lot?: string;
+            /** @description Where the plate will be kept */
+            storedAt?: string;
+            /** @description Notes */
+            notes?: string;
+            /** @description Cautions that the planner has read and taken in */
+            acknowledgedCautionIds?: string[];
+            /**
+             * Format: date
+             * @description Day on which it was marked; absent: not known
+             */
+            markedOn?: string;
+            /** @description true: the caller marked it; otherwise it is not known who did */
+            markedByMe?: boolean;
+            /** @description true: source and scan head have not been changed since; otherwise that is not known */
+            isMachineUnchanged?: boolean;
+            /** @description How the cells were filled; absent: not known */
+            fill?: components["schemas"]["Fill"];
+            /** @description Assist; absent: not known */
+            assist?: components["schemas"]["Assist"];
+            /** @description Side of a cell, mm; absent: not known */
+            cellMm?: number;
+            /** @description Gap between cells, mm; absent: not known */
+            gapMm?: number;
+            /** @description What was the same in every cell, as far as it is known */
+            common?: components["schemas"]["TypedValuesDto"];
+            /** @description Size of the grid and the levels that are known; or give a table */
+            grid?: components["schemas"]["KnownGridDto"];
+            /** @description Rows pasted from a spreadsheet, headings first; or give a grid */
+            table?: string;
+            /**
+             * @description Decimal sign of the table
+             * @default .
+             * @enum {string}
+             */
+            decimalSign: "." | ",";
+            /** @description true: import the rows that can be read although others are refused */
+            leaveOutRefusedRows?: boolean;
+        };
+        ImportedCellDto: {
+            /** @description Row letter and column number */
+            address: string;
+            /** @description Row from 0 */
+            rowIndex: number;
+            /** @description Column from 0 */
+            columnIndex: number;
+            /** @description What is known of it */
+            parameters: components["schemas"]["ParameterSetDto"];
+            /** @description Areal dose */
+            dose: components["schemas"]["DoseDto"];
+            /** @description Note from the table */
+            note: string;
+        };
+        RefusedRowDto: {
+            /** @description Line of the pasted text, from 1 */
+            line: number;
+            /** @description The line as pasted, cut short */
+            text: string;
+            /** @description Why it is refused, and the way out */
+            reason: string;
+        };
+        ImportPreviewDto: {
+            /** @description Rows of cells */
+            rows: number;
+            /** @description Columns of cells */
+            columns: number;
+            /** @description Cells */
+            cells: components["schemas"]["ImportedCellDto"][];
+            /** @description Rows of the table that cannot be read */
+            refusedRows: components["schemas"]["RefusedRowDto"][];
+            /** @description Headings that say nothing here; their columns are left out */
+            ignoredHeadings: string[];
+            /** @description What will be marked as unknown */
+            unknownFields: string[];
+        };
+        CellRatingDto: {
+            /**
+             * Format: uuid
+             * @description Id of the rating
+             */
+            id: string;
+            /**
+             * Format: uuid
+             * @description Cell that was judged
+             */
+            cellId: string;
+            /**
+             * Format: uuid
+             * @description Member who judged
+             */
+            memberId: string;
+            /** @description Name of the member */
+            by: string;
+            /** @description 0 no mark … 5 reference; null: no rating, see tags and note */
+            rating: number | null;
+            /**
+             * @description What the mark looks like
+             * @enum {string|null}
+             */
+            outcome: "no-mark" | "faint" | "uneven" | "banded" | "good" | "wrong-colour" | "overburnt" | "charred" | "burr" | "halo" | "melted" | "cracked" | "warped" | "peeled" | null;
+            /** @description Tags */
+            tags: string[];
+            /** @description Note; may be empty */
+            note: string;
+            /**
+             * Format: date-time
+             * @description When it was last saved
+             */
+            ratedAt: string;
+            /** @description Number of the stored version; send it as seenVersion with the next change */
+            version: number;
+        };
+        /**
+         * @description What was measured
+         * @enum {string}
+         */
+        MeasurementQuantity: "lightness" | "a" | "b" | "chroma" | "hue-angle" | "contrast" | "delta-e-2000" | "evenness" | "depth" | "roughness-ra" | "roughness-rz" | "line-width" | "code-grade" | "tape-class" | "wipe-test" | "salt-spray-hours";
+        /**
+         * @description How it was measured
+         * @enum {string}
+         */
+        MeasurementMethod: "photo" | "colorimeter" | "profilometer" | "microscope" | "verifier" | "calliper" | "manual";
+        MeasurementDetailDto: {
+            /** @description Colorimeter: illuminant, such as D65 */
+            illuminant?: string;
+            /** @description Colorimeter: observer, 2° or 10° */
+            observer?: string;
+            /** @description Colorimeter: geometry, such as 45/0 */
+            geometry?: string;
+            /** @description Verifier: aperture, mil */
+            apertureMil?: number;
+            /** @description Verifier: wavelength or kind of light */
+            light?: string;
+            /** @description Verifier: angle of the light, degrees */
+            angleDeg?: number;
+        };
+        MeasurementDto: {
+            /**
+             * Format: uuid
+             * @description Id of the measurement
+             */
+            id: string;
+            /**
+             * Format: uuid
+             * @description Cell that was measured
+             */
+            cellId: string;
+            /** @description What was measured */
+            quantity: components["schemas"]["MeasurementQuantity"];
+            /** @description Value in the unit */
+            value: number | null;
+            /** @description Grade in letters, of a code */
+            grade: string | null;
+            /** @description Unit; "1" is a pure number */
+            unit: string;
+            /** @description How it was measured */
+            method: components["schemas"]["MeasurementMethod"];
+            /** @description Conditions of the method */
+            methodDetail: components["schemas"]["MeasurementDetailDto"];
+            /** @description Instrument; may be empty */
+            instrument: string;
+            /**
+             * Format: uuid
+             * @description Photo it was read from
+             */
+            photoId: string | null;
+            /** @description Standard uncertainty, in the unit; null: not stated */
+            uncertainty: number | null;
+            /**
+             * Format: date-time
+             * @description When it was measured
+             */
+            measuredAt: string;
+            /** @description Name of the member who entered it */
+            by: string;
+            /**
+             * Format: uuid
+             * @description Earlier measurement that it takes the place of
+             */
+            supersedesId: string | null;
+            /** @description true: a later measurement took its place */
+            isSuperseded: boolean;
+            /** @description Why it takes the place of another; may be empty */
+            reason: string;
+        };
+        CorrectionDto: {
+            /**
+             * Format: uuid
+             * @description Id of the correction
+             */
+            id: string;
+            /**
+             * Format: uuid
+             * @description Cell that it is about; null: the whole coupon
+             */
+            cellId: string | null;
+            /** @description Address of the cell */
+            address: string | null;
+            /** @description What is right instead */
+            text: string;
+            /** @description Why it is corrected */
+            reason: string;
+            /**
+             * Format: date-time
+             * @description When it was written
+             */
+            at: string;
+            /** @description Name of the member */
+            by: string;
+        };
+        CriterionResultDto: {
+            /** @description The criterion in words */
+            criterion: string;
+            /** @description Measured value that counts; null: not measured */
+            value: number | null;
+            /** @description true: met, false: not met, null: not measured */
+            meets: boolean | null;
+        };
+        CellVerdictDto: {
+            /**
+             * Format: uuid
+             * @description Cell
+             */
+            cellId: string;
+            /** @description Place among the judged cells, equal ones share it; null: not judged yet */
+            rank: number | null;
+            /** @description Mean of all people’s ratings */
+            meanRating: number | null;
+            /** @description true: all criteria met, false: at least one is not, null: something is not measured, or no criteria */
+            meets: boolean | null;
+            /** @description One per criterion, in their order */
+            results: components["schemas"]["CriterionResultDto"][];
+        };
+        MissingItemDto: {
+            /**
+             * @description Kind of the point
+             * @enum {string}
+             */
+            code: "criteria" | "ratings" | "inspection" | "photo" | "photo-processing" | "photo-corners";
+            /** @description What is missing and the way out */
+            text: string;
+            /** @description Addresses of the cells that it is about */
+            addresses: string[];
+            /** @description false: worth doing, but it stops nothing */
+            isBlocking: boolean;
+        };
+        InspectionDto: {
+            /**
+             * Format: uuid
+             * @description Coupon
+             */
+            couponId: string;
+            /**
+             * @description State of the coupon
+             * @enum {string}
+             */
+            state: "planned" | "marked" | "inspected" | "sealed";
+            /** @description Acceptance criteria as recorded; null: not yet */
+            criteria: components["schemas"]["StoredCriterionDto"][] | null;
+            /**
+             * Format: date-time
+             * @description When they were recorded
+             */
+            criteriaRecordedAt: string | null;
+            /** @description true: something was rated or measured, so the criteria stay as they are */
+            areCriteriaFixed: boolean;
+            /** @description What the effect demands at present, as a proposal */
+            proposedCriteria: components["schemas"]["StoredCriterionDto"][];
+            /** @description Ratings of all people */
+            ratings: components["schemas"]["CellRatingDto"][];
+            /** @description Measurements, superseded ones included */
+            measurements: components["schemas"]["MeasurementDto"][];
+            /** @description Corrections, oldest first */
+            corrections: components["schemas"]["CorrectionDto"][];
+            /** @description Every cell against the criteria */
+            verdicts: components["schemas"]["CellVerdictDto"][];
+            /** @description What the end of the inspection still needs */
+            missingToInspect: components["schemas"]["MissingItemDto"][];
+            /** @description What sealing still needs */
+            missingToSeal: components["schemas"]["MissingItemDto"][];
+            /** @description Number of the coupon’s stored version; the ETag is "v" and this number */
+            version: number;
+            /** @description What the caller may do */
+            allowedActions: string[];
+        };
+        RecordCriteriaDto: {
+            /** @description What a mark must meet. An empty list says: ratings alone decide. */
+            criteria: components["schemas"]["CriterionDto"][];
+        };
+        UnratedCellDto: {
+            /**
+             * Format: uuid
+             * @description Cell
+             */
+            cellId: string;
+            /** @description Why nobody rates it */
+            reason: string;
+        };
+        InspectCouponDto: {
+            /** @description Marked cells that nobody rates, each with the reason */
+            unratedCells?: components["schemas"]["UnratedCellDto"][];
+        };
+        CorrectCouponDto: {
+            /**
+             * Format: uuid
+             * @description Cell that it is about; absent: the whole coupon
+             */
+            cellId?: string;
+            /** @description What is right instead */
+            text: string;
+            /** @description Why it is corrected */
+            reason: string;
+        };
+        CellRatingChangeDto: {
+            /**
+             * Format: uuid
+             * @description Cell
+             */
+            cellId: string;
+            /** @description Version of your own rating that you saw; null: there was none */
+            seenVersion: number | null;
+            /** @description 0 to 5; null: not rated */
+            rating: number | null;
+            /**
+             * @description What the mark looks like
+             * @enum {string|null}
+             */
+            outcome?: "no-mark" | "faint" | "uneven" | "banded" | "good" | "wrong-colour" | "overburnt" | "charred" | "burr" | "halo" | "melted" | "cracked" | "warped" | "peeled" | null;
+            /** @description Tags */
+            tags?: string[];
+            /** @description Note */
+            note?: string;
+        };
+        SaveRatingsDto: {
+            /** @description Your ratings, all or none */
+            ratings: components["schemas"]["CellRatingChangeDto"][];
+        };
+        SavedRatingsDto: {
+            /** @description The ratings as stored now */
+            ratings: components["schemas"]["CellRatingDto"][];
+        };
+        MeasurementConditionsDto: {
+            /**
+             * @description Colorimeter: illuminant
+             * @enum {string}
+             */
+            illuminant?: "D65" | "D50" | "A" | "C" | "F2" | "F11";
+            /**
+             * @description Colorimeter: observer
+             * @enum {string}
+             */
+            observer?: "2°" | "10°";
+            /**
+             * @description Colorimeter: geometry of light and view
+             * @enum {string}
+             */
+            geometry?: "45/0" | "0/45" | "d/8 gloss included" | "d/8 gloss excluded";
+            /** @description Verifier: diameter of the aperture, mil (1/1000 inch) */
+            apertureMil?: number;
+            /** @description Verifier: wavelength or kind of light, such as 660 nm */
+            light?: string;
+            /** @description Verifier: angle of the light over the surface, degrees */
+            angleDeg?: number;
+        };
+        NewMeasurementDto: {
+            /**
+             * Format: uuid
+             * @description Cell
+             */
+            cellId: string;
+            /** @description What was measured */
+            quantity: components["schemas"]["MeasurementQuantity"];
+            /** @description Value in the quantity’s unit; a code grade may be given by its letter instead */
+            value?: number;
+            /**
+             * @description Letter of a code grade
+             * @enum {string}
+             */
+            grade?: "A" | "B" | "C" | "D" | "F";
+            /** @description Unit; it is fixed by the quantity and may be left out */
+            unit?: string;
+            /** @description How it was measured */
+            method: components["schemas"]["MeasurementMethod"];
+            /** @description Conditions of the method */
+            methodDetail?: components["schemas"]["MeasurementConditionsDto"];
+            /** @description Instrument, as the shop calls it */
+            instrument?: string;
+            /**
+             * Format: uuid
+             * @description Photo of this coupon that it was read from
+             */
+            photoId?: string;
+            /** @description Standard uncertainty in the same unit */
+            uncertainty?: number;
+            /**
+             * Format: date-time
+             * @description When it was measured; absent: now
+             */
+            measuredAt?: string;
+            /**
+             * Format: uuid
+             * @description Earlier measurement of the same cell and quantity that this takes the place of
+             */
+            supersedesId?: string;
+            /** @description Why it takes the place of the earlier one */
+            reason?: string;
+        };
+        AddMeasurementsDto: {
+            /** @description Measurements, all or none */
+            measurements: components["schemas"]["NewMeasurementDto"][];
+        };
+        SavedMeasurementsDto: {
+            /** @description The measurements as stored now */
+            measurements: components["schemas"]["MeasurementDto"][];
+        };
+        /**
+         * @description How it stands; due: approved with an overdue review
+         * @enum {string}
+         */
+        RecipeState: "approved" | "due" | "scheduled" | "in_review" | "draft" | "returned" | "withdrawn";
+        /**
+         * @description State
+         * @enum {string}
+         */
+        RevisionState: "draft" | "in_review" | "returned" | "scheduled" | "approved" | "superseded" | "withdrawn";
+        /**
+         * @description How the setting was come by
+         * @enum {string}
+         */
+        RouteKind: "coupons" | "earlier-experience" | "customer-given" | "transferred";
+        SignOffDto: {
+            /**
+             * Format: uuid
+             * @description Id of the signature
+             */
+            id: string;
+            /**
+             * Format: uuid
+             * @description Member who signed
+             */
+            memberId: string;
+            /** @description Name as printed when signing */
+            printedName: string;
+            /**
+             * @description Role when signing
+             * @enum {string}
+             */
+            role: "trainee" | "operator" | "lead" | "owner";
+            /**
+             * @description What the signature means
+             * @enum {string}
+             */
+            meaning: "submitted for review" | "recalled" | "approved" | "returned" | "withdrawn";
+            /** @description Comment or reason; may be empty */
+            comment: string;
+            /**
+             * Format: date-time
+             * @description When, by the server’s clock
+             */
+            signedAt: string;
+            /** @description SHA-256 of the content that was signed, hexadecimal */
+            contentHash: string;
+            /** @description Hash of the ledger’s last event before the signature */
+            ledgerHashBefore: string;
+            /**
+             * @description How the signer was confirmed
+             * @enum {string}
+             */
+            method: "password" | "session";
+            /** @description true: signed by the author of the revision, which the shop’s policy allowed */
+            isByAuthor: boolean;
+        };
+        RevisionBriefDto: {
+            /**
+             * Format: uuid
+             * @description Id of the revision
+             */
+            id: string;
+            /** @description Number from 1 without gaps; null: a draft */
+            number: number | null;
+            /** @description State */
+            state: components["schemas"]["RevisionState"];
+            /** @description How the setting was come by */
+            route: components["schemas"]["RouteKind"];
+            /** @description Reason for the change; may be empty in a draft */
+            reason: string;
+            /** @description Author: member and name */
+            author: components["schemas"]["NamedDto"];
+            /**
+             * Format: uuid
+             * @description Revision that it was copied from
+             */
+            basedOnId: string | null;
+            /**
+             * Format: date-time
+             * @description When the draft was begun
+             */
+            createdAt: string;
+            /**
+             * Format: date-time
+             * @description When it was submitted
+             */
+            submittedAt: string | null;
+            /**
+             * Format: date-time
+             * @description When it was approved
+             */
+            approvedAt: string | null;
+            /**
+             * Format: date-time
+             * @description When a newer one became current
+             */
+            supersededAt: string | null;
+            /**
+             * Format: date-time
+             * @description When it was withdrawn
+             */
+            withdrawnAt: string | null;
+            /**
+             * Format: date-time
+             * @description When it takes effect; null: with its approval
+             */
+            effectiveFrom: string | null;
+            /**
+             * Format: date-time
+             * @description When it is to be proved again
+             */
+            reviewDue: string | null;
+            /** @description true: approved, and the day of its review is past */
+            isReviewOverdue: boolean;
+            /** @description Signatures, oldest first */
+            signOffs: components["schemas"]["SignOffDto"][];
+        };
+        EvidencePhotoDto: {
+            /**
+             * Format: uuid
+             * @description Id of the photo
+             */
+            id: string;
+            /** @description Addresses for <img> */
+            urls: components["schemas"]["PhotoUrlsDto"] | null;
+            /** @description Corners of the plate, clockwise from the origin mark */
+            corners: components["schemas"]["CornerDto"][] | null;
+            /** @description Width, pixels */
+            widthPx: number | null;
+            /** @description Height, pixels */
+            heightPx: number | null;
+        };
+        RecipeFaceDto: {
+            /**
+             * Format: uuid
+             * @description Id of the coupon
+             */
+            couponId: string;
+            /** @description Code of the coupon */
+            couponCode: string;
+            /**
+             * Format: uuid
+             * @description Id of the cell
+             */
+            cellId: string;
+            /** @description Address of the cell */
+            address: string;
+            /** @description Row of the cell from 0 */
+            rowIndex: number;
+            /** @description Column of the cell from 0 */
+            columnIndex: number;
+            /** @description Rows of the plate */
+            rows: number;
+            /** @description Columns of the plate */
+            columns: number;
+            /** @description Side of a cell, mm */
+            cellMm: number;
+            /** @description Gap between cells, mm */
+            gapMm: number;
+            /** @description Newest photo that is ready */
+            photo: components["schemas"]["EvidencePhotoDto"] | null;
+        };
+        RecipeRunsDto: {
+            /** @description Good parts */
+            good: number;
+            /** @description Scrapped parts */
+            scrap: number;
+        };
+        RecipeSummaryDto: {
+            /** @description Material */
+            material: components["schemas"]["CouponMaterialDto"];
+            /** @description Finish */
+            finish: components["schemas"]["NamedDto"];
+            /** @description Effect */
+            effect: components["schemas"]["CouponEffectDto"];
+            /** @description Machine */
+            machine: components["schemas"]["CouponMachineDto"];
+            /** @description Lens */
+            lens: components["schemas"]["NamedDto"];
+            /**
+             * Format: uuid
+             * @description Id of the recipe
+             */
+            id: string;
+            /** @description Code that people read, such as R-0042 */
+            code: string;
+            /** @description Title */
+            title: string;
+            /** @description How it stands; due: approved with an overdue review */
+            state: components["schemas"]["RecipeState"];
+            /** @description The approved revision */
+            current: components["schemas"]["RevisionBriefDto"] | null;
+            /** @description The revision under way beside it: scheduled, in review, draft or returned */
+            underWay: components["schemas"]["RevisionBriefDto"] | null;
+            /** @description true: a hold is on the recipe or its machine */
+            isHeld: boolean;
+            /** @description Plate and cell that stand for it */
+            face: components["schemas"]["RecipeFaceDto"] | null;
+            /** @description Parts of finished production runs of the last 30 days */
+            last30Days: components["schemas"]["RecipeRunsDto"];
+            /**
+             * @description What it needs from the caller; null: nothing
+             * @enum {string|null}
+             */
+            needsYou: "sign" | "review-due" | "returned" | "draft" | null;
+            /** @description What the caller may do: propose-change, edit, withdraw */
+            allowedActions: string[];
+        };
+        RecipeFacetsDto: {
+            /** @description States */
+            states: components["schemas"]["CouponFacetValueDto"][];
+            /** @description Materials */
+            materials: components["schemas"]["CouponFacetValueDto"][];
+            /** @description Effects */
+            effects: components["schemas"]["CouponFacetValueDto"][];
+            /** @description Machines */
+            machines: components["schemas"]["CouponFacetValueDto"][];
+            /** @description Recipes that fit all choices */
+            matchCount: number;
+            /** @description Recipes of the shop */
+            totalCount: number;
+        };
+        RecipePageDto: {
+            /** @description The items of this page, in order */
+            items: components["schemas"]["RecipeSummaryDto"][];
+            /** @description Send as cursor for the next page; null at the end */
+            nextCursor: string | null;
+            /** @description Counts for the choices */
+            facets: components["schemas"]["RecipeFacetsDto"];
+        };
+        RecipeFromCellDto: {
+            /**
+             * Format: uuid
+             * @description Coupon, marked or later
+             */
+            couponId: string;
+            /**
+             * Format: uuid
+             * @description Cell of that coupon
+             */
+            cellId: string;
+            /** @description Title; absent: made from material, finish and effect */
+            title?: string;
+            /**
+             * Format: uuid
+             * @description Recipe with the same material, finish, effect, machine and lens that gets the draft; absent: a new recipe
+             */
+            recipeId?: string;
+        };
+        RevisionRecipeDto: {
+            /** @description Material */
+            material: components["schemas"]["CouponMaterialDto"];
+            /** @description Finish */
+            finish: components["schemas"]["NamedDto"];
+            /** @description Effect */
+            effect: components["schemas"]["CouponEffectDto"];
+            /** @description Machine */
+            machine: components["schemas"]["CouponMachineDto"];
+            /** @description Lens */
+            lens: components["schemas"]["NamedDto"];
+            /**
+             * Format: uuid
+             * @description Id of the recipe
+             */
+            id: string;
+            /** @description Code that people read, such as R-0042 */
+            code: string;
+            /** @description Title */
+            title: string;
+        };
+        /**
+         * @description What the step is for
+         * @enum {string}
+         */
+        StepPurpose: "rough" | "clean-up" | "fill" | "outline" | "anneal" | "bleach" | "engrave" | "remove-coating" | "polish" | "frost" | "cut" | "other";
+        MarkStepDto: {
+            /** @description What the step is for */
+            purpose: components["schemas"]["StepPurpose"];
+            /** @description Its parameters */
+            parameters: components["schemas"]["ParameterSetDto"];
+            /** @description Pause after the step (cool-down), s */
+            pauseAfterS: number;
+        };
+        SetUpStepDto: {
+            /** @description What to do */
+            text: string;
+            /** @description What to watch out for */
+            caution?: string;
+            /**
+             * Format: uuid
+             * @description Photo that shows it
+             */
+            photoId?: string;
+            /** @description true: a run starts only when this is ticked */
+            mustTick: boolean;
+        };
+        RangeDto: {
+            /** @description Smallest, mm; absent: no lower end */
+            from?: number;
+            /** @description Largest, mm; absent: no upper end */
+            to?: number;
+        };
+        LimitsOfUseDto: {
+            /** @description Thickness of the part, mm */
+            thicknessMm?: components["schemas"]["RangeDto"];
+            /** @description Diameter of a round part, mm */
+            partDiameterMm?: components["schemas"]["RangeDto"];
+            /**
+             * @description Limits in words
+             * @default
+             */
+            notes: string;
+        };
+        /**
+         * @description Kind of feature; absent: any
+         * @enum {string}
+         */
+        FeatureKind: "filled-area" | "stroke-text" | "single-line" | "code";
+        RecipeScopeDto: {
+            /** @description Thickness of the part, mm */
+            thicknessMm?: components["schemas"]["RangeDto"];
+            /** @description Diameter of a round part, mm */
+            partDiameterMm?: components["schemas"]["RangeDto"];
+            /** @description Kind of feature; absent: any */
+            featureKind?: components["schemas"]["FeatureKind"];
+            /** @description Size of the feature, mm */
+            featureSizeMm?: components["schemas"]["RangeDto"];
+            /**
+             * Format: uuid
+             * @description Group of materials that the recipe covers besides its own
+             */
+            materialGroupId?: string;
+            /** @description Customer’s specification that asks for it by name */
+            customerSpecification?: string;
+        };
+        RevisionProfileDto: {
+            /**
+             * Format: uuid
+             * @description Id of the profile version
+             */
+            id: string;
+            /** @description Version of the machine’s profile */
+            number: number;
+            /** @description Version of its physical part; evidence holds within one */
+            physicalNumber: number;
+            /** @description true: the machine is still what it was */
+            isPresent: boolean;
+            /** @description Source and scan head */
+            physical: components["schemas"]["PhysicalProfileDto"];
+            /** @description The fields of the control in its order */
+            panel: components["schemas"]["PanelDto"];
+        };
+        RevisionCalibrationDto: {
+            /**
+             * Format: uuid
+             * @description Id of the power calibration
+             */
+            id: string;
+            /**
+             * Format: date
+             * @description Day of the reading
+             */
+            measuredOn: string;
+            /** @description Power meter */
+            meter: string;
+        };
+        EvidenceMeasurementDto: {
+            /** @description What was measured */
+            quantity: string;
+            /** @description Value; null: a grade only */
+            value: number | null;
+            /** @description Grade, where there is one */
+            grade: string | null;
+            /** @description Unit; 1: a pure number */
+            unit: string;
+            /** @description How; photo: an estimate under that photo’s light */
+            method: string;
+            /**
+             * Format: date-time
+             * @description When it was measured
+             */
+            measuredAt: string;
+        };
+        EvidencePlateDto: {
+            /** @description Rows of cells */
+            rows: number;
+            /** @description Columns of cells */
+            columns: number;
+            /** @description Side of a cell, mm */
+            cellMm: number;
+            /** @description Gap between cells, mm */
+            gapMm: number;
+            /** @description Version of the plate’s geometry */
+            layoutVersion: string;
+        };
+        EvidenceCellDto: {
+            /**
+             * Format: uuid
+             * @description Id of the cell
+             */
+            cellId: string;
+            /** @description Row letter and column number, such as B4 */
+            address: string;
+            /** @description Row from 0 */
+            rowIndex: number;
+            /** @description Column from 0 */
+            columnIndex: number;
+            /**
+             * Format: uuid
+             * @description Id of the coupon
+             */
+            couponId: string;
+            /** @description Code of the coupon, such as C-0117 */
+            couponCode: string;
+            /**
+             * @description State of the coupon; only a sealed one counts
+             * @enum {string}
+             */
+            couponState: "planned" | "marked" | "inspected" | "sealed";
+            /** @description Lot of the material; may be empty */
+            lot: string;
+            /**
+             * Format: date-time
+             * @description When the coupon was marked
+             */
+            markedAt: string | null;
+            /**
+             * Format: date-time
+             * @description When the coupon was sealed
+             */
+            sealedAt: string | null;
+            /** @description What was really marked */
+            parameters: components["schemas"]["ParameterSetDto"];
+            /** @description Essential parameters in which it differs from the revision; empty: the same mark */
+            essentialDifferences: string[];
+            /** @description Mean rating over the people who rated it */
+            meanRating: number | null;
+            /** @description Measurements that hold, newest first */
+            measurements: components["schemas"]["EvidenceMeasurementDto"][];
+            /** @description Each acceptance criterion with its result */
+            criteria: components["schemas"]["CriterionResultDto"][];
+            /** @description true: meets every criterion; null: none were recorded */
+            meets: boolean | null;
+            /** @description The plate, for drawing */
+            plate: components["schemas"]["EvidencePlateDto"];
+            /** @description Newest photo of the coupon; null: none is ready */
+            photo: components["schemas"]["EvidencePhotoDto"] | null;
+        };
+        EvidenceRunDto: {
+            /**
+             * Format: uuid
+             * @description Id of the run
+             */
+            runId: string;
+            /** @description Code of the run, such as J-0007 */
+            code: string;
+            /** @description Lot of the material; may be empty */
+            lot: string;
+            /**
+             * Format: date-time
+             * @description When it was started
+             */
+            startedAt: string;
+            /** @description Pieces that were measured */
+            pieceCount: number;
+            /** @description Pieces that meet every criterion */
+            meetingCount: number;
+            /** @description true: exactly the essential parameters of the revision */
+            isSameSetting: boolean;
+        };
+        EvidenceDto: {
+            /** @description Cells that the setting comes from */
+            basis: components["schemas"]["EvidenceCellDto"][];
+            /** @description Cells that proved it again */
+            confirmation: components["schemas"]["EvidenceCellDto"][];
+            /** @description Finished confirmation runs */
+            runs: components["schemas"]["EvidenceRunDto"][];
+        };
+        /**
+         * @description never: it must not be marked
+         * @enum {string}
+         */
+        CautionLevel: "never" | "care";
+        RevisionCautionDto: {
+            /**
+             * Format: uuid
+             * @description Id of the caution
+             */
+            id: string;
+            /** @description never: it must not be marked */
+            level: components["schemas"]["CautionLevel"];
+            /** @description What to do, first */
+            subject: string;
+            /** @description Why */
+            text: string;
+            /** @description Where it comes from */
+            source: string;
+            /** @description true: the author acknowledged it */
+            isAcknowledged: boolean;
+        };
+        /**
+         * @description How much the change counts
+         * @enum {string}
+         */
+        ParameterClass: "essential" | "supplementary" | "non-essential";
+        ChangeSizeDto: {
+            /** @description Later minus earlier */
+            delta: number;
+            /** @description Unit of the difference */
+            symbol: string;
+            /** @description Percent of the earlier value; null: not meaningful */
+            percent: number | null;
+            /** @description Percentage points, for values that are percents themselves */
+            points: number | null;
+        };
+        SettingChangeDto: {
+            /** @description Which item differs */
+            item: string;
+            /** @description The item in words */
+            label: string;
+            /** @description How much the change counts */
+            class: components["schemas"]["ParameterClass"];
+            /**
+             * @description Kind of change
+             * @enum {string}
+             */
+            change: "added" | "removed" | "changed";
+            /** @description Earlier value as entered, with its unit */
+            before: string | null;
+            /** @description Later value as entered, with its unit */
+            after: string | null;
+            /** @description Size of the change; null for words */
+            size: components["schemas"]["ChangeSizeDto"] | null;
+        };
+        StepChangeDto: {
+            /** @description Number of the mark step, from 1 */
+            step: number;
+            /**
+             * @description Kind of change
+             * @enum {string}
+             */
+            change: "added" | "removed" | "changed";
+            /** @description Purpose of the step in words */
+            purpose: string;
+            /** @description What differs within the step */
+            changes: components["schemas"]["SettingChangeDto"][];
+        };
+        DerivedNumberDto: {
+            /** @description Key of the number, which names its unit */
+            key: string;
+            /** @description Unit */
+            unit: string;
+            /** @description How it is computed */
+            formula: string;
+            /** @description Where the formula comes from */
+            source: string;
+            /** @description The value; null: see missingBecause */
+            value: number | null;
+            /** @description Why there is no value */
+            missingBecause: string | null;
+            /** @description Limit of the formula that the inputs break */
+            outOfRange: string | null;
+            /** @description Numbers that went into it, by name with unit */
+            inputs: {
+                [key: string]: number;
+            };
+        };
+        StepNumbersDto: {
+            /** @description Number of the mark step, from 1 */
+            step: number;
+            /** @description What follows from it */
+            numbers: components["schemas"]["DerivedNumberDto"][];
+        };
+        RecipeRevisionDto: {
+            /**
+             * Format: uuid
+             * @description Id of the revision
+             */
+            id: string;
+            /** @description Number from 1 without gaps; null: a draft */
+            number: number | null;
+            /** @description State */
+            state: components["schemas"]["RevisionState"];
+            /** @description How the setting was come by */
+            route: components["schemas"]["RouteKind"];
+            /** @description Reason for the change; may be empty in a draft */
+            reason: string;
+            /** @description Author: member and name */
+            author: components["schemas"]["NamedDto"];
+            /**
+             * Format: uuid
+             * @description Revision that it was copied from
+             */
+            basedOnId: string | null;
+            /**
+             * Format: date-time
+             * @description When the draft was begun
+             */
+            createdAt: string;
+            /**
+             * Format: date-time
+             * @description When it was submitted
+             */
+            submittedAt: string | null;
+            /**
+             * Format: date-time
+             * @description When it was approved
+             */
+            approvedAt: string | null;
+            /**
+             * Format: date-time
+             * @description When a newer one became current
+             */
+            supersededAt: string | null;
+            /**
+             * Format: date-time
+             * @description When it was withdrawn
+             */
+            withdrawnAt: string | null;
+            /**
+             * Format: date-time
+             * @description When it takes effect; null: with its approval
+             */
+            effectiveFrom: string | null;
+            /**
+             * Format: date-time
+             * @description When it is to be proved again
+             */
+            reviewDue: string | null;
+            /** @description true: approved, and the day of its review is past */
+            isReviewOverdue: boolean;
+            /** @description Signatures, oldest first */
+            signOffs: components["schemas"]["SignOffDto"][];
+            /** @description The recipe that it belongs to */
+            recipe: components["schemas"]["RevisionRecipeDto"];
+            /** @description Mark steps in their order */
+            steps: components["schemas"]["MarkStepDto"][];
+            /** @description Set-up steps in their order */
+            setUpSteps: components["schemas"]["SetUpStepDto"][];
+            /** @description Limits of use */
+            limits: components["schemas"]["LimitsOfUseDto"];
+            /** @description What it covers beyond the five keys */
+            scope: components["schemas"]["RecipeScopeDto"];
+            /** @description Profile version of the machine */
+            profile: components["schemas"]["RevisionProfileDto"];
+            /** @description Power calibration that it cites */
+            calibration: components["schemas"]["RevisionCalibrationDto"] | null;
+            /** @description Written grounds of a lead, where it was not proved on coupons */
+            grounds: string;
+            /** @description Lead who gave the grounds */
+            groundsBy: components["schemas"]["NamedDto"] | null;
+            /** @description What it rests on and what proved it */
+            evidence: components["schemas"]["EvidenceDto"];
+            /** @description Cautions that apply, never first */
+            cautions: components["schemas"]["RevisionCautionDto"][];
+            /** @description Differences from the approved revision; from the earlier one once it is approved itself */
+            changes: components["schemas"]["StepChangeDto"][];
+            /** @description The revision that the changes are counted from; null: there is none */
+            comparedWith: components["schemas"]["RevisionBriefDto"] | null;
+            /** @description Numbers that follow from each mark step */
+            derived: components["schemas"]["StepNumbersDto"][];
+            /** @description SHA-256 of the content as it stands now, hexadecimal; what a signature is bound to */
+            contentHash: string;
+            /** @description Number of the stored version; the ETag is "v" and this number */
+            version: number;
+            /** @description What the caller may do: edit, discard, submit, recall, return, approve, withdraw, copy, start-confirmation */
+            allowedActions: string[];
+        };
+        EnterValueDto: {
+            /** @description The number as typed */
+            value: number;
+            /** @description The unit in which it was typed */
+            unit: components["schemas"]["PanelUnit"];
+        };
+        EnterValuesDto: {
+            /** @description Power; absent: not set */
+            powerPercent?: components["schemas"]["EnterValueDto"];
+            /** @description Scan speed; absent: not set */
+            speedMmPerS?: components["schemas"]["EnterValueDto"];
+            /** @description Pulse frequency; absent: not set */
+            frequencyKhz?: components["schemas"]["EnterValueDto"];
+            /** @description Pulse width; absent: not set */
+            pulseWidthNs?: components["schemas"]["EnterValueDto"];
+            /** @description Line spacing; absent: not set */
+            lineSpacingUm?: components["schemas"]["EnterValueDto"];
+            /** @description Passes; absent: not set */
+            passes?: components["schemas"]["EnterValueDto"];
+            /** @description Focus offset; absent: not set */
+            focusOffsetMm?: components["schemas"]["EnterValueDto"];
+            /** @description Fill angle; absent: not set */
+            hatchAngleDeg?: components["schemas"]["EnterValueDto"];
+            /** @description Angle step; absent: not set */
+            angleStepDeg?: components["schemas"]["EnterValueDto"];
+            /** @description Wobble diameter; absent: not set */
+            wobbleDiameterUm?: components["schemas"]["EnterValueDto"];
+            /** @description Wobble frequency; absent: not set */
+            wobbleFrequencyKhz?: components["schemas"]["EnterValueDto"];
+        };
+        EnterDelaysDto: {
+            /** @description Laser-on delay, µs */
+            laserOn?: number;
+            /** @description Laser-off delay, µs */
+            laserOff?: number;
+            /** @description Jump delay, µs */
+            jump?: number;
+            /** @description Corner delay, µs */
+            corner?: number;
+        };
+        EnterStepDto: {
+            /** @description What the step is for */
+            purpose: components["schemas"]["StepPurpose"];
+            /** @description Values by parameter, in the panel’s units */
+            values: components["schemas"]["EnterValuesDto"];
+            /** @description How the area is scanned */
+            fill: components["schemas"]["Fill"];
+            /** @description Assist, cover gas, air */
+            assist: components["schemas"]["Assist"];
+            /** @description Delays of the scan head */
+            delaysUs?: components["schemas"]["EnterDelaysDto"];
+            /**
+             * @description Pause after the step (cool-down), s
+             * @default 0
+             */
+            pauseAfterS: number;
+        };
+        CreateRecipeDto: {
+            /** @description Title; absent: made from material, finish and effect */
+            title?: string;
+            /**
+             * Format: uuid
+             * @description Material
+             */
+            materialId: string;
+            /**
+             * Format: uuid
+             * @description Finish
+             */
+            finishId: string;
+            /**
+             * Format: uuid
+             * @description Effect
+             */
+            effectId: string;
+            /**
+             * Format: uuid
+             * @description Machine
+             */
+            machineId: string;
+            /**
+             * Format: uuid
+             * @description Lens that is used on the machine
+             */
+            lensId: string;
+            /**
+             * @description How the setting was come by
+             * @enum {string}
+             */
+            route: "earlier-experience" | "customer-given" | "transferred";
+            /** @description Where the setting comes from */
+            reason: string;
+            /** @description Mark steps in their order, in the panel’s units */
+            steps: components["schemas"]["EnterStepDto"][];
+            /** @description What it covers beyond the five keys */
+            scope?: components["schemas"]["RecipeScopeDto"];
+        };
+        RecipeHoldDto: {
+            /**
+             * Format: uuid
+             * @description Id of the hold
+             */
+            id: string;
+            /**
+             * @description What is held
+             * @enum {string}
+             */
+            subject: "recipe" | "machine";
+            /** @description Why */
+            reason: string;
+            /** @description Who placed it */
+            placedBy: string;
+            /**
+             * Format: date-time
+             * @description Since when
+             */
+            placedAt: string;
+        };
+        RecipeDto: {
+            /** @description Material */
+            material: components["schemas"]["CouponMaterialDto"];
+            /** @description Finish */
+            finish: components["schemas"]["NamedDto"];
+            /** @description Effect */
+            effect: components["schemas"]["CouponEffectDto"];
+            /** @description Machine */
+            machine: components["schemas"]["CouponMachineDto"];
+            /** @description Lens */
+            lens: components["schemas"]["NamedDto"];
+            /**
+             * Format: uuid
+             * @description Id of the recipe
+             */
+            id: string;
+            /** @description Code that people read, such as R-0042 */
+            code: string;
+            /** @description Title */
+            title: string;
+            /** @description How it stands; due: approved with an overdue review */
+            state: components["schemas"]["RecipeState"];
+            /** @description The approved revision */
+            current: components["schemas"]["RevisionBriefDto"] | null;
+            /** @description The revision under way beside it: scheduled, in review, draft or returned */
+            underWay: components["schemas"]["RevisionBriefDto"] | null;
+            /** @description true: a hold is on the recipe or its machine */
+            isHeld: boolean;
+            /** @description Plate and cell that stand for it */
+            face: components["schemas"]["RecipeFaceDto"] | null;
+            /** @description Parts of finished production runs of the last 30 days */
+            last30Days: components["schemas"]["RecipeRunsDto"];
+            /**
+             * @description What it needs from the caller; null: nothing
+             * @enum {string|null}
+             */
+            needsYou: "sign" | "review-due" | "returned" | "draft" | null;
+            /** @description What the caller may do: propose-change, edit, withdraw */
+            allowedActions: string[];
+            /** @description What it covers beyond the five keys */
+            scope: components["schemas"]["RecipeScopeDto"];
+            /** @description Open holds; they come before everything else */
+            holds: components["schemas"]["RecipeHoldDto"][];
+            /** @description The approved revision, whole */
+            currentRevision: components["schemas"]["RecipeRevisionDto"] | null;
+            /** @description Every revision, drafts first, then newest first */
+            revisions: components["schemas"]["RevisionBriefDto"][];
+            /**
+             * Format: date-time
+             * @description When it was begun
+             */
+            createdAt: string;
+            /** @description Number of the stored version; the ETag is "v" and this number */
+            version: number;
+        };
+        UpdateRecipeDto: {
+            /** @description Title */
+            title?: string;
+            /** @description What it covers; it is signed with the setting, so it changes here only while nothing was submitted */
+            scope?: components["schemas"]["RecipeScopeDto"];
+        };
+        CreateDraftDto: {
+            /**
+             * Format: uuid
+             * @description Revision to copy; absent: the approved one, else the newest
+             */
+            basedOnRevisionId?: string;
+        };
+        ComparedValueDto: {
+            /**
+             * Format: uuid
+             * @description Revision of the column
+             */
+            revisionId: string;
+            /** @description Number in the unit of the row; null: a word, or not known */
+            value: number | null;
+            /** @description The value as shown, without its unit; null: not set or not known */
+            text: string | null;
+            /** @description Why there is no value */
+            missingBecause: string | null;
+            /**
+             * @description Against the reference
+             * @enum {string}
+             */
+            change: "reference" | "same" | "changed" | "added" | "removed" | "not comparable";
+            /** @description Size of the change; null for words */
+            size: components["schemas"]["ChangeSizeDto"] | null;
+        };
+        ComparisonRowDto: {
+            /**
+             * @description What is typed, what reaches the work, what the mark is
+             * @enum {string}
+             */
+            group: "entered" | "work" | "mark";
+            /** @description Key of the row; unique within group and step */
+            key: string;
+            /** @description The row in words */
+            label: string;
+            /** @description Unit of the numbers; empty for words */
+            unit: string;
+            /** @description Mark step from 1; null: the mark as a whole */
+            step: number | null;
+            /** @description true: every column holds the same */
+            isSame: boolean;
+            /** @description One per column, in the order of the columns */
+            values: components["schemas"]["ComparedValueDto"][];
+        };
+        ComparisonDto: {
+            /** @description The revisions, in the order of the columns */
+            revisions: components["schemas"]["RecipeRevisionDto"][];
+            /**
+             * Format: uuid
+             * @description Revision that the others are compared with
+             */
+            referenceId: string;
+            /** @description Rows in reading order */
+            rows: components["schemas"]["ComparisonRowDto"][];
+        };
+        UpdateRevisionDto: {
+            /** @description Mark steps in their order, in the panel’s units */
+            steps?: components["schemas"]["EnterStepDto"][];
+            /** @description Set-up steps in their order */
+            setUpSteps?: components["schemas"]["SetUpStepDto"][];
+            /** @description Limits of use */
+            limits?: components["schemas"]["LimitsOfUseDto"];
+            /** @description What it covers beyond the five keys */
+            scope?: components["schemas"]["RecipeScopeDto"];
+            /** @description Reason for the change */
+            reason?: string;
+            /** @description How the setting was come by */
+            route?: components["schemas"]["RouteKind"];
+            /** @description Written grounds where it was not proved on coupons; given by a lead */
+            grounds?: string;
+            /**
+             * Format: date-time
+             * @description When it takes effect; null: with its approval
+             */
+            effectiveFrom?: string | null;
+            /**
+             * Format: date-time
+             * @description When it is to be proved again; null: by the shop’s policy
+             */
+            reviewDue?: string | null;
+            /**
+             * Format: uuid
+             * @description Power calibration of the machine; null: none
+             */
+            calibrationId?: string | null;
+            /** @description Cautions that the author acknowledged */
+            acknowledgedCautionIds?: string[];
+        };
+        SetEvidenceDto: {
+            /** @description Cells that the setting comes from */
+            basisCellIds: string[];
+            /** @description Cells that proved it again */
+            confirmationCellIds: string[];
+        };
+        EvidenceCandidatesDto: {
+            /** @description Best rated cells of the recipe’s material, finish, machine and lens, marked or later */
+            basis: components["schemas"]["EvidenceCellDto"][];
+            /** @description Cells with exactly the revision’s essential parameters */
+            confirmation: components["schemas"]["EvidenceCellDto"][];
+        };
+        FieldProblemDto: {
+            /** @description JSON pointer of the field, such as #/steps/0/passes */
+            pointer: string;
+            /** @description How to put it right */
+            detail: string;
+        };
+        ProblemDto: {
+            /** @description Address that explains the type */
+            type: string;
+            /** @description Short name of the type */
+            title: string;
+            /** @description HTTP status */
+            status: number;
+            /** @description This case, in words for people */
+            detail: string;
+            /** @description Id of the request in the log */
+            instance: string;
+            /** @description Last part of the type */
+            code: string;
+            /** @description Wrong fields */
+            errors?: components["schemas"]["FieldProblemDto"][];
+            /** @description Present state, with stale-version */
+            current?: {
+                [key: string]: unknown;
+            };
+        };
     };
     responses: never;
     parameters: never;
@@ -2217,6 +4937,15 @@ export interface operations {
                     "application/json": components["schemas"]["ProblemTypeDto"];
                 };
             };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
         };
     };
     HealthController_live: {
@@ -2234,6 +4963,15 @@ export interface operations {
                 };
                 content: {
                     "application/json": components["schemas"]["HealthDto"];
+                };
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
                 };
             };
         };
@@ -2261,6 +4999,15 @@ export interface operations {
                     [name: string]: unknown;
                 };
                 content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
             };
         };
     };
@@ -2301,6 +5048,15 @@ export interface operations {
                 };
                 content?: never;
             };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
         };
     };
     LedgerController_verify: {
@@ -2327,6 +5083,15 @@ export interface operations {
                 };
                 content?: never;
             };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
         };
     };
     ShopsController_get: {
@@ -2352,6 +5117,15 @@ export interface operations {
                     [name: string]: unknown;
                 };
                 content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
             };
         };
     };
@@ -2386,6 +5160,15 @@ export interface operations {
                 };
                 content?: never;
             };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
         };
     };
     MembersController_list: {
@@ -2418,6 +5201,15 @@ export interface operations {
                 };
                 content?: never;
             };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
         };
     };
     MembersController_get: {
@@ -2446,6 +5238,15 @@ export interface operations {
                 };
                 content?: never;
             };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
         };
     };
     MembersController_remove: {
@@ -2471,6 +5272,15 @@ export interface operations {
                     [name: string]: unknown;
                 };
                 content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
             };
         };
     };
@@ -2507,6 +5317,15 @@ export interface operations {
                 };
                 content?: never;
             };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
         };
     };
     InvitationsController_list: {
@@ -2537,6 +5356,15 @@ export interface operations {
                     [name: string]: unknown;
                 };
                 content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
             };
         };
     };
@@ -2571,6 +5399,15 @@ export interface operations {
                 };
                 content?: never;
             };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
         };
     };
     InvitationsController_revoke: {
@@ -2597,6 +5434,15 @@ export interface operations {
                 };
                 content?: never;
             };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
         };
     };
     AuthController_signUp: {
@@ -2618,6 +5464,15 @@ export interface operations {
                 };
                 content: {
                     "application/json": components["schemas"]["SignedInDto"];
+                };
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
                 };
             };
         };
@@ -2643,6 +5498,15 @@ export interface operations {
                     "application/json": components["schemas"]["SignedInDto"];
                 };
             };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
         };
     };
     AuthController_refresh: {
@@ -2665,6 +5529,15 @@ export interface operations {
                     "application/json": components["schemas"]["SignedInDto"];
                 };
             };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
         };
     };
     AuthController_signOut: {
@@ -2685,6 +5558,15 @@ export interface operations {
                 };
                 content?: never;
             };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
         };
     };
     AuthController_signOutEverywhere: {
@@ -2701,6 +5583,15 @@ export interface operations {
                     [name: string]: unknown;
                 };
                 content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
             };
         };
     };
@@ -2723,6 +5614,15 @@ export interface operations {
                 };
                 content?: never;
             };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
         };
     };
     LinksController_reset: {
@@ -2743,6 +5643,15 @@ export interface operations {
                     [name: string]: unknown;
                 };
                 content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
             };
         };
     };
@@ -2765,6 +5674,15 @@ export interface operations {
                 };
                 content: {
                     "application/json": components["schemas"]["InvitationPreviewDto"];
+                };
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
                 };
             };
         };
@@ -2790,6 +5708,15 @@ export interface operations {
                     "application/json": components["schemas"]["SignedInDto"];
                 };
             };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
         };
     };
     SessionController_get: {
@@ -2807,6 +5734,15 @@ export interface operations {
                 };
                 content: {
                     "application/json": components["schemas"]["SessionDto"];
+                };
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
                 };
             };
         };
@@ -2842,6 +5778,15 @@ export interface operations {
                 };
                 content?: never;
             };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
         };
     };
     MachinesController_create: {
@@ -2875,6 +5820,15 @@ export interface operations {
                 };
                 content?: never;
             };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
         };
     };
     MachinesController_get: {
@@ -2902,6 +5856,15 @@ export interface operations {
                     [name: string]: unknown;
                 };
                 content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
             };
         };
     };
@@ -2938,6 +5901,15 @@ export interface operations {
                 };
                 content?: never;
             };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
         };
     };
     MachinesController_listProfiles: {
@@ -2965,6 +5937,15 @@ export interface operations {
                     [name: string]: unknown;
                 };
                 content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
             };
         };
     };
@@ -2997,6 +5978,15 @@ export interface operations {
                 };
                 content?: never;
             };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
         };
     };
     MachinesController_restore: {
@@ -3028,6 +6018,15 @@ export interface operations {
                 };
                 content?: never;
             };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
         };
     };
     MachineLensesController_list: {
@@ -3055,6 +6054,15 @@ export interface operations {
                     [name: string]: unknown;
                 };
                 content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
             };
         };
     };
@@ -3090,6 +6098,15 @@ export interface operations {
                     [name: string]: unknown;
                 };
                 content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
             };
         };
     };
@@ -3127,6 +6144,15 @@ export interface operations {
                 };
                 content?: never;
             };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
         };
     };
     CalibrationsController_list: {
@@ -3159,6 +6185,15 @@ export interface operations {
                     [name: string]: unknown;
                 };
                 content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
             };
         };
     };
@@ -3195,6 +6230,15 @@ export interface operations {
                 };
                 content?: never;
             };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
         };
     };
     CalibrationsController_watts: {
@@ -3226,6 +6270,15 @@ export interface operations {
                     [name: string]: unknown;
                 };
                 content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
             };
         };
     };
@@ -3260,6 +6313,15 @@ export interface operations {
                 };
                 content?: never;
             };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
         };
     };
     LensesController_create: {
@@ -3293,6 +6355,15 @@ export interface operations {
                 };
                 content?: never;
             };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
         };
     };
     LensesController_get: {
@@ -3320,6 +6391,15 @@ export interface operations {
                     [name: string]: unknown;
                 };
                 content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
             };
         };
     };
@@ -3356,6 +6436,15 @@ export interface operations {
                 };
                 content?: never;
             };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
         };
     };
     LensesController_archive: {
@@ -3387,6 +6476,15 @@ export interface operations {
                 };
                 content?: never;
             };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
         };
     };
     LensesController_restore: {
@@ -3417,6 +6515,15 @@ export interface operations {
                     [name: string]: unknown;
                 };
                 content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
             };
         };
     };
@@ -3455,6 +6562,15 @@ export interface operations {
                 };
                 content?: never;
             };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
         };
     };
     MaterialsController_create: {
@@ -3488,6 +6604,15 @@ export interface operations {
                 };
                 content?: never;
             };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
         };
     };
     MaterialsController_facets: {
@@ -3513,6 +6638,15 @@ export interface operations {
                     [name: string]: unknown;
                 };
                 content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
             };
         };
     };
@@ -3541,6 +6675,15 @@ export interface operations {
                     [name: string]: unknown;
                 };
                 content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
             };
         };
     };
@@ -3577,6 +6720,15 @@ export interface operations {
                 };
                 content?: never;
             };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
         };
     };
     MaterialsController_archive: {
@@ -3608,6 +6760,15 @@ export interface operations {
                 };
                 content?: never;
             };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
         };
     };
     MaterialsController_restore: {
@@ -3638,6 +6799,15 @@ export interface operations {
                     [name: string]: unknown;
                 };
                 content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
             };
         };
     };
@@ -3672,6 +6842,15 @@ export interface operations {
                 };
                 content?: never;
             };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
         };
     };
     FinishesController_create: {
@@ -3705,6 +6884,15 @@ export interface operations {
                 };
                 content?: never;
             };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
         };
     };
     FinishesController_get: {
@@ -3732,6 +6920,15 @@ export interface operations {
                     [name: string]: unknown;
                 };
                 content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
             };
         };
     };
@@ -3768,6 +6965,15 @@ export interface operations {
                 };
                 content?: never;
             };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
         };
     };
     FinishesController_archive: {
@@ -3798,6 +7004,15 @@ export interface operations {
                     [name: string]: unknown;
                 };
                 content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
             };
         };
     };
@@ -3830,6 +7045,15 @@ export interface operations {
                 };
                 content?: never;
             };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
         };
     };
     MaterialGroupsController_list: {
@@ -3860,6 +7084,15 @@ export interface operations {
                     [name: string]: unknown;
                 };
                 content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
             };
         };
     };
@@ -3894,6 +7127,15 @@ export interface operations {
                 };
                 content?: never;
             };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
         };
     };
     MaterialGroupsController_get: {
@@ -3921,6 +7163,15 @@ export interface operations {
                     [name: string]: unknown;
                 };
                 content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
             };
         };
     };
@@ -3957,6 +7208,15 @@ export interface operations {
                 };
                 content?: never;
             };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
         };
     };
     EffectsController_list: {
@@ -3989,6 +7249,15 @@ export interface operations {
                     [name: string]: unknown;
                 };
                 content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
             };
         };
     };
@@ -4023,6 +7292,15 @@ export interface operations {
                 };
                 content?: never;
             };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
         };
     };
     EffectsController_get: {
@@ -4050,6 +7328,15 @@ export interface operations {
                     [name: string]: unknown;
                 };
                 content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
             };
         };
     };
@@ -4086,6 +7373,15 @@ export interface operations {
                 };
                 content?: never;
             };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
         };
     };
     EffectsController_archive: {
@@ -4116,6 +7412,15 @@ export interface operations {
                     [name: string]: unknown;
                 };
                 content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
             };
         };
     };
@@ -4148,6 +7453,15 @@ export interface operations {
                 };
                 content?: never;
             };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
         };
     };
     CautionsController_list: {
@@ -4173,6 +7487,15 @@ export interface operations {
                     [name: string]: unknown;
                 };
                 content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
             };
         };
     };
@@ -4206,6 +7529,15 @@ export interface operations {
                     [name: string]: unknown;
                 };
                 content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
             };
         };
     };
@@ -4244,6 +7576,15 @@ export interface operations {
                 };
                 content?: never;
             };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
         };
     };
     CautionsController_tighten: {
@@ -4279,6 +7620,15 @@ export interface operations {
                 };
                 content?: never;
             };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
         };
     };
     CouponPhotosController_list: {
@@ -4311,6 +7661,15 @@ export interface operations {
                     [name: string]: unknown;
                 };
                 content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
             };
         };
     };
@@ -4356,6 +7715,15 @@ export interface operations {
                 };
                 content?: never;
             };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
         };
     };
     PhotosController_get: {
@@ -4383,6 +7751,15 @@ export interface operations {
                     [name: string]: unknown;
                 };
                 content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
             };
         };
     };
@@ -4419,6 +7796,15 @@ export interface operations {
                 };
                 content?: never;
             };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
         };
     };
     PhotosController_retry: {
@@ -4446,6 +7832,15 @@ export interface operations {
                     [name: string]: unknown;
                 };
                 content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
             };
         };
     };
@@ -4477,6 +7872,1463 @@ export interface operations {
                 };
                 content: {
                     "image/jpeg": string;
+                };
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    CouponsController_list: {
+        parameters: {
+            query?: {
+                /** @description How many items at most */
+                limit?: number;
+                /** @description nextCursor of the page before; opaque */
+                cursor?: string;
+                /** @description Only coupons in this state */
+                state?: "planned" | "marked" | "inspected" | "sealed";
+                /** @description Only coupons for this purpose */
+                purpose?: "exploration" | "confirmation";
+                /** @description Only this material */
+                materialId?: string;
+                /** @description Only this effect */
+                effectId?: string;
+                /** @description Only this machine */
+                machineId?: string;
+                /** @description Words to find in code, title, material, finish, lot or place of storage */
+                q?: string;
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["CouponPageDto"];
+                };
+            };
+            /** @description needs the role operator or a higher one */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    CouponPlansController_create: {
+        parameters: {
+            query?: never;
+            header: {
+                /** @description 8 to 128 visible characters, new for each act and the same for each retry */
+                "Idempotency-Key": string;
+            };
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["PlanCouponDto"];
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["CouponDto"];
+                };
+            };
+            /** @description needs the role operator or a higher one */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    CouponsController_facets: {
+        parameters: {
+            query?: {
+                /** @description How many items at most */
+                limit?: number;
+                /** @description nextCursor of the page before; opaque */
+                cursor?: string;
+                /** @description Only coupons in this state */
+                state?: "planned" | "marked" | "inspected" | "sealed";
+                /** @description Only coupons for this purpose */
+                purpose?: "exploration" | "confirmation";
+                /** @description Only this material */
+                materialId?: string;
+                /** @description Only this effect */
+                effectId?: string;
+                /** @description Only this machine */
+                machineId?: string;
+                /** @description Words to find in code, title, material, finish, lot or place of storage */
+                q?: string;
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["CouponFacetsDto"];
+                };
+            };
+            /** @description needs the role operator or a higher one */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    CouponsController_exportCsv: {
+        parameters: {
+            query?: {
+                /** @description How many items at most */
+                limit?: number;
+                /** @description nextCursor of the page before; opaque */
+                cursor?: string;
+                /** @description Only coupons in this state */
+                state?: "planned" | "marked" | "inspected" | "sealed";
+                /** @description Only coupons for this purpose */
+                purpose?: "exploration" | "confirmation";
+                /** @description Only this material */
+                materialId?: string;
+                /** @description Only this effect */
+                effectId?: string;
+                /** @description Only this machine */
+                machineId?: string;
+                /** @description Words to find in code, title, material, finish, lot or place of storage */
+                q?: string;
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "text/csv": string;
+                };
+            };
+            /** @description needs the role operator or a higher one */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    CouponsController_get: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                couponId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["CouponDto"];
+                };
+            };
+            /** @description needs the role operator or a higher one */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    CouponPlansController_preview: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["PlanCouponDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["CouponPreviewDto"];
+                };
+            };
+            /** @description needs the role operator or a higher one */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    CouponPlansController_confirm: {
+        parameters: {
+            query?: never;
+            header: {
+                /** @description 8 to 128 visible characters, new for each act and the same for each retry */
+                "Idempotency-Key": string;
+            };
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["ConfirmRevisionDto"];
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["CouponDto"];
+                };
+            };
+            /** @description needs the role operator or a higher one */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    CouponMarkingController_start: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                couponId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["CouponDto"];
+                };
+            };
+            /** @description needs the role operator or a higher one */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    CouponMarkingController_markCell: {
+        parameters: {
+            query?: never;
+            header: {
+                /** @description 8 to 128 visible characters, new for each act and the same for each retry */
+                "Idempotency-Key": string;
+            };
+            path: {
+                couponId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["MarkCellDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["MarkedCellDto"];
+                };
+            };
+            /** @description needs the role operator or a higher one */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    CouponMarkingController_undo: {
+        parameters: {
+            query?: never;
+            header: {
+                /** @description 8 to 128 visible characters, new for each act and the same for each retry */
+                "Idempotency-Key": string;
+            };
+            path: {
+                couponId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["UndoMarkDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["MarkedCellDto"];
+                };
+            };
+            /** @description needs the role operator or a higher one */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    CouponMarkingController_finish: {
+        parameters: {
+            query?: never;
+            header: {
+                /** @description 8 to 128 visible characters, new for each act and the same for each retry */
+                "Idempotency-Key": string;
+            };
+            path: {
+                couponId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["FinishMarkingDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["CouponDto"];
+                };
+            };
+            /** @description needs the role operator or a higher one */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    CouponArtworkController_artwork: {
+        parameters: {
+            query?: {
+                /** @description What the laser does to the ground */
+                polarity?: "dark on bright" | "bright on dark";
+            };
+            header?: never;
+            path: {
+                couponId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "image/svg+xml": string;
+                };
+            };
+            /** @description needs the role operator or a higher one */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    CouponArtworkController_cells: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                couponId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "text/csv": string;
+                };
+            };
+            /** @description needs the role operator or a higher one */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    CouponImportController_preview: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["ImportCouponDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ImportPreviewDto"];
+                };
+            };
+            /** @description needs the role operator or a higher one */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    CouponImportController_create: {
+        parameters: {
+            query?: never;
+            header: {
+                /** @description 8 to 128 visible characters, new for each act and the same for each retry */
+                "Idempotency-Key": string;
+            };
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["ImportCouponDto"];
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["CouponDto"];
+                };
+            };
+            /** @description needs the role operator or a higher one */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    CouponInspectionController_get: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                couponId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["InspectionDto"];
+                };
+            };
+            /** @description needs the role operator or a higher one */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    CouponInspectionController_recordCriteria: {
+        parameters: {
+            query?: never;
+            header: {
+                /** @description ETag of the version that was read, such as "v3" */
+                "If-Match": string;
+            };
+            path: {
+                couponId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["RecordCriteriaDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["InspectionDto"];
+                };
+            };
+            /** @description needs the role operator or a higher one */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    CouponInspectionController_inspect: {
+        parameters: {
+            query?: never;
+            header: {
+                /** @description 8 to 128 visible characters, new for each act and the same for each retry */
+                "Idempotency-Key": string;
+                /** @description ETag of the version that was read, such as "v3" */
+                "If-Match": string;
+            };
+            path: {
+                couponId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["InspectCouponDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["CouponDto"];
+                };
+            };
+            /** @description needs the role operator or a higher one */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    CouponInspectionController_seal: {
+        parameters: {
+            query?: never;
+            header: {
+                /** @description 8 to 128 visible characters, new for each act and the same for each retry */
+                "Idempotency-Key": string;
+                /** @description ETag of the version that was read, such as "v3" */
+                "If-Match": string;
+            };
+            path: {
+                couponId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["CouponDto"];
+                };
+            };
+            /** @description needs the role operator or a higher one */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    CouponInspectionController_correct: {
+        parameters: {
+            query?: never;
+            header: {
+                /** @description 8 to 128 visible characters, new for each act and the same for each retry */
+                "Idempotency-Key": string;
+            };
+            path: {
+                couponId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["CorrectCouponDto"];
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["CorrectionDto"];
+                };
+            };
+            /** @description needs the role operator or a higher one */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    CouponRatingsController_saveRatings: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                couponId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["SaveRatingsDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["SavedRatingsDto"];
+                };
+            };
+            /** @description needs the role operator or a higher one */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description a rating moved on; current.conflicts holds yours and the stored one of each cell */
+            412: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    CouponRatingsController_addMeasurements: {
+        parameters: {
+            query?: never;
+            header: {
+                /** @description 8 to 128 visible characters, new for each act and the same for each retry */
+                "Idempotency-Key": string;
+            };
+            path: {
+                couponId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["AddMeasurementsDto"];
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["SavedMeasurementsDto"];
+                };
+            };
+            /** @description needs the role operator or a higher one */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    RecipesController_list: {
+        parameters: {
+            query?: {
+                /** @description How many items at most */
+                limit?: number;
+                /** @description nextCursor of the page before; opaque */
+                cursor?: string;
+                /** @description Only recipes that stand so */
+                state?: "approved" | "due" | "scheduled" | "in_review" | "draft" | "returned" | "withdrawn";
+                /** @description Only this material */
+                materialId?: string;
+                /** @description Only this effect */
+                effectId?: string;
+                /** @description Only this machine */
+                machineId?: string;
+                /** @description Words to find in code, title, material, finish, effect or machine */
+                q?: string;
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["RecipePageDto"];
+                };
+            };
+            /** @description needs the role operator or a higher one */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    RecipesController_create: {
+        parameters: {
+            query?: never;
+            header: {
+                /** @description 8 to 128 visible characters, new for each act and the same for each retry */
+                "Idempotency-Key": string;
+            };
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["CreateRecipeDto"];
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["RecipeRevisionDto"];
+                };
+            };
+            /** @description needs the role operator or a higher one */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    RecipesController_fromCell: {
+        parameters: {
+            query?: never;
+            header: {
+                /** @description 8 to 128 visible characters, new for each act and the same for each retry */
+                "Idempotency-Key": string;
+            };
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["RecipeFromCellDto"];
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["RecipeRevisionDto"];
+                };
+            };
+            /** @description needs the role operator or a higher one */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    RecipesController_get: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                recipeId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["RecipeDto"];
+                };
+            };
+            /** @description needs the role operator or a higher one */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    RecipesController_update: {
+        parameters: {
+            query?: never;
+            header: {
+                /** @description ETag of the version that was read, such as "v3" */
+                "If-Match": string;
+            };
+            path: {
+                recipeId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["UpdateRecipeDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["RecipeDto"];
+                };
+            };
+            /** @description needs the role operator or a higher one */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    RecipesController_createDraft: {
+        parameters: {
+            query?: never;
+            header: {
+                /** @description 8 to 128 visible characters, new for each act and the same for each retry */
+                "Idempotency-Key": string;
+            };
+            path: {
+                recipeId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["CreateDraftDto"];
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["RecipeRevisionDto"];
+                };
+            };
+            /** @description needs the role operator or a higher one */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    RecipeRevisionsController_compare: {
+        parameters: {
+            query: {
+                /** @description Two to four revisions, separated by commas, in the order of the columns */
+                ids: string;
+                /** @description Revision that the others are compared with; absent: the approved one, else the first */
+                referenceId?: string;
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ComparisonDto"];
+                };
+            };
+            /** @description needs the role operator or a higher one */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    RecipeRevisionsController_get: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                revisionId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["RecipeRevisionDto"];
+                };
+            };
+            /** @description needs the role operator or a higher one */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    RecipeRevisionsController_remove: {
+        parameters: {
+            query?: never;
+            header: {
+                /** @description ETag of the version that was read, such as "v3" */
+                "If-Match": string;
+            };
+            path: {
+                revisionId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            /** @description It is gone; the ledger keeps that it was */
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description needs the role operator or a higher one */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    RecipeRevisionsController_update: {
+        parameters: {
+            query?: never;
+            header: {
+                /** @description ETag of the version that was read, such as "v3" */
+                "If-Match": string;
+            };
+            path: {
+                revisionId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["UpdateRevisionDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["RecipeRevisionDto"];
+                };
+            };
+            /** @description needs the role operator or a higher one */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    RecipeRevisionsController_setEvidence: {
+        parameters: {
+            query?: never;
+            header: {
+                /** @description ETag of the version that was read, such as "v3" */
+                "If-Match": string;
+            };
+            path: {
+                revisionId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["SetEvidenceDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["RecipeRevisionDto"];
+                };
+            };
+            /** @description needs the role operator or a higher one */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    RecipeRevisionsController_candidates: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                revisionId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["EvidenceCandidatesDto"];
+                };
+            };
+            /** @description needs the role operator or a higher one */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
                 };
             };
         };

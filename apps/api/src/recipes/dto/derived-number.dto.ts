@@ -16,3 +16,8 @@ export class DerivedNumberDto {
   })
   inputs: Record<string, number>;
 }
+
+export class StepNumbersDto {
+  @ApiProperty({ description: 'Number of the mark step, from 1' }) step: number;
+  @ApiProperty({ type: [DerivedNumberDto], description: 'What follows from it' }) numbers: DerivedNumberDto[];
+}

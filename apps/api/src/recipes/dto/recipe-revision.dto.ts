@@ -13,7 +13,7 @@ import {
 import { NamedDto } from '../../coupons/dto/coupon.dto';
 import { PanelDto } from '../../machines/dto/panel.dto';
 import { PhysicalProfileDto } from '../../machines/dto/physical-profile.dto';
-import { DerivedNumberDto } from './derived-number.dto';
+import { StepNumbersDto } from './derived-number.dto';
 import { EvidenceDto } from './evidence.dto';
 import { MarkStepDto, SetUpStepDto } from './mark-step.dto';
 import { RecipeKeysDto } from './recipe-keys.dto';
@@ -130,12 +130,7 @@ export class RecipeRevisionDto extends RevisionBriefDto {
     description: 'The revision that the changes are counted from; null: there is none',
   })
   comparedWith: RevisionBriefDto | null;
-  @ApiProperty({
-    type: 'array',
-    items: { type: 'array', items: { $ref: '#/components/schemas/DerivedNumberDto' } },
-    description: 'Numbers that follow from each mark step',
-  })
-  derived: DerivedNumberDto[][];
+  @ApiProperty({ type: [StepNumbersDto], description: 'Numbers that follow from each mark step' }) derived: StepNumbersDto[];
   @ApiProperty({ description: 'SHA-256 of the content as it stands now, hexadecimal; what a signature is bound to' }) contentHash: string;
   @ApiProperty({ description: 'Number of the stored version; the ETag is "v" and this number' }) version: number;
   @ApiProperty({

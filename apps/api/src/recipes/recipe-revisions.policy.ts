@@ -1,0 +1,43 @@
+import { type RevisionState, roleAtLeast } from '@proofplate/recipe-model';
+import type { Actor } from '../common/actor';
+
+export type RevisionActionName =
+  | 'edit'
+  | 'discard'
+  | 'submit'
+  | 'recall'
+  | 'return'
+  | 'approve'
+  | 'withdraw'
+  | 'copy'
+  | 'start-confirmation';
+
+export type RevisionFacts = { readonly state: RevisionState; readonly createdBy: string };
+type Caller = Pick<Actor, 'role' | 'memberId'>;
+
+/** A draft belongs to its author; a lead may help. */
+export const mayEditDraft = (caller: Caller, { createdBy }: Pick<RevisionFacts, 'createdBy'>) =>
+  roleAtLeast(caller.role, 'lead') || (roleAtLeast(caller.role, 'operator') && createdBy === caller.memberId);
+
+/** Submitting and recalling are acts of the author alone. */
+export const isAuthor = (caller: Caller, { createdBy }: Pick<RevisionFacts, 'createdBy'>) => createdBy === caller.memberId;
+
+/** What the member may do with a revision. */
+export function revisionActions(caller: Caller, revision: RevisionFacts, authorMaySign: boolean): RevisionActionName[] {
+  if (!roleAtLeast(caller.role, 'operator')) return [];
+  const own = isAuthor(caller, revision);
+  const leads = roleAtLeast(caller.role, 'lead');
+  const { state } = revision;
+  const allowed: readonly [RevisionActionName, boolean][] = [
+    ['edit', state === 'draft' && mayEditDraft(caller, revision)],
+    ['discard', state === 'draft' && mayEditDraft(caller, revision)],
+    ['submit', state === 'draft' && own],
+    ['recall', state === 'in_review' && own],
+    ['return', state === 'in_review' && leads],
+    ['approve', state === 'in_review' && leads && (!own || authorMaySign)],
+    ['withdraw', state === 'approved' && leads],
+    ['copy', state !== 'draft'],
+    ['start-confirmation', state === 'draft' || state === 'in_review'],
+  ];
+  return allowed.filter(([, isAllowed]) => isAllowed).map(([action]) => action);
+}

@@ -1,0 +1,49 @@
+import { Module } from '@nestjs/common';
+import { JobsModule } from '../jobs/jobs.module';
+import { LedgerModule } from '../ledger/ledger.module';
+import { MachinesModule } from '../machines/machines.module';
+import { PhotosModule } from '../photos/photos.module';
+import { ShopsModule } from '../shops/shops.module';
+import { DraftEntryService } from './draft-entry.service';
+import { DraftGroundService } from './draft-ground.service';
+import { DraftRepositories } from './draft-repositories';
+import { DraftStoreService } from './draft-store.service';
+import { RecipeDraftingService } from './recipe-drafting.service';
+import { RecipeListRepository } from './recipe-list.repository';
+import { RecipeRevisionsController } from './recipe-revisions.controller';
+import { RecipeRevisionsRepository } from './recipe-revisions.repository';
+import { RecipeRevisionsService } from './recipe-revisions.service';
+import { RecipeViewsService } from './recipe-views.service';
+import { RecipesController } from './recipes.controller';
+import { RecipesRepository } from './recipes.repository';
+import { RecipesService } from './recipes.service';
+import { RevisionDraftsService } from './revision-drafts.service';
+import { RevisionEvidenceRepository } from './revision-evidence.repository';
+import { RevisionRecordsService } from './revision-records.service';
+import { RevisionViewsService } from './revision-views.service';
+import { ScheduledRevisionsService } from './scheduled-revisions.service';
+
+@Module({
+  imports: [JobsModule, LedgerModule, ShopsModule, MachinesModule, PhotosModule],
+  controllers: [RecipesController, RecipeRevisionsController],
+  providers: [
+    RecipesService,
+    RecipeViewsService,
+    RecipeDraftingService,
+    RecipeRevisionsService,
+    RevisionDraftsService,
+    RevisionViewsService,
+    RevisionRecordsService,
+    ScheduledRevisionsService,
+    DraftEntryService,
+    DraftGroundService,
+    DraftStoreService,
+    DraftRepositories,
+    RecipesRepository,
+    RecipeListRepository,
+    RecipeRevisionsRepository,
+    RevisionEvidenceRepository,
+  ],
+  exports: [RecipeRevisionsService],
+})
+export class RecipesModule {}

@@ -1,0 +1,74 @@
+import { Injectable } from '@nestjs/common';
+import type { Actor } from '../common/actor';
+import { ForbiddenError, InvalidError, StaleError } from '../common/errors/domain-error';
+import { decodeCursor, pageOf } from '../common/pagination/page';
+import { type Tx, UnitOfWork } from '../database/unit-of-work';
+import { LedgerService } from '../ledger/ledger.service';
+import { DraftEntryService } from './draft-entry.service';
+import { DraftRepositories } from './draft-repositories';
+import type { UpdateRecipeDto } from './dto/create-recipe.dto';
+import type { ListRecipesQuery } from './dto/list-recipes.query.dto';
+import type { RecipeDto, RecipePageDto } from './dto/recipe.dto';
+import { scopeAsStored } from './entered-content';
+import { RecipeViewsService } from './recipe-views.service';
+import { RecipeNotFoundError, ScopeSignedError } from './recipes.errors';
+import { mayEditRecipe } from './recipes.policy';
+
+/** Finding recipes and changing what is not signed of them. */
+@Injectable()
+export class RecipesService {
+  constructor(
+    private readonly unitOfWork: UnitOfWork,
+    private readonly repositories: DraftRepositories,
+    private readonly views: RecipeViewsService,
+    private readonly entry: DraftEntryService,
+    private readonly ledger: LedgerService,
+  ) {}
+
+  async list(actor: Actor, { limit, cursor, ...filter }: ListRecipesQuery): Promise<RecipePageDto> {
+    const [rank, activeAt, id] = decodeCursor(cursor, ['number', 'string', 'string']) ?? [];
+    const after = rank === undefined ? {} : { after: { rank: Number(rank), activeAt: String(activeAt), id: String(id) } };
+    return this.unitOfWork.read(actor, async (tx) => {
+      const viewer = await this.views.viewerOf(tx, actor);
+      const rows = await this.views.rows(tx, viewer, filter, { limit: limit + 1, ...after });
+      const facets = await this.views.facets(tx, viewer, filter);
+      const summaries = await this.views.summaries(tx, actor, rows.slice(0, limit));
+      const page = pageOf(rows, limit, { item: (row) => row, cursor: (row) => [row.rank, row.active_text, row.id] });
+      return { items: summaries, nextCursor: page.nextCursor, facets };
+    });
+  }
+
+  async get(actor: Actor, id: string): Promise<RecipeDto> {
+    const isDue = await this.unitOfWork.read(actor, (tx) => this.views.hasDueRevision(tx, actor.shopId, id));
+    // the worker may not have come to it yet; whoever looks must see the setting that holds now
+    if (isDue) await this.unitOfWork.run({ shopId: actor.shopId }, (tx) => this.views.takeDue(tx, actor.shopId, id));
+    return this.unitOfWork.read(actor, (tx) => this.views.getDto(tx, actor, id));
+  }
+
+  /** Changes the title; and the scope while nothing was submitted, since it is signed with the setting. */
+  async update(actor: Actor, id: string, version: number, dto: UpdateRecipeDto): Promise<RecipeDto> {
+    return this.unitOfWork.run(actor, async (tx) => {
+      const before = await this.repositories.recipes.lock(tx, actor.shopId, id);
+      if (before === undefined) throw new RecipeNotFoundError();
+      if (!mayEditRecipe(actor, before)) throw new ForbiddenError('Whoever began the recipe changes it, or a lead.');
+      if (before.version !== version) throw new StaleError(await this.views.getDto(tx, actor, id));
+      const scope = dto.scope == null ? undefined : await this.changeScope(tx, actor, id, dto.scope);
+      const change = { ...(dto.title == null ? {} : { title: dto.title }), ...(scope === undefined ? {} : { scope }) };
+      await this.repositories.recipes.update(tx, { shopId: actor.shopId, id }, change);
+      const entry = { actor, action: 'recipe.changed', subjectType: 'recipe', subjectId: id, subjectCode: before.code };
+      await this.ledger.record(tx, { ...entry, before: { title: before.title }, after: change });
+      return this.views.getDto(tx, actor, id);
+    });
+  }
+
+  private async changeScope(tx: Tx, actor: Actor, recipeId: string, typed: NonNullable<UpdateRecipeDto['scope']>) {
+    const ladder = await this.repositories.revisions.lockLadder(tx, actor.shopId, recipeId);
+    if (ladder.some(({ number }) => number !== null)) throw new ScopeSignedError();
+    const problems = await this.entry.scopeProblems(tx, actor.shopId, typed);
+    if (problems.length > 0) throw new InvalidError('The scope needs another look.', problems);
+    const scope = scopeAsStored(typed);
+    for (const { id, content } of ladder)
+      await this.repositories.revisions.updateDraft(tx, { shopId: actor.shopId, id }, { content: { ...content, scope } });
+    return scope;
+  }
+}

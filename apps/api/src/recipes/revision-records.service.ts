@@ -1,0 +1,112 @@
+import { Injectable } from '@nestjs/common';
+import type { Actor } from '../common/actor';
+import type { Tx } from '../database/unit-of-work';
+import { CautionsService } from '../materials/cautions.service';
+import { PhotosService } from '../photos/photos.service';
+import { ShopsService } from '../shops/shops.service';
+import type { RecipeRevisionDto } from './dto/recipe-revision.dto';
+import { toRevisionDto } from './recipe-revisions.mapper';
+import { RecipeRevisionsRepository } from './recipe-revisions.repository';
+import { RevisionNotFoundError } from './recipes.errors';
+import { RevisionEvidenceRepository } from './revision-evidence.repository';
+import { hashOfRevision } from './revision-hash';
+import type { EvidenceKind, KeyIds, LinkedCell, RevisionCaution, RevisionHead, RevisionRecord } from './stored-revision';
+
+/** Reads revisions whole, any number of them in the same few queries. */
+@Injectable()
+export class RevisionRecordsService {
+  constructor(
+    private readonly revisions: RecipeRevisionsRepository,
+    private readonly evidence: RevisionEvidenceRepository,
+    private readonly cautions: CautionsService,
+    private readonly photos: PhotosService,
+    private readonly shops: ShopsService,
+  ) {}
+
+  /** @throws RevisionNotFoundError also for another shop's revision */
+  async get(tx: Tx, shopId: string, id: string): Promise<RevisionRecord> {
+    const [record] = await this.list(tx, shopId, [id]);
+    if (record === undefined) throw new RevisionNotFoundError();
+    return record;
+  }
+
+  /** In the order of the ids. @throws RevisionNotFoundError for an id that the shop does not have */
+  async list(tx: Tx, shopId: string, ids: readonly string[]): Promise<RevisionRecord[]> {
+    const heads = await this.revisions.heads(tx, shopId, ids);
+    const recipeIds = [...new Set(heads.map(({ recipe }) => recipe.id))];
+    const ladder = await this.revisions.ladders(tx, shopId, recipeIds);
+    const signOffs = await this.revisions.signOffs(
+      tx,
+      shopId,
+      ladder.map(({ id }) => id),
+    );
+    const linked = await this.evidence.linked(tx, shopId, ids);
+    const runs = await this.evidence.runs(tx, shopId, ids);
+    const cautions = await this.cautionsOf(tx, shopId, heads);
+    return ids.map((id) => {
+      const head = heads.find(({ revision }) => revision.id === id);
+      const brief = ladder.find((rung) => rung.id === id);
+      if (head === undefined || brief === undefined) throw new RevisionNotFoundError();
+      const ofKind = (kind: EvidenceKind) => linked.filter((cell: LinkedCell) => cell.revisionId === id && cell.kind === kind);
+      return {
+        ...head,
+        brief,
+        ladder: ladder.filter(({ recipeId }) => recipeId === head.recipe.id),
+        signOffs,
+        basis: ofKind('basis'),
+        confirmation: ofKind('confirmation'),
+        runs: runs.filter(({ revisionId }) => revisionId === id),
+        cautions: cautions.get(id) ?? [],
+      };
+    });
+  }
+
+  async toDto(tx: Tx, actor: Actor, record: RevisionRecord): Promise<RecipeRevisionDto> {
+    const { policy } = await this.shops.getRow(tx, actor.shopId);
+    return toRevisionDto(record, {
+      actor,
+      authorMaySign: policy.authorMaySign,
+      photoUrls: (photo) => this.photos.urlsOf(photo),
+      contentHash: hashOfRecord(record),
+    });
+  }
+
+  async getDto(tx: Tx, actor: Actor, id: string): Promise<RecipeRevisionDto> {
+    return this.toDto(tx, actor, await this.get(tx, actor.shopId, id));
+  }
+
+  private async cautionsOf(tx: Tx, shopId: string, heads: readonly RevisionHead[]): Promise<Map<string, RevisionCaution[]>> {
+    const byRevision = new Map<string, RevisionCaution[]>();
+    for (const { revision, recipe } of heads) {
+      const { scope, limits } = revision.content;
+      const rows = await this.cautions.cautionsFor(tx, shopId, {
+        materialId: recipe.material.id,
+        finishId: recipe.finish.id,
+        effectId: recipe.effect.id,
+        sourceKind: recipe.machine.sourceKind,
+        roundPart: scope.partDiameterMm !== undefined || limits.partDiameterMm !== undefined,
+      });
+      byRevision.set(
+        revision.id,
+        rows.map(({ id, level, subject, text, source }) => ({ id, level, subject, text, source })),
+      );
+    }
+    return byRevision;
+  }
+}
+
+/** The hash of the record as it stands in the database. */
+export function hashOfRecord({ revision, recipe, basis, confirmation }: RevisionRecord): string {
+  return hashOfRevision(revision, keyIdsOf(recipe), {
+    basisCellIds: basis.map(({ cellId }) => cellId),
+    confirmationCellIds: confirmation.map(({ cellId }) => cellId),
+  });
+}
+
+export const keyIdsOf = ({ material, finish, effect, machine, lens }: RevisionRecord['recipe']): KeyIds => ({
+  materialId: material.id,
+  finishId: finish.id,
+  effectId: effect.id,
+  machineId: machine.id,
+  lensId: lens.id,
+});

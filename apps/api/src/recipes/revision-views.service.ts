@@ -1,0 +1,56 @@
+import { Injectable } from '@nestjs/common';
+import type { Actor } from '../common/actor';
+import { UnitOfWork } from '../database/unit-of-work';
+import { PhotosService } from '../photos/photos.service';
+import { comparisonRows } from './comparison';
+import type { CompareQuery, ComparisonDto } from './dto/comparison.dto';
+import type { EvidenceCandidatesDto } from './dto/evidence.dto';
+import type { RecipeRevisionDto } from './dto/recipe-revision.dto';
+import { toEvidenceCellDto } from './evidence.mapper';
+import { essentialDifferences } from './evidence-judgement';
+import { RevisionNotFoundError } from './recipes.errors';
+import { RevisionEvidenceRepository } from './revision-evidence.repository';
+import { keyIdsOf, RevisionRecordsService } from './revision-records.service';
+
+const MOST_SHOWN = 100;
+
+/** What people look at: one revision, several side by side, cells that a draft could cite. */
+@Injectable()
+export class RevisionViewsService {
+  constructor(
+    private readonly unitOfWork: UnitOfWork,
+    private readonly records: RevisionRecordsService,
+    private readonly evidence: RevisionEvidenceRepository,
+    private readonly photos: PhotosService,
+  ) {}
+
+  async get(actor: Actor, id: string): Promise<RecipeRevisionDto> {
+    return this.unitOfWork.read(actor, (tx) => this.records.getDto(tx, actor, id));
+  }
+
+  async compare(actor: Actor, { ids, referenceId }: CompareQuery): Promise<ComparisonDto> {
+    return this.unitOfWork.read(actor, async (tx) => {
+      const records = await this.records.list(tx, actor.shopId, ids);
+      const revisions: RecipeRevisionDto[] = [];
+      for (const record of records) revisions.push(await this.records.toDto(tx, actor, record));
+      const reference =
+        records.find(({ revision }) => revision.id === referenceId) ??
+        records.find(({ revision }) => revision.state === 'approved') ??
+        records[0];
+      if (reference === undefined) throw new RevisionNotFoundError();
+      return { revisions, referenceId: reference.revision.id, rows: comparisonRows(records, reference) };
+    });
+  }
+
+  /** Cells that a draft could cite: the best of the same work, and those with exactly its essential parameters. */
+  async candidates(actor: Actor, id: string): Promise<EvidenceCandidatesDto> {
+    return this.unitOfWork.read(actor, async (tx) => {
+      const { recipe, revision } = await this.records.get(tx, actor.shopId, id);
+      const { steps } = revision.content;
+      const cells = await this.evidence.candidates(tx, actor.shopId, keyIdsOf(recipe));
+      const same = cells.filter(({ parameters, coupon }) => essentialDifferences(parameters, steps, coupon.unknownFields).length === 0);
+      const toDto = (cell: (typeof cells)[number]) => toEvidenceCellDto(cell, steps, (photo) => this.photos.urlsOf(photo));
+      return { basis: cells.slice(0, MOST_SHOWN).map(toDto), confirmation: same.slice(0, MOST_SHOWN).map(toDto) };
+    });
+  }
+}
