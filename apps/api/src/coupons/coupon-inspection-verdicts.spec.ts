@@ -1,5 +1,5 @@
 import type { Criterion } from '@proofplate/recipe-model';
-import { cellVerdicts, countingMeasurement, type JudgedMeasurement } from './coupon-inspection-verdicts';
+import { cellVerdicts, countingIdsOf, countingMeasurement, type JudgedMeasurement } from './coupon-inspection-verdicts';
 
 const DARK: Criterion = { quantity: 'lightness', comparison: 'at most', value: 30, unit: '1' };
 const STRONG: Criterion = { quantity: 'contrast', comparison: 'at least', value: 0.6, unit: '1' };
@@ -76,5 +76,13 @@ describe('the measurement that counts', () => {
     expect(countingMeasurement([second, photo, first], 'lightness')).toBe(second);
     expect(countingMeasurement([photo], 'lightness')).toBe(photo);
     expect(countingMeasurement([photo], 'depth')).toBeUndefined();
+  });
+
+  it('is one per cell and quantity, and none of those that were superseded', () => {
+    const wrong = measured('a', 'lightness', 12);
+    const right = measured('a', 'lightness', 55, { supersedesId: wrong.id });
+    const depth = measured('a', 'depth', 9);
+    const other = measured('b', 'lightness', 20, { method: 'photo' });
+    expect([...countingIdsOf([wrong, depth, right, other])].sort()).toEqual([right.id, depth.id, other.id].sort());
   });
 });

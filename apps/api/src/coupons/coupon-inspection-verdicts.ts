@@ -51,6 +51,14 @@ export function countingMeasurement(rows: readonly JudgedMeasurement[], quantity
   return own.reduce<JudgedMeasurement | undefined>((best, row) => (best === undefined || outweighs(row, best) ? row : best), undefined);
 }
 
+/** Ids of the measurements that count, one per cell and quantity. */
+export function countingIdsOf(rows: readonly JudgedMeasurement[]): ReadonlySet<string> {
+  const ids = [...groupByCell(standing(rows)).values()].flatMap((own) =>
+    [...new Set(own.map(({ quantity }) => quantity))].map((quantity) => countingMeasurement(own, quantity)?.id),
+  );
+  return new Set(ids.filter((id) => id !== undefined));
+}
+
 function outweighs(row: JudgedMeasurement, best: JudgedMeasurement): boolean {
   const isEstimate = row.method === 'photo';
   if (isEstimate !== (best.method === 'photo')) return !isEstimate;

@@ -1,5 +1,5 @@
 import type { StoredCorrection } from './coupon-corrections.repository';
-import { cellVerdicts } from './coupon-inspection-verdicts';
+import { cellVerdicts, countingIdsOf } from './coupon-inspection-verdicts';
 import type { StoredMeasurement } from './coupon-measurements.repository';
 import type { StoredRating } from './coupon-ratings.repository';
 import type { StoredCell, StoredCoupon } from './coupons.repository';
@@ -9,19 +9,21 @@ export function toCellRatingDto({ id, cellId, memberId, by, rating, outcome, tag
   return { id, cellId, memberId, by, rating, outcome, tags, note, ratedAt: ratedAt.toISOString(), version };
 }
 
-/** @param supersededIds measurements whose place a later one took */
-export function toMeasurementDto(row: StoredMeasurement, supersededIds: ReadonlySet<string | null>): MeasurementDto {
-  const { id, cellId, quantity, value, grade, unit, method, methodDetail, instrument, photoId, uncertainty, by, supersedesId, reason } =
-    row;
-  return {
-    ...{ id, cellId, quantity, value, grade, unit, method, methodDetail, instrument, photoId, uncertainty, by, supersedesId, reason },
-    measuredAt: row.measuredAt.toISOString(),
-    isSuperseded: supersededIds.has(id),
-  };
+/** Measurements of a coupon, each with what became of it among the others. @param all every measurement of these cells */
+export function toMeasurementDtos(rows: readonly StoredMeasurement[], all: readonly StoredMeasurement[]): MeasurementDto[] {
+  const supersededIds = new Set(all.map(({ supersedesId }) => supersedesId));
+  const countingIds = countingIdsOf(all);
+  return rows.map((row) => {
+    const { id, cellId, quantity, value, grade, unit, method, methodDetail, instrument, photoId, uncertainty, by, supersedesId, reason } =
+      row;
+    return {
+      ...{ id, cellId, quantity, value, grade, unit, method, methodDetail, instrument, photoId, uncertainty, by, supersedesId, reason },
+      measuredAt: row.measuredAt.toISOString(),
+      isSuperseded: supersededIds.has(id),
+      counts: countingIds.has(id),
+    };
+  });
 }
-
-export const supersededIdsOf = (rows: readonly StoredMeasurement[]): ReadonlySet<string | null> =>
-  new Set(rows.map(({ supersedesId }) => supersedesId));
 
 export function toCorrectionDto({ id, cellId, address, text, reason, createdAt, by }: StoredCorrection): CorrectionDto {
   return { id, cellId, address, text, reason, at: createdAt.toISOString(), by };

@@ -4,7 +4,7 @@ import type { Actor } from '../common/actor';
 import type { Tx } from '../database/unit-of-work';
 import { EffectsService } from '../materials/effects.service';
 import { CouponCorrectionsRepository } from './coupon-corrections.repository';
-import { supersededIdsOf, toCellRatingDto, toCorrectionDto, toMeasurementDto, toVerdicts } from './coupon-inspection.mapper';
+import { toCellRatingDto, toCorrectionDto, toMeasurementDtos, toVerdicts } from './coupon-inspection.mapper';
 import { CouponInspectionRepository, type PhotoStanding } from './coupon-inspection.repository';
 import { type InspectionFacts, missingToInspect, missingToSeal } from './coupon-inspection-missing';
 import { CouponMeasurementsRepository } from './coupon-measurements.repository';
@@ -34,7 +34,6 @@ export class CouponInspectionReader {
     const ratings = await this.ratings.ofCoupon(tx, shopId, couponId);
     const photos = await this.inspection.photos(tx, shopId, couponId);
     const facts = { ...factsOf(whole, photos, await this.inspection.isPhotoRequired(tx, shopId)), ratings };
-    const superseded = supersededIdsOf(measurements);
     return {
       couponId,
       state: coupon.state,
@@ -43,7 +42,7 @@ export class CouponInspectionReader {
       areCriteriaFixed: ratings.length + measurements.length > 0 || coupon.state === 'inspected' || coupon.state === 'sealed',
       proposedCriteria: await this.proposedCriteria(tx, shopId, coupon.effectId),
       ratings: ratings.map(toCellRatingDto),
-      measurements: measurements.map((row) => toMeasurementDto(row, superseded)),
+      measurements: toMeasurementDtos(measurements, measurements),
       corrections: (await this.corrections.ofCoupon(tx, shopId, couponId)).map(toCorrectionDto),
       verdicts: toVerdicts(coupon, whole.cells, { ratings, measurements }),
       missingToInspect: missingToInspect(facts),

@@ -4,7 +4,7 @@ import type { Actor } from '../common/actor';
 import { type FieldProblem, InvalidError } from '../common/errors/domain-error';
 import { UnitOfWork } from '../database/unit-of-work';
 import { LedgerService } from '../ledger/ledger.service';
-import { toMeasurementDto } from './coupon-inspection.mapper';
+import { toMeasurementDtos } from './coupon-inspection.mapper';
 import { type CellStanding, CouponInspectionRepository, type PhotoStanding } from './coupon-inspection.repository';
 import { requireOpenForResults } from './coupon-inspection-state';
 import { CouponMeasurementsRepository, type NewMeasurement, type StoredMeasurement } from './coupon-measurements.repository';
@@ -51,7 +51,7 @@ export class CouponMeasurementsService {
       );
       const subject = { subjectType: 'coupon', subjectId: couponId, subjectCode: coupon.code };
       await this.ledger.record(tx, { actor, action: 'coupon.cells-measured', ...subject, after: rows.map((row) => told(row, cells)) });
-      return { measurements: rows.map((row) => toMeasurementDto(row, new Set())) };
+      return { measurements: toMeasurementDtos(rows, [...earlier, ...rows]) };
     });
   }
 }

@@ -53,6 +53,7 @@ export class MeasurementDto {
   @ApiProperty({ type: String, nullable: true, format: 'uuid', description: 'Earlier measurement that it takes the place of' })
   supersedesId: string | null;
   @ApiProperty({ description: 'true: a later measurement took its place' }) isSuperseded: boolean;
+  @ApiProperty({ description: 'true: of the quantity on this cell, this is the one that criteria and maps go by' }) counts: boolean;
   @ApiProperty({ description: 'Why it takes the place of another; may be empty' }) reason: string;
 }
 
