@@ -1480,6 +1480,265 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/api/runs": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Runs, newest first; a trainee sees the own ones */
+        get: operations["RunsController_list"];
+        put?: never;
+        /** Start a run; refused with every reason at its place */
+        post: operations["RunsController_start"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/runs/export.csv": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** The same list as CSV, all pages */
+        get: operations["RunsController_exportCsv"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/runs/start-sheet/{revisionId}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** What has to be known and done before a run of a revision starts */
+        get: operations["RunsController_startSheet"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/runs/{run}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** One run, by its id or its code */
+        get: operations["RunsController_get"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/runs/{runId}/ticks": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        /** Tick or untick settings and set-up steps */
+        patch: operations["RunsController_tick"];
+        trace?: never;
+    };
+    "/api/runs/{runId}/first-piece": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Release the first piece, or say that it does not match */
+        post: operations["RunsController_firstPiece"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/runs/{runId}/finish": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Finish the run with its counts and measurements */
+        post: operations["RunsController_finish"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/runs/{runId}/bad-result": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Tell a bad result, during the run or after it */
+        post: operations["RunsController_tellBadResult"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/holds": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Holds on recipes and machines, newest first */
+        get: operations["HoldsController_list"];
+        put?: never;
+        /** Stop the use of a recipe or a machine at once */
+        post: operations["HoldsController_place"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/holds/{holdId}/release": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Release a hold, with the reason */
+        post: operations["HoldsController_release"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/setting-requests": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Requests for settings, newest first; a trainee sees the own ones */
+        get: operations["SettingRequestsController_list"];
+        put?: never;
+        /** Ask for a setting that no approved recipe answers */
+        post: operations["SettingRequestsController_ask"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/setting-requests/{requestId}/answer": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Say what became of a request */
+        post: operations["SettingRequestsController_answer"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/deviations": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Deviations, newest first, also those that have ended */
+        get: operations["DeviationsController_list"];
+        put?: never;
+        /** Permit a departure from an approved revision, limited by time or quantity */
+        post: operations["DeviationsController_grant"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/finder": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** The approved setting for a machine, lens, material, finish and effect, or what comes nearest */
+        get: operations["FinderController_find"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/find": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Records by code or name, as far as the caller may read them */
+        get: operations["FinderController_search"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
 }
 export type webhooks = Record<string, never>;
 export interface components {
@@ -3700,6 +3959,8 @@ export interface components {
             supersedesId: string | null;
             /** @description true: a later measurement took its place */
             isSuperseded: boolean;
+            /** @description true: of the quantity on this cell, this is the one that criteria and maps go by */
+            counts: boolean;
             /** @description Why it takes the place of another; may be empty */
             reason: string;
         };
@@ -4882,6 +5143,969 @@ export interface components {
             basis: components["schemas"]["EvidenceCellDto"][];
             /** @description Cells with exactly the revision’s essential parameters */
             confirmation: components["schemas"]["EvidenceCellDto"][];
+        };
+        /** @enum {string} */
+        RunKind: "production" | "confirmation" | "daily-check";
+        RunRecipeDto: {
+            /**
+             * Format: uuid
+             * @description Id of the recipe
+             */
+            id: string;
+            /** @description Code of the recipe */
+            code: string;
+            /** @description Title of the recipe */
+            title: string;
+        };
+        RunRevisionDto: {
+            /**
+             * Format: uuid
+             * @description Id of the revision
+             */
+            id: string;
+            /** @description Number; null: a draft */
+            number: number | null;
+            /** @description State of the revision now */
+            state: components["schemas"]["RevisionState"];
+        };
+        FirstPieceDto: {
+            /** @description true: it matches and the batch is released */
+            ok: boolean;
+            /**
+             * Format: uuid
+             * @description Id of the member who looked at it
+             */
+            by: string;
+            /** @description Name of that member */
+            byName: string;
+            /**
+             * Format: date-time
+             * @description When
+             */
+            at: string;
+            /** @description Remark; may be empty */
+            note: string;
+            /**
+             * Format: uuid
+             * @description Photo of it; null: none
+             */
+            photoId: string | null;
+        };
+        /**
+         * @description What went wrong
+         * @enum {string}
+         */
+        Outcome: "no-mark" | "faint" | "uneven" | "banded" | "good" | "wrong-colour" | "overburnt" | "charred" | "burr" | "halo" | "melted" | "cracked" | "warped" | "peeled";
+        BadResultDto: {
+            /** @description What went wrong */
+            outcome: components["schemas"]["Outcome"];
+            /** @description Remark; may be empty */
+            note: string;
+            /**
+             * Format: date-time
+             * @description When it was told
+             */
+            at: string;
+            /** @description Who told it */
+            byName: string;
+        };
+        RunSummaryDto: {
+            /**
+             * Format: uuid
+             * @description Id of the run
+             */
+            id: string;
+            /** @description Code that people read, such as J-0007 */
+            code: string;
+            /** @description Kind of run */
+            kind: components["schemas"]["RunKind"];
+            /**
+             * @description Where it stands
+             * @enum {string}
+             */
+            state: "started" | "finished" | "abandoned";
+            /** @description Recipe */
+            recipe: components["schemas"]["RunRecipeDto"];
+            /** @description Revision that was dialled in */
+            revision: components["schemas"]["RunRevisionDto"];
+            /** @description Machine */
+            machine: components["schemas"]["NamedDto"];
+            /** @description Material */
+            material: components["schemas"]["NamedDto"];
+            /** @description Job, as the shop calls it; may be empty */
+            jobReference: string;
+            /** @description Part; may be empty */
+            part: string;
+            /** @description Lot of the material; may be empty */
+            lot: string;
+            /** @description Good parts */
+            good: number;
+            /** @description Scrapped parts */
+            scrap: number;
+            /** @description First piece; null: not looked at yet */
+            firstPiece: components["schemas"]["FirstPieceDto"] | null;
+            /** @description Bad result that was told; null: none */
+            badResult: components["schemas"]["BadResultDto"] | null;
+            /** @description Who started it */
+            startedBy: components["schemas"]["NamedDto"];
+            /**
+             * Format: date-time
+             * @description When it was started
+             */
+            startedAt: string;
+            /**
+             * Format: date-time
+             * @description When it was finished
+             */
+            finishedAt: string | null;
+        };
+        RunPageDto: {
+            /** @description The items of this page, in order */
+            items: components["schemas"]["RunSummaryDto"][];
+            /** @description Send as cursor for the next page; null at the end */
+            nextCursor: string | null;
+        };
+        RunHoldDto: {
+            /**
+             * Format: uuid
+             * @description Id of the hold
+             */
+            id: string;
+            /**
+             * @description What is held
+             * @enum {string}
+             */
+            subject: "recipe" | "machine";
+            /** @description Why */
+            reason: string;
+            /** @description Who placed it */
+            placedBy: string;
+        };
+        DeviationDto: {
+            /**
+             * Format: uuid
+             * @description Id of the deviation
+             */
+            id: string;
+            /**
+             * Format: uuid
+             * @description Revision that may be departed from
+             */
+            revisionId: string;
+            /** @description What may differ */
+            description: string;
+            /** @description Why */
+            reason: string;
+            /**
+             * Format: date-time
+             * @description Ends at this time; null: by quantity only
+             */
+            endsAt: string | null;
+            /** @description Ends after so many parts; null: by time only */
+            maximumQuantity: number | null;
+            /** @description Parts marked under it so far, good and scrapped */
+            usedQuantity: number;
+            /** @description true: a run may cite it now */
+            isLive: boolean;
+            /** @description Who granted it */
+            grantedBy: string;
+            /**
+             * Format: date-time
+             * @description When
+             */
+            grantedAt: string;
+        };
+        StartSheetDto: {
+            /** @description Recipe */
+            recipe: components["schemas"]["RunRecipeDto"];
+            /** @description Revision */
+            revision: components["schemas"]["RunRevisionDto"];
+            /** @description Machine */
+            machine: components["schemas"]["NamedDto"];
+            /** @description Material */
+            material: components["schemas"]["NamedDto"];
+            /** @description Finish */
+            finish: components["schemas"]["NamedDto"];
+            /** @description Effect */
+            effect: components["schemas"]["NamedDto"];
+            /** @description Lens that must be fitted */
+            lens: components["schemas"]["NamedDto"];
+            /** @description Lenses of the shop, to say which one is fitted */
+            lenses: components["schemas"]["NamedDto"][];
+            /** @description The fields of the machine’s control, in its order */
+            panel: components["schemas"]["PanelDto"];
+            /** @description Mark steps */
+            steps: components["schemas"]["MarkStepDto"][];
+            /** @description Set-up steps */
+            setUpSteps: components["schemas"]["SetUpStepDto"][];
+            /** @description Open holds; nothing starts while there is one */
+            holds: components["schemas"]["RunHoldDto"][];
+            /** @description Deviations that a run may cite now */
+            deviations: components["schemas"]["DeviationDto"][];
+            /** @description Kinds of run that may cite it now */
+            kinds: string[];
+        };
+        StartRunDto: {
+            /**
+             * Format: uuid
+             * @description Made by the device, so that a run sent twice is one run
+             */
+            clientId: string;
+            /** @description Kind of run */
+            kind: components["schemas"]["RunKind"];
+            /**
+             * Format: uuid
+             * @description Revision that is dialled in
+             */
+            revisionId: string;
+            /**
+             * Format: uuid
+             * @description Lens that is fitted
+             */
+            lensFittedId: string;
+            /** @description What is done: “set-up.<place>” and “setting.<step>.<parameter>” */
+            ticks: string[];
+            /**
+             * @description Job, as the shop calls it
+             * @default
+             */
+            jobReference: string;
+            /**
+             * @description Part
+             * @default
+             */
+            part: string;
+            /**
+             * @description Lot of the material
+             * @default
+             */
+            lot: string;
+            /**
+             * Format: uuid
+             * @description Deviation that the run cites
+             */
+            deviationId?: string;
+        };
+        RunMeasurementDto: {
+            /** @description Number of the piece from 1 */
+            piece: number;
+            /** @description What was measured */
+            quantity: string;
+            /** @description Value */
+            value: number;
+            /** @description Unit; 1: a pure number */
+            unit: string;
+            /** @description How */
+            method: string;
+            /** @description Meets the acceptance criterion; null: none was recorded for it */
+            meets: boolean | null;
+        };
+        RunDeviationDto: {
+            /**
+             * Format: uuid
+             * @description Id of the deviation
+             */
+            id: string;
+            /** @description What may differ */
+            description: string;
+        };
+        RunDto: {
+            /**
+             * Format: uuid
+             * @description Id of the run
+             */
+            id: string;
+            /** @description Code that people read, such as J-0007 */
+            code: string;
+            /** @description Kind of run */
+            kind: components["schemas"]["RunKind"];
+            /**
+             * @description Where it stands
+             * @enum {string}
+             */
+            state: "started" | "finished" | "abandoned";
+            /** @description Recipe */
+            recipe: components["schemas"]["RunRecipeDto"];
+            /** @description Revision that was dialled in */
+            revision: components["schemas"]["RunRevisionDto"];
+            /** @description Machine */
+            machine: components["schemas"]["NamedDto"];
+            /** @description Material */
+            material: components["schemas"]["NamedDto"];
+            /** @description Job, as the shop calls it; may be empty */
+            jobReference: string;
+            /** @description Part; may be empty */
+            part: string;
+            /** @description Lot of the material; may be empty */
+            lot: string;
+            /** @description Good parts */
+            good: number;
+            /** @description Scrapped parts */
+            scrap: number;
+            /** @description First piece; null: not looked at yet */
+            firstPiece: components["schemas"]["FirstPieceDto"] | null;
+            /** @description Bad result that was told; null: none */
+            badResult: components["schemas"]["BadResultDto"] | null;
+            /** @description Who started it */
+            startedBy: components["schemas"]["NamedDto"];
+            /**
+             * Format: date-time
+             * @description When it was started
+             */
+            startedAt: string;
+            /**
+             * Format: date-time
+             * @description When it was finished
+             */
+            finishedAt: string | null;
+            /** @description Finish */
+            finish: components["schemas"]["NamedDto"];
+            /** @description Effect */
+            effect: components["schemas"]["NamedDto"];
+            /** @description Lens that was fitted */
+            lensFitted: components["schemas"]["NamedDto"] | null;
+            /** @description Open holds; they come before everything else */
+            holds: components["schemas"]["RunHoldDto"][];
+            /** @description The fields of the machine’s control, in its order */
+            panel: components["schemas"]["PanelDto"];
+            /** @description Mark steps as dialled in */
+            steps: components["schemas"]["MarkStepDto"][];
+            /** @description Set-up steps */
+            setUpSteps: components["schemas"]["SetUpStepDto"][];
+            /** @description When each thing was ticked, by “set-up.<place>” and “setting.<step>.<parameter>” */
+            ticks: {
+                [key: string]: string;
+            };
+            /** @description Measurements by piece */
+            measurements: components["schemas"]["RunMeasurementDto"][];
+            /** @description Deviation that it cites */
+            deviation: components["schemas"]["RunDeviationDto"] | null;
+            /** @description Notes; may be empty */
+            notes: string;
+            /** @description SHA-256 of the content that was dialled in */
+            contentHash: string;
+            /** @description Number of the stored version; the ETag is "v" and this number */
+            version: number;
+            /** @description What the caller may do: tick, first-piece, finish, bad-result */
+            allowedActions: string[];
+        };
+        TickRunDto: {
+            /** @description What is done now */
+            tick: string[];
+            /** @description What was ticked and is not done */
+            untick: string[];
+        };
+        FirstPieceActDto: {
+            /** @description true: it matches the mark to match, the batch is released */
+            ok: boolean;
+            /**
+             * @description Remark
+             * @default
+             */
+            note: string;
+            /**
+             * Format: uuid
+             * @description Photo of it
+             */
+            photoId?: string;
+        };
+        MeasurePieceDto: {
+            /** @description Number of the piece from 1 */
+            piece: number;
+            /** @description What was measured */
+            quantity: components["schemas"]["MeasurementQuantity"];
+            /** @description Value in the quantity’s own unit */
+            value: number;
+            /** @description How */
+            method: components["schemas"]["MeasurementMethod"];
+        };
+        FinishRunDto: {
+            /** @description Good parts */
+            good: number;
+            /** @description Scrapped parts */
+            scrap: number;
+            /** @description Measurements by piece */
+            measurements?: components["schemas"]["MeasurePieceDto"][];
+            /**
+             * @description Notes
+             * @default
+             */
+            notes: string;
+        };
+        /**
+         * @description What went wrong
+         * @enum {string}
+         */
+        BadOutcome: "no-mark" | "faint" | "uneven" | "banded" | "wrong-colour" | "overburnt" | "charred" | "burr" | "halo" | "melted" | "cracked" | "warped" | "peeled";
+        TellBadResultDto: {
+            /** @description What went wrong */
+            outcome: components["schemas"]["BadOutcome"];
+            /**
+             * @description Remark
+             * @default
+             */
+            note: string;
+        };
+        HoldDto: {
+            /**
+             * Format: uuid
+             * @description Id of the hold
+             */
+            id: string;
+            /**
+             * @description What is held
+             * @enum {string}
+             */
+            subject: "recipe" | "machine";
+            /**
+             * Format: uuid
+             * @description Id of what is held
+             */
+            subjectId: string;
+            /** @description What is held, as people call it */
+            subjectName: string;
+            /** @description Why */
+            reason: string;
+            /** @description Who placed it */
+            placedBy: string;
+            /**
+             * Format: date-time
+             * @description Since when
+             */
+            placedAt: string;
+            /** @description Who released it; null: it is on */
+            releasedBy: string | null;
+            /**
+             * Format: date-time
+             * @description When it was released
+             */
+            releasedAt: string | null;
+            /** @description Why it was released */
+            releaseReason: string | null;
+            /** @description Number of the stored version; the ETag is "v" and this number */
+            version: number;
+            /** @description What the caller may do: release */
+            allowedActions: string[];
+        };
+        HoldPageDto: {
+            /** @description The items of this page, in order */
+            items: components["schemas"]["HoldDto"][];
+            /** @description Send as cursor for the next page; null at the end */
+            nextCursor: string | null;
+        };
+        PlaceHoldDto: {
+            /**
+             * Format: uuid
+             * @description Recipe to hold; give this or machineId
+             */
+            recipeId?: string;
+            /**
+             * Format: uuid
+             * @description Machine to hold; give this or recipeId
+             */
+            machineId?: string;
+            /** @description Why; it is shown before everything else */
+            reason: string;
+            /** @description Own password; without it the session stands for the person */
+            password?: string;
+        };
+        ReleaseHoldDto: {
+            /** @description Why it may be used again */
+            reason: string;
+            /** @description Own password; without it the session stands for the person */
+            password?: string;
+        };
+        SettingRequestDto: {
+            /**
+             * Format: uuid
+             * @description Id of the request
+             */
+            id: string;
+            /**
+             * @description Where it stands
+             * @enum {string}
+             */
+            state: "open" | "answered" | "closed";
+            /** @description Machine; null: any */
+            machine: components["schemas"]["NamedDto"] | null;
+            /** @description Lens; null: any */
+            lens: components["schemas"]["NamedDto"] | null;
+            /** @description Material */
+            material: components["schemas"]["NamedDto"] | null;
+            /** @description Finish; null: any */
+            finish: components["schemas"]["NamedDto"] | null;
+            /** @description Effect; null: any */
+            effect: components["schemas"]["NamedDto"] | null;
+            /** @description Job that it is for; may be empty */
+            jobReference: string;
+            /**
+             * Format: date
+             * @description Day when it is needed; null: not said
+             */
+            neededOn: string | null;
+            /** @description Remark; may be empty */
+            note: string;
+            /** @description Who asks */
+            askedBy: string;
+            /**
+             * Format: date-time
+             * @description When
+             */
+            askedAt: string;
+            /** @description What became of it; null: open */
+            answer: string | null;
+            /** @description Who answered */
+            answeredBy: string | null;
+            /**
+             * Format: date-time
+             * @description When it was answered
+             */
+            answeredAt: string | null;
+            /** @description Number of the stored version; the ETag is "v" and this number */
+            version: number;
+            /** @description What the caller may do: answer */
+            allowedActions: string[];
+        };
+        SettingRequestPageDto: {
+            /** @description The items of this page, in order */
+            items: components["schemas"]["SettingRequestDto"][];
+            /** @description Send as cursor for the next page; null at the end */
+            nextCursor: string | null;
+        };
+        AskForSettingDto: {
+            /**
+             * Format: uuid
+             * @description Machine
+             */
+            machineId?: string;
+            /**
+             * Format: uuid
+             * @description Lens
+             */
+            lensId?: string;
+            /**
+             * Format: uuid
+             * @description Material
+             */
+            materialId: string;
+            /**
+             * Format: uuid
+             * @description Finish
+             */
+            finishId?: string;
+            /**
+             * Format: uuid
+             * @description Effect
+             */
+            effectId?: string;
+            /**
+             * @description Job that it is for
+             * @default
+             */
+            jobReference: string;
+            /**
+             * Format: date
+             * @description Day when it is needed
+             */
+            neededOn?: string;
+            /**
+             * @description Remark
+             * @default
+             */
+            note: string;
+        };
+        AnswerRequestDto: {
+            /** @description What became of it */
+            answer: string;
+            /**
+             * @description answered: there is a setting; closed: there will be none
+             * @enum {string}
+             */
+            state: "answered" | "closed";
+        };
+        DeviationPageDto: {
+            /** @description The items of this page, in order */
+            items: components["schemas"]["DeviationDto"][];
+            /** @description Send as cursor for the next page; null at the end */
+            nextCursor: string | null;
+        };
+        GrantDeviationDto: {
+            /**
+             * Format: uuid
+             * @description Approved revision that may be departed from
+             */
+            revisionId: string;
+            /** @description What may differ */
+            description: string;
+            /** @description Why */
+            reason: string;
+            /**
+             * Format: date-time
+             * @description Ends by itself at this time
+             */
+            endsAt?: string;
+            /** @description Ends by itself after so many parts, good and scrapped */
+            maximumQuantity?: number;
+        };
+        SlotOptionDto: {
+            /**
+             * Format: uuid
+             * @description Id
+             */
+            id: string;
+            /** @description Name in the shop */
+            name: string;
+            /** @description A second word, such as the kind of source; may be empty */
+            detail: string;
+            /** @description Approved recipes with the other slots held */
+            count: number;
+            /** @description Why there are none; null where there are some */
+            reason: string | null;
+        };
+        SlotDto: {
+            /**
+             * Format: uuid
+             * @description What was chosen
+             */
+            chosenId: string | null;
+            /**
+             * Format: uuid
+             * @description What every recipe that is left has; null: they differ
+             */
+            settledId: string | null;
+            /** @description Options that lead to an approved recipe */
+            fitCount: number;
+            /** @description Those that fit first, by name */
+            options: components["schemas"]["SlotOptionDto"][];
+        };
+        SlotsDto: {
+            /** @description Machine */
+            machine: components["schemas"]["SlotDto"];
+            /** @description Lens */
+            lens: components["schemas"]["SlotDto"];
+            /** @description Material */
+            material: components["schemas"]["SlotDto"];
+            /** @description Finish */
+            finish: components["schemas"]["SlotDto"];
+            /** @description Effect */
+            effect: components["schemas"]["SlotDto"];
+        };
+        FinderRecipeDto: {
+            /** @description Machine */
+            machine: components["schemas"]["NamedDto"];
+            /** @description Lens */
+            lens: components["schemas"]["NamedDto"];
+            /** @description Material */
+            material: components["schemas"]["NamedDto"];
+            /** @description Finish */
+            finish: components["schemas"]["NamedDto"];
+            /** @description Effect */
+            effect: components["schemas"]["NamedDto"];
+            /**
+             * Format: uuid
+             * @description Id of the recipe
+             */
+            recipeId: string;
+            /** @description Code of the recipe */
+            code: string;
+            /** @description Title of the recipe */
+            title: string;
+            /** @description Number of its approved revision */
+            revisionNumber: number;
+        };
+        FinderCautionDto: {
+            /**
+             * Format: uuid
+             * @description Id of the caution
+             */
+            id: string;
+            /**
+             * @description never: it must not be marked
+             * @enum {string}
+             */
+            level: "never" | "care";
+            /** @description What to do, first */
+            subject: string;
+            /** @description Why */
+            text: string;
+            /** @description Where it comes from */
+            source: string;
+        };
+        FinderHoldDto: {
+            /**
+             * Format: uuid
+             * @description Id of the hold
+             */
+            id: string;
+            /**
+             * @description What is held
+             * @enum {string}
+             */
+            subject: "recipe" | "machine";
+            /** @description Why */
+            reason: string;
+            /** @description Who placed it */
+            placedBy: string;
+            /**
+             * Format: date-time
+             * @description Since when
+             */
+            placedAt: string;
+        };
+        FocusDto: {
+            /** @description Working distance or focus reading, mm */
+            workingDistanceMm: number | null;
+            /** @description How focus is found; may be empty */
+            focusMethod: string;
+        };
+        ReferenceMeasurementDto: {
+            /** @description What was measured */
+            quantity: string;
+            /** @description Value; null: a grade only */
+            value: number | null;
+            /** @description Grade, where there is one */
+            grade: string | null;
+            /** @description Unit; 1: a pure number */
+            unit: string;
+            /** @description How; photo: an estimate under that photo’s light */
+            method: string;
+            /** @description What was asked of it, in words; null: nothing */
+            criterion: string | null;
+        };
+        CutDto: {
+            /** @description Left edge, fraction of the width */
+            x: number;
+            /** @description Top edge, fraction of the height */
+            y: number;
+            /** @description Width, fraction of the picture’s width */
+            width: number;
+            /** @description Height, fraction of the picture’s height */
+            height: number;
+        };
+        ReferencePhotoDto: {
+            /** @description Addresses for <img> */
+            urls: components["schemas"]["PhotoUrlsDto"];
+            /** @description Width of the upright picture, pixels */
+            widthPx: number;
+            /** @description Height of the upright picture, pixels */
+            heightPx: number;
+            /** @description The cell with a rim of bare ground; null: the corners are not set */
+            cell: components["schemas"]["CutDto"] | null;
+            /** @description The cell alone, to ring it on the plate */
+            ring: components["schemas"]["CutDto"] | null;
+            /** @description The whole plate */
+            plate: components["schemas"]["CutDto"] | null;
+            /**
+             * Format: date-time
+             * @description When it was taken; when it was sent, where the camera did not say
+             */
+            takenAt: string;
+        };
+        ReferenceCellDto: {
+            /** @description Code of the coupon */
+            couponCode: string;
+            /** @description Address of the cell */
+            address: string;
+            /** @description Row of the cell from 0 */
+            rowIndex: number;
+            /** @description Column of the cell from 0 */
+            columnIndex: number;
+            /** @description Rows of the plate */
+            rows: number;
+            /** @description Columns of the plate */
+            columns: number;
+            /** @description Lot of the material; may be empty */
+            lot: string;
+            /** @description Measurements that hold */
+            measurements: components["schemas"]["ReferenceMeasurementDto"][];
+            /** @description Photo of the plate; null: none is ready */
+            photo: components["schemas"]["ReferencePhotoDto"] | null;
+        };
+        FinderSignatureDto: {
+            /** @description Name as printed when signing */
+            printedName: string;
+            /**
+             * Format: date-time
+             * @description When, by the server’s clock
+             */
+            signedAt: string;
+            /** @description true: signed by its author, which the shop’s policy allowed */
+            isByAuthor: boolean;
+        };
+        FinderAnswerDto: {
+            /** @description Machine */
+            machine: components["schemas"]["NamedDto"];
+            /** @description Lens */
+            lens: components["schemas"]["NamedDto"];
+            /** @description Material */
+            material: components["schemas"]["NamedDto"];
+            /** @description Finish */
+            finish: components["schemas"]["NamedDto"];
+            /** @description Effect */
+            effect: components["schemas"]["NamedDto"];
+            /**
+             * Format: uuid
+             * @description Id of the recipe
+             */
+            recipeId: string;
+            /** @description Code of the recipe */
+            code: string;
+            /** @description Title of the recipe */
+            title: string;
+            /** @description Number of its approved revision */
+            revisionNumber: number;
+            /**
+             * Format: uuid
+             * @description Id of the approved revision
+             */
+            revisionId: string;
+            /** @description Open holds; they come before everything else */
+            holds: components["schemas"]["FinderHoldDto"][];
+            /** @description The fields of the machine’s control, in its order */
+            panel: components["schemas"]["PanelDto"];
+            /** @description Version of the machine’s profile that it was proved on */
+            profileNumber: number;
+            /** @description false: the machine’s source or optics were changed after it was proved */
+            isProfilePresent: boolean;
+            /** @description Mark steps in their order */
+            steps: components["schemas"]["MarkStepDto"][];
+            /** @description Set-up steps in their order */
+            setUpSteps: components["schemas"]["SetUpStepDto"][];
+            /** @description Limits of use */
+            limits: components["schemas"]["LimitsOfUseDto"];
+            /** @description What it covers */
+            scope: components["schemas"]["RecipeScopeDto"];
+            /** @description How this lens is focused on this machine */
+            focus: components["schemas"]["FocusDto"] | null;
+            /** @description The mark to match; null: it rests on no cell */
+            reference: components["schemas"]["ReferenceCellDto"] | null;
+            /** @description How the setting was come by */
+            route: components["schemas"]["RouteKind"];
+            /** @description Who approved it */
+            signature: components["schemas"]["FinderSignatureDto"] | null;
+            /**
+             * Format: date-time
+             * @description Until when it holds; null: not limited
+             */
+            holdsUntil: string | null;
+            /** @description true: the day of its review is past */
+            isOverdue: boolean;
+            /** @description SHA-256 of the signed content */
+            contentHash: string;
+            /** @description Why no run can be started; empty: it can */
+            blockedBecause: string[];
+            /** @description What the caller may do: start-run, place-hold, release-hold, grant-deviation */
+            allowedActions: string[];
+        };
+        WithdrawnRecipeDto: {
+            /** @description Machine */
+            machine: components["schemas"]["NamedDto"];
+            /** @description Lens */
+            lens: components["schemas"]["NamedDto"];
+            /** @description Material */
+            material: components["schemas"]["NamedDto"];
+            /** @description Finish */
+            finish: components["schemas"]["NamedDto"];
+            /** @description Effect */
+            effect: components["schemas"]["NamedDto"];
+            /**
+             * Format: uuid
+             * @description Id of the recipe
+             */
+            recipeId: string;
+            /** @description Code of the recipe */
+            code: string;
+            /** @description Title of the recipe */
+            title: string;
+            /** @description Number of its approved revision */
+            revisionNumber: number;
+            /** @description Who withdrew it */
+            by: string | null;
+            /**
+             * Format: date-time
+             * @description When
+             */
+            at: string | null;
+            /** @description Why; may be empty */
+            reason: string;
+        };
+        DifferenceDto: {
+            /**
+             * @description Slot that differs
+             * @enum {string}
+             */
+            slot: "machine" | "lens" | "material" | "finish" | "effect";
+            /** @description What the recipe has */
+            has: string;
+            /** @description What was asked for */
+            wanted: string;
+        };
+        NearMissDto: {
+            /** @description Machine */
+            machine: components["schemas"]["NamedDto"];
+            /** @description Lens */
+            lens: components["schemas"]["NamedDto"];
+            /** @description Material */
+            material: components["schemas"]["NamedDto"];
+            /** @description Finish */
+            finish: components["schemas"]["NamedDto"];
+            /** @description Effect */
+            effect: components["schemas"]["NamedDto"];
+            /**
+             * Format: uuid
+             * @description Id of the recipe
+             */
+            recipeId: string;
+            /** @description Code of the recipe */
+            code: string;
+            /** @description Title of the recipe */
+            title: string;
+            /** @description Number of its approved revision */
+            revisionNumber: number;
+            /** @description What differs; everything else is the same */
+            differs: components["schemas"]["DifferenceDto"][];
+            /** @description Why it can’t be carried over as it stands, in words */
+            whyNot: string;
+            /** @description Plate and cell that stand for it */
+            reference: components["schemas"]["ReferenceCellDto"] | null;
+        };
+        FinderDto: {
+            /** @description The slots of the sentence with their options */
+            slots: components["schemas"]["SlotsDto"];
+            /** @description Approved recipes that fit */
+            matchCount: number;
+            /** @description The first of them, by code */
+            matches: components["schemas"]["FinderRecipeDto"][];
+            /** @description Cautions of the chosen or answered work, never first */
+            cautions: components["schemas"]["FinderCautionDto"][];
+            /** @description true: a caution says never */
+            isForbidden: boolean;
+            /** @description The one approved setting; null: none, several, or forbidden */
+            answer: components["schemas"]["FinderAnswerDto"] | null;
+            /** @description Recipes for exactly this that were withdrawn and have no approved revision */
+            withdrawn: components["schemas"]["WithdrawnRecipeDto"][];
+            /** @description Where nothing fits: what comes nearest */
+            nearMisses: components["schemas"]["NearMissDto"][];
+        };
+        FoundDto: {
+            /**
+             * @description Kind of record
+             * @enum {string}
+             */
+            kind: "recipe" | "coupon" | "material" | "machine";
+            /**
+             * Format: uuid
+             * @description Id of the record
+             */
+            id: string;
+            /** @description Code; empty where there is none */
+            code: string;
+            /** @description Name or title */
+            name: string;
+        };
+        FoundListDto: {
+            /** @description What was found, best first */
+            items: components["schemas"]["FoundDto"][];
         };
         FieldProblemDto: {
             /** @description JSON pointer of the field, such as #/steps/0/passes */
@@ -9321,6 +10545,729 @@ export interface operations {
                     [name: string]: unknown;
                 };
                 content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    RunsController_list: {
+        parameters: {
+            query?: {
+                /** @description How many items at most */
+                limit?: number;
+                /** @description nextCursor of the page before; opaque */
+                cursor?: string;
+                /** @description Only runs of exactly this job */
+                jobReference?: string;
+                /** @description Only this recipe */
+                recipeId?: string;
+                /** @description Only this machine */
+                machineId?: string;
+                /** @description Only this kind */
+                kind?: components["schemas"]["RunKind"];
+                /** @description Only runs in this state */
+                state?: "started" | "finished" | "abandoned";
+                /** @description Words to find in code, job, part, lot, recipe or material */
+                q?: string;
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["RunPageDto"];
+                };
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    RunsController_start: {
+        parameters: {
+            query?: never;
+            header: {
+                /** @description 8 to 128 visible characters, new for each act and the same for each retry */
+                "Idempotency-Key": string;
+            };
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["StartRunDto"];
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["RunDto"];
+                };
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    RunsController_exportCsv: {
+        parameters: {
+            query?: {
+                /** @description How many items at most */
+                limit?: number;
+                /** @description nextCursor of the page before; opaque */
+                cursor?: string;
+                /** @description Only runs of exactly this job */
+                jobReference?: string;
+                /** @description Only this recipe */
+                recipeId?: string;
+                /** @description Only this machine */
+                machineId?: string;
+                /** @description Only this kind */
+                kind?: components["schemas"]["RunKind"];
+                /** @description Only runs in this state */
+                state?: "started" | "finished" | "abandoned";
+                /** @description Words to find in code, job, part, lot, recipe or material */
+                q?: string;
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "text/csv": string;
+                };
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    RunsController_startSheet: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                revisionId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["StartSheetDto"];
+                };
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    RunsController_get: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                run: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["RunDto"];
+                };
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    RunsController_tick: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                runId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["TickRunDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["RunDto"];
+                };
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    RunsController_firstPiece: {
+        parameters: {
+            query?: never;
+            header: {
+                /** @description 8 to 128 visible characters, new for each act and the same for each retry */
+                "Idempotency-Key": string;
+            };
+            path: {
+                runId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["FirstPieceActDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["RunDto"];
+                };
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    RunsController_finish: {
+        parameters: {
+            query?: never;
+            header: {
+                /** @description 8 to 128 visible characters, new for each act and the same for each retry */
+                "Idempotency-Key": string;
+            };
+            path: {
+                runId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["FinishRunDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["RunDto"];
+                };
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    RunsController_tellBadResult: {
+        parameters: {
+            query?: never;
+            header: {
+                /** @description 8 to 128 visible characters, new for each act and the same for each retry */
+                "Idempotency-Key": string;
+            };
+            path: {
+                runId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["TellBadResultDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["RunDto"];
+                };
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    HoldsController_list: {
+        parameters: {
+            query?: {
+                /** @description How many items at most */
+                limit?: number;
+                /** @description nextCursor of the page before; opaque */
+                cursor?: string;
+                /** @description Which ones */
+                state?: "open" | "released";
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["HoldPageDto"];
+                };
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    HoldsController_place: {
+        parameters: {
+            query?: never;
+            header: {
+                /** @description 8 to 128 visible characters, new for each act and the same for each retry */
+                "Idempotency-Key": string;
+            };
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["PlaceHoldDto"];
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["HoldDto"];
+                };
+            };
+            /** @description needs the role lead or a higher one */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    HoldsController_release: {
+        parameters: {
+            query?: never;
+            header: {
+                /** @description 8 to 128 visible characters, new for each act and the same for each retry */
+                "Idempotency-Key": string;
+            };
+            path: {
+                holdId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["ReleaseHoldDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["HoldDto"];
+                };
+            };
+            /** @description needs the role lead or a higher one */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    SettingRequestsController_list: {
+        parameters: {
+            query?: {
+                /** @description How many items at most */
+                limit?: number;
+                /** @description nextCursor of the page before; opaque */
+                cursor?: string;
+                /** @description Only requests in this state */
+                state?: "open" | "answered" | "closed";
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["SettingRequestPageDto"];
+                };
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    SettingRequestsController_ask: {
+        parameters: {
+            query?: never;
+            header: {
+                /** @description 8 to 128 visible characters, new for each act and the same for each retry */
+                "Idempotency-Key": string;
+            };
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["AskForSettingDto"];
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["SettingRequestDto"];
+                };
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    SettingRequestsController_answer: {
+        parameters: {
+            query?: never;
+            header: {
+                /** @description 8 to 128 visible characters, new for each act and the same for each retry */
+                "Idempotency-Key": string;
+            };
+            path: {
+                requestId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["AnswerRequestDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["SettingRequestDto"];
+                };
+            };
+            /** @description needs the role operator or a higher one */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    DeviationsController_list: {
+        parameters: {
+            query?: {
+                /** @description How many items at most */
+                limit?: number;
+                /** @description nextCursor of the page before; opaque */
+                cursor?: string;
+                /** @description Only of this revision */
+                revisionId?: string;
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["DeviationPageDto"];
+                };
+            };
+            /** @description needs the role operator or a higher one */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    DeviationsController_grant: {
+        parameters: {
+            query?: never;
+            header: {
+                /** @description 8 to 128 visible characters, new for each act and the same for each retry */
+                "Idempotency-Key": string;
+            };
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["GrantDeviationDto"];
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["DeviationDto"];
+                };
+            };
+            /** @description needs the role lead or a higher one */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    FinderController_find: {
+        parameters: {
+            query?: {
+                /** @description Machine */
+                machineId?: string;
+                /** @description Lens */
+                lensId?: string;
+                /** @description Material */
+                materialId?: string;
+                /** @description Finish */
+                finishId?: string;
+                /** @description Effect */
+                effectId?: string;
+                /** @description One recipe, where several are left that differ in scope only */
+                recipeId?: string;
+                /** @description Words that narrow all slots at once, such as “blk anod” */
+                words?: string;
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["FinderDto"];
+                };
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    FinderController_search: {
+        parameters: {
+            query?: {
+                /** @description Letters of a code or a name */
+                q?: string;
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["FoundListDto"];
+                };
             };
             /** @description A problem, as docs/problems.md lists them */
             default: {
