@@ -8,6 +8,7 @@ import { InvitationsService } from '../src/members/invitations.service';
 import { createTestApp, type TestApp } from './support/app';
 import { asSuperuser } from './support/database';
 import { makeMember, makeShop, type TestMember } from './support/factories';
+import { expectProblem } from './support/problem';
 import { TEST_DEVICE } from './support/sign-in';
 
 let test: TestApp;
@@ -132,6 +133,22 @@ describe('sign-in', () => {
     expect(answer.statusCode).toBe(200);
     const person = await test.unitOfWork.outsideShop((db) => test.app.get(AccountsRepository).findPerson(db, member.personId));
     expect(person?.passwordHash).toMatch(/^\$2b\$04\$/);
+  });
+});
+
+describe('in production', () => {
+  it('a password that nobody could choose opens nothing, such as that of a demo shop', async () => {
+    const secrets = { JWT_SECRET: 'a'.repeat(43), PASSWORD_PEPPER: 'b'.repeat(43), URL_SIGNING_SECRET: 'c'.repeat(43) };
+    const served = { NODE_ENV: 'production', PASSWORD_COST: '12', PUBLIC_ORIGIN: 'https://plates.example' };
+    const live = await createTestApp({ env: { ...secrets, ...served } });
+    const shop = await makeShop(live);
+    const signIn = async (password: string) => {
+      const { email } = await makeMember(live, shop, 'owner', { password });
+      return live.app.inject({ method: 'POST', url: '/api/auth/sign-in', payload: { email, password } });
+    };
+    expectProblem(await signIn('proofplate demo owner'), 401, 'wrong-credentials');
+    expect((await signIn('violet kettle on the roof')).statusCode).toBe(200);
+    await live.close();
   });
 });
 

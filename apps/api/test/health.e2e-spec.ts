@@ -1,3 +1,4 @@
+import { HealthService } from '../src/health/health.service';
 import { createTestApp, type TestApp } from './support/app';
 import { expectProblem } from './support/problem';
 
@@ -68,5 +69,36 @@ describe('a body', () => {
 
   it('beyond 256 kB is refused', async () => {
     expectProblem(await send(JSON.stringify({ email: 'x'.repeat(300_000) })), 413, 'too-large');
+  });
+});
+
+describe('a shutdown', () => {
+  it('begins with not being ready, while requests are still answered', async () => {
+    const stopping = await createTestApp();
+    stopping.app.get(HealthService).onModuleDestroy();
+    expectProblem(await stopping.app.inject({ url: '/api/health/ready' }), 503, 'try-again');
+    expect((await stopping.app.inject({ url: '/api/health/live' })).statusCode).toBe(200);
+    await stopping.close();
+  });
+});
+
+describe('a database that is away', () => {
+  let lost: TestApp;
+  beforeAll(async () => {
+    lost = await createTestApp();
+    await lost.database.drop();
+  });
+  afterAll(() => lost.close());
+
+  it('makes the api not ready', async () => {
+    expectProblem(await lost.app.inject({ url: '/api/health/ready' }), 503, 'try-again');
+  });
+
+  it('is answered with a time to wait and without details', async () => {
+    const payload = { email: 'a@example.com', password: 'violet kettle on the roof' };
+    const signIn = await lost.app.inject({ method: 'POST', url: '/api/auth/sign-in', payload });
+    expectProblem(signIn, 503, 'try-again');
+    expect(signIn.headers['retry-after']).toBe('1');
+    expect(signIn.body).not.toMatch(/database|postgres|select/i);
   });
 });

@@ -1,5 +1,6 @@
 import { randomUUID } from 'node:crypto';
 import { createTestApp, type TestApp } from './support/app';
+import { asSuperuser } from './support/database';
 import { makeStaffedShop } from './support/factories';
 import { newKey } from './support/idempotency';
 import { expectProblem, pointersOf } from './support/problem';
@@ -116,5 +117,17 @@ describe('an Idempotency-Key', () => {
     const created = answers.filter(({ statusCode }) => statusCode === 201);
     expect(new Set(created.map((answer) => answer.body)).size).toBe(1);
     for (const answer of answers.filter(({ statusCode }) => statusCode !== 201)) expectProblem(answer, 409, 'request-in-flight');
+  });
+
+  it('is forgotten after two days, when the member uses the next one', async () => {
+    const key = newKey();
+    await invite({ ...staff.owner.headers, ...key }, newInvitation());
+    await asSuperuser(
+      test,
+      (sql) => sql`update idempotency_key set created_at = now() - interval '49 hours' where key = ${key['idempotency-key']}`,
+    );
+    await invite(staff.owner.headers, newInvitation());
+    const kept = await asSuperuser(test, (sql) => sql`select key from idempotency_key where key = ${key['idempotency-key']}`);
+    expect(kept).toHaveLength(0);
   });
 });

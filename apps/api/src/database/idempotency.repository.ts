@@ -9,6 +9,10 @@ export type StoredAnswer = { readonly requestHash: string; readonly answer: unkn
 /** How long a repeat waits for the first request to finish before it is told that this one is still in flight. */
 const WAIT_FOR_FIRST_MS = 500;
 
+/** Answers are kept for two days; a retry comes within minutes. */
+const KEPT_HOURS = 48;
+const SWEPT_AT_ONCE = 50;
+
 /**
  * Stores the key, or finds the answer that an earlier transaction stored under it. A concurrent first request holds the row's place
  * until it ends; past the short lock timeout PostgreSQL raises 55P03.
@@ -17,12 +21,27 @@ export async function claimKey(tx: Tx, claim: Claim & { readonly requestHash: st
   const { lockTimeout } = await setLockTimeout(tx, `${WAIT_FOR_FIRST_MS}ms`);
   const inserted = await tx.insert(idempotencyKey).values(claim).onConflictDoNothing().returning({ key: idempotencyKey.key });
   await setLockTimeout(tx, lockTimeout);
-  if (inserted.length > 0) return undefined;
+  if (inserted.length > 0) {
+    await forgetOld(tx, claim);
+    return undefined;
+  }
   const [stored] = await tx
     .select({ requestHash: idempotencyKey.requestHash, responseBody: idempotencyKey.responseBody })
     .from(idempotencyKey)
     .where(isClaim(claim));
   return stored === undefined ? undefined : { requestHash: stored.requestHash, answer: parsed(stored.responseBody) };
+}
+
+/** Each new key takes some old ones of its member along, so that the table needs no caretaker. Never waits for another transaction. */
+async function forgetOld(tx: Tx, { shopId, memberId }: Claim): Promise<void> {
+  const isOld = sql`${idempotencyKey.createdAt} < now() - make_interval(hours => ${KEPT_HOURS}::int)`;
+  const old = tx
+    .select({ key: sql`ctid` })
+    .from(idempotencyKey)
+    .where(and(eq(idempotencyKey.shopId, shopId), eq(idempotencyKey.memberId, memberId), isOld))
+    .limit(SWEPT_AT_ONCE)
+    .for('update', { skipLocked: true });
+  await tx.delete(idempotencyKey).where(and(eq(idempotencyKey.shopId, shopId), sql`ctid in (${old})`));
 }
 
 /** Keeps the answer beside the effect, in the same transaction: as one JSON text, because jsonb would reorder its members. */

@@ -15,6 +15,7 @@ const BY_SQLSTATE: Readonly<Record<string, () => Problem>> = {
   '55P03': () => problem('try-again', undefined, RETRY_SOON),
   '57014': () => problem('took-too-long', undefined, RETRY_SOON),
   '08': () => problem('try-again', undefined, RETRY_SOON),
+  '3D': () => problem('try-again', undefined, RETRY_SOON),
   '53': () => problem('try-again', undefined, RETRY_SOON),
   '57': () => problem('try-again', undefined, RETRY_SOON),
 };

@@ -20,7 +20,7 @@ export function logSettings(env: Env): Params {
       level: env.LOG_LEVEL,
       redact: { paths: REDACTED, censor: '[hidden]' },
       quietReqLogger: true,
-      autoLogging: { ignore: (request: IncomingMessage) => request.url?.startsWith('/api/health/') === true },
+      autoLogging: { ignore: isHealthCheck },
       serializers: {
         req: (request: { id: unknown; method: string; url: string; remoteAddress?: string }) => ({
           id: request.id,
@@ -33,4 +33,9 @@ export function logSettings(env: Env): Params {
     },
     forRoutes: ['{*path}'],
   };
+}
+
+/** Health is asked for every few seconds. Nest mounts the logger, which shortens `url`; the address as it came stands beside it. */
+function isHealthCheck(request: IncomingMessage & { readonly originalUrl?: string }): boolean {
+  return (request.originalUrl ?? request.url ?? '').startsWith('/api/health/');
 }
