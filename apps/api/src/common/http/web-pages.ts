@@ -1,5 +1,5 @@
 import { existsSync, readFileSync } from 'node:fs';
-import { join } from 'node:path';
+import { join, resolve } from 'node:path';
 import fastifyStatic from '@fastify/static';
 import type { NestFastifyApplication } from '@nestjs/platform-fastify';
 import { newNonce, pagePolicy } from './security-headers';
@@ -15,7 +15,7 @@ export async function servePages(app: NestFastifyApplication, webRoot: string): 
   if (!existsSync(index)) throw new Error('WEB_ROOT holds no index.html: build the web application first');
   const page = readFileSync(index, 'utf8');
   await app.register(fastifyStatic, {
-    root: webRoot,
+    root: resolve(webRoot),
     wildcard: false,
     index: false,
     globIgnore: ['**/index.html'],
