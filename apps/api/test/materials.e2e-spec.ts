@@ -95,6 +95,7 @@ describe('GET /api/materials', () => {
     const names = async (query: string) =>
       (await get(`/api/materials?${query}`, fresh.operator.headers)).json<{ items: MaterialDto[] }>().items.map(({ name }) => name);
     expect(await names('family=brass')).toEqual(['Plate 100%', 'Plate 1000']);
+    expect(await names('family=stone&family=acrylic')).toEqual(['Slate round']);
     expect(await names('q=100%25')).toEqual(['Plate 100%']);
     expect(await names('q=northern')).toEqual(['Plate 100%']);
     expect(await names('q=slate&family=brass')).toEqual([]);

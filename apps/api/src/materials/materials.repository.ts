@@ -11,7 +11,7 @@ export type MaterialValues = Pick<
   MaterialRow,
   'name' | 'family' | 'grade' | 'standardDesignation' | 'supplier' | 'thicknessMm' | 'properties' | 'notes'
 >;
-export type MaterialFilter = { archived: boolean; family?: MaterialFamily | undefined; words?: string | undefined };
+export type MaterialFilter = { archived: boolean; families?: readonly MaterialFamily[] | undefined; words?: string | undefined };
 export type AfterName = { name: string; id: string };
 
 @Injectable()
@@ -97,11 +97,11 @@ export class MaterialsRepository {
   }
 }
 
-function matches({ archived, family, words }: MaterialFilter): SQL | undefined {
+function matches({ archived, families, words }: MaterialFilter): SQL | undefined {
   const pattern = words === undefined || words === '' ? undefined : containsPattern(words);
   return and(
     archived ? isNotNull(material.archivedAt) : isNull(material.archivedAt),
-    family === undefined ? undefined : eq(material.family, family),
+    families === undefined ? undefined : inArray(material.family, [...families]),
     pattern === undefined
       ? undefined
       : or(

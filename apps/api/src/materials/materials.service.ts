@@ -33,7 +33,7 @@ export class MaterialsService {
   async list(actor: Actor, query: ListMaterialsQuery): Promise<Page<MaterialDto>> {
     const [name, id] = decodeCursor(query.cursor, ['string', 'string']) ?? [];
     const after = name === undefined ? {} : { after: { name: String(name), id: String(id) } };
-    const filter = { archived: query.archived, family: query.family, words: query.q };
+    const filter = { archived: query.archived, families: query.family, words: query.q };
     return this.unitOfWork.read(actor, async (tx) => {
       const rows = await this.materials.list(tx, actor.shopId, filter, { limit: query.limit + 1, ...after });
       const cautions = await this.cautions.allCautions(tx, actor.shopId);

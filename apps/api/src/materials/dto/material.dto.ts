@@ -1,7 +1,7 @@
 import { ApiProperty, ApiPropertyOptional, PartialType } from '@nestjs/swagger';
 import { type CautionLevel, MATERIAL_FAMILY_KEYS, type MaterialFamily } from '@proofplate/recipe-model';
-import { Type } from 'class-transformer';
-import { IsIn, IsOptional, ValidateNested } from 'class-validator';
+import { Transform, Type } from 'class-transformer';
+import { ArrayMaxSize, IsIn, IsOptional, ValidateNested } from 'class-validator';
 import { NumberBetween } from '../../common/decorators/number-between.decorator';
 import { RequiredText, TrimmedText } from '../../common/decorators/trimmed-text.decorator';
 import { ArchivedQuery } from '../../common/pagination/archived.query';
@@ -140,10 +140,12 @@ export class MaterialDto {
 export class MaterialPageDto extends PageOf(MaterialDto) {}
 
 export class ListMaterialsQuery extends ArchivedQuery {
-  @ApiPropertyOptional({ enum: MATERIAL_FAMILY_KEYS, description: 'Only this family' })
+  @ApiPropertyOptional({ enum: MATERIAL_FAMILY_KEYS, isArray: true, description: 'Only these families; give it once for each' })
   @IsOptional()
-  @IsIn(MATERIAL_FAMILY_KEYS, { message: 'This is no family of the list.' })
-  family?: MaterialFamily;
+  @Transform(({ value }: { value: unknown }) => (Array.isArray(value) ? value : [value]))
+  @ArrayMaxSize(MATERIAL_FAMILY_KEYS.length)
+  @IsIn(MATERIAL_FAMILY_KEYS, { each: true, message: 'This is no family of the list.' })
+  family?: MaterialFamily[];
 
   @ApiPropertyOptional({ description: 'Words to find in name, grade, designation or supplier', maxLength: MAX_WORD_LENGTH })
   @IsOptional()
