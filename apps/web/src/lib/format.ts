@@ -61,6 +61,11 @@ export function formatDate(time: string | Date, timeZone: string): string {
   return `${day} ${month} ${year}`;
 }
 
+/** "14 May 2026" of a calendar day such as "2026-05-14", which belongs to no zone. */
+export function formatDay(day: string): string {
+  return formatDate(`${day}T00:00:00Z`, 'UTC');
+}
+
 /** "14 May 2026 10:12 CET": a time that somebody signed or measured at always carries its zone. */
 export function formatTime(time: string | Date, timeZone: string): string {
   const { hour, minute, timeZoneName } = parts(time, {

@@ -1,0 +1,54 @@
+import { type NumberRule, readNumber, readOptionalNumber, typedNumber } from './read-number';
+
+const distance: NumberRule = { what: 'The working distance', unit: 'mm', least: 1, most: 3000 };
+const wavelength: NumberRule = { what: 'The wavelength', unit: 'nm', least: 100, most: 20_000 };
+
+describe('readNumber', () => {
+  it.each([
+    ['176.5', 176.5],
+    ['176,5', 176.5],
+    ['176.5 mm', 176.5],
+    ['176.5MM', 176.5],
+    ['10 in', 254],
+    ['1500', 1500],
+  ])('reads %s as millimetres', (text, value) => {
+    expect(readNumber(text, distance, 'en-GB')).toEqual({ value });
+  });
+
+  it('takes the field’s own unit also where no panel shows it', () => {
+    expect(readNumber('1064 nm', wavelength, 'en-GB')).toEqual({ value: 1064 });
+    expect(readNumber('1.06 µm', wavelength, 'en-GB')).toEqual({ message: 'The wavelength is kept in nm. Enter it in that unit.' });
+  });
+
+  it('refuses what can be read in two ways, with both readings in the order of the locale', () => {
+    expect(readNumber('1,500', distance, 'en-GB')).toEqual({ message: expect.stringMatching(/1500 or 1\.5\b/) });
+    expect(readNumber('1,500', distance, 'de-DE')).toEqual({ message: expect.stringMatching(/1,5 or 1500/) });
+  });
+
+  it('names the limits, a unit of another kind and an empty field', () => {
+    expect(readNumber('0.5', distance, 'en-GB')).toEqual({ message: 'The working distance must be 1 to 3000 mm.' });
+    expect(readNumber('30 kHz', distance, 'en-GB')).toEqual({ message: 'The working distance is kept in mm. Enter it in that unit.' });
+    expect(readNumber('  ', distance, 'en-GB')).toEqual({ message: 'Enter the working distance.' });
+    expect(readNumber('12', { ...distance, what: 'M²' }, 'en-GB')).toEqual({ value: 12 });
+  });
+
+  it('wants whole numbers where the field does', () => {
+    const minutes: NumberRule = { what: 'The warm-up', unit: 'min', least: 0, most: 480, isWhole: true };
+    expect(readNumber('2.5', minutes, 'en-GB')).toEqual({ message: 'The warm-up must be a whole number from 0 to 480 min.' });
+    expect(readNumber('15 min', minutes, 'en-GB')).toEqual({ value: 15 });
+  });
+});
+
+describe('readOptionalNumber', () => {
+  it('leaves an empty field absent, never zero', () => {
+    expect(readOptionalNumber(' ', distance, 'en-GB')).toEqual({ value: undefined });
+  });
+});
+
+describe('typedNumber', () => {
+  it('keeps every digit with the decimal sign of the locale', () => {
+    expect(typedNumber(0.0005, 'de-DE')).toBe('0,0005');
+    expect(typedNumber(12345.678, 'en-GB')).toBe('12345.678');
+    expect(typedNumber(null, 'en-GB')).toBe('');
+  });
+});
