@@ -1,0 +1,32 @@
+import { type Column, DataTable } from '../../../components/data-table';
+import { TextLink } from '../../../components/text-link';
+import { formatQuantity } from '../../../lib/format';
+import { paths } from '../../../lib/paths';
+import type { Material } from '../materials.api';
+import { CautionSummary } from './caution-summary';
+
+export function MaterialTable({ materials, label }: { materials: readonly Material[]; label: string }) {
+  return <DataTable label={label} columns={COLUMNS} rows={materials} rowKey={({ id }) => id} />;
+}
+
+const COLUMNS: readonly Column<Material>[] = [
+  {
+    key: 'name',
+    header: 'Material',
+    onPhone: 'title',
+    cell: ({ id, name }) => (
+      <TextLink to={paths.material(id)} fontWeight="semibold" display="inline-block" py="2">
+        {name}
+      </TextLink>
+    ),
+  },
+  { key: 'family', header: 'Family', cell: ({ familyLabel }) => familyLabel },
+  { key: 'grade', header: 'Grade', cell: ({ grade, standardDesignation }) => [grade, standardDesignation].filter(Boolean).join(', ') },
+  {
+    key: 'thickness',
+    header: 'Thickness',
+    align: 'end',
+    cell: ({ thicknessMm }) => (thicknessMm === null ? '' : formatQuantity(thicknessMm, 'mm')),
+  },
+  { key: 'cautions', header: 'Cautions', width: '40%', cell: ({ cautions }) => <CautionSummary cautions={cautions} /> },
+];

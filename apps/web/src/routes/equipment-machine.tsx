@@ -1,0 +1,88 @@
+import { chakra } from '@chakra-ui/react';
+import { useParams } from 'react-router';
+import { Button, ButtonLink } from '../components/button';
+import { Page } from '../components/page';
+import { ReadProblem } from '../components/read-problem';
+import { SkeletonBlock } from '../components/skeletons';
+import { useArchiving } from '../components/use-archiving';
+import { useLenses } from '../features/lenses/lenses.api';
+import { Calibrations } from '../features/machines/components/calibrations';
+import { MachineFacts } from '../features/machines/components/machine-facts';
+import { MachineLenses } from '../features/machines/components/machine-lenses';
+import { PanelPreview } from '../features/machines/components/panel-preview';
+import { ProfileHistory } from '../features/machines/components/profile-history';
+import { type Machine, setMachineArchived, useMachine } from '../features/machines/machines.api';
+import { paths } from '../lib/paths';
+
+export function Component() {
+  const { machineId = '' } = useParams();
+  const { data: machine, error, mutate } = useMachine(machineId);
+  const name = machine?.name ?? 'Machine';
+  return (
+    <Page
+      title={name}
+      crumbs={[{ label: 'Equipment', to: paths.equipment }, { label: name }]}
+      meta={machine !== undefined && <Meta machine={machine} />}
+      actions={machine !== undefined && <Acts machine={machine} />}
+    >
+      {machine === undefined && error === undefined && <SkeletonBlock height="480px" label="Loading the machine" />}
+      {machine === undefined && error !== undefined && <ReadProblem problem={error} thing="this machine" onRetry={() => void mutate()} />}
+      {machine !== undefined && <Sections machine={machine} />}
+    </Page>
+  );
+}
+
+function Meta({ machine: { profile, archivedAt } }: { machine: Machine }) {
+  return (
+    <>
+      <span>Profile version {profile.number}</span>
+      {archivedAt !== null && <b>Archived: it is no choice for new work</b>}
+    </>
+  );
+}
+
+function Acts({ machine }: { machine: Machine }) {
+  const archive = useArchiving(setMachineArchived);
+  return (
+    <>
+      {machine.allowedActions.includes('archive') && (
+        <Button kind="quiet" onClick={() => void archive(machine, true)}>
+          Archive
+        </Button>
+      )}
+      {machine.allowedActions.includes('restore') && <Button onClick={() => void archive(machine, false)}>Restore</Button>}
+      {machine.allowedActions.includes('edit') && (
+        <ButtonLink kind="primary" to={paths.editMachine(machine.id)}>
+          Change
+        </ButtonLink>
+      )}
+    </>
+  );
+}
+
+function Sections({ machine }: { machine: Machine }) {
+  const { data: lenses } = useLenses();
+  return (
+    <chakra.div
+      display="grid"
+      gap="4"
+      gridTemplateColumns={{ base: 'minmax(0, 1fr)', xl: 'minmax(0, 1fr) minmax(0, 480px)' }}
+      alignItems="start"
+    >
+      <chakra.div display="grid" gap="4" minW="0">
+        <MachineLenses machine={machine} lenses={lenses?.items ?? []} />
+        <Calibrations machine={machine} />
+      </chakra.div>
+      <chakra.div display="grid" gap="4" minW="0">
+        <chakra.section aria-labelledby="panel-title">
+          <chakra.h2 id="panel-title" srOnly>
+            What the panel shows
+          </chakra.h2>
+          <PanelPreview panel={machine.profile.panel} />
+        </chakra.section>
+        <MachineFacts machine={machine} />
+        <ProfileHistory machineId={machine.id} />
+      </chakra.div>
+    </chakra.div>
+  );
+}
