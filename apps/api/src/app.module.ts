@@ -17,6 +17,7 @@ import { MembersModule } from './members/members.module';
 import { PhotosModule } from './photos/photos.module';
 import { RecipesModule } from './recipes/recipes.module';
 import { ShopsModule } from './shops/shops.module';
+import { SignOffsModule } from './sign-offs/sign-offs.module';
 
 /** Every module of the api, lowest row of the import law first. */
 @Module({})
@@ -41,6 +42,7 @@ export class AppModule {
         CouponsModule,
         CouponInspectionModule,
         RecipesModule,
+        SignOffsModule,
       ],
     };
   }

@@ -5,12 +5,13 @@ import type { Sweep } from './jobs/job-tasks';
 import { OutboxConsumer } from './mail/outbox-consumer';
 import { PhotoDeveloperService } from './photos/photo-developer.service';
 import { PhotoSweepService } from './photos/photo-sweep.service';
+import { ScheduledRevisionsService } from './recipes/scheduled-revisions.service';
 
-const MAILS_AT_ONCE = 2;
+const SWIFT_JOBS_AT_ONCE = 2;
 /** One picture at a time: decoding takes a core and much memory. */
 const PHOTOS_AT_ONCE = 1;
 
-/** Takes jobs from the queue: mail beside photos, so that a slow picture delays no mail. */
+/** Takes jobs from the queue: mail and revisions beside photos, so that a slow picture delays neither. */
 @Injectable()
 export class WorkerProcess implements BeforeApplicationShutdown {
   private runners: JobRunner[] = [];
@@ -20,13 +21,17 @@ export class WorkerProcess implements BeforeApplicationShutdown {
     private readonly outbox: OutboxConsumer,
     private readonly developer: PhotoDeveloperService,
     private readonly photoSweep: PhotoSweepService,
+    private readonly scheduledRevisions: ScheduledRevisionsService,
   ) {}
 
   async start(): Promise<void> {
     const connectionString = this.env.WORKER_DATABASE_URL;
-    const mail = { 'mail.send': this.outbox.send.bind(this.outbox) };
+    const swift = {
+      'mail.send': this.outbox.send.bind(this.outbox),
+      'revisions.take-effect': this.scheduledRevisions.takeEffect.bind(this.scheduledRevisions),
+    };
     const photos = { 'photos.develop': this.developer.develop.bind(this.developer) };
-    this.runners.push(await startJobRunner({ connectionString, concurrency: MAILS_AT_ONCE, handlers: mail, sweeps: this.sweeps() }));
+    this.runners.push(await startJobRunner({ connectionString, concurrency: SWIFT_JOBS_AT_ONCE, handlers: swift, sweeps: this.sweeps() }));
     this.runners.push(await startJobRunner({ connectionString, concurrency: PHOTOS_AT_ONCE, handlers: photos }));
   }
 

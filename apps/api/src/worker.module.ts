@@ -7,6 +7,7 @@ import { DatabaseModule } from './database/database.module';
 import { JobsModule } from './jobs/jobs.module';
 import { MailWorkerModule } from './mail/mail-worker.module';
 import { PhotosWorkerModule } from './photos/photos-worker.module';
+import { RecipesWorkerModule } from './recipes/recipes-worker.module';
 import { WorkerProcess } from './worker-process';
 
 /** What the worker process is made of: no routes, no members. */
@@ -22,6 +23,7 @@ export class WorkerModule {
         JobsModule,
         MailWorkerModule,
         PhotosWorkerModule,
+        RecipesWorkerModule,
       ],
       providers: [WorkerProcess],
     };

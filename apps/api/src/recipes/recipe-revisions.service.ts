@@ -5,7 +5,7 @@ import type { RecipeRevisionDto } from './dto/recipe-revision.dto';
 import { RecipeRevisionsRepository } from './recipe-revisions.repository';
 import { NoApprovedRevisionError, RecipeNotFoundError, RevisionNotFoundError } from './recipes.errors';
 import { RecipesRepository } from './recipes.repository';
-import { keyIdsOf, RevisionRecordsService } from './revision-records.service';
+import { keyIdsOf, type QueuedRevision, RevisionRecordsService } from './revision-records.service';
 import { ScheduledRevisionsService } from './scheduled-revisions.service';
 import type { LockedRevision, RevisionRecord, StoredRevision } from './stored-revision';
 
@@ -22,6 +22,12 @@ export class RecipeRevisionsService {
   /** Everything about a revision. @throws RevisionNotFoundError also for another shop's revision */
   async getRecord(tx: Tx, shopId: string, id: string): Promise<RevisionRecord> {
     return this.records.get(tx, shopId, id);
+  }
+
+  /** Revisions in review as the queue shows them, in the order of the ids. */
+  async listQueued(tx: Tx, actor: Actor, ids: readonly string[]): Promise<QueuedRevision[]> {
+    const records = await this.records.list(tx, actor.shopId, ids);
+    return this.records.toQueued(tx, actor, records);
   }
 
   /** The answer of every act on a revision. */

@@ -1,16 +1,28 @@
 import { Injectable } from '@nestjs/common';
+import type { CautionSubject } from '@proofplate/recipe-model';
 import type { Actor } from '../common/actor';
 import type { Tx } from '../database/unit-of-work';
+import { orderedCautionsFor } from '../materials/caution-order';
 import { CautionsService } from '../materials/cautions.service';
 import { PhotosService } from '../photos/photos.service';
 import { ShopsService } from '../shops/shops.service';
-import type { RecipeRevisionDto } from './dto/recipe-revision.dto';
-import { toRevisionDto } from './recipe-revisions.mapper';
+import type { RecipeRevisionDto, RevisionBriefDto, RevisionRecipeDto } from './dto/recipe-revision.dto';
+import { toRevisionBriefDto, toRevisionDto } from './recipe-revisions.mapper';
+import { revisionActions } from './recipe-revisions.policy';
 import { RecipeRevisionsRepository } from './recipe-revisions.repository';
 import { RevisionNotFoundError } from './recipes.errors';
 import { RevisionEvidenceRepository } from './revision-evidence.repository';
 import { hashOfRevision } from './revision-hash';
 import type { EvidenceKind, KeyIds, LinkedCell, RevisionCaution, RevisionHead, RevisionRecord } from './stored-revision';
+
+/** A revision in review as the queue shows it. */
+export type QueuedRevision = {
+  readonly recipe: RevisionRecipeDto;
+  readonly revision: RevisionBriefDto;
+  readonly isOwn: boolean;
+  readonly hasCurrent: boolean;
+  readonly allowedActions: string[];
+};
 
 /** Reads revisions whole, any number of them in the same few queries. */
 @Injectable()
@@ -71,28 +83,49 @@ export class RevisionRecordsService {
     });
   }
 
+  async toQueued(tx: Tx, actor: Actor, records: readonly RevisionRecord[]): Promise<QueuedRevision[]> {
+    const { policy } = await this.shops.getRow(tx, actor.shopId);
+    return records.map(({ revision, recipe, brief, ladder, signOffs }) => ({
+      recipe,
+      revision: toRevisionBriefDto(
+        brief,
+        signOffs.filter(({ revisionId }) => revisionId === revision.id),
+      ),
+      isOwn: revision.createdBy === actor.memberId,
+      hasCurrent: ladder.some(({ state }) => state === 'approved'),
+      allowedActions: revisionActions(actor, revision, policy.authorMaySign),
+    }));
+  }
+
   async getDto(tx: Tx, actor: Actor, id: string): Promise<RecipeRevisionDto> {
     return this.toDto(tx, actor, await this.get(tx, actor.shopId, id));
   }
 
+  /** One query for all: the shop's cautions are few, and each revision picks those that apply to it. */
   private async cautionsOf(tx: Tx, shopId: string, heads: readonly RevisionHead[]): Promise<Map<string, RevisionCaution[]>> {
-    const byRevision = new Map<string, RevisionCaution[]>();
-    for (const { revision, recipe } of heads) {
-      const { scope, limits } = revision.content;
-      const rows = await this.cautions.cautionsFor(tx, shopId, {
-        materialId: recipe.material.id,
-        finishId: recipe.finish.id,
-        effectId: recipe.effect.id,
-        sourceKind: recipe.machine.sourceKind,
-        roundPart: scope.partDiameterMm !== undefined || limits.partDiameterMm !== undefined,
-      });
-      byRevision.set(
-        revision.id,
-        rows.map(({ id, level, subject, text, source }) => ({ id, level, subject, text, source })),
-      );
-    }
-    return byRevision;
+    const all = await this.cautions.allCautions(tx, shopId);
+    return new Map(heads.map((head) => [head.revision.id, orderedCautionsFor(subjectOf(head), all).map(toRevisionCaution)]));
   }
+}
+
+const toRevisionCaution = ({ id, level, subject, text, source }: RevisionCaution): RevisionCaution => ({
+  id,
+  level,
+  subject,
+  text,
+  source,
+});
+
+function subjectOf({ revision, recipe }: RevisionHead): CautionSubject {
+  const { scope, limits } = revision.content;
+  return {
+    family: recipe.material.family,
+    materialId: recipe.material.id,
+    finishId: recipe.finish.id,
+    sourceKind: recipe.machine.sourceKind,
+    effectKey: recipe.effect.key,
+    roundPart: scope.partDiameterMm !== undefined || limits.partDiameterMm !== undefined,
+  };
 }
 
 /** The hash of the record as it stands in the database. */

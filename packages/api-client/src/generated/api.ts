@@ -1480,6 +1480,125 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/api/revisions/{revisionId}/checks": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Everything that an approval needs, with what was found; failing checks first */
+        get: operations["SignOffsController_checks"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/revisions/{revisionId}/submit": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Submit a draft for review: it gets its number and never changes again */
+        post: operations["SignOffsController_submit"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/revisions/{revisionId}/recall": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Take an own revision back out of review */
+        post: operations["SignOffsController_recall"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/revisions/{revisionId}/return": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Send a revision back to its author with a reason */
+        post: operations["SignOffsController_returnToAuthor"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/revisions/{revisionId}/approve": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Approve with the password: it becomes the setting, now or on its day */
+        post: operations["SignOffsController_approve"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/revisions/{revisionId}/withdraw": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Withdraw the approved revision with the password: the recipe has no setting then */
+        post: operations["SignOffsController_withdraw"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/sign-offs/queue": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Revisions that wait for a signature, oldest first */
+        get: operations["SignOffQueueController_list"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/api/runs": {
         parameters: {
             query?: never;
@@ -5143,6 +5262,115 @@ export interface components {
             basis: components["schemas"]["EvidenceCellDto"][];
             /** @description Cells with exactly the revision’s essential parameters */
             confirmation: components["schemas"]["EvidenceCellDto"][];
+        };
+        ApprovalCheckDto: {
+            /** @description Key of the check */
+            key: string;
+            /** @description true: it passes */
+            passes: boolean;
+            /** @description What is checked */
+            title: string;
+            /** @description What was found, and the way out where it fails */
+            detail: string;
+            /** @description true: shown, but blocks nothing */
+            isAdvisory: boolean;
+            /**
+             * @description The act that it blocks first
+             * @enum {string}
+             */
+            blocks: "submit" | "approve";
+        };
+        ConfirmationSpreadDto: {
+            /** @description What was measured */
+            quantity: string;
+            /** @description The quantity in words */
+            label: string;
+            /** @description Unit; 1: a pure number */
+            unit: string;
+            /** @description Marks with this measurement */
+            n: number;
+            /** @description Lowest value */
+            lowest: number;
+            /** @description Highest value */
+            highest: number;
+            /** @description Mean */
+            mean: number;
+        };
+        ConfirmationDto: {
+            /** @description Marks that count: later, the same setting, all criteria met */
+            markCount: number;
+            /** @description Marks that the shop’s policy asks for */
+            neededCount: number;
+            /** @description Marks that were cited or made but do not count */
+            notCountingCount: number;
+            /** @description Lots of the material that they cover; empty text: not recorded */
+            lots: string[];
+            /** @description Days on which they were made */
+            dayCount: number;
+            /** @description Measured quantities of the marks that count */
+            spreads: components["schemas"]["ConfirmationSpreadDto"][];
+        };
+        ApprovalChecksDto: {
+            /** @description Every check, failing ones first */
+            items: components["schemas"]["ApprovalCheckDto"][];
+            /** @description The confirmation in numbers */
+            confirmation: components["schemas"]["ConfirmationDto"];
+            /** @description true: nothing that blocks submitting fails */
+            maySubmit: boolean;
+            /** @description true: nothing that blocks the caller’s approval fails */
+            mayApprove: boolean;
+            /** @description SHA-256 of the content that was checked, hexadecimal */
+            contentHash: string;
+        };
+        SubmitRevisionDto: {
+            /** @description Cautions that the author acknowledges */
+            acknowledgedCautionIds: string[];
+            /** @description A word to the lead */
+            comment?: string;
+        };
+        RecallRevisionDto: {
+            /** @description Why */
+            comment?: string;
+        };
+        ReturnRevisionDto: {
+            /** @description What the author should do */
+            comment: string;
+        };
+        ApproveRevisionDto: {
+            /** @description Password of the person who signs */
+            password: string;
+            /** @description contentHash of the revision as it was shown */
+            contentHash: string;
+            /** @description Cautions that the signer acknowledges */
+            acknowledgedCautionIds: string[];
+            /** @description Comment */
+            comment?: string;
+        };
+        WithdrawRevisionDto: {
+            /** @description Password of the person who signs */
+            password: string;
+            /** @description Why it must not be used any more */
+            reason: string;
+        };
+        QueuedRevisionDto: {
+            /** @description The recipe */
+            recipe: components["schemas"]["RevisionRecipeDto"];
+            /** @description The revision in review */
+            revision: components["schemas"]["RevisionBriefDto"];
+            /** @description true: the caller wrote it */
+            isOwn: boolean;
+            /** @description true: the recipe has an approved revision that this one would supersede */
+            hasCurrent: boolean;
+            /** @description What the caller may do: approve, return, recall */
+            allowedActions: string[];
+        };
+        SignOffQueueDto: {
+            /** @description The items of this page, in order */
+            items: components["schemas"]["QueuedRevisionDto"][];
+            /** @description Send as cursor for the next page; null at the end */
+            nextCursor: string | null;
+            /** @description How many wait in all */
+            totalCount: number;
         };
         /** @enum {string} */
         RunKind: "production" | "confirmation" | "daily-check";
@@ -10537,6 +10765,305 @@ export interface operations {
                 };
                 content: {
                     "application/json": components["schemas"]["EvidenceCandidatesDto"];
+                };
+            };
+            /** @description needs the role operator or a higher one */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    SignOffsController_checks: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                revisionId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["ApprovalChecksDto"];
+                };
+            };
+            /** @description needs the role operator or a higher one */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    SignOffsController_submit: {
+        parameters: {
+            query?: never;
+            header: {
+                /** @description ETag of the version that was read, such as "v3" */
+                "If-Match": string;
+                /** @description 8 to 128 visible characters, new for each act and the same for each retry */
+                "Idempotency-Key": string;
+            };
+            path: {
+                revisionId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["SubmitRevisionDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["RecipeRevisionDto"];
+                };
+            };
+            /** @description needs the role operator or a higher one */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    SignOffsController_recall: {
+        parameters: {
+            query?: never;
+            header: {
+                /** @description 8 to 128 visible characters, new for each act and the same for each retry */
+                "Idempotency-Key": string;
+            };
+            path: {
+                revisionId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["RecallRevisionDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["RecipeRevisionDto"];
+                };
+            };
+            /** @description needs the role operator or a higher one */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    SignOffsController_returnToAuthor: {
+        parameters: {
+            query?: never;
+            header: {
+                /** @description 8 to 128 visible characters, new for each act and the same for each retry */
+                "Idempotency-Key": string;
+            };
+            path: {
+                revisionId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["ReturnRevisionDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["RecipeRevisionDto"];
+                };
+            };
+            /** @description needs the role lead or a higher one */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    SignOffsController_approve: {
+        parameters: {
+            query?: never;
+            header: {
+                /** @description 8 to 128 visible characters, new for each act and the same for each retry */
+                "Idempotency-Key": string;
+            };
+            path: {
+                revisionId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["ApproveRevisionDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["RecipeRevisionDto"];
+                };
+            };
+            /** @description needs the role lead or a higher one */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    SignOffsController_withdraw: {
+        parameters: {
+            query?: never;
+            header: {
+                /** @description 8 to 128 visible characters, new for each act and the same for each retry */
+                "Idempotency-Key": string;
+            };
+            path: {
+                revisionId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["WithdrawRevisionDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["RecipeRevisionDto"];
+                };
+            };
+            /** @description needs the role lead or a higher one */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    SignOffQueueController_list: {
+        parameters: {
+            query?: {
+                /** @description How many items at most */
+                limit?: number;
+                /** @description nextCursor of the page before; opaque */
+                cursor?: string;
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["SignOffQueueDto"];
                 };
             };
             /** @description needs the role operator or a higher one */
