@@ -20,10 +20,20 @@ export type FormProps<T extends FieldValues> = {
   onSubmit: (values: T, submit: { idempotencyKey: string }) => Promise<unknown>;
   /** Words for a refusal that no field can show; undefined falls back to the server's own words. */
   explain?: (problem: ProblemError) => { what: string; todo?: ReactNode } | undefined;
+  /** Words for a submit that got no answer, where the usual ones are too mild. */
+  unanswered?: UnansweredWords;
   children: ReactNode;
 };
 
-export function Form<T extends FieldValues>({ form, labels, onSubmit, explain, children }: FormProps<T>) {
+export type UnansweredWords = { what: string; safe: string; todo: string };
+
+const UNANSWERED: UnansweredWords = {
+  what: 'No answer came from the server.',
+  safe: 'What you typed is still here. Whether it was saved is not known.',
+  todo: 'Send it again when the connection is back: it is carried out once.',
+};
+
+export function Form<T extends FieldValues>({ form, labels, onSubmit, explain, unanswered = UNANSWERED, children }: FormProps<T>) {
   const [problem, setProblem] = useState<ProblemError>();
   const { summary, notice, focusNext } = useRefusalFocus();
   const idempotencyKey = useIdempotencyKey();
@@ -49,7 +59,7 @@ export function Form<T extends FieldValues>({ form, labels, onSubmit, explain, c
       <ErrorSummary ref={summary} entries={form.formState.isSubmitted ? summaryEntries(form.formState.errors, labels) : []} />
       {problem !== undefined && (
         <div ref={notice} tabIndex={-1}>
-          <FormProblem problem={problem} explanation={explain?.(problem)} />
+          <FormProblem problem={problem} explanation={explain?.(problem)} unanswered={unanswered} />
         </div>
       )}
       {children}
@@ -76,16 +86,14 @@ function useRefusalFocus() {
   return { summary, notice, focusNext };
 }
 
-function FormProblem({ problem, explanation }: { problem: ProblemError; explanation: { what: string; todo?: ReactNode } | undefined }) {
-  if (problem.status === 0) {
-    return (
-      <ProblemNotice
-        what="No answer came from the server."
-        safe="What you typed is still here. Whether it was saved is not known."
-        todo="Send it again when the connection is back: it is carried out once."
-      />
-    );
-  }
+type FormProblemProps = {
+  problem: ProblemError;
+  explanation: { what: string; todo?: ReactNode } | undefined;
+  unanswered: UnansweredWords;
+};
+
+function FormProblem({ problem, explanation, unanswered }: FormProblemProps) {
+  if (problem.status === 0) return <ProblemNotice {...unanswered} />;
   const { what, todo } = explanation ?? { what: `${problem.title}.`, todo: problem.detail };
   return <ProblemNotice what={what} safe="What you typed is still here." todo={todo} />;
 }

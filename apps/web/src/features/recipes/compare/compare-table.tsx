@@ -1,0 +1,212 @@
+import { chakra } from '@chakra-ui/react';
+import { Fragment } from 'react';
+import { ChangeTrack } from '../../../components/change-bar';
+import { Panel } from '../../../components/page';
+import { StateShape } from '../../../components/state-mark';
+import { formatDate } from '../../../lib/format';
+import { useSession } from '../../../lib/session';
+import type { Comparison, Revision } from '../recipes.api';
+import { revisionName } from '../revision-words';
+import { ColumnHead } from './column-head';
+import type { CellView, ComparisonView, RowView } from './comparison-view';
+
+export type CompareTableProps = {
+  comparison: Comparison;
+  view: ComparisonView;
+  onReference: (revisionId: string) => void;
+  /** Absent while only two are compared. */
+  onRemove: ((revisionId: string) => void) | undefined;
+};
+
+/** Revisions side by side from 600 px; the column that the others are compared with has a line on top and a tint. */
+export function CompareTable({ comparison, view, onReference, onRemove }: CompareTableProps) {
+  const { revisions, referenceId } = comparison;
+  const reference = revisions.find(({ id }) => id === referenceId);
+  return (
+    <Panel overflowX="auto" display={{ base: 'none', sm: 'block' }} tabIndex={0} aria-label="Comparison">
+      <chakra.table
+        width="full"
+        minW={`${220 + revisions.length * 260}px`}
+        borderCollapse="separate"
+        borderSpacing="0"
+        fontSize="sm"
+        lineHeight="sm"
+      >
+        <thead>
+          <tr>
+            <chakra.td p="5" verticalAlign="top" borderTop="3px solid transparent" minW="190px">
+              <ReferenceChoice revisions={revisions} referenceId={referenceId} onReference={onReference} />
+              <chakra.p mt="3" color="fg.muted">
+                Bars: change in percent
+              </chakra.p>
+            </chakra.td>
+            {revisions.map((revision) => (
+              <chakra.th
+                key={revision.id}
+                scope="colgroup"
+                colSpan={2}
+                textAlign="start"
+                fontWeight="normal"
+                verticalAlign="top"
+                p="3"
+                pt="4"
+                borderTop="3px solid"
+                borderColor={revision.id === referenceId ? 'brand.solid' : 'transparent'}
+                bg={revision.id === referenceId ? 'bg.subtle' : undefined}
+              >
+                <ColumnHead revision={revision} reference={reference} onRemove={onRemove} />
+              </chakra.th>
+            ))}
+          </tr>
+        </thead>
+        {view.groups.map((group) => (
+          <tbody key={group.key}>
+            <tr>
+              <GroupTitle span={1 + revisions.length * 2}>{group.title}</GroupTitle>
+            </tr>
+            {group.rows.map((row) => (
+              <Row key={row.key} row={row} />
+            ))}
+          </tbody>
+        ))}
+        <tbody>
+          <tr>
+            <GroupTitle span={1 + revisions.length * 2}>Why, and who signed</GroupTitle>
+          </tr>
+          <tr>
+            <chakra.td px="5" py="2.5" verticalAlign="top" color="fg.muted">
+              {view.hidden.length > 0 && `Equal rows hidden: ${view.hidden.join(', ')}`}
+            </chakra.td>
+            {revisions.map((revision) => (
+              <chakra.td
+                key={revision.id}
+                colSpan={2}
+                px="3"
+                py="2.5"
+                verticalAlign="top"
+                bg={revision.id === referenceId ? 'bg.subtle' : undefined}
+              >
+                <WhyAndWho revision={revision} />
+              </chakra.td>
+            ))}
+          </tr>
+        </tbody>
+      </chakra.table>
+    </Panel>
+  );
+}
+
+function GroupTitle({ span, children }: { span: number; children: string }) {
+  return (
+    <chakra.th
+      scope="rowgroup"
+      colSpan={span}
+      textAlign="start"
+      px="5"
+      pt="3.5"
+      pb="1.5"
+      fontSize="md"
+      fontWeight="semibold"
+      borderBottom="hairline"
+      borderColor="border.emphasized"
+    >
+      {children}
+    </chakra.th>
+  );
+}
+
+function Row({ row: { label, unit, cells } }: { row: RowView }) {
+  return (
+    <tr>
+      <chakra.th scope="row" textAlign="start" fontWeight="normal" height="29px" px="5" borderBottom="hairline" whiteSpace="nowrap">
+        {label} <chakra.span color="fg.muted">{unit}</chakra.span>
+      </chakra.th>
+      {cells.map((cell) => (
+        <Fragment key={cell.revisionId}>
+          <chakra.td
+            textAlign="end"
+            px="3"
+            borderBottom="hairline"
+            fontSize={cell.isMissing ? 'sm' : 'md'}
+            fontWeight={cell.isMissing ? 'normal' : 'semibold'}
+            color={cell.isMissing ? 'fg.muted' : undefined}
+            whiteSpace="nowrap"
+            bg={cell.isReference ? 'bg.subtle' : undefined}
+          >
+            {cell.text}
+          </chakra.td>
+          <chakra.td px="3" borderBottom="hairline" minW="150px" bg={cell.isReference ? 'bg.subtle' : undefined}>
+            <Change cell={cell} />
+          </chakra.td>
+        </Fragment>
+      ))}
+    </tr>
+  );
+}
+
+/** Bar and signed number; a word where there is no number. */
+export function Change({ cell: { share, change } }: { cell: CellView }) {
+  return (
+    <chakra.span display="flex" alignItems="center" gap="2">
+      {share !== undefined && (
+        <chakra.span flex="0 0 84px">
+          <ChangeTrack change={share} />
+        </chakra.span>
+      )}
+      <chakra.span color={change === 'same' ? 'fg.muted' : undefined} whiteSpace="nowrap">
+        {change}
+      </chakra.span>
+    </chakra.span>
+  );
+}
+
+type ReferenceChoiceProps = { revisions: readonly Revision[]; referenceId: string; onReference: (revisionId: string) => void };
+
+export function ReferenceChoice({ revisions, referenceId, onReference }: ReferenceChoiceProps) {
+  return (
+    <chakra.label display="block" fontWeight="semibold" fontSize="sm" lineHeight="sm">
+      Compared with
+      <chakra.select
+        display="block"
+        mt="1"
+        width="full"
+        minHeight={{ base: 'touch', lg: 'control' }}
+        px="2"
+        border="hairline"
+        borderColor="border.emphasized"
+        borderRadius="md"
+        bg="bg.panel"
+        fontWeight="normal"
+        fontSize="md"
+        value={referenceId}
+        onChange={(event) => onReference(event.currentTarget.value)}
+      >
+        {revisions.map((revision) => (
+          <option key={revision.id} value={revision.id}>
+            {revisionName(revision).toLowerCase()}
+          </option>
+        ))}
+      </chakra.select>
+    </chakra.label>
+  );
+}
+
+/** Reason, approval and, where it is not approved, that nobody has signed. */
+export function WhyAndWho({ revision: { reason, signOffs } }: { revision: Revision }) {
+  const { shop } = useSession();
+  const approval = signOffs.findLast(({ meaning }) => meaning === 'approved');
+  return (
+    <>
+      <chakra.p overflowWrap="anywhere">{reason === '' ? 'no reason written' : reason}</chakra.p>
+      <chakra.p display="flex" gap="1.5" alignItems="center" color="fg.muted">
+        {approval === undefined ? (
+          'not signed yet'
+        ) : (
+          <>
+            <StateShape state="approved" /> {approval.printedName}, {formatDate(approval.signedAt, shop.timeZone)}
+          </>
+        )}
+      </chakra.p>
+    </>
+  );
+}

@@ -1,0 +1,76 @@
+import { chakra } from '@chakra-ui/react';
+import type { ReactNode } from 'react';
+import { CautionList } from '../../../components/caution-list';
+import { Panel } from '../../../components/page';
+import type { Revision } from '../recipes.api';
+import { stepTitle } from '../setting-rows';
+import { DerivedNumbers } from './derived-numbers';
+import { EvidencePlates } from './evidence-plates';
+import { RevisionFacts, SetUpSteps } from './revision-facts';
+import { SettingCards } from './setting-cards';
+import { Signatures } from './signatures';
+
+/** A revision as it stands: cautions, setting, evidence, signatures. `children` come first in the second column. */
+export function RevisionBody({ revision, children }: { revision: Revision; children?: ReactNode }) {
+  return (
+    <>
+      <RevisionCautions revision={revision} />
+      <chakra.div
+        display="grid"
+        gridTemplateColumns={{ base: 'minmax(0, 1fr)', xl: 'minmax(0, 600px) minmax(0, 1fr)' }}
+        gap={{ base: '4', lg: '6' }}
+        alignItems="start"
+      >
+        <chakra.div display="grid" gap="4">
+          <SettingCards revision={revision} />
+          <Section title="Set-up">
+            <SetUpSteps steps={revision.setUpSteps} />
+          </Section>
+          <Section title="What follows from it">
+            {revision.derived.map(({ numbers }, index) => {
+              const step = revision.steps[index];
+              if (step === undefined) return null;
+              const title = stepTitle(step, index, revision.steps.length);
+              return (
+                <chakra.div key={title} mt={index === 0 ? '0' : '3'}>
+                  {revision.steps.length > 1 && <h3>{title}</h3>}
+                  <DerivedNumbers numbers={numbers} label={title} />
+                </chakra.div>
+              );
+            })}
+          </Section>
+        </chakra.div>
+        <chakra.div display="grid" gap="4">
+          {children}
+          <Section title="Evidence">
+            <EvidencePlates evidence={revision.evidence} />
+          </Section>
+          <Section title="Signatures">
+            <Signatures signOffs={revision.signOffs} />
+          </Section>
+          <Section title="Covers and comes from">
+            <RevisionFacts revision={revision} />
+          </Section>
+        </chakra.div>
+      </chakra.div>
+    </>
+  );
+}
+
+export function RevisionCautions({ revision: { cautions } }: { revision: Revision }) {
+  if (cautions.length === 0) return null;
+  return (
+    <chakra.div mb="4">
+      <CautionList cautions={cautions.map(({ id, subject, text, source }) => ({ key: id, act: subject, reason: text, source }))} />
+    </chakra.div>
+  );
+}
+
+export function Section({ title, children }: { title: string; children: ReactNode }) {
+  return (
+    <Panel px="5" py="4" aria-label={title}>
+      <chakra.h2 mb="2">{title}</chakra.h2>
+      {children}
+    </Panel>
+  );
+}

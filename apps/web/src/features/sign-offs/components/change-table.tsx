@@ -1,0 +1,94 @@
+import { chakra } from '@chakra-ui/react';
+import { ChangeTrack } from '../../../components/change-bar';
+import { Panel } from '../../../components/page';
+import type { Comparison } from '../sign-offs.api';
+import { type ChangeLine, whatChanges } from '../what-changes';
+
+/** What changes in percent of the current setting, on one scale; what stays the same is named under it. */
+export function ChangeTable({ comparison, before, after }: { comparison: Comparison; before: string; after: string }) {
+  const { lines, same } = whatChanges(comparison);
+  return (
+    <Panel px="1.5" pt="1.5" overflowX="auto">
+      <chakra.table width="full" borderCollapse="separate" borderSpacing="0" fontSize="sm" lineHeight="sm">
+        <thead>
+          <tr>
+            <Head>What changes</Head>
+            <Head isEnd>{before}</Head>
+            <Head isEnd>{after}</Head>
+            <Head>
+              <chakra.span srOnly>Unit</chakra.span>
+            </Head>
+            <Head isEnd>Change</Head>
+            <Head isWide>
+              <chakra.span srOnly>Size and remark</chakra.span>
+            </Head>
+          </tr>
+        </thead>
+        <tbody>
+          {lines.map((line) => (
+            <Line key={line.key} line={line} />
+          ))}
+        </tbody>
+      </chakra.table>
+      <chakra.p px="2.5" py="2" fontSize="sm" lineHeight="sm" color="fg.muted">
+        {lines.length === 0 && 'No parameter changes. '}
+        {same.length > 0 && `The same in both: ${same.join(', ')}`}
+      </chakra.p>
+    </Panel>
+  );
+}
+
+const cell = { height: '33px', px: '2.5', borderBottom: 'hairline', whiteSpace: 'nowrap' } as const;
+
+function Head({ children, isEnd = false, isWide = false }: { children: React.ReactNode; isEnd?: boolean; isWide?: boolean }) {
+  return (
+    <chakra.th
+      scope="col"
+      textAlign={isEnd ? 'end' : 'start'}
+      width={isWide ? '45%' : undefined}
+      px="2.5"
+      py="2"
+      color="fg.muted"
+      fontWeight="semibold"
+      whiteSpace="nowrap"
+      borderBottom="hairline"
+      borderColor="border.emphasized"
+    >
+      {children}
+    </chakra.th>
+  );
+}
+
+function Line({ line: { label, before, after, unit, share, change, note, isLit } }: { line: ChangeLine }) {
+  return (
+    <chakra.tr bg={isLit ? 'straw.subtle' : undefined}>
+      <chakra.th scope="row" {...cell} textAlign="start" fontWeight="normal">
+        {label}
+      </chakra.th>
+      <chakra.td {...cell} textAlign="end">
+        {before}
+      </chakra.td>
+      <chakra.td {...cell} textAlign="end" fontWeight="semibold">
+        {after}
+      </chakra.td>
+      <chakra.td {...cell} pl="0" color="fg.muted">
+        {unit}
+      </chakra.td>
+      <chakra.td {...cell} textAlign="end" fontWeight="semibold">
+        {change}
+      </chakra.td>
+      <chakra.td {...cell} whiteSpace="normal">
+        <chakra.span display="flex" alignItems="center" gap="2.5">
+          {share !== undefined && (
+            <chakra.span flex="0 0 150px">
+              <ChangeTrack change={share} />
+            </chakra.span>
+          )}
+          <chakra.span color={isLit ? 'straw.fg' : 'fg.muted'} fontWeight={isLit ? 'semibold' : undefined}>
+            {isLit ? 'takes longer' : note}
+          </chakra.span>
+        </chakra.span>
+      </chakra.td>
+    </chakra.tr>
+  );
+}

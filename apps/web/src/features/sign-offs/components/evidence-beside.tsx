@@ -1,0 +1,166 @@
+import { chakra, Flex } from '@chakra-ui/react';
+import { couponLayout } from '@proofplate/imaging';
+import type { ReactNode } from 'react';
+import { FactList } from '../../../components/fact-list';
+import { Panel } from '../../../components/page';
+import { CellCloseUp, EvidencePlate } from '../../../components/plate/evidence-plate';
+import { platePhotoOf } from '../../../components/plate/plate-photo';
+import { ProofMarks, shapeOf } from '../../../components/plate/proof-marks';
+import { StateMark } from '../../../components/state-mark';
+import { Swatch } from '../../../components/swatch';
+import { TextLink } from '../../../components/text-link';
+import { colourDifference, cssColour, labOf, measured } from '../../../lib/colour-difference';
+import { formatNumber } from '../../../lib/format';
+import { decimalsOf, symbolOf } from '../../../lib/measurement-words';
+import { paths } from '../../../lib/paths';
+import { useSession } from '../../../lib/session';
+import type { EvidenceCell, Revision } from '../sign-offs.api';
+
+export type EvidenceBesideProps = { current: Revision | undefined; proposed: Revision };
+
+/** Evidence comes first: both plates in one scale, both cells, how they differ, and the marks that proved it again. */
+export function EvidenceBeside({ current, proposed }: EvidenceBesideProps) {
+  const { shop } = useSession();
+  const cells = [current?.evidence.basis[0], proposed.evidence.basis[0]] as const;
+  const widestMm = Math.max(0, ...cells.map((cell) => (cell === undefined ? 0 : plateWidthMm(cell))));
+  const { confirmation, runs } = proposed.evidence;
+  return (
+    <Panel aria-label="Evidence">
+      <chakra.div
+        display="grid"
+        gridTemplateColumns={{ base: 'minmax(0, 1fr)', sm: current === undefined ? 'minmax(0, 1fr)' : 'repeat(2, minmax(0, 1fr))' }}
+      >
+        {current !== undefined && (
+          <Side title={`Current, revision ${current.number}`} mark={<StateMark state="approved" />} cell={cells[0]} widestMm={widestMm} />
+        )}
+        <Side
+          title={`Proposed, revision ${proposed.number}`}
+          mark={<StateMark state="inReview" />}
+          cell={cells[1]}
+          widestMm={widestMm}
+          hasRule={current !== undefined}
+        />
+      </chakra.div>
+      {current !== undefined && <Difference current={current} proposed={proposed} />}
+      <Strip>
+        {confirmation.length > 0 ? (
+          <ProofMarks cells={confirmation} timeZone={shop.timeZone} />
+        ) : (
+          runs.length === 0 && <chakra.span color="fg.muted">Nothing has proved it again yet.</chakra.span>
+        )}
+        {runs.map(({ runId, code, pieceCount, meetingCount }) => (
+          <p key={runId}>
+            <b>Proved again on </b>
+            <TextLink to={paths.run(code)}>{code}</TextLink>: {meetingCount} of {pieceCount} pieces within the criteria
+          </p>
+        ))}
+      </Strip>
+    </Panel>
+  );
+}
+
+type SideProps = { title: string; mark: ReactNode; cell: EvidenceCell | undefined; widestMm: number; hasRule?: boolean };
+
+function Side({ title, mark, cell, widestMm, hasRule = false }: SideProps) {
+  return (
+    <chakra.div
+      px="4"
+      py="3"
+      borderLeft={{ sm: hasRule ? 'hairline' : 'none' }}
+      borderTop={{ base: hasRule ? 'hairline' : 'none', sm: 'none' }}
+      borderColor={{ base: 'border', sm: 'border' }}
+    >
+      <Flex justify="space-between" gap="3" wrap="wrap">
+        <b>{title}</b>
+        {mark}
+      </Flex>
+      {cell === undefined ? (
+        <chakra.p mt="2" color="fg.muted">
+          It rests on no coupon.
+        </chakra.p>
+      ) : (
+        <chakra.div display="grid" gridTemplateColumns="minmax(0, 200px) minmax(0, 1fr)" gap="3.5" mt="2" alignItems="start">
+          <div>
+            <EvidencePlate shape={shapeOf(cell)} photo={platePhotoOf(cell.photo, 'large')} chosen={cell.address} widestMm={widestMm} />
+            <chakra.p fontSize="sm" lineHeight="sm" pt="1.5">
+              <TextLink color="fg.muted" to={`${paths.coupon(cell.couponCode)}?cell=${cell.address}`}>
+                {cell.couponCode}, cell {cell.address}
+              </TextLink>
+            </chakra.p>
+          </div>
+          <chakra.div maxW="148px">
+            <CellCloseUp shape={shapeOf(cell)} photo={platePhotoOf(cell.photo, 'large')} address={cell.address} />
+            <CellNumbers cell={cell} />
+          </chakra.div>
+        </chakra.div>
+      )}
+    </chakra.div>
+  );
+}
+
+const SHOWN = ['lightness', 'contrast', 'evenness', 'depth'] as const;
+
+function CellNumbers({ cell }: { cell: EvidenceCell }) {
+  const lab = labOf(cell);
+  const facts = SHOWN.flatMap((quantity) => {
+    const value = measured(cell, quantity);
+    if (value === undefined) return [];
+    const text = formatNumber(value, { decimals: decimalsOf(quantity) });
+    const label = quantity === 'lightness' ? 'L*' : quantity.charAt(0).toUpperCase() + quantity.slice(1);
+    return [
+      {
+        label: label === 'L*' ? label : `${label}, ${symbolOf(quantity)}`,
+        value:
+          quantity === 'lightness' && lab !== undefined ? (
+            <chakra.span display="inline-flex" gap="1" alignItems="center">
+              <Swatch colour={cssColour(lab)} />
+              {text}
+            </chakra.span>
+          ) : (
+            text
+          ),
+      },
+    ];
+  });
+  const rating = cell.meanRating === null ? [] : [{ label: 'Rating', value: formatNumber(Number(cell.meanRating.toFixed(1))) }];
+  return <FactList facts={[...facts, ...rating]} />;
+}
+
+/** ΔE*ab is named as such: the plain distance of 1976, larger than ΔE00 for strong colours. */
+function Difference({ current, proposed }: { current: Revision; proposed: Revision }) {
+  const difference = colourDifference(current.evidence.basis[0], proposed.evidence.basis[0]);
+  return (
+    <Strip>
+      <Flex justify="space-between" gap="3" wrap="wrap">
+        <span>
+          {difference === undefined ? (
+            <chakra.span color="fg.muted">The colour of both cells was not measured, so their difference is not known.</chakra.span>
+          ) : (
+            <>
+              {difference.deltaE !== undefined && (
+                <b>
+                  ΔE*<chakra.sub fontSize="0.75em">ab</chakra.sub> {formatNumber(difference.deltaE, { decimals: 1 })}{' '}
+                </b>
+              )}
+              between the two cells: {difference.words}
+            </>
+          )}
+        </span>
+        <TextLink to={`${paths.compareRevisions(proposed.recipe.code)}?ids=${current.id},${proposed.id}`}>Compare closely</TextLink>
+      </Flex>
+    </Strip>
+  );
+}
+
+function Strip({ children }: { children: ReactNode }) {
+  return (
+    <chakra.div borderTop="hairline" px="4" py="2.5">
+      {children}
+    </chakra.div>
+  );
+}
+
+function plateWidthMm(cell: EvidenceCell): number {
+  const { code, ...shape } = shapeOf(cell);
+  return couponLayout({ ...shape, reference: code }).plate.widthMm;
+}

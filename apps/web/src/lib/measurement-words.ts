@@ -1,0 +1,20 @@
+import { METHOD_LABELS, QUANTITIES } from '@proofplate/recipe-model';
+
+/** Symbol of a measured quantity, such as L*; the code itself where it has none. */
+export function symbolOf(quantity: string): string {
+  return Object.entries(QUANTITIES).find(([key]) => key === quantity)?.[1].symbol ?? quantity;
+}
+
+/** "by profilometer" and the like; a photo needs no word, since it is the picture beside the number. */
+export function methodWord(method: string): string {
+  return (
+    Object.entries(METHOD_LABELS)
+      .find(([key]) => key === method)?.[1]
+      .toLowerCase() ?? method
+  );
+}
+
+/** Colour numbers to a tenth, contrast to a hundredth. */
+export function decimalsOf(quantity: string): number {
+  return quantity === 'contrast' ? 2 : 1;
+}

@@ -1,0 +1,125 @@
+import { chakra } from '@chakra-ui/react';
+import { useState } from 'react';
+import { useParams } from 'react-router';
+import { Button, ButtonLink } from '../components/button';
+import { EmptyState } from '../components/empty-state';
+import { Page } from '../components/page';
+import { ReadProblem } from '../components/read-problem';
+import { SkeletonBlock } from '../components/skeletons';
+import { StateMark } from '../components/state-mark';
+import { useStatusLine } from '../components/status-line';
+import { Holds } from '../features/recipes/components/holds';
+import { RevisionBody } from '../features/recipes/components/revision-body';
+import { RevisionLadder } from '../features/recipes/components/revision-ladder';
+import { ProposeChangeButton } from '../features/recipes/forms/propose-change-button';
+import { type Recipe, useRecipe } from '../features/recipes/recipes.api';
+import { recipeMark, recipeStateWord, revisionName } from '../features/recipes/revision-words';
+import { WithdrawDialog } from '../features/sign-offs/forms/withdraw-form';
+import { paths } from '../lib/paths';
+
+const CRUMBS = [{ label: 'Recipes', to: paths.recipes }];
+
+export function Component() {
+  const { code = '' } = useParams();
+  const { data: recipe, error, mutate } = useRecipe(code);
+  if (recipe === undefined) {
+    return (
+      <Page title={code} crumbs={[...CRUMBS, { label: code }]}>
+        {error === undefined ? (
+          <SkeletonBlock height="480px" label="Loading the recipe" />
+        ) : (
+          <ReadProblem problem={error} thing="this recipe" onRetry={() => void mutate()} />
+        )}
+      </Page>
+    );
+  }
+  return <RecipePage recipe={recipe} />;
+}
+
+function RecipePage({ recipe }: { recipe: Recipe }) {
+  const { code, title, currentRevision } = recipe;
+  return (
+    <Page
+      title={code}
+      name={title}
+      crumbs={[...CRUMBS, { label: code }]}
+      meta={
+        <>
+          <StateMark state={recipeMark(recipe.state)}>{recipeStateWord(recipe.state)}</StateMark>
+          <span>
+            {recipe.material.name}, {recipe.finish.name}
+          </span>
+          <span>{recipe.effect.name}</span>
+          <span>
+            {recipe.machine.name}, {recipe.lens.name}
+          </span>
+        </>
+      }
+      actions={<RecipeActions recipe={recipe} />}
+    >
+      <Holds recipe={recipe} />
+      {currentRevision === null ? (
+        <chakra.div display="grid" gap="4">
+          <NoApproved recipe={recipe} />
+          <RevisionLadder key={recipe.id} recipe={recipe} />
+        </chakra.div>
+      ) : (
+        <RevisionBody revision={currentRevision}>
+          <RevisionLadder key={recipe.id} recipe={recipe} />
+        </RevisionBody>
+      )}
+    </Page>
+  );
+}
+
+function NoApproved({ recipe: { state, underWay, code } }: { recipe: Recipe }) {
+  const isWithdrawn = state === 'withdrawn';
+  return (
+    <EmptyState
+      kind="no-right"
+      title={isWithdrawn ? 'Withdrawn: there is no approved setting' : 'No approved setting yet'}
+      actions={
+        underWay === null ? undefined : (
+          <ButtonLink to={paths.recipeRevision(code, underWay.id)}>Open {revisionName(underWay).toLowerCase()}</ButtonLink>
+        )
+      }
+    >
+      {isWithdrawn
+        ? 'Nobody may run it. The ladder says who withdrew it and why.'
+        : 'Nobody at a machine sees it before a lead has signed a revision.'}
+    </EmptyState>
+  );
+}
+
+function RecipeActions({ recipe }: { recipe: Recipe }) {
+  const [isWithdrawing, setIsWithdrawing] = useState(false);
+  const announce = useStatusLine();
+  const { allowedActions, current, underWay, code } = recipe;
+  const draft = underWay?.state === 'draft' ? underWay : undefined;
+  return (
+    <>
+      {allowedActions.includes('withdraw') && current !== null && (
+        <Button kind="danger" onClick={() => setIsWithdrawing(true)}>
+          Withdraw revision {current.number}
+        </Button>
+      )}
+      {draft !== undefined && (
+        <ButtonLink kind="primary" to={paths.recipeRevision(code, draft.id)}>
+          Open the draft
+        </ButtonLink>
+      )}
+      {draft === undefined && allowedActions.includes('propose-change') && <ProposeChangeButton recipe={recipe} />}
+      {isWithdrawing && current !== null && (
+        <WithdrawDialog
+          revision={current}
+          recipeCode={code}
+          onClose={() => setIsWithdrawing(false)}
+          onWithdrawn={() => {
+            setIsWithdrawing(false);
+            announce(`Revision ${current.number} is withdrawn. ${code} has no approved setting now.`);
+          }}
+        />
+      )}
+    </>
+  );
+}
