@@ -62,6 +62,14 @@ export class MembersRepository {
       .limit(limit);
   }
 
+  async listActive(tx: Tx, shopId: string): Promise<MemberRow[]> {
+    return tx
+      .select()
+      .from(member)
+      .where(and(eq(member.shopId, shopId), eq(member.state, 'active')))
+      .orderBy(member.id);
+  }
+
   /** Undefined when the version is no longer the present one. */
   async update(tx: Tx, key: { readonly shopId: string; readonly id: string; readonly version: number }, change: MemberChange) {
     const [row] = await tx

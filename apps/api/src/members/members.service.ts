@@ -13,6 +13,7 @@ import { roleOf, toMemberDto } from './members.mapper';
 import { type MemberRow, MembersRepository } from './members.repository';
 
 export type Joining = { readonly shopId: string; readonly personId: string; readonly role: Role; readonly printedName: string };
+export type Addressee = { readonly memberId: string; readonly role: Role; readonly name: string; readonly address: string };
 
 @Injectable()
 export class MembersService {
@@ -37,6 +38,16 @@ export class MembersService {
       .map(([id]) => id);
     for (const id of memberIds) if ((await this.repository.find(tx, shopId, id))?.state === 'active') return true;
     return false;
+  }
+
+  /** Active members with their addresses, for mail that another module's use case writes. */
+  async addressees(tx: Tx, shopId: string): Promise<Addressee[]> {
+    const addresses = await this.repository.addresses(tx);
+    const rows = await this.repository.listActive(tx, shopId);
+    return rows.flatMap(({ id, role, printedName }) => {
+      const address = addresses.get(id);
+      return address === undefined ? [] : [{ memberId: id, role: roleOf(role), name: printedName, address }];
+    });
   }
 
   async list(actor: Actor, query: ListMembersQuery): Promise<Page<MemberDto>> {
