@@ -1,0 +1,42 @@
+import { Module } from '@nestjs/common';
+import { LedgerModule } from '../ledger/ledger.module';
+import { MailModule } from '../mail/mail.module';
+import { MaterialsModule } from '../materials/materials.module';
+import { MembersModule } from '../members/members.module';
+import { CitedRevisionsRepository } from './cited-revisions.repository';
+import { DeviationsController } from './deviations.controller';
+import { DeviationsRepository } from './deviations.repository';
+import { DeviationsService } from './deviations.service';
+import { HoldsController } from './holds.controller';
+import { HoldsRepository } from './holds.repository';
+import { HoldsService } from './holds.service';
+import { RunActs } from './run-acts.service';
+import { RunListService } from './run-list.service';
+import { RunProgressService } from './run-progress.service';
+import { RunsController } from './runs.controller';
+import { RunsRepository } from './runs.repository';
+import { RunsService } from './runs.service';
+import { SettingRequestsController } from './setting-requests.controller';
+import { SettingRequestsRepository } from './setting-requests.repository';
+import { SettingRequestsService } from './setting-requests.service';
+
+/** Runs with their first piece and counts, holds, deviations, and requests for settings. */
+@Module({
+  imports: [LedgerModule, MailModule, MaterialsModule, MembersModule],
+  controllers: [RunsController, HoldsController, SettingRequestsController, DeviationsController],
+  providers: [
+    RunsService,
+    RunActs,
+    RunListService,
+    RunProgressService,
+    RunsRepository,
+    CitedRevisionsRepository,
+    HoldsService,
+    HoldsRepository,
+    DeviationsService,
+    DeviationsRepository,
+    SettingRequestsService,
+    SettingRequestsRepository,
+  ],
+})
+export class RunsModule {}

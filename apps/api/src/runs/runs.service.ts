@@ -1,0 +1,108 @@
+import { Injectable } from '@nestjs/common';
+import { RUN_KINDS } from '@proofplate/recipe-model';
+import type { Actor } from '../common/actor';
+import { ForbiddenError, NotFoundError } from '../common/errors/domain-error';
+import { type Tx, UnitOfWork } from '../database/unit-of-work';
+import { CautionsService } from '../materials/cautions.service';
+import { type CitedRevision, CitedRevisionsRepository } from './cited-revisions.repository';
+import { DeviationsService } from './deviations.service';
+import type { RunDto } from './dto/run.dto';
+import type { StartRunDto } from './dto/start-run.dto';
+import type { StartSheetDto } from './dto/start-sheet.dto';
+import { whyNotUsable } from './revision-use';
+import { RunActs } from './run-acts.service';
+import { tickProblems } from './run-ticks';
+import { ClientIdTakenError, NotReadyToStartError, OnHoldError, ReviewOverdueError, RevisionNotUsableError } from './runs.errors';
+import { mayStart } from './runs.policy';
+import { RunsRepository } from './runs.repository';
+
+/** Starts runs: the last look before a laser is let at a customer's part. */
+@Injectable()
+export class RunsService {
+  constructor(
+    private readonly unitOfWork: UnitOfWork,
+    private readonly runs: RunsRepository,
+    private readonly cited: CitedRevisionsRepository,
+    private readonly deviations: DeviationsService,
+    private readonly cautions: CautionsService,
+    private readonly acts: RunActs,
+  ) {}
+
+  /** What has to be known and done before a run of the revision starts. Trainees see approved ones only. */
+  async startSheet(actor: Actor, revisionId: string): Promise<StartSheetDto> {
+    return this.unitOfWork.read(actor, async (tx) => {
+      const revision = await this.readable(tx, actor, revisionId);
+      const holds = await this.runs.openHolds(tx, actor.shopId, { recipeId: revision.recipe.id, machineId: revision.machine.id });
+      const { id, number, state, content, recipe, machine, lens, material, finish, effect, panel } = revision;
+      return {
+        recipe,
+        revision: { id, number, state },
+        machine: { id: machine.id, name: machine.name },
+        ...{ material, finish, effect, lens, panel },
+        lenses: await this.cited.lenses(tx, actor.shopId),
+        steps: content.steps,
+        setUpSteps: content.setUpSteps,
+        holds,
+        deviations: await this.deviations.liveOf(tx, actor.shopId, id),
+        kinds: RUN_KINDS.filter((kind) => mayStart(actor, kind) && whyNotUsable(kind, state) === undefined),
+      };
+    });
+  }
+
+  /** Starts a run, or refuses it with every reason at its place. The same client id again answers the run that it made. */
+  async start(actor: Actor, dto: StartRunDto): Promise<RunDto> {
+    if (!mayStart(actor, dto.kind)) throw new ForbiddenError('Confirmation runs are for operators and leads.');
+    return this.unitOfWork.run(actor, async (tx) => {
+      const earlier = await this.runs.findByClientId(tx, actor.shopId, dto.clientId);
+      if (earlier !== undefined) return this.sameRun(tx, actor, dto, earlier.run.id);
+      await this.readable(tx, actor, dto.revisionId);
+      const revision = await this.cited.lock(tx, actor.shopId, dto.revisionId);
+      if (revision === undefined) throw new NotFoundError();
+      await this.refuseUnfit(tx, actor, dto, revision);
+      const id = await this.acts.insertStarted(tx, actor, dto, revision);
+      return id === undefined ? this.sameRun(tx, actor, dto) : this.acts.toDto(tx, actor, id);
+    });
+  }
+
+  private async refuseUnfit(tx: Tx, actor: Actor, dto: StartRunDto, revision: CitedRevision): Promise<void> {
+    const { recipe, machine, material, finish, effect, lens, content } = revision;
+    const holds = await this.runs.openHolds(tx, actor.shopId, { recipeId: recipe.id, machineId: machine.id });
+    if (holds.length > 0) throw new OnHoldError(holds);
+    await this.cautions.assertMayBeMarked(tx, actor.shopId, {
+      materialId: material.id,
+      finishId: finish.id,
+      effectId: effect.id,
+      sourceKind: machine.sourceKind,
+      roundPart: content.scope.partDiameterMm !== undefined || content.limits.partDiameterMm !== undefined,
+    });
+    const unusable = whyNotUsable(dto.kind, revision.state);
+    if (unusable !== undefined) throw new RevisionNotUsableError(unusable);
+    if (dto.kind === 'production' && revision.isOverdue && revision.overdueBlocks) throw new ReviewOverdueError();
+    const lensProblem =
+      dto.lensFittedId === lens.id
+        ? []
+        : [{ pointer: '#/lensFittedId', detail: `Fit ${lens.name}: the setting was proved with it, and another lens makes another mark.` }];
+    const problems = [...lensProblem, ...tickProblems(content, dto.ticks, { isStart: true })];
+    if (problems.length > 0) throw new NotReadyToStartError(problems);
+    if (dto.deviationId !== undefined) await this.deviations.assertLive(tx, actor.shopId, { id: dto.deviationId, revisionId: revision.id });
+  }
+
+  /** @throws NotFoundError for another shop's revision, and for a trainee one that is not approved */
+  private async readable(tx: Tx, actor: Actor, revisionId: string): Promise<CitedRevision> {
+    const revision = await this.cited.find(tx, actor.shopId, revisionId);
+    const isHidden =
+      actor.role === 'trainee' && (revision?.state === 'draft' || revision?.state === 'in_review' || revision?.state === 'returned');
+    if (revision === undefined || isHidden)
+      throw new NotFoundError('This revision is not in the shop. Choose the setting at the machine again.');
+    return revision;
+  }
+
+  private async sameRun(tx: Tx, actor: Actor, dto: StartRunDto, id?: string): Promise<RunDto> {
+    const view =
+      id === undefined ? await this.runs.findByClientId(tx, actor.shopId, dto.clientId) : await this.runs.findView(tx, actor.shopId, id);
+    const isSame =
+      view !== undefined && view.startedBy.id === actor.memberId && view.run.revisionId === dto.revisionId && view.run.kind === dto.kind;
+    if (!isSame) throw new ClientIdTakenError();
+    return this.acts.toDto(tx, actor, view.run.id);
+  }
+}
