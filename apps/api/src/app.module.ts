@@ -8,6 +8,7 @@ import { Env } from './config/env.validation';
 import { CouponInspectionModule } from './coupons/coupon-inspection.module';
 import { CouponsModule } from './coupons/coupons.module';
 import { DatabaseModule } from './database/database.module';
+import { FinderModule } from './finder/finder.module';
 import { HealthModule } from './health/health.module';
 import { LedgerModule } from './ledger/ledger.module';
 import { LensesModule } from './lenses/lenses.module';
@@ -16,6 +17,7 @@ import { MaterialsModule } from './materials/materials.module';
 import { MembersModule } from './members/members.module';
 import { PhotosModule } from './photos/photos.module';
 import { RecipesModule } from './recipes/recipes.module';
+import { RunsModule } from './runs/runs.module';
 import { ShopsModule } from './shops/shops.module';
 import { SignOffsModule } from './sign-offs/sign-offs.module';
 
@@ -43,6 +45,8 @@ export class AppModule {
         CouponInspectionModule,
         RecipesModule,
         SignOffsModule,
+        RunsModule,
+        FinderModule,
       ],
     };
   }

@@ -1,0 +1,89 @@
+import { type Criterion, criterionText } from '@proofplate/recipe-model';
+import type { Actor } from '../common/actor';
+import type { PhotoUrlsDto } from '../photos/dto/photo.dto';
+import { cellCut } from './cell-cut';
+import type { FinderAnswerDto, FinderKeysDto, FinderRecipeDto, ReferenceCellDto, ReferencePhotoDto } from './dto/finder.dto';
+import { answerActions } from './finder.policy';
+import type { AnswerRow, PhotoRow, ReferenceCellRow } from './finder-answers.repository';
+import type { Candidate, SlotKey } from './finder-slots';
+
+export type UrlsOf = (photo: PhotoRow) => PhotoUrlsDto | null;
+export type NameOf = (id: string) => string;
+
+export function toFinderRecipe(candidate: Candidate, nameOf: NameOf): FinderRecipeDto {
+  const { recipeId, code, title, revisionNumber, keys } = candidate;
+  return { recipeId, code, title, revisionNumber, ...namedKeys(keys, nameOf) };
+}
+
+export function toAnswer(
+  candidate: Candidate,
+  row: AnswerRow,
+  { actor, nameOf, urlsOf }: { actor: Pick<Actor, 'role'>; nameOf: NameOf; urlsOf: UrlsOf },
+): FinderAnswerDto {
+  const blockedBecause = blockers(row);
+  return {
+    ...toFinderRecipe(candidate, nameOf),
+    revisionId: row.revisionId,
+    holds: row.holds.map((hold) => ({ ...hold, placedAt: iso(hold.placedAt) })),
+    panel: row.panel,
+    profileNumber: row.profileNumber,
+    isProfilePresent: row.isProfilePresent,
+    steps: row.content.steps,
+    setUpSteps: row.content.setUpSteps,
+    limits: row.content.limits,
+    scope: row.content.scope,
+    focus: row.focus,
+    reference: row.reference === null ? null : toReferenceCell(row.reference, urlsOf),
+    route: row.route,
+    signature: row.signature === null ? null : { ...row.signature, signedAt: iso(row.signature.signedAt) },
+    holdsUntil: row.reviewDue === null ? null : iso(row.reviewDue),
+    isOverdue: row.isOverdue,
+    contentHash: row.contentHash,
+    blockedBecause,
+    allowedActions: answerActions(actor, { isBlocked: blockedBecause.length > 0, isHeld: row.holds.length > 0 }),
+  };
+}
+
+export function toReferenceCell(row: ReferenceCellRow, urlsOf: UrlsOf): ReferenceCellDto {
+  const { couponCode, address, rowIndex, columnIndex, rows, columns, lot } = row;
+  const criteria = row.criteria ?? [];
+  const measurements = row.measurements.map((measurement) => ({ ...measurement, criterion: criterionFor(measurement.quantity, criteria) }));
+  return { couponCode, address, rowIndex, columnIndex, rows, columns, lot, measurements, photo: toReferencePhoto(row, urlsOf) };
+}
+
+function toReferencePhoto(row: ReferenceCellRow, urlsOf: UrlsOf): ReferencePhotoDto | null {
+  const { photo } = row;
+  if (photo === null || photo.widthPx === null || photo.heightPx === null) return null;
+  const urls = urlsOf(photo);
+  if (urls === null) return null;
+  const cut = photo.corners === null ? undefined : cellCut(row, photo.corners);
+  return {
+    urls,
+    widthPx: photo.widthPx,
+    heightPx: photo.heightPx,
+    cell: cut?.withGround ?? null,
+    ring: cut?.cell ?? null,
+    plate: cut?.plate ?? null,
+    takenAt: iso(photo.capturedAt ?? photo.createdAt),
+  };
+}
+
+function criterionFor(quantity: string, criteria: readonly Criterion[]): string | null {
+  const found = criteria.find((criterion) => criterion.quantity === quantity);
+  return found === undefined ? null : criterionText(found);
+}
+
+function blockers(row: AnswerRow): string[] {
+  const held = row.holds.map(({ subject, reason }) => `A hold is on the ${subject}: ${reason}`);
+  return row.isOverdue && row.overdueBlocks
+    ? [...held, 'Its review is overdue, and the shop’s policy stops runs until it is proved again.']
+    : held;
+}
+
+function namedKeys(keys: Candidate['keys'], nameOf: NameOf): FinderKeysDto {
+  const named = (slot: SlotKey) => ({ id: keys[slot], name: nameOf(keys[slot]) });
+  return { machine: named('machine'), lens: named('lens'), material: named('material'), finish: named('finish'), effect: named('effect') };
+}
+
+/** Times come out of JSON and of the driver as text with a zone. */
+const iso = (time: string) => new Date(time).toISOString();

@@ -1,0 +1,212 @@
+import { Injectable } from '@nestjs/common';
+import { type Caution, MATERIAL_FAMILIES, SOURCE_KIND_LABELS } from '@proofplate/recipe-model';
+import type { Actor } from '../common/actor';
+import { NotFoundError } from '../common/errors/domain-error';
+import { type Tx, UnitOfWork } from '../database/unit-of-work';
+import { orderedCautionsFor } from '../materials/caution-order';
+import { PhotosService } from '../photos/photos.service';
+import { whyNotCarriedOver } from './carry-over';
+import type { FinderCautionDto, FinderDto, NearMissDto, WithdrawnRecipeDto } from './dto/finder.dto';
+import type { FinderQuery } from './dto/finder.query.dto';
+import { type NameOf, toAnswer, toFinderRecipe, toReferenceCell, type UrlsOf } from './finder.mapper';
+import { type CatalogueRow, FinderRepository, familyOf, type RecipeRow, sourceKindOf } from './finder.repository';
+import { type AnswerRow, FinderAnswersRepository } from './finder-answers.repository';
+import { type Candidate, fillSlots, fits, type Sentence, SLOT_KEYS, type SlotChoice, type SlotItem } from './finder-slots';
+import { type NearMiss, nearMisses } from './near-misses';
+
+const MOST_MATCHES = 12;
+
+/** What the sentence was asked against: the whole of the shop that the finder reads. */
+type Ground = {
+  readonly choice: SlotChoice;
+  readonly rows: readonly RecipeRow[];
+  readonly candidates: readonly Candidate[];
+  readonly catalogue: ReadonlyMap<string, CatalogueRow>;
+  readonly nameOf: NameOf;
+};
+
+@Injectable()
+export class FinderService {
+  constructor(
+    private readonly unitOfWork: UnitOfWork,
+    private readonly finder: FinderRepository,
+    private readonly answers: FinderAnswersRepository,
+    private readonly photos: PhotosService,
+  ) {}
+
+  /** Completes the sentence: options with counts, and the one approved setting or what comes nearest. At most four queries. */
+  async find(actor: Actor, query: FinderQuery): Promise<FinderDto> {
+    return this.unitOfWork.read(actor, async (tx) => {
+      const ground = await this.ground(tx, actor.shopId, query);
+      const sentence = fillSlots(ground.candidates, itemsOf(ground.catalogue), { choice: ground.choice, words: query.words ?? '' });
+      const only = onlyMatch(sentence, query);
+      const cautions = cautionsOf(await this.finder.cautions(tx, actor.shopId), ground, only);
+      const isForbidden = cautions.some(({ level }) => level === 'never');
+      const near =
+        sentence.matches.length > 0 || isForbidden
+          ? []
+          : nearMisses(ground.candidates, ground.choice, (id) => ground.catalogue.get(id)?.kind);
+      const wanted = only === undefined || isForbidden ? near.map(({ candidate }) => candidate) : [only];
+      const found = await this.answers.answers(
+        tx,
+        actor.shopId,
+        wanted.map(({ revisionId }) => revisionId),
+      );
+      const rowOf = (candidate: Candidate) => found.find(({ revisionId }) => revisionId === candidate.revisionId);
+      return {
+        ...headOf(sentence, ground),
+        cautions: cautions.map(toFinderCaution),
+        isForbidden,
+        answer: only === undefined || isForbidden ? null : this.answerOf(actor, only, rowOf(only), ground.nameOf),
+        withdrawn: sentence.matches.length > 0 ? [] : withdrawnOf(ground),
+        nearMisses: near.map((miss) => toNearMiss(miss, rowOf(miss.candidate), { ground, urlsOf: this.urlsOf })),
+      };
+    });
+  }
+
+  private readonly urlsOf: UrlsOf = (photo) => this.photos.urlsOf(photo);
+
+  private answerOf(actor: Actor, candidate: Candidate, row: AnswerRow | undefined, nameOf: NameOf) {
+    // withdrawn or superseded between two of the queries: the next look shows what holds then
+    return row === undefined ? null : toAnswer(candidate, row, { actor, nameOf, urlsOf: this.urlsOf });
+  }
+
+  private async ground(tx: Tx, shopId: string, query: FinderQuery): Promise<Ground> {
+    const catalogueRows = await this.finder.catalogue(tx, shopId);
+    const catalogue = new Map(catalogueRows.map((row) => [row.id, row]));
+    const choice = choiceOf(query);
+    for (const slot of SLOT_KEYS) {
+      const id = choice[slot];
+      if (id !== undefined && catalogue.get(id)?.slot !== slot)
+        throw new NotFoundError(`This ${slot} is not in the shop, or no longer. Choose it again.`);
+    }
+    const rows = (await this.finder.recipes(tx, shopId)).filter((row) => keyIds(row).every((id) => catalogue.has(id)));
+    const candidates = rows.filter(({ state }) => state === 'approved').map(toCandidate);
+    return { choice, rows, candidates, catalogue, nameOf: (id) => catalogue.get(id)?.name ?? '' };
+  }
+}
+
+function toFinderCaution({ id, level, subject, text, source, appliesTo }: Caution): FinderCautionDto {
+  const isGeneral = Object.values(appliesTo).every((condition) => condition === undefined);
+  return { id, level, subject, text, source, isGeneral };
+}
+
+/** The recipe that answers: the only one left, and only if the part was named. */
+function onlyMatch({ matches }: Sentence, query: FinderQuery): Candidate | undefined {
+  if (query.recipeId !== undefined) return matches.find(({ recipeId }) => recipeId === query.recipeId);
+  const isPartNamed = query.materialId !== undefined || (query.words ?? '') !== '';
+  return isPartNamed && matches.length === 1 ? matches[0] : undefined;
+}
+
+function headOf({ slots, matches }: Sentence, { nameOf }: Ground): Pick<FinderDto, 'slots' | 'matchCount' | 'matches'> {
+  const open = (slot: Sentence['slots']['machine']) => ({ ...slot, options: [...slot.options] });
+  return {
+    slots: {
+      machine: open(slots.machine),
+      lens: open(slots.lens),
+      material: open(slots.material),
+      finish: open(slots.finish),
+      effect: open(slots.effect),
+    },
+    matchCount: matches.length,
+    matches: matches.slice(0, MOST_MATCHES).map((candidate) => toFinderRecipe(candidate, nameOf)),
+  };
+}
+
+/** Cautions of the answered work, else of what is chosen so far: a material that must not be marked says so before a recipe is found. */
+function cautionsOf(cautions: readonly Caution[], { choice, catalogue, rows }: Ground, only: Candidate | undefined): Caution[] {
+  const keys: SlotChoice = only === undefined ? choice : { ...only.keys, material: choice.material ?? only.keys.material };
+  const material = keys.material === undefined ? undefined : catalogue.get(keys.material);
+  if (material === undefined) return [];
+  const [machine, effect] = [catalogue.get(keys.machine ?? ''), catalogue.get(keys.effect ?? '')];
+  const isRound = rows.find(({ recipeId }) => recipeId === only?.recipeId)?.isRound ?? false;
+  return orderedCautionsFor(
+    {
+      family: familyOf(material),
+      materialId: material.id,
+      roundPart: isRound,
+      ...(keys.finish === undefined ? {} : { finishId: keys.finish }),
+      ...(machine === undefined ? {} : { sourceKind: sourceKindOf(machine) }),
+      ...(effect === undefined ? {} : { effectKey: effect.kind }),
+    },
+    cautions,
+  );
+}
+
+function withdrawnOf({ rows, choice, nameOf }: Ground): WithdrawnRecipeDto[] {
+  if (choice.material === undefined) return [];
+  return rows
+    .filter((row) => row.state === 'withdrawn' && fits(toCandidate(row), choice))
+    .slice(0, MOST_MATCHES)
+    .map((row) => ({
+      ...toFinderRecipe(toCandidate(row), nameOf),
+      by: row.withdrawal?.by ?? null,
+      at: row.withdrawal === null ? null : new Date(row.withdrawal.at).toISOString(),
+      reason: row.withdrawal?.reason ?? '',
+    }));
+}
+
+function toNearMiss(
+  { candidate, differs }: NearMiss,
+  row: AnswerRow | undefined,
+  { ground, urlsOf }: { ground: Ground; urlsOf: UrlsOf },
+): NearMissDto {
+  const { choice, nameOf } = ground;
+  const wantedMachine = differs.includes('machine') ? ground.catalogue.get(choice.machine ?? '') : undefined;
+  const nameIn = (slot: (typeof SLOT_KEYS)[number]) => ({ has: nameOf(candidate.keys[slot]), wanted: nameOf(choice[slot] ?? '') });
+  const whyNot =
+    row === undefined
+      ? ''
+      : whyNotCarriedOver({
+          differs,
+          steps: row.content.steps,
+          proved: { name: nameOf(candidate.keys.machine), physical: row.physical },
+          wanted: wantedMachine?.physical == null ? null : { name: wantedMachine.name, physical: wantedMachine.physical },
+          lens: nameIn('lens'),
+        });
+  return {
+    ...toFinderRecipe(candidate, nameOf),
+    differs: differs.map((slot) => ({ slot, ...nameIn(slot) })),
+    whyNot,
+    reference: row == null || row.reference === null ? null : toReferenceCell(row.reference, urlsOf),
+  };
+}
+
+function choiceOf({ machineId, lensId, materialId, finishId, effectId }: FinderQuery): SlotChoice {
+  return {
+    ...(machineId === undefined ? {} : { machine: machineId }),
+    ...(lensId === undefined ? {} : { lens: lensId }),
+    ...(materialId === undefined ? {} : { material: materialId }),
+    ...(finishId === undefined ? {} : { finish: finishId }),
+    ...(effectId === undefined ? {} : { effect: effectId }),
+  };
+}
+
+const keyIds = ({ machineId, lensId, materialId, finishId, effectId }: RecipeRow) => [machineId, lensId, materialId, finishId, effectId];
+
+function toCandidate(row: RecipeRow): Candidate {
+  const { recipeId, code, title, revisionId, revisionNumber, groupMaterialIds } = row;
+  const keys = { machine: row.machineId, lens: row.lensId, material: row.materialId, finish: row.finishId, effect: row.effectId };
+  return { recipeId, code, title, revisionId, revisionNumber, keys, materialIds: [...new Set([row.materialId, ...groupMaterialIds])] };
+}
+
+function itemsOf(catalogue: ReadonlyMap<string, CatalogueRow>): SlotItem[] {
+  return [...catalogue.values()].map((row) => ({
+    slot: row.slot,
+    id: row.id,
+    name: row.name,
+    detail: detailOf(row),
+    searchText: row.slot === 'material' ? [row.words, familyWords(row)].join(' ') : row.words,
+  }));
+}
+
+function familyWords(row: CatalogueRow): string {
+  const { label, synonyms } = MATERIAL_FAMILIES[familyOf(row)];
+  return [label, ...synonyms].join(' ');
+}
+
+function detailOf(row: CatalogueRow): string {
+  if (row.slot === 'machine') return SOURCE_KIND_LABELS[sourceKindOf(row)];
+  if (row.slot === 'material') return MATERIAL_FAMILIES[familyOf(row)].label;
+  return row.slot === 'lens' ? `${row.kind} mm` : '';
+}

@@ -1,0 +1,44 @@
+import { type Candidate, SLOT_KEYS, type SlotChoice, type SlotKey } from './finder-slots';
+
+/** What the order of near misses needs to know of the shop's materials. */
+export type FamilyOf = (materialId: string) => string | undefined;
+
+export type NearMiss = { readonly candidate: Candidate; readonly differs: readonly SlotKey[] };
+
+const MOST_NEAR_MISSES = 3;
+/** The same mark elsewhere comes first, then another finish, another effect, and last another material of the family. */
+const RANK: Readonly<Record<SlotKey, number>> = { machine: 0, lens: 0, finish: 1, effect: 2, material: 3 };
+
+/** The approved recipes that come nearest to what was asked for; a material of another family is never near. */
+export function nearMisses(candidates: readonly Candidate[], choice: SlotChoice, familyOf: FamilyOf): NearMiss[] {
+  return candidates
+    .map((candidate) => ({ candidate, differs: differingSlots(candidate, choice) }))
+    .filter(({ candidate, differs }) => differs.length > 0 && isNear(candidate, differs, choice, familyOf))
+    .sort(
+      (a, b) =>
+        rankOf(a) - rankOf(b) ||
+        a.differs.length - b.differs.length ||
+        a.candidate.code.localeCompare(b.candidate.code, 'en', { numeric: true }),
+    )
+    .slice(0, MOST_NEAR_MISSES);
+}
+
+function differingSlots(candidate: Candidate, choice: SlotChoice): SlotKey[] {
+  return SLOT_KEYS.filter((slot) => {
+    const wanted = choice[slot];
+    if (wanted === undefined) return false;
+    return slot === 'material' ? !candidate.materialIds.includes(wanted) : candidate.keys[slot] !== wanted;
+  });
+}
+
+function isNear(candidate: Candidate, differs: readonly SlotKey[], choice: SlotChoice, familyOf: FamilyOf): boolean {
+  if (choice.material === undefined) return false;
+  if (!differs.includes('material')) return true;
+  // Another material helps only where it is for the same effect: two things apart are a guess.
+  const family = familyOf(choice.material);
+  return !differs.includes('effect') && family !== undefined && family === familyOf(candidate.keys.material);
+}
+
+function rankOf({ differs }: NearMiss): number {
+  return Math.max(...differs.map((slot) => RANK[slot]));
+}
