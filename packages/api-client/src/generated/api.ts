@@ -3793,16 +3793,10 @@ export interface components {
             storedAt?: string;
             /** @description Notes */
             notes?: string;
-            /**
-             * @description Side of a cell, mm
-             * @default 5
-             */
-            cellMm: number;
-            /**
-             * @description Gap between cells, mm
-             * @default 1.2
-             */
-            gapMm: number;
+            /** @description Side of a cell, mm; absent: 5 */
+            cellMm?: number;
+            /** @description Gap between cells, mm; absent: 1.2 */
+            gapMm?: number;
             /** @description Setting of corner marks, letters and code */
             labelStep?: components["schemas"]["TypedSettingDto"];
             /** @description Cautions that the planner has read and taken in */
@@ -6058,6 +6052,8 @@ export interface components {
             text: string;
             /** @description Where it comes from */
             source: string;
+            /** @description true: it holds for all work, not for this one in particular */
+            isGeneral: boolean;
         };
         FinderHoldDto: {
             /**
