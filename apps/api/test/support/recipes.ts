@@ -132,13 +132,21 @@ export async function cite(
   return answer.json<RecipeRevisionDto>();
 }
 
+export async function changeDraft(test: TestApp, member: TestMember, draft: RecipeRevisionDto, payload: Given): Promise<RecipeRevisionDto> {
+  const answer = await call(test, member, { method: 'PATCH', url: `/revisions/${draft.id}`, version: draft.version, payload });
+  if (answer.statusCode !== 200) throw new Error(`changing answered ${answer.statusCode}: ${answer.body}`);
+  return answer.json<RecipeRevisionDto>();
+}
+
+/** `scope` keeps a second recipe apart from the first of the same work. */
+type DraftGiven = { readonly title?: string; readonly address?: string; readonly scope?: Given };
+export const FOR_CUSTOMER = (name: string) => ({ featureKind: 'filled-area', customerSpecification: name });
+
 /** A draft from a cell of a sealed coupon, proved again on a later one: nothing is missing. */
-export async function makeProvedDraft(
-  test: TestApp,
-  shop: PlanningShop,
-  given: { title?: string; address?: string } = {},
-): Promise<RecipeRevisionDto> {
-  const draft = await draftFromCell(test, shop, await makeProvedCoupon(test, shop), given);
+export async function makeProvedDraft(test: TestApp, shop: PlanningShop, given: DraftGiven = {}): Promise<RecipeRevisionDto> {
+  const { scope, ...first } = given;
+  const drafted = await draftFromCell(test, shop, await makeProvedCoupon(test, shop), first);
+  const draft = scope === undefined ? drafted : await changeDraft(test, shop.operator, drafted, { scope });
   const proof = await proveAgain(test, shop, draft);
   const basis = draft.evidence.basis.map(({ cellId }) => cellId);
   return cite(test, shop.operator, draft, { basis, confirmation: proof.cells.map(({ id }) => id) });
@@ -166,11 +174,7 @@ export function acts(test: TestApp, id: string) {
 }
 
 /** In review, with nothing missing. */
-export async function makeSubmitted(
-  test: TestApp,
-  shop: PlanningShop,
-  given: { title?: string; address?: string } = {},
-): Promise<RecipeRevisionDto> {
+export async function makeSubmitted(test: TestApp, shop: PlanningShop, given: DraftGiven = {}): Promise<RecipeRevisionDto> {
   const draft = await makeProvedDraft(test, shop, given);
   const answer = await acts(test, draft.id).submit(shop.operator, draft);
   if (answer.statusCode !== 200) throw new Error(`submitting answered ${answer.statusCode}: ${answer.body}`);
@@ -178,11 +182,7 @@ export async function makeSubmitted(
 }
 
 /** Approved by the shop's lead. */
-export async function makeApproved(
-  test: TestApp,
-  shop: PlanningShop,
-  given: { title?: string; address?: string } = {},
-): Promise<RecipeRevisionDto> {
+export async function makeApproved(test: TestApp, shop: PlanningShop, given: DraftGiven = {}): Promise<RecipeRevisionDto> {
   const submitted = await makeSubmitted(test, shop, given);
   const answer = await acts(test, submitted.id).approve(shop.lead, submitted);
   if (answer.statusCode !== 200) throw new Error(`approving answered ${answer.statusCode}: ${answer.body}`);
