@@ -68,8 +68,7 @@ describe('GET /api/finder', () => {
       allowedActions: ['start-run'],
       reference: {
         address: 'B3',
-        rows: 3,
-        columns: 4,
+        plate: { rows: 3, columns: 4 },
         lot: 'L-1',
         photo: null,
         measurements: [{ quantity: 'contrast', value: 0.95, criterion: 'Contrast to the bare ground at least 0.9' }],

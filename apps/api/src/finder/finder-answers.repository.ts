@@ -21,15 +21,10 @@ export type PhotoRow = {
 export type ReferenceCellRow = {
   cellId: string;
   address: string;
-  rowIndex: number;
-  columnIndex: number;
   couponCode: string;
   lot: string;
   criteria: Criterion[] | null;
-  rows: number;
-  columns: number;
-  cellMm: number;
-  gapMm: number;
+  plate: { rows: number; columns: number; cellMm: number; gapMm: number; layoutVersion: string };
   measurements: CellMeasurementRow[];
   photo: PhotoRow | null;
 };
@@ -89,8 +84,9 @@ export class FinderAnswersRepository {
 
 /** The best rated cell that the setting comes from; without one, a cell that proved it. */
 const referenceCell = sql`
-  select json_build_object('cellId', c.id, 'address', c.address, 'rowIndex', c.row_index, 'columnIndex', c.column_index,
-    'couponCode', k.code, 'lot', k.lot, 'criteria', k.criteria, 'rows', g.rows, 'columns', g.columns, 'cellMm', g.cell_mm, 'gapMm', g.gap_mm,
+  select json_build_object('cellId', c.id, 'address', c.address,
+    'couponCode', k.code, 'lot', k.lot, 'criteria', k.criteria, 
+    'plate', json_build_object('rows', g.rows, 'columns', g.columns, 'cellMm', g.cell_mm, 'gapMm', g.gap_mm, 'layoutVersion', g.layout_version),
     'measurements', coalesce((
       select json_agg(json_build_object('quantity', q.quantity, 'value', q.value, 'grade', q.grade, 'unit', q.unit, 'method', q.method)
         order by q.quantity, q.measured_at desc)

@@ -1,7 +1,6 @@
 import { type Criterion, criterionText } from '@proofplate/recipe-model';
 import type { Actor } from '../common/actor';
 import type { PhotoUrlsDto } from '../photos/dto/photo.dto';
-import { cellCut } from './cell-cut';
 import type { FinderAnswerDto, FinderKeysDto, FinderRecipeDto, ReferenceCellDto, ReferencePhotoDto } from './dto/finder.dto';
 import { answerActions } from './finder.policy';
 import type { AnswerRow, PhotoRow, ReferenceCellRow } from './finder-answers.repository';
@@ -45,27 +44,15 @@ export function toAnswer(
 }
 
 export function toReferenceCell(row: ReferenceCellRow, urlsOf: UrlsOf): ReferenceCellDto {
-  const { couponCode, address, rowIndex, columnIndex, rows, columns, lot } = row;
+  const { couponCode, address, plate, lot } = row;
   const criteria = row.criteria ?? [];
   const measurements = row.measurements.map((measurement) => ({ ...measurement, criterion: criterionFor(measurement.quantity, criteria) }));
-  return { couponCode, address, rowIndex, columnIndex, rows, columns, lot, measurements, photo: toReferencePhoto(row, urlsOf) };
+  return { couponCode, address, plate, lot, measurements, photo: row.photo === null ? null : toReferencePhoto(row.photo, urlsOf) };
 }
 
-function toReferencePhoto(row: ReferenceCellRow, urlsOf: UrlsOf): ReferencePhotoDto | null {
-  const { photo } = row;
-  if (photo === null || photo.widthPx === null || photo.heightPx === null) return null;
-  const urls = urlsOf(photo);
-  if (urls === null) return null;
-  const cut = photo.corners === null ? undefined : cellCut(row, photo.corners);
-  return {
-    urls,
-    widthPx: photo.widthPx,
-    heightPx: photo.heightPx,
-    cell: cut?.withGround ?? null,
-    ring: cut?.cell ?? null,
-    plate: cut?.plate ?? null,
-    takenAt: iso(photo.capturedAt ?? photo.createdAt),
-  };
+function toReferencePhoto(photo: PhotoRow, urlsOf: UrlsOf): ReferencePhotoDto {
+  const { id, corners, widthPx, heightPx, capturedAt, createdAt } = photo;
+  return { id, urls: urlsOf(photo), corners, widthPx, heightPx, takenAt: iso(capturedAt ?? createdAt) };
 }
 
 function criterionFor(quantity: string, criteria: readonly Criterion[]): string | null {

@@ -6096,29 +6096,20 @@ export interface components {
             /** @description What was asked of it, in words; null: nothing */
             criterion: string | null;
         };
-        CutDto: {
-            /** @description Left edge, fraction of the width */
-            x: number;
-            /** @description Top edge, fraction of the height */
-            y: number;
-            /** @description Width, fraction of the picture’s width */
-            width: number;
-            /** @description Height, fraction of the picture’s height */
-            height: number;
-        };
         ReferencePhotoDto: {
+            /**
+             * Format: uuid
+             * @description Id of the photo
+             */
+            id: string;
             /** @description Addresses for <img> */
-            urls: components["schemas"]["PhotoUrlsDto"];
-            /** @description Width of the upright picture, pixels */
-            widthPx: number;
-            /** @description Height of the upright picture, pixels */
-            heightPx: number;
-            /** @description The cell with a rim of bare ground; null: the corners are not set */
-            cell: components["schemas"]["CutDto"] | null;
-            /** @description The cell alone, to ring it on the plate */
-            ring: components["schemas"]["CutDto"] | null;
-            /** @description The whole plate */
-            plate: components["schemas"]["CutDto"] | null;
+            urls: components["schemas"]["PhotoUrlsDto"] | null;
+            /** @description Corners of the plate, clockwise from the origin mark */
+            corners: components["schemas"]["CornerDto"][] | null;
+            /** @description Width, pixels */
+            widthPx: number | null;
+            /** @description Height, pixels */
+            heightPx: number | null;
             /**
              * Format: date-time
              * @description When it was taken; when it was sent, where the camera did not say
@@ -6130,14 +6121,8 @@ export interface components {
             couponCode: string;
             /** @description Address of the cell */
             address: string;
-            /** @description Row of the cell from 0 */
-            rowIndex: number;
-            /** @description Column of the cell from 0 */
-            columnIndex: number;
-            /** @description Rows of the plate */
-            rows: number;
-            /** @description Columns of the plate */
-            columns: number;
+            /** @description The plate, for drawing */
+            plate: components["schemas"]["EvidencePlateDto"];
             /** @description Lot of the material; may be empty */
             lot: string;
             /** @description Measurements that hold */

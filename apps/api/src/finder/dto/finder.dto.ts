@@ -2,7 +2,7 @@ import { ApiProperty } from '@nestjs/swagger';
 import { type CautionLevel, ROUTE_KINDS, type RouteKind } from '@proofplate/recipe-model';
 import { NamedDto } from '../../coupons/dto/coupon.dto';
 import { PanelDto } from '../../machines/dto/panel.dto';
-import { PhotoUrlsDto } from '../../photos/dto/photo.dto';
+import { EvidencePhotoDto, EvidencePlateDto } from '../../recipes/dto/evidence.dto';
 import { MarkStepDto, SetUpStepDto } from '../../recipes/dto/mark-step.dto';
 import { LimitsOfUseDto, RecipeScopeDto } from '../../recipes/dto/scope.dto';
 import { SLOT_KEYS, type SlotKey } from '../finder-slots';
@@ -53,21 +53,7 @@ export class FinderRecipeDto extends FinderKeysDto {
   @ApiProperty({ description: 'Number of its approved revision' }) revisionNumber: number;
 }
 
-export class CutDto {
-  @ApiProperty({ description: 'Left edge, fraction of the width' }) x: number;
-  @ApiProperty({ description: 'Top edge, fraction of the height' }) y: number;
-  @ApiProperty({ description: 'Width, fraction of the picture’s width' }) width: number;
-  @ApiProperty({ description: 'Height, fraction of the picture’s height' }) height: number;
-}
-
-export class ReferencePhotoDto {
-  @ApiProperty({ type: PhotoUrlsDto, description: 'Addresses for <img>' }) urls: PhotoUrlsDto;
-  @ApiProperty({ description: 'Width of the upright picture, pixels' }) widthPx: number;
-  @ApiProperty({ description: 'Height of the upright picture, pixels' }) heightPx: number;
-  @ApiProperty({ type: CutDto, nullable: true, description: 'The cell with a rim of bare ground; null: the corners are not set' })
-  cell: CutDto | null;
-  @ApiProperty({ type: CutDto, nullable: true, description: 'The cell alone, to ring it on the plate' }) ring: CutDto | null;
-  @ApiProperty({ type: CutDto, nullable: true, description: 'The whole plate' }) plate: CutDto | null;
+export class ReferencePhotoDto extends EvidencePhotoDto {
   @ApiProperty({ format: 'date-time', description: 'When it was taken; when it was sent, where the camera did not say' }) takenAt: string;
 }
 
@@ -84,10 +70,7 @@ export class ReferenceMeasurementDto {
 export class ReferenceCellDto {
   @ApiProperty({ description: 'Code of the coupon' }) couponCode: string;
   @ApiProperty({ description: 'Address of the cell' }) address: string;
-  @ApiProperty({ description: 'Row of the cell from 0' }) rowIndex: number;
-  @ApiProperty({ description: 'Column of the cell from 0' }) columnIndex: number;
-  @ApiProperty({ description: 'Rows of the plate' }) rows: number;
-  @ApiProperty({ description: 'Columns of the plate' }) columns: number;
+  @ApiProperty({ type: EvidencePlateDto, description: 'The plate, for drawing' }) plate: EvidencePlateDto;
   @ApiProperty({ description: 'Lot of the material; may be empty' }) lot: string;
   @ApiProperty({ type: [ReferenceMeasurementDto], description: 'Measurements that hold' }) measurements: ReferenceMeasurementDto[];
   @ApiProperty({ type: ReferencePhotoDto, nullable: true, description: 'Photo of the plate; null: none is ready' })
