@@ -1,11 +1,11 @@
 import { chakra } from '@chakra-ui/react';
 import { FactList } from '../../../components/fact-list';
 import { SettingCard } from '../../../components/setting-card';
+import { besidePanel, settingRows, stepTitle } from '../../../components/setting-rows';
 import { decimalSignOf } from '../../../lib/read-number';
 import { useSession } from '../../../lib/session';
 import type { Revision } from '../recipes.api';
 import { markOf } from '../revision-words';
-import { besidePanel, settingRows, stepTitle } from '../setting-rows';
 
 /** One nameplate for each mark step, in the order of marking. */
 export function SettingCards({ revision }: { revision: Revision }) {

@@ -1,21 +1,37 @@
 import { PANEL_UNITS } from '@proofplate/physics';
 import {
   ASSIST_LABELS,
+  type Assist,
   FILL_LABELS,
+  type Fill,
   PARAMETER_KEYS,
   PARAMETERS,
+  type Panel,
+  type PanelField,
+  type ParameterValues,
   type SetValue,
   STEP_PURPOSE_LABELS,
+  type StepPurpose,
   showNumber,
   showValue,
 } from '@proofplate/recipe-model';
-import type { Fact } from '../../components/fact-list';
-import type { SettingRow } from '../../components/setting-card';
-import { formatNumber, formatQuantity } from '../../lib/format';
-import type { Revision } from './recipes.api';
+import { formatNumber, formatQuantity } from '../lib/format';
+import type { Fact } from './fact-list';
+import type { SettingRow } from './setting-card';
 
-type Step = Revision['steps'][number];
-type Panel = Revision['profile']['panel'];
+/** A mark step as the api gives it. */
+export type ShownStep = {
+  purpose: StepPurpose;
+  pauseAfterS: number;
+  parameters: {
+    values: ParameterValues;
+    fill: Fill;
+    assist: Assist;
+    delaysUs?: Partial<Record<'laserOn' | 'laserOff' | 'jump' | 'corner', number>>;
+    power: { watts: number | null; basis?: 'calibration' | 'not calibrated'; reason?: string };
+  };
+};
+type Step = ShownStep;
 type DecimalSign = '.' | ',';
 
 /** What is dialled, in the order of the machine's panel; a value that another unit says better has it underneath. */
@@ -32,11 +48,20 @@ export function settingRows(step: Step, panel: Panel, decimalSign: DecimalSign):
         key: field.parameter,
         label: field.label,
         ...(note === undefined ? {} : { note }),
-        value: shown?.text ?? enteredText(value, decimalSign),
+        value: asPanelShows(shown?.text ?? enteredText(value, decimalSign), field, decimalSign),
         unit: shown?.symbol ?? PANEL_UNITS[value.entered.unit].symbol,
       },
     ];
   });
+}
+
+/** The panel's own decimals (0.030 on a panel with a step of 0.001), and the sign of an offset. */
+function asPanelShows(text: string, { parameter, step }: PanelField, decimalSign: DecimalSign): string {
+  const [whole = '', decimals = ''] = text.split(decimalSign);
+  const shownDecimals = step === undefined ? 0 : (String(step).split('.')[1]?.length ?? 0);
+  const padded = decimals.padEnd(shownDecimals, '0');
+  const isPlus = parameter === 'focusOffsetMm' && !text.startsWith('\u2212') && /[1-9]/.test(text);
+  return `${isPlus ? '+' : ''}${whole}${padded === '' ? '' : `${decimalSign}${padded}`}`;
 }
 
 export function enteredText({ entered }: SetValue, decimalSign: DecimalSign): string {
