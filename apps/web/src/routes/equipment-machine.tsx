@@ -65,15 +65,15 @@ function Sections({ machine }: { machine: Machine }) {
   return (
     <chakra.div
       display="grid"
-      gap="4"
-      gridTemplateColumns={{ base: 'minmax(0, 1fr)', xl: 'minmax(0, 1fr) minmax(0, 480px)' }}
+      gap="6"
+      gridTemplateColumns={{ base: 'minmax(0, 1fr)', xl: 'minmax(0, 1fr) minmax(0, 440px)' }}
       alignItems="start"
     >
-      <chakra.div display="grid" gap="4" minW="0">
+      <chakra.div display="grid" gap="6" gridTemplateColumns="minmax(0, 1fr)">
         <MachineLenses machine={machine} lenses={lenses?.items ?? []} />
         <Calibrations machine={machine} />
       </chakra.div>
-      <chakra.div display="grid" gap="4" minW="0">
+      <chakra.div display="grid" gap="4" gridTemplateColumns="minmax(0, 1fr)">
         <chakra.section aria-labelledby="panel-title">
           <chakra.h2 id="panel-title" srOnly>
             What the panel shows

@@ -41,7 +41,7 @@ export function Component() {
       <MaterialsTabs />
       <CautionsList names={names} />
       {isAdding && (
-        <Dialog title="Add a caution" width="wide" onClose={() => setIsAdding(false)}>
+        <Dialog title="Add a caution" onClose={() => setIsAdding(false)}>
           <CautionForm onDone={handleDone} />
         </Dialog>
       )}

@@ -28,7 +28,7 @@ export function Component() {
       <MaterialsTabs />
       <EffectList />
       {isAdding && (
-        <Dialog title="Add an effect" width="wide" onClose={() => setIsAdding(false)}>
+        <Dialog title="Add an effect" onClose={() => setIsAdding(false)}>
           <EffectForm onDone={handleDone} />
         </Dialog>
       )}

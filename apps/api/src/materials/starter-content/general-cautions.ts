@@ -23,7 +23,7 @@ export const GENERAL_CAUTIONS: readonly ShippedCaution[] = [
     shippedKey: 'fume-extraction',
     level: 'care',
     subject: 'Run the extraction at the mark before the first pulse and after the last.',
-    text: 'Fume is mostly particles below 5 µm. Above 1 000 W/cm² it needs an industrial hygienist’s evaluation, above 10 000 W/cm² enclosure and ventilation; breathing protection does not replace them.',
+    text: 'Fume is mostly particles below 5 µm. Above 1000 W/cm² it needs an industrial hygienist’s evaluation, above 10 000 W/cm² enclosure and ventilation; breathing protection does not replace them.',
     source: 'Univ. of California laser manual on laser-generated air contaminants, quoting ANSI Z136.1, 7.3; HSE RR878',
     appliesTo: {},
   },

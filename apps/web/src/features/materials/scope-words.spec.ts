@@ -20,6 +20,10 @@ describe('scopeWords', () => {
     );
   });
 
+  it('begins with a capital letter', () => {
+    expect(scopeWords({ roundPart: true }, names)).toBe('Round parts that turn');
+  });
+
   it('names the shop’s own things, and says when one is no longer listed', () => {
     expect(scopeWords({ materialIds: ['m1', 'gone'], finishIds: ['f1'], sourceKinds: ['co2'] }, names)).toBe(
       'Dial blank or a material that is archived · Black anodised · CO₂',

@@ -17,7 +17,8 @@ export function scopeWords(scope: CautionScope, names: ScopeNames): string {
     named(scope.effectKeys, names.effects, 'an effect'),
     scope.roundPart === true ? ['round parts that turn'] : undefined,
   ].flatMap((list) => (list === undefined || list.length === 0 ? [] : [joined(list)]));
-  return parts.length === 0 ? 'All work' : parts.join(' · ');
+  const words = parts.join(' · ');
+  return words === '' ? 'All work' : `${words.charAt(0).toUpperCase()}${words.slice(1)}`;
 }
 
 function named(ids: readonly string[] | undefined, names: ReadonlyMap<string, string>, fallback: string): string[] | undefined {

@@ -49,7 +49,7 @@ export function LensList({ addButton }: { addButton: ReactNode }) {
           rowKey={({ id }) => id}
         />
       )}
-      <Button kind="quiet" mt="2" onClick={() => setIsArchived(!isArchived)}>
+      <Button kind="quiet" mt="2" ml="-4" onClick={() => setIsArchived(!isArchived)}>
         {isArchived ? 'Show the lenses in use' : 'Show archived lenses'}
       </Button>
       {edited !== undefined && (

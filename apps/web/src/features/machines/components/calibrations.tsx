@@ -25,7 +25,7 @@ export function Calibrations({ machine }: { machine: Machine }) {
     announce('The power calibration is added. It stays as it is.');
   };
   return (
-    <Panel p="5" aria-labelledby="calibrations-title">
+    <chakra.section aria-labelledby="calibrations-title">
       <Flex justify="space-between" align="center" gap="3" wrap="wrap">
         <chakra.h2 id="calibrations-title">Power calibrations</chakra.h2>
         {machine.allowedActions.includes('add-calibration') && (
@@ -42,7 +42,7 @@ export function Calibrations({ machine }: { machine: Machine }) {
           <CalibrationForm machine={machine} onAdded={handleAdded} />
         </Dialog>
       )}
-    </Panel>
+    </chakra.section>
   );
 }
 
@@ -57,7 +57,7 @@ function Readings({ calibrations }: { calibrations: readonly Calibration[] }) {
   const shown = earlier.slice(0, SHOWN_EARLIER);
   return (
     <chakra.div mt="2" display="grid" gap="4">
-      <div>
+      <Panel p="5">
         <CalibrationCurve
           label={`Power over percent on ${formatDay(newest.measuredOn)}: ${newest.points.map(({ percent, watts }) => `${percent} percent ${watts} watts`).join(', ')}`}
           newest={{ key: newest.id, points: newest.points }}
@@ -68,14 +68,26 @@ function Readings({ calibrations }: { calibrations: readonly Calibration[] }) {
           {shown.length > 0 && ` Dashed: ${shown.map(({ measuredOn }) => formatDay(measuredOn)).join(', ')}.`} Monotone piecewise cubic
           through the readings (Fritsch and Butland 1984); nothing is guessed beyond them.
         </chakra.p>
-      </div>
-      <DataTable label="Power calibrations" columns={COLUMNS} rows={calibrations} rowKey={({ id }) => id} density="dense" />
+      </Panel>
+      <DataTable label="Power calibrations" columns={COLUMNS} rows={calibrations} rowKey={({ id }) => id} />
     </chakra.div>
   );
 }
 
 const COLUMNS: readonly Column<Calibration>[] = [
-  { key: 'day', header: 'Measured on', onPhone: 'title', cell: ({ measuredOn }) => formatDay(measuredOn) },
+  {
+    key: 'day',
+    header: 'Measured on',
+    onPhone: 'title',
+    cell: ({ measuredOn, createdByName }) => (
+      <chakra.div py="1.5" whiteSpace="nowrap">
+        <b>{formatDay(measuredOn)}</b>
+        <chakra.span display="block" color="fg.muted" fontWeight="normal">
+          entered by {createdByName}
+        </chakra.span>
+      </chakra.div>
+    ),
+  },
   {
     key: 'top',
     header: 'Highest reading',
@@ -91,7 +103,6 @@ const COLUMNS: readonly Column<Calibration>[] = [
     header: 'Meter',
     cell: ({ meter, meterDueOn }) => (meterDueOn === null ? meter : `${meter}, due ${formatDay(meterDueOn)}`),
   },
-  { key: 'by', header: 'Entered by', cell: ({ createdByName }) => createdByName },
 ];
 
 function conditionsOf({ wavelengthNm, frequencyKhz, pulseWidthNs }: Calibration): string {

@@ -4,7 +4,6 @@ import { Button } from '../../../components/button';
 import { type Column, DataTable } from '../../../components/data-table';
 import { Dialog } from '../../../components/dialog';
 import { PlusIcon } from '../../../components/icons';
-import { Panel } from '../../../components/page';
 import { ReadProblem } from '../../../components/read-problem';
 import { SkeletonTable } from '../../../components/skeletons';
 import { useStatusLine } from '../../../components/status-line';
@@ -26,7 +25,7 @@ export function MachineLenses({ machine, lenses }: { machine: Machine; lenses: r
     announce('The lens on this machine is saved.');
   };
   return (
-    <Panel p="5" aria-labelledby="lenses-title">
+    <chakra.section aria-labelledby="lenses-title">
       <Flex justify="space-between" align="center" gap="3" wrap="wrap" mb="2">
         <chakra.h2 id="lenses-title">Lenses on this machine</chakra.h2>
         {machine.allowedActions.includes('add-lens') && free.length > 0 && (
@@ -61,7 +60,7 @@ export function MachineLenses({ machine, lenses }: { machine: Machine; lenses: r
           <ChangeMachineLensForm pair={dialog.pair} onDone={handleDone} />
         </Dialog>
       )}
-    </Panel>
+    </chakra.section>
   );
 }
 
@@ -71,14 +70,16 @@ function columns(onEdit: (pair: MachineLens) => void): readonly Column<MachineLe
       key: 'lens',
       header: 'Lens',
       onPhone: 'title',
-      cell: ({ lensName, isMounted }) => (
-        <>
+      cell: ({ lensName, focalLengthMm, isMounted }) => (
+        <chakra.div py="1.5">
           <b>{lensName}</b>
-          {isMounted && <chakra.span color="fg.muted"> mounted now</chakra.span>}
-        </>
+          <chakra.span display="block" color="fg.muted" fontWeight="normal">
+            {formatQuantity(focalLengthMm, 'mm')}
+            {isMounted && ', mounted now'}
+          </chakra.span>
+        </chakra.div>
       ),
     },
-    { key: 'focal', header: 'Focal length', align: 'end', cell: ({ focalLengthMm }) => formatQuantity(focalLengthMm, 'mm') },
     {
       key: 'distance',
       header: 'Working distance',

@@ -32,7 +32,7 @@ export function MachineList({ mayAdd }: { mayAdd: boolean }) {
       ) : (
         <DataTable label={isArchived ? 'Archived machines' : 'Machines'} columns={columns()} rows={data.items} rowKey={({ id }) => id} />
       )}
-      <Button kind="quiet" mt="2" onClick={() => setIsArchived(!isArchived)}>
+      <Button kind="quiet" mt="2" ml="-4" onClick={() => setIsArchived(!isArchived)}>
         {isArchived ? 'Show the machines in use' : 'Show archived machines'}
       </Button>
     </>

@@ -1,5 +1,5 @@
 import { PANEL_UNITS } from '@proofplate/physics';
-import { PARAMETERS, type Panel, type PanelField, roundToPanel, showNumber } from '@proofplate/recipe-model';
+import { PARAMETERS, type Panel, type PanelField, roundToPanel, showNumber, showValue } from '@proofplate/recipe-model';
 import { SettingCard, type SettingRow } from '../../../components/setting-card';
 import { decimalSignOf } from '../../../lib/read-number';
 import { useSession } from '../../../lib/session';
@@ -38,14 +38,13 @@ function exampleRow(field: PanelField, index: number, decimalSign: '.' | ','): S
   };
 }
 
-/** A number that the field can show: the usual one where the unit is the parameter's own, else from the middle of the limits. */
+/** A number that the field can show: the invented one in the panel's unit, moved inside the limits. */
 function exampleValue(field: PanelField): number {
-  const { minimum, maximum, choices, unit } = field;
+  const { minimum, maximum, choices, parameter } = field;
+  const physical = EXAMPLES[parameter];
+  const example = { entered: { value: physical, unit: PARAMETERS[parameter].unit }, physical };
   const [firstChoice] = choices ?? [];
-  if (firstChoice !== undefined) return firstChoice;
-  const isOwnUnit = unit === PARAMETERS[field.parameter].unit || unit.startsWith('percent');
-  const middle = minimum !== undefined && maximum !== undefined ? (minimum + maximum) / 2 : (minimum ?? maximum ?? 1);
-  const wanted = isOwnUnit || maximum === undefined ? EXAMPLES[field.parameter] : middle;
+  const wanted = showValue(field, example, { speedMmPerS: EXAMPLES.speedMmPerS })?.value ?? firstChoice ?? minimum ?? 1;
   const inside = Math.min(Math.max(wanted, minimum ?? wanted), maximum ?? wanted);
   return roundToPanel(field, inside) ?? inside;
 }

@@ -80,6 +80,7 @@ function RowButton({ word, index, isDisabled, onPress }: RowButtonProps) {
       px="2.5"
       fontSize="sm"
       disabled={isDisabled}
+      visibility={isDisabled ? 'hidden' : 'visible'}
       data-move={`${index}-${word.toLowerCase()}`}
       aria-label={`Move row ${index + 1} ${word.toLowerCase()}`}
       onClick={onPress}

@@ -67,13 +67,15 @@ export function PanelRow({ form, index, taken }: RowProps) {
           <RowNumber key={key} form={form} index={index} name={key} label={label} rule={panelNumberRule(label, row.unit)} />
         ))}
       </chakra.div>
-      <TextField
-        label="Offers only"
-        isOptional
-        help="Where the field is a list: its values with blanks between them."
-        error={messageAt(errors, at('choices'))}
-        {...form.register(at('choices'), { validate: (text) => listMessage(text, panelNumberRule('Each value', row.unit), locale) })}
-      />
+      {(row.choices !== '' || row.parameter === 'pulseWidthNs' || messageAt(errors, at('choices')) !== undefined) && (
+        <TextField
+          label="Offers only"
+          isOptional
+          help="Where the field is a list: its values with blanks between them."
+          error={messageAt(errors, at('choices'))}
+          {...form.register(at('choices'), { validate: (text) => listMessage(text, panelNumberRule('Each value', row.unit), locale) })}
+        />
+      )}
     </>
   );
 }

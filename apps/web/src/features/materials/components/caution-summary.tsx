@@ -9,7 +9,7 @@ export function CautionSummary({ cautions }: Pick<Material, 'cautions'>) {
   if (never !== undefined)
     return (
       <Line tone="oxide.fg" shape="withdrawn">
-        <b>Never</b> {never.subject}
+        <b>Never</b> · {never.subject}
       </Line>
     );
   const [first, ...others] = cautions;

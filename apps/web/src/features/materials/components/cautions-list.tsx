@@ -44,7 +44,7 @@ export function CautionsList({ names }: { names: ScopeNames }) {
         onTighten={setEdited}
       />
       {edited !== undefined && (
-        <Dialog title="Tighten a caution" width="wide" onClose={() => setEdited(undefined)}>
+        <Dialog title="Tighten a caution" onClose={() => setEdited(undefined)}>
           <TightenForm caution={edited} onDone={handleDone} />
         </Dialog>
       )}

@@ -50,7 +50,7 @@ export function EffectList() {
         {isArchived ? 'Show the effects in use' : 'Show archived effects'}
       </Button>
       {edited !== undefined && (
-        <Dialog title={`Change ${edited.name}`} width="wide" onClose={() => setEdited(undefined)}>
+        <Dialog title={`Change ${edited.name}`} onClose={() => setEdited(undefined)}>
           <EffectForm effect={edited} onDone={handleDone} />
         </Dialog>
       )}
@@ -91,7 +91,11 @@ function columns({ locale, onEdit, onArchive }: ColumnOptions): readonly Column<
       key: 'notes',
       header: 'Where they come from',
       width: '28%',
-      cell: ({ notes }) => <chakra.span color="fg.muted">{notes}</chakra.span>,
+      cell: ({ notes }) => (
+        <chakra.div color="fg.muted" py="1.5">
+          {notes}
+        </chakra.div>
+      ),
     },
     {
       key: 'acts',

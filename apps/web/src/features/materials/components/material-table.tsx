@@ -1,3 +1,4 @@
+import { chakra } from '@chakra-ui/react';
 import { type Column, DataTable } from '../../../components/data-table';
 import { TextLink } from '../../../components/text-link';
 import { formatQuantity } from '../../../lib/format';
@@ -21,12 +22,21 @@ const COLUMNS: readonly Column<Material>[] = [
     ),
   },
   { key: 'family', header: 'Family', cell: ({ familyLabel }) => familyLabel },
-  { key: 'grade', header: 'Grade', cell: ({ grade, standardDesignation }) => [grade, standardDesignation].filter(Boolean).join(', ') },
+  {
+    key: 'grade',
+    header: 'Grade',
+    cell: ({ grade, standardDesignation }) => [grade, standardDesignation].filter(Boolean).join(', ') || <NotEntered />,
+  },
   {
     key: 'thickness',
     header: 'Thickness',
     align: 'end',
-    cell: ({ thicknessMm }) => (thicknessMm === null ? '' : formatQuantity(thicknessMm, 'mm')),
+    cell: ({ thicknessMm }) => (thicknessMm === null ? <NotEntered /> : formatQuantity(thicknessMm, 'mm')),
   },
   { key: 'cautions', header: 'Cautions', width: '40%', cell: ({ cautions }) => <CautionSummary cautions={cautions} /> },
 ];
+
+/** Said, never left as a hole. */
+function NotEntered() {
+  return <chakra.span color="fg.muted">not entered</chakra.span>;
+}
