@@ -50,12 +50,12 @@ export class ConfirmRevisionDto {
   @TrimmedText(MAX_NOTES_LENGTH)
   notes?: string;
 
-  @ApiPropertyOptional({ description: 'Side of a cell, mm', default: CELL_MM.usual })
+  @ApiPropertyOptional({ description: `Side of a cell, mm; absent: ${CELL_MM.usual}` })
   @IsOptional()
   @NumberBetween(CELL_MM.least, CELL_MM.most, { what: 'The side of a cell', unit: 'mm' })
   cellMm?: number;
 
-  @ApiPropertyOptional({ description: 'Gap between cells, mm', default: GAP_MM.usual })
+  @ApiPropertyOptional({ description: `Gap between cells, mm; absent: ${GAP_MM.usual}` })
   @IsOptional()
   @NumberBetween(GAP_MM.least, GAP_MM.most, { what: 'The gap between cells', unit: 'mm' })
   gapMm?: number;

@@ -1,0 +1,63 @@
+import { chakra } from '@chakra-ui/react';
+import type { UseFormReturn } from 'react-hook-form';
+import { NumberField, SelectField, TextField } from '../../../components/field';
+import { messageAt } from '../../../components/form';
+import type { Choice, Machine, MachineLens } from '../coupons.api';
+import type { PlanValues } from './plan-values';
+
+export type GroundChoices = {
+  machines: readonly Machine[];
+  lenses: readonly MachineLens[];
+  materials: readonly Choice[];
+  finishes: readonly Choice[];
+  effects: readonly Choice[];
+};
+
+const optionsOf = (choices: readonly Choice[]) => choices.map(({ id, name }) => ({ value: id, label: name }));
+
+/** Which coupon it is: machine, lens, material, finish and the effect that is wanted. */
+export function GroundFields({ form, choices }: { form: UseFormReturn<PlanValues>; choices: GroundChoices }) {
+  const at = (name: string) => messageAt(form.formState.errors, name);
+  return (
+    <chakra.div display="grid" gridTemplateColumns="repeat(2, minmax(0, 1fr))" gap="2" rowGap="3" alignItems="start">
+      <SelectField
+        label="Machine"
+        placeholder="Choose"
+        {...form.register('machineId')}
+        error={at('machineId')}
+        options={optionsOf(choices.machines)}
+      />
+      <SelectField
+        label="Lens"
+        placeholder="Choose"
+        {...form.register('lensId')}
+        error={at('lensId')}
+        options={choices.lenses.map(({ lensId, lensName }) => ({ value: lensId, label: lensName }))}
+      />
+      <SelectField
+        label="Material"
+        placeholder="Choose"
+        {...form.register('materialId')}
+        error={at('materialId')}
+        options={optionsOf(choices.materials)}
+      />
+      <SelectField
+        label="Finish"
+        placeholder="Choose"
+        {...form.register('finishId')}
+        error={at('finishId')}
+        options={optionsOf(choices.finishes)}
+      />
+      <SelectField
+        label="Effect wanted"
+        placeholder="Choose"
+        {...form.register('effectId')}
+        error={at('effectId')}
+        options={optionsOf(choices.effects)}
+      />
+      <NumberField label="Thickness" unit="mm" isOptional {...form.register('thicknessMm')} error={at('thicknessMm')} />
+      <TextField label="Lot" isOptional {...form.register('lot')} error={at('lot')} />
+      <TextField label="What it is for" isOptional {...form.register('title')} error={at('title')} />
+    </chakra.div>
+  );
+}

@@ -1,0 +1,142 @@
+import { chakra } from '@chakra-ui/react';
+import { PARAMETER_KEYS, type Panel } from '@proofplate/recipe-model';
+import { type UseFormReturn, useWatch } from 'react-hook-form';
+import { Button } from '../../../components/button';
+import { NumberField } from '../../../components/field';
+import { Form, messageAt } from '../../../components/form';
+import { Panel as Card } from '../../../components/page';
+import { Segmented } from '../../../components/segmented';
+import { SkeletonForm } from '../../../components/skeletons';
+import { Switch } from '../../../components/switch';
+import type { CouponPreview } from '../coupons.api';
+import { FactorFields } from './factor-fields';
+import { type GroundChoices, GroundFields } from './ground-fields';
+import { newSeed, type PlanValues } from './plan-values';
+import { SettingFields } from './setting-fields';
+
+const DRAWN_BY = [
+  { value: 'machine', label: 'The machine' },
+  { value: 'artwork', label: 'The artwork' },
+] as const;
+
+export type PlanFormProps = {
+  form: UseFormReturn<PlanValues>;
+  choices: GroundChoices;
+  /** Panel of the chosen machine; undefined until one is chosen. */
+  panel: Panel | undefined;
+  isMachineChosen: boolean;
+  preview: CouponPreview | undefined;
+  onSubmit: (values: PlanValues, submit: { idempotencyKey: string }) => Promise<unknown>;
+};
+
+/** The left half of the plan: what is typed. */
+export function PlanForm({ form, choices, panel, isMachineChosen, preview, onSubmit }: PlanFormProps) {
+  const [rows, columns] = useWatch({ control: form.control, name: ['rows.parameter', 'columns.parameter'] });
+  return (
+    <Form form={form} labels={labelsOf(panel)} onSubmit={onSubmit}>
+      <GroundFields form={form} choices={choices} />
+      {panel === undefined ? (
+        isMachineChosen && <SkeletonForm fields={6} />
+      ) : (
+        <>
+          <FactorFields form={form} name="rows" panel={panel} stored={preview?.rowFactor} />
+          <FactorFields form={form} name="columns" panel={panel} stored={preview?.columnFactor} />
+          <Card p="4" display="grid" gap="3" aria-labelledby="plan-base">
+            <chakra.h2 id="plan-base" fontSize="md" lineHeight="md">
+              The same in every cell
+            </chakra.h2>
+            <SettingFields form={form} name="base" panel={panel} varied={[rows, columns]} />
+          </Card>
+          <LabelStepFields form={form} panel={panel} />
+          <PlateFields form={form} />
+        </>
+      )}
+    </Form>
+  );
+}
+
+function LabelStepFields({ form, panel }: { form: UseFormReturn<PlanValues>; panel: Panel }) {
+  const hasLabelStep = useWatch({ control: form.control, name: 'hasLabelStep' });
+  return (
+    <Card p="4" display="grid" gap="3" aria-label="Corner marks and letters">
+      <Switch
+        label="Mark corner marks and letters"
+        isOn={hasLabelStep}
+        onChange={(isOn) => form.setValue('hasLabelStep', isOn, { shouldDirty: true })}
+        help="They are burnt first, with a setting of their own. Prove it on a scrap edge: they must be read in every photo."
+      />
+      {hasLabelStep && <SettingFields form={form} name="labelStep" panel={panel} />}
+    </Card>
+  );
+}
+
+function PlateFields({ form }: { form: UseFormReturn<PlanValues> }) {
+  const [isRandom, seed, drawnBy] = useWatch({ control: form.control, name: ['isRandom', 'runOrderSeed', 'fillDrawnBy'] });
+  const at = (name: string) => messageAt(form.formState.errors, name);
+  return (
+    <>
+      <Card p="4" display="grid" gap="3" aria-label="Plate">
+        <chakra.div display="grid" gridTemplateColumns="repeat(2, minmax(0, 1fr))" gap="2" rowGap="3" alignItems="start">
+          <NumberField label="Cell" unit="mm" {...form.register('cellMm')} error={at('cellMm')} />
+          <NumberField label="Gap" unit="mm" {...form.register('gapMm')} error={at('gapMm')} />
+        </chakra.div>
+        <div>
+          <chakra.div fontWeight="semibold" fontSize="sm" lineHeight="sm" mb="1">
+            Who draws the fill lines
+          </chakra.div>
+          <Segmented
+            label="Who draws the fill lines"
+            choices={DRAWN_BY}
+            value={drawnBy}
+            onChange={(next) => form.setValue('fillDrawnBy', next, { shouldDirty: true })}
+            isWide
+          />
+        </div>
+        <NumberField
+          label="Flag cells from a dose of"
+          unit="J/mm²"
+          isOptional
+          help="Empty: the lowest dose that went wrong on this material and finish before."
+          {...form.register('doseCautionJPerMm2')}
+          error={at('doseCautionJPerMm2')}
+        />
+      </Card>
+      <chakra.div display="flex" justifyContent="space-between" alignItems="flex-start" gap="3">
+        <Switch
+          label="Random run order"
+          isOn={isRandom}
+          onChange={(isOn) => form.setValue('isRandom', isOn, { shouldDirty: true })}
+          help={isRandom ? `keeps heat build-up out of the result; seed ${seed}` : 'row by row: heat build-up looks like an effect'}
+        />
+        {isRandom && (
+          <Button kind="quiet" onClick={() => form.setValue('runOrderSeed', newSeed(), { shouldDirty: true })}>
+            Shuffle
+          </Button>
+        )}
+      </chakra.div>
+    </>
+  );
+}
+
+/** Names and labels of every field, for the summary of a refused plan. */
+function labelsOf(panel: Panel | undefined): Readonly<Record<string, string>> {
+  const labelOf = new Map(panel?.fields.map(({ parameter, label }) => [parameter, label]));
+  const setting = (name: string, prefix: string) =>
+    PARAMETER_KEYS.flatMap((key) => {
+      const label = labelOf.get(key);
+      return label === undefined ? [] : [[`${name}.values.${key}`, `${prefix}${label}`] as const];
+    });
+  const factor = (name: string, title: string) => [
+    [`${name}.parameter`, `${title}, what varies`] as const,
+    [`${name}.from`, `${title}, from`] as const,
+    [`${name}.to`, `${title}, to`] as const,
+    [`${name}.count`, `${title}, levels`] as const,
+  ];
+  return {
+    ...{ machineId: 'Machine', lensId: 'Lens', materialId: 'Material', finishId: 'Finish', effectId: 'Effect wanted' },
+    ...{ thicknessMm: 'Thickness', lot: 'Lot', title: 'What it is for' },
+    ...Object.fromEntries([...factor('rows', 'Rows'), ...factor('columns', 'Columns')]),
+    ...Object.fromEntries([...setting('base', ''), ...setting('labelStep', 'Labels, ')]),
+    ...{ 'base.fill': 'Fill', cellMm: 'Cell', gapMm: 'Gap', doseCautionJPerMm2: 'Flag cells from a dose of' },
+  };
+}
