@@ -22,6 +22,8 @@ export type PlateProps = {
   scale?: ResponseScale | undefined;
   /** Rectified photograph of the whole plate. */
   photoUrl?: string | undefined;
+  /** A photo lies under the drawing: neither metal nor marks are drawn. */
+  isOverPhoto?: boolean;
   /** Ground of the plate, when it is not bare metal. */
   groundColour?: string;
   chosen?: string | undefined;
@@ -36,7 +38,7 @@ export type PlateProps = {
 
 /** The plate to scale, one millimetre of metal one unit of the drawing. */
 export function Plate(props: PlateProps) {
-  const { layout, label, chosen, photoUrl, groundColour, code, dataMatrix, onChoose } = props;
+  const { layout, label, chosen, photoUrl, isOverPhoto = false, groundColour, code, dataMatrix, onChoose } = props;
   const { widthMm, heightMm } = layout.plate;
   const hatchId = useId();
   const chosenCell = layout.cells.find(({ address }) => address === chosen);
@@ -52,20 +54,24 @@ export function Plate(props: PlateProps) {
       <defs>
         <Hatch id={hatchId} />
       </defs>
-      <chakra.rect
-        x="0.15"
-        y="0.15"
-        width={`${widthMm - 0.3}`}
-        height={`${heightMm - 0.3}`}
-        rx={1}
-        fill={groundColour ?? 'plate.metal'}
-        stroke="plate.edge"
-        strokeWidth="0.3"
-      />
-      {photoUrl === undefined ? (
-        <PlateMarks layout={layout} code={code} dataMatrix={dataMatrix} />
-      ) : (
-        <image href={photoUrl} x="0" y="0" width={widthMm} height={heightMm} preserveAspectRatio="none" />
+      {!isOverPhoto && (
+        <>
+          <chakra.rect
+            x="0.15"
+            y="0.15"
+            width={`${widthMm - 0.3}`}
+            height={`${heightMm - 0.3}`}
+            rx={1}
+            fill={groundColour ?? 'plate.metal'}
+            stroke="plate.edge"
+            strokeWidth="0.3"
+          />
+          {photoUrl === undefined ? (
+            <PlateMarks layout={layout} code={code} dataMatrix={dataMatrix} />
+          ) : (
+            <image href={photoUrl} x="0" y="0" width={widthMm} height={heightMm} preserveAspectRatio="none" />
+          )}
+        </>
       )}
       <PlateGrid {...props} hatchId={hatchId} />
       {chosenCell !== undefined && <PlateRing rect={chosenCell.rect} />}

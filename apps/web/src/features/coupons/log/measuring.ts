@@ -1,0 +1,98 @@
+import { type MeasurementMethod, type MeasurementQuantity, QUANTITIES } from '@proofplate/recipe-model';
+import { readNumber } from '../../../lib/read-number';
+import type { Measurement, MeasurementConditions, NewMeasurement } from './log.api';
+
+/** Quantities with the methods that can give them; numbers from photos are computed, not typed. */
+export const TYPED_METHODS: Readonly<Record<MeasurementQuantity, readonly MeasurementMethod[]>> = {
+  lightness: ['colorimeter'],
+  a: ['colorimeter'],
+  b: ['colorimeter'],
+  chroma: ['colorimeter'],
+  'hue-angle': ['colorimeter'],
+  contrast: ['colorimeter', 'verifier'],
+  'delta-e-2000': ['colorimeter'],
+  evenness: ['colorimeter', 'microscope'],
+  depth: ['profilometer', 'microscope', 'calliper', 'manual'],
+  'roughness-ra': ['profilometer', 'microscope'],
+  'roughness-rz': ['profilometer', 'microscope'],
+  'line-width': ['microscope', 'profilometer', 'calliper'],
+  'code-grade': ['verifier'],
+  'tape-class': ['manual'],
+  'wipe-test': ['manual'],
+  'salt-spray-hours': ['manual'],
+};
+
+export const ILLUMINANTS = ['D65', 'D50', 'A', 'C', 'F2', 'F11'] as const;
+export const OBSERVERS = ['2°', '10°'] as const;
+export const GEOMETRIES = ['45/0', '0/45', 'd/8 gloss included', 'd/8 gloss excluded'] as const;
+const GRADES = ['A', 'B', 'C', 'D', 'F'] as const;
+/** Widest limits of all quantities; the server knows each one’s own. */
+const LARGEST = 1e9;
+
+export type Grade = (typeof GRADES)[number];
+export type ReadResult = { value: number } | { grade: Grade } | { message: string };
+
+/** Reads what was typed or pasted for one cell; a code grade may be its letter. */
+export function readResult(text: string, quantity: MeasurementQuantity, locale: string): ReadResult {
+  const letter = GRADES.find((grade) => grade === text.trim().toUpperCase());
+  if (quantity === 'code-grade' && letter !== undefined) return { grade: letter };
+  const { label, unit } = QUANTITIES[quantity];
+  return readNumber(text, { what: label, unit: unit === '1' ? '' : unit, least: -LARGEST, most: LARGEST }, locale);
+}
+
+export type MeasuringCommon = {
+  quantity: MeasurementQuantity;
+  method: MeasurementMethod;
+  instrument: string;
+  methodDetail: MeasurementConditions;
+  uncertainty: number | undefined;
+  /** Given: each value takes the place of the one that counts so far. */
+  replaceReason: string | undefined;
+};
+
+/** Measurements to send, with the cell that each belongs to, in the order of the cells. */
+export function measurementsOf(
+  typed: ReadonlyMap<string, string>,
+  common: MeasuringCommon,
+  { earlier, locale }: { earlier: readonly Measurement[]; locale: string },
+): NewMeasurement[] {
+  const { quantity, method, instrument, methodDetail, uncertainty, replaceReason } = common;
+  return [...typed].flatMap(([cellId, text]) => {
+    if (text.trim() === '') return [];
+    const read = readResult(text, quantity, locale);
+    if ('message' in read) return [];
+    const before = replaceReason === undefined ? undefined : counting(earlier, cellId, quantity);
+    return [
+      {
+        cellId,
+        quantity,
+        method,
+        ...read,
+        ...(instrument === '' ? {} : { instrument }),
+        ...(Object.keys(methodDetail).length === 0 ? {} : { methodDetail }),
+        ...(uncertainty === undefined ? {} : { uncertainty }),
+        ...(before === undefined ? {} : { supersedesId: before.id, reason: replaceReason }),
+      },
+    ];
+  });
+}
+
+export function counting(rows: readonly Measurement[], cellId: string, quantity: MeasurementQuantity): Measurement | undefined {
+  return rows.find((row) => row.counts && row.cellId === cellId && row.quantity === quantity);
+}
+
+/** Messages of a refused batch by cell: "#/measurements/3/value" is the fourth that was sent. */
+export function refusedCells(
+  errors: readonly { pointer: string; detail: string }[],
+  sent: readonly NewMeasurement[],
+): { cells: ReadonlyMap<string, string>; others: readonly string[] } {
+  const cells = new Map<string, string>();
+  const others = new Set<string>();
+  for (const { pointer, detail } of errors) {
+    const [, index, field = ''] = /^#\/measurements\/(\d+)\/(.*)$/.exec(pointer) ?? [];
+    const cellId = index === undefined ? undefined : sent[Number(index)]?.cellId;
+    if (cellId === undefined || /^(?:method|instrument|unit|uncertainty|reason)/.test(field)) others.add(detail);
+    else cells.set(cellId, detail);
+  }
+  return { cells, others: [...others] };
+}
