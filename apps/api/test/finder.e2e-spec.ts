@@ -1,5 +1,5 @@
 import { randomUUID } from 'node:crypto';
-import type { FinderDto, FoundListDto } from '../src/finder/dto/finder.dto';
+import type { FinderDto, FoundListDto, SheetCodeDto } from '../src/finder/dto/finder.dto';
 import { createTestApp, type TestApp } from './support/app';
 import { type ApprovedRecipe, makeRecipe, withdrawRecipe } from './support/approved-recipe';
 import {
@@ -237,6 +237,22 @@ describe('the finder refuses', () => {
   it('what is no id and too many words', async () => {
     const answer = await ask({ machineId: 'bench', words: 'x'.repeat(200) });
     expect(pointersOf(expectProblem(answer, 422, 'invalid-fields'))).toEqual(['#/machineId', '#/words']);
+  });
+});
+
+describe('GET /api/finder/sheet-code', () => {
+  const code = (query: string, headers: Record<string, string> = shop.trainee.headers) =>
+    test.app.inject({ url: `/api/finder/sheet-code${query}`, headers });
+
+  it('carries the address at the machine that shows what holds now', async () => {
+    const { url, modules } = (await code(`?recipeId=${dial.recipeId}`)).json<SheetCodeDto>();
+    expect(url).toMatch(new RegExp(`/machine\\?recipe=${dial.recipeId}$`));
+    expect(modules[0]).toMatch(/^1111111/);
+  });
+
+  it('needs a session and a recipe', async () => {
+    expectProblem(await code(`?recipeId=${dial.recipeId}`, {}), 401, 'not-signed-in');
+    expect(pointersOf(expectProblem(await code(''), 422, 'invalid-fields'))).toEqual(['#/recipeId']);
   });
 });
 

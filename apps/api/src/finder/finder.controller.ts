@@ -2,8 +2,8 @@ import { Controller, Get, Query } from '@nestjs/common';
 import { ApiBearerAuth, ApiOkResponse, ApiOperation, ApiTags } from '@nestjs/swagger';
 import type { Actor } from '../common/actor';
 import { CurrentMember } from '../common/decorators/current-member.decorator';
-import { FinderDto, FoundListDto } from './dto/finder.dto';
-import { FinderQuery, FindQuery } from './dto/finder.query.dto';
+import { FinderDto, FoundListDto, SheetCodeDto } from './dto/finder.dto';
+import { FinderQuery, FindQuery, SheetCodeQuery } from './dto/finder.query.dto';
 import { FinderService } from './finder.service';
 import { RecordSearchService } from './record-search.service';
 
@@ -21,6 +21,13 @@ export class FinderController {
   @ApiOkResponse({ type: FinderDto })
   find(@CurrentMember() actor: Actor, @Query() query: FinderQuery) {
     return this.finder.find(actor, query);
+  }
+
+  @Get('finder/sheet-code')
+  @ApiOperation({ summary: 'Code on a set-up sheet that opens what holds when it is scanned' })
+  @ApiOkResponse({ type: SheetCodeDto })
+  sheetCode(@Query() query: SheetCodeQuery) {
+    return this.finder.sheetCode(query.recipeId);
   }
 
   @Get('find')

@@ -2,17 +2,19 @@ import { Injectable } from '@nestjs/common';
 import { type Caution, MATERIAL_FAMILIES, SOURCE_KIND_LABELS } from '@proofplate/recipe-model';
 import type { Actor } from '../common/actor';
 import { NotFoundError } from '../common/errors/domain-error';
+import { Env } from '../config/env.validation';
 import { type Tx, UnitOfWork } from '../database/unit-of-work';
 import { orderedCautionsFor } from '../materials/caution-order';
 import { PhotosService } from '../photos/photos.service';
 import { whyNotCarriedOver } from './carry-over';
-import type { FinderCautionDto, FinderDto, NearMissDto, WithdrawnRecipeDto } from './dto/finder.dto';
+import type { FinderCautionDto, FinderDto, NearMissDto, SheetCodeDto, WithdrawnRecipeDto } from './dto/finder.dto';
 import type { FinderQuery } from './dto/finder.query.dto';
 import { type NameOf, toAnswer, toFinderRecipe, toReferenceCell, type UrlsOf } from './finder.mapper';
 import { type CatalogueRow, FinderRepository, familyOf, type RecipeRow, sourceKindOf } from './finder.repository';
 import { type AnswerRow, FinderAnswersRepository } from './finder-answers.repository';
 import { type Candidate, fillSlots, fits, type Sentence, SLOT_KEYS, type SlotChoice, type SlotItem } from './finder-slots';
 import { type NearMiss, nearMisses } from './near-misses';
+import { qrModules } from './sheet-code';
 
 const MOST_MATCHES = 12;
 
@@ -32,7 +34,15 @@ export class FinderService {
     private readonly finder: FinderRepository,
     private readonly answers: FinderAnswersRepository,
     private readonly photos: PhotosService,
+    private readonly env: Env,
   ) {}
+
+  /** The code only carries the address; who scans it needs a session of the shop to see anything. */
+  sheetCode(recipeId: string): SheetCodeDto {
+    const url = new URL('/machine', this.env.PUBLIC_ORIGIN);
+    url.searchParams.set('recipe', recipeId);
+    return { url: url.href, modules: qrModules(url.href) };
+  }
 
   /** Completes the sentence: options with counts, and the one approved setting or what comes nearest. At most four queries. */
   async find(actor: Actor, query: FinderQuery): Promise<FinderDto> {

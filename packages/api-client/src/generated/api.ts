@@ -1841,6 +1841,23 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/api/finder/sheet-code": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Code on a set-up sheet that opens what holds when it is scanned */
+        get: operations["FinderController_sheetCode"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/api/find": {
         parameters: {
             query?: never;
@@ -6295,6 +6312,12 @@ export interface components {
             withdrawn: components["schemas"]["WithdrawnRecipeDto"][];
             /** @description Where nothing fits: what comes nearest */
             nearMisses: components["schemas"]["NearMissDto"][];
+        };
+        SheetCodeDto: {
+            /** @description Address that the code opens */
+            url: string;
+            /** @description Rows of the QR symbol, 1 = dark, without quiet zone */
+            modules: string[];
         };
         FoundDto: {
             /**
@@ -11744,6 +11767,37 @@ export interface operations {
                 };
                 content: {
                     "application/json": components["schemas"]["FinderDto"];
+                };
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    FinderController_sheetCode: {
+        parameters: {
+            query: {
+                /** @description Recipe of the sheet */
+                recipeId: string;
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["SheetCodeDto"];
                 };
             };
             /** @description A problem, as docs/problems.md lists them */

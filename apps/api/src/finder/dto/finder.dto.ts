@@ -155,6 +155,12 @@ export class FinderDto {
   @ApiProperty({ type: [NearMissDto], description: 'Where nothing fits: what comes nearest' }) nearMisses: NearMissDto[];
 }
 
+/** What is printed on a set-up sheet, so that scanning it opens what holds now. */
+export class SheetCodeDto {
+  @ApiProperty({ description: 'Address that the code opens' }) url: string;
+  @ApiProperty({ type: [String], description: 'Rows of the QR symbol, 1 = dark, without quiet zone' }) modules: string[];
+}
+
 export class FoundDto {
   @ApiProperty({ enum: ['recipe', 'coupon', 'material', 'machine'], description: 'Kind of record' })
   kind: 'recipe' | 'coupon' | 'material' | 'machine';

@@ -1,4 +1,4 @@
-import { ApiPropertyOptional } from '@nestjs/swagger';
+import { ApiProperty, ApiPropertyOptional } from '@nestjs/swagger';
 import { IsOptional, IsUUID } from 'class-validator';
 import { RequiredText, TrimmedText } from '../../common/decorators/trimmed-text.decorator';
 
@@ -40,6 +40,12 @@ export class FinderQuery {
   @IsOptional()
   @TrimmedText(MAX_WORDS_LENGTH)
   words?: string;
+}
+
+export class SheetCodeQuery {
+  @ApiProperty({ format: 'uuid', description: 'Recipe of the sheet' })
+  @IsUUID('all', { message: 'This does not name a recipe.' })
+  recipeId: string;
 }
 
 export class FindQuery {
