@@ -16,7 +16,6 @@ import {
   changeDraft,
   cite,
   draftFromCell,
-  FOR_CUSTOMER,
   makeProvedCoupon,
   makeProvedDraft,
   makeRecipeShop,
@@ -197,7 +196,7 @@ describe('PATCH /api/revisions/:id', () => {
   });
 
   it('refuses every edit of a submitted revision and carries its state', async () => {
-    const submitted = await makeSubmitted(test, shop, { scope: FOR_CUSTOMER('One') });
+    const submitted = await makeSubmitted(test, shop);
     const on = { id: submitted.id, version: submitted.version };
     expect(expectProblem(await patch({ reason: 'Late' }, on), 409, 'revision-state').current).toMatchObject({ state: 'in_review' });
     const cells = { basisCellIds: [], confirmationCellIds: [] };
@@ -359,7 +358,7 @@ describe('GET /api/revisions/compare', () => {
 
 describe('GET /api/revisions/:id', () => {
   it('tells what changed against the approved revision, with class and size', async () => {
-    const proved = await makeProvedDraft(test, shop, { scope: FOR_CUSTOMER('Two') });
+    const proved = await makeProvedDraft(test, shop);
     await asSuperuser(test, async (sql) => {
       await sql`update revision set state = 'in_review', number = 1, content_hash = 'x' where id = ${proved.id}`;
       await sql`update revision set state = 'approved', approved_at = now() where id = ${proved.id}`;

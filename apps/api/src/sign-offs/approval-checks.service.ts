@@ -1,4 +1,5 @@
 import { Injectable } from '@nestjs/common';
+import { roleAtLeast } from '@proofplate/recipe-model';
 import type { Actor } from '../common/actor';
 import { type Tx, UnitOfWork } from '../database/unit-of-work';
 import { CalibrationsService } from '../machines/calibrations.service';
@@ -26,13 +27,14 @@ export class ApprovalChecksService {
     private readonly signOffs: SignOffsRepository,
   ) {}
 
-  /** Every check for whoever looks: those of the revision and those of the signer. */
+  /** Every check for whoever looks: those of the revision and, for whoever could sign, those of the signer. */
   async get(actor: Actor, id: string): Promise<ApprovalChecksDto> {
     return this.unitOfWork.read(actor, async (tx) => {
       const weighed = await this.weigh(tx, actor.shopId, id);
       const { record, confirmation, facts } = weighed;
       const signer = await this.signerOf(tx, actor);
-      const checks = [...weighed.items, ...signerChecks(signer, toSign(record), facts.policy.authorMaySign)];
+      const leads = roleAtLeast(actor.role, 'lead');
+      const checks = [...weighed.items, ...(leads ? signerChecks(signer, toSign(record), facts.policy.authorMaySign) : [])];
       return {
         items: inReadingOrder(checks),
         confirmation: {
@@ -44,7 +46,7 @@ export class ApprovalChecksService {
           spreads: [...confirmation.spreads],
         },
         maySubmit: record.revision.state === 'draft' && !checks.some(blocksSubmit),
-        mayApprove: record.revision.state === 'in_review' && !checks.some(blocksApproval),
+        mayApprove: leads && record.revision.state === 'in_review' && !checks.some(blocksApproval),
         contentHash: hashOfRecord(record),
       };
     });
@@ -66,8 +68,8 @@ export class ApprovalChecksService {
     return { ...revisionChecks(facts), record, facts };
   }
 
-  async signerOf(tx: Tx, { shopId, memberId, role }: Actor): Promise<Signer> {
-    return { memberId, role, signsFor: await this.signOffs.signsFor(tx, shopId, memberId) };
+  async signerOf(tx: Tx, { shopId, memberId }: Actor): Promise<Signer> {
+    return { memberId, signsFor: await this.signOffs.signsFor(tx, shopId, memberId) };
   }
 
   private async currentOf(tx: Tx, shopId: string, { ladder, revision }: RevisionRecord): Promise<ApprovalFacts['current']> {

@@ -1,10 +1,9 @@
-import { type Role, roleAtLeast, type SourceKind } from '@proofplate/recipe-model';
+import type { SourceKind } from '@proofplate/recipe-model';
 import { type ApprovalCheck, check } from '../recipes/approval-check';
 
 export type Process = { readonly effectId: string; readonly sourceKind: string };
 export type Signer = {
   readonly memberId: string;
-  readonly role: Role;
   /** Processes that this lead may sign for; null: all of them. */
   readonly signsFor: readonly Process[] | null;
 };
@@ -22,11 +21,6 @@ export const signsForProcess = ({ signsFor }: Pick<Signer, 'signsFor'>, { effect
 export function signerChecks(signer: Signer, revision: ToSign, authorMaySign: boolean): ApprovalCheck[] {
   const isOwn = revision.createdBy === signer.memberId;
   return [
-    check('signer-role', 'You may sign', {
-      passes: roleAtLeast(signer.role, 'lead'),
-      found: roleAtLeast(signer.role, 'lead') ? 'You are a lead or owner here.' : 'Leads and owners sign.',
-      blocks: 'approve',
-    }),
     check('signer-not-author', 'Not your own', {
       passes: maySignOwn(signer, revision, authorMaySign),
       found: isOwn

@@ -1,9 +1,10 @@
+import { randomUUID } from 'node:crypto';
 import type { CouponDto } from '../../src/coupons/dto/coupon.dto';
 import type { CalibrationDto } from '../../src/machines/dto/calibration.dto';
 import type { RecipeRevisionDto } from '../../src/recipes/dto/recipe-revision.dto';
 import type { TestApp } from './app';
 import { makeCoupon, makePlanningShop, type PlanningShop } from './coupons';
-import { created, editing } from './equipment';
+import { created } from './equipment';
 import type { TestMember } from './factories';
 import { newKey } from './idempotency';
 import { inspectionOf, putPhoto } from './inspections';
@@ -138,18 +139,30 @@ export async function changeDraft(test: TestApp, member: TestMember, draft: Reci
   return answer.json<RecipeRevisionDto>();
 }
 
-/** `scope` keeps a second recipe apart from the first of the same work. */
-type DraftGiven = { readonly title?: string; readonly address?: string; readonly scope?: Given };
+type DraftGiven = { readonly title?: string; readonly scope?: Given };
 export const FOR_CUSTOMER = (name: string) => ({ featureKind: 'filled-area', customerSpecification: name });
 
-/** A draft from a cell of a sealed coupon, proved again on a later one: nothing is missing. */
+type Proof = { readonly coupon: CouponDto; readonly proofCellIds: readonly string[] };
+const proofs = new Map<string, Proof>();
+
+/** One coupon to draft from and one that proves its cell B1 again, made once for a shop: many drafts may cite them. */
+async function proofOf(test: TestApp, shop: PlanningShop): Promise<Proof> {
+  const known = proofs.get(shop.shop.id);
+  if (known !== undefined) return known;
+  const coupon = await makeProvedCoupon(test, shop);
+  const proof = await proveAgain(test, shop, await draftFromCell(test, shop, coupon));
+  const made = { coupon, proofCellIds: proof.cells.map(({ id }) => id) };
+  proofs.set(shop.shop.id, made);
+  return made;
+}
+
+/** A draft from a cell of a sealed coupon, proved again on a later one: nothing is missing. Each covers parts of its own unless a scope is given. */
 export async function makeProvedDraft(test: TestApp, shop: PlanningShop, given: DraftGiven = {}): Promise<RecipeRevisionDto> {
-  const { scope, ...first } = given;
-  const drafted = await draftFromCell(test, shop, await makeProvedCoupon(test, shop), first);
-  const draft = scope === undefined ? drafted : await changeDraft(test, shop.operator, drafted, { scope });
-  const proof = await proveAgain(test, shop, draft);
+  const { scope = FOR_CUSTOMER(randomUUID()), ...first } = given;
+  const { coupon, proofCellIds } = await proofOf(test, shop);
+  const draft = await changeDraft(test, shop.operator, await draftFromCell(test, shop, coupon, first), { scope });
   const basis = draft.evidence.basis.map(({ cellId }) => cellId);
-  return cite(test, shop.operator, draft, { basis, confirmation: proof.cells.map(({ id }) => id) });
+  return cite(test, shop.operator, draft, { basis, confirmation: proofCellIds });
 }
 
 export const careIds = ({ cautions }: RecipeRevisionDto) => cautions.filter(({ level }) => level === 'care').map(({ id }) => id);
@@ -188,5 +201,3 @@ export async function makeApproved(test: TestApp, shop: PlanningShop, given: Dra
   if (answer.statusCode !== 200) throw new Error(`approving answered ${answer.statusCode}: ${answer.body}`);
   return answer.json<RecipeRevisionDto>();
 }
-
-export { editing };
