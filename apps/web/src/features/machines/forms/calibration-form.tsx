@@ -1,4 +1,5 @@
 import { chakra } from '@chakra-ui/react';
+import { type Control, useWatch } from 'react-hook-form';
 import { Button } from '../../../components/button';
 import { NumberField, TextAreaField, TextField } from '../../../components/field';
 import { Form, useSummaryForm } from '../../../components/form';
@@ -104,13 +105,14 @@ export function CalibrationForm({ machine, onAdded }: { machine: Machine; onAdde
           Add the calibration
         </Button>
       </Form>
-      <CurvePreview text={form.watch('points')} locale={locale} />
+      <CurvePreview control={form.control} locale={locale} />
     </chakra.div>
   );
 }
 
 /** The curve that the typed table makes, or what keeps it from being one. */
-function CurvePreview({ text, locale }: { text: string; locale: string }) {
+function CurvePreview({ control, locale }: { control: Control<Values>; locale: string }) {
+  const text = useWatch({ control, name: 'points' });
   const { points, message } = readReadings(text, locale);
   return (
     <chakra.section aria-labelledby="curve-title" position={{ md: 'sticky' }} top="4" order={{ base: 0, md: 1 }}>

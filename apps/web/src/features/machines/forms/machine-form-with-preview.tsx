@@ -1,13 +1,13 @@
 import { chakra } from '@chakra-ui/react';
+import { type Control, useWatch } from 'react-hook-form';
 import { useSession } from '../../../lib/session';
 import { PanelPreview } from '../components/panel-preview';
 import { panelField } from './machine-body';
 import { MachineForm, type MachineFormProps } from './machine-form';
+import type { MachineValues } from './machine-values';
 
 /** The form with the setting card that its panel makes beside it, as it is typed. */
 export function MachineFormWithPreview(props: MachineFormProps) {
-  const { locale } = useSession().shop;
-  const fields = props.form.watch('panel.fields').flatMap((row) => panelField(row, locale) ?? []);
   return (
     <chakra.div
       display="grid"
@@ -20,8 +20,15 @@ export function MachineFormWithPreview(props: MachineFormProps) {
         <chakra.h2 id="preview-title" mb="2">
           As a setting card
         </chakra.h2>
-        <PanelPreview panel={{ fields }} />
+        <LivePreview control={props.form.control} />
       </chakra.section>
     </chakra.div>
   );
+}
+
+/** Listens on its own, so that a key pressed in the form draws this card and not the whole form. */
+function LivePreview({ control }: { control: Control<MachineValues> }) {
+  const { locale } = useSession().shop;
+  const rows = useWatch({ control, name: 'panel.fields' });
+  return <PanelPreview panel={{ fields: rows.flatMap((row) => panelField(row, locale) ?? []) }} />;
 }

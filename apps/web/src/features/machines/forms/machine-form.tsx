@@ -8,7 +8,7 @@ import { messageOf, readOptionalNumber } from '../../../lib/read-number';
 import { useSession } from '../../../lib/session';
 import type { LensChoice, MachineBody } from '../machines.api';
 import { machineBody } from './machine-body';
-import { machineLabels } from './machine-labels';
+import { MACHINE_LABELS } from './machine-labels';
 import { WARM_UP_RULE } from './machine-rules';
 import type { MachineValues } from './machine-values';
 import { PanelFields } from './panel-fields';
@@ -25,9 +25,8 @@ export type MachineFormProps = {
 export function MachineForm({ form, lenses, submitLabel, onSubmit }: MachineFormProps) {
   const { locale } = useSession().shop;
   const { errors, isSubmitting } = form.formState;
-  const rows = form.watch('panel.fields').length;
   return (
-    <Form form={form} labels={machineLabels(rows)} onSubmit={(values, submit) => onSubmit(machineBody(values, locale), submit)}>
+    <Form form={form} labels={MACHINE_LABELS} onSubmit={(values, submit) => onSubmit(machineBody(values, locale), submit)}>
       <TextField
         label="Name"
         help="As people on the floor call it."

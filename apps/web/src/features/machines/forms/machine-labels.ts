@@ -1,3 +1,4 @@
+import { PARAMETER_KEYS } from '@proofplate/recipe-model';
 import { HEAD_NUMBERS, SOURCE_NUMBERS } from './machine-rules';
 
 const FIXED: Readonly<Record<string, string>> = {
@@ -27,10 +28,9 @@ const ROW: Readonly<Record<string, string>> = {
   rangeHigh: '100 % is',
 };
 
-/** Names of all fields of the form, with as many rows as the panel has; the summary and refusals find the fields by them. */
-export function machineLabels(rowCount: number): Readonly<Record<string, string>> {
-  const rows = Array.from({ length: rowCount }, (_, index) =>
-    Object.entries(ROW).map(([key, words]) => [`panel.fields.${index}.${key}`, `Row ${index + 1}, ${words}`] as const),
-  );
-  return { ...FIXED, 'panel.fields': 'Panel', ...Object.fromEntries(rows.flat()) };
-}
+const ROWS = PARAMETER_KEYS.map((_, index) =>
+  Object.entries(ROW).map(([key, words]) => [`panel.fields.${index}.${key}`, `Row ${index + 1}, ${words}`] as const),
+);
+
+/** Names of all fields that the form can have; the summary and refusals find the fields by them. */
+export const MACHINE_LABELS: Readonly<Record<string, string>> = { ...FIXED, 'panel.fields': 'Panel', ...Object.fromEntries(ROWS.flat()) };

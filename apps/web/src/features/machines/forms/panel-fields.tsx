@@ -1,7 +1,7 @@
 import { chakra, Flex } from '@chakra-ui/react';
 import { PARAMETER_KEYS, PARAMETERS } from '@proofplate/recipe-model';
 import { useRef } from 'react';
-import { type UseFormReturn, useFieldArray } from 'react-hook-form';
+import { type UseFormReturn, useFieldArray, useWatch } from 'react-hook-form';
 import { Button } from '../../../components/button';
 import { fieldId } from '../../../components/field';
 import { messageAt } from '../../../components/form';
@@ -19,7 +19,7 @@ export function PanelFields({ form }: { form: UseFormReturn<MachineValues> }) {
     rules: { validate: (rows) => rows.length > 0 || 'Add at least one field that the panel shows.' },
   });
   const list = useRef<HTMLOListElement>(null);
-  const taken = form.watch('panel.fields').map(({ parameter }) => parameter);
+  const taken = useWatch({ control: form.control, name: fields.map((_, index) => `panel.fields.${index}.parameter` as const) });
   const free = PARAMETER_KEYS.find((key) => !taken.includes(key));
   const handleMove = (from: number, to: number) => {
     move(from, to);

@@ -2,7 +2,7 @@ import { chakra } from '@chakra-ui/react';
 import { PANEL_UNITS } from '@proofplate/physics';
 import { isCodeOf, PARAMETER_KEYS, PARAMETERS, type ParameterKey } from '@proofplate/recipe-model';
 import type { ReactNode } from 'react';
-import type { UseFormReturn } from 'react-hook-form';
+import { type UseFormReturn, useWatch } from 'react-hook-form';
 import { NumberField, SelectField, TextField } from '../../../components/field';
 import { messageAt } from '../../../components/form';
 import { messageOf, type NumberRule, readNumber, readOptionalNumber } from '../../../lib/read-number';
@@ -23,7 +23,7 @@ type RowProps = { form: UseFormReturn<MachineValues>; index: number; taken: read
 
 export function PanelRow({ form, index, taken }: RowProps) {
   const { locale } = useSession().shop;
-  const row = form.watch(`panel.fields.${index}`);
+  const row = useRowShape(form, index);
   const { errors } = form.formState;
   const at = <Key extends string>(key: Key) => `panel.fields.${index}.${key}` as const;
   const handleParameter = (next: string) => {
@@ -80,9 +80,16 @@ export function PanelRow({ form, index, taken }: RowProps) {
   );
 }
 
+/** What decides which fields the row has; its numbers may be typed without drawing it anew. */
+function useRowShape({ control }: UseFormReturn<MachineValues>, index: number) {
+  const at = <Key extends string>(key: Key) => `panel.fields.${index}.${key}` as const;
+  const [parameter, unit, choices] = useWatch({ control, name: [at('parameter'), at('unit'), at('choices')] });
+  return { parameter, unit, choices };
+}
+
 /** What a percentage is a share of. */
 function RangeEnds({ form, index }: Omit<RowProps, 'taken'>) {
-  const { parameter, unit } = form.watch(`panel.fields.${index}`);
+  const { parameter, unit } = useRowShape(form, index);
   const hasLow = unit === 'percentFromMinimum';
   const rule = rangeNumberRule('The end of the range', parameter, unit);
   return (

@@ -1,6 +1,6 @@
 import { chakra } from '@chakra-ui/react';
 import { emptyPanelFor, isCodeOf, SOURCE_KIND_LABELS, SOURCE_KINDS } from '@proofplate/recipe-model';
-import type { UseFormReturn } from 'react-hook-form';
+import { type UseFormReturn, useWatch } from 'react-hook-form';
 import { NumberField, SelectField, TextAreaField, TextField } from '../../../components/field';
 import { messageAt } from '../../../components/form';
 import { formatUnit } from '../../../lib/format';
@@ -15,7 +15,7 @@ type FormProps = { form: UseFormReturn<MachineValues> };
 /** What the source and the scan head are. Fields that the kind of source does not have are left out. */
 export function SourceFields({ form }: FormProps) {
   const { locale } = useSession().shop;
-  const sourceKind = form.watch('physical.sourceKind');
+  const sourceKind = useWatch({ control: form.control, name: 'physical.sourceKind' });
   const { errors, dirtyFields } = form.formState;
   const handleKind = (next: string) => {
     if (!isCodeOf(SOURCE_KIND_LABELS, next)) return;
