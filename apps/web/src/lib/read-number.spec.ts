@@ -51,4 +51,9 @@ describe('typedNumber', () => {
     expect(typedNumber(12345.678, 'en-GB')).toBe('12345.678');
     expect(typedNumber(null, 'en-GB')).toBe('');
   });
+
+  it.each([1.125, 12.5, 1500, -6.417, 0.025, 163])('writes %d so that it is read back as itself', (value) => {
+    const wide: NumberRule = { what: 'The value', unit: 'mm', least: -1e9, most: 1e9 };
+    for (const locale of ['en-GB', 'de-DE']) expect(readNumber(typedNumber(value, locale), wide, locale)).toEqual({ value });
+  });
 });

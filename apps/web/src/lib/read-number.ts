@@ -42,9 +42,14 @@ export function messageOf(read: { value: unknown } | { message: string }): strin
   return 'message' in read ? read.message : true;
 }
 
-/** A stored number as it is put into a field: every digit, the shop's decimal sign, no grouping. */
+/** Exactly three digits behind the sign can be a group of thousands too; one more zero leaves one reading. */
+const TWO_READINGS = /^-?[1-9]\d*[.,]\d{3}$/;
+
+/** A stored number as it is put into a field: every digit, the shop's decimal sign, no grouping, and read back as itself. */
 export function typedNumber(value: number | null | undefined, locale: string): string {
-  return value === null || value === undefined ? '' : String(value).replace('.', decimalSignOf(locale));
+  if (value === null || value === undefined) return '';
+  const text = String(value).replace('.', decimalSignOf(locale));
+  return TWO_READINGS.test(text) ? `${text}0` : text;
 }
 
 function withoutOwnUnit(text: string, unit: string): string {

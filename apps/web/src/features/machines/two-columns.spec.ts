@@ -36,7 +36,7 @@ describe('readTwoColumns', () => {
 describe('twoColumnText', () => {
   it('is read back to the same pairs', () => {
     const rows = [
-      [4, 0.125],
+      [4, 1.125],
       [200, 1],
     ] as const;
     expect(readTwoColumns(twoColumnText(rows, 'de-DE'), 'de-DE')).toEqual({ rows });

@@ -1,5 +1,5 @@
 import { parseTypedNumber } from '@proofplate/physics';
-import { decimalSignOf } from '../../lib/read-number';
+import { decimalSignOf, typedNumber } from '../../lib/read-number';
 
 export type TwoColumns = { rows: readonly (readonly [number, number])[] } | { message: string };
 
@@ -31,7 +31,7 @@ export function readTwoColumns(text: string, locale: string): TwoColumns {
 
 /** The pair as text, as it is shown again in a field. */
 export const twoColumnText = (rows: readonly (readonly [number, number])[], locale: string) =>
-  rows.map((row) => row.map((value) => String(value).replace('.', decimalSignOf(locale))).join('   ')).join('\n');
+  rows.map((row) => row.map((value) => typedNumber(value, locale)).join('   ')).join('\n');
 
 function cellsOf(line: string): string[] {
   // A lone unit is part of the number before it: "20 % 3.1 W" are two cells.
