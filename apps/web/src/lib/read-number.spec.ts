@@ -48,7 +48,7 @@ describe('readOptionalNumber', () => {
 describe('typedNumber', () => {
   it('keeps every digit with the decimal sign of the locale', () => {
     expect(typedNumber(0.0005, 'de-DE')).toBe('0,0005');
-    expect(typedNumber(12345.678, 'en-GB')).toBe('12345.678');
+    expect(typedNumber(12345.6789, 'en-GB')).toBe('12345.6789');
     expect(typedNumber(null, 'en-GB')).toBe('');
   });
 
