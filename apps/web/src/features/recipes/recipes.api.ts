@@ -1,6 +1,6 @@
 import type { components } from '@proofplate/api-client';
 import { useCallback } from 'react';
-import type { SWRResponse } from 'swr';
+import { mutate, type SWRResponse } from 'swr';
 import useSWRInfinite from 'swr/infinite';
 import { ProblemError, type Query, request } from '../../lib/api';
 import { revalidate, useRead } from '../../lib/swr';
@@ -121,9 +121,7 @@ export async function startDraft(recipeId: string, basedOnRevisionId: string | u
 
 /** Saves against the version that was read; the answer is the whole draft as it now stands. */
 export async function saveDraft(id: string, version: number, body: RevisionChange): Promise<Revision> {
-  const saved = await request<Revision>('patch', `${REVISIONS}/${id}`, { body, version });
-  await revalidate(`${REVISIONS}/${id}/`);
-  return saved;
+  return await keepAnswer(await request<Revision>('patch', `${REVISIONS}/${id}`, { body, version }));
 }
 
 export async function readRevision(id: string): Promise<Revision> {
@@ -133,9 +131,14 @@ export async function readRevision(id: string): Promise<Revision> {
 export type EvidenceChoice = { basisCellIds: readonly string[]; confirmationCellIds: readonly string[] };
 
 export async function setEvidence(id: string, version: number, body: EvidenceChoice): Promise<Revision> {
-  const saved = await request<Revision>('put', `${REVISIONS}/${id}/evidence`, { body, version });
-  await revalidate(`${REVISIONS}/${id}/`);
-  return saved;
+  return await keepAnswer(await request<Revision>('put', `${REVISIONS}/${id}/evidence`, { body, version }));
+}
+
+/** Takes over a draft as the server answered it, and reads again what is worked out from it. */
+export async function keepAnswer(revision: Revision): Promise<Revision> {
+  await mutate([`${REVISIONS}/${revision.id}`, undefined], revision, { revalidate: false });
+  void revalidate(`${REVISIONS}/${revision.id}/`);
+  return revision;
 }
 
 export async function discardDraft({ id, version }: Pick<Revision, 'id' | 'version'>): Promise<void> {

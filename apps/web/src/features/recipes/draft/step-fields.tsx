@@ -1,0 +1,142 @@
+import { chakra, Flex } from '@chakra-ui/react';
+import { PANEL_UNITS } from '@proofplate/physics';
+import { ASSIST_LABELS, FILL_LABELS, PARAMETERS, STEP_PURPOSE_LABELS } from '@proofplate/recipe-model';
+import { type UseFormReturn, useFieldArray } from 'react-hook-form';
+import { Button } from '../../../components/button';
+import { NumberField, SelectField } from '../../../components/field';
+import { PlusIcon } from '../../../components/icons';
+import { Panel } from '../../../components/page';
+import { DerivedNumbers } from '../components/derived-numbers';
+import type { Revision } from '../recipes.api';
+import { DELAYS, powerNote, stepTitle } from '../../../components/setting-rows';
+import { type DraftValues, emptyStep } from './draft-values';
+import { MoveButtons } from './move-buttons';
+import type { FieldMessages } from './read-draft';
+
+const MOST_STEPS = 20;
+
+type Editing = { form: UseFormReturn<DraftValues>; messages: FieldMessages; revision: Revision };
+
+/** Mark steps 1 … n, typed in the panel's units and order; what follows from each stands beside it. */
+export function StepFields(editing: Editing) {
+  const { form, revision } = editing;
+  const { fields, append, remove, swap } = useFieldArray({ control: form.control, name: 'steps' });
+  return (
+    <chakra.section aria-label="Mark steps" display="grid" gap="4">
+      {fields.map((field, index) => (
+        <OneStep
+          key={field.id}
+          {...editing}
+          index={index}
+          count={fields.length}
+          onRemove={() => remove(index)}
+          onMove={(by) => swap(index, index + by)}
+        />
+      ))}
+      <div>
+        <Button icon={<PlusIcon />} disabled={fields.length >= MOST_STEPS} onClick={() => append(emptyStep(revision.profile.panel.fields))}>
+          Add a mark step
+        </Button>
+      </div>
+    </chakra.section>
+  );
+}
+
+type OneStepProps = Editing & { index: number; count: number; onRemove: () => void; onMove: (by: -1 | 1) => void };
+
+function OneStep({ form, messages, revision, index, count, onRemove, onMove }: OneStepProps) {
+  const stored = revision.steps[index];
+  const name = `steps.${index}` as const;
+  const title = stored === undefined ? `Step ${index + 1}` : stepTitle(stored, index, count);
+  const numbers = revision.derived[index]?.numbers;
+  return (
+    <Panel px="5" py="4" aria-label={title}>
+      <Flex justify="space-between" align="center" gap="3" wrap="wrap" mb="3">
+        <h2>{title}</h2>
+        {count > 1 && (
+          <Flex gap="1">
+            <MoveButtons what={`step ${index + 1}`} isFirst={index === 0} isLast={index === count - 1} onMove={onMove} />
+            <Button kind="quiet" onClick={onRemove} aria-label={`Take out step ${index + 1}`}>
+              Take out
+            </Button>
+          </Flex>
+        )}
+      </Flex>
+      <chakra.div display="grid" gap="5" gridTemplateColumns={{ base: 'minmax(0, 1fr)', xl: 'minmax(0, 1fr) 300px' }}>
+        <chakra.div
+          display="grid"
+          gap="4"
+          gridTemplateColumns={{ base: 'minmax(0, 1fr)', sm: 'repeat(2, minmax(0, 1fr))' }}
+          alignContent="start"
+        >
+          <SelectField label="Purpose" options={optionsOf(STEP_PURPOSE_LABELS)} {...form.register(`${name}.purpose`)} />
+          {revision.profile.panel.fields.map((field) => (
+            <NumberField
+              key={field.parameter}
+              label={field.label}
+              unit={PANEL_UNITS[field.unit].symbol}
+              help={fieldHelp(field)}
+              error={messages[`${name}.values.${field.parameter}`]}
+              {...form.register(`${name}.values.${field.parameter}`)}
+            />
+          ))}
+          <SelectField label="Fill" options={optionsOf(FILL_LABELS)} {...form.register(`${name}.fill`)} />
+          <SelectField label="Assist" options={optionsOf(ASSIST_LABELS)} {...form.register(`${name}.assist`)} />
+          <NumberField
+            label="Pause after it"
+            unit="s"
+            isOptional
+            error={messages[`${name}.pauseAfterS`]}
+            {...form.register(`${name}.pauseAfterS`)}
+          />
+          <Delays form={form} messages={messages} name={name} />
+        </chakra.div>
+        <div>
+          {stored !== undefined && numbers !== undefined && (
+            <>
+              <h3>What follows from it</h3>
+              <chakra.p fontSize="sm" color="fg.muted">
+                {powerNote(stored.parameters.power)}
+              </chakra.p>
+              <DerivedNumbers numbers={numbers} label={`What follows from step ${index + 1}`} />
+            </>
+          )}
+        </div>
+      </chakra.div>
+    </Panel>
+  );
+}
+
+function Delays({ form, messages, name }: Pick<Editing, 'form' | 'messages'> & { name: `steps.${number}` }) {
+  return (
+    <chakra.details gridColumn={{ sm: '1 / -1' }}>
+      <chakra.summary py="2" color="brand.fg" cursor="pointer">
+        Delays of the scan head
+      </chakra.summary>
+      <chakra.div display="grid" gap="4" mt="2" gridTemplateColumns="repeat(2, minmax(0, 1fr))">
+        {DELAYS.map(({ key, label }) => (
+          <NumberField
+            key={key}
+            label={label}
+            unit="µs"
+            isOptional
+            error={messages[`${name}.delaysUs.${key}`]}
+            {...form.register(`${name}.delaysUs.${key}`)}
+          />
+        ))}
+      </chakra.div>
+    </chakra.details>
+  );
+}
+
+function optionsOf<Code extends string>(labels: Readonly<Record<Code, string>>): { value: string; label: string }[] {
+  return Object.entries<string>(labels).map(([value, label]) => ({ value, label }));
+}
+
+/** Limits of the panel; which way plus goes where that could be mistaken. */
+function fieldHelp({ parameter, minimum, maximum, step, unit }: Revision['profile']['panel']['fields'][number]): string | undefined {
+  if (parameter === 'focusOffsetMm') return PARAMETERS.focusOffsetMm.help;
+  const symbol = PANEL_UNITS[unit].symbol;
+  if (minimum === undefined || maximum === undefined) return undefined;
+  return `${minimum} to ${maximum} ${symbol}${step === undefined ? '' : `, in steps of ${step}`}`;
+}
