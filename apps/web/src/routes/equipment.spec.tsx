@@ -141,6 +141,17 @@ describe('adding a machine', () => {
     expect(await screen.findByRole('link', { name: 'Row 2, unit: Scan speed is not measured in this unit.' })).toBeVisible();
   });
 
+  it('lets untouched rows follow the kind of source, and keeps rows that somebody typed', async () => {
+    const { user } = open('/equipment/machines/new', {});
+    const labels = () => screen.getAllByLabelText('Label on the panel').map((field) => field.getAttribute('value') ?? '');
+    const rows = (kind: 'fibre-mopa' | 'diode') => emptyPanelFor(kind).fields.length;
+    await user.selectOptions(await screen.findByLabelText('Kind of source'), 'fibre-mopa');
+    expect(labels()).toHaveLength(rows('fibre-mopa'));
+    await user.type(screen.getAllByLabelText('Label on the panel')[0] ?? document.body, ' 2');
+    await user.selectOptions(screen.getByLabelText('Kind of source'), 'diode');
+    expect(labels()).toHaveLength(rows('fibre-mopa'));
+  });
+
   it('shows the panel as a setting card while it is typed', async () => {
     const { user } = open('/equipment/machines/new', {});
     const label = (await screen.findAllByLabelText('Label on the panel'))[0] ?? document.body;

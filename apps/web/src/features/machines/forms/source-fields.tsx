@@ -1,5 +1,6 @@
 import { chakra } from '@chakra-ui/react';
-import { emptyPanelFor, isCodeOf, SOURCE_KIND_LABELS, SOURCE_KINDS } from '@proofplate/recipe-model';
+import { emptyPanelFor, isCodeOf, SOURCE_KIND_LABELS, SOURCE_KINDS, type SourceKind } from '@proofplate/recipe-model';
+import { useRef } from 'react';
 import { type UseFormReturn, useWatch } from 'react-hook-form';
 import { NumberField, SelectField, TextAreaField, TextField } from '../../../components/field';
 import { messageAt } from '../../../components/form';
@@ -16,12 +17,15 @@ type FormProps = { form: UseFormReturn<MachineValues> };
 export function SourceFields({ form }: FormProps) {
   const { locale } = useSession().shop;
   const sourceKind = useWatch({ control: form.control, name: 'physical.sourceKind' });
-  const { errors, dirtyFields } = form.formState;
+  const { errors } = form.formState;
+  const kindBefore = useRef(sourceKind);
   const handleKind = (next: string) => {
     if (!isCodeOf(SOURCE_KIND_LABELS, next)) return;
-    form.setValue('physical.sourceKind', next, { shouldDirty: true });
+    const startOf = (kind: SourceKind) => typedPanel(emptyPanelFor(kind), locale);
     // Rows that nobody has touched follow the kind; a panel that somebody typed stays.
-    if (dirtyFields.panel === undefined && form.getValues('name') === '') form.setValue('panel', typedPanel(emptyPanelFor(next), locale));
+    const isUntouched = JSON.stringify(form.getValues('panel')) === JSON.stringify(startOf(kindBefore.current));
+    if (isUntouched) form.setValue('panel', startOf(next), { shouldDirty: true });
+    kindBefore.current = next;
   };
   return (
     <>
