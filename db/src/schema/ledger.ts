@@ -25,7 +25,9 @@ export const ledgerEvent = pgTable(
   (t) => [
     primaryKey({ columns: [t.shopId, t.seq] }),
     foreignKey({ columns: [t.shopId], foreignColumns: [shop.id], name: 'ledger_event_shop_fk' }),
-    index('ledger_event_subject').on(t.shopId, t.subjectType, t.subjectId),
+    index('ledger_event_subject').on(t.shopId, t.subjectId, t.seq),
+    index('ledger_event_code').on(t.shopId, t.subjectCode, t.seq),
+    index('ledger_event_actor').on(t.shopId, t.actorMemberId, t.seq),
     shopPolicy('ledger_event'),
   ],
 );

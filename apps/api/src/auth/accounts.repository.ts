@@ -32,6 +32,15 @@ export type Rotation = {
   readonly sessionVersion: number;
   readonly sealedSuccessor: string | null;
 };
+export type OpenSession = {
+  readonly id: string;
+  readonly shopId: string | null;
+  readonly userAgent: string | null;
+  /** ISO 8601, as the driver gives times of functions as text. */
+  readonly createdAt: string;
+  readonly lastSeenAt: string;
+  readonly expiresAt: string;
+};
 export type AccountEvent = {
   readonly personId?: string;
   readonly kind: string;
@@ -124,6 +133,29 @@ export class AccountsRepository {
 
   async endAllSessions(db: Executor, personId: string, because: string): Promise<void> {
     await db.execute(sql`select account_end_all_sessions(${personId}::uuid, ${because}::text)`);
+  }
+
+  /** Where the person is signed in, the latest use first. */
+  async openSessions(db: Executor, personId: string): Promise<OpenSession[]> {
+    return [
+      ...(await db.execute<OpenSession>(sql`select id, shop_id as "shopId", user_agent as "userAgent", created_at as "createdAt",
+        last_seen_at as "lastSeenAt", expires_at as "expiresAt" from account_live_sessions(${personId}::uuid)`)),
+    ];
+  }
+
+  /** False when the person has no such open session. */
+  async endOwnSession(db: Executor, personId: string, sessionId: string, because: string): Promise<boolean> {
+    const [row] = await db.execute<{ ended: boolean }>(
+      sql`select account_end_own_session(${personId}::uuid, ${sessionId}::uuid, ${because}::text) as ended`,
+    );
+    return row?.ended === true;
+  }
+
+  /** Sets the password and ends every session but one. */
+  async changePassword(db: Executor, change: { personId: string; passwordHash: string; keptSessionId: string }): Promise<void> {
+    await db.execute(
+      sql`select account_change_password(${change.personId}::uuid, ${change.passwordHash}::text, ${change.keptSessionId}::uuid)`,
+    );
   }
 
   async openReset(db: Executor, hash: string, personId: string, livesMinutes: number): Promise<void> {

@@ -15,6 +15,8 @@ import { AuthGuard } from './auth.guard';
 import { CredentialsService } from './credentials.service';
 import { PasswordHasher } from './hashing/password-hasher';
 import { LinksController } from './links.controller';
+import { OwnAccountController } from './own-account.controller';
+import { OwnAccountService } from './own-account.service';
 import { PasswordResetService } from './password-reset.service';
 import { PeopleService } from './people.service';
 import { RefreshCookie } from './refresh-cookie';
@@ -30,7 +32,7 @@ import { ThrottleService } from './throttle.service';
 @Global()
 @Module({
   imports: [JwtModule.register({}), LedgerModule, MailModule, MembersModule, ShopsModule],
-  controllers: [AuthController, LinksController, SessionController],
+  controllers: [AuthController, LinksController, OwnAccountController, SessionController],
   providers: [
     { provide: APP_GUARD, useClass: AuthGuard },
     { provide: APP_GUARD, useClass: RoleGuard },
@@ -39,6 +41,7 @@ import { ThrottleService } from './throttle.service';
     AccessTokens,
     AccountsRepository,
     CredentialsService,
+    OwnAccountService,
     PasswordHasher,
     PasswordResetService,
     PeopleService,
