@@ -2,12 +2,12 @@ import { Injectable } from '@nestjs/common';
 import { decodeCursor, type Page, pageOf } from '../common/pagination/page';
 import { beforeCommit } from '../database/before-commit';
 import { type Actor, type Tx, UnitOfWork } from '../database/unit-of-work';
-import { type LedgerEventDto, type LedgerVerificationDto } from './dto/ledger-event.dto';
+import { type LedgerActorDto, type LedgerEventDto, type LedgerVerificationDto } from './dto/ledger-event.dto';
 import { ListLedgerQuery } from './dto/list-ledger.query.dto';
 import { toLedgerEventDto } from './ledger.mapper';
-import { hiddenSubjectTypes } from './ledger.policy';
 import { type ChainHead, LedgerRepository } from './ledger.repository';
 import { type ChainFault, firstFault, GENESIS_HASH, linkEvent } from './ledger-chain';
+import { filterFor } from './ledger-filter';
 
 /** Who acts; without a member and a session it is the server itself. */
 export type LedgerActor = Pick<Actor, 'shopId' | 'printedName'> & Partial<Pick<Actor, 'memberId' | 'sessionId'>>;
@@ -67,13 +67,15 @@ export class LedgerService {
 
   async list(actor: Actor, query: ListLedgerQuery): Promise<Page<LedgerEventDto>> {
     const [beforeSeq] = decodeCursor(query.cursor, ['number']) ?? [];
-    const { subjectType, subjectId, action, actorMemberId } = query;
-    const filter = { subjectType, subjectId, action, actorMemberId, hiddenSubjectTypes: hiddenSubjectTypes(actor.role) };
-    const fromSeq = typeof beforeSeq === 'number' ? { beforeSeq } : {};
-    const rows = await this.unitOfWork.read(actor, (tx) =>
-      this.repository.list(tx, actor.shopId, { ...filter, ...fromSeq }, query.limit + 1),
-    );
+    const range = typeof beforeSeq === 'number' ? { beforeSeq } : {};
+    const search = { filter: filterFor(actor, query), range };
+    const rows = await this.unitOfWork.read(actor, (tx) => this.repository.list(tx, actor.shopId, search, query.limit + 1));
     return pageOf(rows, query.limit, { item: toLedgerEventDto, cursor: (row) => [row.seq] });
+  }
+
+  /** Names to search by. */
+  async actors(actor: Actor): Promise<LedgerActorDto[]> {
+    return this.unitOfWork.read(actor, (tx) => this.repository.actors(tx, actor.shopId));
   }
 
   /** Recomputes the whole chain of the shop and names the first event that does not fit. */

@@ -75,7 +75,7 @@ export class SignOffsService {
       const meaning = act === 'recall' ? 'recalled' : 'returned';
       const contentHash = revision.contentHash ?? hashOfRecord(record);
       const signature = { meaning, comment, contentHash, method: 'session', action: `revision.${meaning}` } as const;
-      await this.signatures.sign(tx, actor, record, { ...signature, after: { state: 'returned' } });
+      await this.signatures.sign(tx, actor, record, { ...signature, after: { state: 'returned', number: revision.number } });
       return this.revisions.getDto(tx, actor, id);
     });
   }

@@ -18,6 +18,16 @@ export class LedgerEventDto {
   @ApiProperty({ description: 'SHA-256(previousHash ‖ seq ‖ canonical body), hexadecimal' }) hash: string;
 }
 
+export class LedgerActorDto {
+  @ApiProperty({ format: 'uuid' }) memberId: string;
+  @ApiProperty({ description: 'Present printed name' }) name: string;
+  @ApiProperty({ description: 'False for somebody who has left the shop' }) isActive: boolean;
+}
+
+export class LedgerActorsDto {
+  @ApiProperty({ type: [LedgerActorDto], description: 'Everybody who is or was in the shop, by name' }) items: LedgerActorDto[];
+}
+
 export class LedgerPageDto extends PageOf(LedgerEventDto) {}
 
 export class LedgerVerificationDto {

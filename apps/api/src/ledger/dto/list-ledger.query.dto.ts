@@ -1,5 +1,7 @@
-import { ApiPropertyOptional } from '@nestjs/swagger';
-import { IsOptional, IsString, IsUUID, MaxLength } from 'class-validator';
+import { ApiPropertyOptional, OmitType } from '@nestjs/swagger';
+import { Transform } from 'class-transformer';
+import { IsOptional, IsString, IsUUID, Matches, MaxLength } from 'class-validator';
+import { IsDay } from '../../common/decorators/is-day';
 import { PageQuery } from '../../common/pagination/page';
 
 const MAX_NAME_LENGTH = 80;
@@ -16,6 +18,14 @@ export class ListLedgerQuery extends PageQuery {
   @IsUUID()
   subjectId?: string;
 
+  @ApiPropertyOptional({ description: 'Code that people read; C-0117 also finds its cells and photos', maxLength: MAX_NAME_LENGTH })
+  @IsOptional()
+  @Transform(({ value }) => (typeof value === 'string' ? value.trim().toUpperCase() : value))
+  @IsString()
+  @MaxLength(MAX_NAME_LENGTH)
+  @Matches(/^[A-Z]+-[0-9]+( [A-Z0-9]+)?$/, { message: 'Type a code such as R-0031, C-0117 or J-0007.' })
+  subjectCode?: string;
+
   @ApiPropertyOptional({ description: 'What happened, such as recipe.submitted' })
   @IsOptional()
   @IsString()
@@ -26,4 +36,17 @@ export class ListLedgerQuery extends PageQuery {
   @IsOptional()
   @IsUUID()
   actorMemberId?: string;
+
+  @ApiPropertyOptional({ format: 'date', description: 'First day, in the time zone of the shop' })
+  @IsOptional()
+  @IsDay()
+  fromDay?: string;
+
+  @ApiPropertyOptional({ format: 'date', description: 'Last day, in the time zone of the shop' })
+  @IsOptional()
+  @IsDay()
+  toDay?: string;
 }
+
+/** An export has all that match. */
+export class ExportLedgerQuery extends OmitType(ListLedgerQuery, ['limit', 'cursor']) {}
