@@ -1,4 +1,5 @@
 import { createTestApp, type TestApp } from './support/app';
+import { effectByKey, fillStarterContent } from './support/equipment';
 import { makeMember, makeShop, makeStaffedShop } from './support/factories';
 import { expectProblem, pointersOf } from './support/problem';
 
@@ -105,6 +106,31 @@ describe('PATCH /api/members/:id', () => {
   it('keeps the last owner an owner', async () => {
     const answer = await call('PATCH', `/api/members/${staff.owner.id}`, { ...staff.owner.headers, 'if-match': '"v1"' }, { role: 'lead' });
     expectProblem(answer, 409, 'last-owner');
+  });
+});
+
+describe('the processes that a lead signs for', () => {
+  const sign = (member: { id: string; headers: Record<string, string> }, version: number, signsFor: unknown) =>
+    call('PATCH', `/api/members/${member.id}`, { ...staff.owner.headers, 'if-match': `"v${version}"` }, { signsFor });
+
+  it('are named by an owner, kept in the ledger, and null again means all of them', async () => {
+    const lead = await makeMember(test, staff.shop, 'lead');
+    await fillStarterContent(test, staff.owner);
+    const effect = await effectByKey(test, staff.owner, 'dark-anneal');
+    const process = { effectId: effect.id, sourceKind: 'fibre-mopa' };
+    expect((await call('GET', `/api/members/${lead.id}`, staff.owner.headers)).json()).toMatchObject({ signsFor: null });
+    expect((await sign(lead, 1, [process])).json()).toMatchObject({ signsFor: [{ ...process, effectName: effect.name }], version: 2 });
+    const events = await call('GET', `/api/ledger?subjectId=${lead.id}&limit=1`, staff.owner.headers);
+    expect(events.json()).toMatchObject({ items: [{ before: { signsFor: null }, after: { signsFor: [process] } }] });
+    expect((await sign(lead, 2, null)).json()).toMatchObject({ signsFor: null });
+  });
+
+  it('are effects and sources that exist here', async () => {
+    const lead = await makeMember(test, staff.shop, 'lead');
+    const unknown = await sign(lead, 1, [{ effectId: staff.owner.id, sourceKind: 'co2' }]);
+    expect(pointersOf(expectProblem(unknown, 422, 'invalid-fields'))).toEqual(['#/signsFor/0/effectId']);
+    const noSource = await sign(lead, 1, [{ effectId: staff.owner.id, sourceKind: 'steam' }]);
+    expect(pointersOf(expectProblem(noSource, 422, 'invalid-fields'))).toEqual(['#/signsFor/0/sourceKind']);
   });
 });
 

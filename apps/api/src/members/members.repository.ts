@@ -3,10 +3,14 @@ import { schema, type Tx } from '@proofplate/db';
 import type { Role } from '@proofplate/recipe-model';
 import { and, eq, sql } from 'drizzle-orm';
 
-const { member } = schema;
+const { effect, member } = schema;
 
 export type MemberRow = typeof member.$inferSelect;
-export type MemberChange = { readonly role?: Role; readonly printedName?: string };
+export type MemberChange = {
+  readonly role?: Role;
+  readonly printedName?: string;
+  readonly signsFor?: { effectId: string; sourceKind: string }[] | null;
+};
 export type NewMember = {
   readonly id: string;
   readonly shopId: string;
@@ -91,6 +95,12 @@ export class MembersRepository {
   async addresses(tx: Tx): Promise<ReadonlyMap<string, string>> {
     const rows = await tx.execute<{ member_id: string; email: string }>(sql`select member_id, email from account_addresses_of_shop()`);
     return new Map(rows.map((row) => [row.member_id, row.email]));
+  }
+
+  /** Effects of the shop by id, archived ones included: somebody may still be named for them. */
+  async effectNames(tx: Tx, shopId: string): Promise<ReadonlyMap<string, string>> {
+    const rows = await tx.select({ id: effect.id, name: effect.name }).from(effect).where(eq(effect.shopId, shopId));
+    return new Map(rows.map(({ id, name }) => [id, name]));
   }
 
   async endSessions(tx: Tx, memberId: string, because: string): Promise<void> {

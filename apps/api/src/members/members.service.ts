@@ -1,15 +1,15 @@
 import { Injectable } from '@nestjs/common';
 import type { Role } from '@proofplate/recipe-model';
 import { uuidv7 } from 'uuidv7';
-import { NotFoundError, StaleError } from '../common/errors/domain-error';
+import { InvalidError, NotFoundError, StaleError } from '../common/errors/domain-error';
 import { decodeCursor, type Page, pageOf } from '../common/pagination/page';
 import { type Actor, type Tx, UnitOfWork } from '../database/unit-of-work';
 import { LedgerService } from '../ledger/ledger.service';
 import { ListMembersQuery } from './dto/list-members.query.dto';
 import { MemberDto } from './dto/member.dto';
-import { UpdateMemberDto } from './dto/update-member.dto';
+import { type ProcessDto, UpdateMemberDto } from './dto/update-member.dto';
 import { AlreadyMemberError, LastOwnerError } from './members.errors';
-import { roleOf, toMemberDto } from './members.mapper';
+import { type Directory, roleOf, toMemberDto } from './members.mapper';
 import { type MemberRow, MembersRepository } from './members.repository';
 
 export type Joining = { readonly shopId: string; readonly personId: string; readonly role: Role; readonly printedName: string };
@@ -55,8 +55,8 @@ export class MembersService {
     const after = typeof name === 'string' && typeof id === 'string' ? { after: [name, id] as const } : {};
     return this.unitOfWork.read(actor, async (tx) => {
       const rows = await this.repository.list(tx, actor.shopId, { state: query.state, ...after }, query.limit + 1);
-      const addresses = await this.repository.addresses(tx);
-      const item = ({ row }: (typeof rows)[number]) => toMemberDto(row, addresses.get(row.id), actor);
+      const directory = await this.directory(tx, actor.shopId);
+      const item = ({ row }: (typeof rows)[number]) => toMemberDto(row, directory, actor);
       return pageOf(rows, query.limit, { item, cursor: ({ row, sortName }) => [sortName, row.id] });
     });
   }
@@ -70,7 +70,8 @@ export class MembersService {
       const owners = await this.repository.lockOwners(tx, actor.shopId);
       const before = await this.getActiveRow(tx, actor.shopId, id);
       if (dto.role !== undefined && dto.role !== 'owner' && isLastOwner(owners, id)) throw new LastOwnerError();
-      const after = await this.repository.update(tx, { shopId: actor.shopId, id, version }, dto);
+      if (dto.signsFor) await this.refuseUnknownEffects(tx, actor.shopId, dto.signsFor);
+      const after = await this.repository.update(tx, { shopId: actor.shopId, id, version }, changeOf(dto));
       if (after === undefined) throw new StaleError(await this.toDto(tx, actor, before));
       await this.ledger.record(tx, { actor, action: 'member.changed', ...subject(id), before: told(before), after: told(after) });
       return this.toDto(tx, actor, after);
@@ -89,23 +90,42 @@ export class MembersService {
     });
   }
 
-  private async getRow(tx: Tx, shopId: string, id: string): Promise<MemberRow> {
+  /** @throws NotFoundError also for a member of another shop */
+  async getRow(tx: Tx, shopId: string, id: string): Promise<MemberRow> {
     const row = await this.repository.find(tx, shopId, id);
     if (row === undefined) throw new NotFoundError();
     return row;
   }
 
-  private async getActiveRow(tx: Tx, shopId: string, id: string): Promise<MemberRow> {
+  /** @throws NotFoundError for a removed member too */
+  async getActiveRow(tx: Tx, shopId: string, id: string): Promise<MemberRow> {
     const row = await this.getRow(tx, shopId, id);
     if (row.state !== 'active') throw new NotFoundError('This member was removed. Invite the person again if they come back.');
     return row;
   }
 
   private async toDto(tx: Tx, actor: Actor, row: MemberRow): Promise<MemberDto> {
-    return toMemberDto(row, (await this.repository.addresses(tx)).get(row.id), actor);
+    return toMemberDto(row, await this.directory(tx, actor.shopId), actor);
+  }
+
+  private async directory(tx: Tx, shopId: string): Promise<Directory> {
+    return { addresses: await this.repository.addresses(tx), effectNames: await this.repository.effectNames(tx, shopId) };
+  }
+
+  private async refuseUnknownEffects(tx: Tx, shopId: string, processes: readonly ProcessDto[]): Promise<void> {
+    const known = await this.repository.effectNames(tx, shopId);
+    const errors = processes.flatMap(({ effectId }, index) =>
+      known.has(effectId) ? [] : [{ pointer: `#/signsFor/${index}/effectId`, detail: 'The shop has no such effect.' }],
+    );
+    if (errors.length > 0) throw new InvalidError('Some processes are not of this shop.', errors);
   }
 }
 
 const subject = (id: string) => ({ subjectType: 'member', subjectId: id });
-const told = ({ role, printedName }: MemberRow) => ({ role, printedName });
+const told = ({ role, printedName, signsFor }: MemberRow) => ({ role, printedName, signsFor });
+/** Columns hold plain values, not instances of request classes. */
+const changeOf = ({ signsFor, ...rest }: UpdateMemberDto) => ({
+  ...rest,
+  ...(signsFor === undefined ? {} : { signsFor: signsFor?.map(({ effectId, sourceKind }) => ({ effectId, sourceKind })) ?? null }),
+});
 const isLastOwner = (owners: readonly string[], id: string) => owners.length === 1 && owners[0] === id;

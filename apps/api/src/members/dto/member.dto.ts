@@ -1,6 +1,12 @@
 import { ApiProperty } from '@nestjs/swagger';
-import { ROLES, type Role } from '@proofplate/recipe-model';
+import { ROLES, type Role, SOURCE_KINDS, type SourceKind } from '@proofplate/recipe-model';
 import { PageOf } from '../../common/pagination/page';
+
+export class SigningProcessDto {
+  @ApiProperty({ format: 'uuid' }) effectId: string;
+  @ApiProperty({ description: 'Name of the effect' }) effectName: string;
+  @ApiProperty({ enum: [...SOURCE_KINDS], description: 'Kind of laser source' }) sourceKind: SourceKind;
+}
 
 export class MemberDto {
   @ApiProperty({ format: 'uuid' }) id: string;
@@ -9,6 +15,12 @@ export class MemberDto {
     | string
     | null;
   @ApiProperty({ enum: [...ROLES] }) role: Role;
+  @ApiProperty({
+    type: [SigningProcessDto],
+    nullable: true,
+    description: 'Processes that a lead or owner signs for, an effect on a kind of source each; null: all of them',
+  })
+  signsFor: SigningProcessDto[] | null;
   @ApiProperty({ enum: ['active', 'removed'] }) state: string;
   @ApiProperty({ format: 'date-time' }) createdAt: string;
   @ApiProperty({ type: String, format: 'date-time', nullable: true }) removedAt: string | null;

@@ -1,9 +1,23 @@
-import { ApiPropertyOptional } from '@nestjs/swagger';
-import { ROLES, type Role } from '@proofplate/recipe-model';
-import { IsIn, IsOptional, IsString, MaxLength, MinLength } from 'class-validator';
+import { ApiProperty, ApiPropertyOptional } from '@nestjs/swagger';
+import { ROLES, type Role, SOURCE_KINDS, type SourceKind } from '@proofplate/recipe-model';
+import { Type } from 'class-transformer';
+import { ArrayMaxSize, IsArray, IsIn, IsOptional, IsString, IsUUID, MaxLength, MinLength, ValidateNested } from 'class-validator';
 import { Trimmed } from '../../common/decorators/trimmed';
 
 export const MAX_PERSON_NAME_LENGTH = 120;
+
+/** Effects of a large shop times kinds of source. */
+const MAX_PROCESSES = 500;
+
+export class ProcessDto {
+  @ApiProperty({ format: 'uuid' })
+  @IsUUID()
+  effectId: string;
+
+  @ApiProperty({ enum: [...SOURCE_KINDS], description: 'Kind of laser source' })
+  @IsIn(SOURCE_KINDS)
+  sourceKind: SourceKind;
+}
 
 export class UpdateMemberDto {
   @ApiPropertyOptional({ enum: [...ROLES] })
@@ -22,4 +36,17 @@ export class UpdateMemberDto {
   @MinLength(1)
   @MaxLength(MAX_PERSON_NAME_LENGTH)
   printedName?: string;
+
+  @ApiPropertyOptional({
+    type: [ProcessDto],
+    nullable: true,
+    maxItems: MAX_PROCESSES,
+    description: 'Processes that the member signs for as a lead or owner; null: all of them',
+  })
+  @IsOptional()
+  @IsArray()
+  @ArrayMaxSize(MAX_PROCESSES)
+  @ValidateNested({ each: true })
+  @Type(() => ProcessDto)
+  signsFor?: ProcessDto[] | null;
 }
