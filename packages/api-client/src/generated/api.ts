@@ -72,6 +72,57 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/api/ledger/actors": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Names to search the ledger by */
+        get: operations["LedgerController_actors"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/ledger/export.csv": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Every event that matches, oldest first, as CSV */
+        get: operations["LedgerController_exportCsv"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/ledger/export.json": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Every event that matches, oldest first, with all that its hash covers */
+        get: operations["LedgerController_exportJson"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/api/ledger/verify": {
         parameters: {
             query?: never;
@@ -173,6 +224,24 @@ export interface paths {
         post?: never;
         /** Take an open invitation back */
         delete: operations["InvitationsController_revoke"];
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/members/{id}/training-records": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** What a member was taught */
+        get: operations["TrainingRecordsController_list"];
+        put?: never;
+        /** Write a training down; answers with the whole list */
+        post: operations["TrainingRecordsController_create"];
+        delete?: never;
         options?: never;
         head?: never;
         patch?: never;
@@ -326,6 +395,57 @@ export interface paths {
         /** Join a shop by an invitation; signs in */
         post: operations["LinksController_accept"];
         delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/auth/change-password": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Set a new password with the present one; ends every other session of the person */
+        post: operations["OwnAccountController_changePassword"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/auth/sessions": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Where the person is signed in */
+        get: operations["OwnAccountController_listSessions"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/auth/sessions/{id}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        post?: never;
+        /** Sign one device of the person out, at once */
+        delete: operations["OwnAccountController_endSession"];
         options?: never;
         head?: never;
         patch?: never;
@@ -1875,6 +1995,23 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/api/undelivered-letters": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Letters that were refused for good or given up */
+        get: operations["UndeliveredLettersController_list"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
 }
 export type webhooks = Record<string, never>;
 export interface components {
@@ -1937,6 +2074,18 @@ export interface components {
             items: components["schemas"]["LedgerEventDto"][];
             /** @description Send as cursor for the next page; null at the end */
             nextCursor: string | null;
+        };
+        LedgerActorDto: {
+            /** Format: uuid */
+            memberId: string;
+            /** @description Present printed name */
+            name: string;
+            /** @description False for somebody who has left the shop */
+            isActive: boolean;
+        };
+        LedgerActorsDto: {
+            /** @description Everybody who is or was in the shop, by name */
+            items: components["schemas"]["LedgerActorDto"][];
         };
         LedgerVerificationDto: {
             /** @description True when every event fits the one before it and its own content */
@@ -2002,6 +2151,17 @@ export interface components {
             /** @description Password of the owner who signs; needed when the policy changes */
             password?: string;
         };
+        SigningProcessDto: {
+            /** Format: uuid */
+            effectId: string;
+            /** @description Name of the effect */
+            effectName: string;
+            /**
+             * @description Kind of laser source
+             * @enum {string}
+             */
+            sourceKind: "fibre-q-switched" | "fibre-mopa" | "co2" | "uv" | "green" | "diode" | "ultrafast";
+        };
         MemberDto: {
             /** Format: uuid */
             id: string;
@@ -2011,6 +2171,8 @@ export interface components {
             email: string | null;
             /** @enum {string} */
             role: "trainee" | "operator" | "lead" | "owner";
+            /** @description Processes that a lead or owner signs for, an effect on a kind of source each; null: all of them */
+            signsFor: components["schemas"]["SigningProcessDto"][] | null;
             /** @enum {string} */
             state: "active" | "removed";
             /** Format: date-time */
@@ -2028,11 +2190,22 @@ export interface components {
             /** @description Send as cursor for the next page; null at the end */
             nextCursor: string | null;
         };
+        ProcessDto: {
+            /** Format: uuid */
+            effectId: string;
+            /**
+             * @description Kind of laser source
+             * @enum {string}
+             */
+            sourceKind: "fibre-q-switched" | "fibre-mopa" | "co2" | "uv" | "green" | "diode" | "ultrafast";
+        };
         UpdateMemberDto: {
             /** @enum {string} */
             role?: "trainee" | "operator" | "lead" | "owner";
             /** @description Name as it will stand under signatures from now on */
             printedName?: string;
+            /** @description Processes that the member signs for as a lead or owner; null: all of them */
+            signsFor?: components["schemas"]["ProcessDto"][] | null;
         };
         InvitationDto: {
             /** Format: uuid */
@@ -2074,6 +2247,47 @@ export interface components {
              * @enum {string}
              */
             role: "trainee" | "operator" | "lead" | "owner";
+        };
+        TrainingRecordDto: {
+            /** Format: uuid */
+            id: string;
+            /** @description What was taught */
+            subject: string;
+            /** @description Who taught it */
+            taughtBy: string;
+            /** Format: date */
+            taughtOn: string;
+            /**
+             * Format: date
+             * @description Last day on which it counts
+             */
+            expiresOn: string | null;
+            /** @description True when that day is over in the shop */
+            isExpired: boolean;
+            /** @description Printed name of whoever wrote it down */
+            recordedBy: string;
+            /** Format: date-time */
+            recordedAt: string;
+        };
+        TrainingRecordListDto: {
+            /** @description The latest training first */
+            items: components["schemas"]["TrainingRecordDto"][];
+        };
+        CreateTrainingRecordDto: {
+            /** @description What was taught, in the words of the shop */
+            subject: string;
+            /** @description Who taught it; not always somebody of the shop */
+            taughtBy: string;
+            /**
+             * Format: date
+             * @description Day of the training
+             */
+            taughtOn: string;
+            /**
+             * Format: date
+             * @description Last day on which it counts; absent: it does not run out
+             */
+            expiresOn?: string;
         };
         SignUpDto: {
             shopName: string;
@@ -2179,6 +2393,41 @@ export interface components {
             name?: string;
             /** @description A new password, or the present one of an existing account */
             password: string;
+        };
+        ChangePasswordDto: {
+            /** @description The present password */
+            password: string;
+            /** @description Code points after NFKC; any characters */
+            newPassword: string;
+        };
+        OpenSessionDto: {
+            /** Format: uuid */
+            id: string;
+            /** @description True for the session that asks */
+            isCurrent: boolean;
+            /** @description Shop it works in; null when the person has left that shop */
+            shopName: string | null;
+            /** @description What the browser said of itself; a hint, never a proof */
+            userAgent: string | null;
+            /**
+             * Format: date-time
+             * @description When somebody signed in there
+             */
+            startedAt: string;
+            /**
+             * Format: date-time
+             * @description Last renewal, to about ten minutes
+             */
+            lastSeenAt: string;
+            /**
+             * Format: date-time
+             * @description Ends then unless it is used before
+             */
+            expiresAt: string;
+        };
+        OpenSessionListDto: {
+            /** @description The latest use first */
+            items: components["schemas"]["OpenSessionDto"][];
         };
         SessionDto: {
             person: components["schemas"]["SessionPersonDto"];
@@ -3938,11 +4187,10 @@ export interface components {
             /** @description Rows pasted from a spreadsheet, headings first; or give a grid */
             table?: string;
             /**
-             * @description Decimal sign of the table
-             * @default .
+             * @description Decimal sign of the table; absent: a point
              * @enum {string}
              */
-            decimalSign: "." | ",";
+            decimalSign?: "." | ",";
             /** @description true: import the rows that can be read although others are refused */
             leaveOutRefusedRows?: boolean;
         };
@@ -6339,6 +6587,25 @@ export interface components {
             /** @description What was found, best first */
             items: components["schemas"]["FoundDto"][];
         };
+        UndeliveredLetterDto: {
+            /** Format: uuid */
+            id: string;
+            /** @description What it was about, such as invitation or revision-approved */
+            kind: string;
+            /** @description Address it was meant for */
+            address: string;
+            /** @description Last answer of the mail server, or why it was given up */
+            reason: string;
+            /**
+             * Format: date-time
+             * @description When it was written
+             */
+            writtenAt: string;
+        };
+        UndeliveredLetterListDto: {
+            /** @description The newest first, at most a hundred */
+            items: components["schemas"]["UndeliveredLetterDto"][];
+        };
         FieldProblemDto: {
             /** @description JSON pointer of the field, such as #/steps/0/passes */
             pointer: string;
@@ -6478,10 +6745,16 @@ export interface operations {
                 subjectType?: string;
                 /** @description One thing */
                 subjectId?: string;
+                /** @description Code that people read; C-0117 also finds its cells and photos */
+                subjectCode?: string;
                 /** @description What happened, such as recipe.submitted */
                 action?: string;
                 /** @description Who acted */
                 actorMemberId?: string;
+                /** @description First day, in the time zone of the shop */
+                fromDay?: string;
+                /** @description Last day, in the time zone of the shop */
+                toDay?: string;
             };
             header?: never;
             path?: never;
@@ -6498,6 +6771,141 @@ export interface operations {
                 };
             };
             /** @description needs the role operator or a higher one */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    LedgerController_actors: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["LedgerActorsDto"];
+                };
+            };
+            /** @description needs the role operator or a higher one */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    LedgerController_exportCsv: {
+        parameters: {
+            query?: {
+                /** @description Kind of thing, such as recipe */
+                subjectType?: string;
+                /** @description One thing */
+                subjectId?: string;
+                /** @description Code that people read; C-0117 also finds its cells and photos */
+                subjectCode?: string;
+                /** @description What happened, such as recipe.submitted */
+                action?: string;
+                /** @description Who acted */
+                actorMemberId?: string;
+                /** @description First day, in the time zone of the shop */
+                fromDay?: string;
+                /** @description Last day, in the time zone of the shop */
+                toDay?: string;
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "text/csv": string;
+                };
+            };
+            /** @description needs the role lead or a higher one */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    LedgerController_exportJson: {
+        parameters: {
+            query?: {
+                /** @description Kind of thing, such as recipe */
+                subjectType?: string;
+                /** @description One thing */
+                subjectId?: string;
+                /** @description Code that people read; C-0117 also finds its cells and photos */
+                subjectCode?: string;
+                /** @description What happened, such as recipe.submitted */
+                action?: string;
+                /** @description Who acted */
+                actorMemberId?: string;
+                /** @description First day, in the time zone of the shop */
+                fromDay?: string;
+                /** @description Last day, in the time zone of the shop */
+                toDay?: string;
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": string;
+                };
+            };
+            /** @description needs the role lead or a higher one */
             403: {
                 headers: {
                     [name: string]: unknown;
@@ -6901,6 +7309,87 @@ export interface operations {
             };
         };
     };
+    TrainingRecordsController_list: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["TrainingRecordListDto"];
+                };
+            };
+            /** @description needs the role lead or a higher one */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    TrainingRecordsController_create: {
+        parameters: {
+            query?: never;
+            header: {
+                /** @description 8 to 128 visible characters, new for each act and the same for each retry */
+                "Idempotency-Key": string;
+            };
+            path: {
+                id: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["CreateTrainingRecordDto"];
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["TrainingRecordListDto"];
+                };
+            };
+            /** @description needs the role owner or a higher one */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
     AuthController_signUp: {
         parameters: {
             query?: never;
@@ -7163,6 +7652,92 @@ export interface operations {
                 content: {
                     "application/json": components["schemas"]["SignedInDto"];
                 };
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    OwnAccountController_changePassword: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["ChangePasswordDto"];
+            };
+        };
+        responses: {
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    OwnAccountController_listSessions: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["OpenSessionListDto"];
+                };
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    OwnAccountController_endSession: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                id: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            204: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
             };
             /** @description A problem, as docs/problems.md lists them */
             default: {
@@ -11830,6 +12405,41 @@ export interface operations {
                 content: {
                     "application/json": components["schemas"]["FoundListDto"];
                 };
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    UndeliveredLettersController_list: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["UndeliveredLetterListDto"];
+                };
+            };
+            /** @description needs the role owner or a higher one */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
             };
             /** @description A problem, as docs/problems.md lists them */
             default: {
