@@ -77,6 +77,7 @@ export function Rail({ session, onFind }: RailProps) {
       px="3"
       pt="6"
       pb="4"
+      css={{ '@media print': { display: 'none' } }}
     >
       <BrandLink to={paths.home}>
         <PlateMarkIcon />

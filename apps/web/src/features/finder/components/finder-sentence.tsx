@@ -1,0 +1,44 @@
+import { chakra } from '@chakra-ui/react';
+import { type Choice, type FinderResult, SLOTS, type SlotKey } from '../finder.api';
+import { shownInSlot } from '../sentence';
+import { FinderSlot } from './finder-slot';
+
+export type FinderSentenceProps = {
+  result: FinderResult;
+  choice: Choice;
+  onChoose: (slot: SlotKey, id: string | undefined) => void;
+};
+
+/** "On Bench 2 with the F160 lens, mark black anodised 6061 with a sealed satin finish, for a white mark." */
+export function FinderSentence({ result, choice, onChoose }: FinderSentenceProps) {
+  const shown = Object.fromEntries(SLOTS.map((slot) => [slot, shownInSlot(slot, choice, result)]));
+  const slot = (key: SlotKey) => (
+    <FinderSlot slot={key} view={result.slots[key]} shownId={shown[key]} onChoose={(id) => onChoose(key, id)} />
+  );
+  const effectName = result.slots.effect.options.find(({ id }) => id === shown.effect)?.name ?? '';
+  return (
+    <chakra.div
+      role="group"
+      aria-label="Finder"
+      fontSize={{ base: 'lg', sm: '2xl' }}
+      lineHeight={{ base: '40px', sm: '40px' }}
+      display={{ base: 'block', sm: 'flex' }}
+      flexWrap="wrap"
+      columnGap="2.5"
+      rowGap="1"
+    >
+      <span>On </span>
+      {slot('machine')}
+      <span> with the </span>
+      {slot('lens')}
+      <span> lens, mark </span>
+      {slot('material')}
+      <span> with a </span>
+      {slot('finish')}
+      <span> finish, for {/mark$/i.test(effectName) ? 'a ' : ''}</span>
+      <chakra.span display={{ base: 'inline', sm: 'inline-flex' }} columnGap="1">
+        {slot('effect')}.
+      </chakra.span>
+    </chakra.div>
+  );
+}

@@ -1,0 +1,69 @@
+import { chakra } from '@chakra-ui/react';
+import { useState } from 'react';
+import { Button } from '../../../components/button';
+import { StateShape } from '../../../components/state-mark';
+import { formatTime } from '../../../lib/format';
+import { useSession } from '../../../lib/session';
+import { type HoldSubjects, PlaceHoldDialog, ReleaseHoldDialog } from '../forms/hold-dialogs';
+import type { OpenHold } from '../holds.api';
+
+export type HoldsProps = { holds: readonly OpenHold[]; subjects: HoldSubjects; mayRelease: boolean };
+
+/** Open holds, before everything else on the page. */
+export function Holds({ holds, subjects, mayRelease }: HoldsProps) {
+  const { shop } = useSession();
+  const [releasing, setReleasing] = useState<OpenHold>();
+  if (holds.length === 0) return null;
+  return (
+    <>
+      <chakra.ul role="alert" display="grid" gap="2">
+        {holds.map((hold) => (
+          <chakra.li
+            key={hold.id}
+            display="flex"
+            flexWrap="wrap"
+            alignItems="center"
+            gap="4"
+            p="4"
+            bg="oxide.subtle"
+            border="hairline"
+            borderWidth="2px"
+            borderColor="oxide.solid"
+            borderRadius="md"
+          >
+            <chakra.span color="oxide.fg" lineHeight="none">
+              <StateShape state="withdrawn" size={32} />
+            </chakra.span>
+            <chakra.div flex="1" minW="200px">
+              <chakra.h2 color="oxide.fg">{subjects[hold.subject].name} is on hold. Start no run.</chakra.h2>
+              <p>{hold.reason}</p>
+              <chakra.p fontSize="sm" lineHeight="sm" color="fg.muted">
+                Placed by {hold.placedBy}
+                {hold.placedAt === undefined ? '' : `, ${formatTime(hold.placedAt, shop.timeZone)}`}. A lead can release it.
+              </chakra.p>
+            </chakra.div>
+            {mayRelease && (
+              <Button size="glove" onClick={() => setReleasing(hold)}>
+                Release the hold
+              </Button>
+            )}
+          </chakra.li>
+        ))}
+      </chakra.ul>
+      {releasing !== undefined && <ReleaseHoldDialog hold={releasing} onClose={() => setReleasing(undefined)} />}
+    </>
+  );
+}
+
+/** A lead stops the use from where it is seen. */
+export function PlaceHoldButton({ subjects }: { subjects: HoldSubjects }) {
+  const [isOpen, setIsOpen] = useState(false);
+  return (
+    <>
+      <Button kind="danger" size="touch" onClick={() => setIsOpen(true)}>
+        Place a hold
+      </Button>
+      {isOpen && <PlaceHoldDialog subjects={subjects} onClose={() => setIsOpen(false)} />}
+    </>
+  );
+}

@@ -1,0 +1,42 @@
+import { Page } from '../components/page';
+import { Finder } from '../features/finder/components/finder';
+import type { Choice, FinderAnswer } from '../features/finder/finder.api';
+import { Holds, PlaceHoldButton } from '../features/holds/components/holds';
+import { AskForm } from '../features/requests/forms/ask-form';
+
+export function Component() {
+  return (
+    <Page title="At the machine" isTitleHidden>
+      <Finder
+        holds={(answer) => <AnswerHolds answer={answer} />}
+        leadActs={(answer) => <LeadActs answer={answer} />}
+        ask={(choice) => <Ask choice={choice} />}
+      />
+    </Page>
+  );
+}
+
+function AnswerHolds({ answer }: { answer: FinderAnswer }) {
+  return <Holds holds={answer.holds} subjects={subjectsOf(answer)} mayRelease={answer.allowedActions.includes('release-hold')} />;
+}
+
+function LeadActs({ answer }: { answer: FinderAnswer }) {
+  return answer.allowedActions.includes('place-hold') ? <PlaceHoldButton subjects={subjectsOf(answer)} /> : null;
+}
+
+const subjectsOf = ({ recipeId, code, title, machine }: FinderAnswer) => ({ recipe: { id: recipeId, name: `${code} ${title}` }, machine });
+
+function Ask({ choice: { machine, lens, material, finish, effect } }: { choice: Choice }) {
+  if (material === undefined) return null;
+  return (
+    <AskForm
+      asked={{
+        materialId: material,
+        ...(machine === undefined ? {} : { machineId: machine }),
+        ...(lens === undefined ? {} : { lensId: lens }),
+        ...(finish === undefined ? {} : { finishId: finish }),
+        ...(effect === undefined ? {} : { effectId: effect }),
+      }}
+    />
+  );
+}

@@ -1,0 +1,80 @@
+import { chakra } from '@chakra-ui/react';
+import { useNavigate, useSearchParams } from 'react-router';
+import { Page } from '../components/page';
+import { ReadProblem } from '../components/read-problem';
+import { SkeletonBlock } from '../components/skeletons';
+import { Holds } from '../features/holds/components/holds';
+import { RunSetUp } from '../features/runs/components/run-steps';
+import { StartForm } from '../features/runs/forms/start-form';
+import { type RunKind, type StartSheet, useStartSheet } from '../features/runs/runs.api';
+import { useKeptTicks } from '../lib/kept-ticks';
+import { paths } from '../lib/paths';
+import { useSession } from '../lib/session';
+
+const CRUMBS = [{ label: 'At the machine', to: paths.machine }, { label: 'Start a run' }];
+
+export function Component() {
+  const [params] = useSearchParams();
+  const revisionId = params.get('revision') ?? '';
+  const { data, error, mutate } = useStartSheet(revisionId);
+  if (data === undefined)
+    return (
+      <Page title="Start a run" crumbs={CRUMBS}>
+        {error === undefined ? (
+          <SkeletonBlock height="480px" label="Loading the set-up" />
+        ) : (
+          <ReadProblem problem={error} thing="this setting" onRetry={() => void mutate()} />
+        )}
+      </Page>
+    );
+  return <Start sheet={data} wantedKind={params.get('kind')} />;
+}
+
+function Start({ sheet, wantedKind }: { sheet: StartSheet; wantedKind: string | null }) {
+  const navigate = useNavigate();
+  const { member } = useSession();
+  const { recipe, revision, machine, material, finish, effect } = sheet;
+  const { ticks, setTick, forget } = useKeptTicks(revision.id);
+  const kind = sheet.kinds.find((one) => one === wantedKind) ?? sheet.kinds[0];
+  const subjects = { recipe: { id: recipe.id, name: `${recipe.code} ${recipe.title}` }, machine };
+  return (
+    <Page
+      title="Start a run"
+      name={`${recipe.code} ${revision.number === null ? 'draft' : `revision ${revision.number}`}`}
+      crumbs={CRUMBS}
+      meta={
+        <span>
+          {machine.name}: {material.name}, {finish.name}, {effect.name}
+        </span>
+      }
+    >
+      <chakra.div
+        display="grid"
+        gap="4"
+        gridTemplateColumns={{ base: 'minmax(0, 1fr)', lg: 'repeat(2, minmax(0, 1fr))' }}
+        alignItems="start"
+      >
+        <chakra.div gridColumn="1 / -1">
+          <Holds holds={sheet.holds} subjects={subjects} mayRelease={member.role === 'lead' || member.role === 'owner'} />
+        </chakra.div>
+        <RunSetUp shown={sheet} ticks={ticks} onTick={setTick} />
+        {kind === undefined ? (
+          <p>This revision is {revision.state.replace('_', ' ')}: no run can be started with it.</p>
+        ) : (
+          <StartForm
+            sheet={sheet}
+            kind={asKind(kind)}
+            ticks={ticks}
+            onStarted={(run) => {
+              forget();
+              void navigate(paths.run(run.code), { replace: true });
+            }}
+          />
+        )}
+      </chakra.div>
+    </Page>
+  );
+}
+
+/** The server lists the kinds that may start now out of this closed list. */
+const asKind = (kind: string) => kind as RunKind;
