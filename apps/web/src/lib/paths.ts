@@ -3,6 +3,7 @@
 export const paths = {
   home: '/',
   machine: '/machine',
+  setUpSheet: (recipeId: string) => `/machine/sheet?recipe=${encodeURIComponent(recipeId)}`,
   coupons: '/coupons',
   planCoupon: '/coupons/plan',
   importCoupon: '/coupons/import',
@@ -16,6 +17,8 @@ export const paths = {
   signOffs: '/sign-off',
   signOff: (revisionId: string) => `/sign-off/${encodeURIComponent(revisionId)}`,
   runs: '/runs',
+  startRun: (revisionId: string) => `/runs/start?revision=${encodeURIComponent(revisionId)}`,
+  requests: '/requests',
   run: (code: string) => `/runs/${encodeURIComponent(code)}`,
   equipment: '/equipment',
   newMachine: '/equipment/machines/new',
