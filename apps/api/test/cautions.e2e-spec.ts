@@ -1,8 +1,8 @@
 import { randomUUID } from 'node:crypto';
+import { SHIPPED_CAUTIONS } from '@proofplate/recipe-model';
 import { CautionsService, type WorkInHand } from '../src/materials/cautions.service';
 import type { CautionDto, CautionsForDto } from '../src/materials/dto/caution.dto';
 import { ForbiddenByCautionError } from '../src/materials/materials.errors';
-import { SHIPPED_CAUTIONS } from '../src/materials/starter-content/materials-starter-content';
 import { createTestApp, type TestApp } from './support/app';
 import { allCautions, created, editing, effectByKey, fillStarterContent, makeMachine, makeMaterial } from './support/equipment';
 import { makeStaffedShop } from './support/factories';

@@ -1,14 +1,15 @@
 export type { DecimalSign, Fill, PanelUnit } from '@proofplate/physics';
+export { type BoundRevision, boundContent } from './canonical/bound-content';
 export { canonicalForm, NotCanonicalError } from './canonical/canonical-form';
 export { CONTENT_FORMAT, contentHash, contentText } from './canonical/content-text';
 export {
+  CAUTION_DEFERENCE,
   CAUTION_LEVEL_LABELS,
   type Caution,
   type CautionLevel,
   type CautionScope,
 } from './cautions/caution';
 export { type CautionSubject, cautionsFor, isForbidden } from './cautions/cautions-for';
-export { CAUTION_DEFERENCE, SHIPPED_CAUTIONS } from './cautions/shipped-cautions';
 export { parameterClassOf, type SettingItem, type ShopClasses, settingItemLabel } from './diff/parameter-class';
 export { sameValue } from './diff/same-value';
 export { type ChangeSide, type ChangeSize, type SettingChange, settingDiff } from './diff/setting-diff';
@@ -17,6 +18,16 @@ export { cellAddress, findCell, rowLetters } from './grid/cell-address';
 export { type CrossedGrid, cellsOfGrid, type GridCell, type GridFactor } from './grid/cells-of-grid';
 export { LEVEL_SPACING_LABELS, type LevelRequest, type LevelSpacing, type Levels, levels, MAX_LEVELS } from './grid/levels';
 export { runOrder } from './grid/run-order';
+export {
+  type ChainFault,
+  type ChainHead,
+  firstFault,
+  GENESIS_HASH,
+  type LedgerBody,
+  type LinkedEvent,
+  linkEvent,
+  type Sha256,
+} from './ledger/ledger-chain';
 export { emptyPanelFor } from './panel/empty-panel';
 export { acceptEntered, type Entry, type EntryContext, type EntryRefusal, enterValue } from './panel/enter-value';
 export type { Panel, PanelField } from './panel/panel';
@@ -26,6 +37,9 @@ export { type ShownValue, showValue } from './panel/show-value';
 export { isShowable, nearestShowable, roundToPanel } from './panel/showable';
 export { CALIBRATION_FREQUENCY_TOLERANCE, type MeasuredCalibration, type WorkPowerInput, workPower } from './power/work-power';
 export { matchesWords, wordsOf } from './search/matches-words';
+export type { ShippedCaution } from './starter-content/shipped-caution';
+export { SHIPPED_CAUTIONS } from './starter-content/shipped-cautions';
+export { SHIPPED_EFFECTS, type ShippedEffect } from './starter-content/shipped-effects';
 export {
   COUPON_ACTION_LABELS,
   COUPON_STATE_LABELS,

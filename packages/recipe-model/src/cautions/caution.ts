@@ -16,3 +16,7 @@ export type CautionScope = {
 
 /** A prompt beside a setting; it defers to the machine's manual and the laser safety officer and clears nothing. */
 export type Caution = { id: string; level: CautionLevel; subject: string; text: string; source: string; appliesTo: CautionScope };
+
+/** Stands above every list of cautions: they are prompts, not clearances. */
+export const CAUTION_DEFERENCE =
+  'These are prompts. The machine’s manual and the laser safety officer decide; ask them before you mark. Nothing here clears a material.';

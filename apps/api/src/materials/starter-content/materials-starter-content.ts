@@ -1,22 +1,10 @@
 import { Injectable } from '@nestjs/common';
+import { SHIPPED_CAUTIONS, SHIPPED_EFFECTS } from '@proofplate/recipe-model';
 import type { Actor, Tx } from '../../database/unit-of-work';
 import { LedgerService } from '../../ledger/ledger.service';
 import { ShopStarterContent } from '../../shops/shop-starter-content';
 import { CautionsRepository } from '../cautions.repository';
 import { EffectsRepository } from '../effects.repository';
-import { GENERAL_CAUTIONS } from './general-cautions';
-import { METAL_CAUTIONS } from './metal-cautions';
-import { NEVER_CAUTIONS } from './never-cautions';
-import { OTHER_MATERIAL_CAUTIONS } from './other-material-cautions';
-import type { ShippedCaution } from './shipped-caution';
-import { SHIPPED_EFFECTS } from './shipped-effects';
-
-export const SHIPPED_CAUTIONS: readonly ShippedCaution[] = [
-  ...NEVER_CAUTIONS,
-  ...METAL_CAUTIONS,
-  ...OTHER_MATERIAL_CAUTIONS,
-  ...GENERAL_CAUTIONS,
-];
 
 /** Puts the shipped cautions and effects into a new shop. Running it again adds only what is missing. */
 @Injectable()

@@ -1,4 +1,6 @@
-import { type Criterion, EFFECT_KEYS, EFFECT_LABELS, type EffectKey, QUANTITIES } from '@proofplate/recipe-model';
+import type { Criterion } from '../vocabulary/criteria';
+import { EFFECT_KEYS, EFFECT_LABELS, type EffectKey } from '../vocabulary/lists';
+import { QUANTITIES } from '../vocabulary/measurements';
 
 type Limit = Omit<Criterion, 'unit'>;
 export type ShippedEffect = { readonly key: EffectKey; readonly name: string; readonly criteria: Criterion[]; readonly notes: string };

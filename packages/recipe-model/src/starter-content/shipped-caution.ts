@@ -1,4 +1,4 @@
-import type { CautionLevel, CautionScope } from '@proofplate/recipe-model';
+import type { CautionLevel, CautionScope } from '../cautions/caution';
 
 /**
  * A caution that every shop starts with. The subject says what to do, the text says why, the source says who says so. Nothing here
