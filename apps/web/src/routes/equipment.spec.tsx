@@ -89,6 +89,7 @@ describe('adding a machine', () => {
     await user.type(screen.getByLabelText(/^Rated average power/), '20');
     await user.type(screen.getByLabelText(/^Largest pulse energy/), '1');
     await user.click(screen.getByRole('button', { name: 'Move row 1 down' }));
+    await waitFor(() => expect(screen.getByLabelText('Move row 2 down')).toHaveFocus());
     await user.click(screen.getByRole('button', { name: 'Add the machine' }));
     expect(await screen.findByRole('heading', { name: 'Bench 1' })).toBeVisible();
     const [body] = server.bodies('POST /api/machines');

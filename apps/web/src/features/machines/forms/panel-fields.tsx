@@ -23,9 +23,12 @@ export function PanelFields({ form }: { form: UseFormReturn<MachineValues> }) {
   const free = PARAMETER_KEYS.find((key) => !taken.includes(key));
   const handleMove = (from: number, to: number) => {
     move(from, to);
-    // The pressed button belongs to the row: the focus goes with it.
-    const direction = to < from ? 'up' : 'down';
-    setTimeout(() => list.current?.querySelector<HTMLElement>(`[data-move="${to}-${direction}"]:not(:disabled)`)?.focus());
+    // The pressed button belongs to the row: the focus goes with it, at the end of the list to the row's other button.
+    const directions = to < from ? ['up', 'down'] : ['down', 'up'];
+    setTimeout(() => {
+      const buttons = directions.map((word) => list.current?.querySelector<HTMLButtonElement>(`[data-move="${to}-${word}"]`));
+      buttons.find((button) => button?.disabled === false)?.focus();
+    });
   };
   const handleRemove = (index: number) => {
     remove(index);

@@ -26,11 +26,20 @@ export function PanelRow({ form, index, taken }: RowProps) {
   const row = useRowShape(form, index);
   const { errors } = form.formState;
   const at = <Key extends string>(key: Key) => `panel.fields.${index}.${key}` as const;
+  /** Limits belong to the unit they were typed in: under another one they would be other limits. */
+  const clearLimits = (unit: string) => {
+    const isShare = unit.startsWith('percent');
+    form.setValue(at('minimum'), isShare ? '0' : '');
+    form.setValue(at('maximum'), isShare ? '100' : '');
+    for (const key of ['step', 'choices', 'rangeLow', 'rangeHigh'] as const) form.setValue(at(key), '');
+  };
   const handleParameter = (next: string) => {
     if (!isCodeOf(PARAMETER_LABELS, next)) return;
     // the list's codes are the parameters
-    const { panelUnits, unit } = PARAMETERS[next as ParameterKey];
-    form.setValue(at('unit'), panelUnits[0] ?? unit, { shouldDirty: true });
+    const { panelUnits, unit: ownUnit } = PARAMETERS[next as ParameterKey];
+    const unit = panelUnits[0] ?? ownUnit;
+    form.setValue(at('unit'), unit, { shouldDirty: true });
+    clearLimits(unit);
   };
   return (
     <>
@@ -59,7 +68,7 @@ export function PanelRow({ form, index, taken }: RowProps) {
         label="Unit"
         options={PARAMETERS[row.parameter].panelUnits.map((value) => ({ value, label: unitWords(value) }))}
         error={messageAt(errors, at('unit'))}
-        {...form.register(at('unit'))}
+        {...form.register(at('unit'), { onChange: (event: { target: { value: string } }) => clearLimits(event.target.value) })}
       />
       {needsRange(row.parameter, row.unit) && <RangeEnds form={form} index={index} />}
       <chakra.div display="grid" gap="3" gridTemplateColumns={{ base: 'repeat(2, minmax(0, 1fr))', sm: 'repeat(3, minmax(0, 1fr))' }}>
