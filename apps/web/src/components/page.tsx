@@ -31,7 +31,7 @@ export function Page({ title, name, crumbs, meta, actions, isTitleHidden = false
         <chakra.header mb="4">
           {crumbs !== undefined && <Breadcrumbs crumbs={crumbs} />}
           <Flex align="flex-start" justify="space-between" gap="3" wrap="wrap">
-            <chakra.div minW="0">
+            <chakra.div minW="0" flex={{ lg: '1' }}>
               <chakra.h1 overflowWrap="anywhere" py={{ base: '1', lg: '0.5' }}>
                 {title}
                 {name !== undefined && (

@@ -15,7 +15,7 @@ export type SegmentedProps<T extends string> = {
 const Choice = chakra('button', {
   base: {
     minHeight: { base: '46px', lg: '38px' },
-    px: '3.5',
+    px: { base: '1.5', sm: '3.5' },
     flexGrow: '1',
     borderRight: 'hairline',
     cursor: 'pointer',

@@ -42,11 +42,10 @@ export function shownSettings(cell: CouponCell, coupon: Coupon, decimalSign: Dec
     if (coupon.unknownFields.includes(key)) return [{ key, label: PARAMETERS[key].label, value: 'not known', unit: '' }];
     if (value === undefined) return [];
     const { text, symbol } = shown(key, value, { panel, decimalSign });
+    const unit = value.entered.unit === 'count' ? '' : symbol;
     const plan = planned === undefined ? undefined : shown(key, planned, { panel, decimalSign });
     const differs = plan !== undefined && plan.text !== text;
-    return [
-      { key, label: PARAMETERS[key].label, value: text, unit: symbol, ...(differs ? { planned: `${plan.text} ${plan.symbol}` } : {}) },
-    ];
+    return [{ key, label: PARAMETERS[key].label, value: text, unit, ...(differs ? { planned: `${plan.text} ${plan.symbol}` } : {}) }];
   });
   const fill = coupon.unknownFields.includes('fill') ? 'not known' : FILL_LABELS[used.fill].toLowerCase();
   return [

@@ -1,6 +1,7 @@
 import type { components } from '@proofplate/api-client';
 import type { Outcome } from '@proofplate/recipe-model';
-import { mutate, type SWRResponse } from 'swr';
+import { useMemo } from 'react';
+import { type SWRResponse, useSWRConfig } from 'swr';
 import { type ProblemError, request } from '../../../lib/api';
 import { revalidate, useRead } from '../../../lib/swr';
 import { COUPONS } from '../coupons.api';
@@ -52,21 +53,29 @@ export async function saveRatings(couponId: string, ratings: readonly SentRating
   return answer.ratings;
 }
 
-/** Puts saved ratings into what was read, and reads the verdicts that follow from them. */
-export async function takeOverRatings(couponId: string, saved: readonly CellRating[]): Promise<void> {
-  const ids = new Set(saved.map(({ id }) => id));
-  const merged = (before: Inspection | undefined) =>
-    before === undefined ? undefined : { ...before, ratings: [...before.ratings.filter(({ id }) => !ids.has(id)), ...saved] };
-  await mutate<Inspection>([inspectionPath(couponId), undefined], merged, { revalidate: false });
-}
-
-export function readInspectionAgain(couponId: string): Promise<void> {
-  return revalidate(inspectionPath(couponId));
+/** What was read of a coupon’s inspection, to be changed in place and read again. */
+export function useInspectionCache(couponId: string) {
+  const { mutate } = useSWRConfig();
+  return useMemo(() => {
+    const key = [inspectionPath(couponId), undefined];
+    return {
+      /** Puts saved ratings into it; the verdicts that follow from them come with the next read. */
+      takeOver: async (saved: readonly CellRating[]): Promise<void> => {
+        const ids = new Set(saved.map(({ id }) => id));
+        const merged = (before: Inspection | undefined) =>
+          before === undefined ? undefined : { ...before, ratings: [...before.ratings.filter(({ id }) => !ids.has(id)), ...saved] };
+        await mutate<Inspection>(key, merged, { revalidate: false });
+      },
+      readAgain: async (): Promise<void> => {
+        await mutate(key);
+      },
+    };
+  }, [couponId, mutate]);
 }
 
 export async function addMeasurements(couponId: string, measurements: readonly NewMeasurement[], idempotencyKey: string): Promise<void> {
   await request('post', `${couponPath(couponId)}/measurements`, { body: { measurements }, idempotencyKey });
-  await readInspectionAgain(couponId);
+  await revalidate(inspectionPath(couponId));
 }
 
 export async function recordCriteria(couponId: string, version: number, criteria: readonly Partial<Criterion>[]): Promise<void> {
@@ -94,7 +103,7 @@ export type NewCorrection = { cellId?: string | undefined; text: string; reason:
 
 export async function correctCoupon(couponId: string, correction: NewCorrection, idempotencyKey: string): Promise<void> {
   await request('post', `${couponPath(couponId)}/corrections`, { body: correction, idempotencyKey });
-  await readInspectionAgain(couponId);
+  await revalidate(inspectionPath(couponId));
 }
 
 export async function setCorners({ id, couponId, version }: Photo, corners: readonly PhotoCorner[]): Promise<void> {

@@ -59,8 +59,10 @@ export function drawView(view: PlateView, from: DrawnFrom): DrawnView {
     const value = values.get(cell.id);
     const text = value === undefined ? '' : numberText(value, heat.decimals);
     const fill: PlateFill = value === undefined ? MISSING : { kind: 'response', value, text };
-    const description = [describe(cell), value === undefined ? '' : `${heat.title} ${text}`].filter((part) => part !== '').join(', ');
-    return [cell.address, { fill, description, rating: ratingOf(cell.id) }];
+    const rating = ratingOf(cell.id);
+    const spoken = [describe(cell), value === undefined ? '' : `${heat.title} ${text}`, rating === undefined ? '' : `rated ${rating}`];
+    // the digit belongs to the photo: on a hatched cell it would look like the number that is missing
+    return [cell.address, { fill, description: spoken.filter((part) => part !== '').join(', ') }];
   });
   return {
     cells: Object.fromEntries(drawn),

@@ -1,5 +1,5 @@
 import { useEffect, useMemo, useReducer, useRef, useState } from 'react';
-import { type CellRating, type Inspection, type OwnRating, readInspectionAgain, saveRatings, takeOverRatings } from './log.api';
+import { type CellRating, type Inspection, type OwnRating, saveRatings, useInspectionCache } from './log.api';
 import { createRatingQueue, isSameRating, type RatingConflict, type Refusal } from './rating-queue';
 
 export const NO_RATING: OwnRating = { rating: null, outcome: null, tags: [], note: '' };
@@ -32,20 +32,21 @@ export function useOwnRatings(couponId: string, inspection: Inspection, memberId
   );
   const latest = useRef(own);
   latest.current = own;
+  const cache = useInspectionCache(couponId);
 
   const queue = useMemo(
     () =>
       createRatingQueue({
         send: (ratings) => saveRatings(couponId, ratings),
         readVersion: (cellId) => latest.current.get(cellId)?.version,
-        onSaved: (saved) => takeOverRatings(couponId, saved),
+        onSaved: cache.takeOver,
         onRefused: setRefusal,
         onConflict: (found) => setConflicts((before) => [...before, ...found]),
         onChange: redraw,
       }),
-    [couponId],
+    [couponId, cache],
   );
-  useFreshVerdicts(couponId, queue.isIdle());
+  useFreshVerdicts(cache.readAgain, queue.isIdle());
 
   const of = (cellId: string): OwnRating => queue.pending(cellId) ?? own.get(cellId) ?? NO_RATING;
   const put = (step: Step) => {
@@ -81,7 +82,7 @@ export function useOwnRatings(couponId: string, inspection: Inspection, memberId
 }
 
 /** Verdicts and counts follow from ratings on the server; they are read again once the typing pauses. */
-function useFreshVerdicts(couponId: string, isIdle: boolean): void {
+function useFreshVerdicts(readAgain: () => Promise<void>, isIdle: boolean): void {
   const wasBusy = useRef(false);
   useEffect(() => {
     if (!isIdle) {
@@ -90,8 +91,8 @@ function useFreshVerdicts(couponId: string, isIdle: boolean): void {
     }
     if (!wasBusy.current) return;
     wasBusy.current = false;
-    void readInspectionAgain(couponId);
-  }, [couponId, isIdle]);
+    void readAgain();
+  }, [readAgain, isIdle]);
 }
 
 const plain = ({ rating, outcome, tags, note }: OwnRating): OwnRating => ({ rating, outcome, tags, note });

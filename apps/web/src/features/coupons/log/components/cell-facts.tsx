@@ -22,6 +22,7 @@ const DERIVED = [
 ] as const;
 const ALWAYS_SHOWN = 2;
 const DIGITS = 3;
+const SHORT_LABELS: Partial<Readonly<Record<MeasurementQuantity, string>>> = { contrast: 'Contrast to bare ground' };
 
 type CellFactsProps = { coupon: Coupon; cell: CouponCell; inspection: Inspection };
 
@@ -59,7 +60,8 @@ function colourFact(counting: ReadonlyMap<string, Measurement>): Fact {
 }
 
 function measuredFact(quantity: MeasurementQuantity, row: Measurement | undefined): Fact {
-  const { label, unit } = QUANTITIES[quantity];
+  const { unit } = QUANTITIES[quantity];
+  const label = SHORT_LABELS[quantity] ?? QUANTITIES[quantity].label;
   if (row === undefined || row.value === null) return { label, value: <NotMeasured /> };
   const value = row.grade === null ? formatNumber(row.value) : `${row.grade} (${formatNumber(row.value)})`;
   return { label: row.method === 'photo' ? `${label}, from the photo` : label, value, ...(unit === '1' ? {} : { unit }) };

@@ -28,35 +28,46 @@ export function CellJudgement({ address, own, others, knownTags, onChange, tags,
     <Box display="grid" gap="3">
       <Box display={{ base: 'none', lg: 'block' }}>
         <chakra.h3 mb="1.5">Rating</chakra.h3>
-        <Rating label={`Rating of ${address}`} value={own.rating ?? undefined} onRate={(rating) => onChange({ rating })} />
+        <Rating
+          label={`Rating of ${address}`}
+          value={own.rating ?? undefined}
+          onRate={(rating) => onChange({ rating })}
+          hasCaptions={false}
+        />
       </Box>
       <RatingCaption rating={own.rating} onClear={() => onChange({ rating: null })} />
-      <SelectField
-        name="outcome"
-        label="What the mark looks like"
-        placeholder="Not said"
-        value={own.outcome ?? ''}
-        onChange={({ target }) => onChange({ outcome: OUTCOMES.find((code) => code === target.value) ?? null })}
-        options={OUTCOMES.map((code) => ({ value: code, label: OUTCOME_LABELS[code] }))}
-      />
       <Tags ref={tags} tags={own.tags} known={knownTags} onChange={(next) => onChange({ tags: next })} />
-      <NoteField key={address} ref={note} note={own.note} onSave={(text) => onChange({ note: text })} />
+      <Box display="grid" gridTemplateColumns={{ base: 'minmax(0, 1fr)', sm: 'minmax(0, 2fr) minmax(0, 3fr)' }} gap="3">
+        <SelectField
+          name="outcome"
+          label="What the mark looks like"
+          placeholder="Not said"
+          value={own.outcome ?? ''}
+          onChange={({ target }) => onChange({ outcome: OUTCOMES.find((code) => code === target.value) ?? null })}
+          options={OUTCOMES.map((code) => ({ value: code, label: OUTCOME_LABELS[code] }))}
+        />
+        <NoteField key={address} ref={note} note={own.note} onSave={(text) => onChange({ note: text })} />
+      </Box>
       <Others others={others} />
     </Box>
   );
 }
 
+/** The meaning of the rating between the ends of the scale, and the way to none. */
 function RatingCaption({ rating, onClear }: { rating: number | null; onClear: () => void }) {
   const known = RATINGS.find((each) => each === rating);
-  if (known === undefined) return null;
   return (
-    <Flex justify="space-between" align="center" fontSize="sm" lineHeight="sm" color="fg.muted" mt={{ lg: '-2' }}>
-      <span>
-        {known}: {RATING_CAPTIONS[known]}
-      </span>
-      <Button kind="quiet" fontSize="sm" minHeight="32px" px="2" onClick={onClear}>
-        Take the rating away
-      </Button>
+    <Flex justify="space-between" align="center" gap="2" fontSize="sm" lineHeight="sm" color="fg.muted" mt={{ lg: '-2' }} minHeight="28px">
+      <chakra.span display={{ base: 'none', lg: 'inline' }}>no use</chakra.span>
+      {known !== undefined && (
+        <span>
+          {known}: {RATING_CAPTIONS[known]}{' '}
+          <Button kind="quiet" fontSize="sm" fontWeight="normal" minHeight={{ base: 'touch', lg: '28px' }} px="2" onClick={onClear}>
+            Take it away
+          </Button>
+        </span>
+      )}
+      <chakra.span display={{ base: 'none', lg: 'inline' }}>fit to sign</chakra.span>
     </Flex>
   );
 }

@@ -27,5 +27,6 @@ function words(total: number, failed: readonly CellVerdict['results'][number][],
     return `Fails: ${failed.map(({ criterion, value }) => `${criterion} (measured ${formatNumber(value ?? 0)})`).join('; ')}.`;
   }
   if (open > 0) return `${total - open} of ${total} criteria met, ${open} not measured.`;
-  return total === 1 ? 'Meets the criterion.' : `Meets all ${total} criteria.`;
+  if (total === 1) return 'Meets the criterion.';
+  return total === 2 ? 'Meets both criteria.' : `Meets all ${total} criteria.`;
 }

@@ -23,7 +23,7 @@ import { CouponPlate } from './coupon-plate';
 import { CriteriaPanel } from './criteria-panel';
 import { DraftButton } from './draft-button';
 import { KeyHints } from './key-hints';
-import { PhotoStrip } from './photo-strip';
+import { PhotoCaption, PhotoStrip } from './photo-strip';
 import { Conflict, NotSaved } from './rating-notices';
 import { TouchBar } from './touch-bar';
 import { ViewBar } from './view-bar';
@@ -95,6 +95,7 @@ function Log({ coupon, inspection, photos, choice, ratings }: LogProps) {
             photo={platePhoto}
             decimalSign={decimalSign}
             isRatingShown={isRatingShown}
+            caption={<PhotoCaption shown={shown} hasPhotos={photos.length > 0} timeZone={shop.timeZone} onCorners={setCornersOf} />}
             onRate={page.rateAndMove}
             onOpen={openPanel}
           />
@@ -105,8 +106,11 @@ function Log({ coupon, inspection, photos, choice, ratings }: LogProps) {
             timeZone={shop.timeZone}
             mayAdd={inspection.allowedActions.includes('photograph')}
             onShow={({ id }) => setPhotoId(id)}
-            onCorners={setCornersOf}
-          />
+          >
+            {inspection.allowedActions.includes('measure') && inspection.criteria !== null && (
+              <Button onClick={() => setIsMeasuring(true)}>Enter measurements</Button>
+            )}
+          </PhotoStrip>
           <KeyHints move={page.move} onMove={page.setMove} />
         </chakra.section>
         <Box display="grid" gap="4" alignContent="start" minW="0">
@@ -140,9 +144,6 @@ function Log({ coupon, inspection, photos, choice, ratings }: LogProps) {
                 />
               )}
               {!mayJudge && <chakra.p color="fg.muted">{whyNot(inspection, cell.markState === 'skipped')}</chakra.p>}
-              {inspection.allowedActions.includes('measure') && inspection.criteria !== null && (
-                <Button onClick={() => setIsMeasuring(true)}>Enter measurements</Button>
-              )}
               {inspection.allowedActions.includes('draft-recipe') && cell.markState !== 'skipped' && (
                 <DraftButton coupon={coupon} cell={cell} />
               )}

@@ -1,5 +1,5 @@
 import { Box, chakra, Flex } from '@chakra-ui/react';
-import { type Ref, useImperativeHandle, useMemo, useRef } from 'react';
+import { type ReactNode, type Ref, useImperativeHandle, useMemo, useRef } from 'react';
 import { useCouponLayout } from '../../../../components/plate/evidence-plate';
 import { FlatPhoto, type PlatePhoto } from '../../../../components/plate/flat-photo';
 import { HeatLegend } from '../../../../components/plate/heat-legend';
@@ -20,13 +20,15 @@ export type CouponPlateProps = {
   photo: PlatePhoto | undefined;
   decimalSign: '.' | ',';
   isRatingShown: boolean;
+  /** Stands in the place of the legend in the photo view. */
+  caption: ReactNode;
   onRate: (address: string, rating: number) => void;
   onOpen: () => void;
   ref: Ref<CouponPlateHandle>;
 };
 
 /** The plate with its levels outside, over its photo or as a map of one response. */
-export function CouponPlate({ coupon, choice, drawn, photo, decimalSign, isRatingShown, onRate, onOpen, ref }: CouponPlateProps) {
+export function CouponPlate({ coupon, choice, drawn, photo, decimalSign, isRatingShown, caption, onRate, onOpen, ref }: CouponPlateProps) {
   const { grid, cell } = choice;
   const { rows, columns, cellMm, gapMm } = grid;
   const { panel } = coupon.profile;
@@ -66,6 +68,7 @@ export function CouponPlate({ coupon, choice, drawn, photo, decimalSign, isRatin
         </Box>
       </PlateWithLevels>
       <chakra.div ml={{ base: '0', sm: '48px' }} mt="2.5" minHeight="44px">
+        {choice.view === 'photo' && caption}
         {drawn.legend !== undefined && drawn.scale !== undefined && <HeatLegend {...drawn.legend} scale={drawn.scale} />}
         {choice.view !== 'photo' && drawn.scale === undefined && <NothingMeasured />}
       </chakra.div>

@@ -1,5 +1,5 @@
 import { chakra, Flex } from '@chakra-ui/react';
-import { type ChangeEvent, useId } from 'react';
+import { type ChangeEvent, type ReactNode, useId } from 'react';
 import { Button } from '../../../../components/button';
 import { CrossIcon, PhotoIcon } from '../../../../components/icons';
 import { StateMark } from '../../../../components/state-mark';
@@ -16,16 +16,16 @@ export type PhotoStripProps = {
   timeZone: string;
   mayAdd: boolean;
   onShow: (photo: Photo) => void;
-  onCorners: (photo: Photo) => void;
+  /** More acts beside the one that adds photos. */
+  children?: ReactNode;
 };
 
 /** Photos of the coupon: what became of each, which one is shown, and new ones on their way. */
-export function PhotoStrip({ couponId, photos, shown, timeZone, mayAdd, onShow, onCorners }: PhotoStripProps) {
+export function PhotoStrip({ couponId, photos, shown, timeZone, mayAdd, onShow, children }: PhotoStripProps) {
   const { uploads, add, drop } = useUploads(couponId);
   return (
     <chakra.section aria-label="Photos" ml={{ base: '0', sm: '48px' }} mb="2" fontSize="sm" lineHeight="sm">
-      <ShownLine shown={shown} timeZone={timeZone} onCorners={onCorners} hasPhotos={photos.length > 0} />
-      <chakra.ul display="grid" gap="2" mt="2">
+      <chakra.ul display="grid" gap="2">
         {photos
           .filter((photo) => photo.id !== shown?.id)
           .map((photo) => (
@@ -35,14 +35,18 @@ export function PhotoStrip({ couponId, photos, shown, timeZone, mayAdd, onShow, 
           <UploadRow key={upload.key} upload={upload} onDrop={() => drop(upload.key)} />
         ))}
       </chakra.ul>
-      {mayAdd && <AddPhotos onFiles={add} />}
+      <Flex gap="2" mt="2" wrap="wrap">
+        {mayAdd && <AddPhotos onFiles={add} />}
+        {children}
+      </Flex>
     </chakra.section>
   );
 }
 
-type ShownLineProps = Pick<PhotoStripProps, 'shown' | 'timeZone' | 'onCorners'> & { hasPhotos: boolean };
+export type PhotoCaptionProps = { shown: Photo | undefined; hasPhotos: boolean; timeZone: string; onCorners: (photo: Photo) => void };
 
-function ShownLine({ shown, timeZone, onCorners, hasPhotos }: ShownLineProps) {
+/** Which photo lies under the cells, and how it was laid there. */
+export function PhotoCaption({ shown, timeZone, onCorners, hasPhotos }: PhotoCaptionProps) {
   const words =
     shown === undefined
       ? hasPhotos
@@ -50,7 +54,7 @@ function ShownLine({ shown, timeZone, onCorners, hasPhotos }: ShownLineProps) {
         : 'No photo yet. The plate is drawn as it was planned.'
       : `Photo of ${formatDate(shown.capturedAt ?? shown.createdAt, timeZone)}${cornerWords(shown)}`;
   return (
-    <Flex gap="3" align="center" color="fg.muted" wrap="wrap">
+    <Flex gap="3" align="center" color="fg.muted" fontSize="sm" lineHeight="sm">
       <PhotoIcon />
       <chakra.span flex={{ base: '1', sm: 'none' }}>{words}</chakra.span>
       {shown?.allowedActions.includes('set-corners') === true && (
@@ -140,12 +144,12 @@ function AddPhotos({ onFiles }: { onFiles: (files: readonly File[]) => void }) {
     event.target.value = '';
   };
   return (
-    <Flex gap="2" mt="2" wrap="wrap">
+    <>
       <FileButton label="Add photos" isMany onChange={handleChange} />
       <chakra.div display={{ base: 'block', lg: 'none' }}>
         <FileButton label="Take a photo" isCamera onChange={handleChange} />
       </chakra.div>
-    </Flex>
+    </>
   );
 }
 
