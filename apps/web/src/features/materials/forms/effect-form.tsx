@@ -8,7 +8,7 @@ import {
   type MeasurementQuantity,
   QUANTITIES,
 } from '@proofplate/recipe-model';
-import { type UseFormReturn, useFieldArray } from 'react-hook-form';
+import { type UseFormReturn, useFieldArray, useWatch } from 'react-hook-form';
 import { Button } from '../../../components/button';
 import { NumberField, SelectField, TextAreaField, TextField } from '../../../components/field';
 import { Form, messageAt, useSummaryForm } from '../../../components/form';
@@ -76,7 +76,7 @@ type RowProps = { form: UseFormReturn<Values>; index: number; onRemove: () => vo
 function CriterionRow({ form, index, onRemove }: RowProps) {
   const { locale } = useSession().shop;
   const { errors } = form.formState;
-  const { quantity, comparison } = form.watch(`criteria.${index}`);
+  const [quantity, comparison] = useWatch({ control: form.control, name: [`criteria.${index}.quantity`, `criteria.${index}.comparison`] });
   const { label, unit } = QUANTITIES[quantity];
   const rule: NumberRule = { what: 'The limit', unit: unit === '1' ? '' : unit, least: -LARGEST, most: LARGEST };
   const shownUnit = rule.unit === '' ? {} : { unit: rule.unit };

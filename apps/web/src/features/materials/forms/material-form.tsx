@@ -1,7 +1,7 @@
 import { chakra } from '@chakra-ui/react';
 import { MATERIAL_FAMILIES, MATERIAL_FAMILY_KEYS, materialFamilyOf } from '@proofplate/recipe-model';
 import { useId } from 'react';
-import type { UseFormReturn } from 'react-hook-form';
+import { type UseFormReturn, useWatch } from 'react-hook-form';
 import { Button } from '../../../components/button';
 import { NumberField, TextAreaField, TextField } from '../../../components/field';
 import { Form, messageAt, useSummaryForm } from '../../../components/form';
@@ -73,7 +73,7 @@ export function MaterialForm({ material, onSubmit }: MaterialFormProps) {
 /** Any word of the trade; the family that it stands for is said at once, because cautions hang on it. */
 function FamilyField({ form }: { form: UseFormReturn<MaterialValues> }) {
   const listId = useId();
-  const word = form.watch('family');
+  const word = useWatch({ control: form.control, name: 'family' });
   const family = materialFamilyOf(word);
   const heard =
     word.trim() === '' ? 'Such as stainless steel, 316L, vinyl or PMMA.' : `This counts as: ${MATERIAL_FAMILIES[family].label}.`;
