@@ -41,6 +41,7 @@ export const routes = [
               { path: paths.account, lazy: () => import('../routes/account') },
               { path: paths.coupons, lazy: () => import('../routes/coupons') },
               { path: paths.planCoupon, lazy: () => import('../routes/coupon-plan') },
+              { path: paths.importCoupon, lazy: () => import('../routes/coupon-import') },
               { path: '/coupons/:code', lazy: () => import('../routes/coupon') },
               { path: '/coupons/:code/mark', lazy: () => import('../routes/coupon-mark') },
               { path: paths.equipment, lazy: () => import('../routes/equipment') },

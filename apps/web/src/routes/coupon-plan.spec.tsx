@@ -112,7 +112,7 @@ describe('planning a coupon', () => {
   it('gives nobody’s word that cautions were read', async () => {
     const { user } = await openPage({ 'POST /api/coupons': () => ({ status: 201, body: { id: 'c', code: 'C-0124' } }) });
     fillIn();
-    await screen.findByText('Keep the extraction on');
+    await screen.findAllByText('Keep the extraction on');
     await user.click(screen.getByRole('button', { name: 'Save the plan' }));
     await screen.findByText('at the machine');
     expect(server.bodies('POST /api/coupons')).toEqual([expect.objectContaining({ acknowledgedCautionIds: [] })]);

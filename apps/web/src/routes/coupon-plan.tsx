@@ -3,7 +3,6 @@ import { useNavigate, useSearchParams } from 'react-router';
 import { Page } from '../components/page';
 import { ReadProblem } from '../components/read-problem';
 import { SkeletonForm } from '../components/skeletons';
-import { useStatusLine } from '../components/status-line';
 import { type Coupon, useCoupon } from '../features/coupons/coupons.api';
 import { PlanCoupon } from '../features/coupons/plan/plan-coupon';
 import { emptyPlan, planFrom } from '../features/coupons/plan/plan-values';
@@ -19,11 +18,7 @@ export function Component() {
   const [search] = useSearchParams();
   const [from, proves] = [search.get('from') ?? undefined, search.get('proves')];
   const navigate = useNavigate();
-  const announce = useStatusLine();
-  const handlePlanned = ({ code }: Coupon) => {
-    announce(`${code} is planned.`);
-    void navigate(paths.markCoupon(code));
-  };
+  const handlePlanned = ({ code }: Coupon) => void navigate(paths.markCoupon(code));
   if (proves !== null) {
     return (
       <Page title="Prove a draft" name="equal cells" crumbs={CRUMBS}>

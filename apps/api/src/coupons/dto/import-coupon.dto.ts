@@ -122,7 +122,7 @@ export class ImportCouponDto extends CouponSubjectDto {
   @MaxLength(MAX_TABLE_LENGTH, { message: 'This table is too long. Paste one plate at a time.' })
   table?: string;
 
-  @ApiPropertyOptional({ enum: ['.', ','], description: 'Decimal sign of the table', default: '.' })
+  @ApiPropertyOptional({ enum: ['.', ','], description: 'Decimal sign of the table; absent: a point' })
   @IsOptional()
   @IsIn(['.', ','], { message: 'The decimal sign is a point or a comma.' })
   decimalSign?: '.' | ',';

@@ -60,7 +60,7 @@ export function CoolDown({ secondsLeft, onSkip }: { secondsLeft: number; onSkip:
       borderColor="straw.emphasized"
       borderRadius="md"
     >
-      <chakra.span role="timer" aria-label="Cool-down">
+      <chakra.span role="timer" aria-label="Time left to cool">
         Cool down, <b>{formatDuration(secondsLeft)}</b> left
       </chakra.span>
       <Button size="glove" kind="quiet" onClick={onSkip}>

@@ -37,8 +37,12 @@ export function MarkCells({ coupon, ordered, current, marking, locale }: MarkCel
   };
   if (pause.isPaused) return <PausedNotice pause={pause} />;
   return (
-    <chakra.div display="grid" gap="3" maxW="640px">
+    // the bar of two rows is taller than the foot of a page allows for; nothing may stay under it
+    <chakra.div display="grid" gap="3" maxW="640px" pb={{ base: '24', lg: '0' }}>
       <CellHead current={current} ordered={ordered} />
+      <chakra.p role="status" color="fg.muted" _empty={{ display: 'none' }}>
+        {marking.note}
+      </chakra.p>
       {marking.problem !== undefined && open === undefined && (
         <ProblemNotice
           what={`${marking.problem.address} was not saved.`}

@@ -1,5 +1,4 @@
 import { useRef, useState } from 'react';
-import { useStatusLine } from '../../../components/status-line';
 import { ProblemError } from '../../../lib/api';
 import { newIdempotencyKey } from '../../../lib/idempotency-key';
 import { type Coupon, type CouponCell, type MarkBody, type MarkedCell, markCell, undoMark } from '../coupons.api';
@@ -14,6 +13,8 @@ export type Marking = {
   retry: () => void;
   isBusy: boolean;
   problem: { address: string; error: ProblemError } | undefined;
+  /** What was just taken back or overtaken. */
+  note: string | undefined;
 };
 
 /** The coupon as the page holds it. */
@@ -30,7 +31,8 @@ export function useMarking(coupon: Coupon, page: CouponOnPage): Marking {
   const [problem, setProblem] = useState<Marking['problem']>();
   const again = useRef<() => void>(undefined);
   const isRunning = useRef(false);
-  const announce = useStatusLine();
+  // the usual line at the foot would lie over the act of the next cell
+  const [note, setNote] = useState<string>();
 
   const run = async (cell: CouponCell, act: () => Promise<MarkedCell>): Promise<void> => {
     // a second tap with a thick glove is not a second cell
@@ -38,6 +40,7 @@ export function useMarking(coupon: Coupon, page: CouponOnPage): Marking {
     isRunning.current = true;
     setIsBusy(true);
     setProblem(undefined);
+    setNote(undefined);
     try {
       const marked = await act();
       page.change((shown) => ({ ...shown, cells: shown.cells.map((own) => (own.id === marked.cell.id ? marked.cell : own)) }));
@@ -45,7 +48,7 @@ export function useMarking(coupon: Coupon, page: CouponOnPage): Marking {
       if (!(error instanceof ProblemError)) throw error;
       if (error.code === STALE) {
         await page.readAgain();
-        announce(`${cell.address} was marked by somebody else meanwhile. The page shows the present state.`);
+        setNote(`${cell.address} was marked by somebody else meanwhile. The page shows the present state.`);
         return;
       }
       setProblem({ address: cell.address, error });
@@ -71,7 +74,7 @@ export function useMarking(coupon: Coupon, page: CouponOnPage): Marking {
   const undo = async (cell: CouponCell, key = newIdempotencyKey()): Promise<void> => {
     again.current = () => void undo(cell, key);
     const isUndone = await quietly(run(cell, () => undoMark(coupon, cell, key)));
-    if (isUndone) announce(`${cell.address} is to be marked again.`);
+    if (isUndone) setNote(`${cell.address} is to be marked again.`);
   };
   return {
     mark: (cell, outcome) => quietly(markOrThrow(cell, outcome)),
@@ -80,5 +83,6 @@ export function useMarking(coupon: Coupon, page: CouponOnPage): Marking {
     retry: () => again.current?.(),
     isBusy,
     problem,
+    note,
   };
 }
