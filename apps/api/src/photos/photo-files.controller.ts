@@ -27,7 +27,7 @@ export class PhotoFilesController {
   @ApiProduces('image/jpeg')
   @ApiOkResponse({ description: 'JPEG', schema: { type: 'string', format: 'binary' } })
   @Header('Cache-Control', `private, max-age=${ADDRESS_LIFE_S}, immutable`)
-  @Header('Content-Security-Policy', "default-src 'none'; sandbox")
+  @Header('Content-Security-Policy', "default-src 'none'; frame-ancestors 'none'; sandbox")
   @Header('Cross-Origin-Resource-Policy', 'same-origin')
   @Header('X-Content-Type-Options', 'nosniff')
   async get(

@@ -4,6 +4,9 @@ import { DomainError } from '../errors/domain-error';
 import { frameworkProblem } from './framework-problem';
 import { type Problem, problem } from './problem';
 
+/** What a route says of the content it would have answered with; a refusal in its place must be neither kept nor saved as a file. */
+const ABOUT_THE_CONTENT = ['cache-control', 'content-disposition', 'content-security-policy', 'etag'];
+
 /** Turns every failure into RFC 9457 problem details. What is not known becomes 500 without internals, logged with the request id. */
 @Catch()
 export class ProblemDetailsFilter implements ExceptionFilter {
@@ -16,6 +19,7 @@ export class ProblemDetailsFilter implements ExceptionFilter {
     if (reply.sent) return;
     const answer = problemOf(error);
     if (answer.status >= 500) this.logger.error({ err: error, requestId: request.id, code: answer.code }, answer.title);
+    for (const name of ABOUT_THE_CONTENT) reply.removeHeader(name);
     void reply
       .code(answer.status)
       .headers(answer.headers)
