@@ -8,16 +8,17 @@ export type Check = { key: string; title: string; detail: string; passes: boolea
 export type CheckListProps = {
   title?: string;
   checks: readonly Check[];
-  /** Passing checks that are named in one line at the end instead of a row each. */
-  foldPassing?: boolean;
+  /** Keys of passing checks that are shown in full; the other passing ones are named in one line. Absent: all in full. */
+  inFull?: ReadonlySet<string>;
   children?: ReactNode;
 };
 
 /** Everything that is checked, what fails first and in full. */
-export function CheckList({ title = 'Checks', checks, foldPassing = false, children }: CheckListProps) {
+export function CheckList({ title = 'Checks', checks, inFull, children }: CheckListProps) {
   const failing = checks.filter(({ passes }) => !passes);
   const passing = checks.filter(({ passes }) => passes);
-  const rows = foldPassing ? failing : [...failing, ...passing];
+  const shown = passing.filter(({ key }) => inFull === undefined || inFull.has(key));
+  const folded = passing.filter((check) => !shown.includes(check));
   return (
     <Panel px="5" pt="3" pb="2" aria-label={title}>
       <Flex justify="space-between" align="baseline" gap="3" wrap="wrap">
@@ -32,14 +33,13 @@ export function CheckList({ title = 'Checks', checks, foldPassing = false, child
         </chakra.span>
       </Flex>
       <chakra.ul mt="1">
-        {rows.map((check) => (
+        {[...failing, ...shown].map((check) => (
           <CheckRow key={check.key} check={check} />
         ))}
       </chakra.ul>
-      {foldPassing && passing.length > 0 && (
+      {folded.length > 0 && (
         <chakra.p fontSize="sm" lineHeight="sm" color="fg.muted" pl="6" pb="1">
-          {failing.length > 0 ? 'Also pass: ' : 'Pass: '}
-          {passing.map(({ title: name }) => lowerFirst(name)).join(', ')}
+          Also pass: {folded.map(({ title: name }) => lowerFirst(name)).join(', ')}
         </chakra.p>
       )}
       {children}

@@ -1,4 +1,4 @@
-import { changeShare, changeWords, kindWords } from './change-words';
+import { alignedNumbers, changeShare, changeWords, kindWords, shownNumber } from './change-words';
 
 describe('words of a change', () => {
   it('are percents of the earlier value for a quantity', () => {
@@ -30,5 +30,16 @@ describe('changeShare', () => {
 
   it('is nothing where the earlier value is zero or not known', () => {
     expect([changeShare(0, 5), changeShare(null, 5), changeShare(5, null)]).toEqual([undefined, undefined, undefined]);
+  });
+});
+
+describe('numbers side by side', () => {
+  it('have three digits where they were computed', () => {
+    expect([13, 0.035251, 4.8148].map(shownNumber)).toEqual(['13.0', '0.0353', '4.81']);
+  });
+
+  it('share the decimals of the finest where they were typed', () => {
+    const shown = alignedNumbers([0.012, 0.01, null]);
+    expect([0.012, 0.01].map(shown)).toEqual(['0.012', '0.010']);
   });
 });

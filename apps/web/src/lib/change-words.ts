@@ -24,7 +24,20 @@ export function kindWords(change: string): string | undefined {
   return Object.entries(ADDED_WORDS).find(([key]) => key === change)?.[1];
 }
 
-/** A computed number to three digits, a typed one as it was typed. */
+const SHOWN_DIGITS = 3;
+/** Below it a computed number is the noise of its formula. */
+const NOTHING = 1e-6;
+const MOST_DECIMALS = 6;
+
+/** A computed number to three digits: 13.0, 0.0353, 1230. */
 export function shownNumber(value: number): string {
-  return formatNumber(Number(value.toPrecision(3)));
+  if (Math.abs(value) < NOTHING) return '0';
+  return formatNumber(value, { significantDigits: SHOWN_DIGITS });
+}
+
+/** Typed numbers of one row with the decimals of the finest among them: 0.010 beside 0.012. */
+export function alignedNumbers(values: readonly (number | null)[]): (value: number) => string {
+  const places = values.map((value) => (value === null ? 0 : (String(value).split('.')[1] ?? '').length));
+  const decimals = Math.min(MOST_DECIMALS, Math.max(0, ...places));
+  return (value) => formatNumber(value, { decimals });
 }

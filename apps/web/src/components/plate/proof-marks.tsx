@@ -63,7 +63,8 @@ function whereAndWhen({ lot, markedAt }: CitedCell, timeZone: string): string {
 
 function Mark({ cell }: { cell: CitedCell }) {
   const { address, measurements, meets } = cell;
-  const first = measurements.find(({ value }) => value !== null);
+  const numbers = measurements.filter(({ value }) => value !== null);
+  const first = numbers.find(({ quantity }) => quantity === 'lightness') ?? numbers[0];
   return (
     <chakra.li display="grid" gridTemplateColumns="52px auto" gap="2" alignItems="center" minW="96px" fontSize="sm" lineHeight="sm">
       <CellCloseUp shape={shapeOf(cell)} photo={platePhotoOf(cell.photo, 'small')} address={address} />

@@ -27,24 +27,17 @@ const LABELS: Readonly<Record<string, string>> = {
   markingTime: 'Marking time',
 };
 
-/** In the order in which a marker thinks: what arrives, how densely, how long. */
-const SHOWN_FIRST = new Set([
-  'spotAtWork',
-  'pulseEnergy',
-  'peakFluence',
-  'averageIrradiance',
-  'pulsePitch',
-  'lineOverlap',
-  'arealDose',
-  'timePer100Mm2',
-]);
+/** What a marker asks for, known or not. */
+const ALWAYS_FIRST = new Set(['spotAtWork', 'arealDose', 'timePer100Mm2']);
+/** Numbers of one mode of the source: pulses have no average irradiance, a continuous beam has no pulse energy. */
+const FIRST_WHEN_KNOWN = new Set(['pulseEnergy', 'peakFluence', 'averageIrradiance', 'pulsePitch', 'lineOverlap']);
 
 export function derivedLabel(key: string): string {
   return LABELS[key] ?? key;
 }
 
-export function isShownFirst(key: string): boolean {
-  return SHOWN_FIRST.has(key);
+export function isShownFirst({ key, value }: { key: string; value: number | null }): boolean {
+  return ALWAYS_FIRST.has(key) || (value !== null && FIRST_WHEN_KNOWN.has(key));
 }
 
 /** Unit at the end of an input's name, longest first. */

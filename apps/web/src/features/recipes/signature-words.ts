@@ -12,6 +12,6 @@ const MEANING_WORDS: Record<SignOff['meaning'], string> = {
 
 /** "Approved for use as lead operator, 3 Mar 2026 09:12 CET". */
 export function signatureCaption({ meaning, role, signedAt, isByAuthor }: SignOff, timeZone: string): string {
-  const byAuthor = isByAuthor ? ', signed by its author' : '';
+  const byAuthor = isByAuthor && meaning === 'approved' ? ', signed by its author' : '';
   return `${MEANING_WORDS[meaning]} as ${roleWord(role)}${byAuthor}, ${formatTime(signedAt, timeZone)}`;
 }

@@ -56,7 +56,7 @@ describe('whatChanges', () => {
     });
     expect(lines.map(({ before, after, change }) => [before, after, change])).toEqual([
       ['not set', '60', 'added'],
-      ['3', 'not known', 'not comparable'],
+      ['3.00', 'not known', 'not comparable'],
     ]);
   });
 });

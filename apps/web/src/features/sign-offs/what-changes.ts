@@ -1,4 +1,4 @@
-import { changeShare, changeWords, kindWords, shownNumber } from '../../lib/change-words';
+import { alignedNumbers, changeShare, changeWords, kindWords, shownNumber } from '../../lib/change-words';
 import { formatNumber, formatQuantity } from '../../lib/format';
 import type { Comparison, ComparisonRow } from './sign-offs.api';
 
@@ -54,7 +54,8 @@ function percentWords(share: number): string {
 function valueText({ values, group }: ComparisonRow, index: number): string {
   const side = values[index];
   if (side === undefined || (side.value === null && side.text === null)) return side?.missingBecause === null ? 'not set' : 'not known';
-  return group === 'work' && side.value !== null ? shownNumber(side.value) : (side.text ?? formatNumber(side.value ?? 0));
+  if (side.value === null) return side.text ?? '';
+  return group === 'work' ? shownNumber(side.value) : alignedNumbers(values.map(({ value }) => value))(side.value);
 }
 
 /** Power: points of the panel and what they are in watts. */
@@ -72,7 +73,8 @@ function noteOf({ key, group, step, values }: ComparisonRow, rows: readonly Comp
 }
 
 function sameWords(row: ComparisonRow, hasSteps: boolean): string {
-  return `${lowerFirst(named(row, hasSteps))} ${valueText(row, 0)}${row.unit === '' ? '' : `\u00A0${row.unit}`}`;
+  const text = row.values[0]?.value === null ? lowerFirst(valueText(row, 0)) : valueText(row, 0);
+  return `${lowerFirst(named(row, hasSteps))} ${text}${row.unit === '' ? '' : `\u00A0${row.unit}`}`;
 }
 
 function named({ label, step }: ComparisonRow, hasSteps: boolean): string {

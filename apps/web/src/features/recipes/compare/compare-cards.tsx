@@ -26,27 +26,29 @@ export function CompareCards({ comparison, view, onReference, onRemove }: Compar
       {view.groups.map((group) => (
         <Panel key={group.key} px="4" py="3" aria-label={group.title}>
           <h2>{group.title}</h2>
-          {group.rows.map((row) => (
-            <chakra.div key={row.key} borderTop="hairline" py="2" fontSize="sm" lineHeight="sm">
-              <b>{row.label}</b> <chakra.span color="fg.muted">{row.unit}</chakra.span>
-              {row.cells.map((cell) => (
-                <chakra.div
-                  key={cell.revisionId}
-                  display="grid"
-                  gridTemplateColumns="92px 76px minmax(0, 1fr)"
-                  gap="2"
-                  alignItems="center"
-                  minHeight="28px"
-                >
-                  <chakra.span color="fg.muted">{nameOf(cell.revisionId)}</chakra.span>
-                  <chakra.span textAlign="end" fontWeight={cell.isMissing ? 'normal' : 'semibold'}>
-                    {cell.text}
-                  </chakra.span>
-                  {cell.isReference ? <chakra.span color="fg.muted">the reference</chakra.span> : <Change cell={cell} />}
-                </chakra.div>
-              ))}
-            </chakra.div>
-          ))}
+          {group.rows
+            .filter(({ isAside }) => !isAside)
+            .map((row) => (
+              <chakra.div key={row.key} borderTop="hairline" py="2" fontSize="sm" lineHeight="sm">
+                <b>{row.label}</b> <chakra.span color="fg.muted">{row.unit}</chakra.span>
+                {row.cells.map((cell) => (
+                  <chakra.div
+                    key={cell.revisionId}
+                    display="grid"
+                    gridTemplateColumns="92px 76px minmax(0, 1fr)"
+                    gap="2"
+                    alignItems="center"
+                    minHeight="28px"
+                  >
+                    <chakra.span color="fg.muted">{nameOf(cell.revisionId)}</chakra.span>
+                    <chakra.span textAlign="end" fontWeight={cell.isMissing ? 'normal' : 'semibold'}>
+                      {cell.text}
+                    </chakra.span>
+                    {cell.isReference ? <chakra.span color="fg.muted">the reference</chakra.span> : <Change cell={cell} />}
+                  </chakra.div>
+                ))}
+              </chakra.div>
+            ))}
         </Panel>
       ))}
       {view.hidden.length > 0 && (

@@ -1,5 +1,5 @@
 import { chakra } from '@chakra-ui/react';
-import { Fragment } from 'react';
+import { Fragment, useState } from 'react';
 import { ChangeTrack } from '../../../components/change-bar';
 import { Panel } from '../../../components/page';
 import { StateShape } from '../../../components/state-mark';
@@ -27,14 +27,24 @@ export function CompareTable({ comparison, view, onReference, onRemove }: Compar
       <chakra.table
         width="full"
         minW={`${220 + revisions.length * 260}px`}
+        tableLayout="fixed"
         borderCollapse="separate"
         borderSpacing="0"
         fontSize="sm"
         lineHeight="sm"
       >
+        <colgroup>
+          <chakra.col width="220px" />
+          {revisions.map(({ id }) => (
+            <Fragment key={id}>
+              <chakra.col width="104px" />
+              <col />
+            </Fragment>
+          ))}
+        </colgroup>
         <thead>
           <tr>
-            <chakra.td p="5" verticalAlign="top" borderTop="3px solid transparent" minW="190px">
+            <chakra.td p="5" verticalAlign="top" borderTop="3px solid transparent">
               <ReferenceChoice revisions={revisions} referenceId={referenceId} onReference={onReference} />
               <chakra.p mt="3" color="fg.muted">
                 Bars: change in percent
@@ -64,9 +74,7 @@ export function CompareTable({ comparison, view, onReference, onRemove }: Compar
             <tr>
               <GroupTitle span={1 + revisions.length * 2}>{group.title}</GroupTitle>
             </tr>
-            {group.rows.map((row) => (
-              <Row key={row.key} row={row} />
-            ))}
+            <GroupRows rows={group.rows} span={1 + revisions.length * 2} />
           </tbody>
         ))}
         <tbody>
@@ -75,7 +83,7 @@ export function CompareTable({ comparison, view, onReference, onRemove }: Compar
           </tr>
           <tr>
             <chakra.td px="5" py="2.5" verticalAlign="top" color="fg.muted">
-              {view.hidden.length > 0 && `Equal rows hidden: ${view.hidden.join(', ')}`}
+              Reason and approval
             </chakra.td>
             {revisions.map((revision) => (
               <chakra.td
@@ -92,6 +100,11 @@ export function CompareTable({ comparison, view, onReference, onRemove }: Compar
           </tr>
         </tbody>
       </chakra.table>
+      {view.hidden.length > 0 && (
+        <chakra.p px="5" py="2.5" fontSize="sm" lineHeight="sm" color="fg.muted" borderTop="hairline">
+          Equal rows hidden: {view.hidden.join(', ')}
+        </chakra.p>
+      )}
     </Panel>
   );
 }
@@ -115,10 +128,41 @@ function GroupTitle({ span, children }: { span: number; children: string }) {
   );
 }
 
+/** The numbers that are asked for, then one line that opens the others. */
+function GroupRows({ rows, span }: { rows: readonly RowView[]; span: number }) {
+  const [isOpen, setIsOpen] = useState(false);
+  const asides = rows.filter(({ isAside }) => isAside).length;
+  const shown = rows.filter(({ isAside }) => isOpen || !isAside);
+  return (
+    <>
+      {shown.map((row) => (
+        <Row key={row.key} row={row} />
+      ))}
+      {asides > 0 && (
+        <tr>
+          <chakra.td colSpan={span} px="5">
+            <chakra.button
+              type="button"
+              aria-expanded={isOpen}
+              onClick={() => setIsOpen(!isOpen)}
+              minHeight={{ base: '44px', lg: '30px' }}
+              color="brand.fg"
+              textDecoration="underline"
+              cursor="pointer"
+            >
+              {isOpen ? 'Fewer numbers' : `${asides} more numbers`}
+            </chakra.button>
+          </chakra.td>
+        </tr>
+      )}
+    </>
+  );
+}
+
 function Row({ row: { label, unit, cells } }: { row: RowView }) {
   return (
     <tr>
-      <chakra.th scope="row" textAlign="start" fontWeight="normal" height="29px" px="5" borderBottom="hairline" whiteSpace="nowrap">
+      <chakra.th scope="row" textAlign="start" fontWeight="normal" height="29px" px="5" borderBottom="hairline">
         {label} <chakra.span color="fg.muted">{unit}</chakra.span>
       </chakra.th>
       {cells.map((cell) => (
@@ -135,7 +179,7 @@ function Row({ row: { label, unit, cells } }: { row: RowView }) {
           >
             {cell.text}
           </chakra.td>
-          <chakra.td px="3" borderBottom="hairline" minW="150px" bg={cell.isReference ? 'bg.subtle' : undefined}>
+          <chakra.td px="3" borderBottom="hairline" bg={cell.isReference ? 'bg.subtle' : undefined}>
             <Change cell={cell} />
           </chakra.td>
         </Fragment>

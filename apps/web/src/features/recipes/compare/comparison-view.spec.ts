@@ -73,6 +73,16 @@ describe('comparisonView', () => {
     expect(groups[0]?.rows[0]?.cells[0]?.change).toBe('−3.5');
   });
 
+  it('shows the decimals of the finest value in the whole row', () => {
+    const { groups } = comparisonView(comparison([row('Line spacing', [{ value: 0.012 }, { value: 0.01 }], { unit: 'mm' })]), options);
+    expect(groups[0]?.rows[0]?.cells.map(({ text }) => text)).toEqual(['0.012', '0.010']);
+  });
+
+  it('takes computed numbers that read the same for the same', () => {
+    const ripple = row('coverageRipple', [{ value: 2e-9 }, { value: 3e-11 }], { group: 'work', label: 'Coverage ripple', unit: '1' });
+    expect(comparisonView(comparison([ripple]), options)).toEqual({ groups: [], hidden: ['coverage ripple'] });
+  });
+
   it('names the step of a row as soon as there is more than one', () => {
     const { groups } = comparisonView(
       comparison([row('Speed', [{ value: 1 }, { value: 2 }]), row('Speed', [{ value: 1 }, { value: 2 }], { step: 2 })]),

@@ -1,5 +1,6 @@
-import { changeShare, changeWords, kindWords, shownNumber } from '../../../lib/change-words';
+import { alignedNumbers, changeShare, changeWords, kindWords, shownNumber } from '../../../lib/change-words';
 import { formatNumber } from '../../../lib/format';
+import { decimalsOf, symbolOf } from '../../../lib/measurement-words';
 import type { Comparison, ComparisonRow } from '../recipes.api';
 
 export type CellView = {
@@ -12,10 +13,32 @@ export type CellView = {
   /** "−26 %", "same", "added"; empty for the reference. */
   change: string;
 };
-export type RowView = { key: string; label: string; unit: string; cells: readonly CellView[] };
+export type RowView = {
+  key: string;
+  label: string;
+  unit: string;
+  cells: readonly CellView[];
+  /** A computed number that most people do not ask for. */
+  isAside: boolean;
+};
 export type GroupView = { key: ComparisonRow['group']; title: string; rows: readonly RowView[] };
 
 export type ComparisonView = { groups: readonly GroupView[]; hidden: readonly string[] };
+
+/** Computed numbers that show at once; the others open on demand. */
+const ASKED_FOR = new Set([
+  'powerW',
+  'pulseEnergy',
+  'rectangularPeakPower',
+  'peakFluence',
+  'averageIrradiance',
+  'pulsePitch',
+  'arealDose',
+  'timePer100Mm2',
+]);
+/** A share of what may be zero says nothing. */
+const CROSSES_ZERO = new Set(['a', 'b', 'hue-angle', 'focusOffsetMm', 'hatchAngleDeg', 'angleStepDeg']);
+const MARK_ORDER = ['lightness', 'contrast', 'evenness', 'depth'];
 
 /** Rows in the four questions' order; with `onlyDiffering` equal rows are left out and named. */
 export function comparisonView(
@@ -23,7 +46,7 @@ export function comparisonView(
   { machineName, onlyDiffering }: { machineName: string; onlyDiffering: boolean },
 ): ComparisonView {
   const hasSteps = rows.some(({ step }) => step !== null && step > 1);
-  const shown = rows.filter(({ isSame }) => !onlyDiffering || !isSame);
+  const shown = rows.filter((row) => !onlyDiffering || !looksSame(row));
   const hidden = rows.filter((row) => !shown.includes(row));
   const titles: readonly (readonly [ComparisonRow['group'], string])[] = [
     ['entered', `As entered on ${machineName}’s panel`],
@@ -33,7 +56,7 @@ export function comparisonView(
   const groups = titles.map(([key, title]) => ({
     key,
     title,
-    rows: shown.filter(({ group }) => group === key).map((row) => rowView(row, referenceId, hasSteps)),
+    rows: inOrder(shown.filter(({ group }) => group === key)).map((row) => rowView(row, referenceId, hasSteps)),
   }));
   return {
     groups: groups.filter(({ rows: own }) => own.length > 0),
@@ -41,26 +64,42 @@ export function comparisonView(
   };
 }
 
+/** Computed numbers that read the same are the same to whoever compares them. */
+function looksSame(row: ComparisonRow): boolean {
+  const texts = new Set(row.values.map((side) => valueText(row, side)));
+  return row.isSame || (row.group === 'work' && texts.size === 1);
+}
+
+function inOrder(rows: readonly ComparisonRow[]): readonly ComparisonRow[] {
+  const place = ({ group, key }: ComparisonRow) =>
+    group === 'mark' && MARK_ORDER.includes(key) ? MARK_ORDER.indexOf(key) : MARK_ORDER.length;
+  return rows.toSorted((one, other) => place(one) - place(other));
+}
+
 function rowView(row: ComparisonRow, referenceId: string, hasSteps: boolean): RowView {
   const reference = row.values.find(({ revisionId }) => revisionId === referenceId);
   return {
     key: `${row.group} ${row.step ?? 0} ${row.key}`,
     label: named(row, hasSteps),
-    unit: row.unit,
+    unit: row.unit === '1' ? '' : row.unit,
+    isAside: row.group === 'work' && !ASKED_FOR.has(row.key),
     cells: row.values.map((side) => ({
       revisionId: side.revisionId,
       isReference: side.revisionId === referenceId,
       text: valueText(row, side),
       isMissing: side.value === null && side.text === null,
-      share: side.change === 'changed' ? changeShare(reference?.value ?? null, side.value) : undefined,
+      share: side.change === 'changed' && !CROSSES_ZERO.has(row.key) ? changeShare(reference?.value ?? null, side.value) : undefined,
       change: changeText(row, side),
     })),
   };
 }
 
-function valueText({ group }: ComparisonRow, { value, text, missingBecause }: ComparisonRow['values'][number]): string {
+function valueText(row: ComparisonRow, { value, text, missingBecause }: ComparisonRow['values'][number]): string {
   if (value === null && text === null) return missingBecause === null ? 'not set' : 'not known';
-  return group === 'entered' || value === null ? (text ?? '') : shownNumber(value);
+  if (value === null) return text ?? '';
+  if (row.group === 'mark') return formatNumber(value, { decimals: decimalsOf(row.key) });
+  // The row's finest value decides the decimals of all: 0.010 beside 0.012.
+  return row.group === 'work' ? shownNumber(value) : alignedNumbers(row.values.map((side) => side.value))(value);
 }
 
 function changeText({ group }: ComparisonRow, { change, size }: ComparisonRow['values'][number]): string {
@@ -73,8 +112,11 @@ function changeText({ group }: ComparisonRow, { change, size }: ComparisonRow['v
   return group === 'mark' ? formatNumber(Number(size.delta.toPrecision(3)), { isSigned: true }) : changeWords(size);
 }
 
-function named({ label, step }: ComparisonRow, hasSteps: boolean): string {
+function named({ group, key, label, step }: ComparisonRow, hasSteps: boolean): string {
+  if (group === 'mark') return `${label} ${symbolOf(key)}`;
   return hasSteps && step !== null ? `Step ${step}: ${label}` : label;
 }
 
-const lowerFirst = (words: string) => (/^[A-Z][a-z]/.test(words) ? words.charAt(0).toLowerCase() + words.slice(1) : words);
+/** Names of people keep their capital. */
+const lowerFirst = (words: string) =>
+  /^(?!Rayleigh|Gaussian)[A-Z][a-z]/.test(words) ? words.charAt(0).toLowerCase() + words.slice(1) : words;

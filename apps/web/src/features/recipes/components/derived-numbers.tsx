@@ -5,8 +5,8 @@ import type { DerivedNumber } from '../recipes.api';
 
 /** Numbers that follow from a step; each opens to its formula, its inputs and its source. */
 export function DerivedNumbers({ numbers, label }: { numbers: readonly DerivedNumber[]; label: string }) {
-  const first = numbers.filter(({ key }) => isShownFirst(key));
-  const rest = numbers.filter(({ key }) => !isShownFirst(key));
+  const first = numbers.filter(isShownFirst);
+  const rest = numbers.filter((number) => !isShownFirst(number));
   return (
     <chakra.section aria-label={label}>
       <NumberList numbers={first} />

@@ -9,7 +9,8 @@ import type { RecipeFace as Face } from '../recipes.api';
 
 const HEIGHT_PX = 40;
 const WIDEST_PX = 54;
-const MARGIN_MM = 3;
+/** Between the cells and the letters that are burnt beside them. */
+const MARGIN_MM = 1.2;
 
 /** The plate's face in a row: the cells alone, the cell that stands for the recipe ringed. */
 export function RecipeFace({ face }: { face: Face }) {
@@ -32,7 +33,7 @@ export function RecipeFace({ face }: { face: Face }) {
           height="full"
           aria-hidden="true"
         >
-          {chosen !== undefined && <PlateRing rect={chosen.rect} weight={Math.max(1.7, region.widthMm / 22)} />}
+          {chosen !== undefined && <PlateRing rect={chosen.rect} weight={Math.max(1.7, region.widthMm / 15)} />}
         </chakra.svg>
       </FlatPhoto>
     </chakra.div>

@@ -104,7 +104,9 @@ function NoMatch({ filters, chosen, facets, mayPlan, search, onChange }: NoMatch
   );
 }
 
-const Input = chakra('input', { base: { flex: '1', minW: '0', alignSelf: 'stretch', bg: 'transparent', outline: 'none !important' } });
+const Input = chakra('input', {
+  base: { flex: '1', minW: '0', alignSelf: 'stretch', bg: 'transparent', outline: 'none !important', _placeholder: { color: 'fg.muted' } },
+});
 
 /** Results follow the typing; Enter does not wait. */
 function SearchBox({ value, onSearch }: { value: string; onSearch: (words: string) => void }) {

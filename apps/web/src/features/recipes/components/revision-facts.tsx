@@ -21,7 +21,7 @@ export function RevisionFacts({ revision }: { revision: Revision }) {
     ...rangeFact('Use for thickness', limits.thicknessMm),
     ...rangeFact('Use for diameter', limits.partDiameterMm),
     ...(scope.customerSpecification === undefined ? [] : [{ label: 'Customer specification', value: scope.customerSpecification }]),
-    { label: 'Power table', value: calibration === null ? 'none cited' : `${calibration.measuredOn}, ${calibration.meter}` },
+    { label: 'Power table', value: calibration === null ? 'none cited' : `${date(calibration.measuredOn)}, ${calibration.meter}` },
     { label: 'Machine profile', value: profile.isPresent ? `version ${profile.number}` : `version ${profile.number}, changed since` },
     ...(effectiveFrom === null ? [] : [{ label: 'Takes effect', value: date(effectiveFrom) }]),
     ...(reviewDue === null ? [] : [{ label: 'Re-prove by', value: date(reviewDue) }]),

@@ -8,8 +8,15 @@ import { type ChangeLine, whatChanges } from '../what-changes';
 export function ChangeTable({ comparison, before, after }: { comparison: Comparison; before: string; after: string }) {
   const { lines, same } = whatChanges(comparison);
   return (
-    <Panel px="1.5" pt="1.5" overflowX="auto">
-      <chakra.table width="full" borderCollapse="separate" borderSpacing="0" fontSize="sm" lineHeight="sm">
+    <Panel px="1.5" pt="1.5" overflowX="auto" tabIndex={0} aria-label="What changes">
+      <chakra.table
+        display={{ base: 'none', sm: 'table' }}
+        width="full"
+        borderCollapse="separate"
+        borderSpacing="0"
+        fontSize="sm"
+        lineHeight="sm"
+      >
         <thead>
           <tr>
             <Head>What changes</Head>
@@ -30,11 +37,35 @@ export function ChangeTable({ comparison, before, after }: { comparison: Compari
           ))}
         </tbody>
       </chakra.table>
+      <chakra.ul display={{ base: 'block', sm: 'none' }} px="2.5" fontSize="sm" lineHeight="sm">
+        {lines.map((line) => (
+          <Card key={line.key} line={line} />
+        ))}
+      </chakra.ul>
       <chakra.p px="2.5" py="2" fontSize="sm" lineHeight="sm" color="fg.muted">
         {lines.length === 0 && 'No parameter changes. '}
         {same.length > 0 && `The same in both: ${same.join(', ')}`}
       </chakra.p>
     </Panel>
+  );
+}
+
+/** Below 600 px a line is a card. */
+function Card({ line: { label, before, after, unit, share, change, note, isLit } }: { line: ChangeLine }) {
+  return (
+    <chakra.li borderBottom="hairline" py="2" bg={isLit ? 'straw.subtle' : undefined}>
+      <chakra.span display="flex" justifyContent="space-between" gap="3">
+        <b>{label}</b>
+        <span>
+          {before} → <b>{after}</b> <chakra.span color="fg.muted">{unit}</chakra.span>
+        </span>
+      </chakra.span>
+      <chakra.span display="flex" justifyContent="space-between" alignItems="center" gap="3">
+        {share !== undefined && <ChangeTrack change={share} />}
+        <chakra.span ml="auto">{change}</chakra.span>
+      </chakra.span>
+      {(note !== '' || isLit) && <chakra.span color={isLit ? 'straw.fg' : 'fg.muted'}>{isLit ? 'takes longer' : note}</chakra.span>}
+    </chakra.li>
   );
 }
 
@@ -80,11 +111,11 @@ function Line({ line: { label, before, after, unit, share, change, note, isLit }
       <chakra.td {...cell} whiteSpace="normal">
         <chakra.span display="flex" alignItems="center" gap="2.5">
           {share !== undefined && (
-            <chakra.span flex="0 0 150px">
+            <chakra.span flex="0 0 120px">
               <ChangeTrack change={share} />
             </chakra.span>
           )}
-          <chakra.span color={isLit ? 'straw.fg' : 'fg.muted'} fontWeight={isLit ? 'semibold' : undefined}>
+          <chakra.span whiteSpace="nowrap" color={isLit ? 'straw.fg' : 'fg.muted'} fontWeight={isLit ? 'semibold' : undefined}>
             {isLit ? 'takes longer' : note}
           </chakra.span>
         </chakra.span>

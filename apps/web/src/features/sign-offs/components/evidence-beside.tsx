@@ -11,7 +11,7 @@ import { Swatch } from '../../../components/swatch';
 import { TextLink } from '../../../components/text-link';
 import { colourDifference, cssColour, labOf, measured } from '../../../lib/colour-difference';
 import { formatNumber } from '../../../lib/format';
-import { decimalsOf, symbolOf } from '../../../lib/measurement-words';
+import { decimalsOf } from '../../../lib/measurement-words';
 import { paths } from '../../../lib/paths';
 import { useSession } from '../../../lib/session';
 import type { EvidenceCell, Revision } from '../sign-offs.api';
@@ -109,7 +109,7 @@ function CellNumbers({ cell }: { cell: EvidenceCell }) {
     const label = quantity === 'lightness' ? 'L*' : quantity.charAt(0).toUpperCase() + quantity.slice(1);
     return [
       {
-        label: label === 'L*' ? label : `${label}, ${symbolOf(quantity)}`,
+        label,
         value:
           quantity === 'lightness' && lab !== undefined ? (
             <chakra.span display="inline-flex" gap="1" alignItems="center">

@@ -55,7 +55,7 @@ export function Review({ revision, onReturned }: ReviewProps) {
           {checks.data === undefined && checks.error === undefined && <SkeletonBlock height="320px" label="Checking" />}
           {checks.data !== undefined && (
             <>
-              <CheckList checks={checks.data.items}>
+              <CheckList checks={checks.data.items} inFull={WEIGHED}>
                 <ConfirmationNumbers confirmation={checks.data.confirmation} />
               </CheckList>
               <Signing revision={revision} checks={checks.data} onReturned={onReturned} />
@@ -66,6 +66,9 @@ export function Review({ revision, onReturned }: ReviewProps) {
     </>
   );
 }
+
+/** Passing checks whose findings a signer weighs. */
+const WEIGHED = new Set(['basis', 'confirmation', 'new-confirmation', 'criteria', 'photo', 'calibration', 'power-shift']);
 
 function FirstSetting({ revision: { recipe } }: { revision: Revision }) {
   return (
