@@ -25,7 +25,10 @@ export const parametersAt = (speed: number): ParameterSet => ({
   power: { watts: 6, basis: 'calibration' },
 });
 
-export function cellOf(code: string, given: Partial<EvidenceCell> & { coupon?: Partial<EvidenceCell['coupon']> } = {}): EvidenceCell {
+export function cellOf(
+  code: string,
+  given: Partial<Omit<EvidenceCell, 'coupon'>> & { coupon?: Partial<EvidenceCell['coupon']> } = {},
+): EvidenceCell {
   const { coupon, ...cell } = given;
   return {
     cellId: `${code} ${cell.address ?? 'A1'}`,
