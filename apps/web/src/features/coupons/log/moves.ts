@@ -18,10 +18,11 @@ export function walk(cells: readonly CouponCell[], move: MoveAfterRating): reado
   return [...marked].sort((one, other) => one.rowIndex - other.rowIndex || one.columnIndex - other.columnIndex);
 }
 
-/** The cell `step` places on from one; at the ends the walk stops. */
+/** The cell `step` places on from one; a walk goes round, so that a pass may begin anywhere and still meets every cell. */
 export function neighbour(order: readonly CouponCell[], cell: CouponCell, step: 1 | -1): CouponCell {
   const place = order.findIndex(({ id }) => id === cell.id);
-  return (place === -1 ? order[0] : order[place + step]) ?? cell;
+  const next = place === -1 ? 0 : (place + step + order.length) % order.length;
+  return order[next] ?? cell;
 }
 
 export function cellsOf(grid: TestGrid, cells: readonly CouponCell[]): readonly CouponCell[] {

@@ -4,8 +4,8 @@ import { CORNER_NAMES, type Corners, nudgeOf } from '../corner-history';
 import type { PhotoCorner } from '../log.api';
 
 const LOUPE_PX = 132;
+/** Over the scale of the stage. */
 const LOUPE_ZOOM = 4;
-/** Zoom of the loupe over the stage’s own scale. */
 const HANDLE_PX = 44;
 
 export type CornerStageProps = {
@@ -148,7 +148,7 @@ function Handle({ number, name, corner, isActive, ...on }: HandleProps) {
   );
 }
 
-/** Magnifies the corner in the far upper corner of the picture, away from the finger. */
+/** Magnifies the corner in the middle of the picture: away from the finger, and where no corner of a plate lies. */
 function Loupe({ url, corner, aspect, stage }: { url: string; corner: PhotoCorner; aspect: number; stage: HTMLDivElement | null }) {
   const widthPx = (stage?.clientWidth ?? 600) * LOUPE_ZOOM;
   const heightPx = widthPx * aspect;
@@ -156,8 +156,9 @@ function Loupe({ url, corner, aspect, stage }: { url: string; corner: PhotoCorne
     <Box
       aria-hidden="true"
       position="absolute"
-      top="2"
-      {...(corner.x < 0.5 ? { right: '2' } : { left: '2' })}
+      top="50%"
+      left="50%"
+      transform="translate(-50%, -50%)"
       boxSize={`${LOUPE_PX}px`}
       borderRadius="full"
       border="3px solid #14161A"
