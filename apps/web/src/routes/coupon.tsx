@@ -100,6 +100,8 @@ function Acts({ coupon, inspection }: { coupon: Coupon; inspection: Inspection |
           onDone={(words) => {
             setIsSealing(false);
             announce(words);
+            // the button that opened the dialog is gone with the seal
+            requestAnimationFrame(() => document.getElementById('content')?.focus());
           }}
         />
       )}

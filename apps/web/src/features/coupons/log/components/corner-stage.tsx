@@ -3,7 +3,9 @@ import { type KeyboardEvent, type PointerEvent, useRef } from 'react';
 import { CORNER_NAMES, type Corners, nudgeOf } from '../corner-history';
 import type { PhotoCorner } from '../log.api';
 
-const LOUPE_PX = 132;
+const LOUPE_PX = { small: 88, large: 132 };
+/** Below this width of the picture the large loupe would hide half of it. */
+const SMALL_STAGE_PX = 480;
 /** Over the scale of the stage. */
 const LOUPE_ZOOM = 4;
 const HANDLE_PX = 44;
@@ -150,7 +152,9 @@ function Handle({ number, name, corner, isActive, ...on }: HandleProps) {
 
 /** Magnifies the corner in the middle of the picture: away from the finger, and where no corner of a plate lies. */
 function Loupe({ url, corner, aspect, stage }: { url: string; corner: PhotoCorner; aspect: number; stage: HTMLDivElement | null }) {
-  const widthPx = (stage?.clientWidth ?? 600) * LOUPE_ZOOM;
+  const stagePx = stage?.clientWidth ?? 600;
+  const loupePx = stagePx < SMALL_STAGE_PX ? LOUPE_PX.small : LOUPE_PX.large;
+  const widthPx = stagePx * LOUPE_ZOOM;
   const heightPx = widthPx * aspect;
   return (
     <Box
@@ -159,7 +163,7 @@ function Loupe({ url, corner, aspect, stage }: { url: string; corner: PhotoCorne
       top="50%"
       left="50%"
       transform="translate(-50%, -50%)"
-      boxSize={`${LOUPE_PX}px`}
+      boxSize={`${loupePx}px`}
       borderRadius="full"
       border="3px solid #14161A"
       boxShadow="0 0 0 2px #FFC94A"
@@ -169,7 +173,7 @@ function Loupe({ url, corner, aspect, stage }: { url: string; corner: PhotoCorne
       style={{
         backgroundImage: `url("${url}")`,
         backgroundSize: `${widthPx}px ${heightPx}px`,
-        backgroundPosition: `${LOUPE_PX / 2 - 3 - corner.x * widthPx}px ${LOUPE_PX / 2 - 3 - corner.y * heightPx}px`,
+        backgroundPosition: `${loupePx / 2 - 3 - corner.x * widthPx}px ${loupePx / 2 - 3 - corner.y * heightPx}px`,
       }}
     >
       <chakra.svg viewBox="0 0 126 126" width="full" height="full">

@@ -111,7 +111,7 @@ function Log({ coupon, inspection, photos, choice, ratings }: LogProps) {
               <Button onClick={() => setIsMeasuring(true)}>Enter measurements</Button>
             )}
           </PhotoStrip>
-          <KeyHints move={page.move} onMove={page.setMove} />
+          {page.mayRate && <KeyHints move={page.move} onMove={page.setMove} />}
         </chakra.section>
         <Box display="grid" gap="4" alignContent="start" minW="0">
           <CellPanel
