@@ -9,13 +9,15 @@ import { StatusLineProvider } from '../components/status-line';
 
 type Rendered = RenderResult & { user: ReturnType<typeof userEvent.setup>; router: ReturnType<typeof createMemoryRouter> };
 
-/** Draws routes at an address, with everything that main.tsx puts around them and an empty cache. */
+/** Draws routes at an address, with everything that main.tsx puts around them and an empty cache: the one that acts revalidate. */
 export function renderRoutes(routes: RouteObject[], at: string): Rendered {
   const router = createMemoryRouter(routes, { initialEntries: [at] });
   const user = userEvent.setup();
+  const { cache } = SWRConfig.defaultValue;
+  for (const key of [...cache.keys()]) cache.delete(key);
   const result = render(
     <Providers>
-      <SWRConfig value={{ provider: () => new Map(), dedupingInterval: 0 }}>
+      <SWRConfig value={{ dedupingInterval: 0 }}>
         <RouterProvider router={router} />
       </SWRConfig>
     </Providers>,

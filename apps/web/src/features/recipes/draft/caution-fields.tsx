@@ -5,6 +5,9 @@ import { CautionIcon } from '../../../components/icons';
 import type { Revision } from '../recipes.api';
 import type { DraftValues } from './draft-values';
 
+/** A last caution alone in its row takes the whole row. */
+const FILLS_LAST_ROW = { '&:last-child:nth-of-type(odd)': { gridColumn: '1 / -1' } } as const;
+
 /** Cautions come first; the author acknowledges each for itself. */
 export function CautionFields({ form, cautions }: { form: UseFormReturn<DraftValues>; cautions: Revision['cautions'] }) {
   if (cautions.length === 0) return null;
@@ -22,7 +25,15 @@ export function CautionFields({ form, cautions }: { form: UseFormReturn<DraftVal
       borderRadius="md"
     >
       {cautions.map(({ id, level, subject, text, source }) => (
-        <chakra.li key={id} display="grid" gridTemplateColumns="34px minmax(0, 1fr)" bg="straw.subtle" px="3.5" py="2.5">
+        <chakra.li
+          key={id}
+          display="grid"
+          gridTemplateColumns="34px minmax(0, 1fr)"
+          bg="straw.subtle"
+          px="3.5"
+          py="2.5"
+          css={FILLS_LAST_ROW}
+        >
           <CautionIcon />
           <div>
             <b>{level === 'never' ? `Never: ${subject}` : subject}</b>

@@ -5,7 +5,7 @@ import { CheckList } from '../../../components/check-list';
 import { ReadProblem } from '../../../components/read-problem';
 import { SkeletonBlock } from '../../../components/skeletons';
 import { SubmitDialog } from '../forms/submit-form';
-import { type Revision, useApprovalChecks } from '../sign-offs.api';
+import { type ApprovalCheck, type Revision, useApprovalChecks } from '../sign-offs.api';
 
 export type DraftChecksProps = {
   revision: Revision;
@@ -22,7 +22,7 @@ export function DraftChecks({ revision, flush, isSaved, onSubmitted }: DraftChec
   if (data === undefined) return <SkeletonBlock height="320px" label="Checking" />;
   const maySubmit = revision.allowedActions.includes('submit');
   return (
-    <CheckList checks={data.items}>
+    <CheckList checks={forAuthor(data.items)}>
       <chakra.div borderTop="hairline" mt="2" pt="3" pb="2">
         {maySubmit ? (
           <>
@@ -44,4 +44,10 @@ export function DraftChecks({ revision, flush, isSaved, onSubmitted }: DraftChec
       {isSubmitting && <SubmitDialog revision={revision} flush={flush} onClose={() => setIsSubmitting(false)} onSubmitted={onSubmitted} />}
     </CheckList>
   );
+}
+
+/** Whether this person could sign is no question yet; what keeps the draft from being submitted comes first. */
+function forAuthor(checks: readonly ApprovalCheck[]): readonly ApprovalCheck[] {
+  const own = checks.filter(({ key }) => !key.startsWith('signer'));
+  return own.toSorted((one, other) => Number(one.blocks === 'approve') - Number(other.blocks === 'approve'));
 }

@@ -11,9 +11,10 @@ import { type ApprovalChecks, approveRevision, type Revision } from '../sign-off
 import { explainSigning, signedAct, unansweredSigning } from '../signing-problem';
 import { CautionTicks } from './caution-ticks';
 
-const LABELS = { acknowledged: 'Cautions', comment: 'Comment', password: 'Your password' };
+// Not `comment`: sending back opens on the same page with a field of that name.
+const LABELS = { acknowledged: 'Cautions', remark: 'Comment', password: 'Your password' };
 
-type Values = { acknowledged: string[]; comment: string; password: string };
+type Values = { acknowledged: string[]; remark: string; password: string };
 
 export type ApproveFormProps = {
   revision: Revision;
@@ -28,7 +29,7 @@ export type ApproveFormProps = {
 /** The signature. Its button names the act, and nothing is called signed before the server has said so. */
 export function ApproveForm({ revision, supersedes, checks, mayReturn, onSendBack, onApproved }: ApproveFormProps) {
   const { member } = useSession();
-  const form = useSummaryForm<Values>({ defaultValues: { acknowledged: [], comment: '', password: '' } });
+  const form = useSummaryForm<Values>({ defaultValues: { acknowledged: [], remark: '', password: '' } });
   const { errors, isSubmitting } = form.formState;
   const care = revision.cautions.filter(({ level }) => level === 'care');
   const act = `Approve revision ${revision.number}`;
@@ -40,8 +41,8 @@ export function ApproveForm({ revision, supersedes, checks, mayReturn, onSendBac
         labels={LABELS}
         explain={(problem) => explainSigning(problem, 'signed')}
         unanswered={unansweredSigning('signed')}
-        onSubmit={async ({ acknowledged, comment, password }, { idempotencyKey }) => {
-          const body = { password, contentHash: checks.contentHash, acknowledgedCautionIds: acknowledged, comment: comment.trim() };
+        onSubmit={async ({ acknowledged, remark, password }, { idempotencyKey }) => {
+          const body = { password, contentHash: checks.contentHash, acknowledgedCautionIds: acknowledged, comment: remark.trim() };
           onApproved(await signedAct(() => approveRevision(revision.id, body, { idempotencyKey })));
         }}
       >
@@ -55,7 +56,7 @@ export function ApproveForm({ revision, supersedes, checks, mayReturn, onSendBac
             validate: (ids) => ids.length >= care.length || 'Acknowledge each caution to sign.',
           })}
         />
-        <TextAreaField label={LABELS.comment} isOptional rows={2} error={errors.comment?.message} {...form.register('comment')} />
+        <TextAreaField label={LABELS.remark} isOptional rows={2} error={errors.remark?.message} {...form.register('remark')} />
         <PasswordField
           label={LABELS.password}
           autoComplete="current-password"

@@ -1,0 +1,158 @@
+import { fireEvent, screen, waitFor, within } from '@testing-library/react';
+import { StatusLineProvider } from '../components/status-line';
+import { closeSession, openSession } from '../lib/session';
+import { type FakeHandler, type FakeRequest, fakeServer, problem } from '../testing/fake-server';
+import { renderRoutes } from '../testing/render';
+import { makeChecks, makeRevision, makeStep } from '../testing/revisions';
+import { makeSessionAnswer } from '../testing/sessions';
+import { Component as DraftPage } from './recipe-draft';
+
+const draft = makeRevision({
+  id: 'draft-1',
+  number: null,
+  state: 'draft',
+  signOffs: [],
+  reason: '',
+  allowedActions: ['edit', 'discard', 'submit', 'start-confirmation'],
+});
+// A draft saves itself after a pause in the typing; the page has some sixty fields.
+jest.setTimeout(30_000);
+const PATCH = 'PATCH /api/revisions/draft-1';
+
+let server: ReturnType<typeof fakeServer>;
+beforeEach(() => openSession(makeSessionAnswer('operator')));
+afterEach(() => {
+  server.restore();
+  closeSession('left');
+});
+
+/** Answers as the api does: the same draft, one version on. */
+const saves = ({ body }: FakeRequest) => ({ body: { ...draft, ...(body as object), steps: draft.steps, version: draft.version + 1 } });
+
+function openPage(handlers: Record<string, FakeHandler> = {}) {
+  server = fakeServer({
+    'GET /api/revisions/draft-1': () => ({ body: draft }),
+    'GET /api/revisions/draft-1/checks': () => ({ body: makeChecks() }),
+    'GET /api/machines/x1/calibrations': () => ({ body: { items: [], nextCursor: null } }),
+    [PATCH]: saves,
+    ...handlers,
+  });
+  const element = (
+    <StatusLineProvider>
+      <DraftPage />
+    </StatusLineProvider>
+  );
+  return renderRoutes(
+    [
+      { path: '/recipes/:code/revisions/:revisionId', element },
+      { path: '*', element: <p>elsewhere</p> },
+    ],
+    '/recipes/R-0042/revisions/draft-1',
+  );
+}
+
+const typeInto = (label: RegExp | string, text: string) => fireEvent.change(screen.getByLabelText(label), { target: { value: text } });
+
+describe('the draft editor', () => {
+  it('saves what was typed in the panel’s unit by itself, against the version that was read', async () => {
+    openPage();
+    await screen.findByLabelText('Speed, mm/s');
+    typeInto('Speed, mm/s', '0.8 m/s');
+    await waitFor(() => expect(server.bodies(PATCH)).toHaveLength(1), { timeout: 8000 });
+    expect(server.bodies(PATCH)[0]).toMatchObject({
+      steps: [{ values: { powerPercent: { value: 60, unit: 'percentFromZero' }, speedMmPerS: { value: 0.8, unit: 'm/s' } } }],
+    });
+    expect(server.requests.find(({ method }) => method === 'PATCH')?.headers.get('if-match')).toBe('"v7"');
+    expect(await screen.findByText('Saved')).toBeVisible();
+  });
+
+  it('says at the field what the panel can show instead, and saves the rest', async () => {
+    openPage();
+    await screen.findByLabelText('Power, %');
+    typeInto('Power, %', '60.5');
+    typeInto('Reason for the change', 'darker');
+    await waitFor(() => expect(server.bodies(PATCH)).toEqual([{ reason: 'darker' }]), { timeout: 8000 });
+    expect(await screen.findByText(/Nearest that it can: 60 % or 61 %/)).toBeVisible();
+    expect(screen.getByLabelText('Power, %')).toHaveValue('60.5');
+  });
+
+  it('shows both values when somebody else saved meanwhile, and overwrites neither unseen', async () => {
+    const theirs = { ...draft, version: 9, reason: 'theirs', steps: [makeStep(50)] };
+    let isStale = true;
+    const { user } = openPage({
+      'GET /api/revisions/draft-1': () => ({ body: isStale && server.bodies(PATCH).length === 0 ? draft : theirs }),
+      [PATCH]: (request) => {
+        if (isStale) {
+          isStale = false;
+          return problem(412, 'stale-version', 'Somebody changed this in the meantime', { current: theirs });
+        }
+        return saves(request);
+      },
+    });
+    await screen.findByLabelText('Reason for the change');
+    typeInto('Reason for the change', 'mine');
+    const table = await screen.findByRole('table', { name: 'Reason: both values' }, { timeout: 8000 });
+    expect(within(table).getByText('mine')).toBeVisible();
+    expect(within(table).getByText('theirs')).toBeVisible();
+    expect(screen.getByText('only the other changed it')).toBeVisible();
+    await user.click(screen.getByRole('button', { name: 'Save the draft as decided' }));
+    await waitFor(() => expect(server.bodies(PATCH)).toHaveLength(2), { timeout: 8000 });
+    expect(server.bodies(PATCH)[1]).toEqual({ reason: 'mine' });
+    expect(
+      server.requests
+        .filter(({ method }) => method === 'PATCH')
+        .at(-1)
+        ?.headers.get('if-match'),
+    ).toBe('"v9"');
+    expect(screen.getByLabelText('Power, %')).toHaveValue('50');
+  });
+
+  it('changes the order of set-up steps by buttons', async () => {
+    const { user } = openPage();
+    await user.click(await screen.findByRole('button', { name: 'Add a set-up step' }));
+    typeInto('Set-up step 2', 'Degrease');
+    await user.click(screen.getByRole('button', { name: 'Move set-up step 2 up' }));
+    expect(screen.getByLabelText('Set-up step 1')).toHaveValue('Degrease');
+  });
+
+  it('plans a coupon of equal cells that proves it', async () => {
+    const { user } = openPage({ 'POST /api/coupons/confirmation': () => ({ status: 201, body: { code: 'C-0121' } }) });
+    await user.click(await screen.findByRole('button', { name: 'Plan a coupon' }));
+    const dialog = screen.getByRole('dialog', { name: 'Prove it on a coupon' });
+    await user.type(within(dialog).getByLabelText(/Lot of the material/), '2190');
+    await user.click(within(dialog).getByRole('button', { name: 'Plan the coupon' }));
+    expect(await screen.findByText('elsewhere', {}, { timeout: 8000 })).toBeVisible();
+    expect(server.bodies('POST /api/coupons/confirmation')).toEqual([
+      { revisionId: 'draft-1', count: 5, acknowledgedCautionIds: [], lot: '2190' },
+    ]);
+  });
+
+  it('submits for review with a word to the lead', async () => {
+    const { user } = openPage({ 'POST /api/revisions/draft-1/submit': () => ({ body: { ...draft, number: 4, state: 'in_review' } }) });
+    await user.click(await screen.findByRole('button', { name: 'Submit for review' }));
+    const dialog = screen.getByRole('dialog', { name: 'Submit for review' });
+    await user.type(within(dialog).getByLabelText(/A word to the lead/), 'Seen at the rim.');
+    await user.click(within(dialog).getByRole('button', { name: 'Submit for review' }));
+    expect(await screen.findByText('elsewhere', {}, { timeout: 8000 })).toBeVisible();
+    expect(server.bodies('POST /api/revisions/draft-1/submit')).toEqual([{ acknowledgedCautionIds: [], comment: 'Seen at the rim.' }]);
+  });
+
+  it('offers no submit while a check that it needs fails, and lists every one', async () => {
+    const failing = {
+      key: 'basis',
+      passes: false,
+      title: 'Basis',
+      detail: 'No sealed coupon.',
+      isAdvisory: false,
+      blocks: 'submit',
+    } as const;
+    openPage({
+      'GET /api/revisions/draft-1/checks': () => ({
+        body: makeChecks({ maySubmit: false, items: [failing, { ...failing, key: 'photo', title: 'Photo', detail: 'No photo.' }] }),
+      }),
+    });
+    expect(await screen.findByText('No sealed coupon.')).toBeVisible();
+    expect(screen.getByText('No photo.')).toBeVisible();
+    expect(screen.getByRole('button', { name: 'Submit for review' })).toBeDisabled();
+  });
+});

@@ -1,0 +1,168 @@
+import { screen, within } from '@testing-library/react';
+import { StatusLineProvider } from '../components/status-line';
+import { closeSession, openSession } from '../lib/session';
+import { type FakeHandler, fakeServer } from '../testing/fake-server';
+import { renderRoutes } from '../testing/render';
+import { makeRecipe, makeRecipePage, makeRevision } from '../testing/revisions';
+import { makeSessionAnswer } from '../testing/sessions';
+import { Component as ComparePage } from './compare';
+import { Component as RecipePage } from './recipe';
+
+const approved = makeRevision();
+const inReview = makeRevision({ id: 'revision-4', number: 4, state: 'in_review', reason: 'Source lost 6 % power', signOffs: [] });
+const older = makeRevision({ id: 'revision-2', number: 2, state: 'superseded', reason: 'Light at the rim' });
+const recipe = makeRecipe(approved, [inReview, approved, older], { allowedActions: ['propose-change', 'withdraw'] });
+
+let server: ReturnType<typeof fakeServer>;
+beforeEach(() => openSession(makeSessionAnswer('lead')));
+afterEach(() => {
+  server.restore();
+  closeSession('left');
+});
+
+function openPage(at: string, handlers: Record<string, FakeHandler> = {}, shown: object = recipe) {
+  server = fakeServer({
+    'GET /api/recipes': () => ({ body: makeRecipePage([recipe]) }),
+    'GET /api/recipes/recipe-42': () => ({ body: shown }),
+    ...handlers,
+  });
+  const within = (page: React.ReactNode) => <StatusLineProvider>{page}</StatusLineProvider>;
+  return renderRoutes(
+    [
+      { path: '/recipes/:code', element: within(<RecipePage />) },
+      { path: '/recipes/:code/compare', element: within(<ComparePage />) },
+      { path: '*', element: <p>elsewhere</p> },
+    ],
+    at,
+  );
+}
+
+describe('the recipe page', () => {
+  it('shows the approved setting in the order of the panel, and the ladder with states and reasons', async () => {
+    openPage('/recipes/R-0042');
+    const card = await screen.findByRole('region', { name: 'Setting of R-0042 revision 3' });
+    expect(
+      within(card)
+        .getAllByRole('listitem')
+        .map(({ textContent }) => textContent),
+    ).toEqual([expect.stringContaining('Power'), expect.stringContaining('Speed')]);
+    const ladder = screen.getByRole('region', { name: 'Revisions' });
+    expect(
+      within(ladder)
+        .getAllByRole('listitem')
+        .map(({ textContent }) => textContent),
+    ).toEqual([
+      expect.stringMatching(/Revision 4.*In review.*Source lost 6 % power/),
+      expect.stringMatching(/Revision 3.*Approved/),
+      expect.stringMatching(/Revision 2.*Superseded.*Light at the rim/),
+    ]);
+    expect(screen.getAllByText(/Approved for use as lead operator, 3 Mar 2026 09:12 CET/)[0]).toBeVisible();
+  });
+
+  it('shows a hold before everything else', async () => {
+    const hold = {
+      id: 'h1',
+      subject: 'recipe' as const,
+      reason: 'Brown rims',
+      placedBy: 'Hanne Voss',
+      placedAt: '2026-05-14T08:00:00.000Z',
+    };
+    openPage('/recipes/R-0042', {}, { ...recipe, holds: [hold] });
+    const alert = await screen.findByRole('alert');
+    expect(within(alert).getByText('Brown rims')).toBeVisible();
+    const card = screen.getByRole('region', { name: 'Setting of R-0042 revision 3' });
+    expect(alert.compareDocumentPosition(card) & Node.DOCUMENT_POSITION_FOLLOWING).toBeTruthy();
+  });
+
+  it('withdraws with password and reason', async () => {
+    const { user } = openPage('/recipes/R-0042', {
+      'POST /api/revisions/revision-3/withdraw': () => ({ body: { ...approved, state: 'withdrawn' } }),
+    });
+    await user.click(await screen.findByRole('button', { name: 'Withdraw revision 3' }));
+    const dialog = screen.getByRole('dialog', { name: 'Withdraw revision 3' });
+    await user.click(within(dialog).getByRole('button', { name: 'Withdraw revision 3' }));
+    expect(await within(dialog).findByText('2 entries need a change')).toBeVisible();
+    await user.type(within(dialog).getByLabelText('Why it must not be used any more'), 'Brown rims');
+    await user.type(within(dialog).getByLabelText('Your password'), 'burnt plate by the window');
+    await user.click(within(dialog).getByRole('button', { name: 'Withdraw revision 3' }));
+    expect(await screen.findByText('Revision 3 is withdrawn. R-0042 has no approved setting now.')).toBeVisible();
+    expect(server.bodies('POST /api/revisions/revision-3/withdraw')).toEqual([
+      { reason: 'Brown rims', password: 'burnt plate by the window' },
+    ]);
+  });
+
+  it('begins a change as a draft of its own', async () => {
+    const { user, router } = openPage('/recipes/R-0042', {
+      'POST /api/recipes/recipe-42/drafts': () => ({ status: 201, body: { ...approved, id: 'draft-1', number: null, state: 'draft' } }),
+    });
+    await user.click(await screen.findByRole('button', { name: 'Propose a change' }));
+    await screen.findByText('elsewhere');
+    expect(router.state.location.pathname).toBe('/recipes/R-0042/revisions/draft-1');
+  });
+
+  it('says that a code is not in the shop', async () => {
+    openPage('/recipes/R-9999');
+    expect(await screen.findByRole('heading', { name: 'There is no such thing here' })).toBeVisible();
+  });
+});
+
+describe('comparing revisions', () => {
+  const side = (revisionId: string, value: number, rest: object = {}) => ({
+    revisionId,
+    value,
+    text: String(value),
+    missingBecause: null,
+    change: 'same',
+    size: null,
+    ...rest,
+  });
+  const comparison = {
+    revisions: [approved, inReview],
+    referenceId: approved.id,
+    rows: [
+      {
+        group: 'entered',
+        key: 'powerPercent',
+        label: 'Power',
+        unit: '%',
+        step: 1,
+        isSame: false,
+        values: [
+          side('revision-3', 60, { change: 'reference' }),
+          side('revision-4', 50, { change: 'changed', size: { delta: -10, symbol: '%', percent: null, points: -10 } }),
+        ],
+      },
+      {
+        group: 'entered',
+        key: 'speedMmPerS',
+        label: 'Speed',
+        unit: 'mm/s',
+        step: 1,
+        isSame: true,
+        values: [side('revision-3', 800, { change: 'reference' }), side('revision-4', 800)],
+      },
+    ],
+  };
+  const compare = { 'GET /api/revisions/compare': () => ({ body: comparison }) };
+
+  it('shows only what differs, names the equal rows, and shows all on demand', async () => {
+    const { user, router } = openPage('/recipes/R-0042/compare?ids=revision-3,revision-4', compare);
+    expect((await screen.findAllByText('−10 points'))[0]).toBeInTheDocument();
+    expect(screen.queryByRole('rowheader', { name: /Speed/ })).toBeNull();
+    expect(screen.getAllByText('Equal rows hidden: speed')[0]).toBeInTheDocument();
+    await user.click(screen.getByRole('switch', { name: 'Only what differs' }));
+    expect(router.state.location.search).toContain('all=1');
+    expect((await screen.findAllByText('same'))[0]).toBeInTheDocument();
+  });
+
+  it('adds a revision and asks for it, and compares with another column', async () => {
+    const { user, router } = openPage('/recipes/R-0042/compare?ids=revision-3,revision-4', compare);
+    await user.click(await screen.findByRole('button', { name: 'Add a revision' }));
+    await user.click(within(screen.getByRole('dialog')).getByRole('button', { name: /Revision 2/ }));
+    expect(new URLSearchParams(router.state.location.search).get('ids')).toBe('revision-3,revision-4,revision-2');
+    const [choice] = await screen.findAllByLabelText('Compared with');
+    if (choice === undefined) throw new Error('the choice is drawn');
+    await user.selectOptions(choice, 'revision-4');
+    expect(server.requests.at(-1)?.query.get('referenceId')).toBe('revision-4');
+  });
+});
