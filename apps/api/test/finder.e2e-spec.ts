@@ -71,7 +71,7 @@ describe('GET /api/finder', () => {
         plate: { rows: 3, columns: 4 },
         lot: 'L-1',
         photo: null,
-        measurements: [{ quantity: 'contrast', value: 0.95, criterion: 'Contrast to the bare ground at least 0.9' }],
+        measurements: [{ quantity: 'contrast', value: 0.95, criterion: 'at least 0.9' }],
       },
     });
     expect(answer?.panel.fields.map(({ label }) => label)).toEqual(['POWER', 'SPEED', 'FREQ', 'LINE']);

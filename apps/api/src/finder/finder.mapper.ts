@@ -1,4 +1,4 @@
-import { type Criterion, criterionText } from '@proofplate/recipe-model';
+import { type Criterion, showNumber } from '@proofplate/recipe-model';
 import type { Actor } from '../common/actor';
 import type { PhotoUrlsDto } from '../photos/dto/photo.dto';
 import type { FinderAnswerDto, FinderKeysDto, FinderRecipeDto, ReferenceCellDto, ReferencePhotoDto } from './dto/finder.dto';
@@ -55,9 +55,12 @@ function toReferencePhoto(photo: PhotoRow, urlsOf: UrlsOf): ReferencePhotoDto {
   return { id, urls: urlsOf(photo), corners, widthPx, heightPx, takenAt: iso(capturedAt ?? createdAt) };
 }
 
+/** "at least 0.9": the quantity stands before it already. */
 function criterionFor(quantity: string, criteria: readonly Criterion[]): string | null {
   const found = criteria.find((criterion) => criterion.quantity === quantity);
-  return found === undefined ? null : criterionText(found);
+  if (found === undefined) return null;
+  const { comparison, value, upper } = found;
+  return upper === undefined ? `${comparison} ${showNumber(value)}` : `${comparison} ${showNumber(value)} and ${showNumber(upper)}`;
 }
 
 function blockers(row: AnswerRow): string[] {

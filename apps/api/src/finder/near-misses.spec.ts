@@ -26,6 +26,14 @@ describe('nearMisses()', () => {
     expect(codes([differing('both', { machine: 'bench2', lens: 'f160' }), differing('lens', { lens: 'f160' })])).toEqual(['lens', 'both']);
   });
 
+  it('prefers the same effect on another grade to another effect elsewhere', () => {
+    const candidates = [
+      differing('effect', { effect: 'grey', machine: 'bench2' }),
+      differing('grade', { material: 'grade5', machine: 'bench2' }),
+    ];
+    expect(codes(candidates)).toEqual(['grade', 'effect']);
+  });
+
   it('never offers a material of another family, nor another grade for another effect', () => {
     expect(codes([differing('brass', { material: 'brass' }), differing('far', { material: 'grade5', effect: 'grey' })])).toEqual([]);
   });

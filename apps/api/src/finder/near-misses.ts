@@ -8,6 +8,7 @@ export type NearMiss = { readonly candidate: Candidate; readonly differs: readon
 const MOST_NEAR_MISSES = 3;
 /** The same mark elsewhere comes first, then another finish, another effect, and last another material of the family. */
 const RANK: Readonly<Record<SlotKey, number>> = { machine: 0, lens: 0, finish: 1, effect: 2, material: 3 };
+const FAR_RANK = 4;
 
 /** The approved recipes that come nearest to what was asked for; a material of another family is never near. */
 export function nearMisses(candidates: readonly Candidate[], choice: SlotChoice, familyOf: FamilyOf): NearMiss[] {
@@ -40,5 +41,7 @@ function isNear(candidate: Candidate, differs: readonly SlotKey[], choice: SlotC
 }
 
 function rankOf({ differs }: NearMiss): number {
+  // Another effect somewhere else is further away than the same effect on another grade.
+  if (differs.includes('effect') && differs.length > 1) return FAR_RANK;
   return Math.max(...differs.map((slot) => RANK[slot]));
 }

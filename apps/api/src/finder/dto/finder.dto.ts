@@ -63,7 +63,9 @@ export class ReferenceMeasurementDto {
   @ApiProperty({ type: String, nullable: true, description: 'Grade, where there is one' }) grade: string | null;
   @ApiProperty({ description: 'Unit; 1: a pure number' }) unit: string;
   @ApiProperty({ description: 'How; photo: an estimate under that photo’s light' }) method: string;
-  @ApiProperty({ type: String, nullable: true, description: 'What was asked of it, in words; null: nothing' }) criterion: string | null;
+  @ApiProperty({ type: String, nullable: true, description: 'What was asked of it, such as “at least 0.9”; null: nothing' }) criterion:
+    | string
+    | null;
 }
 
 /** The mark to match. */

@@ -20,7 +20,7 @@ import { SetUpSteps } from './set-up-steps';
 export function Answer({ answer }: { answer: FinderAnswer }) {
   const { ticks, setTick } = useKeptTicks(answer.revisionId);
   return (
-    <>
+    <div>
       <chakra.div
         display="grid"
         gridTemplateColumns={{ base: 'minmax(0, 1fr)', lg: 'minmax(0, 1.14fr) minmax(0, 1fr)' }}
@@ -34,11 +34,14 @@ export function Answer({ answer }: { answer: FinderAnswer }) {
           <Beside answer={answer} />
         </chakra.div>
       </chakra.div>
+      <chakra.div display={{ base: 'block', sm: 'none' }} mt="4">
+        <Signature answer={answer} />
+      </chakra.div>
       <ActBar lead={<Signature answer={answer} />}>
         <SheetAct answer={answer} />
         <StartAct answer={answer} />
       </ActBar>
-    </>
+    </div>
   );
 }
 
@@ -110,12 +113,12 @@ function SheetAct({ answer }: { answer: FinderAnswer }) {
   if (answer.blockedBecause.length > 0)
     return (
       <Button size="glove" icon={<PrintIcon />} disabled>
-        Print<LongWords> set-up</LongWords> sheet
+        <SheetWords />
       </Button>
     );
   return (
     <ButtonLink to={paths.setUpSheet(answer.recipeId)} size="glove" icon={<PrintIcon />}>
-      Print<LongWords> set-up</LongWords> sheet
+      <SheetWords />
     </ButtonLink>
   );
 }
@@ -135,4 +138,10 @@ function StartAct({ answer }: { answer: FinderAnswer }) {
 }
 
 /** Two acts share a phone's width. */
-const LongWords = chakra('span', { base: { display: { base: 'none', sm: 'inline' }, whiteSpace: 'pre' } });
+function SheetWords() {
+  return (
+    <span>
+      Print <chakra.span display={{ base: 'none', sm: 'inline' }}>set-up </chakra.span>sheet
+    </span>
+  );
+}

@@ -5,9 +5,9 @@ import { formatNumber } from '../../../lib/format';
 import type { FinderAnswer, FinderCaution } from '../finder.api';
 
 /** Cautions of this work side by side, the limits of use among them; those of all work in one line with their reasons behind a tap. */
-export function Cautions({ cautions, answer }: { cautions: readonly FinderCaution[]; answer: FinderAnswer | null }) {
+export function Cautions({ cautions, answer }: { cautions: readonly FinderCaution[]; answer: FinderAnswer }) {
   const own = cautions.filter(({ isGeneral }) => !isGeneral).map(toCaution);
-  const limits = answer === null ? undefined : limitsCaution(answer);
+  const limits = limitsCaution(answer);
   return (
     <chakra.div display="grid" gap="2">
       <CautionList cautions={limits === undefined ? own : [...own, limits]} />

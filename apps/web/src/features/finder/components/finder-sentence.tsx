@@ -1,4 +1,5 @@
 import { chakra } from '@chakra-ui/react';
+import type { ReactNode } from 'react';
 import { type Choice, type FinderResult, SLOTS, type SlotKey } from '../finder.api';
 import { shownInSlot } from '../sentence';
 import { FinderSlot } from './finder-slot';
@@ -7,10 +8,12 @@ export type FinderSentenceProps = {
   result: FinderResult;
   choice: Choice;
   onChoose: (slot: SlotKey, id: string | undefined) => void;
+  /** Stands at the end of the last line where there is room, else under it. */
+  trailing: ReactNode;
 };
 
 /** "On Bench 2 with the F160 lens, mark black anodised 6061 with a sealed satin finish, for a white mark." */
-export function FinderSentence({ result, choice, onChoose }: FinderSentenceProps) {
+export function FinderSentence({ result, choice, onChoose, trailing }: FinderSentenceProps) {
   const shown = Object.fromEntries(SLOTS.map((slot) => [slot, shownInSlot(slot, choice, result)]));
   const slot = (key: SlotKey) => (
     <FinderSlot slot={key} view={result.slots[key]} shownId={shown[key]} onChoose={(id) => onChoose(key, id)} />
@@ -18,14 +21,14 @@ export function FinderSentence({ result, choice, onChoose }: FinderSentenceProps
   const effectName = result.slots.effect.options.find(({ id }) => id === shown.effect)?.name ?? '';
   return (
     <chakra.div
-      role="group"
-      aria-label="Finder"
       fontSize={{ base: 'lg', sm: '2xl' }}
-      lineHeight={{ base: '40px', sm: '40px' }}
+      lineHeight={{ base: '44px', sm: '40px' }}
       display={{ base: 'block', sm: 'flex' }}
       flexWrap="wrap"
       columnGap="2.5"
       rowGap="1"
+      role="group"
+      aria-label="Finder"
     >
       <span>On </span>
       {slot('machine')}
@@ -39,6 +42,22 @@ export function FinderSentence({ result, choice, onChoose }: FinderSentenceProps
       <chakra.span display={{ base: 'inline', sm: 'inline-flex' }} columnGap="1">
         {slot('effect')}.
       </chakra.span>
+      <chakra.div
+        flexGrow="1"
+        display="flex"
+        flexWrap="wrap"
+        alignItems="center"
+        justifyContent="flex-end"
+        columnGap="4"
+        rowGap="1"
+        mt={{ base: '2', sm: '0' }}
+        fontSize="md"
+        lineHeight="md"
+        minHeight="40px"
+        alignSelf="flex-start"
+      >
+        {trailing}
+      </chakra.div>
     </chakra.div>
   );
 }

@@ -37,15 +37,23 @@ export function Finder({ holds, leadActs, ask }: FinderProps) {
   }
   return (
     <chakra.div display="grid" gap={{ base: '3', sm: '4' }} gridTemplateColumns="minmax(0, 1fr)">
-      <FinderSentence result={data} choice={choice} onChoose={choose} />
-      <Flex align="center" justify="space-between" gap="4" wrap="wrap" mt={{ lg: '-1' }}>
-        <WordsField words={choice.words ?? ''} onWords={setWords} />
-        <Flex align="center" gap="4" ml="auto">
-          <b role="status">{isLoading ? 'Looking' : countWords(data)}</b>
-          {!isLoading && data.answer !== null && leadActs(data.answer)}
-          <StartOver onClick={startOver} />
-        </Flex>
-      </Flex>
+      <FinderSentence
+        result={data}
+        choice={choice}
+        onChoose={choose}
+        trailing={
+          <>
+            <WordsField words={choice.words ?? ''} onWords={setWords} />
+            <Flex align="center" gap="4" ml="auto">
+              {!isLoading && data.answer !== null && leadActs(data.answer)}
+              <chakra.b role="status" whiteSpace="nowrap">
+                {isLoading ? 'Looking' : countWords(data)}
+              </chakra.b>
+              <StartOver onClick={startOver} />
+            </Flex>
+          </>
+        }
+      />
       {/* The last answer stays in the slots while the next is fetched, but never its setting: it belongs to another sentence. */}
       {isLoading ? (
         <SkeletonBlock height="420px" label="Looking" />
@@ -80,7 +88,6 @@ function Outcome({ result, choice, holds, ask, onShow }: OutcomeProps) {
   return (
     <>
       <Withdrawn recipes={withdrawn} />
-      <Cautions cautions={cautions} answer={null} />
       {matchCount > 0 ? (
         <ChooseRecipe recipes={matches} count={matchCount} onShow={onShow} />
       ) : (
@@ -136,6 +143,7 @@ function StartOver({ onClick }: { onClick: () => void }) {
       onClick={onClick}
       minHeight={{ base: 'glove', lg: 'control' }}
       px="1"
+      whiteSpace="nowrap"
       color="brand.fg"
       textDecoration="underline"
       textUnderlineOffset="3px"

@@ -52,10 +52,11 @@ function TakenAt({ reference: { photo, lot } }: { reference: ReferenceCell }) {
   );
 }
 
-/** "K 0.95, by photo; contrast to the bare ground at least 0.9". */
+/** "Contrast 0.95, at least 0.9". */
 export function measurementWords({ quantity, value, grade, unit, method, criterion }: ReferenceCell['measurements'][number]): string {
+  const name = quantity === 'contrast' ? 'Contrast' : symbolOf(quantity);
   const number = value === null ? (grade ?? '') : formatNumber(value, { decimals: decimalsOf(quantity) });
   const ending = unit === '1' || value === null ? '' : ` ${unit}`;
   const by = method === 'photo' ? '' : `, by ${methodWord(method)}`;
-  return `${symbolOf(quantity)} ${number}${ending}${by}${criterion === null ? '' : `; ${criterion.charAt(0).toLowerCase()}${criterion.slice(1)}`}`;
+  return `${name} ${number}${ending}${criterion === null ? '' : `, ${criterion}`}${by}`;
 }

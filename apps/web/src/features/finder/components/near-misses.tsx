@@ -78,7 +78,15 @@ function MissRow({ miss, isFirst, onShow }: { miss: NearMiss; isFirst: boolean; 
         <SlotCell key={slot} slot={slot} miss={miss} />
       ))}
       <chakra.span role="cell" gridColumn={{ base: '1 / -1', lg: 'auto' }} display="grid">
-        <Button kind={isFirst ? 'primary' : 'plain'} size="glove" px="2" onClick={() => onShow(miss)} aria-label={`${act}: ${miss.code}`}>
+        <Button
+          kind={isFirst ? 'primary' : 'plain'}
+          size="glove"
+          px="3"
+          whiteSpace="normal"
+          lineHeight="sm"
+          onClick={() => onShow(miss)}
+          aria-label={`${act}: ${miss.code}`}
+        >
           {act}
         </Button>
       </chakra.span>

@@ -34,7 +34,7 @@ export function WordsField({ words, onWords }: WordsFieldProps) {
     onWords(typed.trim());
   };
   return (
-    <chakra.form role="search" onSubmit={handleSubmit} width={{ base: 'full', sm: '260px' }} flexShrink={0}>
+    <chakra.form role="search" onSubmit={handleSubmit} width={{ base: 'full', sm: '220px' }} flexShrink={0}>
       <chakra.label htmlFor="finder-words" srOnly>
         Narrow by words or a scanned code
       </chakra.label>
