@@ -32,7 +32,10 @@ export const paths = {
   cautions: '/materials/cautions',
   material: (id: string) => `/materials/${encodeURIComponent(id)}`,
   people: '/people',
+  person: (id: string) => `/people/${encodeURIComponent(id)}`,
   ledger: '/ledger',
+  /** Every event of the thing with this code. */
+  ledgerOf: (code: string) => `/ledger?code=${encodeURIComponent(code)}`,
   shopSettings: '/shop-settings',
   account: '/account',
   more: '/more',

@@ -7,6 +7,7 @@ import { Page } from '../components/page';
 import { ReadProblem } from '../components/read-problem';
 import { SkeletonBlock } from '../components/skeletons';
 import { useStatusLine } from '../components/status-line';
+import { TextLink } from '../components/text-link';
 import { groundWords, lowerFirst } from '../features/coupons/coupon-words';
 import { type Coupon, useCoupon } from '../features/coupons/coupons.api';
 import { CouponLog } from '../features/coupons/log/components/coupon-log';
@@ -46,7 +47,12 @@ function CouponPage({ coupon }: { coupon: Coupon }) {
       title={coupon.code}
       name={coupon.title === '' ? `${groundWords(coupon)}, ${lowerFirst(coupon.effect.name)}` : coupon.title}
       crumbs={[...CRUMBS, { label: coupon.code }]}
-      meta={<CouponMeta coupon={coupon} inspection={inspection} timeZone={shop.timeZone} />}
+      meta={
+        <>
+          <CouponMeta coupon={coupon} inspection={inspection} timeZone={shop.timeZone} />
+          <TextLink to={paths.ledgerOf(coupon.code)}>In the ledger</TextLink>
+        </>
+      }
       actions={
         <Flex gap="2" display={{ base: 'none', lg: 'flex' }}>
           {acts}

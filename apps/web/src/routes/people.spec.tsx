@@ -13,6 +13,8 @@ const member = (id: string, printedName: string, role: string) => ({
   role,
   state: 'active',
   createdAt: '2026-04-20T08:00:00Z',
+  removedAt: null,
+  signsFor: null,
   version: 2,
   allowedActions: ['edit', 'remove'],
 });
@@ -21,6 +23,7 @@ const lists = {
     body: { items: [member('member-1', 'Hanne Voss', 'owner'), member('member-2', 'Jonah Pell', 'trainee')], nextCursor: null },
   }),
   'GET /api/invitations': () => ({ body: { items: [], nextCursor: null } }),
+  'GET /api/undelivered-letters': () => ({ body: { items: [] } }),
 };
 const page = (
   <StatusLineProvider>
@@ -75,6 +78,16 @@ describe('the people page', () => {
     expect(await screen.findByText('This person is in the shop already.')).toBeVisible();
     expect(screen.getByLabelText('E-mail')).toHaveValue('jonah@tidewater.example');
     await waitFor(() => expect(server.bodies('POST /api/invitations')).toEqual([{ email: 'jonah@tidewater.example', role: 'operator' }]));
+  });
+
+  it('shows an owner which letters did not arrive, and the way out', async () => {
+    const letter = { id: 'letter-1', kind: 'invitation', address: 'typo@exmaple.invalid', reason: '550 no such mailbox' };
+    await openPage({
+      'GET /api/undelivered-letters': () => ({ body: { items: [{ ...letter, writtenAt: '2026-05-14T08:00:00Z' }] } }),
+    });
+    const row = await screen.findByRole('row', { name: /typo@exmaple\.invalid/ });
+    expect(row).toHaveTextContent('550 no such mailbox');
+    expect(row).toHaveTextContent('Check the address and invite again');
   });
 
   it('says who can help when the role shows nothing', async () => {

@@ -6,6 +6,7 @@ import { Page } from '../components/page';
 import { useStatusLine } from '../components/status-line';
 import { Invitations } from '../features/members/components/invitations';
 import { People } from '../features/members/components/people';
+import { UndeliveredLetters } from '../features/members/components/undelivered-letters';
 import { InviteForm } from '../features/members/forms/invite-form';
 import { useSession } from '../lib/session';
 
@@ -30,6 +31,7 @@ export function Component() {
     >
       <People />
       <Invitations />
+      {member.role === 'owner' && <UndeliveredLetters />}
       {isInviting && (
         <Dialog title="Invite somebody" onClose={() => setIsInviting(false)}>
           <InviteForm onInvited={handleInvited} />

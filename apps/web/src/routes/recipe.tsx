@@ -8,6 +8,7 @@ import { ReadProblem } from '../components/read-problem';
 import { SkeletonBlock } from '../components/skeletons';
 import { StateMark } from '../components/state-mark';
 import { useStatusLine } from '../components/status-line';
+import { TextLink } from '../components/text-link';
 import { Holds } from '../features/recipes/components/holds';
 import { RevisionBody } from '../features/recipes/components/revision-body';
 import { RevisionLadder } from '../features/recipes/components/revision-ladder';
@@ -16,6 +17,7 @@ import { type Recipe, useRecipe } from '../features/recipes/recipes.api';
 import { recipeMark, recipeStateWord, revisionName } from '../features/recipes/revision-words';
 import { WithdrawDialog } from '../features/sign-offs/forms/withdraw-form';
 import { paths } from '../lib/paths';
+import { useSession } from '../lib/session';
 
 const CRUMBS = [{ label: 'Recipes', to: paths.recipes }];
 
@@ -38,6 +40,7 @@ export function Component() {
 
 function RecipePage({ recipe }: { recipe: Recipe }) {
   const { code, title, currentRevision } = recipe;
+  const { member } = useSession();
   return (
     <Page
       title={code}
@@ -53,6 +56,7 @@ function RecipePage({ recipe }: { recipe: Recipe }) {
           <span>
             {recipe.machine.name}, {recipe.lens.name}
           </span>
+          {member.role !== 'trainee' && <TextLink to={paths.ledgerOf(code)}>In the ledger</TextLink>}
         </>
       }
       actions={<RecipeActions recipe={recipe} />}

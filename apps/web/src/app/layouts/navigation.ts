@@ -37,8 +37,8 @@ const ENTRIES: readonly NavigationEntry[] = [
   { to: paths.runs, label: 'Runs', shortLabel: 'Runs', icon: RunIcon, group: 'work', from: 'trainee' },
   { to: paths.equipment, label: 'Equipment', shortLabel: 'Equipment', icon: EquipmentIcon, group: 'shop', from: 'operator' },
   { to: paths.materials, label: 'Materials', shortLabel: 'Materials', icon: MaterialIcon, group: 'shop', from: 'operator' },
-  { to: paths.people, label: 'People', shortLabel: 'People', icon: PeopleIcon, group: 'shop', from: 'owner' },
-  { to: paths.ledger, label: 'Ledger', shortLabel: 'Ledger', icon: LedgerIcon, group: 'shop', from: 'lead' },
+  { to: paths.people, label: 'People', shortLabel: 'People', icon: PeopleIcon, group: 'shop', from: 'lead' },
+  { to: paths.ledger, label: 'Ledger', shortLabel: 'Ledger', icon: LedgerIcon, group: 'shop', from: 'operator' },
   { to: paths.shopSettings, label: 'Shop settings', shortLabel: 'Shop', icon: ShopIcon, group: 'shop', from: 'owner' },
 ];
 

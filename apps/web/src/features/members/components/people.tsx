@@ -4,7 +4,9 @@ import { Button } from '../../../components/button';
 import { type Column, DataTable } from '../../../components/data-table';
 import { ReadProblem } from '../../../components/read-problem';
 import { SkeletonTable } from '../../../components/skeletons';
+import { TextLink } from '../../../components/text-link';
 import { formatDate } from '../../../lib/format';
+import { paths } from '../../../lib/paths';
 import { roleWord } from '../../../lib/roles';
 import { useSession } from '../../../lib/session';
 import { type Member, useMembers } from '../members.api';
@@ -48,7 +50,9 @@ function columns({ ownId, timeZone, onAct }: ColumnOptions): readonly Column<Mem
       onPhone: 'title',
       cell: ({ id, printedName }) => (
         <>
-          <b>{printedName}</b>
+          <TextLink to={paths.person(id)} color="fg" fontWeight="semibold" textDecoration="none" py="3">
+            {printedName}
+          </TextLink>
           {id === ownId && <chakra.span color="fg.muted"> you</chakra.span>}
         </>
       ),

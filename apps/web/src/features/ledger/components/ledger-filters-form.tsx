@@ -1,0 +1,95 @@
+import { chakra } from '@chakra-ui/react';
+import { useEffect, useState } from 'react';
+import { SelectField, TextField } from '../../../components/field';
+import { ACTIONS } from '../action-words';
+import { useLedgerActors } from '../ledger.api';
+import { type FilterName, type LedgerFilters, readCode } from '../ledger-filters';
+
+const ACTION_OPTIONS = Object.entries(ACTIONS).map(([value, { label }]) => ({ value, label }));
+
+export type LedgerFiltersFormProps = {
+  /** Keeps the controls of two copies on one page apart. */
+  idPrefix: string;
+  filters: LedgerFilters;
+  onFilter: (name: FilterName, value: string) => void;
+};
+
+/** Results follow every choice; nothing has to be sent. */
+export function LedgerFiltersForm({ idPrefix, filters, onFilter }: LedgerFiltersFormProps) {
+  const { data: actors } = useLedgerActors();
+  const people = (actors?.items ?? []).map(({ memberId, name, isActive }) => ({
+    value: memberId,
+    label: isActive ? name : `${name}, left`,
+  }));
+  return (
+    <chakra.div
+      role="search"
+      aria-label="Search the ledger"
+      display="grid"
+      gridTemplateColumns={{ base: 'minmax(0, 1fr)', sm: 'repeat(2, minmax(0, 1fr))', xl: '1.2fr 1.6fr 0.9fr 1fr 1fr' }}
+      gap="3"
+    >
+      <SelectField
+        name={`${idPrefix}-who`}
+        label="Who"
+        placeholder="Everybody"
+        options={people}
+        value={filters.actorMemberId ?? ''}
+        onChange={(event) => onFilter('actorMemberId', event.currentTarget.value)}
+      />
+      <SelectField
+        name={`${idPrefix}-action`}
+        label="What happened"
+        placeholder="Everything"
+        options={ACTION_OPTIONS}
+        value={filters.action ?? ''}
+        onChange={(event) => onFilter('action', event.currentTarget.value)}
+      />
+      <CodeField name={`${idPrefix}-code`} code={filters.subjectCode ?? ''} onCode={(code) => onFilter('subjectCode', code)} />
+      <TextField
+        name={`${idPrefix}-from`}
+        label="From"
+        type="date"
+        max={filters.toDay}
+        value={filters.fromDay ?? ''}
+        onChange={(event) => onFilter('fromDay', event.currentTarget.value)}
+      />
+      <TextField
+        name={`${idPrefix}-to`}
+        label="To"
+        type="date"
+        min={filters.fromDay}
+        value={filters.toDay ?? ''}
+        onChange={(event) => onFilter('toDay', event.currentTarget.value)}
+      />
+    </chakra.div>
+  );
+}
+
+/** Waits until what is typed is a code; Enter and leaving the field say so when it is none. */
+function CodeField({ name, code, onCode }: { name: string; code: string; onCode: (code: string) => void }) {
+  const [typed, setTyped] = useState(code);
+  const [isTold, setIsTold] = useState(false);
+  useEffect(() => setTyped(code), [code]);
+  const isUnreadable = typed.trim() !== '' && readCode(typed) === undefined;
+  const settle = () => {
+    setIsTold(isUnreadable);
+    if (!isUnreadable) onCode(readCode(typed) ?? '');
+  };
+  return (
+    <TextField
+      name={name}
+      label="Code"
+      autoComplete="off"
+      autoCapitalize="characters"
+      spellCheck={false}
+      value={typed}
+      error={isTold && isUnreadable ? 'Type a code like R-0031' : undefined}
+      onChange={(event) => setTyped(event.currentTarget.value)}
+      onBlur={settle}
+      onKeyDown={(event) => {
+        if (event.key === 'Enter') settle();
+      }}
+    />
+  );
+}
