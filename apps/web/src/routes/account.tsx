@@ -2,7 +2,9 @@ import { chakra } from '@chakra-ui/react';
 import { Page, Panel } from '../components/page';
 import { AccountFacts } from '../features/auth/components/account-facts';
 import { ColourModeChoice } from '../features/auth/components/colour-mode-choice';
+import { DevicesPanel } from '../features/auth/components/devices-panel';
 import { OtherShops } from '../features/auth/components/other-shops';
+import { PasswordPanel } from '../features/auth/components/password-panel';
 import { SignOutPanel } from '../features/auth/components/sign-out-panel';
 
 export function Component() {
@@ -17,6 +19,8 @@ export function Component() {
           <ColourModeChoice />
         </Panel>
         <OtherShops />
+        <PasswordPanel />
+        <DevicesPanel />
         <SignOutPanel />
       </chakra.div>
     </Page>

@@ -1,11 +1,13 @@
 import type { components } from '@proofplate/api-client';
-import { request } from '../../lib/api';
+import type { SWRResponse } from 'swr';
+import { type ProblemError, request } from '../../lib/api';
 import { closeSession, openSession, REQUESTED_BY, type SessionAnswer } from '../../lib/session';
-import { forgetAllReads } from '../../lib/swr';
+import { forgetAllReads, revalidate, useRead } from '../../lib/swr';
 
 type Schemas = components['schemas'];
 
 export type SignUp = Schemas['SignUpDto'];
+export type OpenSession = Schemas['OpenSessionDto'];
 export type InvitationPreview = Schemas['InvitationPreviewDto'];
 
 export async function signUp(body: SignUp, idempotencyKey: string): Promise<void> {
@@ -41,6 +43,23 @@ export function previewInvitation(token: string): Promise<InvitationPreview> {
 
 export async function acceptInvitation(body: { token: string; name?: string; password: string }): Promise<void> {
   await enter(await request<SessionAnswer>('post', '/api/auth/accept-invitation', { body, headers: REQUESTED_BY }));
+}
+
+const SESSIONS = '/api/auth/sessions';
+
+export async function changePassword(body: { password: string; newPassword: string }): Promise<void> {
+  await request<void>('post', '/api/auth/change-password', { body });
+  await revalidate(SESSIONS);
+}
+
+/** Devices the person is signed in on. */
+export function useOpenSessions(): SWRResponse<Schemas['OpenSessionListDto'], ProblemError> {
+  return useRead<Schemas['OpenSessionListDto']>(SESSIONS);
+}
+
+export async function endSession({ id }: OpenSession): Promise<void> {
+  await request<void>('delete', `${SESSIONS}/${encodeURIComponent(id)}`);
+  await revalidate(SESSIONS);
 }
 
 /** Whoever comes in sees nothing that was read for whoever was here before. */
