@@ -85,6 +85,8 @@ describe('GET /api/finder', () => {
 
   it('narrows all slots at once by abbreviated words and by synonyms of the material', async () => {
     for (const words of ['blk anod', 'satin white', 'aluminum bench']) expect((await found({ words })).answer?.code).toBe(dial.code);
+    // a grade of the same family is not this one
+    expect(await found({ words: 'anod 7075' })).toMatchObject({ answer: null, matchCount: 0 });
     expect(await found({ words: 'titanium' })).toMatchObject({ answer: null, matchCount: 0, nearMisses: [] });
   });
 

@@ -210,9 +210,10 @@ function itemsOf(catalogue: ReadonlyMap<string, CatalogueRow>): SlotItem[] {
   }));
 }
 
+/** Other words for the family. Grades are left out: "6061" must not find a 5083 because both are aluminium. */
 function familyWords(row: CatalogueRow): string {
   const { label, synonyms } = MATERIAL_FAMILIES[familyOf(row)];
-  return [label, ...synonyms].join(' ');
+  return [label, ...synonyms.filter((synonym) => !/\d/u.test(synonym))].join(' ');
 }
 
 function detailOf(row: CatalogueRow): string {
