@@ -9,6 +9,9 @@ import { newKey } from './support/idempotency';
 import { inspectionOf, makeMarkedCoupon, putPhoto, rateAll, setPhotoState } from './support/inspections';
 import { expectProblem, pointersOf } from './support/problem';
 
+// A marked coupon takes ten requests, more than the usual time on a busy machine.
+jest.setTimeout(30_000);
+
 let test: TestApp;
 let shop: PlanningShop;
 let elsewhere: PlanningShop;

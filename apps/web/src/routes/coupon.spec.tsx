@@ -1,4 +1,4 @@
-import { fireEvent, screen, waitFor, within } from '@testing-library/react';
+import { configure, fireEvent, screen, waitFor, within } from '@testing-library/react';
 import { StatusLineProvider } from '../components/status-line';
 import { closeSession, openSession } from '../lib/session';
 import { fakeServer, problem } from '../testing/fake-server';
@@ -8,6 +8,7 @@ import { Component as CouponPage } from './coupon';
 
 // The page is large and jsdom slow: a test of several presses takes its time on a busy machine.
 jest.setTimeout(30_000);
+configure({ asyncUtilTimeout: 10_000 });
 
 const entered = (value: number, unit: string) => ({ entered: { value, unit }, physical: value });
 const setting = (speed: number, power: number) => ({
