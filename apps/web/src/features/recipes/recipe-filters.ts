@@ -53,7 +53,7 @@ export function facetsOf(facets: RecipeFacets): readonly Facet[] {
     key,
     title,
     values: key === 'state' ? values.state.map((value) => ({ ...value, label: stateLabel(value.value, value.label) })) : values[key],
-  }));
+  })).filter((facet) => facet.values.length > 0);
 }
 
 function stateLabel(value: string, fallback: string): string {

@@ -48,9 +48,9 @@ function columns(timeZone: string): readonly Column<RecipeSummary>[] {
     { key: 'effect', header: 'Effect', cell: ({ effect }) => lowerFirst(effect.name) },
     { key: 'machine', header: 'Machine, lens', cell: ({ machine, lens }) => `${machine.name}, ${lens.name}` },
     { key: 'state', header: 'State', cell: (recipe) => <RecipeState recipe={recipe} /> },
-    { key: 'revision', header: 'Rev.', align: 'end', cell: ({ current }) => current?.number ?? NOTHING },
-    { key: 'parts', header: 'Parts, 30 d', align: 'end', cell: ({ last30Days: { good, scrap } }) => good + scrap },
-    { key: 'scrap', header: 'Scrap, %', align: 'end', cell: ({ last30Days }) => scrapShare(last30Days) },
+    { key: 'revision', header: 'Rev.', align: 'end', onPhone: 'hidden', cell: ({ current }) => current?.number ?? NOTHING },
+    { key: 'parts', header: 'Parts, 30 d', align: 'end', onPhone: 'hidden', cell: ({ last30Days: { good, scrap } }) => good + scrap },
+    { key: 'scrap', header: 'Scrap, %', align: 'end', onPhone: 'hidden', cell: ({ last30Days }) => scrapShare(last30Days) },
     {
       key: 'due',
       header: 'Re-prove by',

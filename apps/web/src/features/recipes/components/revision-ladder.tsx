@@ -102,6 +102,7 @@ function Rung({ code, revision, hasChoice, isChosen, isFull, onChoose }: RungPro
           {last === undefined
             ? `Begun by ${revision.author.name}, ${formatDate(revision.createdAt, shop.timeZone)}`
             : `${last.printedName}: ${lowerFirst(signatureCaption(last, shop.timeZone))}`}
+          {last !== undefined && last.comment !== '' && <chakra.span color="fg">. “{last.comment}”</chakra.span>}
           {revision.state === 'scheduled' &&
             revision.effectiveFrom !== null &&
             `. Takes effect ${formatDate(revision.effectiveFrom, shop.timeZone)}`}

@@ -6,7 +6,7 @@ import { Panel } from '../../../components/page';
 import { CellCloseUp, EvidencePlate } from '../../../components/plate/evidence-plate';
 import { platePhotoOf } from '../../../components/plate/plate-photo';
 import { ProofMarks, shapeOf } from '../../../components/plate/proof-marks';
-import { StateMark } from '../../../components/state-mark';
+import { type MarkState, StateMark } from '../../../components/state-mark';
 import { Swatch } from '../../../components/swatch';
 import { TextLink } from '../../../components/text-link';
 import { colourDifference, cssColour, labOf, measured } from '../../../lib/colour-difference';
@@ -24,6 +24,7 @@ export function EvidenceBeside({ current, proposed }: EvidenceBesideProps) {
   const cells = [current?.evidence.basis[0], proposed.evidence.basis[0]] as const;
   const widestMm = Math.max(0, ...cells.map((cell) => (cell === undefined ? 0 : plateWidthMm(cell))));
   const { confirmation, runs } = proposed.evidence;
+  const isOpen = proposed.state === 'in_review';
   return (
     <Panel aria-label="Evidence">
       <chakra.div
@@ -31,11 +32,16 @@ export function EvidenceBeside({ current, proposed }: EvidenceBesideProps) {
         gridTemplateColumns={{ base: 'minmax(0, 1fr)', sm: current === undefined ? 'minmax(0, 1fr)' : 'repeat(2, minmax(0, 1fr))' }}
       >
         {current !== undefined && (
-          <Side title={`Current, revision ${current.number}`} mark={<StateMark state="approved" />} cell={cells[0]} widestMm={widestMm} />
+          <Side
+            title={`${isOpen ? 'Current' : 'Before'}, revision ${current.number}`}
+            mark={<StateMark state={MARK_OF[current.state]} />}
+            cell={cells[0]}
+            widestMm={widestMm}
+          />
         )}
         <Side
-          title={`Proposed, revision ${proposed.number}`}
-          mark={<StateMark state="inReview" />}
+          title={`${isOpen ? 'Proposed, revision' : 'Revision'} ${proposed.number}`}
+          mark={<StateMark state={MARK_OF[proposed.state]} />}
           cell={cells[1]}
           widestMm={widestMm}
           hasRule={current !== undefined}
@@ -58,6 +64,16 @@ export function EvidenceBeside({ current, proposed }: EvidenceBesideProps) {
     </Panel>
   );
 }
+
+const MARK_OF: Record<Revision['state'], MarkState> = {
+  draft: 'draft',
+  in_review: 'inReview',
+  returned: 'returned',
+  scheduled: 'approved',
+  approved: 'approved',
+  superseded: 'superseded',
+  withdrawn: 'withdrawn',
+};
 
 type SideProps = { title: string; mark: ReactNode; cell: EvidenceCell | undefined; widestMm: number; hasRule?: boolean };
 
