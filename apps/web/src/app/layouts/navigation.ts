@@ -32,7 +32,7 @@ const BAR_PLACES = 4;
 const ENTRIES: readonly NavigationEntry[] = [
   { to: paths.machine, label: 'At the machine', shortLabel: 'Machine', icon: MachineIcon, group: 'work', from: 'trainee' },
   { to: paths.coupons, label: 'Coupons', shortLabel: 'Coupons', icon: CouponIcon, group: 'work', from: 'operator' },
-  { to: paths.recipes, label: 'Recipes', shortLabel: 'Recipes', icon: RecipeIcon, group: 'work', from: 'trainee' },
+  { to: paths.recipes, label: 'Recipes', shortLabel: 'Recipes', icon: RecipeIcon, group: 'work', from: 'operator' },
   { to: paths.signOffs, label: 'Sign-off', shortLabel: 'Sign-off', icon: SignOffIcon, group: 'work', from: 'lead' },
   { to: paths.runs, label: 'Runs', shortLabel: 'Runs', icon: RunIcon, group: 'work', from: 'trainee' },
   { to: paths.equipment, label: 'Equipment', shortLabel: 'Equipment', icon: EquipmentIcon, group: 'shop', from: 'operator' },

@@ -69,7 +69,7 @@ function ProveIt({ revision, form, flush }: ProveItProps) {
         <Button icon={<CouponIcon />} onClick={() => setIsPlanning(true)}>
           Plan a coupon
         </Button>
-        <ButtonLink icon={<RunIcon />} to={`${paths.runs}?confirm=${revision.id}`}>
+        <ButtonLink icon={<RunIcon />} to={`${paths.startRun(revision.id)}&kind=confirmation`}>
           Confirmation run
         </ButtonLink>
       </Flex>
