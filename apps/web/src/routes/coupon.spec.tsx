@@ -10,6 +10,11 @@ import { Component as CouponPage } from './coupon';
 jest.setTimeout(30_000);
 configure({ asyncUtilTimeout: 10_000 });
 
+// Each test has a coupon of its own: a read that the test before left under way must not be taken for this one's.
+let count = 0;
+let couponId = '';
+let code = '';
+
 const entered = (value: number, unit: string) => ({ entered: { value, unit }, physical: value });
 const setting = (speed: number, power: number) => ({
   values: {
@@ -46,7 +51,7 @@ const cells = SPEEDS.flatMap((speed, rowIndex) =>
   }),
 );
 const coupon = (rest: object = {}) => ({
-  ...{ id: 'coupon-1', code: 'C-0117', title: '', purpose: 'exploration', state: 'marked', storedAt: '', ambientNotes: '', notes: '' },
+  ...{ id: couponId, code, title: '', purpose: 'exploration', state: 'marked', storedAt: '', ambientNotes: '', notes: '' },
   ...{
     material: { id: 'm', name: '316L', family: 'stainless steel' },
     finish: { id: 'f', name: 'Brushed' },
@@ -106,13 +111,14 @@ const verdict = (address: string, given: object = {}) => ({
   ...given,
 });
 const inspection = (rest: object = {}) => ({
-  ...{ couponId: 'coupon-1', state: 'marked', criteria: [CRITERION], criteriaRecordedAt: '2026-05-13T08:00:00Z', areCriteriaFixed: true },
+  ...{ couponId, state: 'marked', criteria: [CRITERION], criteriaRecordedAt: '2026-05-13T08:00:00Z', areCriteriaFixed: true },
   ...{ proposedCriteria: [{ ...CRITERION, value: 35 }], ratings: [], measurements: [], corrections: [] },
   ...{ verdicts: cells.map(({ address }) => verdict(address)), missingToInspect: [], missingToSeal: [], version: 5 },
   allowedActions: coupon().allowedActions,
   ...rest,
 });
-const RATE = 'PUT /api/coupons/coupon-1/ratings';
+const rateOf = () => `PUT /api/coupons/${couponId}/ratings`;
+const readOf = (part: string) => `GET /api/coupons/${couponId}/${part}`;
 type Row = ReturnType<typeof rating>;
 /** Ratings as the api keeps them: the next read shows what was saved. */
 function ratingStore(first: readonly Row[] = []) {
@@ -132,19 +138,24 @@ function ratingStore(first: readonly Row[] = []) {
 }
 
 let server: ReturnType<typeof fakeServer>;
-beforeEach(() => openSession(makeSessionAnswer('operator')));
+beforeEach(() => {
+  count += 1;
+  couponId = `coupon-${count}`;
+  code = `C-${100 + count}`;
+  openSession(makeSessionAnswer('operator'));
+});
 afterEach(() => {
   server.restore();
   closeSession('left');
   localStorage.clear();
 });
 
-async function openPage(handlers: Parameters<typeof fakeServer>[0] = {}, at = '/coupons/C-0117?cell=B2', ratings = ratingStore()) {
+async function openPage(handlers: Parameters<typeof fakeServer>[0] = {}, cell = 'B2', ratings = ratingStore()) {
   server = fakeServer({
-    'GET /api/coupons/C-0117': () => ({ body: coupon() }),
-    'GET /api/coupons/coupon-1/inspection': () => ({ body: inspection({ ratings: ratings.read() }) }),
-    'GET /api/coupons/coupon-1/photos': () => ({ body: { items: [], nextCursor: null } }),
-    [RATE]: ratings.save,
+    [`GET /api/coupons/${code}`]: () => ({ body: coupon() }),
+    [readOf('inspection')]: () => ({ body: inspection({ ratings: ratings.read() }) }),
+    [readOf('photos')]: () => ({ body: { items: [], nextCursor: null } }),
+    [rateOf()]: ratings.save,
     ...handlers,
   });
   const page = (
@@ -152,7 +163,7 @@ async function openPage(handlers: Parameters<typeof fakeServer>[0] = {}, at = '/
       <CouponPage />
     </StatusLineProvider>
   );
-  const rendered = renderRoutes([{ path: '/coupons/:code', element: page }], at);
+  const rendered = renderRoutes([{ path: '/coupons/:code', element: page }], `/coupons/${code}?cell=${cell}`);
   await screen.findByRole('grid');
   return rendered;
 }
@@ -180,7 +191,7 @@ describe('the coupon’s page', () => {
   });
 
   it('shows what was really used, with the plan beside it', async () => {
-    await openPage({}, '/coupons/C-0117?cell=B1');
+    await openPage({}, 'B1');
     expect(within(panel('B1')).getByText('planned 20 %')).toBeInTheDocument();
     expect(cellOf('B1')).toHaveAccessibleName(/power 25 percent/);
   });
@@ -195,7 +206,7 @@ describe('the coupon’s page', () => {
     expect(cellOf('B1')).toHaveAttribute('aria-selected', 'true');
     expect(cellOf('B2')).toHaveAccessibleName(/rated 5/);
     await waitFor(() =>
-      expect(server.bodies(RATE)).toEqual([
+      expect(server.bodies(rateOf())).toEqual([
         { ratings: [{ cellId: 'cell-B2', seenVersion: null, rating: 5, outcome: null, tags: [], note: '' }] },
         { ratings: [{ cellId: 'cell-A1', seenVersion: null, rating: 2, outcome: null, tags: [], note: '' }] },
       ]),
@@ -204,7 +215,7 @@ describe('the coupon’s page', () => {
 
   it('moves to the right instead where the person set it so, over skipped cells', async () => {
     localStorage.setItem('proofplate.move-after-rating', 'right');
-    const { user } = await openPage({}, '/coupons/C-0117?cell=A1');
+    const { user } = await openPage({}, 'A1');
     cellOf('A1').focus();
     await user.keyboard('4');
     expect(cellOf('B1')).toHaveAttribute('aria-selected', 'true');
@@ -214,7 +225,7 @@ describe('the coupon’s page', () => {
     let isAway = true;
     const ratings = ratingStore();
     const rate = (request: { body: unknown }) => (isAway ? problem(503, 'try-again', 'Too busy') : ratings.save(request));
-    const { user } = await openPage({ [RATE]: rate }, undefined, ratings);
+    const { user } = await openPage({ [rateOf()]: rate }, undefined, ratings);
     cellOf('B2').focus();
     await user.keyboard('5');
     expect(await screen.findByText('B2 was not saved.')).toBeInTheDocument();
@@ -230,7 +241,7 @@ describe('the coupon’s page', () => {
     const ratings = ratingStore();
     let isFirst = true;
     const { user } = await openPage({
-      [RATE]: (request) => {
+      [rateOf()]: (request) => {
         if (!isFirst) return ratings.save(request);
         isFirst = false;
         const yours = { rating: 5, outcome: null, tags: [], note: '' };
@@ -242,7 +253,7 @@ describe('the coupon’s page', () => {
     const dialog = await screen.findByRole('dialog', { name: /B2 was rated somewhere else/, hidden: true });
     expect(within(dialog).getByText('1')).toBeInTheDocument();
     await user.click(within(dialog).getByRole('button', { name: 'Take the one from here', hidden: true }));
-    await waitFor(() => expect(server.bodies(RATE)[1]).toMatchObject({ ratings: [{ cellId: 'cell-B2', seenVersion: 4, rating: 5 }] }));
+    await waitFor(() => expect(server.bodies(rateOf())[1]).toMatchObject({ ratings: [{ cellId: 'cell-B2', seenVersion: 4, rating: 5 }] }));
   });
 
   it('keeps tags and note with the rating, and shows what others said', async () => {
@@ -253,7 +264,7 @@ describe('the coupon’s page', () => {
     fireEvent.change(within(panel('B2')).getByLabelText('Note'), { target: { value: 'dry cloth test' } });
     fireEvent.blur(within(panel('B2')).getByLabelText('Note'));
     await waitFor(() =>
-      expect(server.bodies(RATE).at(-1)).toMatchObject({
+      expect(server.bodies(rateOf()).at(-1)).toMatchObject({
         ratings: [{ cellId: 'cell-B2', rating: 3, tags: ['even'], note: 'dry cloth test' }],
       }),
     );
@@ -261,21 +272,21 @@ describe('the coupon’s page', () => {
 
   it('asks for the criteria first, with the effect’s own as a proposal, and rates nothing before', async () => {
     const { user } = await openPage({
-      'GET /api/coupons/coupon-1/inspection': () => ({
+      [readOf('inspection')]: () => ({
         body: inspection({ criteria: null, criteriaRecordedAt: null, areCriteriaFixed: false }),
       }),
-      'PUT /api/coupons/coupon-1/criteria': () => ({ body: inspection() }),
+      [`PUT /api/coupons/${couponId}/criteria`]: () => ({ body: inspection() }),
     });
     cellOf('B2').focus();
     await user.keyboard('5');
-    expect(server.bodies(RATE)).toEqual([]);
+    expect(server.bodies(rateOf())).toEqual([]);
     expect(screen.getByLabelText('Limit')).toHaveValue('35');
     await user.clear(screen.getByLabelText('Limit'));
     await user.type(screen.getByLabelText('Limit'), '28.5');
     await user.click(screen.getByRole('button', { name: 'Record the criteria' }));
     await waitFor(() =>
       expect(server.requests.find(({ method }) => method === 'PUT')).toMatchObject({
-        path: '/api/coupons/coupon-1/criteria',
+        path: `/api/coupons/${couponId}/criteria`,
         body: { criteria: [{ quantity: 'lightness', comparison: 'at most', value: 28.5 }] },
       }),
     );
@@ -284,7 +295,7 @@ describe('the coupon’s page', () => {
 
   it('maps a response with its numbers, hatches what is missing and names the unit', async () => {
     const { user } = await openPage({
-      'GET /api/coupons/coupon-1/inspection': () => ({ body: inspection({ measurements: [measured('A1', 26.4), measured('B1', 71)] }) }),
+      [readOf('inspection')]: () => ({ body: inspection({ measurements: [measured('A1', 26.4), measured('B1', 71)] }) }),
     });
     await user.click(screen.getByRole('radio', { name: 'L*' }));
     expect(cellOf('A1')).toHaveAccessibleName(/L\* of the mark 26$/);
@@ -298,7 +309,9 @@ describe('the coupon’s page', () => {
   });
 
   it('takes a block from a spreadsheet, marks what cannot be read, and takes the paste back as one', async () => {
-    const { user } = await openPage({ 'POST /api/coupons/coupon-1/measurements': () => ({ status: 201, body: { measurements: [] } }) });
+    const { user } = await openPage({
+      [`POST /api/coupons/${couponId}/measurements`]: () => ({ status: 201, body: { measurements: [] } }),
+    });
     await user.click(screen.getByRole('button', { name: 'Enter measurements' }));
     const field = (address: string) => screen.getByRole('textbox', { name: new RegExp(`^${address}`), hidden: true });
     const paste = () => fireEvent.paste(field('A1'), { clipboardData: { getData: () => '26,4\t30\r\ndark\t27,5\t99' } });
@@ -318,7 +331,7 @@ describe('the coupon’s page', () => {
     await user.click(screen.getByRole('button', { name: 'Save 2 values', hidden: true }));
     const condition = { methodDetail: { illuminant: 'D65', observer: '10°', geometry: '45/0' }, instrument: 'Colorimeter 1' };
     await waitFor(() =>
-      expect(server.bodies('POST /api/coupons/coupon-1/measurements')).toEqual([
+      expect(server.bodies(`POST /api/coupons/${couponId}/measurements`)).toEqual([
         {
           measurements: [
             { cellId: 'cell-A1', quantity: 'lightness', method: 'colorimeter', value: 26.4, ...condition },
@@ -337,18 +350,18 @@ describe('the coupon’s page', () => {
       isBlocking: true,
     };
     const { user } = await openPage({
-      'GET /api/coupons/coupon-1/inspection': () => ({ body: inspection({ missingToInspect: [ratings] }) }),
-      'POST /api/coupons/coupon-1/inspect': () => ({ body: coupon({ state: 'inspected' }) }),
+      [readOf('inspection')]: () => ({ body: inspection({ missingToInspect: [ratings] }) }),
+      [`POST /api/coupons/${couponId}/inspect`]: () => ({ body: coupon({ state: 'inspected' }) }),
     });
     await user.click(screen.getAllByRole('button', { name: 'Seal coupon' })[0] as HTMLElement);
-    const dialog = screen.getByRole('dialog', { name: 'Seal C-0117', hidden: true });
+    const dialog = screen.getByRole('dialog', { name: `Seal ${code}`, hidden: true });
     expect(within(dialog).getByText('A1, B1')).toBeInTheDocument();
     const finish = within(dialog).getByRole('button', { name: 'Finish the inspection', hidden: true });
     expect(finish).toBeDisabled();
     fireEvent.change(within(dialog).getByLabelText('Why these cells are not rated'), { target: { value: 'plate bent there' } });
     await user.click(finish);
     await waitFor(() =>
-      expect(server.bodies('POST /api/coupons/coupon-1/inspect')).toEqual([
+      expect(server.bodies(`POST /api/coupons/${couponId}/inspect`)).toEqual([
         { unratedCells: ['A1', 'B1'].map((address) => ({ cellId: `cell-${address}`, reason: 'plate bent there' })) },
       ]),
     );
