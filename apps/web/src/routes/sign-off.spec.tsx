@@ -158,10 +158,17 @@ describe('the sign-off page', () => {
   });
 
   it('offers no signature over a failing check, and lists it first', async () => {
-    const failing = { key: 'photo', passes: false, title: 'Photo', detail: 'No photo of C-0117.', isAdvisory: false, blocks: 'approve' };
+    const failing = {
+      key: 'photo',
+      passes: false,
+      title: 'Photo',
+      detail: 'No photo of C-0117.',
+      isAdvisory: false,
+      blocks: 'approve' as const,
+    };
     openPage({
       'GET /api/revisions/revision-4/checks': () => ({
-        body: makeChecks({ mayApprove: false, items: [...makeChecks().items, failing] as never }),
+        body: makeChecks({ mayApprove: false, items: [...makeChecks().items, failing] }),
       }),
     });
     expect(await screen.findByText('Revision 4 cannot be signed yet')).toBeVisible();

@@ -2,7 +2,8 @@ import { chakra } from '@chakra-ui/react';
 import { Panel } from '../../../components/page';
 import { revisionName } from '../revision-words';
 import { ColumnHead } from './column-head';
-import { Change, type CompareTableProps, ReferenceChoice, WhyAndWho } from './compare-table';
+import { Change, type CompareTableProps } from './compare-table';
+import { ReferenceChoice, WhyAndWho } from './reference-choice';
 
 /** Below 600 px every row is a card with one line for each revision. */
 export function CompareCards({ comparison, view, onReference, onRemove }: CompareTableProps) {

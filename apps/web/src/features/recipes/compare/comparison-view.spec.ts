@@ -1,3 +1,4 @@
+import { makeRevision } from '../../../testing/revisions';
 import type { Comparison, ComparisonRow } from '../recipes.api';
 import { addressOf, choiceFromAddress } from './compare-address';
 import { comparisonView } from './comparison-view';
@@ -93,7 +94,7 @@ describe('comparisonView', () => {
 });
 
 describe('the address of a comparison', () => {
-  const brief = (id: string) => ({ id }) as Parameters<typeof choiceFromAddress>[1]['revisions'][number];
+  const brief = (id: string) => makeRevision({ id });
   const recipe = { revisions: [brief('r4'), brief('r3'), brief('r2')], current: brief('r3') };
 
   it('compares the approved revision with the newest when it names none', () => {
