@@ -5,9 +5,12 @@ import { Stage } from './stage/stage';
 import type { Cast } from './story/cast';
 import { fillCatalogue } from './story/catalogue';
 import { type World, writeCoupons } from './story/coupons';
+import { writeEarlierPlates } from './story/earlier-plates';
 import { measurePower, setUpEquipment } from './story/equipment';
+import { writeFloor } from './story/floor';
 import { writeRecipes } from './story/recipes';
 import { Made } from './story/records';
+import { writeRuns } from './story/runs';
 import { Script } from './story/script';
 import { FOUNDED, foundShop, POLICY, teller, train } from './story/shop';
 
@@ -53,6 +56,9 @@ async function playStory(world: World): Promise<void> {
     }
   }
   writeCoupons(world);
+  writeEarlierPlates(world);
   writeRecipes(world);
+  writeRuns(world);
+  writeFloor(world);
   await script.play(stage);
 }

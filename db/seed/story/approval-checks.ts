@@ -1,5 +1,5 @@
 import { type Criterion, QUANTITIES, type RouteKind } from '@proofplate/recipe-model';
-import type { ShopPolicyRow } from './shop';
+import type { ShopPolicyRow } from './cast';
 
 type Kept = { key: string; passes: boolean; title: string; detail: string; isAdvisory: boolean; blocks: 'submit' | 'approve' };
 export type ProvedMark = {

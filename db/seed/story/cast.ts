@@ -1,3 +1,4 @@
+import type { schema } from '@proofplate/db';
 import type {
   Caution,
   Criterion,
@@ -8,7 +9,9 @@ import type {
   Role,
   SourceKind,
 } from '@proofplate/recipe-model';
-import type { ShopPolicyRow } from './shop';
+
+/** The shop's rules as its row holds them. */
+export type ShopPolicyRow = typeof schema.shop.$inferSelect.policy;
 
 export type Person = {
   readonly personId: string;

@@ -1,8 +1,9 @@
 import { schema } from '@proofplate/db';
 import { and, eq } from 'drizzle-orm';
 import { authored, inTurn, minutesAfter, type Stage, type Turn } from '../stage/stage';
-import { BENCH_SPECS, type BenchSpec, LENS_SPECS, mountingsOf, PUBLISHED_PANEL } from './bench-specs';
+import { BENCH_SPECS, type BenchSpec, LENS_SPECS, mountingsOf } from './bench-specs';
 import type { Bench, BenchKey, Calibration, Cast, Lens, LensKey, People } from './cast';
+import { PUBLISHED_PANEL } from './published-panel';
 import { teller } from './shop';
 
 const { lens, machine, machineLens, machineProfile, powerCalibration } = schema;

@@ -61,7 +61,7 @@ export const PROVED_RECIPES: readonly RecipeSpec[] = [
       },
       {
         ...{ draftedAt: '2026-06-02T13:00:00Z', by: 'operator', reason: 'A little slower: the black was thin on lot 316L-2301.' },
-        setting: { coupon: 'steel', changed: { speedMmPerS: 196 } },
+        setting: { coupon: 'steel', changed: { speedMmPerS: 280 } },
         proof: { runAt: '2026-06-03T13:00:00Z', pieces: 4, lot: '316L-2301' },
         ...{ submittedAt: '2026-06-04T10:00:00Z', ending: approved('2026-06-04T14:30:00Z') },
       },
@@ -69,15 +69,15 @@ export const PROVED_RECIPES: readonly RecipeSpec[] = [
         ...{
           draftedAt: '2026-08-25T13:00:00Z',
           by: 'operator',
-          reason: 'After the reading of 18 August: one percent more for the same watts.',
+          reason: 'After the reading of 18 August: five points more for the same watts.',
         },
-        setting: { coupon: 'steel', changed: { speedMmPerS: 190, powerPercent: 51 } },
+        setting: { coupon: 'steel', changed: { speedMmPerS: 280, powerPercent: 85 } },
         proof: { runAt: '2026-08-26T13:00:00Z', pieces: 4, lot: '316L-2304' },
         ...{ submittedAt: '2026-08-27T10:00:00Z', ending: approved('2026-08-27T15:05:00Z', 'Matches the reference at 30°.') },
       },
       {
         ...{ draftedAt: '2026-11-16T13:00:00Z', by: 'operator', reason: 'The black has gone brown at the rim since October: more dose.' },
-        setting: { coupon: 'steel', changed: { speedMmPerS: 180, powerPercent: 51 } },
+        setting: { coupon: 'steel', changed: { speedMmPerS: 262, powerPercent: 85 } },
         proof: { coupon: 'steel, proof 4', linkedAt: '2026-11-18T13:00:00Z' },
         ...{ submittedAt: '2026-11-19T10:12:00Z', comment: 'Please look at the rim of A3 too.' },
       },
@@ -107,13 +107,13 @@ export const PROVED_RECIPES: readonly RecipeSpec[] = [
       },
       {
         ...{ draftedAt: '2026-06-16T13:00:00Z', by: 'operator', reason: 'Faster by a tenth for the summer orders.' },
-        setting: { coupon: 'black', changed: { speedMmPerS: 620 } },
+        setting: { coupon: 'black', changed: { speedMmPerS: 490 } },
         proof: { runAt: '2026-06-17T13:00:00Z', pieces: 5, lot: '6061-B19' },
         ...{ submittedAt: '2026-06-18T10:00:00Z', ending: approved('2026-06-18T14:00:00Z') },
       },
       {
         ...{ draftedAt: '2026-09-08T13:00:00Z', by: 'operator', reason: 'Back to the slower speed: lot 6061-B20 stayed grey.' },
-        setting: { coupon: 'black', changed: { speedMmPerS: 560 } },
+        setting: { coupon: 'black', changed: { speedMmPerS: 440 } },
         proof: { runAt: '2026-09-09T13:00:00Z', pieces: 5, lot: '6061-B20' },
         ...{ submittedAt: '2026-09-10T10:00:00Z', ending: approved('2026-09-10T14:12:00Z', 'White enough on both lots.') },
       },
@@ -164,7 +164,7 @@ export const PROVED_RECIPES: readonly RecipeSpec[] = [
       },
       {
         ...{ draftedAt: '2026-11-23T13:00:00Z', by: 'operator', reason: 'Try a slightly deeper blue.' },
-        setting: { coupon: 'titanium', changed: { lineSpacingUm: 0.013 } },
+        setting: { coupon: 'titanium', changed: { lineSpacingUm: 0.011 } },
       },
     ],
   },

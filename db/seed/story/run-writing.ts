@@ -1,5 +1,5 @@
 import { schema } from '@proofplate/db';
-import { type MarkStep, QUANTITIES, type RunKind } from '@proofplate/recipe-model';
+import { type Criterion, type MarkStep, meetsCriterion, QUANTITIES, type RunKind } from '@proofplate/recipe-model';
 import { and, eq } from 'drizzle-orm';
 import type { MarkKind } from '../photos/mark-kinds';
 import { modelMark } from '../photos/mark-model';
@@ -106,6 +106,15 @@ export function measuredPieces(
     const measured = [...seen, ...byInstrument({ mark, parameters: step.parameters }, criteria, bench)];
     return measured
       .filter(({ quantity }) => quantity === 'lightness' || criteria.some((criterion) => criterion.quantity === quantity))
-      .map(({ quantity, value, method }) => ({ piece: index + 1, quantity, value, unit: QUANTITIES[quantity].unit, method }));
+      .map(({ quantity, value, method }) => ({
+        ...{ piece: index + 1, quantity, value, unit: QUANTITIES[quantity].unit, method },
+        ...judged(criteria, { quantity, value }),
+      }));
   }).flat();
+}
+
+/** Says whether a value meets the criteria where one asks for it. */
+function judged(criteria: readonly Criterion[], { quantity, value }: { readonly quantity: string; readonly value: number }) {
+  const asked = criteria.filter((criterion) => criterion.quantity === quantity);
+  return asked.length === 0 ? {} : { meets: asked.every((criterion) => meetsCriterion(criterion, value)) };
 }

@@ -3,11 +3,10 @@ import { schema } from '@proofplate/db';
 import { type Caution, type Role, SHIPPED_CAUTIONS, SHIPPED_EFFECTS } from '@proofplate/recipe-model';
 import { hash } from 'bcryptjs';
 import { minutesAfter, type Stage, type Turn } from '../stage/stage';
-import type { Effect, People, Person } from './cast';
+import type { Effect, People, Person, ShopPolicyRow } from './cast';
 
 const { caution, effect, member, person, shop, trainingRecord } = schema;
 
-export type ShopPolicyRow = typeof shop.$inferSelect.policy;
 export type PasswordRules = { readonly passwordPepper: string; readonly passwordCost: number };
 
 export const FOUNDED = new Date('2026-01-05T08:00:00Z');
