@@ -68,7 +68,12 @@ const spacing = Object.fromEntries(SPACING_STEPS.map((step) => [step, px(step * 
 
 export const tokens = {
   colors: { transparent: { value: 'transparent' }, current: { value: 'currentColor' } },
-  fonts: { body: { value: '"Source Sans 3", system-ui, sans-serif' }, heading: { value: '"Source Sans 3", system-ui, sans-serif' } },
+  fonts: {
+    body: { value: '"Source Sans 3", system-ui, sans-serif' },
+    heading: { value: '"Source Sans 3", system-ui, sans-serif' },
+    /** Hashes only. */
+    mono: { value: 'ui-monospace, "DejaVu Sans Mono", Menlo, Consolas, monospace' },
+  },
   fontSizes: {
     sm: rem(0.875),
     md: rem(1),

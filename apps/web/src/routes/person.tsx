@@ -43,7 +43,7 @@ function Meta({ member: { id, role, email, createdAt, removedAt } }: { member: M
       {email !== null && <span>{email}</span>}
       <span>here since {formatDate(createdAt, shop.timeZone)}</span>
       {removedAt !== null && <span>left {formatDate(removedAt, shop.timeZone)}</span>}
-      <TextLink to={`${paths.ledger}?who=${encodeURIComponent(id)}`}>What was done</TextLink>
+      <TextLink to={`${paths.ledger}?who=${encodeURIComponent(id)}`}>In the ledger</TextLink>
     </>
   );
 }

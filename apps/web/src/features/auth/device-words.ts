@@ -3,7 +3,7 @@ const BROWSERS: readonly (readonly [RegExp, string])[] = [
   [/\bOPR\//, 'Opera'],
   [/\bSamsungBrowser\//, 'Samsung browser'],
   [/\bFirefox\/|\bFxiOS\//, 'Firefox'],
-  [/\bCriOS\/|\bChrom(?:e|ium)\//, 'Chrome or Chromium'],
+  [/\bCriOS\/|Chrom(?:e|ium)\//, 'Chrome or Chromium'],
   [/\bSafari\//, 'Safari'],
 ];
 const SYSTEMS: readonly (readonly [RegExp, string])[] = [

@@ -38,6 +38,7 @@ function Device({ session }: { session: OpenSession }) {
   const announce = useStatusLine();
   const [isBusy, setIsBusy] = useState(false);
   const name = deviceWords(session.userAgent);
+  const lastUsed = formatTime(session.lastSeenAt, shop.timeZone);
   const handleEnd = async () => {
     setIsBusy(true);
     try {
@@ -52,7 +53,7 @@ function Device({ session }: { session: OpenSession }) {
   return (
     <chakra.li
       display="flex"
-      flexWrap="wrap"
+      flexWrap={{ base: 'wrap', sm: 'nowrap' }}
       gap="3"
       alignItems="center"
       justifyContent="space-between"
@@ -63,16 +64,16 @@ function Device({ session }: { session: OpenSession }) {
       <chakra.div minW="0">
         <chakra.p fontWeight="semibold">{name}</chakra.p>
         <Flex columnGap="4" wrap="wrap" fontSize="sm" lineHeight="sm" color="fg.muted">
-          <span>Last used {formatTime(session.lastSeenAt, shop.timeZone)}</span>
+          <span>Last used {lastUsed}</span>
           {session.shopName !== null && <span>{session.shopName}</span>}
         </Flex>
       </chakra.div>
       {session.isCurrent ? (
-        <chakra.span fontSize="sm" color="fg.muted">
+        <chakra.span fontSize="sm" color="fg.muted" whiteSpace="nowrap">
           this device
         </chakra.span>
       ) : (
-        <Button isBusy={isBusy} aria-label={`Sign out ${name}`} onClick={() => void handleEnd()}>
+        <Button flexShrink="0" isBusy={isBusy} aria-label={`Sign out ${name}, last used ${lastUsed}`} onClick={() => void handleEnd()}>
           Sign out
         </Button>
       )}

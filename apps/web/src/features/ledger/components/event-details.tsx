@@ -22,7 +22,7 @@ export function EventDetails({ event }: { event: LedgerEvent }) {
         ].map(({ label, value }) => (
           <Fragment key={label}>
             <chakra.dt color="fg.muted">{label}</chakra.dt>
-            <chakra.dd fontFamily="mono" fontSize="xs" overflowWrap="anywhere">
+            <chakra.dd fontFamily="mono" fontSize="sm" overflowWrap="anywhere">
               {value}
             </chakra.dd>
           </Fragment>
@@ -55,15 +55,15 @@ function Values({ values, hasBefore }: { values: readonly ChangedValue[]; hasBef
         <tbody>
           {values.map(({ path, before, after }) => (
             <chakra.tr key={path} verticalAlign="top" borderTop="hairline">
-              <chakra.th scope="row" textAlign="start" fontWeight="normal" pr="4" py="1" minW="120px" overflowWrap="anywhere">
+              <chakra.th scope="row" textAlign="start" fontWeight="normal" pr="4" py="1" minW="96px" overflowWrap="anywhere">
                 {path}
               </chakra.th>
               {hasBefore && (
-                <chakra.td pr="4" py="1" color="fg.muted" overflowWrap="anywhere">
+                <chakra.td pr="4" py="1" minW="88px" color="fg.muted" overflowWrap="anywhere">
                   {before}
                 </chakra.td>
               )}
-              <chakra.td py="1" fontWeight="semibold" overflowWrap="anywhere">
+              <chakra.td py="1" minW="88px" fontWeight="semibold" overflowWrap="anywhere">
                 {after}
               </chakra.td>
             </chakra.tr>

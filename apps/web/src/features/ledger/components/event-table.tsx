@@ -99,9 +99,9 @@ function EventRow({ event, isOpen, onToggle }: EventRowProps) {
         columnGap="3"
         bg={{ base: 'bg.panel', sm: 'transparent' }}
         border={{ base: 'hairline', sm: 'none' }}
-        borderRadius={{ base: 'md', sm: 'none' }}
+        borderTopRadius={{ base: 'md', sm: 'none' }}
+        borderBottomRadius={{ base: isOpen ? 'none' : 'md', sm: 'none' }}
         px={{ base: '3', sm: '0' }}
-        pt={{ base: '0', sm: '0' }}
         pb={{ base: '3', sm: '0' }}
       >
         <Cell role="cell" color="fg.muted" order={{ base: '1', sm: 'initial' }}>
@@ -135,13 +135,13 @@ function EventRow({ event, isOpen, onToggle }: EventRowProps) {
           {formatTime(event.at, shop.timeZone)}
         </Cell>
         <Cell role="cell" display={{ base: 'none', md: 'table-cell' }} whiteSpace="nowrap">
-          <chakra.code fontFamily="mono" fontSize="xs" color="fg.muted">
+          <chakra.code fontFamily="mono" fontSize="sm" color="fg.muted">
             {event.hash.slice(0, HASH_SHOWN)}…
           </chakra.code>
         </Cell>
       </chakra.tr>
       {isOpen && (
-        <chakra.tr role="row" display={{ base: 'block', sm: 'table-row' }}>
+        <chakra.tr role="row" display={{ base: 'block', sm: 'table-row' }} mt={{ base: '-2', sm: '0' }}>
           <chakra.td
             id={detailsId}
             role="cell"
@@ -150,7 +150,8 @@ function EventRow({ event, isOpen, onToggle }: EventRowProps) {
             bg={{ base: 'bg.panel', sm: 'bg.subtle' }}
             border={{ base: 'hairline', sm: 'none' }}
             borderBottom="hairline"
-            borderRadius={{ base: 'md', sm: 'none' }}
+            borderTop="none"
+            borderBottomRadius={{ base: 'md', sm: 'none' }}
             px="4"
             py="4"
           >

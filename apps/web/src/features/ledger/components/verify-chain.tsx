@@ -58,7 +58,7 @@ function Intact({ result }: { result: Verification }) {
       <chakra.p mt="1">{intactWords(result)}</chakra.p>
       <chakra.p fontSize="sm" color="fg.muted" overflowWrap="anywhere">
         Hash of the last event:{' '}
-        <chakra.code fontFamily="mono" fontSize="xs" color="fg">
+        <chakra.code fontFamily="mono" fontSize="sm" color="fg">
           {result.headHash}
         </chakra.code>
       </chakra.p>

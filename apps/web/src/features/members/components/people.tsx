@@ -50,7 +50,7 @@ function columns({ ownId, timeZone, onAct }: ColumnOptions): readonly Column<Mem
       onPhone: 'title',
       cell: ({ id, printedName }) => (
         <>
-          <TextLink to={paths.person(id)} color="fg" fontWeight="semibold" textDecoration="none" py="3">
+          <TextLink to={paths.person(id)} fontWeight="semibold" py="3">
             {printedName}
           </TextLink>
           {id === ownId && <chakra.span color="fg.muted"> you</chakra.span>}

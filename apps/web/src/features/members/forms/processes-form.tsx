@@ -43,7 +43,7 @@ export function ProcessesForm({ member, onChanged }: ProcessesFormProps) {
         <Segmented label="Signs for" choices={EXTENTS} value={extent} onChange={setExtent} />
       </div>
       {extent === 'some' && <ProcessTicks chosen={chosen} onChange={setChosen} />}
-      <Flex justify="flex-end">
+      <Flex justify="flex-end" position="sticky" bottom="0" mb="-5" mx="-5" px="5" py="3" bg="bg.panel" borderTop="hairline">
         <Button kind="primary" size="touch" isBusy={isBusy} onClick={() => void handleSave()}>
           Save
         </Button>
