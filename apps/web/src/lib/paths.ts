@@ -3,6 +3,7 @@
 export const paths = {
   home: '/',
   machine: '/machine',
+  machineWith: (recipeId: string) => `/machine?recipe=${encodeURIComponent(recipeId)}`,
   setUpSheet: (recipeId: string) => `/machine/sheet?recipe=${encodeURIComponent(recipeId)}`,
   coupons: '/coupons',
   planCoupon: '/coupons/plan',

@@ -54,9 +54,11 @@ function Start({ sheet, wantedKind }: { sheet: StartSheet; wantedKind: string | 
         gridTemplateColumns={{ base: 'minmax(0, 1fr)', lg: 'repeat(2, minmax(0, 1fr))' }}
         alignItems="start"
       >
-        <chakra.div gridColumn="1 / -1">
-          <Holds holds={sheet.holds} subjects={subjects} mayRelease={member.role === 'lead' || member.role === 'owner'} />
-        </chakra.div>
+        {sheet.holds.length > 0 && (
+          <chakra.div gridColumn="1 / -1">
+            <Holds holds={sheet.holds} subjects={subjects} mayRelease={member.role === 'lead' || member.role === 'owner'} />
+          </chakra.div>
+        )}
         <RunSetUp shown={sheet} ticks={ticks} onTick={setTick} />
         {kind === undefined ? (
           <p>This revision is {revision.state.replace('_', ' ')}: no run can be started with it.</p>

@@ -21,7 +21,7 @@ export function Component() {
   const [params] = useSearchParams();
   const recipeId = params.get('recipe') ?? '';
   const { data, error, isLoading, mutate } = useFinder({ recipe: recipeId });
-  const back = `${paths.machine}?recipe=${encodeURIComponent(recipeId)}`;
+  const back = paths.machineWith(recipeId);
   return (
     <Page title="Set-up sheet" isTitleHidden>
       <Global styles={PRINT_STYLES} />
@@ -43,7 +43,14 @@ export function Component() {
               Back to the machine
             </ButtonLink>
           </Flex>
-          <chakra.div overflowX="auto" css={{ '@media print': { overflow: 'visible' } }}>
+          <chakra.div
+            // The paper is wider than a phone: it scrolls sideways, by keys too.
+            role="region"
+            aria-label="The sheet as it prints"
+            tabIndex={0}
+            overflowX="auto"
+            css={{ '@media print': { overflow: 'visible' } }}
+          >
             <Sheet answer={data.answer} cautions={data.cautions} />
           </chakra.div>
         </>

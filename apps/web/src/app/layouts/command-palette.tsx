@@ -21,7 +21,7 @@ export function CommandPalette({ role, onClose }: CommandPaletteProps) {
   const [typed, setTyped] = useState('');
   const [activeIndex, setActiveIndex] = useState(0);
   const pages = useMemo(() => pagesFor(role), [role]);
-  const records = useRecords(typed);
+  const records = useRecords(typed, role);
   const entries = useMemo(() => [...pages.filter((page) => matches(page.label, typed)), ...records], [pages, records, typed]);
   const active = entries[Math.min(activeIndex, entries.length - 1)];
 
@@ -108,7 +108,7 @@ function EntryRow({ id, entry, isActive, onOpen }: EntryRowProps) {
   );
 }
 
-function useRecords(typed: string): readonly Entry[] {
+function useRecords(typed: string, role: Role): readonly Entry[] {
   const query = useDeferredValue(typed.trim());
   const [records, setRecords] = useState<readonly FoundRecord[]>([]);
   useEffect(() => {
@@ -118,14 +118,14 @@ function useRecords(typed: string): readonly Entry[] {
     }
     const leaving = new AbortController();
     const timer = setTimeout(() => {
-      findRecords(query, leaving.signal).then(setRecords, () => setRecords([]));
+      findRecords(query, role, leaving.signal).then(setRecords, () => setRecords([]));
     }, TYPING_PAUSE_MS);
     // An older answer must not overwrite a newer one.
     return () => {
       clearTimeout(timer);
       leaving.abort();
     };
-  }, [query]);
+  }, [query, role]);
   return useMemo(() => records.map(({ kind, id, to, label }) => ({ id: `${kind}-${id}`, to, label, kind })), [records]);
 }
 

@@ -79,7 +79,7 @@ function MissRow({ miss, isFirst, onShow }: { miss: NearMiss; isFirst: boolean; 
       ))}
       <chakra.span role="cell" gridColumn={{ base: '1 / -1', lg: 'auto' }} display="grid">
         <Button
-          kind={isFirst ? 'primary' : 'plain'}
+          kind={isFirst && isElsewhereOnly ? 'primary' : 'plain'}
           size="glove"
           px="3"
           whiteSpace="normal"

@@ -20,6 +20,7 @@ export function FinishRun({ run, onChange }: { run: Run; onChange: (run: Run) =>
   const [notes, setNotes] = useState('');
   const [pieces, setPieces] = useState<readonly TypedPiece[]>([]);
   const [wasTried, setWasTried] = useState(false);
+  const [isEmptyMeant, setIsEmptyMeant] = useState(false);
   const {
     run: act,
     busyWith,
@@ -35,8 +36,15 @@ export function FinishRun({ run, onChange }: { run: Run; onChange: (run: Run) =>
     setWasTried(true);
     const { good: goodCount, scrap: scrapCount } = counts;
     if (goodCount === undefined || scrapCount === undefined || measured === undefined) return;
+    // A finished run never changes again, so a tap too early must not end one without its parts.
+    if (goodCount + scrapCount === 0 && !isEmptyMeant) {
+      setIsEmptyMeant(true);
+      return;
+    }
     void act('finish', (key) => finishRun(run, { good: goodCount, scrap: scrapCount, notes, measurements: measured }, key));
   };
+  // Until the first piece is released, releasing it is the act of the page.
+  const isNext = run.kind !== 'production' || run.firstPiece?.ok === true;
   const errorOf = (count: number | undefined) => (wasTried && count === undefined ? COUNT_MESSAGE : undefined);
   return (
     <Panel px="5" py="4" aria-labelledby="finish-title">
@@ -56,7 +64,12 @@ export function FinishRun({ run, onChange }: { run: Run; onChange: (run: Run) =>
           onChange={(event) => setNotes(event.currentTarget.value)}
         />
         <ActProblem problem={problem} />
-        <Button type="submit" kind="primary" size="primaryAct" isBusy={busyWith === 'finish'}>
+        {isEmptyMeant && counts.good === 0 && counts.scrap === 0 && (
+          <chakra.p role="alert" fontWeight="semibold" color="straw.fg">
+            No part is counted yet. Count first, or finish once more to end the run without parts.
+          </chakra.p>
+        )}
+        <Button type="submit" kind={isNext ? 'primary' : 'plain'} size="primaryAct" isBusy={busyWith === 'finish'}>
           Finish {run.code}
         </Button>
       </chakra.form>

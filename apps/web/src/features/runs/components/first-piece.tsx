@@ -5,7 +5,9 @@ import { TextAreaField } from '../../../components/field';
 import { CrossIcon, TickIcon } from '../../../components/icons';
 import { Panel } from '../../../components/page';
 import { StateMark } from '../../../components/state-mark';
+import { TextLink } from '../../../components/text-link';
 import { formatTime } from '../../../lib/format';
+import { paths } from '../../../lib/paths';
 import { useSession } from '../../../lib/session';
 import { judgeFirstPiece, type Run } from '../runs.api';
 import { useAct } from '../use-act';
@@ -42,7 +44,10 @@ export function FirstPiece({ run, onChange }: { run: Run; onChange: (run: Run) =
       )}
       {mayJudge && firstPiece?.ok !== true && (
         <>
-          <p>Mark one piece and hold it beside the mark to match. Good parts count from here on only.</p>
+          <p>
+            Mark one piece and hold it beside <TextLink to={paths.machineWith(run.recipe.id)}>the mark to match</TextLink>. Good parts count
+            from here on only.
+          </p>
           <TextAreaField
             name="first-piece-note"
             label="Note"

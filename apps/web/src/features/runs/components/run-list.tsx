@@ -137,5 +137,12 @@ function Search({ value, onSearch }: { value: string; onSearch: (words: string) 
 }
 
 const SearchInput = chakra('input', {
-  base: { flex: '1', minW: '0', alignSelf: 'stretch', bg: 'transparent', outline: 'none !important' },
+  base: {
+    flex: '1',
+    minW: '0',
+    alignSelf: 'stretch',
+    bg: 'transparent',
+    outline: 'none !important',
+    _placeholder: { color: 'fg.subtle', opacity: '1' },
+  },
 });

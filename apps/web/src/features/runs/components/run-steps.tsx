@@ -1,4 +1,5 @@
 import { chakra, Flex } from '@chakra-ui/react';
+import { fieldId } from '../../../components/field';
 import { CautionIcon } from '../../../components/icons';
 import { Panel } from '../../../components/page';
 import { SettingCard, Tick } from '../../../components/setting-card';
@@ -54,7 +55,7 @@ export function RunCards({ shown, ticks, onTick }: RunStepsProps) {
 export function RunSetUp({ shown: { setUpSteps }, ticks, onTick }: RunStepsProps) {
   if (setUpSteps.length === 0) return null;
   return (
-    <Panel pl="5" pr="4" pt="2.5" aria-label="Set-up">
+    <Panel id={fieldId('ticks')} tabIndex={-1} pl="5" pr="4" pt="2.5" aria-label="Set-up">
       <chakra.h2 mb="1">Set-up</chakra.h2>
       <ol>
         {setUpSteps.map(({ text, caution, mustTick }, index) => (
