@@ -16,40 +16,42 @@ export function Holds({ holds, subjects, mayRelease }: HoldsProps) {
   if (holds.length === 0) return null;
   return (
     <>
-      <chakra.ul role="alert" display="grid" gap="2">
-        {holds.map((hold) => (
-          <chakra.li
-            key={hold.id}
-            display="flex"
-            flexWrap="wrap"
-            alignItems="center"
-            gap="4"
-            p="4"
-            bg="oxide.subtle"
-            border="hairline"
-            borderWidth="2px"
-            borderColor="oxide.solid"
-            borderRadius="md"
-          >
-            <chakra.span color="oxide.fg" lineHeight="none">
-              <StateShape state="withdrawn" size={32} />
-            </chakra.span>
-            <chakra.div flex="1" minW="200px">
-              <chakra.h2 color="oxide.fg">{subjects[hold.subject].name} is on hold. Start no run.</chakra.h2>
-              <p>{hold.reason}</p>
-              <chakra.p fontSize="sm" lineHeight="sm" color="fg.muted">
-                Placed by {hold.placedBy}
-                {hold.placedAt === undefined ? '' : `, ${formatTime(hold.placedAt, shop.timeZone)}`}. A lead can release it.
-              </chakra.p>
-            </chakra.div>
-            {mayRelease && (
-              <Button size="glove" onClick={() => setReleasing(hold)}>
-                Release the hold
-              </Button>
-            )}
-          </chakra.li>
-        ))}
-      </chakra.ul>
+      <chakra.div role="alert">
+        <chakra.ul display="grid" gap="2">
+          {holds.map((hold) => (
+            <chakra.li
+              key={hold.id}
+              display="flex"
+              flexWrap="wrap"
+              alignItems="center"
+              gap="4"
+              p="4"
+              bg="oxide.subtle"
+              border="hairline"
+              borderWidth="2px"
+              borderColor="oxide.solid"
+              borderRadius="md"
+            >
+              <chakra.span color="oxide.fg" lineHeight="none">
+                <StateShape state="withdrawn" size={32} />
+              </chakra.span>
+              <chakra.div flex="1" minW="200px">
+                <chakra.h2 color="oxide.fg">{subjects[hold.subject].name} is on hold. Start no run.</chakra.h2>
+                <p>{hold.reason}</p>
+                <chakra.p fontSize="sm" lineHeight="sm" color="fg.muted">
+                  Placed by {hold.placedBy}
+                  {hold.placedAt === undefined ? '' : `, ${formatTime(hold.placedAt, shop.timeZone)}`}. A lead can release it.
+                </chakra.p>
+              </chakra.div>
+              {mayRelease && (
+                <Button size="glove" onClick={() => setReleasing(hold)}>
+                  Release the hold
+                </Button>
+              )}
+            </chakra.li>
+          ))}
+        </chakra.ul>
+      </chakra.div>
       {releasing !== undefined && <ReleaseHoldDialog hold={releasing} onClose={() => setReleasing(undefined)} />}
     </>
   );
