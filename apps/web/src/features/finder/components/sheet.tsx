@@ -1,5 +1,4 @@
 import { chakra } from '@chakra-ui/react';
-import type { ReactNode } from 'react';
 import { CellCloseUp, EvidencePlate } from '../../../components/plate/evidence-plate';
 import { platePhotoOf } from '../../../components/plate/plate-photo';
 import { besidePanel, settingRows, stepTitle } from '../../../components/setting-rows';
@@ -11,6 +10,7 @@ import { inSentence } from '../sentence';
 import { limitWords } from './cautions';
 import { measurementWords } from './mark-to-match';
 import { SheetCodePicture } from './sheet-code';
+import { Box, Line, Paper, Small, Title } from './sheet-paper';
 
 const MOST_MEASUREMENTS = 3;
 
@@ -252,34 +252,3 @@ function Foot({ answer }: { answer: FinderAnswer }) {
     </chakra.footer>
   );
 }
-
-function Line({ name, children }: { name: string; children: ReactNode }) {
-  return (
-    <chakra.div alignSelf="start">
-      <chakra.p fontWeight="semibold" minHeight="6mm" borderBottom="0.2mm solid #000">
-        {name}
-      </chakra.p>
-      <Small>{children}</Small>
-    </chakra.div>
-  );
-}
-
-/** Paper keeps its own colours and millimetres in both modes. */
-const Paper = chakra('article', {
-  base: {
-    width: '210mm',
-    minHeight: '296mm',
-    p: '12mm 14mm 9mm',
-    display: 'flex',
-    flexDirection: 'column',
-    bg: '#ffffff',
-    color: '#000000',
-    fontSize: '12pt',
-    lineHeight: '15pt',
-    border: 'hairline',
-    '@media print': { border: 'none' },
-  },
-});
-const Title = chakra('h2', { base: { fontSize: '12pt', lineHeight: '16pt', borderBottom: '0.4mm solid #000', mb: '0.5mm' } });
-const Small = chakra('span', { base: { display: 'block', fontSize: '9pt', lineHeight: '11.5pt', color: '#333333' } });
-const Box = chakra('span', { base: { display: 'block', boxSize: '5mm', border: '0.3mm solid #000' } });
