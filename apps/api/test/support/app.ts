@@ -20,7 +20,12 @@ const TEST_PASSWORD_COST = '4';
 
 /** The whole api on a database of its own. Call once per test file, close it in afterAll. */
 export async function createTestApp(
-  options: { readonly env?: Readonly<Record<string, string>>; readonly imports?: ModuleMetadata['imports'] } = {},
+  options: {
+    readonly env?: Readonly<Record<string, string>>;
+    readonly imports?: ModuleMetadata['imports'];
+    /** Hears of every route as it is registered. */
+    readonly onRoute?: (route: { readonly method: string | string[]; readonly url: string }) => void;
+  } = {},
 ): Promise<TestApp> {
   const database = await cloneDatabase();
   const env = readEnv({
@@ -33,6 +38,12 @@ export async function createTestApp(
   });
   const testing = await Test.createTestingModule({ imports: [AppModule.register(env), ...(options.imports ?? [])] }).compile();
   const app = testing.createNestApplication<NestFastifyApplication>(createAdapter(env), { logger: false });
+  const { onRoute } = options;
+  if (onRoute !== undefined)
+    app
+      .getHttpAdapter()
+      .getInstance()
+      .addHook('onRoute', ({ method, url }) => onRoute({ method, url }));
   await configureApp(app);
   await app.init();
   await app.getHttpAdapter().getInstance().ready();
