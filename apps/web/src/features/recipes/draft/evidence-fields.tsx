@@ -1,6 +1,6 @@
 import { chakra, Flex } from '@chakra-ui/react';
 import { COUPON_STATE_LABELS } from '@proofplate/recipe-model';
-import { useState } from 'react';
+import { useId, useState } from 'react';
 import { Button } from '../../../components/button';
 import { Dialog } from '../../../components/dialog';
 import { Checkbox } from '../../../components/facets';
@@ -130,10 +130,12 @@ function CellChoice({ title, help, cells, chosen, onChange }: CellChoiceProps) {
 }
 
 function CellOption({ cell, isChosen, onToggle }: { cell: EvidenceCell; isChosen: boolean; onToggle: (isOn: boolean) => void }) {
-  const { cellId, couponCode, address, couponState, meanRating, essentialDifferences, meets } = cell;
+  const { couponCode, address, couponState, meanRating, essentialDifferences, meets } = cell;
+  // The same cell may stand in both lists, so its own id would not tell the boxes apart.
+  const boxId = useId();
   return (
     <chakra.label
-      htmlFor={`cite-${cellId}`}
+      htmlFor={boxId}
       display="grid"
       gridTemplateColumns="26px 52px minmax(0, 1fr)"
       gap="2"
@@ -147,7 +149,7 @@ function CellOption({ cell, isChosen, onToggle }: { cell: EvidenceCell; isChosen
       lineHeight="sm"
       cursor="pointer"
     >
-      <Checkbox id={`cite-${cellId}`} checked={isChosen} onChange={(event) => onToggle(event.currentTarget.checked)} />
+      <Checkbox id={boxId} checked={isChosen} onChange={(event) => onToggle(event.currentTarget.checked)} />
       <CellCloseUp shape={shapeOf(cell)} photo={platePhotoOf(cell.photo, 'small')} address={address} />
       <span>
         <b>
