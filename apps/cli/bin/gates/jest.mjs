@@ -7,6 +7,8 @@ import { join } from 'node:path';
 import { CHECKOUT } from '../steps/checkout.mjs';
 
 const WORKERS = 2;
+/** Not a measure of speed: a busy machine must not turn a slow test into a failed one. */
+const TEST_LIMIT_MS = 60_000;
 
 /** @returns {Promise<{ passed: number, failed: number, problem?: string }>} */
 export async function runJest() {
@@ -14,7 +16,7 @@ export async function runJest() {
   const report = join(folder, 'report.json');
   try {
     const jest = join(CHECKOUT, 'node_modules/jest/bin/jest.js');
-    const args = [jest, '--ci', '--json', `--outputFile=${report}`, `--maxWorkers=${WORKERS}`];
+    const args = [jest, '--ci', '--json', `--outputFile=${report}`, `--maxWorkers=${WORKERS}`, `--testTimeout=${TEST_LIMIT_MS}`];
     const child = spawn(process.execPath, args, { cwd: CHECKOUT, stdio: ['ignore', 'ignore', 'inherit'] });
     const [status] = await once(child, 'exit');
     if (!existsSync(report)) return { passed: 0, failed: 1, problem: `jest ended with ${status} and without a report` };
