@@ -136,7 +136,9 @@ async function importPublishedTable(turn: Turn, cast: Cast): Promise<void> {
 const valuesOf = ({ width, laserpower, speed, pulsefrequency }: PublishedRun) => ({
   ...{ lineSpacingUm: width, powerPercent: laserpower, speedMmPerS: speed, frequencyKhz: pulsefrequency },
 });
-const asPrinted = ({ contrast1, percentage }: PublishedRun) => `As printed: Contrast1 ${contrast1}, percentage ${percentage}`;
+/** The whole row, so that nobody takes the units for the source's. */
+const asPrinted = ({ width, laserpower, speed, pulsefrequency, udiContrast, contrast1, percentage }: PublishedRun) =>
+  `Units are our reading. As printed: Width ${width}, Laserpower ${laserpower}, Speed ${speed}, Pulsefrequency ${pulsefrequency}, UDIcontrast ${udiContrast}, Contrast1 ${contrast1}, percentage ${percentage}.`;
 
 /** The table tells percents of a source that nobody names: there are no watts. */
 function publishedSetting(values: Parameters<typeof enterSetting>[2]['values']): ParameterSet {

@@ -107,13 +107,13 @@ export const PROVED_RECIPES: readonly RecipeSpec[] = [
       },
       {
         ...{ draftedAt: '2026-06-16T13:00:00Z', by: 'operator', reason: 'Faster by a tenth for the summer orders.' },
-        setting: { coupon: 'black', changed: { speedMmPerS: 490 } },
+        setting: { coupon: 'black', changed: { speedMmPerS: 740 } },
         proof: { runAt: '2026-06-17T13:00:00Z', pieces: 5, lot: '6061-B19' },
         ...{ submittedAt: '2026-06-18T10:00:00Z', ending: approved('2026-06-18T14:00:00Z') },
       },
       {
-        ...{ draftedAt: '2026-09-08T13:00:00Z', by: 'operator', reason: 'Back to the slower speed: lot 6061-B20 stayed grey.' },
-        setting: { coupon: 'black', changed: { speedMmPerS: 440 } },
+        ...{ draftedAt: '2026-09-08T13:00:00Z', by: 'operator', reason: 'Slower than before: lot 6061-B20 stayed grey.' },
+        setting: { coupon: 'black', changed: { speedMmPerS: 640 } },
         proof: { runAt: '2026-09-09T13:00:00Z', pieces: 5, lot: '6061-B20' },
         ...{ submittedAt: '2026-09-10T10:00:00Z', ending: approved('2026-09-10T14:12:00Z', 'White enough on both lots.') },
       },

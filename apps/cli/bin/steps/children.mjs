@@ -6,7 +6,7 @@ import { CHECKOUT } from './checkout.mjs';
 
 const STOP_LIMIT_MS = 15_000;
 /** The S3 client announces the end of its support for Node 20 at every start; docs/dependencies.md says it once. */
-const QUIET = { AWS_SDK_JS_NODE_VERSION_SUPPORT_WARNING_DISABLED: 'true' };
+export const QUIET = { AWS_SDK_JS_NODE_VERSION_SUPPORT_WARNING_DISABLED: 'true' };
 
 export class Children {
   constructor(folder) {

@@ -4,6 +4,7 @@ import { existsSync, readFileSync, writeFileSync } from 'node:fs';
 import { createRequire } from 'node:module';
 import { join } from 'node:path';
 import { CHECKOUT } from './checkout.mjs';
+import { QUIET } from './children.mjs';
 
 const DATABASE = 'proofplate';
 const SEED_PROGRAM = join(CHECKOUT, 'db/dist/seed/main.js');
@@ -37,7 +38,7 @@ export async function seedOnce({ folder, superuserUrl, env, say }) {
     say('Putting in the demo shop …');
     const result = spawnSync(process.execPath, [SEED_PROGRAM], {
       cwd: CHECKOUT,
-      env: { ...process.env, ...env },
+      env: { ...QUIET, ...process.env, ...env },
       stdio: ['ignore', 'pipe', 'inherit'],
       encoding: 'utf8',
     });
