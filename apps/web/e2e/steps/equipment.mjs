@@ -45,6 +45,8 @@ async function addPowerTable(page) {
   const dialog = page.getByRole('dialog');
   await dialog.getByLabel('Measured on').fill('2026-11-20');
   await dialog.getByLabel('Meter', { exact: true }).fill('PM-1');
+  await dialog.getByLabel(/^Pulse frequency/).fill('60');
+  await dialog.getByLabel(/^Pulse width/).fill('8');
   await dialog.getByLabel('Percent and watts').fill('10 1.6\n30 5.6\n50 9.7\n70 13.6\n100 19.2');
   await dialog.locator('button[type=submit]').click();
   await dialog.waitFor({ state: 'hidden' });

@@ -43,6 +43,8 @@ export async function watchPage(page) {
   const findings = [];
   page.on('pageerror', (error) => findings.push(`uncaught: ${error.message}`));
   page.on('console', (message) => {
+    // Chromium logs every refusal of the api on its own; the page itself has to tell the person.
+    if (/^Failed to load resource: .* status of 4\d\d/.test(message.text())) return;
     if (message.type() === 'error') findings.push(`console: ${message.text()}`);
   });
   await page.addInitScript(() => {
