@@ -22,7 +22,13 @@ const Choice = chakra('button', {
     outlineOffset: '-3px !important',
     _hover: { bg: 'bg.subtle' },
     _last: { borderRight: '0' },
-    _checked: { bg: 'brand.solid', color: 'brand.contrast', fontWeight: 'semibold', outlineColor: 'brand.contrast !important' },
+    _checked: {
+      bg: 'brand.solid',
+      color: 'brand.contrast',
+      fontWeight: 'semibold',
+      outlineColor: 'brand.contrast !important',
+      _hover: { bg: 'brand.solid' },
+    },
   },
 });
 

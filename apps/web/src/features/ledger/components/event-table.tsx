@@ -99,8 +99,8 @@ function EventRow({ event, isOpen, onToggle }: EventRowProps) {
         columnGap="3"
         bg={{ base: 'bg.panel', sm: 'transparent' }}
         border={{ base: 'hairline', sm: 'none' }}
-        borderTopRadius={{ base: 'md', sm: 'none' }}
-        borderBottomRadius={{ base: isOpen ? 'none' : 'md', sm: 'none' }}
+        borderTopRadius={{ base: 'md', sm: '0' }}
+        borderBottomRadius={{ base: isOpen ? '0' : 'md', sm: '0' }}
         px={{ base: '3', sm: '0' }}
         pb={{ base: '3', sm: '0' }}
       >
@@ -151,7 +151,7 @@ function EventRow({ event, isOpen, onToggle }: EventRowProps) {
             border={{ base: 'hairline', sm: 'none' }}
             borderBottom="hairline"
             borderTop="none"
-            borderBottomRadius={{ base: 'md', sm: 'none' }}
+            borderBottomRadius={{ base: 'md', sm: '0' }}
             px="4"
             py="4"
           >

@@ -5,6 +5,12 @@ import { ACTIONS } from '../action-words';
 import { useLedgerActors } from '../ledger.api';
 import { type FilterName, type LedgerFilters, readCode } from '../ledger-filters';
 
+/** Two choices above three short fields on a tablet, all in one row on a desk. */
+const PLACES = {
+  '& > *': { gridColumn: { base: 'auto', sm: 'span 2', xl: 'span 2' } },
+  '& > :nth-of-type(-n + 2)': { gridColumn: { base: 'auto', sm: 'span 3', xl: 'span 4' } },
+} as const;
+
 const ACTION_OPTIONS = Object.entries(ACTIONS).map(([value, { label }]) => ({ value, label }));
 
 export type LedgerFiltersFormProps = {
@@ -26,8 +32,9 @@ export function LedgerFiltersForm({ idPrefix, filters, onFilter }: LedgerFilters
       role="search"
       aria-label="Search the ledger"
       display="grid"
-      gridTemplateColumns={{ base: 'minmax(0, 1fr)', sm: 'repeat(2, minmax(0, 1fr))', xl: '1.2fr 1.6fr 0.9fr 1fr 1fr' }}
+      gridTemplateColumns={{ base: 'minmax(0, 1fr)', sm: 'repeat(6, minmax(0, 1fr))', xl: 'repeat(14, minmax(0, 1fr))' }}
       gap="3"
+      css={PLACES}
     >
       <SelectField
         name={`${idPrefix}-who`}

@@ -25,11 +25,16 @@ function columns(timeZone: string): readonly Column<UndeliveredLetter>[] {
     {
       key: 'address',
       header: 'To',
+      width: '26%',
       onPhone: 'title',
       cell: ({ address }) => <chakra.span overflowWrap="anywhere">{address}</chakra.span>,
     },
-    { key: 'about', header: 'About', cell: ({ kind }) => letterWords(kind).about },
-    { key: 'written', header: 'Written', cell: ({ writtenAt }) => formatDate(writtenAt, timeZone) },
+    { key: 'about', header: 'About', cell: ({ kind }) => <chakra.span whiteSpace="nowrap">{letterWords(kind).about}</chakra.span> },
+    {
+      key: 'written',
+      header: 'Written',
+      cell: ({ writtenAt }) => <chakra.span whiteSpace="nowrap">{formatDate(writtenAt, timeZone)}</chakra.span>,
+    },
     {
       key: 'reason',
       header: 'Why not',
