@@ -2,7 +2,7 @@ import { randomUUID } from 'node:crypto';
 import type { CouponDto } from '../src/coupons/dto/coupon.dto';
 import type { ParameterSetDto } from '../src/coupons/dto/parameter-set.dto';
 import { createTestApp, type TestApp } from './support/app';
-import { makeCoupon, makePlanningShop, type PlanningShop } from './support/coupons';
+import { makeCoupon, makePlanningShop, type PlanningShop, planBody, typed } from './support/coupons';
 import { asSuperuser } from './support/database';
 import { created } from './support/equipment';
 import { newKey } from './support/idempotency';
@@ -72,6 +72,26 @@ describe('POST /api/coupons/confirmation', () => {
     const coupon = await created<CouponDto>(test, shop.operator, '/api/coupons/confirmation', { revisionId, count: 1, stepNumber: 2 });
     expect(coupon.cells[0]?.parameters.fill).toBe('crossed');
     expect(pointersOf(expectProblem(await post({ revisionId, count: 1, stepNumber: 3 }), 422, 'invalid-fields'))).toEqual(['#/stepNumber']);
+  });
+
+  it('marks its labels as the coupon that the draft rests on, else as the latest on the same plate', async () => {
+    const labelled = (powerPercent: number) => {
+      const { labelStep } = planBody(shop);
+      return { labelStep: { ...labelStep, values: { ...labelStep.values, powerPercent: typed(powerPercent, 'percentFromZero') } } };
+    };
+    const basis = await makeCoupon(test, shop, labelled(31));
+    await makeCoupon(test, shop, labelled(32));
+    await makeCoupon(test, shop, { labelStep: undefined });
+    const revisionId = await makeDraft({ steps: [{ purpose: 'anneal', parameters, pauseAfterS: 0 }] });
+    const proof = () => created<CouponDto>(test, shop.operator, '/api/coupons/confirmation', { revisionId, count: 1 });
+    const labelPowerOf = ({ grids: [grid] }: CouponDto) => grid?.labelStep?.values.powerPercent?.entered.value;
+    expect(labelPowerOf(await proof())).toBe(32);
+    await asSuperuser(
+      test,
+      (sql) => sql`insert into revision_evidence (shop_id, revision_id, coupon_id, cell_id, kind, created_by)
+        values (${shop.shop.id}, ${revisionId}, ${basis.id}, ${basis.cells[0]?.id ?? ''}, 'basis', ${shop.operator.id})`,
+    );
+    expect(labelPowerOf(await proof())).toBe(31);
   });
 
   it('refuses a draft without a step and a revision that is past proving', async () => {

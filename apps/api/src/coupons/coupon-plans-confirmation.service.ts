@@ -36,6 +36,7 @@ export class CouponConfirmationService {
       const ground = await this.grounds.read(tx, actor.shopId, keys);
       const labels = dto.labelStep === undefined ? undefined : enterSetting(ground.machine, dto.labelStep, { pointer: '#/labelStep' });
       if (labels !== undefined && labels.problems.length > 0) throw invalidPlan(labels.problems);
+      const labelStep = labels?.result ?? (await this.plans.labelStepFor(tx, actor.shopId, revision));
       const { rows, columns } = blockOf(dto.count);
       return this.store.add(tx, actor, {
         coupon: {
@@ -52,7 +53,7 @@ export class CouponConfirmationService {
           acknowledgedCautionIds: acknowledged(ground, dto.acknowledgedCautionIds),
         },
         grid: {
-          ...{ rows, columns, rowFactor: null, columnFactor: null, baseSetting: step.parameters, labelStep: labels?.result ?? null },
+          ...{ rows, columns, rowFactor: null, columnFactor: null, baseSetting: step.parameters, labelStep },
           cellMm: dto.cellMm ?? CELL_MM.usual,
           gapMm: dto.gapMm ?? GAP_MM.usual,
           layoutVersion: COUPON_LAYOUT_VERSION,

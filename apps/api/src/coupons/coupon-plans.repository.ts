@@ -1,10 +1,10 @@
 import { Injectable } from '@nestjs/common';
 import { schema, type Tx } from '@proofplate/db';
 import type { ParameterSet, RevisionContent } from '@proofplate/recipe-model';
-import { and, eq, inArray, sql } from 'drizzle-orm';
+import { and, desc, eq, inArray, isNotNull, or, sql } from 'drizzle-orm';
 import type { StoredCell, StoredCoupon, StoredGrid } from './coupons.repository';
 
-const { cell, cellRating, coupon, recipe, revision, testGrid } = schema;
+const { cell, cellRating, coupon, recipe, revision, revisionEvidence, testGrid } = schema;
 
 export type NewCoupon = Pick<StoredCoupon, 'code' | 'title' | 'purpose' | 'materialId' | 'finishId' | 'effectId' | 'machineId'> &
   Pick<StoredCoupon, 'profileId' | 'lensId' | 'calibrationId' | 'lot' | 'thicknessMm' | 'storedAt' | 'notes' | 'acknowledgedCautionIds'> &
@@ -88,6 +88,31 @@ export class CouponPlansRepository {
       .for('share', { of: revision });
     // the recipes module is the only way into this column, so it holds the model's shape
     return row === undefined ? undefined : { ...row, content: row.content as unknown as RevisionContent };
+  }
+
+  /** How labels were marked before: on the coupon that the revision rests on, else on the latest of the same work place and plate. */
+  async labelStepFor(tx: Tx, shopId: string, { id, recipe: keys }: RevisionToConfirm): Promise<ParameterSet | null> {
+    const isBasis = sql`exists (select 1 from ${revisionEvidence} where ${and(
+      eq(revisionEvidence.shopId, shopId),
+      eq(revisionEvidence.revisionId, id),
+      eq(revisionEvidence.couponId, coupon.id),
+      eq(revisionEvidence.kind, 'basis'),
+    )})`;
+    const isSamePlate = and(
+      eq(coupon.machineId, keys.machineId),
+      eq(coupon.lensId, keys.lensId),
+      eq(coupon.materialId, keys.materialId),
+      eq(coupon.finishId, keys.finishId),
+    );
+    const [row] = await tx
+      .select({ labelStep: testGrid.labelStep })
+      .from(coupon)
+      .innerJoin(testGrid, and(eq(testGrid.shopId, coupon.shopId), eq(testGrid.couponId, coupon.id)))
+      .where(and(eq(coupon.shopId, shopId), isNotNull(testGrid.labelStep), or(isBasis, isSamePlate)))
+      .orderBy(desc(isBasis), desc(coupon.createdAt), desc(coupon.id))
+      .limit(1);
+    // only the plans of this module write label steps, so they hold the model's shape
+    return row === undefined ? null : (row.labelStep as ParameterSet | null);
   }
 
   /** Cells on the same material and finish that somebody found overdone. */

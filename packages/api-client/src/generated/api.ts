@@ -4063,7 +4063,7 @@ export interface components {
             cellMm?: number;
             /** @description Gap between cells, mm; absent: 1.2 */
             gapMm?: number;
-            /** @description Setting of corner marks, letters and code */
+            /** @description Setting of corner marks, letters and code; absent: as on the coupon that the draft rests on, else on the latest alike */
             labelStep?: components["schemas"]["TypedSettingDto"];
             /** @description Cautions that the planner has read and taken in */
             acknowledgedCautionIds?: string[];
@@ -6358,7 +6358,7 @@ export interface components {
             unit: string;
             /** @description How; photo: an estimate under that photo’s light */
             method: string;
-            /** @description What was asked of it, in words; null: nothing */
+            /** @description What was asked of it, such as “at least 0.9”; null: nothing */
             criterion: string | null;
         };
         ReferencePhotoDto: {

@@ -60,7 +60,10 @@ export class ConfirmRevisionDto {
   @NumberBetween(GAP_MM.least, GAP_MM.most, { what: 'The gap between cells', unit: 'mm' })
   gapMm?: number;
 
-  @ApiPropertyOptional({ type: TypedSettingDto, description: 'Setting of corner marks, letters and code' })
+  @ApiPropertyOptional({
+    type: TypedSettingDto,
+    description: 'Setting of corner marks, letters and code; absent: as on the coupon that the draft rests on, else on the latest alike',
+  })
   @IsOptional()
   @ValidateNested()
   @Type(() => TypedSettingDto)
