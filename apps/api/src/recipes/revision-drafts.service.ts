@@ -103,12 +103,16 @@ function refuseUnusable(dto: SetEvidenceDto, cells: readonly EvidenceCell[]): vo
       const cell = cells.find(({ cellId }) => cellId === id);
       if (cell === undefined) return [{ pointer, detail: 'This cell is not in the shop. Choose it again.' }];
       if (!cell.isMarked) return [{ pointer, detail: `${cell.coupon.code} ${cell.address} was not marked. Choose another cell.` }];
+      if (list === 'basisCellIds' && cell.coupon.isProof) return [{ pointer, detail: proofAsBasis(cell) }];
       const isTwice = list === 'confirmationCellIds' && dto.basisCellIds.includes(id);
       return isTwice ? [{ pointer, detail: `${cell.coupon.code} ${cell.address} is the basis; a proof is a later mark.` }] : [];
     }),
   );
   if (problems.length > 0) throw new InvalidError('Some cells cannot be cited.', problems);
 }
+
+const proofAsBasis = ({ coupon, address }: EvidenceCell) =>
+  `${coupon.code} ${address} was marked to prove a setting that was there already. Choose a cell of a coupon on which settings were tried out.`;
 
 /** What the ledger keeps of a draft. */
 function told({ content, calibrationId, reason, route, grounds, effectiveFrom, reviewDue, acknowledgedCautionIds }: StoredRevision) {

@@ -159,6 +159,7 @@ function toEvidenceCell(row: CellRow): EvidenceCell {
       criteriaRecordedAt: plate.criteriaRecordedAt,
       firstLookedAt: row.firstLookedAt === null ? null : new Date(row.firstLookedAt),
       unknownFields: plate.unknownFields,
+      isProof: plate.purpose === 'confirmation',
       confirmsRevisionId: plate.confirmsRevisionId,
       profileId: plate.profileId,
       physicalNumber: row.physicalNumber,

@@ -42,15 +42,16 @@ export class RevisionViewsService {
     });
   }
 
-  /** Cells that a draft could cite: the best of the same work, and those with exactly its essential parameters. */
+  /** Cells that a draft could cite: the best of the same work that was tried out, and those with exactly its essential parameters. */
   async candidates(actor: Actor, id: string): Promise<EvidenceCandidatesDto> {
     return this.unitOfWork.read(actor, async (tx) => {
       const { recipe, revision } = await this.records.get(tx, actor.shopId, id);
       const { steps } = revision.content;
       const cells = await this.evidence.candidates(tx, actor.shopId, keyIdsOf(recipe));
+      const triedOut = cells.filter(({ coupon }) => !coupon.isProof);
       const same = cells.filter(({ parameters, coupon }) => essentialDifferences(parameters, steps, coupon.unknownFields).length === 0);
       const toDto = (cell: (typeof cells)[number]) => toEvidenceCellDto(cell, steps, (photo) => this.photos.urlsOf(photo));
-      return { basis: cells.slice(0, MOST_SHOWN).map(toDto), confirmation: same.slice(0, MOST_SHOWN).map(toDto) };
+      return { basis: triedOut.slice(0, MOST_SHOWN).map(toDto), confirmation: same.slice(0, MOST_SHOWN).map(toDto) };
     });
   }
 }

@@ -153,6 +153,8 @@ export type EvidenceCell = {
     /** First rating, measurement or end of the inspection, whichever came first. */
     readonly firstLookedAt: Date | null;
     readonly unknownFields: readonly string[];
+    /** True of a coupon of equal cells: it proves a setting and is never where one comes from. */
+    readonly isProof: boolean;
     readonly confirmsRevisionId: string | null;
     readonly profileId: string;
     readonly physicalNumber: number;

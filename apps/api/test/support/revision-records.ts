@@ -53,6 +53,7 @@ export function cellOf(
       criteriaRecordedAt: day('2026-05-01'),
       firstLookedAt: day('2026-05-02'),
       unknownFields: [],
+      isProof: false,
       confirmsRevisionId: null,
       profileId: 'profile',
       physicalNumber: 1,
