@@ -30,8 +30,8 @@ const PAGES = {
     materials: '/materials',
   },
   lead: {
-    recipe: '/recipes/R-0031',
-    compare: { list: '/recipes/R-0042', link: /^Compare/ },
+    recipe: '/recipes/R-0002',
+    compare: { list: '/recipes/R-0002', link: /^Compare/ },
     'sign-off-queue': '/sign-off',
     'sign-off': { list: '/sign-off', link: /R-\d+/ },
     finishes: '/materials/finishes',
@@ -45,6 +45,9 @@ const PAGES = {
   owner: { people: '/people', 'shop-settings': '/shop-settings', 'no-such-page': '/no-such-page' },
 };
 
+/** All that was found, so that one run tells everything. */
+const faults = [];
+
 await journey(async ({ step, open }) => {
   const stranger = await open('stranger');
   for (const [name, path] of Object.entries(BEFORE_SIGN_IN)) await step(name, () => look(stranger, name, path));
@@ -55,6 +58,7 @@ await journey(async ({ step, open }) => {
     await signIn(person, account);
     for (const [name, place] of Object.entries(pages)) await step(`${name}, as ${role}`, () => look(person, name, place));
   }
+  if (faults.length > 0) throw new Error(`${faults.length} faults:\n${faults.join('\n')}`);
 });
 
 async function look(person, name, place) {
@@ -64,11 +68,11 @@ async function look(person, name, place) {
   for (const colorScheme of COLOUR_SCHEMES) {
     await page.emulateMedia({ colorScheme });
     const violations = await accessibilityViolations(page);
-    if (violations.length > 0) throw new Error(`${name} in ${colorScheme}:\n${violations.join('\n')}`);
+    faults.push(...violations.map((violation) => `${name}, ${colorScheme}: ${violation}`));
   }
   await page.setViewportSize(NARROWEST);
   const tooWide = await page.evaluate(() => document.documentElement.scrollWidth - document.documentElement.clientWidth);
-  if (tooWide > 0) throw new Error(`${name} is ${tooWide} px wider than a screen of ${NARROWEST.width} px`);
+  if (tooWide > 0) faults.push(`${name} is ${tooWide} px wider than a screen of ${NARROWEST.width} px`);
   if (PICTURES !== undefined) await takeScreenshots(page, { name, folder: PICTURES });
   await page.setViewportSize(VIEWPORTS.desk);
 }

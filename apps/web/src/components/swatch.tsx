@@ -20,7 +20,7 @@ export function Swatch({ colour, lab }: SwatchProps) {
         style={{ background: colour }}
       />
       {lab !== undefined && (
-        <chakra.span display="inline-flex" gap="3">
+        <chakra.span display="inline-flex" gap={{ base: '2', sm: '3' }}>
           {[lab.l, lab.a, lab.b].map((value, index) => (
             <span key={'Lab'[index]}>{formatNumber(value, { decimals: 1 })}</span>
           ))}

@@ -36,7 +36,7 @@ export function CompareCards({ comparison, view, onReference, onRemove }: Compar
                   <chakra.div
                     key={cell.revisionId}
                     display="grid"
-                    gridTemplateColumns="92px 76px minmax(0, 1fr)"
+                    gridTemplateColumns="minmax(0, 92px) minmax(0, 76px) minmax(0, 1fr)"
                     gap="2"
                     alignItems="center"
                     minHeight="28px"

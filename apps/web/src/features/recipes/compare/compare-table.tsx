@@ -190,7 +190,7 @@ export function Change({ cell: { share, change } }: { cell: CellView }) {
   return (
     <chakra.span display="flex" alignItems="center" gap="2">
       {share !== undefined && (
-        <chakra.span flex="0 0 84px">
+        <chakra.span flex="0 1 84px" minWidth="32px">
           <ChangeTrack change={share} />
         </chakra.span>
       )}

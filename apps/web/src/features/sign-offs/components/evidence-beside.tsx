@@ -95,7 +95,13 @@ function Side({ title, mark, cell, widestMm, hasRule = false }: SideProps) {
           It rests on no coupon.
         </chakra.p>
       ) : (
-        <chakra.div display="grid" gridTemplateColumns="minmax(0, 200px) minmax(0, 1fr)" gap="3.5" mt="2" alignItems="start">
+        <chakra.div
+          display="grid"
+          gridTemplateColumns={{ base: 'repeat(auto-fit, minmax(130px, 1fr))', sm: 'minmax(0, 200px) minmax(0, 1fr)' }}
+          gap="3.5"
+          mt="2"
+          alignItems="start"
+        >
           <div>
             <EvidencePlate shape={shapeOf(cell)} photo={platePhotoOf(cell.photo, 'large')} chosen={cell.address} widestMm={widestMm} />
             <chakra.p fontSize="sm" lineHeight="sm" pt="1.5">
