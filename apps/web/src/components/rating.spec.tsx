@@ -11,6 +11,12 @@ function RatedCell() {
 const checked = () => screen.queryByRole('radio', { checked: true })?.textContent;
 
 describe('the rating', () => {
+  it('says what the ends of the scale mean', async () => {
+    renderPiece(<RatedCell />);
+    expect(await screen.findByText('no mark')).toBeVisible();
+    expect(screen.getByText('reference')).toBeVisible();
+  });
+
   it('is one tab stop; digits and arrows rate, and arrows go round', async () => {
     const { user } = renderPiece(<RatedCell />);
     await screen.findByRole('radiogroup', { name: 'Rating of B4' });

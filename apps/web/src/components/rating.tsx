@@ -1,4 +1,5 @@
 import { chakra, Flex } from '@chakra-ui/react';
+import { RATING_CAPTIONS } from '@proofplate/recipe-model';
 import type { KeyboardEvent } from 'react';
 import { useRovingRadio } from './roving-radio';
 
@@ -53,8 +54,8 @@ export function Rating({ label, value, onRate, hasCaptions = true }: RatingProps
       </chakra.div>
       {hasCaptions && (
         <Flex justify="space-between" mt="1" fontSize="sm" lineHeight="sm" color="fg.muted" aria-hidden="true">
-          <span>no use</span>
-          <span>fit to sign</span>
+          <span>{RATING_CAPTIONS[0]}</span>
+          <span>{RATING_CAPTIONS[5]}</span>
         </Flex>
       )}
     </div>

@@ -1,4 +1,4 @@
-import { type MeasurementQuantity, QUANTITIES } from '@proofplate/recipe-model';
+import { type MeasurementQuantity, QUANTITIES, RATING_CAPTIONS } from '@proofplate/recipe-model';
 import type { PlateCells, PlateFill } from '../../../components/plate/plate-types';
 import { type ResponseScale, responseScale } from '../../../components/plate/response-scale';
 import { formatNumber } from '../../../lib/format';
@@ -17,7 +17,7 @@ export const PLATE_VIEWS: readonly { value: PlateView; label: string }[] = [
 
 type HeatView = { title: string; lowWord: string; highWord: string; decimals: number };
 const HEAT: Readonly<Record<Exclude<PlateView, 'photo'>, HeatView>> = {
-  rating: { title: 'Mean rating', lowWord: 'no use', highWord: 'fit to sign', decimals: 1 },
+  rating: { title: 'Mean rating', lowWord: RATING_CAPTIONS[0], highWord: RATING_CAPTIONS[5], decimals: 1 },
   lightness: { title: 'L* of the mark', lowWord: 'dark', highWord: 'light', decimals: 0 },
   contrast: { title: QUANTITIES.contrast.label, lowWord: '', highWord: '', decimals: 2 },
   evenness: { title: `${QUANTITIES.evenness.label}, ${QUANTITIES.evenness.unit}`, lowWord: '', highWord: '', decimals: 1 },

@@ -58,7 +58,7 @@ function RatingCaption({ rating, onClear }: { rating: number | null; onClear: ()
   const known = RATINGS.find((each) => each === rating);
   return (
     <Flex justify="space-between" align="center" gap="2" fontSize="sm" lineHeight="sm" color="fg.muted" mt={{ lg: '-2' }} minHeight="28px">
-      <chakra.span display={{ base: 'none', lg: 'inline' }}>no use</chakra.span>
+      <chakra.span display={{ base: 'none', lg: 'inline' }}>{RATING_CAPTIONS[0]}</chakra.span>
       {known !== undefined && (
         <span>
           {known}: {RATING_CAPTIONS[known]}{' '}
@@ -67,7 +67,7 @@ function RatingCaption({ rating, onClear }: { rating: number | null; onClear: ()
           </Button>
         </span>
       )}
-      <chakra.span display={{ base: 'none', lg: 'inline' }}>fit to sign</chakra.span>
+      <chakra.span display={{ base: 'none', lg: 'inline' }}>{RATING_CAPTIONS[5]}</chakra.span>
     </Flex>
   );
 }
