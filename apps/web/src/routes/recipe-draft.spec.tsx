@@ -66,6 +66,31 @@ describe('the draft editor', () => {
     expect(await screen.findByText('Saved')).toBeVisible();
   });
 
+  it('shows the power table that is cited although the tables arrive later, and keeps it', async () => {
+    const tables = ['2026-01-12', '2026-04-02'].map((measuredOn, index) => ({ id: `table-${index + 1}`, measuredOn, meter: 'Thermopile' }));
+    const citing = { ...draft, calibration: tables[0] };
+    let arrive: () => void = () => undefined;
+    const arrived = new Promise<void>((resolve) => {
+      arrive = resolve;
+    });
+    openPage({
+      'GET /api/revisions/draft-1': () => ({ body: citing }),
+      'GET /api/machines/x1/calibrations': async () => {
+        await arrived;
+        return { body: { items: tables, nextCursor: null } };
+      },
+    });
+    const field = await screen.findByLabelText(/Power table/);
+    expect(field).toHaveDisplayValue(/12 Jan 2026, Thermopile/);
+    arrive();
+    await waitFor(() => expect(within(field).getAllByRole('option')).toHaveLength(3));
+    expect(field).toHaveDisplayValue(/12 Jan 2026, Thermopile/);
+    typeInto('Reason for the change', 'darker');
+    await waitFor(() => expect(server.bodies(PATCH)).toEqual([{ reason: 'darker' }]), { timeout: 8000 });
+    fireEvent.change(field, { target: { value: 'table-2' } });
+    await waitFor(() => expect(server.bodies(PATCH).at(-1)).toEqual({ calibrationId: 'table-2' }), { timeout: 8000 });
+  });
+
   it('says at the field what the panel can show instead, and saves the rest', async () => {
     openPage();
     await screen.findByLabelText('Power, %');

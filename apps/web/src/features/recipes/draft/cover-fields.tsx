@@ -1,6 +1,6 @@
 import { chakra } from '@chakra-ui/react';
 import { FEATURE_KIND_LABELS, ROUTE_KIND_LABELS } from '@proofplate/recipe-model';
-import type { UseFormReturn } from 'react-hook-form';
+import { type UseFormReturn, useController } from 'react-hook-form';
 import { NumberField, SelectField, TextAreaField, TextField } from '../../../components/field';
 import { Panel } from '../../../components/page';
 import { formatDate } from '../../../lib/format';
@@ -13,8 +13,7 @@ type Editing = { form: UseFormReturn<DraftValues>; messages: FieldMessages; revi
 
 /** Why the change, how it was come by, from when and until when it holds. */
 export function ReasonFields({ form, messages, revision }: Editing) {
-  const { member, shop } = useSession();
-  const calibrations = useCalibrations(revision.recipe.machine.id).data?.items ?? [];
+  const { member } = useSession();
   const route = form.watch('route');
   const isLead = member.role === 'lead' || member.role === 'owner';
   return (
@@ -46,17 +45,7 @@ export function ReasonFields({ form, messages, revision }: Editing) {
             {...form.register('grounds')}
           />
         )}
-        <SelectField
-          label="Power table"
-          help="The watts at the work come from it."
-          placeholder="none cited"
-          options={calibrations.map(({ id, measuredOn, meter }) => ({
-            value: id,
-            label: `${formatDate(measuredOn, shop.timeZone)}, ${meter}`,
-          }))}
-          error={messages.calibrationId}
-          {...form.register('calibrationId')}
-        />
+        <PowerTableField form={form} messages={messages} revision={revision} />
         <Pair>
           <TextField
             label="Takes effect on"
@@ -77,6 +66,28 @@ export function ReasonFields({ form, messages, revision }: Editing) {
         </Pair>
       </chakra.div>
     </Panel>
+  );
+}
+
+/** Controlled: the tables arrive after the page, and an option that is not there yet cannot be chosen by the form. */
+function PowerTableField({ form, messages, revision }: Editing) {
+  const { shop } = useSession();
+  const tables = useCalibrations(revision.recipe.machine.id).data?.items ?? [];
+  const cited = revision.calibration;
+  const isCitedMissing = cited !== null && !tables.some(({ id }) => id === cited.id);
+  const { field } = useController({ control: form.control, name: 'calibrationId' });
+  return (
+    <SelectField
+      label="Power table"
+      help="The watts at the work come from it."
+      placeholder="none cited"
+      options={[...(isCitedMissing ? [cited] : []), ...tables].map(({ id, measuredOn, meter }) => ({
+        value: id,
+        label: `${formatDate(measuredOn, shop.timeZone)}, ${meter}`,
+      }))}
+      error={messages.calibrationId}
+      {...field}
+    />
   );
 }
 
