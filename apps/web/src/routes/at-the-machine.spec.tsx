@@ -245,6 +245,33 @@ describe('without one answer', () => {
   });
 });
 
+describe('coupons that wait at the machine', () => {
+  const waiting = { id: 'c7', code: 'C-0007', title: 'Blue on titanium', material: { name: 'titanium' }, finish: { name: 'bead-blasted' } };
+  const coupons = { 'GET /api/coupons': () => ({ body: { items: [waiting], nextCursor: null } }) };
+
+  it('are one press away for an operator who has chosen the machine', async () => {
+    openSession(makeSessionAnswer('operator'));
+    openPage(makeFinderResult(), '/machine?machine=bench2', coupons);
+    const list = await screen.findByRole('region', { name: 'Coupons to mark here' });
+    expect(within(list).getByRole('link', { name: 'Mark C-0007' })).toHaveAttribute('href', '/coupons/C-0007/mark');
+    const read = server.requests.find(({ path }) => path === '/api/coupons');
+    expect(Object.fromEntries(read?.query ?? [])).toMatchObject({ state: 'planned', machineId: 'bench2' });
+  });
+
+  it('are not asked for by a trainee, nor before a machine is chosen', async () => {
+    const asTrainee = openPage(makeFinderResult(), '/machine?machine=bench2', coupons);
+    await screen.findByRole('searchbox', { name: /narrow by words/i });
+    expect(server.requests.map(({ path }) => path)).not.toContain('/api/coupons');
+    asTrainee.unmount();
+    server.restore();
+    localStorage.clear();
+    openSession(makeSessionAnswer('operator'));
+    openPage(makeFinderResult(), '/machine', coupons);
+    await screen.findByRole('searchbox', { name: /narrow by words/i });
+    expect(server.requests.map(({ path }) => path)).not.toContain('/api/coupons');
+  });
+});
+
 describe('a lead', () => {
   it('places a hold from where the setting is seen', async () => {
     openSession(makeSessionAnswer('lead'));

@@ -1,10 +1,15 @@
+import { useSearchParams } from 'react-router';
 import { Page } from '../components/page';
+import { WaitingCoupons } from '../features/coupons/mark/waiting-coupons';
 import { Finder } from '../features/finder/components/finder';
 import type { Choice, FinderAnswer } from '../features/finder/finder.api';
 import { Holds, PlaceHoldButton } from '../features/holds/components/holds';
 import { AskForm } from '../features/requests/forms/ask-form';
+import { useSession } from '../lib/session';
 
 export function Component() {
+  const { member } = useSession();
+  const machineId = useSearchParams()[0].get('machine');
   return (
     <Page title="At the machine" isTitleHidden>
       <Finder
@@ -12,6 +17,7 @@ export function Component() {
         leadActs={(answer) => <LeadActs answer={answer} />}
         ask={(choice) => <Ask choice={choice} />}
       />
+      {machineId !== null && member.role !== 'trainee' && <WaitingCoupons machineId={machineId} />}
     </Page>
   );
 }

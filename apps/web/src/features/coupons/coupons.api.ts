@@ -35,6 +35,8 @@ export type CouponFilters = {
 
 export const COUPONS = '/api/coupons';
 const PAGE_SIZE = 25;
+/** At the machine they stand below the finder, so a few are enough. */
+const WAITING_SHOWN = 5;
 const one = (idOrCode: string) => `${COUPONS}/${encodeURIComponent(idOrCode)}`;
 
 /** The list in pages that are added one after the other. */
@@ -61,6 +63,11 @@ export function useCoupons(filters: CouponFilters) {
 
 export function useCouponFacets(filters: CouponFilters | null): SWRResponse<CouponFacets, ProblemError> {
   return useRead<CouponFacets>(filters === null ? null : `${COUPONS}/facets`, filters ?? undefined);
+}
+
+/** The newest coupons that wait to be marked on a machine. */
+export function useWaitingCoupons(machineId: string): SWRResponse<CouponPage, ProblemError> {
+  return useRead<CouponPage>(COUPONS, { state: 'planned', machineId, limit: WAITING_SHOWN }, { keepPreviousData: false });
 }
 
 /** One coupon by its id or by the code on the plate. */
