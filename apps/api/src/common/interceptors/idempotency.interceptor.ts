@@ -1,9 +1,9 @@
-import { createHash } from 'node:crypto';
 import { type CallHandler, type ExecutionContext, Injectable, type NestInterceptor } from '@nestjs/common';
 import type { FastifyReply, FastifyRequest } from 'fastify';
 import { defer, from, lastValueFrom, type Observable } from 'rxjs';
 import { IdempotencyKeyRequiredError } from '../errors/request.errors';
 import { type IdempotencyContext, idempotencyStorage } from '../idempotency/idempotency-context';
+import { requestFingerprint } from '../idempotency/request-fingerprint';
 
 const KEY_FORM = /^[\x21-\x7e]{8,128}$/;
 
@@ -25,11 +25,10 @@ export class IdempotencyInterceptor implements NestInterceptor {
 function contextOf(request: FastifyRequest): IdempotencyContext {
   const key = request.headers['idempotency-key'];
   if (typeof key !== 'string' || !KEY_FORM.test(key)) throw new IdempotencyKeyRequiredError();
-  const fingerprint = `${request.method} ${request.url}\n${JSON.stringify(request.body ?? null)}`;
   return {
     route: `${request.method} ${request.routeOptions.url ?? request.url}`,
     key,
-    requestHash: createHash('sha256').update(fingerprint).digest('hex'),
+    requestHash: requestFingerprint(request),
     claimed: false,
     replayed: false,
   };
