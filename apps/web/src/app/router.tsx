@@ -60,6 +60,7 @@ export const routes = [
               { path: paths.ledger, lazy: () => import('../routes/ledger') },
               { path: paths.shopSettings, lazy: () => import('../routes/shop-settings') },
               { path: paths.recipes, lazy: () => import('../routes/recipes') },
+              { path: paths.newRecipe, lazy: () => import('../routes/recipe-new') },
               { path: '/recipes/:code', lazy: () => import('../routes/recipe') },
               { path: '/recipes/:code/revisions/:revisionId', lazy: () => import('../routes/recipe-draft') },
               { path: '/recipes/:code/compare', lazy: () => import('../routes/compare') },

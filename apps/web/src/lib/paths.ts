@@ -11,6 +11,7 @@ export const paths = {
   coupon: (code: string) => `/coupons/${encodeURIComponent(code)}`,
   markCoupon: (code: string) => `/coupons/${encodeURIComponent(code)}/mark`,
   recipes: '/recipes',
+  newRecipe: '/recipes/new',
   recipe: (code: string) => `/recipes/${encodeURIComponent(code)}`,
   recipeRevision: (recipeId: string, revisionId: string) =>
     `/recipes/${encodeURIComponent(recipeId)}/revisions/${encodeURIComponent(revisionId)}`,

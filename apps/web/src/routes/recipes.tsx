@@ -22,6 +22,7 @@ export function Component() {
       actions={
         <>
           <CsvButton />
+          {mayPlan && <ButtonLink to={paths.newRecipe}>Add a recipe by another route</ButtonLink>}
           {mayPlan && (
             <ButtonLink kind="primary" to={paths.planCoupon} icon={<PlusIcon />}>
               Plan a coupon

@@ -27,6 +27,8 @@ export type Calibration = Schemas['CalibrationDto'];
 export type EnteredStep = Schemas['EnterStepDto'];
 export type SetUpStep = Schemas['SetUpStepDto'];
 export type Coupon = Schemas['CouponDto'];
+export type NewRecipe = Schemas['CreateRecipeDto'];
+export type Named = { id: string; name: string };
 
 const RECIPES = '/api/recipes';
 const REVISIONS = '/api/revisions';
@@ -113,6 +115,13 @@ export function useCalibrations(machineId: string): SWRResponse<{ items: readonl
   return useRead(`/api/machines/${machineId}/calibrations`, { limit: LARGEST_PAGE });
 }
 
+/** A recipe whose first setting does not come from a coupon, as a draft. */
+export async function startRecipe(body: NewRecipe, idempotencyKey: string): Promise<Revision> {
+  const draft = await request<Revision>('post', RECIPES, { body, idempotencyKey });
+  await revalidate(RECIPES);
+  return draft;
+}
+
 export async function startDraft(recipeId: string, basedOnRevisionId: string | undefined, idempotencyKey: string): Promise<Revision> {
   const draft = await request<Revision>('post', `${RECIPES}/${recipeId}/drafts`, { body: { basedOnRevisionId }, idempotencyKey });
   await revalidate(RECIPES);
@@ -151,4 +160,24 @@ export async function planConfirmationCoupon(body: Schemas['ConfirmRevisionDto']
   const coupon = await request<Coupon>('post', `${COUPONS}/confirmation`, { body, idempotencyKey });
   await revalidate(COUPONS, REVISIONS);
   return coupon;
+}
+
+// What a new recipe is for. Machines and materials are domains of their own; a recipe only picks from them.
+
+type Choices<T> = { items: readonly T[] };
+const ALL = { limit: LARGEST_PAGE };
+
+export function useMachineChoices(): SWRResponse<Choices<Schemas['MachineDto']>, ProblemError> {
+  return useRead('/api/machines', ALL);
+}
+
+export function useLensChoices(machineId: string): SWRResponse<Choices<Schemas['MachineLensDto']>, ProblemError> {
+  return useRead(machineId === '' ? null : `/api/machines/${encodeURIComponent(machineId)}/lenses`, undefined, { keepPreviousData: false });
+}
+
+export function useGroundChoices() {
+  const materials = useRead<Choices<Named>>('/api/materials', ALL);
+  const finishes = useRead<Choices<Named>>('/api/finishes', ALL);
+  const effects = useRead<Choices<Named>>('/api/effects', ALL);
+  return { materials: materials.data?.items, finishes: finishes.data?.items, effects: effects.data?.items };
 }

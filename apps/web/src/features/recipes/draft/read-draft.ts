@@ -41,6 +41,12 @@ export function readDraft(values: DraftValues, fields: readonly PanelField[], lo
   return { change, messages: context.messages };
 }
 
+/** Reads mark steps that are not part of a draft yet. */
+export function readSteps(steps: readonly StepValues[], fields: readonly PanelField[], locale: string) {
+  const context: Context = { fields, locale, messages: {} };
+  return { steps: steps.map((step, index) => readStep(step, `steps.${index}`, context)), messages: context.messages };
+}
+
 function readPart<T>({ messages }: Context, read: () => T): T | undefined {
   const before = Object.keys(messages).length;
   const part = read();

@@ -1,6 +1,6 @@
 import { chakra, Flex } from '@chakra-ui/react';
 import { PANEL_UNITS } from '@proofplate/physics';
-import { ASSIST_LABELS, FILL_LABELS, PARAMETERS, STEP_PURPOSE_LABELS } from '@proofplate/recipe-model';
+import { ASSIST_LABELS, FILL_LABELS, STEP_PURPOSE_LABELS } from '@proofplate/recipe-model';
 import { type UseFormReturn, useFieldArray } from 'react-hook-form';
 import { Button } from '../../../components/button';
 import { NumberField, SelectField } from '../../../components/field';
@@ -11,6 +11,7 @@ import { DerivedNumbers } from '../components/derived-numbers';
 import type { Revision } from '../recipes.api';
 import { type DraftValues, emptyStep } from './draft-values';
 import { MoveButtons } from './move-buttons';
+import { fieldHelp, optionsOf } from './panel-field-words';
 import type { FieldMessages } from './read-draft';
 
 const MOST_STEPS = 20;
@@ -127,16 +128,4 @@ function Delays({ form, messages, name }: Pick<Editing, 'form' | 'messages'> & {
       </chakra.div>
     </chakra.details>
   );
-}
-
-function optionsOf<Code extends string>(labels: Readonly<Record<Code, string>>): { value: string; label: string }[] {
-  return Object.entries<string>(labels).map(([value, label]) => ({ value, label }));
-}
-
-/** Limits of the panel; which way plus goes where that could be mistaken. */
-function fieldHelp({ parameter, minimum, maximum, step, unit }: Revision['profile']['panel']['fields'][number]): string | undefined {
-  if (parameter === 'focusOffsetMm') return PARAMETERS.focusOffsetMm.help;
-  const symbol = PANEL_UNITS[unit].symbol;
-  if (minimum === undefined || maximum === undefined) return undefined;
-  return `${minimum} to ${maximum} ${symbol}${step === undefined ? '' : `, in steps of ${step}`}`;
 }
