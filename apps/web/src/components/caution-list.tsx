@@ -12,6 +12,9 @@ export type Caution = {
   source?: ReactNode;
 };
 
+/** Each caution draws the line around itself, so that an unfilled last row stays empty ground. */
+const HAIRLINE_ROUND = { boxShadow: '0 0 0 1px var(--pp-colors-straw-emphasized)' };
+
 /** Cautions stand before the setting, side by side on a wide screen. */
 export function CautionList({ cautions, label = 'Cautions' }: { cautions: readonly Caution[]; label?: string }) {
   if (cautions.length === 0) return null;
@@ -23,13 +26,13 @@ export function CautionList({ cautions, label = 'Cautions' }: { cautions: readon
       gridTemplateColumns={{ base: '1fr', sm: `repeat(${columns}, minmax(0, 1fr))` }}
       gap="1px"
       overflow="hidden"
-      bg="straw.emphasized"
+      bg="straw.subtle"
       border="hairline"
       borderColor="straw.emphasized"
       borderRadius="md"
     >
       {cautions.map(({ key, act, reason, source }) => (
-        <chakra.li key={key} position="relative" bg="straw.subtle" py="2.5" pr="3.5" pl={{ base: '44px', sm: '48px' }}>
+        <chakra.li key={key} position="relative" css={HAIRLINE_ROUND} py="2.5" pr="3.5" pl={{ base: '44px', sm: '48px' }}>
           <Box position="absolute" left="3.5" top="13px" lineHeight="none">
             <CautionIcon />
           </Box>
