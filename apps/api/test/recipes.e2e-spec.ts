@@ -17,6 +17,7 @@ import {
   makeProvedDraft,
   makeRecipeShop,
   makeSubmitted,
+  proveAgain,
   type RecipeShop,
   read,
 } from './support/recipes';
@@ -83,6 +84,13 @@ describe('POST /api/recipes/from-cell', () => {
     expect(draft.evidence.basis).toMatchObject([{ address: 'B1', couponCode: coupon.code, essentialDifferences: [] }]);
     expect(draft.derived[0]?.numbers.find(({ key }) => key === 'arealDose')?.value).toBeCloseTo(cell?.dose.value ?? 0, 12);
     expect(draft.allowedActions).toEqual(['edit', 'discard', 'submit', 'start-confirmation']);
+  });
+
+  it('drafts nothing from a coupon that proves a setting, and does not offer it there', async () => {
+    const proof = await proveAgain(test, shop, await draftFromCell(test, shop, coupon), { count: 1 });
+    expectProblem(await fromCell({ couponId: proof.id, cellId: proof.cells[0]?.id }), 409, 'conflict');
+    expect(proof.allowedActions).toContain('plan-next');
+    expect(proof.allowedActions).not.toContain('draft-recipe');
   });
 
   it('answers a repeat with the same draft and makes no second recipe', async () => {

@@ -22,6 +22,12 @@ export class Env {
   @IsString() @MinLength(1) WORKER_DATABASE_URL = 'postgres://proofplate_worker@127.0.0.1:5432/proofplate';
   /** Connections that one api process may hold. */
   @Type(() => Number) @IsInt() @Min(1) @Max(100) DATABASE_POOL_SIZE = 10;
+  /** Longest single statement of an ordinary use case, ms. */
+  @Type(() => Number) @IsInt() @Min(100) @Max(60_000) DATABASE_STATEMENT_TIMEOUT_MS = 3_000;
+  /** Longest wait for a lock, ms; then the answer is "try again". */
+  @Type(() => Number) @IsInt() @Min(100) @Max(60_000) DATABASE_LOCK_TIMEOUT_MS = 2_000;
+  /** Longest wait for a free connection, ms. */
+  @Type(() => Number) @IsInt() @Min(100) @Max(60_000) DATABASE_ACQUIRE_TIMEOUT_MS = 1_000;
 
   /** Signs access tokens (HS256). */
   @IsString() @MinLength(MIN_SECRET_LENGTH) JWT_SECRET = developmentSecret('jwt');

@@ -21,7 +21,11 @@ const BY_STATE: Readonly<Record<CouponState, readonly CouponActionName[]>> = {
   sealed: ['correct', 'draft-recipe'],
 };
 
-/** What the member may do with a coupon. */
-export function couponActions(actor: Pick<Actor, 'role'>, coupon: { readonly state: CouponState }): CouponActionName[] {
-  return roleAtLeast(actor.role, 'operator') ? [...BY_STATE[coupon.state], ...ALWAYS] : [];
+/** What the member may do with a coupon. A coupon of equal cells proves a setting that is there already, so none is drafted from it. */
+export function couponActions(
+  actor: Pick<Actor, 'role'>,
+  { state, purpose }: { readonly state: CouponState; readonly purpose: string },
+): CouponActionName[] {
+  if (!roleAtLeast(actor.role, 'operator')) return [];
+  return [...BY_STATE[state], ...ALWAYS].filter((action) => action !== 'draft-recipe' || purpose !== 'confirmation');
 }

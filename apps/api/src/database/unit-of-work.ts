@@ -6,6 +6,7 @@ import { IdempotencyKeyReusedError, RequestInFlightError } from '../common/error
 import { isConnectionLoss, sqlStateOf } from '../common/filters/framework-problem';
 import { remainingMs } from '../common/http/deadline';
 import { type IdempotencyContext, idempotencyStorage } from '../common/idempotency/idempotency-context';
+import { Env } from '../config/env.validation';
 import { expectLastActs, runLastActs } from './before-commit';
 import { claimKey, keepAnswer } from './idempotency.repository';
 
@@ -27,13 +28,15 @@ export type RunOptions = {
   readonly statementTimeoutMs?: number;
 };
 
-const DEFAULT_STATEMENT_TIMEOUT_MS = 3_000;
 const LOCK_NOT_AVAILABLE = '55P03';
 
 /** Opens transactions. One use case, one transaction, bound to one shop by row-level security. */
 @Injectable()
 export class UnitOfWork {
-  constructor(@Inject(DATABASE) private readonly handle: DbHandle) {}
+  constructor(
+    @Inject(DATABASE) private readonly handle: DbHandle,
+    private readonly env: Env,
+  ) {}
 
   /** Runs the use case in one transaction of the actor's shop; its last acts and the kept answer of an idempotent call belong to it. */
   async run<T>(actor: Tenant, work: (tx: Tx) => Promise<T>, options: RunOptions = {}): Promise<T> {
@@ -70,7 +73,7 @@ export class UnitOfWork {
   private attempt<T>(actor: Tenant, work: (tx: Tx) => Promise<T>, options: RunOptions): Promise<T> {
     return this.handle.db.transaction(
       async (tx) => {
-        await bind(tx, actor, options.statementTimeoutMs ?? DEFAULT_STATEMENT_TIMEOUT_MS);
+        await bind(tx, actor, options.statementTimeoutMs ?? this.env.DATABASE_STATEMENT_TIMEOUT_MS);
         expectLastActs(tx);
         const result = await work(tx);
         await runLastActs(tx);

@@ -1,6 +1,6 @@
 import { Injectable } from '@nestjs/common';
 import type { Actor } from '../common/actor';
-import { type FieldProblem, InvalidError, NotFoundError } from '../common/errors/domain-error';
+import { ConflictError, type FieldProblem, InvalidError, NotFoundError } from '../common/errors/domain-error';
 import { type Tx, UnitOfWork } from '../database/unit-of-work';
 import { asMeasured } from './calibration-checks';
 import { DraftEntryService } from './draft-entry.service';
@@ -105,7 +105,8 @@ export class RecipeDraftingService {
     const [cell] = await this.repositories.evidence.cells(tx, shopId, [cellId]);
     if (cell === undefined || cell.coupon.id !== couponId)
       throw new NotFoundError('This cell is not on a coupon of the shop. Go back to Coupons.');
-    const { code, state } = cell.coupon;
+    const { code, state, isProof } = cell.coupon;
+    if (isProof) throw new ConflictError(`${code} proves a setting that is there already. Propose a change of its recipe instead.`);
     if (state === 'planned') throw new CouponNotMarkedError(`${code} is not marked yet. Mark it first.`);
     if (!cell.isMarked) throw new CouponNotMarkedError(`${cell.address} of ${code} was skipped. Choose a cell that was marked.`);
     return cell;

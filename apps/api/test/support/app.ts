@@ -16,6 +16,8 @@ export type TestApp = {
 };
 
 /** bcrypt's lowest cost: tests are about behaviour, not about how long guessing takes. */
+/** A busy machine must not turn a slow statement into another answer; the deadlines themselves have tests of their own. */
+const PATIENT = { DATABASE_STATEMENT_TIMEOUT_MS: '30000', DATABASE_LOCK_TIMEOUT_MS: '20000', DATABASE_ACQUIRE_TIMEOUT_MS: '20000' };
 const TEST_PASSWORD_COST = '4';
 
 /** The whole api on a database of its own. Call once per test file, close it in afterAll. */
@@ -32,6 +34,7 @@ export async function createTestApp(
     NODE_ENV: 'test',
     LOG_LEVEL: 'silent',
     PASSWORD_COST: TEST_PASSWORD_COST,
+    ...PATIENT,
     DATABASE_URL: database.app,
     WORKER_DATABASE_URL: database.worker,
     ...options.env,
