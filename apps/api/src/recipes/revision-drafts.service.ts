@@ -67,6 +67,9 @@ export class RevisionDraftsService {
   }
 
   private async lockDraft(tx: Tx, actor: Actor, id: string, { version }: { version: number }): Promise<StoredRevision> {
+    const found = await this.repositories.revisions.find(tx, actor.shopId, id);
+    // recipe before revision, in the order of signing: an edit and a submission at the same moment must not wait for each other
+    if (found !== undefined) await this.repositories.recipes.lock(tx, actor.shopId, found.recipeId);
     const draft = await this.repositories.revisions.lock(tx, actor.shopId, id);
     if (draft === undefined) throw new RevisionNotFoundError();
     if (!isEditable(draft.state)) {
