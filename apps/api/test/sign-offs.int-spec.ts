@@ -1,12 +1,13 @@
 import { randomUUID } from 'node:crypto';
 import { schema } from '@proofplate/db';
 import { and, eq } from 'drizzle-orm';
+import type { FinderDto } from '../src/finder/dto/finder.dto';
 import type { LedgerVerificationDto } from '../src/ledger/dto/ledger-event.dto';
 import type { RecipeDto } from '../src/recipes/dto/recipe.dto';
 import type { RecipeRevisionDto } from '../src/recipes/dto/recipe-revision.dto';
-import { RecipeRevisionsService } from '../src/recipes/recipe-revisions.service';
-import { NoApprovedRevisionError } from '../src/recipes/recipes.errors';
 import { ScheduledRevisionsService } from '../src/recipes/scheduled-revisions.service';
+import type { RunDto } from '../src/runs/dto/run.dto';
+import type { StartSheetDto } from '../src/runs/dto/start-sheet.dto';
 import { createTestApp, type TestApp } from './support/app';
 import { asSuperuser } from './support/database';
 import { created } from './support/equipment';
@@ -105,14 +106,16 @@ describe('two leads at once', () => {
   });
 
   it('submit and edit one draft: whoever comes second is told so', async () => {
-    const draft = await makeProvedDraft(test, shop);
-    const edit = { method: 'PATCH', url: `/revisions/${draft.id}`, version: draft.version, payload: { reason: 'Other words.' } } as const;
-    const [submitted, edited] = await Promise.all([acts(test, draft.id).submit(shop.operator, draft), call(test, shop.lead, edit)]);
-    const statuses = [submitted.statusCode, edited.statusCode];
-    expect([
-      [200, 409],
-      [412, 200],
-    ]).toContainEqual(statuses);
+    for (let race = 0; race < RACES; race += 1) {
+      const draft = await makeProvedDraft(test, shop);
+      const payload = { reason: 'Other words.', scope: FOR_CUSTOMER(randomUUID()) };
+      const edit = { method: 'PATCH', url: `/revisions/${draft.id}`, version: draft.version, payload } as const;
+      const [submitted, edited] = await Promise.all([acts(test, draft.id).submit(shop.operator, draft), call(test, shop.lead, edit)]);
+      expect([
+        [200, 409],
+        [412, 200],
+      ]).toContainEqual([submitted.statusCode, edited.statusCode]);
+    }
   });
 });
 
@@ -259,16 +262,45 @@ describe('a revision with a day of its own', () => {
   });
 });
 
-describe('getApprovedForRun()', () => {
-  const approvedOf = (recipeId: string) =>
-    test.unitOfWork.run({ shopId: shop.shop.id }, (tx) =>
-      test.app.get(RecipeRevisionsService, { strict: false }).getApprovedForRun(tx, shop.shop.id, recipeId),
-    );
+describe('a run at the machine', () => {
+  const startRun = ({ id: revisionId, recipe }: RecipeRevisionDto) =>
+    call(test, shop.trainee, {
+      method: 'POST',
+      url: '/runs',
+      payload: { clientId: randomUUID(), kind: 'production', revisionId, lensFittedId: recipe.lens.id, ticks: ['set-up.0'] },
+    });
 
-  it('gives the one revision that may be marked with, and none once it was withdrawn', async () => {
-    const approved = await makeApproved(test, shop);
-    expect(await approvedOf(approved.recipe.id)).toMatchObject({ id: approved.id, state: 'approved', contentHash: approved.contentHash });
-    await acts(test, approved.id).withdraw(shop.lead);
-    await expect(approvedOf(approved.recipe.id)).rejects.toBeInstanceOf(NoApprovedRevisionError);
+  it('never starts after a withdrawal, however close the two are', async () => {
+    for (let race = 0; race < RACES; race += 1) {
+      const approved = await makeApproved(test, shop);
+      const [start, withdrawal] = await Promise.all([startRun(approved), acts(test, approved.id).withdraw(shop.lead)]);
+      expect(withdrawal.statusCode).toBe(200);
+      const events = await rows(
+        (sql) => sql<{ action: string }[]>`select action from ledger_event where action in ('run.started', 'revision.withdrawn')
+          and (subject_id = ${approved.id} or after ->> 'revisionId' = ${approved.id}) order by seq`,
+      );
+      const told = events.map(({ action }) => action);
+      if (start.statusCode === 201) expect(told).toEqual(['run.started', 'revision.withdrawn']);
+      else {
+        expectProblem(start, 409, 'not-approved');
+        expect(told).toEqual(['revision.withdrawn']);
+      }
+      expectProblem(await startRun(approved), 409, 'not-approved');
+    }
+  });
+
+  it('starts with the revision whose day has come and refuses the one before it, even before the worker came to it', async () => {
+    const first = await makeApproved(test, shop);
+    const change = await submitChange(first.recipe.id, shop.operator, { effectiveFrom: '2999-01-01T00:00:00Z' });
+    await acts(test, change.id).approve(shop.lead, change);
+    expectProblem(await startRun(change), 409, 'not-approved');
+    await letTheDayCome(change.id);
+    const found = await read<FinderDto>(test, shop.trainee, `/finder?recipeId=${first.recipe.id}`);
+    expect(found.answer).toMatchObject({ revisionId: change.id });
+    expect((await read<StartSheetDto>(test, shop.trainee, `/runs/start-sheet/${change.id}`)).kinds).toContain('production');
+    expect((await read<StartSheetDto>(test, shop.trainee, `/runs/start-sheet/${first.id}`)).kinds).toEqual([]);
+    expectProblem(await startRun(first), 409, 'not-approved');
+    expect((await startRun(change)).json<RunDto>()).toMatchObject({ revision: { number: 2, state: 'approved' } });
+    expect((await read<RecipeRevisionDto>(test, shop.lead, `/revisions/${first.id}`)).state).toBe('superseded');
   });
 });

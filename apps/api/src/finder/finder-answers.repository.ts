@@ -77,7 +77,7 @@ export class FinderAnswersRepository {
       join machine m on m.shop_id = r.shop_id and m.id = r.machine_id
       join machine_profile p on p.shop_id = v.shop_id and p.id = v.profile_id
       join machine_profile present on present.shop_id = m.shop_id and present.machine_id = m.id and present.number = m.profile_number
-      where v.shop_id = ${shopId} and v.state = 'approved' and v.id in (${ids})`);
+      where v.shop_id = ${shopId} and (v.state = 'approved' or (v.state = 'scheduled' and v.effective_from <= now())) and v.id in (${ids})`);
     return [...rows];
   }
 }

@@ -3,7 +3,7 @@ import type { Actor } from '../common/actor';
 import type { Tx } from '../database/unit-of-work';
 import type { RecipeRevisionDto } from './dto/recipe-revision.dto';
 import { RecipeRevisionsRepository } from './recipe-revisions.repository';
-import { NoApprovedRevisionError, RecipeNotFoundError, RevisionNotFoundError } from './recipes.errors';
+import { RecipeNotFoundError, RevisionNotFoundError } from './recipes.errors';
 import { RecipesRepository } from './recipes.repository';
 import { keyIdsOf, type QueuedRevision, RevisionRecordsService } from './revision-records.service';
 import { ScheduledRevisionsService } from './scheduled-revisions.service';
@@ -46,7 +46,7 @@ export class RecipeRevisionsService {
     const recipe = await this.recipes.find(tx, shopId, recipeId);
     if (recipe === undefined) throw new RecipeNotFoundError();
     await this.recipes.lockMates(tx, shopId, recipe);
-    const ladder = await this.scheduled.takeDue(tx, shopId, await this.revisions.lockLadder(tx, shopId, recipeId));
+    const ladder = await this.scheduled.lockSettled(tx, shopId, recipeId);
     const revision = ladder.find((rung) => rung.id === id);
     if (revision === undefined) throw new RevisionNotFoundError();
     return { revision, ladder };
@@ -89,16 +89,11 @@ export class RecipeRevisionsService {
   }
 
   /**
-   * The one revision that may be marked with now, locked against being superseded or withdrawn until the transaction ends.
-   *
-   * @throws RecipeNotFoundError also for another shop's recipe; NoApprovedRevisionError 409
+   * Keeps the revisions of a recipe from being superseded or withdrawn until the transaction ends, with the one current that may be
+   * marked with now.
    */
-  async getApprovedForRun(tx: Tx, shopId: string, recipeId: string): Promise<StoredRevision> {
-    if ((await this.recipes.find(tx, shopId, recipeId)) === undefined) throw new RecipeNotFoundError();
-    const ladder = await this.scheduled.takeDue(tx, shopId, await this.revisions.lockLadder(tx, shopId, recipeId));
-    const current = ladder.find(({ state }) => state === 'approved');
-    if (current === undefined) throw new NoApprovedRevisionError();
-    return current;
+  async lockForRun(tx: Tx, shopId: string, recipeId: string): Promise<void> {
+    await this.scheduled.lockSettled(tx, shopId, recipeId);
   }
 
   /** A revision row. @throws RevisionNotFoundError also for another shop's revision */

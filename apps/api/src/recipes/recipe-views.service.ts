@@ -87,7 +87,7 @@ export class RecipeViewsService {
   }
 
   async takeDue(tx: Tx, shopId: string, id: string): Promise<void> {
-    await this.scheduled.takeDue(tx, shopId, await this.repositories.revisions.lockLadder(tx, shopId, id));
+    await this.scheduled.lockSettled(tx, shopId, id);
   }
 }
 

@@ -84,13 +84,3 @@ export class OtherKeysError extends InvalidError {
     ]);
   }
 }
-
-/** Nothing may be marked with this recipe now. */
-export class NoApprovedRevisionError extends ConflictError {
-  override readonly code = 'no-approved-setting';
-  override readonly title = 'The recipe has no approved setting now';
-
-  constructor() {
-    super('Do not mark with it. Ask a lead, or look for another recipe at the machine.');
-  }
-}

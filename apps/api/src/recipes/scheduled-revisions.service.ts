@@ -35,19 +35,24 @@ export class ScheduledRevisionsService {
     await this.unitOfWork.run({ shopId }, async (tx) => {
       const revision = await this.revisions.find(tx, shopId, revisionId);
       if (revision === undefined) return;
-      const ladder = await this.revisions.lockLadder(tx, shopId, revision.recipeId);
-      const after = await this.takeDue(tx, shopId, ladder);
+      const after = await this.lockSettled(tx, shopId, revision.recipeId);
       const waiting = after.find(({ id }) => id === revisionId);
       if (waiting?.state === 'scheduled' && waiting.effectiveFrom !== null) await this.plan(tx, revisionId, waiting.effectiveFrom);
     });
   }
 
   /**
-   * Makes the scheduled revision of a locked ladder current if its day has come, and supersedes the one before it.
+   * Locks a recipe and then all its revisions, as signing does; a scheduled revision whose day has come is made current and supersedes
+   * the one before it.
    *
    * @returns the ladder as it stands then
    */
-  async takeDue(tx: Tx, shopId: string, ladder: LockedRevision[]): Promise<LockedRevision[]> {
+  async lockSettled(tx: Tx, shopId: string, recipeId: string): Promise<LockedRevision[]> {
+    await this.recipes.lock(tx, shopId, recipeId);
+    return this.takeDue(tx, shopId, await this.revisions.lockLadder(tx, shopId, recipeId));
+  }
+
+  private async takeDue(tx: Tx, shopId: string, ladder: LockedRevision[]): Promise<LockedRevision[]> {
     const due = ladder.find(({ state, takesEffectLater }) => state === 'scheduled' && !takesEffectLater);
     if (due === undefined) return ladder;
     const current = ladder.find(({ state }) => state === 'approved');

@@ -24,6 +24,13 @@ export type CitedRevision = {
   panel: Panel;
 };
 
+/** A scheduled revision whose day has come is the approved one, even before the worker came to it. */
+const stateByTheClock = sql<RevisionState>`case
+  when ${revision.state} = 'scheduled' and ${revision.effectiveFrom} <= now() then 'approved'
+  when ${revision.state} = 'approved' and exists (select 1 from revision due where due.shop_id = ${revision.shopId}
+    and due.recipe_id = ${revision.recipeId} and due.state = 'scheduled' and due.effective_from <= now()) then 'superseded'
+  else ${revision.state} end`;
+
 @Injectable()
 export class CitedRevisionsRepository {
   /** Keeps recipe, machine and revision as they are until the transaction ends, so that no hold or withdrawal slips in between. */
@@ -53,7 +60,7 @@ export class CitedRevisionsRepository {
       .select({
         id: revision.id,
         number: revision.number,
-        state: revision.state,
+        state: stateByTheClock,
         content: revision.content,
         contentHash: revision.contentHash,
         isOverdue: sql<boolean>`coalesce(${revision.reviewDue} < now(), false)`,
@@ -82,7 +89,6 @@ export class CitedRevisionsRepository {
       ...rest,
       overdueBlocks: policy.overdueBlocks,
       // constraints and the request classes of recipes and machines are the only ways into these columns
-      state: row.state as RevisionState,
       content: row.content as unknown as RevisionContent,
       machine: { ...row.machine, sourceKind: row.machine.sourceKind as SourceKind },
       panel: row.panel as unknown as Panel,

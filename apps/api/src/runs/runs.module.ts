@@ -3,7 +3,9 @@ import { LedgerModule } from '../ledger/ledger.module';
 import { MailModule } from '../mail/mail.module';
 import { MaterialsModule } from '../materials/materials.module';
 import { MembersModule } from '../members/members.module';
+import { RecipesModule } from '../recipes/recipes.module';
 import { CitedRevisionsRepository } from './cited-revisions.repository';
+import { CitedRevisionsService } from './cited-revisions.service';
 import { DeviationsController } from './deviations.controller';
 import { DeviationsRepository } from './deviations.repository';
 import { DeviationsService } from './deviations.service';
@@ -22,7 +24,7 @@ import { SettingRequestsService } from './setting-requests.service';
 
 /** Runs with their first piece and counts, holds, deviations, and requests for settings. */
 @Module({
-  imports: [LedgerModule, MailModule, MaterialsModule, MembersModule],
+  imports: [LedgerModule, MailModule, MaterialsModule, MembersModule, RecipesModule],
   controllers: [RunsController, HoldsController, SettingRequestsController, DeviationsController],
   providers: [
     RunsService,
@@ -30,6 +32,7 @@ import { SettingRequestsService } from './setting-requests.service';
     RunListService,
     RunProgressService,
     RunsRepository,
+    CitedRevisionsService,
     CitedRevisionsRepository,
     HoldsService,
     HoldsRepository,

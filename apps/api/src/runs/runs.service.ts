@@ -1,10 +1,11 @@
 import { Injectable } from '@nestjs/common';
 import { RUN_KINDS } from '@proofplate/recipe-model';
 import type { Actor } from '../common/actor';
-import { ForbiddenError, NotFoundError } from '../common/errors/domain-error';
+import { ForbiddenError } from '../common/errors/domain-error';
 import { type Tx, UnitOfWork } from '../database/unit-of-work';
 import { CautionsService } from '../materials/cautions.service';
-import { type CitedRevision, CitedRevisionsRepository } from './cited-revisions.repository';
+import type { CitedRevision } from './cited-revisions.repository';
+import { CitedRevisionsService } from './cited-revisions.service';
 import { DeviationsService } from './deviations.service';
 import type { RunDto } from './dto/run.dto';
 import type { StartRunDto } from './dto/start-run.dto';
@@ -22,7 +23,7 @@ export class RunsService {
   constructor(
     private readonly unitOfWork: UnitOfWork,
     private readonly runs: RunsRepository,
-    private readonly cited: CitedRevisionsRepository,
+    private readonly cited: CitedRevisionsService,
     private readonly deviations: DeviationsService,
     private readonly cautions: CautionsService,
     private readonly acts: RunActs,
@@ -31,7 +32,7 @@ export class RunsService {
   /** What has to be known and done before a run of the revision starts. Trainees see approved ones only. */
   async startSheet(actor: Actor, revisionId: string): Promise<StartSheetDto> {
     return this.unitOfWork.read(actor, async (tx) => {
-      const revision = await this.readable(tx, actor, revisionId);
+      const revision = await this.cited.get(tx, actor, revisionId);
       const holds = await this.runs.openHolds(tx, actor.shopId, { recipeId: revision.recipe.id, machineId: revision.machine.id });
       const { id, number, state, content, recipe, machine, lens, material, finish, effect, panel } = revision;
       return {
@@ -55,9 +56,7 @@ export class RunsService {
     return this.unitOfWork.run(actor, async (tx) => {
       const earlier = await this.runs.findByClientId(tx, actor.shopId, dto.clientId);
       if (earlier !== undefined) return this.sameRun(tx, actor, dto, earlier.run.id);
-      await this.readable(tx, actor, dto.revisionId);
-      const revision = await this.cited.lock(tx, actor.shopId, dto.revisionId);
-      if (revision === undefined) throw new NotFoundError();
+      const revision = await this.cited.lock(tx, actor, dto);
       await this.refuseUnfit(tx, actor, dto, revision);
       const id = await this.acts.insertStarted(tx, actor, dto, revision);
       return id === undefined ? this.sameRun(tx, actor, dto) : this.acts.toDto(tx, actor, id);
@@ -85,16 +84,6 @@ export class RunsService {
     const problems = [...lensProblem, ...tickProblems(content, dto.ticks, { isStart: true })];
     if (problems.length > 0) throw new NotReadyToStartError(problems);
     if (dto.deviationId !== undefined) await this.deviations.assertLive(tx, actor.shopId, { id: dto.deviationId, revisionId: revision.id });
-  }
-
-  /** @throws NotFoundError for another shop's revision, and for a trainee one that is not approved */
-  private async readable(tx: Tx, actor: Actor, revisionId: string): Promise<CitedRevision> {
-    const revision = await this.cited.find(tx, actor.shopId, revisionId);
-    const isHidden =
-      actor.role === 'trainee' && (revision?.state === 'draft' || revision?.state === 'in_review' || revision?.state === 'returned');
-    if (revision === undefined || isHidden)
-      throw new NotFoundError('This revision is not in the shop. Choose the setting at the machine again.');
-    return revision;
   }
 
   private async sameRun(tx: Tx, actor: Actor, dto: StartRunDto, id?: string): Promise<RunDto> {

@@ -83,9 +83,18 @@ export async function makeRecipe(test: TestApp, lead: TestMember, given: RecipeG
       .values({ shopId, createdBy: memberId, code, title: given.title ?? code, ...keys, materialGroupId: given.materialGroupId ?? null })
       .returning({ id: recipe.id });
     const recipeId = made?.id ?? '';
+    const dated = given.state === 'scheduled' ? { effectiveFrom: new Date('2999-01-01T00:00:00Z') } : {};
     const [drafted] = await tx
       .insert(revision)
-      .values({ shopId, createdBy: memberId, recipeId, content, profileId: ground.machine.profile.id, reviewDue: given.reviewDue ?? null })
+      .values({
+        shopId,
+        createdBy: memberId,
+        recipeId,
+        content,
+        profileId: ground.machine.profile.id,
+        reviewDue: given.reviewDue ?? null,
+        ...dated,
+      })
       .returning({ id: revision.id });
     const revisionId = drafted?.id ?? '';
     if (given.withoutCell !== true) await citeCell(tx, { ...keys, shopId, memberId, revisionId, profileId: ground.machine.profile.id });

@@ -128,11 +128,6 @@ export const PROBLEMS: Readonly<Record<string, ProblemText>> = {
   ),
   'draft-open': problem(409, 'You have an open draft of this recipe', 'Go on with it (its id is in revisionId), or discard it first.'),
   'scope-signed': problem(409, 'The scope is part of what was submitted', 'Propose a change and set the scope in its draft.'),
-  'no-approved-setting': problem(
-    409,
-    'The recipe has no approved setting now',
-    'Do not mark with it. Ask a lead, or look for another recipe at the machine.',
-  ),
   'stale-version': problem(
     412,
     'Somebody changed this in the meantime',
