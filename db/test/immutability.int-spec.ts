@@ -227,7 +227,7 @@ describe('the states of a revision', () => {
   const ARROWS: Arrows = {
     draft: ['in_review'],
     in_review: ['approved', 'scheduled', 'returned'],
-    scheduled: ['approved'],
+    scheduled: ['approved', 'withdrawn'],
     approved: ['superseded', 'withdrawn'],
     returned: [],
     superseded: [],

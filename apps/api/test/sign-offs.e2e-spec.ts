@@ -364,6 +364,22 @@ describe('withdrawing', () => {
       expect((await mailsTo(member)).at(-1)).toEqual({ kind: 'revision-withdrawn' });
   });
 
+  it('stops a revision that is yet to take effect; the present setting stays', async () => {
+    const approved = await makeApproved(test, shop);
+    const copy = await created<RecipeRevisionDto>(test, shop.operator, `/api/recipes/${approved.recipe.id}/drafts`, {});
+    const given = { reason: 'From the new year.', effectiveFrom: '2999-01-01T00:00:00Z' };
+    const draft = await changeDraft(test, shop.operator, copy, given);
+    const submitted = (await acts(test, draft.id).submit(shop.operator, draft)).json<RecipeRevisionDto>();
+    const scheduled = (await acts(test, draft.id).approve(shop.lead, submitted)).json<RecipeRevisionDto>();
+    expect(scheduled).toMatchObject({ state: 'scheduled', allowedActions: ['withdraw', 'copy'] });
+    expect((await acts(test, draft.id).withdraw(shop.lead)).json<RecipeRevisionDto>()).toMatchObject({ state: 'withdrawn' });
+    expect(await read<RecipeDto>(test, shop.operator, `/recipes/${approved.recipe.id}`)).toMatchObject({
+      state: 'approved',
+      current: { id: approved.id },
+      underWay: null,
+    });
+  });
+
   it('refuses a wrong password, a missing reason, anonymous callers, lower roles, other shops and other states', async () => {
     const approved = await makeApproved(test, shop);
     const { withdraw } = acts(test, approved.id);

@@ -25,7 +25,7 @@ const MAILS: Mail[] = [
   { kind: 'revision-submitted', payload: { ...revision, comment: EVIL } },
   { kind: 'revision-approved', payload: revision },
   { kind: 'revision-returned', payload: { ...revision, reason: EVIL } },
-  { kind: 'revision-withdrawn', payload: { ...revision, reason: EVIL } },
+  { kind: 'revision-withdrawn', payload: { ...revision, reason: EVIL, stayingNumber: null } },
   { kind: 'hold-placed', payload: { to, shopName: EVIL, subject: EVIL, reason: EVIL, by: EVIL } },
 ];
 
@@ -46,6 +46,17 @@ describe.each(MAILS.map((mail) => [mail.kind, mail] as const))('the mail %s', (_
     const url = /https:\/\/\S+/.exec(written.text)?.[0] ?? '';
     expect(url).not.toBe('');
     expect(written.html).toContain(`href="${escapeHtml(url)}"`);
+  });
+});
+
+describe('the mail of a withdrawal', () => {
+  const textOf = (stayingNumber: number | null) =>
+    writeMail(composeLetter({ kind: 'revision-withdrawn', payload: { ...revision, reason: 'Brown rims', stayingNumber } }, links)).text;
+
+  it('says what holds afterwards', () => {
+    expect(textOf(null)).toContain('this recipe has no approved setting now');
+    expect(textOf(2)).toContain('revision 2 stays the approved one');
+    expect(textOf(2)).not.toContain('no approved setting');
   });
 });
 

@@ -24,7 +24,8 @@ export type MailPayloads = {
   readonly 'revision-submitted': AboutRevision & { readonly comment?: string };
   readonly 'revision-approved': AboutRevision & { readonly comment?: string };
   readonly 'revision-returned': AboutRevision & { readonly reason: string };
-  readonly 'revision-withdrawn': AboutRevision & { readonly reason: string };
+  /** `stayingNumber`: the approved revision that stays, where a scheduled one was withdrawn. */
+  readonly 'revision-withdrawn': AboutRevision & { readonly reason: string; readonly stayingNumber: number | null };
   readonly 'hold-placed': Addressed & {
     /** What is held, as people call it: "R-0007 Dark mark on 316L" or the machine's name. */
     readonly subject: string;

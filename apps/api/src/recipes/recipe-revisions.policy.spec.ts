@@ -13,7 +13,7 @@ describe('revisionActions()', () => {
     ['in_review', OWN, ['recall', 'copy', 'start-confirmation'], ['recall', 'return', 'copy', 'start-confirmation']],
     ['in_review', OTHERS, ['copy', 'start-confirmation'], ['return', 'approve', 'copy', 'start-confirmation']],
     ['approved', OTHERS, ['copy'], ['withdraw', 'copy']],
-    ['scheduled', OTHERS, ['copy'], ['copy']],
+    ['scheduled', OTHERS, ['copy'], ['withdraw', 'copy']],
     ['returned', OWN, ['copy'], ['copy']],
     ['superseded', OTHERS, ['copy'], ['copy']],
     ['withdrawn', OTHERS, ['copy'], ['copy']],
@@ -39,15 +39,15 @@ describe('mayEditDraft()', () => {
 });
 
 describe('recipeActions()', () => {
-  it('offer withdrawing where something is approved, to leads', () => {
-    const recipe = { ...OTHERS, hasCurrent: true };
+  it('offer withdrawing where something is signed, to leads', () => {
+    const recipe = { ...OTHERS, hasSigned: true };
     expect(ROLES.map((role) => recipeActions(me(role), recipe))).toEqual([
       [],
       ['propose-change'],
       ['propose-change', 'edit', 'withdraw', 'hold'],
       ['propose-change', 'edit', 'withdraw', 'hold'],
     ]);
-    expect(recipeActions(me('lead'), { ...OTHERS, hasCurrent: false })).not.toContain('withdraw');
-    expect(recipeActions(me('operator'), { ...OWN, hasCurrent: false })).toEqual(['propose-change', 'edit']);
+    expect(recipeActions(me('lead'), { ...OTHERS, hasSigned: false })).not.toContain('withdraw');
+    expect(recipeActions(me('operator'), { ...OWN, hasSigned: false })).toEqual(['propose-change', 'edit']);
   });
 });

@@ -35,7 +35,7 @@ export function revisionActions(caller: Caller, revision: RevisionFacts, authorM
     ['recall', state === 'in_review' && own],
     ['return', state === 'in_review' && leads],
     ['approve', state === 'in_review' && leads && (!own || authorMaySign)],
-    ['withdraw', state === 'approved' && leads],
+    ['withdraw', (state === 'approved' || state === 'scheduled') && leads],
     ['copy', state !== 'draft'],
     ['start-confirmation', state === 'draft' || state === 'in_review'],
   ];

@@ -28,6 +28,7 @@ export function toRecipeSummaryDto(row: RecipeFaceRow, parts: SummaryParts): Rec
   };
   const plateOf = (id: string | null) => parts.plates.find(({ revisionId }) => revisionId === id);
   const plate = plateOf(row.current_id) ?? plateOf(row.under_way_id);
+  const hasSigned = parts.ladders.some(({ recipeId, state }) => recipeId === row.id && (state === 'approved' || state === 'scheduled'));
   const { good = 0, scrap = 0 } = parts.runs.find(({ recipeId }) => recipeId === row.id) ?? {};
   return {
     id: row.id,
@@ -45,7 +46,7 @@ export function toRecipeSummaryDto(row: RecipeFaceRow, parts: SummaryParts): Rec
     face: plate === undefined ? null : toFaceDto(plate, parts.photoUrls),
     last30Days: { good, scrap },
     needsYou: row.need,
-    allowedActions: recipeActions(parts.actor, { createdBy: row.created_by, hasCurrent: row.current_id !== null }),
+    allowedActions: recipeActions(parts.actor, { createdBy: row.created_by, hasSigned }),
   };
 }
 

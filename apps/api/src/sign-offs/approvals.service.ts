@@ -24,7 +24,7 @@ export class ApprovalsService {
     return this.unitOfWork.run(actor, (tx) => this.acts.approve(tx, actor, id, dto));
   }
 
-  /** Leaves the recipe without an approved revision, at once. */
+  /** Leaves the recipe without an approved revision, at once; one that was yet to take effect never does, and the present one stays. */
   async withdraw(actor: Actor, id: string, dto: WithdrawRevisionDto): Promise<RecipeRevisionDto> {
     await this.password.confirm(actor, dto.password);
     return this.unitOfWork.run(actor, (tx) => this.acts.withdraw(tx, actor, id, dto));

@@ -44,9 +44,9 @@ export class SignOffLettersService {
   }
 
   /** Everybody may be standing at a machine with it. */
-  async withdrawn(tx: Tx, actor: Actor, about: About, reason: string): Promise<void> {
+  async withdrawn(tx: Tx, actor: Actor, about: About, told: { reason: string; stayingNumber: number | null }): Promise<void> {
     const everybody = await this.signOffs.recipients(tx, actor.shopId, { roles: ROLES, exceptId: actor.memberId });
-    const payload = { ...(await this.body(tx, actor, about)), reason };
+    const payload = { ...(await this.body(tx, actor, about)), ...told };
     await this.send(tx, actor.shopId, everybody, (to) => ({ kind: 'revision-withdrawn', payload: { ...payload, to } }));
   }
 

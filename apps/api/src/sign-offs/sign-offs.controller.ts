@@ -80,7 +80,7 @@ export class SignOffsController {
   @HttpCode(200)
   @AtLeast('lead')
   @Idempotent()
-  @ApiOperation({ summary: 'Withdraw the approved revision with the password: the recipe has no setting then' })
+  @ApiOperation({ summary: 'Withdraw an approved revision with the password, also one that is yet to take effect' })
   @ApiOkResponse({ type: RecipeRevisionDto })
   withdraw(@CurrentMember() actor: Actor, @Param('revisionId', IdPipe) revisionId: string, @Body() dto: WithdrawRevisionDto) {
     return this.approvals.withdraw(actor, revisionId, dto);

@@ -51,11 +51,12 @@ export class SigningActsService {
   }
 
   async withdraw(tx: Tx, actor: Actor, id: string, { reason }: WithdrawRevisionDto): Promise<RecipeRevisionDto> {
-    const { revision } = await this.revisions.lockForSigning(tx, actor.shopId, id);
+    const { revision, ladder } = await this.revisions.lockForSigning(tx, actor.shopId, id);
     await this.refuseJump(tx, actor, revision, 'withdraw');
+    const staying = ladder.find((rung) => rung.state === 'approved' && rung.id !== id);
     const record = await this.revisions.getRecord(tx, actor.shopId, id);
     await this.revisions.markWithdrawn(tx, actor.shopId, id);
-    await this.letters.withdrawn(tx, actor, { record, number: revision.number ?? 0 }, reason);
+    await this.letters.withdrawn(tx, actor, { record, number: revision.number ?? 0 }, { reason, stayingNumber: staying?.number ?? null });
     await this.signatures.sign(tx, actor, record, {
       ...{ meaning: 'withdrawn', method: 'password', action: 'revision.withdrawn', comment: reason },
       contentHash: revision.contentHash ?? hashOfRecord(record),

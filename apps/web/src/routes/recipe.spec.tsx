@@ -91,6 +91,22 @@ describe('the recipe page', () => {
     ]);
   });
 
+  it('withdraws a revision that is yet to take effect and says what stays', async () => {
+    const scheduled = makeRevision({ id: 'revision-5', number: 5, state: 'scheduled' });
+    const { user } = openPage(
+      '/recipes/R-0042',
+      { 'POST /api/revisions/revision-5/withdraw': () => ({ body: { ...scheduled, state: 'withdrawn' } }) },
+      makeRecipe(approved, [scheduled, approved], { allowedActions: ['withdraw'] }),
+    );
+    await user.click(await screen.findByRole('button', { name: 'Withdraw revision 5' }));
+    const dialog = screen.getByRole('dialog', { name: 'Withdraw revision 5' });
+    expect(within(dialog).getByText(/It then never takes effect/)).toBeVisible();
+    await user.type(within(dialog).getByLabelText('Why it must not be used any more'), 'Too hot');
+    await user.type(within(dialog).getByLabelText('Your password'), 'burnt plate by the window');
+    await user.click(within(dialog).getByRole('button', { name: 'Withdraw revision 5' }));
+    expect(await screen.findByText('Revision 5 is withdrawn. R-0042 stays at revision 3.')).toBeVisible();
+  });
+
   it('begins a change as a draft of its own', async () => {
     const { user, router } = openPage('/recipes/R-0042', {
       'POST /api/recipes/recipe-42/drafts': () => ({ status: 201, body: { ...approved, id: 'draft-1', number: null, state: 'draft' } }),

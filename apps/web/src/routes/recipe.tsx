@@ -96,34 +96,40 @@ function NoApproved({ recipe: { state, underWay, code } }: { recipe: Recipe }) {
 }
 
 function RecipeActions({ recipe }: { recipe: Recipe }) {
-  const [isWithdrawing, setIsWithdrawing] = useState(false);
+  const [withdrawing, setWithdrawing] = useState<Recipe['revisions'][number]>();
   const announce = useStatusLine();
-  const { allowedActions, current, underWay, code } = recipe;
+  const { allowedActions, current, underWay, revisions, code } = recipe;
   const draft = underWay?.state === 'draft' ? underWay : undefined;
   return (
     <>
-      {allowedActions.includes('withdraw') && current !== null && (
-        <Button kind="danger" onClick={() => setIsWithdrawing(true)}>
-          Withdraw revision {current.number}
-        </Button>
-      )}
+      {allowedActions.includes('withdraw') &&
+        revisions.filter(isSigned).map((revision) => (
+          <Button key={revision.id} kind="danger" onClick={() => setWithdrawing(revision)}>
+            Withdraw revision {revision.number}
+          </Button>
+        ))}
       {draft !== undefined && (
         <ButtonLink kind="primary" to={paths.recipeRevision(code, draft.id)}>
           Open the draft
         </ButtonLink>
       )}
       {draft === undefined && allowedActions.includes('propose-change') && <ProposeChangeButton recipe={recipe} />}
-      {isWithdrawing && current !== null && (
+      {withdrawing !== undefined && (
         <WithdrawDialog
-          revision={current}
+          revision={withdrawing}
           recipeCode={code}
-          onClose={() => setIsWithdrawing(false)}
+          onClose={() => setWithdrawing(undefined)}
           onWithdrawn={() => {
-            setIsWithdrawing(false);
-            announce(`Revision ${current.number} is withdrawn. ${code} has no approved setting now.`);
+            setWithdrawing(undefined);
+            const staying = withdrawing.state === 'scheduled' ? current : null;
+            const now = staying === null ? 'has no approved setting now' : `stays at revision ${staying.number}`;
+            announce(`Revision ${withdrawing.number} is withdrawn. ${code} ${now}.`);
           }}
         />
       )}
     </>
   );
 }
+
+/** What can be withdrawn: the approved revision and one that is yet to take effect. */
+const isSigned = ({ state }: { state: string }) => state === 'approved' || state === 'scheduled';

@@ -1694,7 +1694,7 @@ export interface paths {
         };
         get?: never;
         put?: never;
-        /** Withdraw the approved revision with the password: the recipe has no setting then */
+        /** Withdraw an approved revision with the password, also one that is yet to take effect */
         post: operations["SignOffsController_withdraw"];
         delete?: never;
         options?: never;

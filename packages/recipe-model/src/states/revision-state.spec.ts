@@ -17,6 +17,7 @@ const JUMPS: readonly [RevisionState, RevisionAction, RevisionState][] = [
   ['in_review', 'returnToAuthor', 'returned'],
   ['in_review', 'recall', 'returned'],
   ['scheduled', 'takeEffect', 'approved'],
+  ['scheduled', 'withdraw', 'withdrawn'],
   ['approved', 'supersede', 'superseded'],
   ['approved', 'withdraw', 'withdrawn'],
 ];

@@ -30,7 +30,7 @@ export const REVISION_ACTION_LABELS: Labels<RevisionAction> = {
 const MOVES: Moves<RevisionState, RevisionAction> = {
   draft: { submit: 'in_review' },
   in_review: { approve: 'approved', approveLater: 'scheduled', returnToAuthor: 'returned', recall: 'returned' },
-  scheduled: { takeEffect: 'approved' },
+  scheduled: { takeEffect: 'approved', withdraw: 'withdrawn' },
   approved: { supersede: 'superseded', withdraw: 'withdrawn' },
   returned: {},
   superseded: {},

@@ -39,11 +39,17 @@ export function withdrawnLetter(mail: MailPayloads['revision-withdrawn'], links:
     subject: `Withdrawn: ${name(mail)}`,
     paragraphs: [
       greeting(mail.to.name),
-      `${mail.by} withdrew ${name(mail)} at ${mail.shopName}. Do not mark with it any more: this recipe has no approved setting now.`,
+      `${mail.by} withdrew ${name(mail)} at ${mail.shopName}. ${afterwards(mail)}`,
       ...said(mail.by, mail.reason),
     ],
     action: revisionAction(mail, links),
   };
+}
+
+function afterwards({ stayingNumber }: MailPayloads['revision-withdrawn']): string {
+  return stayingNumber == null
+    ? 'Do not mark with it any more: this recipe has no approved setting now.'
+    : `It never takes effect: revision ${stayingNumber} stays the approved one.`;
 }
 
 export function holdLetter({ to, shopName, subject, reason, by }: MailPayloads['hold-placed'], links: MailLinks): Letter {

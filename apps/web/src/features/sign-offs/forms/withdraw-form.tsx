@@ -10,7 +10,7 @@ import { explainSigning, signedAct, unansweredSigning } from '../signing-problem
 const LABELS = { reason: 'Why it must not be used any more', password: 'Your password' };
 
 export type WithdrawDialogProps = {
-  revision: { id: string; number: number | null };
+  revision: { id: string; number: number | null; state: string };
   recipeCode: string;
   onClose: () => void;
   onWithdrawn: () => void;
@@ -34,8 +34,10 @@ export function WithdrawDialog({ revision, recipeCode, onClose, onWithdrawn }: W
         }}
       >
         <chakra.p>
-          {recipeCode} then has no approved setting, and every machine says so at once. This cannot be taken back; a new revision can be
-          proved.
+          {revision.state === 'scheduled'
+            ? 'It then never takes effect. '
+            : `${recipeCode} then has no approved setting, and every machine says so at once. `}
+          This cannot be taken back; a new revision can be proved.
         </chakra.p>
         <TextAreaField
           label={LABELS.reason}
