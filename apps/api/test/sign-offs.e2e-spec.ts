@@ -285,6 +285,22 @@ describe('approving', () => {
     expect(approved.signOffs.at(-1)).toMatchObject({ meaning: 'approved', isByAuthor: true });
   });
 
+  it('is refused to a lead who edited the draft, not to one who only wrote the grounds', async () => {
+    const own = await makeRecipeShop(test);
+    const second = await makeMember(test, own.shop, 'lead');
+    const fromCell = await draftFromCell(test, own, await makeProvedCoupon(test, own));
+    const other = await changeDraft(test, own.operator, fromCell, { route: 'earlier-experience' });
+    const edited = await changeDraft(test, second, other, { reason: 'As run for three years.' });
+    const grounded = await changeDraft(test, own.lead, edited, { grounds: 'Run for three years without scrap.' });
+    const submitted = (await acts(test, other.id).submit(own.operator, grounded)).json<RecipeRevisionDto>();
+    expectProblem(await acts(test, other.id).approve(second, submitted), 403, 'self-approval');
+    expect(failing(await checksOf(other.id, second))).toEqual(['signer-not-author']);
+    const needsOf = async (member: TestMember) => (await read<RecipeDto>(test, member, `/recipes/${submitted.recipe.id}`)).needsYou;
+    expect([await needsOf(second), await needsOf(own.lead)]).toEqual([null, 'sign']);
+    const approved = (await acts(test, other.id).approve(own.lead, submitted)).json<RecipeRevisionDto>();
+    expect(approved.signOffs.at(-1)).toMatchObject({ meaning: 'approved', isByAuthor: false });
+  });
+
   it('is refused to a lead who is not named for the process', async () => {
     const submitted = await makeSubmitted(test, shop);
     const second = await makeMember(test, shop.shop, 'lead');

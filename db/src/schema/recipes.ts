@@ -83,6 +83,8 @@ export const revision = pgTable(
     route: text().notNull().default('coupons'),
     grounds: text().notNull().default(''),
     groundsBy: uuid(),
+    /** Members other than the author who changed the draft: they do not approve it. */
+    editorIds: jsonb().$type<string[]>().notNull().default([]),
     effectiveFrom: moment(),
     reviewDue: moment(),
     contentHash: text(),

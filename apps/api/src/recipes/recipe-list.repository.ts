@@ -154,7 +154,7 @@ function faces({ shopId, memberId, maySign, maySignOwn }: Viewer): SQL {
       bool_or(v.state = 'approved' and coalesce(v.review_due < now(), false)) as is_due,
       bool_or(v.state = 'scheduled') as is_scheduled, bool_or(v.state = 'in_review') as is_in_review, bool_or(v.state = 'draft') as is_draft,
       bool_or(v.state = 'withdrawn') as is_withdrawn,
-      bool_or(v.state = 'in_review' and (v.created_by <> ${memberId}::uuid or ${maySignOwn})) as waits_for_signature,
+      bool_or(v.state = 'in_review' and (${maySignOwn} or (v.created_by <> ${memberId}::uuid and not v.editor_ids ? ${memberId}))) as waits_for_signature,
       bool_or(v.state = 'draft' and v.created_by = ${memberId}::uuid) as is_own_draft,
       max(greatest(v.created_at, v.submitted_at, v.approved_at, v.superseded_at, v.withdrawn_at)) as moved_at
     from revision v where v.shop_id = ${shopId} group by v.recipe_id),

@@ -2,8 +2,9 @@ import { type RevisionState, ROLES } from '@proofplate/recipe-model';
 import { mayEditDraft, revisionActions } from './recipe-revisions.policy';
 import { recipeActions } from './recipes.policy';
 
-const OWN = { createdBy: 'me' };
-const OTHERS = { createdBy: 'somebody' };
+const OWN = { createdBy: 'me', editorIds: [] };
+const OTHERS = { createdBy: 'somebody', editorIds: [] };
+const EDITED = { createdBy: 'somebody', editorIds: ['me'] };
 const me = (role: (typeof ROLES)[number]) => ({ role, memberId: 'me' });
 
 describe('revisionActions()', () => {
@@ -12,6 +13,7 @@ describe('revisionActions()', () => {
     ['draft', OTHERS, ['start-confirmation'], ['edit', 'discard', 'start-confirmation']],
     ['in_review', OWN, ['recall', 'copy', 'start-confirmation'], ['recall', 'return', 'copy', 'start-confirmation']],
     ['in_review', OTHERS, ['copy', 'start-confirmation'], ['return', 'approve', 'copy', 'start-confirmation']],
+    ['in_review', EDITED, ['copy', 'start-confirmation'], ['return', 'copy', 'start-confirmation']],
     ['approved', OTHERS, ['copy'], ['withdraw', 'copy']],
     ['scheduled', OTHERS, ['copy'], ['withdraw', 'copy']],
     ['returned', OWN, ['copy'], ['copy']],

@@ -12,7 +12,8 @@ export type RevisionActionName =
   | 'copy'
   | 'start-confirmation';
 
-export type RevisionFacts = { readonly state: RevisionState; readonly createdBy: string };
+export type Writers = { readonly createdBy: string; readonly editorIds: readonly string[] };
+export type RevisionFacts = Writers & { readonly state: RevisionState };
 type Caller = Pick<Actor, 'role' | 'memberId'>;
 
 /** A draft belongs to its author; a lead may help. */
@@ -21,6 +22,10 @@ export const mayEditDraft = (caller: Caller, { createdBy }: Pick<RevisionFacts, 
 
 /** Submitting and recalling are acts of the author alone. */
 export const isAuthor = (caller: Caller, { createdBy }: Pick<RevisionFacts, 'createdBy'>) => createdBy === caller.memberId;
+
+/** Nobody approves what they wrote, as its author or by editing somebody's draft. */
+export const hasWritten = ({ memberId }: Pick<Caller, 'memberId'>, { createdBy, editorIds }: Writers) =>
+  createdBy === memberId || editorIds.includes(memberId);
 
 /** What the member may do with a revision. */
 export function revisionActions(caller: Caller, revision: RevisionFacts, authorMaySign: boolean): RevisionActionName[] {
@@ -34,7 +39,7 @@ export function revisionActions(caller: Caller, revision: RevisionFacts, authorM
     ['submit', state === 'draft' && own],
     ['recall', state === 'in_review' && own],
     ['return', state === 'in_review' && leads],
-    ['approve', state === 'in_review' && leads && (!own || authorMaySign)],
+    ['approve', state === 'in_review' && leads && (!hasWritten(caller, revision) || authorMaySign)],
     ['withdraw', (state === 'approved' || state === 'scheduled') && leads],
     ['copy', state !== 'draft'],
     ['start-confirmation', state === 'draft' || state === 'in_review'],

@@ -28,7 +28,16 @@ export type NewDraft = Pick<StoredRevision, 'recipeId' | 'content' | 'profileId'
 export type DraftChange = Partial<
   Pick<
     StoredRevision,
-    'content' | 'calibrationId' | 'reason' | 'route' | 'grounds' | 'groundsBy' | 'effectiveFrom' | 'reviewDue' | 'acknowledgedCautionIds'
+    | 'content'
+    | 'calibrationId'
+    | 'reason'
+    | 'route'
+    | 'grounds'
+    | 'groundsBy'
+    | 'effectiveFrom'
+    | 'reviewDue'
+    | 'acknowledgedCautionIds'
+    | 'editorIds'
   >
 >;
 
@@ -91,11 +100,12 @@ export class RecipeRevisionsRepository {
     return row.id;
   }
 
-  async updateDraft(tx: Tx, key: Key, { content, acknowledgedCautionIds, ...change }: DraftChange): Promise<void> {
+  async updateDraft(tx: Tx, key: Key, { content, acknowledgedCautionIds, editorIds, ...change }: DraftChange): Promise<void> {
     const values = {
       ...change,
       ...(content === undefined ? {} : { content: { ...content } }),
       ...(acknowledgedCautionIds === undefined ? {} : { acknowledgedCautionIds: [...acknowledgedCautionIds] }),
+      ...(editorIds === undefined ? {} : { editorIds: [...editorIds] }),
     };
     await tx
       .update(revision)

@@ -4,6 +4,7 @@ import { ForbiddenError, InvalidError, StaleError } from '../common/errors/domai
 import { decodeCursor, pageOf } from '../common/pagination/page';
 import { type Tx, UnitOfWork } from '../database/unit-of-work';
 import { LedgerService } from '../ledger/ledger.service';
+import { isRewritten, withEditor } from './draft-editors';
 import { DraftEntryService } from './draft-entry.service';
 import { DraftRepositories } from './draft-repositories';
 import type { UpdateRecipeDto } from './dto/create-recipe.dto';
@@ -67,8 +68,11 @@ export class RecipesService {
     const problems = await this.entry.scopeProblems(tx, actor.shopId, typed);
     if (problems.length > 0) throw new InvalidError('The scope needs another look.', problems);
     const scope = scopeAsStored(typed);
-    for (const { id, content } of ladder)
-      await this.repositories.revisions.updateDraft(tx, { shopId: actor.shopId, id }, { content: { ...content, scope } });
+    for (const draft of ladder) {
+      const change = { content: { ...draft.content, scope } };
+      const editorIds = isRewritten(draft, { ...draft, ...change }) ? withEditor(draft, actor.memberId) : draft.editorIds;
+      await this.repositories.revisions.updateDraft(tx, { shopId: actor.shopId, id: draft.id }, { ...change, editorIds });
+    }
     return scope;
   }
 }

@@ -4,6 +4,7 @@ import type { Actor } from '../common/actor';
 import { type FieldProblem, InvalidError, StaleError } from '../common/errors/domain-error';
 import { type Tx, UnitOfWork } from '../database/unit-of-work';
 import { LedgerService } from '../ledger/ledger.service';
+import { isRewritten, withEditor } from './draft-editors';
 import { DraftEntryService } from './draft-entry.service';
 import { DraftRepositories } from './draft-repositories';
 import type { SetEvidenceDto } from './dto/evidence.dto';
@@ -29,7 +30,8 @@ export class RevisionDraftsService {
     return this.unitOfWork.run(actor, async (tx) => {
       const before = await this.lockDraft(tx, actor, id, { version });
       const change = await this.entry.read(tx, actor, before, dto);
-      await this.repositories.revisions.updateDraft(tx, { shopId: actor.shopId, id }, change);
+      const editorIds = isRewritten(before, { ...before, ...change }) ? withEditor(before, actor.memberId) : before.editorIds;
+      await this.repositories.revisions.updateDraft(tx, { shopId: actor.shopId, id }, { ...change, editorIds });
       if (change.content !== undefined) await this.mirrorScope(tx, actor.shopId, before, change.content);
       await this.record(tx, actor, before, { action: 'revision.changed', before: told(before), after: told({ ...before, ...change }) });
       return this.records.getDto(tx, actor, id);
@@ -60,7 +62,7 @@ export class RevisionDraftsService {
           .map(({ cellId, coupon }) => ({ revisionId: id, couponId: coupon.id, cellId, kind }));
       const links = [...linksOf(basisCellIds, 'basis'), ...linksOf(confirmationCellIds, 'confirmation')];
       await this.repositories.evidence.link(tx, actor.shopId, actor.memberId, links);
-      await this.repositories.revisions.updateDraft(tx, { shopId: actor.shopId, id }, {});
+      await this.repositories.revisions.updateDraft(tx, { shopId: actor.shopId, id }, { editorIds: withEditor(before, actor.memberId) });
       await this.record(tx, actor, before, { action: 'revision.evidence-set', after: { basisCellIds, confirmationCellIds } });
       return this.records.getDto(tx, actor, id);
     });

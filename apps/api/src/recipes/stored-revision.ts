@@ -29,6 +29,7 @@ export type StoredRevision = {
   readonly route: RouteKind;
   readonly grounds: string;
   readonly groundsBy: string | null;
+  readonly editorIds: readonly string[];
   readonly effectiveFrom: Date | null;
   readonly reviewDue: Date | null;
   readonly contentHash: string | null;

@@ -88,6 +88,7 @@ export class ApprovalChecksService {
 
 export const toSign = ({ revision, recipe }: RevisionRecord) => ({
   createdBy: revision.createdBy,
+  editorIds: revision.editorIds,
   effectId: recipe.effect.id,
   sourceKind: recipe.machine.sourceKind,
 });

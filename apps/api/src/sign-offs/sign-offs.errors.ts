@@ -17,7 +17,7 @@ export class SelfApprovalError extends ForbiddenError {
   override readonly title = 'Nobody approves what they wrote';
 
   constructor() {
-    super('You are the author of this revision. Ask another lead to sign it.');
+    super('You wrote this revision, or edited its draft. Ask another lead to sign it.');
   }
 }
 

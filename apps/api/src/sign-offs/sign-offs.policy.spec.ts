@@ -1,12 +1,13 @@
 import { maySignOwn, signerCautionsCheck, signerChecks, signsForProcess } from './sign-offs.policy';
 
-const REVISION = { createdBy: 'author', effectId: 'anneal', sourceKind: 'fibre-mopa' } as const;
+const REVISION = { createdBy: 'author', editorIds: ['helper'], effectId: 'anneal', sourceKind: 'fibre-mopa' } as const;
 const signer = (memberId: string, signsFor: { effectId: string; sourceKind: string }[] | null = null) => ({ memberId, signsFor });
 
 describe('maySignOwn()', () => {
-  it('refuses the author unless the policy allows it', () => {
+  it('refuses the author and whoever edited the draft, unless the policy allows it', () => {
     expect(maySignOwn({ memberId: 'other' }, REVISION, false)).toBe(true);
     expect(maySignOwn({ memberId: 'author' }, REVISION, false)).toBe(false);
+    expect(maySignOwn({ memberId: 'helper' }, REVISION, false)).toBe(false);
     expect(maySignOwn({ memberId: 'author' }, REVISION, true)).toBe(true);
   });
 });

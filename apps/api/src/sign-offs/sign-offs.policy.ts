@@ -1,5 +1,6 @@
 import type { SourceKind } from '@proofplate/recipe-model';
 import { type ApprovalCheck, check } from '../recipes/approval-check';
+import { hasWritten, type Writers } from '../recipes/recipe-revisions.policy';
 
 export type Process = { readonly effectId: string; readonly sourceKind: string };
 export type Signer = {
@@ -7,11 +8,11 @@ export type Signer = {
   /** Processes that this lead may sign for; null: all of them. */
   readonly signsFor: readonly Process[] | null;
 };
-export type ToSign = { readonly createdBy: string; readonly effectId: string; readonly sourceKind: SourceKind };
+export type ToSign = Writers & { readonly effectId: string; readonly sourceKind: SourceKind };
 
 /** Nobody approves what they wrote, unless the shop's policy allows it; then the signature says so. */
-export const maySignOwn = ({ memberId }: Pick<Signer, 'memberId'>, { createdBy }: Pick<ToSign, 'createdBy'>, authorMaySign: boolean) =>
-  createdBy !== memberId || authorMaySign;
+export const maySignOwn = (signer: Pick<Signer, 'memberId'>, revision: Writers, authorMaySign: boolean) =>
+  authorMaySign || !hasWritten(signer, revision);
 
 /** A lead without named processes signs for all of them. */
 export const signsForProcess = ({ signsFor }: Pick<Signer, 'signsFor'>, { effectId, sourceKind }: Process) =>
@@ -19,14 +20,14 @@ export const signsForProcess = ({ signsFor }: Pick<Signer, 'signsFor'>, { effect
 
 /** What an approval needs of whoever signs. */
 export function signerChecks(signer: Signer, revision: ToSign, authorMaySign: boolean): ApprovalCheck[] {
-  const isOwn = revision.createdBy === signer.memberId;
+  const isOwn = hasWritten(signer, revision);
   return [
     check('signer-not-author', 'Not your own', {
       passes: maySignOwn(signer, revision, authorMaySign),
       found: isOwn
         ? authorMaySign
-          ? 'You wrote it. The policy allows you to sign; the signature will say so.'
-          : 'You wrote it.'
+          ? 'You wrote it, or edited its draft. The policy allows you to sign; the signature will say so.'
+          : 'You wrote it, or edited its draft.'
         : 'Somebody else wrote it.',
       wayOut: 'Ask another lead.',
       blocks: 'approve',

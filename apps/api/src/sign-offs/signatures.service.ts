@@ -2,6 +2,7 @@ import { Injectable } from '@nestjs/common';
 import type { Actor } from '../common/actor';
 import type { Tx } from '../database/unit-of-work';
 import { LedgerService } from '../ledger/ledger.service';
+import { hasWritten } from '../recipes/recipe-revisions.policy';
 import type { RevisionRecord } from '../recipes/stored-revision';
 import { type NewSignOff, SignOffsRepository } from './sign-offs.repository';
 
@@ -22,7 +23,7 @@ export class SignaturesService {
 
   /** Call it after every other lock and change of the act: it takes the end of the shop's ledger. */
   async sign(tx: Tx, actor: Actor, { revision, recipe }: RevisionRecord, { action, after, ...signature }: Signature): Promise<void> {
-    const isByAuthor = revision.createdBy === actor.memberId;
+    const isByAuthor = hasWritten(actor, revision);
     const { hash: ledgerHashBefore } = await this.ledger.lockHead(tx, actor.shopId);
     await this.signOffs.insert(tx, actor.shopId, {
       ...{ checks: null, acknowledgedCautionIds: [], ...signature },

@@ -103,6 +103,7 @@ export const revisionOf = (given: Partial<StoredRevision> = {}): StoredRevision 
   reviewDue: null,
   contentHash: null,
   acknowledgedCautionIds: [],
+  editorIds: [],
   submittedAt: null,
   approvedAt: null,
   withdrawnAt: null,

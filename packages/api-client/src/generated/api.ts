@@ -4626,7 +4626,7 @@ export interface components {
              * @enum {string}
              */
             method: "password" | "session";
-            /** @description true: signed by the author of the revision, which the shop’s policy allowed */
+            /** @description true: signed by the author of the revision or somebody who edited its draft, which the shop’s policy allowed */
             isByAuthor: boolean;
         };
         RevisionBriefDto: {

@@ -16,5 +16,8 @@ export class SignOffDto {
   @ApiProperty({ description: 'SHA-256 of the content that was signed, hexadecimal' }) contentHash: string;
   @ApiProperty({ description: 'Hash of the ledger’s last event before the signature' }) ledgerHashBefore: string;
   @ApiProperty({ enum: ['password', 'session'], description: 'How the signer was confirmed' }) method: 'password' | 'session';
-  @ApiProperty({ description: 'true: signed by the author of the revision, which the shop’s policy allowed' }) isByAuthor: boolean;
+  @ApiProperty({
+    description: 'true: signed by the author of the revision or somebody who edited its draft, which the shop’s policy allowed',
+  })
+  isByAuthor: boolean;
 }

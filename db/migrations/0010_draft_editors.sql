@@ -1,0 +1,1 @@
+ALTER TABLE "revision" ADD COLUMN "editor_ids" jsonb DEFAULT '[]'::jsonb NOT NULL;
