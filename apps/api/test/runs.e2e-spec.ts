@@ -201,6 +201,14 @@ describe('GET /api/runs/start-sheet/:revisionId', () => {
     expect(forOperator.kinds).toEqual(['production', 'confirmation', 'daily-check']);
   });
 
+  it.each(['scheduled', 'superseded', 'withdrawn'] as const)('tells a trainee that a revision is %s, not what is in it', async (state) => {
+    const { revisionId } = await makeRecipe(test, shop.lead, { state });
+    const sheet = (await get(`/api/runs/start-sheet/${revisionId}`)).json<StartSheetDto>();
+    expect(sheet).toMatchObject({ revision: { state }, kinds: [], steps: [], setUpSteps: [] });
+    const forOperator = (await get(`/api/runs/start-sheet/${revisionId}`, shop.operator)).json<StartSheetDto>();
+    expect(forOperator.steps).toHaveLength(1);
+  });
+
   it('refuses a stranger and another shop', async () => {
     const url = `/api/runs/start-sheet/${dial.revisionId}`;
     expectProblem(await test.app.inject({ url }), 401, 'not-signed-in');
@@ -267,6 +275,17 @@ describe('first piece and finish', () => {
     expectProblem(await act(run, 'first-piece', { ok: true }), 409, 'on-hold');
     const seen = (await get(`/api/runs/${run.code}`)).json<RunDto>();
     expect(seen).toMatchObject({ holds: [{ reason: 'Wrong lot' }], allowedActions: ['tick', 'finish', 'bad-result'] });
+    expect((await act(run, 'finish', { good: 0, scrap: 1 })).statusCode).toBe(200);
+  });
+
+  it('does not release a first piece of a revision that was withdrawn meanwhile', async () => {
+    const recipe = await makeRecipe(test, shop.lead);
+    const run = await started(recipe);
+    await withdrawRecipe(test, shop.lead, recipe);
+    expectProblem(await act(run, 'first-piece', { ok: true }), 409, 'not-approved');
+    const seen = (await get(`/api/runs/${run.code}`)).json<RunDto>();
+    expect(seen).toMatchObject({ firstPiece: null, allowedActions: ['tick', 'finish', 'bad-result'] });
+    expect((await act(run, 'first-piece', { ok: false, note: 'Stopped.' })).statusCode).toBe(200);
     expect((await act(run, 'finish', { good: 0, scrap: 1 })).statusCode).toBe(200);
   });
 

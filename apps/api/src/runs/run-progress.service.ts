@@ -9,9 +9,17 @@ import { DeviationsService } from './deviations.service';
 import type { RunDto } from './dto/run.dto';
 import type { FinishRunDto, FirstPieceActDto, MeasurePieceDto, TellBadResultDto } from './dto/run-acts.dto';
 import type { TickRunDto } from './dto/start-run.dto';
+import { whyNotUsable } from './revision-use';
 import { RunActs } from './run-acts.service';
 import { tickProblems } from './run-ticks';
-import { FirstPieceNotReleasedError, NotReadyToStartError, OnHoldError, RunFinishedError, RunNotFoundError } from './runs.errors';
+import {
+  FirstPieceNotReleasedError,
+  NotReadyToStartError,
+  OnHoldError,
+  RevisionNotUsableError,
+  RunFinishedError,
+  RunNotFoundError,
+} from './runs.errors';
 import { readsAllRuns } from './runs.policy';
 import { type RunChange, type RunRow, RunsRepository } from './runs.repository';
 
@@ -44,8 +52,7 @@ export class RunProgressService {
   async firstPiece(actor: Actor, id: string, { ok, note, photoId }: FirstPieceActDto): Promise<RunDto> {
     return this.unitOfWork.run(actor, async (tx) => {
       const run = await this.lockStarted(tx, actor, id);
-      const holds = await this.runs.openHolds(tx, actor.shopId, run);
-      if (ok && holds.length > 0) throw new OnHoldError(holds);
+      if (ok) await this.refuseStopped(tx, actor, run);
       if (photoId !== undefined && !(await this.runs.isPhotoOfShop(tx, actor.shopId, photoId)))
         throw new InvalidError('One field needs another look.', [{ pointer: '#/photoId', detail: 'This photo is not in the shop.' }]);
       const who = { by: actor.memberId, byName: actor.printedName, at: new Date().toISOString() };
@@ -80,6 +87,15 @@ export class RunProgressService {
       const badResult = { outcome, note, at: new Date().toISOString(), byName: actor.printedName };
       return this.write(tx, actor, run, { action: 'run.bad-result-told', change: { badResult }, told: badResult });
     });
+  }
+
+  /** Under lock, so that no hold or withdrawal slips in before the batch is released. */
+  private async refuseStopped(tx: Tx, actor: Actor, run: RunRow): Promise<void> {
+    const revision = await this.cited.lock(tx, actor.shopId, run.revisionId);
+    const holds = await this.runs.openHolds(tx, actor.shopId, run);
+    if (holds.length > 0) throw new OnHoldError(holds);
+    const withdrawn = revision?.state === 'withdrawn' ? whyNotUsable(run.kind, revision.state) : undefined;
+    if (withdrawn !== undefined) throw new RevisionNotUsableError(withdrawn);
   }
 
   private async write(

@@ -46,6 +46,10 @@ export function toRunDto(view: RunView, holds: readonly OpenHold[], actor: Pick<
     notes: run.notes,
     contentHash: run.contentHash,
     version: run.version,
-    allowedActions: runActions(actor, { state: run.state, startedBy: startedBy.id, isHeld: holds.length > 0 }),
+    allowedActions: runActions(actor, {
+      state: run.state,
+      startedBy: startedBy.id,
+      isStopped: holds.length > 0 || revision.state === 'withdrawn',
+    }),
   };
 }

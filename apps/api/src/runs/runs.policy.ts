@@ -10,14 +10,14 @@ export const readsAllRuns = ({ role }: Pick<Actor, 'role'>) => roleAtLeast(role,
 /** Confirmation runs belong to whoever may draft and prove settings. */
 export const mayStart = ({ role }: Pick<Actor, 'role'>, kind: RunKind) => kind !== 'confirmation' || roleAtLeast(role, 'operator');
 
-/** What the member may do with a run. */
+/** What the member may do with a run. `isStopped`: under a hold, or its revision was withdrawn. */
 export function runActions(
   actor: Acting,
-  run: { readonly state: string; readonly startedBy: string; readonly isHeld: boolean },
+  run: { readonly state: string; readonly startedBy: string; readonly isStopped: boolean },
 ): RunAction[] {
   if (!readsAllRuns(actor) && run.startedBy !== actor.memberId) return [];
   if (run.state !== 'started') return ['bad-result'];
-  return run.isHeld ? ['tick', 'finish', 'bad-result'] : ['tick', 'first-piece', 'finish', 'bad-result'];
+  return run.isStopped ? ['tick', 'finish', 'bad-result'] : ['tick', 'first-piece', 'finish', 'bad-result'];
 }
 
 /** What the member may do with a request for a setting. */

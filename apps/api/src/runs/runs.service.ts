@@ -34,6 +34,8 @@ export class RunsService {
     return this.unitOfWork.read(actor, async (tx) => {
       const revision = await this.cited.get(tx, actor, revisionId);
       const holds = await this.runs.openHolds(tx, actor.shopId, { recipeId: revision.recipe.id, machineId: revision.machine.id });
+      // trainees read approved settings; of another one they see how it stands, not what is in it
+      const isHidden = actor.role === 'trainee' && whyNotUsable('production', revision.state) !== undefined;
       const { id, number, state, content, recipe, machine, lens, material, finish, effect, panel } = revision;
       return {
         recipe,
@@ -41,8 +43,8 @@ export class RunsService {
         machine: { id: machine.id, name: machine.name },
         ...{ material, finish, effect, lens, panel },
         lenses: await this.cited.lenses(tx, actor.shopId),
-        steps: content.steps,
-        setUpSteps: content.setUpSteps,
+        steps: isHidden ? [] : content.steps,
+        setUpSteps: isHidden ? [] : content.setUpSteps,
         holds,
         deviations: await this.deviations.liveOf(tx, actor.shopId, id),
         kinds: RUN_KINDS.filter((kind) => mayStart(actor, kind) && whyNotUsable(kind, state) === undefined),
