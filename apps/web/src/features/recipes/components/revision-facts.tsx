@@ -82,7 +82,7 @@ export function SetUpSteps({ steps }: { steps: Revision['setUpSteps'] }) {
               </chakra.span>
             )}
             {caution !== undefined && caution !== '' && (
-              <chakra.span display="block" fontSize="sm" css={{ '& *': { whiteSpace: 'normal' } }}>
+              <chakra.span display="block" fontSize="sm" css={{ '& span': { whiteSpace: 'normal' } }}>
                 <StateMark state="caution">{caution}</StateMark>
               </chakra.span>
             )}
