@@ -16,7 +16,7 @@ const MOST_COMMANDS = 8;
 
 type Who = 'operator' | 'lead' | 'second' | 'trainee' | 'foreign';
 type Act = 'submit' | 'recall' | 'return' | 'approve' | 'withdraw' | 'edit' | 'discard' | 'copy';
-type Known = { id: string; state: RevisionState; author: Who; seen: RecipeRevisionDto };
+type Known = { id: string; state: RevisionState; author: Who; editors: Who[]; seen: RecipeRevisionDto };
 type Model = { revisions: Known[]; numbersGiven: number };
 type Real = { recipeId: string };
 
@@ -59,7 +59,7 @@ async function begin(): Promise<{ model: Model; real: Real }> {
   const drafted = await created<RecipeRevisionDto>(test, shop.operator, '/api/recipes', body);
   const seen = await changeDraft(test, shop.lead, drafted, { grounds: 'Customer drawing.' });
   return {
-    model: { revisions: [{ id: seen.id, state: 'draft', author: 'operator', seen }], numbersGiven: 0 },
+    model: { revisions: [{ id: seen.id, state: 'draft', author: 'operator', editors: [], seen }], numbersGiven: 0 },
     real: { recipeId: seen.recipe.id },
   };
 }
@@ -81,7 +81,7 @@ function expectedStatus(model: Model, { act, who }: { act: Act; who: Who }, targ
   }
   if (nextRevisionState(target.state, MOVES[act]).kind === 'refused') return 409;
   if ((act === 'submit' || act === 'recall') && !own) return 403;
-  return act === 'approve' && own ? 403 : 200;
+  return act === 'approve' && (own || target.editors.includes(who)) ? 403 : 200;
 }
 
 async function perform({ act, who }: { act: Act; who: Who }, target: Known, { recipeId }: Real) {
@@ -110,11 +110,14 @@ function advance(model: Model, { act, who }: { act: Act; who: Who }, target: Kno
   }
   if (seen === undefined) throw new Error('an act that is allowed answers with the revision');
   if (act === 'copy') {
-    model.revisions.push({ id: seen.id, state: 'draft', author: who, seen });
+    model.revisions.push({ id: seen.id, state: 'draft', author: who, editors: [], seen });
     return;
   }
   target.seen = seen;
-  if (act === 'edit') return;
+  if (act === 'edit') {
+    if (who !== target.author) target.editors.push(who);
+    return;
+  }
   if (act === 'approve') for (const revision of model.revisions) if (revision.state === 'approved') revision.state = 'superseded';
   const moved = nextRevisionState(target.state, MOVES[act]);
   if (moved.kind === 'moved') target.state = moved.state;
