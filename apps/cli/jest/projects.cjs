@@ -13,6 +13,7 @@ function nodeProject(displayName, rootDir, extra = {}) {
     modulePathIgnorePatterns: ['<rootDir>/dist/'],
     testEnvironmentOptions: { customExportConditions: ['@proofplate/source', 'node', 'require', 'default'] },
     transform: tsJest(join(rootDir, 'tsconfig.json')),
+    setupFilesAfterEnv: [join(__dirname, 'property-seed.cjs')],
     ...extra,
   };
 }
