@@ -35,6 +35,7 @@ export { type PanelProblem, panelProblems } from './panel/panel-problems';
 export { showNumber } from './panel/show-number';
 export { type ShownValue, showValue } from './panel/show-value';
 export { isShowable, nearestShowable, roundToPanel } from './panel/showable';
+export { type DatedCalibration, type PowerShift, type PowerShiftInput, powerShift } from './power/power-shift';
 export { CALIBRATION_FREQUENCY_TOLERANCE, type MeasuredCalibration, type WorkPowerInput, workPower } from './power/work-power';
 export { matchesWords, wordsOf } from './search/matches-words';
 export type { ShippedCaution } from './starter-content/shipped-caution';

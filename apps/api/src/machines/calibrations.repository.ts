@@ -1,6 +1,6 @@
 import { Injectable } from '@nestjs/common';
 import { schema, type Tx } from '@proofplate/db';
-import { and, desc, eq, sql } from 'drizzle-orm';
+import { and, desc, eq, inArray, sql } from 'drizzle-orm';
 
 const { powerCalibration, member } = schema;
 
@@ -28,6 +28,16 @@ export class CalibrationsRepository {
       .where(and(eq(powerCalibration.shopId, shopId), eq(powerCalibration.machineId, machineId), isBefore))
       .orderBy(desc(powerCalibration.measuredOn), desc(powerCalibration.id))
       .limit(limit);
+  }
+
+  /** Every reading of these machines, newest first. */
+  async ofMachines(tx: Tx, shopId: string, machineIds: readonly string[]): Promise<CalibrationRow[]> {
+    if (machineIds.length === 0) return [];
+    return tx
+      .select()
+      .from(powerCalibration)
+      .where(and(eq(powerCalibration.shopId, shopId), inArray(powerCalibration.machineId, [...machineIds])))
+      .orderBy(desc(powerCalibration.measuredOn), desc(powerCalibration.id));
   }
 
   async find(tx: Tx, shopId: string, id: string): Promise<CalibrationView | undefined> {

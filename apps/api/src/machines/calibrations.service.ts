@@ -71,6 +71,11 @@ export class CalibrationsService {
     return view?.calibration;
   }
 
+  /** Every reading of these machines, newest first: a shop reads a meter some times a year. */
+  async readingsOf(tx: Tx, shopId: string, machineIds: readonly string[]): Promise<CalibrationRow[]> {
+    return this.calibrations.ofMachines(tx, shopId, machineIds);
+  }
+
   private async getView(tx: Tx, shopId: string, id: string): Promise<CalibrationView> {
     const view = await this.calibrations.find(tx, shopId, id);
     if (view === undefined) throw new NotFoundError('This calibration is not in the shop. Go back to the machine.');

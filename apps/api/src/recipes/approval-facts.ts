@@ -9,7 +9,8 @@ export type ApprovalFacts = {
   readonly now: Date;
   /** Approved revision of the recipe; null: there is none, or it is this one. */
   readonly current: { readonly number: number | null; readonly steps: readonly MarkStep[]; readonly newestEvidenceAt: Date | null } | null;
-  readonly newestCalibration: RevisionCalibration | null;
+  /** Readings of the machine's power, newest first. */
+  readonly readings: readonly RevisionCalibration[];
   /** Other recipes with the same five keys that have an approved or scheduled revision. */
   readonly mates: readonly { readonly recipeCode: string; readonly scope: RecipeScope }[];
   readonly acknowledgedByAuthor: readonly string[];

@@ -1,7 +1,7 @@
-import { type MeasuredCalibration, workPower } from '@proofplate/recipe-model';
+import { type MeasuredCalibration, type PowerShift, powerShift } from '@proofplate/recipe-model';
 import { type ApprovalCheck, check } from './approval-check';
 import type { ApprovalFacts } from './approval-facts';
-import type { RevisionCalibration, RevisionRecord } from './stored-revision';
+import type { RevisionCalibration, RevisionHead } from './stored-revision';
 
 const MS_PER_DAY = 24 * 60 * 60 * 1000;
 
@@ -28,35 +28,33 @@ export function calibrationCheck({ record, policy, now }: ApprovalFacts): Approv
 }
 
 /** A newer reading that moves the watts of a step by more than the policy allows: the recipe is due for a check. */
-export function powerShiftCheck(facts: ApprovalFacts): ApprovalCheck[] {
-  const { record, newestCalibration, policy } = facts;
-  if (newestCalibration === null || record.calibration === null || newestCalibration.id === record.calibration.id) return [];
-  const shift = largestShiftPercent(record, newestCalibration);
+export function powerShiftCheck({ record, readings, policy }: ApprovalFacts): ApprovalCheck[] {
+  const shift = shiftSinceProof(record, readings);
   if (shift === null) return [];
+  const { shiftPercent, measuredOn } = shift;
   return [
     check('power-shift', 'Power since the calibration', {
-      passes: shift <= policy.powerShiftPercent,
+      passes: Math.abs(shiftPercent) <= policy.powerShiftPercent,
       isAdvisory: true,
-      found: `The reading of ${newestCalibration.measuredOn} moves the watts by ${shift.toFixed(1)} %, limit ${policy.powerShiftPercent} %.`,
+      found: `The reading of ${measuredOn} moves the watts by ${shiftPercent.toFixed(1)} %, limit ${policy.powerShiftPercent} %.`,
       wayOut: 'Check the recipe on the machine.',
     }),
   ];
 }
 
-/** Largest change of a step's watts between the cited and the newest reading; null where a reading does not reach the setting. */
-export function largestShiftPercent(
-  record: Pick<RevisionRecord, 'profile' | 'revision' | 'calibration'>,
-  newest: RevisionCalibration,
-): number | null {
-  const { profile, revision, calibration } = record;
+/** How far the source has moved under a revision since the reading that it cites; readings newest first. */
+export function shiftSinceProof(
+  { profile, revision, calibration }: Pick<RevisionHead, 'profile' | 'revision' | 'calibration'>,
+  readings: readonly RevisionCalibration[],
+): PowerShift | null {
   if (calibration === null) return null;
-  const shifts = revision.content.steps.flatMap(({ parameters: { values: parameters } }) => {
-    const before = workPower({ profile: profile.physical, calibration: asMeasured(calibration), parameters });
-    const after = workPower({ profile: profile.physical, calibration: asMeasured(newest), parameters });
-    const isComparable = before.watts !== null && after.watts !== null && before.basis === 'calibration' && after.basis === 'calibration';
-    return isComparable && before.watts > 0 ? [(Math.abs(after.watts - before.watts) / before.watts) * 100] : [];
+  const cited = readings.findIndex(({ id }) => id === calibration.id);
+  return powerShift({
+    profile: profile.physical,
+    steps: revision.content.steps,
+    cited: asMeasured(calibration),
+    newer: readings.slice(0, Math.max(0, cited)).map((reading) => ({ ...asMeasured(reading), measuredOn: reading.measuredOn })),
   });
-  return shifts.length === 0 ? null : Math.max(...shifts);
 }
 
 /** A stored reading as the model takes it. */

@@ -84,7 +84,10 @@ describe('revisionChecks()', () => {
       revisionChecks(
         factsOf({
           record,
-          newestCalibration: record.calibration && { ...record.calibration, id: 'newer', points: straightPoints(0.2 * factor) },
+          readings:
+            record.calibration === null
+              ? []
+              : [{ ...record.calibration, id: 'newer', points: straightPoints(0.2 * factor) }, record.calibration],
         }),
       ).items.find(({ key }) => key === 'power-shift');
     expect(moved(0.96)).toMatchObject({ passes: true, isAdvisory: true });

@@ -61,7 +61,7 @@ export class ApprovalChecksService {
       policy,
       now: new Date(),
       current: await this.currentOf(tx, shopId, record),
-      newestCalibration: (await this.calibrations.findNewest(tx, shopId, record.recipe.machine.id)) ?? null,
+      readings: await this.calibrations.readingsOf(tx, shopId, [record.recipe.machine.id]),
       mates: await this.revisions.approvedMates(tx, shopId, record),
       acknowledgedByAuthor: acknowledgedByAuthor ?? record.revision.acknowledgedCautionIds,
     };

@@ -170,7 +170,7 @@ export const factsOf = (given: Partial<ApprovalFacts> = {}): ApprovalFacts => ({
   policy: DEFAULT_SHOP_POLICY,
   now: day('2026-06-01'),
   current: null,
-  newestCalibration: null,
+  readings: [],
   mates: [],
   acknowledgedByAuthor: [],
   ...given,
