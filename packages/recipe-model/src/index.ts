@@ -28,8 +28,23 @@ export {
   linkEvent,
   type Sha256,
 } from './ledger/ledger-chain';
+export { type ClosedRange, isAbove, isWithinRange, largestPulseEnergyMj, machineRange } from './numbers/machine-limits';
+export { type AreaMm, markAreaOf } from './numbers/mark-area';
+export { markOfSetting, type NumberedSetting } from './numbers/mark-of-setting';
+export type { Optics } from './numbers/optics';
+export {
+  type DoseCaution,
+  type NumbersGround,
+  type SettingNumber,
+  type SettingNumbers,
+  type StepNumbers,
+  settingNumbers,
+  stepNumbers,
+} from './numbers/setting-numbers';
+export { type SettingRemark, settingRemarks } from './numbers/setting-remarks';
 export { emptyPanelFor } from './panel/empty-panel';
 export { acceptEntered, type Entry, type EntryContext, type EntryRefusal, enterValue } from './panel/enter-value';
+export { neededKeys } from './panel/needed-keys';
 export type { Panel, PanelField } from './panel/panel';
 export { type PanelProblem, panelProblems } from './panel/panel-problems';
 export { showNumber } from './panel/show-number';

@@ -1,4 +1,5 @@
 import { type CalibrationPoint, powerAtPercent, powerCalibration, sourceLimitPower } from '@proofplate/physics';
+import { largestPulseEnergyMj } from '../numbers/machine-limits';
 import type { PhysicalProfile } from '../vocabulary/profile';
 import type { ParameterValues, WorkPower } from '../vocabulary/setting';
 
@@ -38,7 +39,7 @@ export function workPower({ profile, calibration, parameters }: WorkPowerInput):
     if (isBetweenEnds(curve.percent, percent)) return { watts: powerAtPercent(curve, percent), basis: 'calibration' };
   }
   if (frequencyKhz === null) return { watts: (percent / 100) * profile.ratedPowerW, basis: 'not calibrated' };
-  const energyMj = maxPulseEnergyMj(profile, pulseWidthNs);
+  const energyMj = largestPulseEnergyMj(profile, pulseWidthNs);
   if (energyMj === null) return { watts: null, reason: missingEnergy(profile, pulseWidthNs) };
   return { watts: (percent / 100) * sourceLimitPower(profile.ratedPowerW, energyMj, frequencyKhz), basis: 'not calibrated' };
 }
@@ -56,13 +57,6 @@ function isMeasuredThere(calibration: MeasuredCalibration, frequencyKhz: number 
 function isWithin(measured: number | null, set: number | null, share: number): boolean {
   if (measured === null || set === null) return measured === set;
   return Math.abs(set - measured) <= share * Math.abs(measured);
-}
-
-/** The limit at exactly this pulse width, or the one of a source with a single fixed width; a width between two known ones is unknown. */
-function maxPulseEnergyMj({ maxPulseEnergyMj: limits = [] }: PhysicalProfile, pulseWidthNs: number | null): number | null {
-  const atWidth = limits.find((limit) => pulseWidthNs !== null && isWithin(limit.pulseWidthNs, pulseWidthNs, SAME));
-  const fixed = limits.find((limit) => limit.pulseWidthNs === null);
-  return (atWidth ?? fixed)?.energyMj ?? null;
 }
 
 function missingEnergy({ maxPulseEnergyMj: limits = [] }: PhysicalProfile, pulseWidthNs: number | null): string {
