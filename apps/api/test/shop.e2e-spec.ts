@@ -49,6 +49,16 @@ describe('PATCH /api/shop', () => {
     expect(answer.body).not.toContain(TEST_PASSWORD);
   });
 
+  it('refuses a policy that asks for a second factor, which accounts do not have yet', async () => {
+    const { owner } = await makeStaffedShop(test);
+    const policy = { ...DEFAULT_SHOP_POLICY, secondFactorForSigning: true };
+    const problem = expectProblem(await patch(owner.headers, { policy, password: TEST_PASSWORD }), 422, 'invalid-fields');
+    expect(problem.errors).toEqual([{ pointer: '#/policy/secondFactorForSigning', detail: expect.stringContaining('Leave this off') }]);
+    expect((await get(owner.headers)).json()).toMatchObject({ policy: DEFAULT_SHOP_POLICY, version: 1 });
+    const word = await patch(owner.headers, { policy: { ...policy, secondFactorForSigning: 'no' }, password: TEST_PASSWORD });
+    expect(expectProblem(word, 422, 'invalid-fields').errors).toMatchObject([{ detail: 'Choose yes or no.' }]);
+  });
+
   it('needs no password for a policy that stays as it is', async () => {
     const { owner } = await makeStaffedShop(test);
     expect((await patch(owner.headers, { name: 'Same Rules', policy: DEFAULT_SHOP_POLICY })).statusCode).toBe(200);

@@ -2114,7 +2114,7 @@ export interface components {
             calibrationAgeDays: number;
             /** @description Shift of the calibrated power, %, beyond which recipes are check due */
             powerShiftPercent: number;
-            /** @description True: signing needs a second factor */
+            /** @description Always false: accounts have no second factor yet, and true is refused */
             secondFactorForSigning: boolean;
         };
         ShopDto: {

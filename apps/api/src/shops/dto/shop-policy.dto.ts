@@ -1,10 +1,12 @@
 import { ApiProperty } from '@nestjs/swagger';
-import { IsBoolean, IsInt, IsNumber, Max, Min } from 'class-validator';
+import { Equals, IsBoolean, IsInt, IsNumber, Max, Min } from 'class-validator';
 import type { ShopPolicy } from '../shop-policy';
 
 const MAX_CONFIRMATION_MARKS = 100;
 const MAX_DAYS = 3_650;
 const MAX_POWER_SHIFT_PERCENT = 50;
+/** A policy that asks for what nobody can give would stop all signing. */
+const NO_SECOND_FACTOR = 'Leave this off: accounts have no second factor yet. Signing asks for the password.';
 
 export class ShopPolicyDto implements ShopPolicy {
   @ApiProperty({ minimum: 1, maximum: MAX_CONFIRMATION_MARKS, description: 'Marks that a confirmation needs at least' })
@@ -47,7 +49,8 @@ export class ShopPolicyDto implements ShopPolicy {
   @Max(MAX_POWER_SHIFT_PERCENT)
   powerShiftPercent: number;
 
-  @ApiProperty({ description: 'True: signing needs a second factor' })
+  @ApiProperty({ description: 'Always false: accounts have no second factor yet, and true is refused' })
   @IsBoolean()
+  @Equals(false, { message: NO_SECOND_FACTOR })
   secondFactorForSigning: boolean;
 }

@@ -9,7 +9,8 @@ import { Switch } from '../../../components/switch';
 import { changeShop, type Shop, type ShopPolicy } from '../shops.api';
 
 type PolicyNumber = 'minimumConfirmationMarks' | 'reviewEveryDays' | 'calibrationAgeDays' | 'powerShiftPercent';
-type PolicySwitch = Exclude<keyof ShopPolicy, PolicyNumber>;
+/** Accounts have no second factor yet, so the rules cannot ask for one. */
+type PolicySwitch = Exclude<keyof ShopPolicy, PolicyNumber | 'secondFactorForSigning'>;
 type Values = { policy: Record<PolicyNumber, string> & Record<PolicySwitch, boolean>; password: string };
 
 type NumberRule = { name: PolicyNumber; label: string; unit: string; least: number; most: number; isWhole: boolean; help?: string };
@@ -31,7 +32,6 @@ const SWITCHES: readonly { name: PolicySwitch; label: string; help: string }[] =
   { name: 'authorMaySign', label: 'Authors may sign their own revisions', help: 'Every print of such a revision says so.' },
   { name: 'photoRequired', label: 'Approval needs a photo', help: 'Of the coupon or the confirmation it rests on.' },
   { name: 'overdueBlocks', label: 'An overdue setting blocks runs', help: 'Off: it is shown as due and may be run.' },
-  { name: 'secondFactorForSigning', label: 'Signing needs a second factor', help: 'A one-time code besides the password.' },
 ];
 
 const LABELS: Readonly<Record<string, string>> = {
@@ -99,7 +99,7 @@ function readNumber(text: string): number {
   return text.trim() === '' ? Number.NaN : Number(text.trim().replace(',', '.'));
 }
 
-function typed(policy: ShopPolicy): Values['policy'] {
+function typed({ secondFactorForSigning: _, ...policy }: ShopPolicy): Values['policy'] {
   return {
     ...policy,
     minimumConfirmationMarks: String(policy.minimumConfirmationMarks),
@@ -112,6 +112,7 @@ function typed(policy: ShopPolicy): Values['policy'] {
 function read(policy: Values['policy']): ShopPolicy {
   return {
     ...policy,
+    secondFactorForSigning: false,
     minimumConfirmationMarks: readNumber(policy.minimumConfirmationMarks),
     reviewEveryDays: readNumber(policy.reviewEveryDays),
     calibrationAgeDays: readNumber(policy.calibrationAgeDays),
