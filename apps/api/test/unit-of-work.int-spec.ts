@@ -1,5 +1,8 @@
+import { inspect } from 'node:util';
+import { sql } from 'drizzle-orm';
 import { UnavailableError } from '../src/common/errors/domain-error';
 import { Codes } from '../src/database/codes.repository';
+import type { Tx } from '../src/database/unit-of-work';
 import { createTestApp, type TestApp } from './support/app';
 import { asSuperuser } from './support/database';
 import { makeShop, type TestShop } from './support/factories';
@@ -46,6 +49,20 @@ describe('UnitOfWork', () => {
     await expect(killedOnce('read')).resolves.toBe('answered');
     await expect(killedOnce('run')).rejects.toThrow();
     expect(attempts).toBe(1);
+  });
+
+  it('tells of a failed statement without the values that were sent with it', async () => {
+    const secret = 'token-that-nobody-may-read';
+    const failing = (db: Pick<Tx, 'execute'>) => db.execute(sql`select ${secret}::text, 1 / 0`);
+    for (const run of [
+      () => test.unitOfWork.run({ shopId: shop.id }, failing),
+      () => test.unitOfWork.read({ shopId: shop.id }, failing),
+      () => test.unitOfWork.outsideShop(failing),
+    ]) {
+      const error: unknown = await run().catch((failure: unknown) => failure);
+      expect(error).toMatchObject({ cause: { code: '22012' } });
+      expect(inspect(error)).not.toContain(secret);
+    }
   });
 
   it('gives up a statement at its limit', async () => {

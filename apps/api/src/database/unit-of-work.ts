@@ -9,6 +9,7 @@ import { type IdempotencyContext, idempotencyStorage } from '../common/idempoten
 import { Env } from '../config/env.validation';
 import { expectLastActs, runLastActs } from './before-commit';
 import { claimKey, keepAnswer } from './idempotency.repository';
+import { withoutValues } from './without-values';
 
 export type { Actor } from '../common/actor';
 export type { Tx };
@@ -57,7 +58,11 @@ export class UnitOfWork {
    * are whole acts, so none of them needs a transaction around it.
    */
   async outsideShop<T>(work: (db: Executor) => Promise<T>): Promise<T> {
-    return work(this.handle.db);
+    try {
+      return await work(this.handle.db);
+    } catch (error) {
+      throw withoutValues(error);
+    }
   }
 
   private async transact<T>(actor: Tenant, work: (tx: Tx) => Promise<T>, options: RunOptions): Promise<T> {
@@ -65,9 +70,11 @@ export class UnitOfWork {
       return await this.attempt(actor, work, options);
     } catch (error) {
       const mayRepeat = options.readOnly === true && isConnectionLoss(error);
-      if (mayRepeat) return this.attempt(actor, work, options);
-      throw error;
+      if (!mayRepeat) throw withoutValues(error);
     }
+    return this.attempt(actor, work, options).catch((error: unknown) => {
+      throw withoutValues(error);
+    });
   }
 
   private attempt<T>(actor: Tenant, work: (tx: Tx) => Promise<T>, options: RunOptions): Promise<T> {
