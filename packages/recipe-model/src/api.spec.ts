@@ -87,6 +87,7 @@ describe('the exports of recipe-model', () => {
       'nextRevisionState',
       'panelProblems',
       'parameterClassOf',
+      'powerShift',
       'rangesOverlap',
       'roleAtLeast',
       'roundToPanel',
