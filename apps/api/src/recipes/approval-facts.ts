@@ -16,7 +16,10 @@ export type ApprovalFacts = {
   readonly acknowledgedByAuthor: readonly string[];
 };
 
-/** Same material, finish, effect, machine in its physical state, and lens. */
+/**
+ * Same material, finish, effect, machine in its physical state, and lens. A plate burnt before it was logged may be of a machine that was
+ * changed since: what nobody knows is not the same.
+ */
 export function isSameWork({ coupon }: EvidenceCell, { recipe, profile }: RevisionRecord): boolean {
   const { keys } = coupon;
   return (
@@ -25,6 +28,7 @@ export function isSameWork({ coupon }: EvidenceCell, { recipe, profile }: Revisi
     keys.effectId === recipe.effect.id &&
     keys.machineId === recipe.machine.id &&
     keys.lensId === recipe.lens.id &&
-    coupon.physicalNumber === profile.physicalNumber
+    coupon.physicalNumber === profile.physicalNumber &&
+    !coupon.unknownFields.includes('profile')
   );
 }

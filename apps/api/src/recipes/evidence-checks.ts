@@ -17,7 +17,7 @@ export function basisCheck(record: RevisionRecord): ApprovalCheck {
       ? 'No cell is cited.'
       : sealed.length === 0
         ? `${namesOf(record.basis)}: the coupon is not sealed.`
-        : `${namesOf(sealed)}: another material, finish, effect, machine or lens, or the machine was changed since.`;
+        : `${namesOf(sealed)}: another material, finish, effect, machine or lens, or the machine was changed since, or nobody knows.`;
   return check('basis', 'Basis', { passes, found, wayOut: 'Cite a cell of a sealed coupon of the same work.' });
 }
 
