@@ -48,6 +48,12 @@ describe('confirmationOf()', () => {
     expect(other.count).toBe(0);
   });
 
+  it('takes no undated mark for a later one, not even where the date of the basis is not known', () => {
+    const basis = [cellOf('C-0001', { coupon: { markedAt: null } })];
+    expect(confirmationOf({ ...input, basis }).count).toBe(3);
+    expect(confirmationOf({ ...input, basis, confirmation: proofCells(3, { markedAt: null }) }).count).toBe(0);
+  });
+
   it('never takes another cell of the basis coupon for a proof', () => {
     const basis = [cellOf('C-0001'), cellOf('C-0002', { coupon: { markedAt: day('2026-04-01') } })];
     expect(confirmationOf({ ...input, basis }).count).toBe(0);

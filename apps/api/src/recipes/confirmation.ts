@@ -146,5 +146,5 @@ function latest(dates: readonly (Date | null)[]): Date | null {
   return known.length === 0 ? null : new Date(Math.max(...known));
 }
 
-/** Without a basis there is nothing to be later than; a mark of unknown date is never later. */
-const isLater = (madeAt: Date | null, than: Date | null) => than === null || (madeAt !== null && madeAt > than);
+/** A mark of unknown date is never later; where the date of the basis is not known, every dated mark is. */
+const isLater = (madeAt: Date | null, than: Date | null) => madeAt !== null && (than === null || madeAt > than);
