@@ -10,7 +10,6 @@ import { inspectionOf, makeMarkedCoupon, putPhoto, rateAll, setPhotoState } from
 import { expectProblem, pointersOf } from './support/problem';
 
 // A marked coupon takes ten requests, more than the usual time on a busy machine.
-jest.setTimeout(30_000);
 
 let test: TestApp;
 let shop: PlanningShop;

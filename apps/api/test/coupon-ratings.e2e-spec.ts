@@ -8,7 +8,6 @@ import { inspectionOf, makeMarkedCoupon } from './support/inspections';
 import { expectProblem, pointersOf } from './support/problem';
 
 // A marked coupon takes ten requests, more than the usual time on a busy machine.
-jest.setTimeout(30_000);
 
 let test: TestApp;
 let shop: PlanningShop;

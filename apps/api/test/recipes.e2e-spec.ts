@@ -22,8 +22,6 @@ import {
   read,
 } from './support/recipes';
 
-jest.setTimeout(30_000);
-
 let test: TestApp;
 let shop: RecipeShop;
 let elsewhere: RecipeShop;

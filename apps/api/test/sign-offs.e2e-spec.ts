@@ -27,8 +27,6 @@ import {
   read,
 } from './support/recipes';
 
-jest.setTimeout(30_000);
-
 let test: TestApp;
 let elsewhere: RecipeShop;
 let shop: RecipeShop;

@@ -27,8 +27,6 @@ import {
   read,
 } from './support/recipes';
 
-jest.setTimeout(60_000);
-
 const RACES = 6;
 
 let test: TestApp;

@@ -13,7 +13,7 @@ function nodeProject(displayName, rootDir, extra = {}) {
     modulePathIgnorePatterns: ['<rootDir>/dist/'],
     testEnvironmentOptions: { customExportConditions: ['@proofplate/source', 'node', 'require', 'default'] },
     transform: tsJest(join(rootDir, 'tsconfig.json')),
-    setupFilesAfterEnv: [join(__dirname, 'property-seed.cjs')],
+    setupFilesAfterEnv: [join(__dirname, 'each-test-file.cjs')],
     ...extra,
   };
 }

@@ -15,7 +15,6 @@ const preview = {
 };
 
 // Every test draws the whole form and its plate.
-jest.setTimeout(30_000);
 
 let server: ReturnType<typeof fakeServer>;
 beforeEach(() => openSession(makeSessionAnswer('operator')));

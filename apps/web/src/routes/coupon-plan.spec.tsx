@@ -40,7 +40,6 @@ const choices = {
 };
 
 // Every test draws the whole form and its plate.
-jest.setTimeout(30_000);
 
 let server: ReturnType<typeof fakeServer>;
 beforeEach(() => openSession(makeSessionAnswer('operator')));

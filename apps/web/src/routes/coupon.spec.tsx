@@ -7,7 +7,6 @@ import { makeSessionAnswer } from '../testing/sessions';
 import { Component as CouponPage } from './coupon';
 
 // The page is large and jsdom slow: a test of several presses takes its time on a busy machine.
-jest.setTimeout(30_000);
 configure({ asyncUtilTimeout: 10_000 });
 
 // Each test has a coupon of its own: a read that the test before left under way must not be taken for this one's.

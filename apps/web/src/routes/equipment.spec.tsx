@@ -11,7 +11,6 @@ import { Component as MachinePage } from './equipment-machine';
 import { Component as NewMachine } from './equipment-machine-new';
 
 // A big form: finding roles in it takes jsdom a while on a slow machine.
-jest.setTimeout(30_000);
 
 const inShop = (page: React.ReactNode) => <StatusLineProvider>{page}</StatusLineProvider>;
 const routes = [

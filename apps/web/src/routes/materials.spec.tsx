@@ -14,7 +14,6 @@ import { Component as Cautions } from './materials-cautions';
 import { Component as Effects } from './materials-effects';
 
 // Typing into whole forms takes jsdom a while on a slow machine.
-jest.setTimeout(30_000);
 
 const inShop = (page: React.ReactNode) => <StatusLineProvider>{page}</StatusLineProvider>;
 const routes = [

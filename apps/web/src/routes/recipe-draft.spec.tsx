@@ -16,7 +16,6 @@ const draft = makeRevision({
   allowedActions: ['edit', 'discard', 'submit', 'start-confirmation'],
 });
 // A draft saves itself after a pause in the typing; the page has some sixty fields.
-jest.setTimeout(30_000);
 const PATCH = 'PATCH /api/revisions/draft-1';
 
 let server: ReturnType<typeof fakeServer>;

@@ -7,7 +7,6 @@ import { makeRevision } from '../testing/revisions';
 import { makeSessionAnswer } from '../testing/sessions';
 import { Component as NewRecipe } from './recipe-new';
 
-jest.setTimeout(30_000);
 const POST = 'POST /api/recipes';
 const list = (...items: object[]) => ({ body: { items, nextCursor: null } });
 const revision = makeRevision({ id: 'draft-9', number: null, state: 'draft', route: 'customer-given' });

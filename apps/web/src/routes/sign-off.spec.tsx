@@ -52,8 +52,6 @@ const comparison = {
   ],
 };
 
-jest.setTimeout(30_000);
-
 let server: ReturnType<typeof fakeServer>;
 beforeEach(() => openSession(makeSessionAnswer('lead')));
 afterEach(() => {
