@@ -50,6 +50,31 @@ export { type PanelProblem, panelProblems } from './panel/panel-problems';
 export { showNumber } from './panel/show-number';
 export { type ShownValue, showValue } from './panel/show-value';
 export { isShowable, nearestShowable, roundToPanel } from './panel/showable';
+export {
+  type EnteredLength,
+  type EnteredPart,
+  FOCUS_ALLOWANCE_LABELS,
+  FOCUS_ALLOWANCES,
+  FOCUS_PLACE_LABELS,
+  FOCUS_PLACES,
+  type FocusAllowance,
+  type FocusPlace,
+  LENGTH_UNITS,
+  LENGTHS_OF_SHAPE,
+  type LengthUnit,
+  PART_SHAPE_LABELS,
+  PART_SHAPES,
+  PART_SIDE_LABELS,
+  PART_SIDES,
+  type PartField,
+  type PartGround,
+  type PartLength,
+  type PartProblem,
+  type PartShape,
+  type PartSide,
+} from './part/entered-part';
+export { lengthIn, lengthMm, lengthWords } from './part/part-lengths';
+export { PART_INSIDE_NOT_CHECKED, PART_NOT_CHECKED, type PartSetUp, partSetUp } from './part/part-set-up';
 export { type DatedCalibration, type PowerShift, type PowerShiftInput, powerShift } from './power/power-shift';
 export { CALIBRATION_FREQUENCY_TOLERANCE, type MeasuredCalibration, type WorkPowerInput, workPower } from './power/work-power';
 export { matchesWords, wordsOf } from './search/matches-words';
@@ -73,6 +98,22 @@ export {
   type RevisionAction,
   type RevisionState,
 } from './states/revision-state';
+export type {
+  FrequencyBand,
+  FrequencyInterval,
+  KeptNumber,
+  TransferCalibration,
+  TransferChoice,
+  TransferInput,
+  TransferNumbers,
+  TransferOutcome,
+  TransferPlace,
+  TransferProposal,
+  TransferReason,
+  TransferResult,
+  TransferStep,
+} from './transfer/transfer-ground';
+export { isDraftable, transferSetting } from './transfer/transfer-setting';
 export { COMPARISON_LABELS, COMPARISONS, type Comparison, type Criterion } from './vocabulary/criteria';
 export { codesOf, isCodeOf, type Labels } from './vocabulary/labelled';
 export {

@@ -49,7 +49,8 @@ function isBetweenEnds(measured: readonly number[], percent: number): boolean {
   return percent >= measured[0] && percent <= measured[measured.length - 1];
 }
 
-function isMeasuredThere(calibration: MeasuredCalibration, frequencyKhz: number | null, pulseWidthNs: number | null): boolean {
+/** True if a table was measured at this pulse width and near enough to this frequency; null where the source has no such setting. */
+export function isMeasuredThere(calibration: MeasuredCalibration, frequencyKhz: number | null, pulseWidthNs: number | null): boolean {
   if (!isWithin(calibration.pulseWidthNs, pulseWidthNs, SAME)) return false;
   return isWithin(calibration.frequencyKhz, frequencyKhz, CALIBRATION_FREQUENCY_TOLERANCE + SAME);
 }
