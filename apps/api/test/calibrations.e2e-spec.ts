@@ -77,6 +77,11 @@ describe('POST /api/machines/:id/calibrations', () => {
     expect(pointersOf(expectProblem(answer, 422, 'invalid-fields'))).toEqual(pointers);
   });
 
+  it('refuses days that no calendar has', async () => {
+    const answer = await post(reading({ measuredOn: '2026-02-30', meterDueOn: '2027-02-29' }));
+    expect(pointersOf(expectProblem(answer, 422, 'invalid-fields'))).toEqual(['#/measuredOn', '#/meterDueOn']);
+  });
+
   it('is for leads; another shop’s machine is not there', async () => {
     expectProblem(await post(reading(), shop.operator.headers), 403, 'not-permitted');
     expectProblem(await post(reading(), elsewhere.lead.headers), 404, 'not-found');

@@ -116,6 +116,8 @@ describe('POST /api/coupons/import', () => {
       expectProblem(await post(url, known(), elsewhere.operator.headers), 404, 'not-found');
       const bad = expectProblem(await post(url, known({ markedOn: 'long ago', fill: 'dots' })), 422, 'invalid-fields');
       expect(pointersOf(bad)).toEqual(['#/fill', '#/markedOn']);
+      const week = expectProblem(await post(url, known({ markedOn: '2019-W26' })), 422, 'invalid-fields');
+      expect(pointersOf(week)).toEqual(['#/markedOn']);
     },
   );
 });

@@ -17,8 +17,6 @@ const FIXED: Readonly<Record<string, string>> = {
   nestedValidation: 'Give a group of fields.',
   isEmail: 'Enter an e-mail address, such as name@example.com.',
   isUuid: 'This does not name a stored item. Choose it again.',
-  isDateString: 'Enter a date and time, such as 2026-03-31T08:30:00Z.',
-  isIso8601: 'Enter a date and time, such as 2026-03-31T08:30:00Z.',
   isTimeZone: 'Choose a time zone, such as Europe/Berlin.',
   isLocale: 'Choose a language, such as en-GB.',
   arrayUnique: 'Nothing may stand in this list twice.',

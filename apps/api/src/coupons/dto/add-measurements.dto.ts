@@ -1,7 +1,8 @@
 import { ApiProperty, ApiPropertyOptional } from '@nestjs/swagger';
 import { MEASUREMENT_METHODS, MEASUREMENT_QUANTITIES, type MeasurementMethod, type MeasurementQuantity } from '@proofplate/recipe-model';
 import { Type } from 'class-transformer';
-import { ArrayMaxSize, ArrayMinSize, IsArray, IsDateString, IsIn, IsOptional, IsUUID, ValidateNested } from 'class-validator';
+import { ArrayMaxSize, ArrayMinSize, IsArray, IsIn, IsOptional, IsUUID, ValidateNested } from 'class-validator';
+import { IsMoment } from '../../common/decorators/is-moment';
 import { NumberBetween } from '../../common/decorators/number-between.decorator';
 import { TrimmedText } from '../../common/decorators/trimmed-text.decorator';
 import { MAX_CELLS_AT_ONCE } from './batch-limits';
@@ -100,7 +101,7 @@ export class NewMeasurementDto {
 
   @ApiPropertyOptional({ format: 'date-time', description: 'When it was measured; absent: now' })
   @IsOptional()
-  @IsDateString({ strict: true })
+  @IsMoment()
   measuredAt?: string;
 
   @ApiPropertyOptional({ format: 'uuid', description: 'Earlier measurement of the same cell and quantity that this takes the place of' })

@@ -8,7 +8,6 @@ import {
   IsBoolean,
   IsIn,
   IsInt,
-  IsISO8601,
   IsOptional,
   IsString,
   Max,
@@ -16,6 +15,7 @@ import {
   Min,
   ValidateNested,
 } from 'class-validator';
+import { IsDay } from '../../common/decorators/is-day';
 import { NumberBetween } from '../../common/decorators/number-between.decorator';
 import { DoseDto } from './coupon.dto';
 import { TypedValueDto, TypedValuesDto } from './entered-setting.dto';
@@ -23,7 +23,6 @@ import { PARAMETER_KEY_ENUM, ParameterSetDto } from './parameter-set.dto';
 import { CELL_MM, CouponSubjectDto, GAP_MM, MAX_LEVELS_ON_PLATE } from './plan-coupon.dto';
 
 const MAX_TABLE_LENGTH = 100_000;
-const DAY_LENGTH = 10;
 
 /** A factor whose levels somebody still knows. */
 export class KnownFactorDto {
@@ -70,8 +69,7 @@ export class KnownGridDto {
 export class ImportCouponDto extends CouponSubjectDto {
   @ApiPropertyOptional({ format: 'date', description: 'Day on which it was marked; absent: not known' })
   @IsOptional()
-  @IsISO8601({ strict: true }, { message: 'Enter a day such as 2019-06-30.' })
-  @MaxLength(DAY_LENGTH, { message: 'Enter a day such as 2019-06-30.' })
+  @IsDay()
   markedOn?: string;
 
   @ApiPropertyOptional({ description: 'true: the caller marked it; otherwise it is not known who did' })

@@ -1,10 +1,10 @@
 import { ApiProperty, ApiPropertyOptional } from '@nestjs/swagger';
 import { Type } from 'class-transformer';
-import { ArrayMaxSize, ArrayMinSize, IsArray, IsOptional, Matches, ValidateNested } from 'class-validator';
+import { ArrayMaxSize, ArrayMinSize, IsArray, IsOptional, ValidateNested } from 'class-validator';
+import { IsDay } from '../../common/decorators/is-day';
 import { NumberBetween } from '../../common/decorators/number-between.decorator';
 import { RequiredText, TrimmedText } from '../../common/decorators/trimmed-text.decorator';
 import { PageOf, PageQuery } from '../../common/pagination/page';
-import { DAY } from './machine-lens.dto';
 import { FREQUENCY_LIMITS_KHZ, PULSE_WIDTH_LIMITS_NS, WAVELENGTH_LIMITS_NM } from './physical-profile.dto';
 
 export const MIN_POINTS = 3;
@@ -24,7 +24,7 @@ export class CalibrationPointDto {
 
 export class CreateCalibrationDto {
   @ApiProperty({ description: 'Day of the reading', format: 'date' })
-  @Matches(DAY, { message: 'Enter a day, such as 2026-03-31.' })
+  @IsDay()
   measuredOn: string;
 
   @ApiProperty({ description: 'Meter and its number', maxLength: MAX_METER_LENGTH })
@@ -33,7 +33,7 @@ export class CreateCalibrationDto {
 
   @ApiPropertyOptional({ type: String, nullable: true, format: 'date', description: 'Day on which the meter’s own calibration ends' })
   @IsOptional()
-  @Matches(DAY, { message: 'Enter a day, such as 2026-03-31.' })
+  @IsDay()
   meterDueOn?: string | null;
 
   @ApiProperty({ description: 'Wavelength that the meter was set to, nm' })

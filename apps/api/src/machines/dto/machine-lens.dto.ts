@@ -1,11 +1,11 @@
 import { ApiProperty, ApiPropertyOptional } from '@nestjs/swagger';
-import { IsOptional, IsUUID, Matches } from 'class-validator';
+import { IsOptional, IsUUID } from 'class-validator';
+import { IsDay } from '../../common/decorators/is-day';
 import { NumberBetween } from '../../common/decorators/number-between.decorator';
 import { TrimmedText } from '../../common/decorators/trimmed-text.decorator';
 
 const MAX_FOCUS_METHOD_LENGTH = 300;
 const MAX_SPOT_METHOD_LENGTH = 200;
-export const DAY = /^\d{4}-(0[1-9]|1[0-2])-(0[1-9]|[12]\d|3[01])$/;
 
 /** Changes of a lens on a machine. Null forgets a value. */
 export class UpdateMachineLensDto {
@@ -31,7 +31,7 @@ export class UpdateMachineLensDto {
 
   @ApiPropertyOptional({ type: String, nullable: true, format: 'date', description: 'Day of that measurement' })
   @IsOptional()
-  @Matches(DAY, { message: 'Enter a day, such as 2026-03-31.' })
+  @IsDay()
   spotMeasuredOn?: string | null;
 }
 

@@ -1,7 +1,8 @@
 import { ApiPropertyOptional } from '@nestjs/swagger';
 import { ROUTE_KINDS, type RouteKind } from '@proofplate/recipe-model';
 import { Type } from 'class-transformer';
-import { ArrayMaxSize, IsArray, IsIn, IsISO8601, IsOptional, IsUUID, ValidateIf, ValidateNested } from 'class-validator';
+import { ArrayMaxSize, IsArray, IsIn, IsOptional, IsUUID, ValidateIf, ValidateNested } from 'class-validator';
+import { IsMoment } from '../../common/decorators/is-moment';
 import { TrimmedText } from '../../common/decorators/trimmed-text.decorator';
 import { MAX_REASON_LENGTH, MAX_STEPS } from './create-recipe.dto';
 import { EnterStepDto, SetUpStepDto } from './mark-step.dto';
@@ -58,7 +59,7 @@ export class UpdateRevisionDto {
 
   @ApiPropertyOptional({ type: String, nullable: true, format: 'date-time', description: 'When it takes effect; null: with its approval' })
   @ValidateIf(isGiven)
-  @IsISO8601({ strict: true }, { message: 'Enter a date and time, such as 2026-03-31T08:30:00Z.' })
+  @IsMoment()
   effectiveFrom?: string | null;
 
   @ApiPropertyOptional({
@@ -68,7 +69,7 @@ export class UpdateRevisionDto {
     description: 'When it is to be proved again; null: by the shop’s policy',
   })
   @ValidateIf(isGiven)
-  @IsISO8601({ strict: true }, { message: 'Enter a date and time, such as 2026-03-31T08:30:00Z.' })
+  @IsMoment()
   reviewDue?: string | null;
 
   @ApiPropertyOptional({ type: String, nullable: true, format: 'uuid', description: 'Power calibration of the machine; null: none' })

@@ -1,5 +1,6 @@
 import { ApiProperty, ApiPropertyOptional } from '@nestjs/swagger';
-import { IsInt, IsISO8601, IsOptional, IsUUID, Max, Min } from 'class-validator';
+import { IsInt, IsOptional, IsUUID, Max, Min } from 'class-validator';
+import { IsMoment } from '../../common/decorators/is-moment';
 import { RequiredText } from '../../common/decorators/trimmed-text.decorator';
 import { PageOf, PageQuery } from '../../common/pagination/page';
 
@@ -22,7 +23,7 @@ export class GrantDeviationDto {
 
   @ApiPropertyOptional({ format: 'date-time', description: 'Ends by itself at this time' })
   @IsOptional()
-  @IsISO8601({ strict: true }, { message: 'Give the end as a date and a time.' })
+  @IsMoment()
   endsAt?: string;
 
   @ApiPropertyOptional({ description: 'Ends by itself after so many parts, good and scrapped' })

@@ -1,12 +1,12 @@
 import { ApiProperty, ApiPropertyOptional } from '@nestjs/swagger';
-import { IsIn, IsISO8601, IsOptional, IsUUID, Matches } from 'class-validator';
+import { IsIn, IsOptional, IsUUID } from 'class-validator';
+import { IsDay } from '../../common/decorators/is-day';
 import { RequiredText, TrimmedText } from '../../common/decorators/trimmed-text.decorator';
 import { PageOf, PageQuery } from '../../common/pagination/page';
 import { NamedDto } from '../../coupons/dto/coupon.dto';
 
 const MAX_NOTE_LENGTH = 1000;
 const MAX_REFERENCE_LENGTH = 80;
-const NEEDED_ON_MESSAGE = 'Give the day as year, month and day, such as 2026-05-19.';
 export const REQUEST_STATES = ['open', 'answered', 'closed'] as const;
 export type RequestState = (typeof REQUEST_STATES)[number];
 
@@ -42,8 +42,7 @@ export class AskForSettingDto {
 
   @ApiPropertyOptional({ format: 'date', description: 'Day when it is needed' })
   @IsOptional()
-  @IsISO8601({ strict: true }, { message: NEEDED_ON_MESSAGE })
-  @Matches(/^\d{4}-\d{2}-\d{2}$/u, { message: NEEDED_ON_MESSAGE })
+  @IsDay()
   neededOn?: string;
 
   @ApiPropertyOptional({ description: 'Remark', maxLength: MAX_NOTE_LENGTH, default: '' })
