@@ -187,6 +187,7 @@ const RECIPES: readonly RightsRow[] = [
     answer: '422 invalid-fields #/materialId',
   }),
   row('POST /api/recipes/from-cell', 'operator', NO_KEY, { body: { couponId: '{coupon}', cellId: '{cell}' } }),
+  read('/api/recipes/power-shifts', 'operator'),
   read('/api/recipes/:recipeId', 'operator'),
   row('PATCH /api/recipes/:recipeId', 'operator', NO_TAG, { body: { title: 'Other' } }),
   row('POST /api/recipes/:recipeId/drafts', 'operator', NO_KEY, { body: {} }),

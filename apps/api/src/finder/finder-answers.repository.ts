@@ -1,7 +1,7 @@
 import { Injectable } from '@nestjs/common';
 import type { Tx } from '@proofplate/db';
 import type { Criterion, Panel, PhysicalProfile, RevisionContent, RouteKind } from '@proofplate/recipe-model';
-import { sql } from 'drizzle-orm';
+import { type SQL, sql } from 'drizzle-orm';
 
 export type HoldRow = { id: string; subject: 'recipe' | 'machine'; reason: string; placedBy: string; placedAt: string };
 export type SignatureRow = { printedName: string; signedAt: string; isByAuthor: boolean };
@@ -28,6 +28,12 @@ export type ReferenceCellRow = {
   measurements: CellMeasurementRow[];
   photo: PhotoRow | null;
 };
+export type ReadingRow = {
+  measuredOn: string;
+  frequencyKhz: number | null;
+  pulseWidthNs: number | null;
+  points: { percent: number; watts: number }[];
+};
 export type AnswerRow = {
   recipeId: string;
   revisionId: string;
@@ -46,6 +52,10 @@ export type AnswerRow = {
   holds: HoldRow[];
   reference: ReferenceCellRow | null;
   focus: { workingDistanceMm: number | null; focusMethod: string } | null;
+  calibration: ReadingRow | null;
+  /** Newest first. */
+  laterReadings: ReadingRow[];
+  powerShiftPercent: number;
 };
 
 @Injectable()
@@ -70,16 +80,28 @@ export class FinderAnswersRepository {
             and (h.recipe_id = r.id or h.machine_id = r.machine_id)), '[]'::json) as holds,
         (select json_build_object('workingDistanceMm', ml.working_distance_mm, 'focusMethod', ml.focus_method) from machine_lens ml
           where ml.shop_id = r.shop_id and ml.machine_id = r.machine_id and ml.lens_id = r.lens_id) as focus,
+        case when k.id is null then null else ${readingOf(sql`k`)} end as calibration,
+        coalesce((select json_agg(${readingOf(sql`n`)} order by n.measured_on desc, n.id desc) from power_calibration n
+          where n.shop_id = k.shop_id and n.machine_id = k.machine_id and (n.measured_on, n.id) > (k.measured_on, k.id)), '[]'::json)
+          as "laterReadings",
+        coalesce((s.policy ->> 'powerShiftPercent')::double precision, 0) as "powerShiftPercent",
         (${referenceCell}) as reference
       from revision v
       join recipe r on r.shop_id = v.shop_id and r.id = v.recipe_id
       join shop s on s.id = v.shop_id
       join machine m on m.shop_id = r.shop_id and m.id = r.machine_id
       join machine_profile p on p.shop_id = v.shop_id and p.id = v.profile_id
+      left join power_calibration k on k.shop_id = v.shop_id and k.id = v.calibration_id
       join machine_profile present on present.shop_id = m.shop_id and present.machine_id = m.id and present.number = m.profile_number
       where v.shop_id = ${shopId} and (v.state = 'approved' or (v.state = 'scheduled' and v.effective_from <= now())) and v.id in (${ids})`);
     return [...rows];
   }
+}
+
+/** A reading of the power meter as the model weighs it. */
+function readingOf(table: SQL): SQL {
+  return sql`json_build_object('measuredOn', ${table}.measured_on, 'frequencyKhz', ${table}.frequency_khz,
+    'pulseWidthNs', ${table}.pulse_width_ns, 'points', ${table}.points)`;
 }
 
 /** The best rated cell that the setting comes from; without one, a cell that proved it. */

@@ -1,6 +1,8 @@
-import { type Criterion, showNumber } from '@proofplate/recipe-model';
+import { type Criterion, powerShift, showNumber } from '@proofplate/recipe-model';
 import type { Actor } from '../common/actor';
 import type { PhotoUrlsDto } from '../photos/dto/photo.dto';
+import { asMeasured } from '../recipes/calibration-checks';
+import type { PowerShiftDto } from '../recipes/dto/power-shift.dto';
 import type { FinderAnswerDto, FinderKeysDto, FinderRecipeDto, ReferenceCellDto, ReferencePhotoDto } from './dto/finder.dto';
 import { answerActions } from './finder.policy';
 import type { AnswerRow, PhotoRow, ReferenceCellRow } from './finder-answers.repository';
@@ -37,6 +39,7 @@ export function toAnswer(
     signature: row.signature === null ? null : { ...row.signature, signedAt: iso(row.signature.signedAt) },
     holdsUntil: row.reviewDue === null ? null : iso(row.reviewDue),
     isOverdue: row.isOverdue,
+    checkDue: checkDueOf(row),
     contentHash: row.contentHash,
     blockedBecause,
     allowedActions: answerActions(actor, { isBlocked: blockedBecause.length > 0, isHeld: row.holds.length > 0 }),
@@ -53,6 +56,15 @@ export function toReferenceCell(row: ReferenceCellRow, urlsOf: UrlsOf): Referenc
 function toReferencePhoto(photo: PhotoRow, urlsOf: UrlsOf): ReferencePhotoDto {
   const { id, corners, widthPx, heightPx, capturedAt, createdAt } = photo;
   return { id, urls: urlsOf(photo), corners, widthPx, heightPx, takenAt: iso(capturedAt ?? createdAt) };
+}
+
+/** A later reading of the power meter that moves the watts by more than the policy allows; the setting itself stays as it was signed. */
+function checkDueOf({ physical, content, calibration, laterReadings, powerShiftPercent }: AnswerRow): PowerShiftDto | null {
+  if (calibration === null) return null;
+  const newer = laterReadings.map((reading) => ({ ...asMeasured(reading), measuredOn: reading.measuredOn }));
+  const shift = powerShift({ profile: physical, steps: content.steps, cited: asMeasured(calibration), newer });
+  if (shift === null || Math.abs(shift.shiftPercent) <= powerShiftPercent) return null;
+  return { ...shift, citedOn: calibration.measuredOn, limitPercent: powerShiftPercent, isCheckDue: true };
 }
 
 /** "at least 0.9": the quantity stands before it already. */

@@ -58,7 +58,11 @@ export function shiftSinceProof(
 }
 
 /** A stored reading as the model takes it. */
-export function asMeasured({ points, frequencyKhz, pulseWidthNs }: RevisionCalibration): MeasuredCalibration {
+export function asMeasured({
+  points,
+  frequencyKhz,
+  pulseWidthNs,
+}: Pick<RevisionCalibration, 'points' | 'frequencyKhz' | 'pulseWidthNs'>): MeasuredCalibration {
   return { points: points.map(({ percent, watts }) => ({ percent, powerW: watts })), frequencyKhz, pulseWidthNs };
 }
 

@@ -10,7 +10,7 @@ import type {
   RouteKind,
   SourceKind,
 } from '@proofplate/recipe-model';
-import { and, asc, eq, inArray, type SQL, sql } from 'drizzle-orm';
+import { and, asc, eq, gt, inArray, type SQL, sql } from 'drizzle-orm';
 import { alias, type PgUpdateSetSource } from 'drizzle-orm/pg-core';
 import type { SignOffMeaning } from './dto/sign-off.dto';
 import type { LockedRevision, RevisionBrief, RevisionHead, StoredRevision, StoredSignOff } from './stored-revision';
@@ -72,6 +72,29 @@ export class RecipeRevisionsRepository {
     if (ids.length === 0) return [];
     const rows = await headQuery(tx).where(and(eq(revision.shopId, shopId), inArray(revision.id, [...ids])));
     return rows.map(toHead);
+  }
+
+  /** Approved revisions by the code of their recipe. */
+  async approvedIds(
+    tx: Tx,
+    shopId: string,
+    { machineId, afterCode, limit }: { machineId?: string; afterCode?: string; limit: number },
+  ): Promise<string[]> {
+    const rows = await tx
+      .select({ id: revision.id })
+      .from(revision)
+      .innerJoin(recipe, and(eq(recipe.shopId, revision.shopId), eq(recipe.id, revision.recipeId)))
+      .where(
+        and(
+          eq(revision.shopId, shopId),
+          eq(revision.state, 'approved'),
+          machineId === undefined ? undefined : eq(recipe.machineId, machineId),
+          afterCode === undefined ? undefined : gt(recipe.code, afterCode),
+        ),
+      )
+      .orderBy(asc(recipe.code))
+      .limit(limit);
+    return rows.map(({ id }) => id);
   }
 
   /** The ladders of recipes: drafts first, then newest first. */

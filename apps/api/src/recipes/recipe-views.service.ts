@@ -6,6 +6,7 @@ import { PhotosService } from '../photos/photos.service';
 import { ShopsService } from '../shops/shops.service';
 import { DraftRepositories } from './draft-repositories';
 import type { RecipeDto, RecipeFacetsDto, RecipeSummaryDto } from './dto/recipe.dto';
+import { PowerShiftsService } from './power-shifts.service';
 import { type ListCursor, type ListFilter, type RecipeFaceRow, RecipeListRepository, type Viewer } from './recipe-list.repository';
 import { toRevisionBriefDto } from './recipe-revisions.mapper';
 import { RecipeNotFoundError } from './recipes.errors';
@@ -24,6 +25,7 @@ export class RecipeViewsService {
     private readonly scheduled: ScheduledRevisionsService,
     private readonly shops: ShopsService,
     private readonly photos: PhotosService,
+    private readonly powerShifts: PowerShiftsService,
   ) {}
 
   async viewerOf(tx: Tx, { shopId, memberId, role }: Actor): Promise<Viewer> {
@@ -46,8 +48,10 @@ export class RecipeViewsService {
     const signOffs = await this.repositories.revisions.signOffs(tx, actor.shopId, shown);
     const plates = await this.listing.plates(tx, actor.shopId, shown);
     const runs = await this.listing.recentRuns(tx, actor.shopId, recipeIds);
+    const approved = rows.flatMap(({ current_id }) => (current_id === null ? [] : [current_id]));
+    const checkDue = await this.powerShifts.checkDue(tx, actor.shopId, approved);
     return rows.map((row) =>
-      toRecipeSummaryDto(row, { actor, ladders, signOffs, plates, runs, photoUrls: (photo) => this.photos.urlsOf(photo) }),
+      toRecipeSummaryDto(row, { actor, ladders, signOffs, plates, runs, checkDue, photoUrls: (photo) => this.photos.urlsOf(photo) }),
     );
   }
 

@@ -9,8 +9,10 @@ import { IfMatch } from '../common/decorators/if-match.decorator';
 import { IdPipe } from '../common/pipes/id.pipe';
 import { CreateDraftDto, CreateRecipeDto, RecipeFromCellDto, UpdateRecipeDto } from './dto/create-recipe.dto';
 import { ListRecipesQuery } from './dto/list-recipes.query.dto';
+import { ListPowerShiftsQuery, RecipePowerShiftPageDto } from './dto/power-shift.dto';
 import { RecipeDto, RecipePageDto } from './dto/recipe.dto';
 import { RecipeRevisionDto } from './dto/recipe-revision.dto';
+import { PowerShiftsService } from './power-shifts.service';
 import { RecipeDraftingService } from './recipe-drafting.service';
 import { RecipesService } from './recipes.service';
 
@@ -22,6 +24,7 @@ export class RecipesController {
   constructor(
     private readonly recipes: RecipesService,
     private readonly drafting: RecipeDraftingService,
+    private readonly powerShifts: PowerShiftsService,
   ) {}
 
   @Get()
@@ -45,6 +48,13 @@ export class RecipesController {
   @ApiCreatedResponse({ type: RecipeRevisionDto })
   create(@CurrentMember() actor: Actor, @Body() dto: CreateRecipeDto) {
     return this.drafting.create(actor, dto);
+  }
+
+  @Get('power-shifts')
+  @ApiOperation({ summary: 'Approved settings and how far later readings of the power meter have moved their watts' })
+  @ApiOkResponse({ type: RecipePowerShiftPageDto })
+  listPowerShifts(@CurrentMember() actor: Actor, @Query() query: ListPowerShiftsQuery) {
+    return this.powerShifts.list(actor, query);
   }
 
   @Get(':recipeId')

@@ -1,4 +1,5 @@
 import type { Actor } from '../common/actor';
+import type { PowerShiftDto } from './dto/power-shift.dto';
 import type { RecipeFaceDto, RecipeFacetsDto, RecipeHoldDto, RecipeSummaryDto } from './dto/recipe.dto';
 import { RECIPE_STATES } from './dto/recipe.dto';
 import { type MapPhoto, toEvidencePhotoDto } from './evidence.mapper';
@@ -14,6 +15,7 @@ export type SummaryParts = {
   readonly signOffs: readonly StoredSignOff[];
   readonly plates: readonly PlateRow[];
   readonly runs: readonly { recipeId: string; good: number; scrap: number }[];
+  readonly checkDue: ReadonlyMap<string, PowerShiftDto>;
   readonly photoUrls: MapPhoto;
 };
 
@@ -43,6 +45,7 @@ export function toRecipeSummaryDto(row: RecipeFaceRow, parts: SummaryParts): Rec
     current: briefOf(row.current_id),
     underWay: briefOf(row.under_way_id),
     isHeld: row.is_held,
+    checkDue: (row.current_id === null ? undefined : parts.checkDue.get(row.current_id)) ?? null,
     face: plate === undefined ? null : toFaceDto(plate, parts.photoUrls),
     last30Days: { good, scrap },
     needsYou: row.need,

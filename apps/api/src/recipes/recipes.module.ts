@@ -8,6 +8,7 @@ import { DraftEntryService } from './draft-entry.service';
 import { DraftGroundService } from './draft-ground.service';
 import { DraftRepositories } from './draft-repositories';
 import { DraftStoreService } from './draft-store.service';
+import { PowerShiftsService } from './power-shifts.service';
 import { RecipeDraftingService } from './recipe-drafting.service';
 import { RecipeListRepository } from './recipe-list.repository';
 import { RecipeRevisionsController } from './recipe-revisions.controller';
@@ -30,6 +31,7 @@ import { ScheduledRevisionsService } from './scheduled-revisions.service';
     RecipesService,
     RecipeViewsService,
     RecipeDraftingService,
+    PowerShiftsService,
     RecipeRevisionsService,
     RevisionDraftsService,
     RevisionViewsService,

@@ -1495,6 +1495,23 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/api/recipes/power-shifts": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Approved settings and how far later readings of the power meter have moved their watts */
+        get: operations["RecipesController_listPowerShifts"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/api/recipes/{recipeId}": {
         parameters: {
             query?: never;
@@ -3397,6 +3414,21 @@ export interface components {
             /** @description Spot measured on this machine, µm; null: not measured */
             measuredSpotUm: number | null;
         };
+        PlatePhotoDto: {
+            /**
+             * Format: uuid
+             * @description Id of the photo
+             */
+            id: string;
+            /** @description Addresses for <img> */
+            urls: components["schemas"]["PhotoUrlsDto"] | null;
+            /** @description Corners of the plate, clockwise from the origin mark */
+            corners: components["schemas"]["CornerDto"][] | null;
+            /** @description Width, pixels */
+            widthPx: number | null;
+            /** @description Height, pixels */
+            heightPx: number | null;
+        };
         CouponFaceDto: {
             /** @description Rows of cells */
             rows: number;
@@ -3409,6 +3441,12 @@ export interface components {
             shows: "rating" | "dose";
             /** @description One per cell; null: none */
             values: (number | null)[];
+            /** @description Side of a cell, mm */
+            cellMm: number;
+            /** @description Gap between cells, mm */
+            gapMm: number;
+            /** @description Newest photo that can be laid flat; null: none */
+            photo: components["schemas"]["PlatePhotoDto"] | null;
         };
         CouponSummaryDto: {
             /**
@@ -4690,6 +4728,30 @@ export interface components {
             /** @description Signatures, oldest first */
             signOffs: components["schemas"]["SignOffDto"][];
         };
+        PowerShiftDto: {
+            /** @description Place of the mark step that moved most, from 0 */
+            stepIndex: number;
+            /** @description Watts by the reading that the setting cites */
+            beforeW: number;
+            /** @description Watts by the newest reading that holds for it */
+            afterW: number;
+            /** @description Change in percent; below zero: the source gives less */
+            shiftPercent: number;
+            /**
+             * Format: date
+             * @description Day of the reading that it cites
+             */
+            citedOn: string;
+            /**
+             * Format: date
+             * @description Day of the newest reading that holds for it
+             */
+            measuredOn: string;
+            /** @description Change that the shop’s policy allows, percent */
+            limitPercent: number;
+            /** @description true: it moved by more than the policy allows */
+            isCheckDue: boolean;
+        };
         EvidencePhotoDto: {
             /**
              * Format: uuid
@@ -4769,6 +4831,8 @@ export interface components {
             underWay: components["schemas"]["RevisionBriefDto"] | null;
             /** @description true: a hold is on the recipe or its machine */
             isHeld: boolean;
+            /** @description A later reading moved the watts by more than the policy allows */
+            checkDue: components["schemas"]["PowerShiftDto"] | null;
             /** @description Plate and cell that stand for it */
             face: components["schemas"]["RecipeFaceDto"] | null;
             /** @description Parts of finished production runs of the last 30 days */
@@ -5070,6 +5134,8 @@ export interface components {
             text: string;
             /** @description Where it comes from */
             source: string;
+            /** @description true: it holds for all work, not for this one in particular */
+            isGeneral: boolean;
             /** @description true: the author acknowledged it */
             isAcknowledged: boolean;
         };
@@ -5133,18 +5199,28 @@ export interface components {
             value: number | null;
             /** @description Why there is no value */
             missingBecause: string | null;
-            /** @description Limit of the formula that the inputs break */
-            outOfRange: string | null;
+            /** @description true: it has no meaning in this mode, so no input would bring it */
+            isRuledOutByMode: boolean;
+            /** @description What to look at: range of the formula, gaps between spots or lines, energy above the source’s, dose above the caution */
+            lookAt: string[];
             /** @description Numbers that went into it, by name with unit */
             inputs: {
                 [key: string]: number;
             };
+        };
+        SettingRemarkDto: {
+            /** @description Value that it is about */
+            parameter: components["schemas"]["ParameterKey"];
+            /** @description What the panel cannot show or the machine cannot do */
+            text: string;
         };
         StepNumbersDto: {
             /** @description Number of the mark step, from 1 */
             step: number;
             /** @description What follows from it */
             numbers: components["schemas"]["DerivedNumberDto"][];
+            /** @description Values to look at themselves */
+            remarks: components["schemas"]["SettingRemarkDto"][];
         };
         RecipeRevisionDto: {
             /**
@@ -5338,6 +5414,31 @@ export interface components {
             /** @description What it covers beyond the five keys */
             scope?: components["schemas"]["RecipeScopeDto"];
         };
+        RecipePowerShiftDto: {
+            /**
+             * Format: uuid
+             * @description Id of the recipe
+             */
+            id: string;
+            /** @description Code of the recipe */
+            code: string;
+            /** @description Title of the recipe */
+            title: string;
+            /** @description Number of the approved revision */
+            revisionNumber: number;
+            /** @description Machine */
+            machine: components["schemas"]["NamedDto"];
+            /** @description null: there is nothing to compare */
+            shift: components["schemas"]["PowerShiftDto"] | null;
+            /** @description Why there is nothing to compare; null when there is */
+            reason: string | null;
+        };
+        RecipePowerShiftPageDto: {
+            /** @description The items of this page, in order */
+            items: components["schemas"]["RecipePowerShiftDto"][];
+            /** @description Send as cursor for the next page; null at the end */
+            nextCursor: string | null;
+        };
         RecipeHoldDto: {
             /**
              * Format: uuid
@@ -5387,6 +5488,8 @@ export interface components {
             underWay: components["schemas"]["RevisionBriefDto"] | null;
             /** @description true: a hold is on the recipe or its machine */
             isHeld: boolean;
+            /** @description A later reading moved the watts by more than the policy allows */
+            checkDue: components["schemas"]["PowerShiftDto"] | null;
             /** @description Plate and cell that stand for it */
             face: components["schemas"]["RecipeFaceDto"] | null;
             /** @description Parts of finished production runs of the last 30 days */
@@ -6464,6 +6567,8 @@ export interface components {
             holdsUntil: string | null;
             /** @description true: the day of its review is past */
             isOverdue: boolean;
+            /** @description A later reading moved the watts by more than the policy allows */
+            checkDue: components["schemas"]["PowerShiftDto"] | null;
             /** @description SHA-256 of the signed content */
             contentHash: string;
             /** @description Why no run can be started; empty: it can */
@@ -10978,6 +11083,48 @@ export interface operations {
                 };
                 content: {
                     "application/json": components["schemas"]["RecipeRevisionDto"];
+                };
+            };
+            /** @description needs the role operator or a higher one */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    RecipesController_listPowerShifts: {
+        parameters: {
+            query?: {
+                /** @description How many items at most */
+                limit?: number;
+                /** @description nextCursor of the page before; opaque */
+                cursor?: string;
+                /** @description Only recipes of this machine */
+                machineId?: string;
+            };
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["RecipePowerShiftPageDto"];
                 };
             };
             /** @description needs the role operator or a higher one */

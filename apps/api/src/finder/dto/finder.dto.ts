@@ -4,6 +4,7 @@ import { NamedDto } from '../../coupons/dto/coupon.dto';
 import { PanelDto } from '../../machines/dto/panel.dto';
 import { EvidencePhotoDto, EvidencePlateDto } from '../../recipes/dto/evidence.dto';
 import { MarkStepDto, SetUpStepDto } from '../../recipes/dto/mark-step.dto';
+import { PowerShiftDto } from '../../recipes/dto/power-shift.dto';
 import { LimitsOfUseDto, RecipeScopeDto } from '../../recipes/dto/scope.dto';
 import { SLOT_KEYS, type SlotKey } from '../finder-slots';
 
@@ -118,6 +119,8 @@ export class FinderAnswerDto extends FinderRecipeDto {
     | string
     | null;
   @ApiProperty({ description: 'true: the day of its review is past' }) isOverdue: boolean;
+  @ApiProperty({ type: PowerShiftDto, nullable: true, description: 'A later reading moved the watts by more than the policy allows' })
+  checkDue: PowerShiftDto | null;
   @ApiProperty({ description: 'SHA-256 of the signed content' }) contentHash: string;
   @ApiProperty({ type: [String], description: 'Why no run can be started; empty: it can' }) blockedBecause: string[];
   @ApiProperty({ type: [String], description: 'What the caller may do: start-run, place-hold, release-hold, grant-deviation' })

@@ -2,6 +2,7 @@ import { ApiProperty } from '@nestjs/swagger';
 import { PageOf } from '../../common/pagination/page';
 import { CouponFacetValueDto } from '../../coupons/dto/list-coupons.query.dto';
 import { EvidencePhotoDto } from './evidence.dto';
+import { PowerShiftDto } from './power-shift.dto';
 import { RecipeKeysDto } from './recipe-keys.dto';
 import { RecipeRevisionDto, RevisionBriefDto } from './recipe-revision.dto';
 import { RecipeScopeDto } from './scope.dto';
@@ -47,6 +48,8 @@ export class RecipeSummaryDto extends RecipeKeysDto {
   })
   underWay: RevisionBriefDto | null;
   @ApiProperty({ description: 'true: a hold is on the recipe or its machine' }) isHeld: boolean;
+  @ApiProperty({ type: PowerShiftDto, nullable: true, description: 'A later reading moved the watts by more than the policy allows' })
+  checkDue: PowerShiftDto | null;
   @ApiProperty({ type: RecipeFaceDto, nullable: true, description: 'Plate and cell that stand for it' }) face: RecipeFaceDto | null;
   @ApiProperty({ type: RecipeRunsDto, description: 'Parts of finished production runs of the last 30 days' }) last30Days: RecipeRunsDto;
   @ApiProperty({ type: String, nullable: true, enum: [...RECIPE_NEEDS, null], description: 'What it needs from the caller; null: nothing' })
