@@ -14,6 +14,7 @@ const PERMANENT = [
   'ledger_event',
   'machine_profile',
   'measurement',
+  'part_set_up',
   'power_calibration',
   'sign_off',
   'training_record',

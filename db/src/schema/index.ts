@@ -13,5 +13,5 @@ export {
 } from './materials';
 export { accountEvent, invitation, member, passwordReset, person, refreshToken, session, signInThrottle, trainingRecord } from './people';
 export { recipe, revision, revisionEvidence, signOff } from './recipes';
-export { deviation, hold, run, settingRequest } from './runs';
+export { deviation, hold, partSetUp, run, settingRequest } from './runs';
 export { codeCounter, idempotencyKey, outbox, type ShopPolicyRow, shop } from './shops';

@@ -65,6 +65,34 @@ export const run = pgTable(
   ],
 );
 
+/**
+ * A round part as it was set up for a run: what was typed, the machine's beam and lens at that time, and the numbers that followed.
+ * Never changed: another save adds the next number, until the run is finished.
+ */
+export const partSetUp = pgTable(
+  'part_set_up',
+  {
+    ...tenantKey(),
+    runId: uuid().notNull(),
+    number: integer().notNull(),
+    lensId: uuid().notNull(),
+    entered: jsonb().$type<Record<string, unknown>>().notNull(),
+    ground: jsonb().$type<Record<string, unknown>>().notNull(),
+    results: jsonb().$type<Record<string, unknown>>().notNull(),
+    savedByName: text().notNull(),
+    ...authorship(),
+  },
+  (t) => [
+    primaryKey({ columns: [t.shopId, t.id] }),
+    unique('part_set_up_number_unique').on(t.shopId, t.runId, t.number),
+    foreignKey({ columns: [t.shopId, t.runId], foreignColumns: [run.shopId, run.id], name: 'part_set_up_run_fk' }),
+    foreignKey({ columns: [t.shopId, t.lensId], foreignColumns: [lens.shopId, lens.id], name: 'part_set_up_lens_fk' }),
+    foreignKey({ columns: [t.shopId, t.createdBy], foreignColumns: [member.shopId, member.id], name: 'part_set_up_author_fk' }),
+    check('part_set_up_number', sql`${t.number} >= 1`),
+    shopPolicy('part_set_up'),
+  ],
+);
+
 /** "Stop use": on a recipe or a machine, until a lead releases it. */
 export const hold = pgTable(
   'hold',
