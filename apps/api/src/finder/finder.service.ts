@@ -4,7 +4,7 @@ import type { Actor } from '../common/actor';
 import { NotFoundError } from '../common/errors/domain-error';
 import { Env } from '../config/env.validation';
 import { type Tx, UnitOfWork } from '../database/unit-of-work';
-import { orderedCautionsFor } from '../materials/caution-order';
+import { isGeneralCaution, orderedCautionsFor } from '../materials/caution-order';
 import { PhotosService } from '../photos/photos.service';
 import { whyNotCarriedOver } from './carry-over';
 import type { FinderCautionDto, FinderDto, NearMissDto, SheetCodeDto, WithdrawnRecipeDto } from './dto/finder.dto';
@@ -96,9 +96,9 @@ export class FinderService {
   }
 }
 
-function toFinderCaution({ id, level, subject, text, source, appliesTo }: Caution): FinderCautionDto {
-  const isGeneral = Object.values(appliesTo).every((condition) => condition === undefined);
-  return { id, level, subject, text, source, isGeneral };
+function toFinderCaution(caution: Caution): FinderCautionDto {
+  const { id, level, subject, text, source } = caution;
+  return { id, level, subject, text, source, isGeneral: isGeneralCaution(caution) };
 }
 
 /** The recipe that answers: the only one left, and only if the part was named. */

@@ -1,5 +1,5 @@
 import type { Caution, CautionScope } from '@proofplate/recipe-model';
-import { cautionsNaming, orderedCautionsFor } from './caution-order';
+import { cautionsNaming, isGeneralCaution, orderedCautionsFor } from './caution-order';
 
 const caution = (id: string, level: Caution['level'], appliesTo: CautionScope): Caution => ({
   id,
@@ -33,5 +33,11 @@ describe('orderedCautionsFor', () => {
 describe('cautionsNaming', () => {
   it('keeps only those that name the material or its family', () => {
     expect(ids(cautionsNaming({ family: 'brass', materialId: 'm2' }, cautions))).toEqual(['brass engraved', 'brass']);
+  });
+});
+
+describe('isGeneralCaution', () => {
+  it('is one that is bound to no material, finish, source, effect or shape', () => {
+    expect(ids(cautions.filter(isGeneralCaution))).toEqual(['all work']);
   });
 });

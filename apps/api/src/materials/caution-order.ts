@@ -14,6 +14,10 @@ export function cautionsNaming(subject: CautionSubject, cautions: readonly Cauti
   );
 }
 
+/** It holds for all work, not for some in particular. */
+export const isGeneralCaution = ({ appliesTo }: Pick<Caution, 'appliesTo'>): boolean =>
+  Object.values(appliesTo).every((condition) => condition === undefined);
+
 const namesMaterial = ({ families, materialIds }: CautionScope) => families !== undefined || materialIds !== undefined;
 
 function narrowness(scope: CautionScope): number {

@@ -36,8 +36,8 @@ describe('revisionChecks()', () => {
       calibration: null,
       presentPhysicalNumber: 2,
       cautions: [
-        { id: 'n', level: 'never', subject: 'Do not mark PVC.', text: 'Chlorine', source: 'Safety data sheet' },
-        { id: 'c', level: 'care', subject: 'Keep the extraction on.', text: 'Fumes', source: 'Manual' },
+        { id: 'n', level: 'never', subject: 'Do not mark PVC.', text: 'Chlorine', source: 'Safety data sheet', isGeneral: false },
+        { id: 'c', level: 'care', subject: 'Keep the extraction on.', text: 'Fumes', source: 'Manual', isGeneral: false },
       ],
     });
     const mates = [{ recipeCode: 'R-0009', scope: {} }];

@@ -1,8 +1,8 @@
 import { Injectable } from '@nestjs/common';
-import type { CautionSubject } from '@proofplate/recipe-model';
+import type { Caution, CautionSubject } from '@proofplate/recipe-model';
 import type { Actor } from '../common/actor';
 import type { Tx } from '../database/unit-of-work';
-import { orderedCautionsFor } from '../materials/caution-order';
+import { isGeneralCaution, orderedCautionsFor } from '../materials/caution-order';
 import { CautionsService } from '../materials/cautions.service';
 import { PhotosService } from '../photos/photos.service';
 import { ShopsService } from '../shops/shops.service';
@@ -108,13 +108,10 @@ export class RevisionRecordsService {
   }
 }
 
-const toRevisionCaution = ({ id, level, subject, text, source }: RevisionCaution): RevisionCaution => ({
-  id,
-  level,
-  subject,
-  text,
-  source,
-});
+function toRevisionCaution(caution: Caution): RevisionCaution {
+  const { id, level, subject, text, source } = caution;
+  return { id, level, subject, text, source, isGeneral: isGeneralCaution(caution) };
+}
 
 function subjectOf({ revision, recipe }: RevisionHead): CautionSubject {
   const { scope, limits } = revision.content;

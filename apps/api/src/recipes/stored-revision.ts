@@ -191,6 +191,8 @@ export type RevisionCaution = {
   readonly subject: string;
   readonly text: string;
   readonly source: string;
+  /** It holds for all work, not for this one in particular. */
+  readonly isGeneral: boolean;
 };
 
 /** Everything that is known about a revision: what its page shows and what its checks weigh. */

@@ -106,3 +106,6 @@ function parts(time: string | Date, options: Intl.DateTimeFormatOptions): Record
   const formatted = new Intl.DateTimeFormat('en-GB', options).formatToParts(new Date(time));
   return Object.fromEntries(formatted.map(({ type, value }) => [type, type === 'month' ? value.replace('Sept', 'Sep') : value]));
 }
+
+/** With its full stop, where there is none yet. */
+export const asSentence = (words: string): string => (/[.!?]$/.test(words) ? words : `${words}.`);

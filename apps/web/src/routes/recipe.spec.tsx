@@ -38,6 +38,28 @@ function openPage(at: string, handlers: Record<string, FakeHandler> = {}, shown:
 }
 
 describe('the recipe page', () => {
+  it('folds the cautions of all work into one row, whose reasons one tap opens', async () => {
+    const caution = (id: string, isGeneral: boolean, subject: string) => ({
+      ...{ id, level: 'care' as const, subject, text: `Reason ${id}.`, source: `Source ${id}.` },
+      ...{ isGeneral, isAcknowledged: true },
+    });
+    const revision = makeRevision({
+      cautions: [
+        caution('own', false, 'Let the part cool.'),
+        caution('g1', true, 'Keep the interlock'),
+        caution('g2', true, 'Extract fumes'),
+      ],
+    });
+    const { user } = openPage('/recipes/R-0042', {}, makeRecipe(revision, [revision]));
+    const own = await screen.findByRole('list', { name: 'Cautions' });
+    expect(within(own).getAllByRole('listitem')).toHaveLength(1);
+    expect(screen.getByText('Keep the interlock. Extract fumes.')).toBeVisible();
+    expect(screen.getByText(/Reason g1/)).not.toBeVisible();
+    await user.click(screen.getByText('Why'));
+    expect(screen.getByText(/Reason g1/)).toBeVisible();
+    expect(screen.getByText('Source g2.')).toBeVisible();
+  });
+
   it('shows the approved setting in the order of the panel, and the ladder with states and reasons', async () => {
     openPage('/recipes/R-0042');
     const card = await screen.findByRole('region', { name: 'Setting of R-0042 revision 3' });

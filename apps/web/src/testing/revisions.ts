@@ -108,6 +108,7 @@ export function makeRevision(rest: Partial<Revision> = {}): Revision {
         subject: 'Let the part cool.',
         text: 'It holds heat.',
         source: 'The manual.',
+        isGeneral: false,
         isAcknowledged: false,
       },
     ],

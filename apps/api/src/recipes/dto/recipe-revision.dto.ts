@@ -71,6 +71,7 @@ export class RevisionCautionDto {
   @ApiProperty({ description: 'What to do, first' }) subject: string;
   @ApiProperty({ description: 'Why' }) text: string;
   @ApiProperty({ description: 'Where it comes from' }) source: string;
+  @ApiProperty({ description: 'true: it holds for all work, not for this one in particular' }) isGeneral: boolean;
   @ApiProperty({ description: 'true: the author acknowledged it' }) isAcknowledged: boolean;
 }
 

@@ -1,7 +1,7 @@
 import { chakra } from '@chakra-ui/react';
 import { type Caution, CautionList } from '../../../components/caution-list';
-import { CautionIcon } from '../../../components/icons';
-import { formatNumber } from '../../../lib/format';
+import { GeneralCautions } from '../../../components/general-cautions';
+import { asSentence, formatNumber } from '../../../lib/format';
 import type { FinderAnswer, FinderCaution } from '../finder.api';
 
 /** Cautions of this work side by side, the limits of use among them; those of all work in one line with their reasons behind a tap. */
@@ -13,44 +13,6 @@ export function Cautions({ cautions, answer }: { cautions: readonly FinderCautio
       <CautionList cautions={limits === undefined ? own : [...own, limits]} />
       <GeneralCautions cautions={cautions.filter(({ isGeneral }) => isGeneral)} />
     </chakra.div>
-  );
-}
-
-function GeneralCautions({ cautions }: { cautions: readonly FinderCaution[] }) {
-  if (cautions.length === 0) return null;
-  return (
-    <chakra.details bg="straw.subtle" border="hairline" borderColor="straw.emphasized" borderRadius="md">
-      <chakra.summary
-        cursor="pointer"
-        display="grid"
-        gridTemplateColumns="34px minmax(0, 1fr) auto"
-        alignItems="center"
-        minHeight={{ base: 'glove', lg: 'touch' }}
-        px="3.5"
-        py="1.5"
-        fontSize="sm"
-        lineHeight="sm"
-        borderRadius="md"
-      >
-        <chakra.span lineHeight="none">
-          <CautionIcon size={20} />
-        </chakra.span>
-        <span>
-          <b>With every job: </b>
-          {cautions.map(({ subject }) => asSentence(subject)).join(' ')}
-        </span>
-        <chakra.span pl="4" color="brand.fg" textDecoration="underline">
-          Why
-        </chakra.span>
-      </chakra.summary>
-      <chakra.ul px="3.5" pb="3" display="grid" gap="2" fontSize="sm" lineHeight="sm">
-        {cautions.map(({ id, subject, text, source }) => (
-          <chakra.li key={id} pl="34px">
-            <b>{asSentence(subject)}</b> {text} <chakra.span color="fg.muted">{source}</chakra.span>
-          </chakra.li>
-        ))}
-      </chakra.ul>
-    </chakra.details>
   );
 }
 
@@ -79,5 +41,3 @@ function rangeWords(what: string, range: { from?: number; to?: number } | undefi
   if (range?.from !== undefined) return `${what} from ${formatNumber(range.from)} mm`;
   return range?.to === undefined ? '' : `${what} up to ${formatNumber(range.to)} mm`;
 }
-
-const asSentence = (words: string) => (/[.!?]$/.test(words) ? words : `${words}.`);

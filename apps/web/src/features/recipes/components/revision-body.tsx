@@ -1,6 +1,7 @@
 import { chakra } from '@chakra-ui/react';
 import type { ReactNode } from 'react';
 import { CautionList } from '../../../components/caution-list';
+import { GeneralCautions } from '../../../components/general-cautions';
 import { Panel } from '../../../components/page';
 import { stepTitle } from '../../../components/setting-rows';
 import type { Revision } from '../recipes.api';
@@ -57,11 +58,14 @@ export function RevisionBody({ revision, children }: { revision: Revision; child
   );
 }
 
+/** Those of this work side by side, those of all work in one row, as at the machine. */
 export function RevisionCautions({ revision: { cautions } }: { revision: Revision }) {
   if (cautions.length === 0) return null;
+  const own = cautions.filter(({ isGeneral }) => !isGeneral);
   return (
-    <chakra.div mb="4">
-      <CautionList cautions={cautions.map(({ id, subject, text, source }) => ({ key: id, act: subject, reason: text, source }))} />
+    <chakra.div mb="4" display="grid" gap="2">
+      <CautionList cautions={own.map(({ id, subject, text, source }) => ({ key: id, act: subject, reason: text, source }))} />
+      <GeneralCautions cautions={cautions.filter(({ isGeneral }) => isGeneral)} />
     </chakra.div>
   );
 }
