@@ -52,6 +52,32 @@ describe('GET /api/coupons', () => {
     expect(rated).toMatchObject({ ratedCount: 1, bestRating: 5, face: { shows: 'rating', values: [null, null, null, 4.5] } });
   });
 
+  it('shows the newest photo that can be laid flat, and none that has no corners yet or was refused', async () => {
+    const titled = async (title: string) => (await list()).items.find((item) => item.title === title)?.face;
+    expect((await titled('blue tag'))?.photo).toBeNull();
+    await asSuperuser(test, async (sql) => {
+      const corners = JSON.stringify([0.1, 0.9, 0.9, 0.1].map((x, index) => ({ x, y: index < 2 ? 0.2 : 0.8 })));
+      for (const [number, state, found] of [
+        [1, 'ready', corners],
+        [2, 'ready', corners],
+        [3, 'ready', null],
+        [4, 'refused', null],
+      ] as const)
+        await sql`insert into photo (shop_id, id, coupon_id, state, received_sha256, received_bytes, received_type, master_sha256, large_sha256,
+            small_sha256, width_px, height_px, corners, created_by)
+          values (${shop.shop.id}, ${`00000000-0000-7000-8000-00000000000${number}`}, ${coupons[0]?.id ?? ''}, ${state}, ${`sent-${number}`}, 1,
+            'image/jpeg', 'a', 'b', 'c', 1000, 750, ${found}::text::jsonb, ${shop.operator.id})`;
+    });
+    expect((await titled('blue tag'))?.photo).toMatchObject({
+      id: '00000000-0000-7000-8000-000000000002',
+      widthPx: 1000,
+      heightPx: 750,
+      corners: expect.arrayContaining([{ x: 0.1, y: 0.2 }]),
+      urls: { small: expect.stringContaining('/small?') },
+    });
+    expect((await titled('bezel'))?.photo).toBeNull();
+  });
+
   it('turns pages without losing or doubling a coupon', async () => {
     const first = await list('?limit=2');
     const second = await list(`?limit=2&cursor=${first.nextCursor}`);

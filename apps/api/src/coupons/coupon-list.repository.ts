@@ -22,6 +22,8 @@ export type FaceCell = {
   couponId: string;
   rows: number;
   columns: number;
+  cellMm: number;
+  gapMm: number;
   rowIndex: number;
   columnIndex: number;
   meanRating: number | null;
@@ -99,6 +101,8 @@ export class CouponListRepository {
         couponId: cell.couponId,
         rows: testGrid.rows,
         columns: testGrid.columns,
+        cellMm: testGrid.cellMm,
+        gapMm: testGrid.gapMm,
         rowIndex: cell.rowIndex,
         columnIndex: cell.columnIndex,
         meanRating: ratings.mean,

@@ -4,6 +4,8 @@ import { stringify } from 'csv-stringify/sync';
 import type { Actor } from '../common/actor';
 import { decodeCursor, type Page, pageOf } from '../common/pagination/page';
 import { type Tx, UnitOfWork } from '../database/unit-of-work';
+import type { PlatePhotoDto } from '../photos/dto/photo.dto';
+import { PhotosService } from '../photos/photos.service';
 import { toCouponSummaryDto } from './coupon-faces.mapper';
 import { type CouponFilter, CouponListRepository, type FaceCell } from './coupon-list.repository';
 import type { CouponView } from './coupons.repository';
@@ -19,6 +21,7 @@ export class CouponListService {
   constructor(
     private readonly unitOfWork: UnitOfWork,
     private readonly coupons: CouponListRepository,
+    private readonly photos: PhotosService,
   ) {}
 
   async list(actor: Actor, query: ListCouponsQuery): Promise<Page<CouponSummaryDto>> {
@@ -26,7 +29,9 @@ export class CouponListService {
     const after = createdAt === undefined ? {} : { after: { createdAt: String(createdAt), id: String(id) } };
     return this.unitOfWork.read(actor, async (tx) => {
       const views = await this.coupons.list(tx, actor.shopId, { filter: filterOf(query), limit: query.limit + 1, ...after });
-      const summaryOf = await this.summaries(tx, actor.shopId, views.slice(0, query.limit));
+      const shown = views.slice(0, query.limit);
+      const ids = shown.map(({ coupon }) => coupon.id);
+      const summaryOf = await this.summaries(tx, actor.shopId, shown, await this.photos.platePhotos(tx, actor.shopId, ids));
       return pageOf(views, query.limit, {
         item: summaryOf,
         cursor: ({ coupon }) => [coupon.createdAt.toISOString(), coupon.id],
@@ -63,12 +68,17 @@ export class CouponListService {
     );
   }
 
-  private async summaries(tx: Tx, shopId: string, views: readonly CouponView[]): Promise<(view: CouponView) => CouponSummaryDto> {
+  private async summaries(
+    tx: Tx,
+    shopId: string,
+    views: readonly CouponView[],
+    photos: ReadonlyMap<string, PlatePhotoDto> = new Map(),
+  ): Promise<(view: CouponView) => CouponSummaryDto> {
     const ids = views.map(({ coupon }) => coupon.id);
     const cells = await this.coupons.faceCells(tx, shopId, ids);
     const byCoupon = new Map<string, FaceCell[]>(ids.map((id) => [id, []]));
     for (const cell of cells) byCoupon.get(cell.couponId)?.push(cell);
-    return (view) => toCouponSummaryDto(view, byCoupon.get(view.coupon.id) ?? []);
+    return (view) => toCouponSummaryDto(view, byCoupon.get(view.coupon.id) ?? [], photos.get(view.coupon.id) ?? null);
   }
 }
 

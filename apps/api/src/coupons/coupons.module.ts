@@ -1,6 +1,7 @@
 import { Module } from '@nestjs/common';
 import { LedgerModule } from '../ledger/ledger.module';
 import { MachinesModule } from '../machines/machines.module';
+import { PhotosModule } from '../photos/photos.module';
 import { CouponArtworkController } from './coupon-artwork.controller';
 import { CouponArtworkService } from './coupon-artwork.service';
 import { CouponImportController } from './coupon-import.controller';
@@ -22,7 +23,7 @@ import { CouponsRepository } from './coupons.repository';
 import { CouponsService } from './coupons.service';
 
 @Module({
-  imports: [LedgerModule, MachinesModule],
+  imports: [LedgerModule, MachinesModule, PhotosModule],
   controllers: [CouponsController, CouponPlansController, CouponMarkingController, CouponArtworkController, CouponImportController],
   providers: [
     CouponsService,

@@ -1,6 +1,6 @@
 import { Injectable } from '@nestjs/common';
 import { schema, type Tx } from '@proofplate/db';
-import { and, desc, eq, lt, or, sql } from 'drizzle-orm';
+import { and, desc, eq, inArray, isNotNull, lt, or, sql } from 'drizzle-orm';
 import type { Corner } from './corners';
 
 const { coupon, photo, shop } = schema;
@@ -57,6 +57,18 @@ export class PhotosRepository {
       beforeId === undefined ? undefined : lt(photo.id, beforeId),
     );
     return tx.select(WITH_COUPON).from(photo).innerJoin(coupon, sameCoupon).where(isWanted).orderBy(desc(photo.id)).limit(limit);
+  }
+
+  /** Of each coupon the newest that can be laid flat: ready, with its corners found. */
+  async newestFlat(tx: Tx, shopId: string, couponIds: readonly string[]): Promise<PhotoRow[]> {
+    if (couponIds.length === 0) return [];
+    const isFlat = and(
+      eq(photo.shopId, shopId),
+      inArray(photo.couponId, [...couponIds]),
+      eq(photo.state, 'ready'),
+      isNotNull(photo.corners),
+    );
+    return tx.selectDistinctOn([photo.couponId]).from(photo).where(isFlat).orderBy(photo.couponId, desc(photo.id));
   }
 
   async find(tx: Tx, shopId: string, id: string): Promise<PhotoWithCoupon | undefined> {

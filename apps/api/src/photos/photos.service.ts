@@ -8,7 +8,7 @@ import { JobsService } from '../jobs/jobs.service';
 import { LedgerService } from '../ledger/ledger.service';
 import { cornersFault } from './corners';
 import type { ListPhotosQuery } from './dto/list-photos.query.dto';
-import type { PhotoDto, PhotoUrlsDto } from './dto/photo.dto';
+import type { PhotoDto, PhotoUrlsDto, PlatePhotoDto } from './dto/photo.dto';
 import type { SetCornersDto } from './dto/set-corners.dto';
 import { CouponSealedError, PhotoNotReadyError } from './photos.errors';
 import { photoUrls, type StoredPhoto, toPhotoDto } from './photos.mapper';
@@ -81,6 +81,17 @@ export class PhotosService {
   /** For other modules that show a photo to somebody who may see it there: the finder shows reference cells to trainees. */
   urlsOf(photo: StoredPhoto): PhotoUrlsDto | null {
     return photoUrls(photo, this.env.URL_SIGNING_SECRET, new Date());
+  }
+
+  /** For a list of coupons: of each the newest photo that can be laid flat, by coupon. */
+  async platePhotos(tx: Tx, shopId: string, couponIds: readonly string[]): Promise<Map<string, PlatePhotoDto>> {
+    const rows = await this.photos.newestFlat(tx, shopId, couponIds);
+    return new Map(
+      rows.map((row) => {
+        const { id, couponId, corners, widthPx, heightPx } = row;
+        return [couponId, { id, urls: this.urlsOf(row), corners, widthPx, heightPx }];
+      }),
+    );
   }
 
   private async getRow(tx: Tx, shopId: string, photoId: string) {

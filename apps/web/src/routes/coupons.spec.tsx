@@ -15,7 +15,7 @@ const summary = (code: string, rest: object = {}) => ({
     lens: { id: 'l', name: 'F160' },
   },
   ...{ isImported: false, isInvented: false, createdAt: '2026-05-14T07:00:00Z', createdBy: 'Ann Lee', markedAt: '2026-05-14T08:00:00Z' },
-  face: { rows: 1, columns: 2, shows: 'rating', values: [3.5, null] },
+  face: { rows: 1, columns: 2, cellMm: 5, gapMm: 1, shows: 'rating', values: [3.5, null], photo: null },
   ...{ cellCount: 2, ratedCount: 1, bestRating: 4 },
   ...rest,
 });
@@ -53,6 +53,20 @@ describe('the list of coupons', () => {
     expect(screen.getByRole('link', { name: 'C-0001 blue tag' })).toHaveAttribute('href', '/coupons/C-0001');
     expect(screen.getByRole('link', { name: 'Mark C-0002 blue tag' })).toHaveAttribute('href', '/coupons/C-0002/mark');
     expect(screen.getAllByText('1 of 2')).toHaveLength(2);
+  });
+
+  it('shows the photo of a plate where there is one that lies flat', async () => {
+    const face = { rows: 1, columns: 2, cellMm: 5, gapMm: 1, shows: 'rating', values: [3.5, null] };
+    const corners = [
+      { x: 0.1, y: 0.1 },
+      { x: 0.9, y: 0.1 },
+      { x: 0.9, y: 0.9 },
+      { x: 0.1, y: 0.9 },
+    ];
+    const photo = { id: 'photo-1', urls: { master: '/m', large: '/l', small: '/photo-small' }, corners, widthPx: 400, heightPx: 300 };
+    openPage([summary('C-0001', { face: { ...face, photo } })], facets(1));
+    const shown = await screen.findByRole('img', { name: 'Plate of C-0001, 1 by 2 cells, photographed' });
+    expect(shown.querySelector('img')).toHaveAttribute('src', '/photo-small');
   });
 
   it('asks for what the address says, and writes a chosen filter into it', async () => {

@@ -12,6 +12,7 @@ import { PageOf } from '../../common/pagination/page';
 import { PanelDto } from '../../machines/dto/panel.dto';
 import { PhysicalProfileDto } from '../../machines/dto/physical-profile.dto';
 import { StoredCriterionDto } from '../../materials/dto/effect.dto';
+import { PlatePhotoDto } from '../../photos/dto/photo.dto';
 import { PARAMETER_KEY_ENUM, ParameterSetDto, SetValueDto } from './parameter-set.dto';
 
 export const COUPON_STATES = ['planned', 'marked', 'inspected', 'sealed'] as const;
@@ -180,6 +181,10 @@ export class CouponFaceDto {
   shows: 'rating' | 'dose';
   @ApiProperty({ type: 'array', items: { type: 'number', nullable: true }, description: 'One per cell; null: none' })
   values: (number | null)[];
+  @ApiProperty({ description: 'Side of a cell, mm' }) cellMm: number;
+  @ApiProperty({ description: 'Gap between cells, mm' }) gapMm: number;
+  @ApiProperty({ type: PlatePhotoDto, nullable: true, description: 'Newest photo that can be laid flat; null: none' })
+  photo: PlatePhotoDto | null;
 }
 
 export class CouponSummaryDto extends CouponHeadDto {

@@ -12,6 +12,16 @@ export class PhotoUrlsDto {
   @ApiProperty({ description: 'Path of the picture with at most 400 pixels per side; signed, opens it for a few minutes' }) small: string;
 }
 
+/** As much of a photo as is needed to lay it under the cells. */
+export class PlatePhotoDto {
+  @ApiProperty({ description: 'Id of the photo', format: 'uuid' }) id: string;
+  @ApiProperty({ type: PhotoUrlsDto, nullable: true, description: 'Addresses for <img>' }) urls: PhotoUrlsDto | null;
+  @ApiProperty({ type: [CornerDto], nullable: true, description: 'Corners of the plate, clockwise from the origin mark' })
+  corners: CornerDto[] | null;
+  @ApiProperty({ type: Number, nullable: true, description: 'Width, pixels' }) widthPx: number | null;
+  @ApiProperty({ type: Number, nullable: true, description: 'Height, pixels' }) heightPx: number | null;
+}
+
 export class PhotoDto {
   @ApiProperty({ description: 'Id of the photo', format: 'uuid' }) id: string;
   @ApiProperty({ description: 'Coupon that it shows', format: 'uuid' }) couponId: string;

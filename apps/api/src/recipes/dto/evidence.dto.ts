@@ -4,7 +4,7 @@ import { ArrayMaxSize, ArrayUnique, IsArray, IsUUID } from 'class-validator';
 import { COUPON_STATES } from '../../coupons/dto/coupon.dto';
 import { ParameterSetDto } from '../../coupons/dto/parameter-set.dto';
 import { StoredCriterionDto } from '../../materials/dto/effect.dto';
-import { CornerDto, PhotoUrlsDto } from '../../photos/dto/photo.dto';
+import { PlatePhotoDto } from '../../photos/dto/photo.dto';
 
 const MOST_CELLS = 200;
 
@@ -25,14 +25,8 @@ export class CriterionResultDto {
   @ApiProperty({ description: 'true: within the criterion; what was not measured is not within it' }) meets: boolean;
 }
 
-export class EvidencePhotoDto {
-  @ApiProperty({ description: 'Id of the photo', format: 'uuid' }) id: string;
-  @ApiProperty({ type: PhotoUrlsDto, nullable: true, description: 'Addresses for <img>' }) urls: PhotoUrlsDto | null;
-  @ApiProperty({ type: [CornerDto], nullable: true, description: 'Corners of the plate, clockwise from the origin mark' })
-  corners: CornerDto[] | null;
-  @ApiProperty({ type: Number, nullable: true, description: 'Width, pixels' }) widthPx: number | null;
-  @ApiProperty({ type: Number, nullable: true, description: 'Height, pixels' }) heightPx: number | null;
-}
+/** Photo of the plate that a piece of evidence lies on. */
+export class EvidencePhotoDto extends PlatePhotoDto {}
 
 /** The plate that a cell lies on, as much as is needed to draw it. */
 export class EvidencePlateDto {
