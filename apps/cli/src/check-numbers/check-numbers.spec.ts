@@ -1,12 +1,15 @@
 import { readdirSync, readFileSync } from 'node:fs';
-import { join } from 'node:path';
+import { basename, join } from 'node:path';
 import { checkRecords } from './check-records';
 import { differences } from './compare';
 import type { Json } from './number-record';
 import { FORMULAS } from './registry';
 import { reportLines } from './report';
 
-const REFERENCE = join(__dirname, '../../../../packages/physics/test/reference');
+const REFERENCE_FOLDERS = ['physics', 'imaging'].map((name) => join(__dirname, `../../../../packages/${name}/test/reference`));
+const REFERENCE_FILES = REFERENCE_FOLDERS.flatMap((folder) => readdirSync(folder).map((file) => join(folder, file))).filter((file) =>
+  file.endsWith('.json'),
+);
 const irradiance = {
   name: 'a small spot',
   formula: 'I=P/(pi*d^2/4)',
@@ -44,11 +47,17 @@ describe('differences', () => {
 });
 
 describe('check-numbers', () => {
-  it.each(readdirSync(REFERENCE).filter((file) => file.endsWith('.json')))('passes every record of %s', (file) => {
-    const records: readonly Json[] = JSON.parse(readFileSync(join(REFERENCE, file), 'utf8'));
+  it.each(REFERENCE_FILES.map((file) => [basename(file), file]))('passes every record of %s', (_name, file) => {
+    const records: readonly Json[] = JSON.parse(readFileSync(file, 'utf8'));
     const results = checkRecords(records, FORMULAS);
     expect(results.length).toBeGreaterThan(0);
     expect(results.filter((result) => result.failures.length > 0)).toEqual([]);
+  });
+
+  it('has a reference record for every formula that it knows', () => {
+    const known = REFERENCE_FILES.flatMap((file) => JSON.parse(readFileSync(file, 'utf8')) as { formula: string }[]);
+    const formulas = new Set(known.map(({ formula }) => formula));
+    expect(FORMULAS.map(({ formula }) => formula).filter((formula) => !formulas.has(formula))).toEqual([]);
   });
 
   it('registers no formula twice', () => {
@@ -56,25 +65,33 @@ describe('check-numbers', () => {
   });
 
   it('fails a wrong number, an unknown formula, a missing input and an unreadable record, each by name', () => {
-    const records = [
+    const records: readonly Json[] = [
       irradiance,
       { ...irradiance, name: 'wrong', expected: { I_W_mm2: 1000 } },
       { ...irradiance, name: 'stranger', formula: 'x=y' },
       { ...irradiance, name: 'poor', inputs: { P_W: 1 } },
       { ...irradiance, name: 'empty', expected: {} },
+      { ...irradiance, name: 'rich', inputs: { ...irradiance.inputs, theta_deg: 10 } },
+      { ...irradiance, name: 'vague', tolerance: { minCorrectDigits: 6 } },
+      { ...irradiance, name: 'impossible', inputs: { P_W: 1, d_um: -5 } },
+      { name: 'nameless formula', inputs: {}, expected: { a: 1 } },
       'no record',
     ];
     const lines = reportLines(checkRecords(records, FORMULAS));
     expect(lines).toEqual([
-      '1 of 3 passed  I=P/(pi*d^2/4)',
+      '1 of 5 passed  I=P/(pi*d^2/4)',
       '0 of 1 passed  x=y',
-      '0 of 2 passed  unreadable record',
+      '0 of 4 passed  unreadable record',
       expect.stringMatching(/^FAILED wrong: I_W_mm2: expected 1000, got 1018\.59/),
       'FAILED stranger: unknown formula: x=y',
       'FAILED poor: input d_um is not a number',
-      expect.stringContaining('record "empty" expects nothing'),
+      'FAILED empty: record "empty" expects nothing',
+      'FAILED rich: unknown input: theta_deg',
+      'FAILED vague: record "vague" has an unknown tolerance: minCorrectDigits',
+      'FAILED impossible: spotDiameterUm must be a finite number above 0, but is -5',
+      'FAILED nameless formula: record "nameless formula" has no formula',
       'FAILED "no record": a record is not an object',
-      '1 passed, 5 failed',
+      '1 passed, 9 failed',
     ]);
   });
 });

@@ -1,7 +1,7 @@
 import { differences } from './compare';
 import type { FormulaEntry } from './formula-entry';
 import { Inputs } from './inputs';
-import { type Json, readRecord } from './number-record';
+import { isObject, type Json, readRecord } from './number-record';
 
 export type CheckResult = {
   readonly formula: string;
@@ -17,14 +17,21 @@ export function checkRecords(records: readonly Json[], entries: readonly Formula
 }
 
 function checkRecord(json: Json, byFormula: ReadonlyMap<string, FormulaEntry>): CheckResult {
-  let label = { formula: 'unreadable record', name: JSON.stringify(json).slice(0, 80) };
+  let label = { formula: 'unreadable record', name: nameOf(json) };
   try {
     const record = readRecord(json);
     label = { formula: record.formula, name: record.name };
     const entry = byFormula.get(record.formula);
     if (entry === undefined) return { ...label, failures: [`unknown formula: ${record.formula}`] };
-    return { ...label, failures: differences(entry.evaluate(new Inputs(record.inputs)), record.expected, record.tolerance) };
+    const inputs = new Inputs(record.inputs);
+    const wrong = differences(entry.evaluate(inputs), record.expected, record.tolerance);
+    return { ...label, failures: [...wrong, ...inputs.unasked().map((key) => `unknown input: ${key}`)] };
   } catch (error) {
     return { ...label, failures: [error instanceof Error ? error.message : String(error)] };
   }
+}
+
+/** A record that cannot be read is told by its name, else by how it begins. */
+function nameOf(json: Json): string {
+  return isObject(json) && typeof json.name === 'string' ? json.name : JSON.stringify(json).slice(0, 80);
 }

@@ -31,7 +31,9 @@ export function isObject(json: Json | undefined): json is JsonObject {
 function readTolerance(name: string, json: Json | undefined): Tolerance {
   if (json === undefined || json === null) return {};
   if (!isObject(json)) throw new TypeError(`record "${name}" has a tolerance that is not an object`);
-  const { rel, abs } = json;
+  const { rel, abs, ...unknown } = json;
+  const [stranger] = Object.keys(unknown);
+  if (stranger !== undefined) throw new TypeError(`record "${name}" has an unknown tolerance: ${stranger}`);
   if (!isTolerance(rel) || !isTolerance(abs)) throw new TypeError(`record "${name}" has a tolerance that is not a number of 0 or more`);
   return { rel, abs };
 }

@@ -2,6 +2,8 @@ import { ABLATION } from './entries/ablation';
 import { BEAM } from './entries/beam';
 import { CALIBRATION } from './entries/calibration';
 import { CAUSTIC } from './entries/caustic';
+import { COLOUR } from './entries/colour';
+import { MARK_QUALITY } from './entries/mark-quality';
 import { PULSES } from './entries/pulses';
 import { ROUND_PARTS } from './entries/round-parts';
 import { SCANNING } from './entries/scanning';
@@ -22,4 +24,6 @@ export const FORMULAS: readonly FormulaEntry[] = [
   ...TRANSFER,
   ...CALIBRATION,
   ...UNITS,
+  ...COLOUR,
+  ...MARK_QUALITY,
 ];
