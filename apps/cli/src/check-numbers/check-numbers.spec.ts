@@ -74,24 +74,26 @@ describe('check-numbers', () => {
       { ...irradiance, name: 'rich', inputs: { ...irradiance.inputs, theta_deg: 10 } },
       { ...irradiance, name: 'vague', tolerance: { minCorrectDigits: 6 } },
       { ...irradiance, name: 'impossible', inputs: { P_W: 1, d_um: -5 } },
+      { ...irradiance, name: 'wordy', inputs: { P_W: '1', d_um: 5 } },
       { name: 'nameless formula', inputs: {}, expected: { a: 1 } },
       'no record',
     ];
     const lines = reportLines(checkRecords(records, FORMULAS));
     expect(lines).toEqual([
-      '1 of 5 passed  I=P/(pi*d^2/4)',
+      '1 of 6 passed  I=P/(pi*d^2/4)',
       '0 of 1 passed  x=y',
       '0 of 4 passed  unreadable record',
       expect.stringMatching(/^FAILED wrong: I_W_mm2: expected 1000, got 1018\.59/),
       'FAILED stranger: unknown formula: x=y',
-      'FAILED poor: input d_um is not a number',
+      'FAILED poor: input d_um must be a number, but is missing',
       'FAILED empty: record "empty" expects nothing',
       'FAILED rich: unknown input: theta_deg',
       'FAILED vague: record "vague" has an unknown tolerance: minCorrectDigits',
       'FAILED impossible: spotDiameterUm must be a finite number above 0, but is -5',
+      'FAILED wordy: input P_W must be a number, but is "1"',
       'FAILED nameless formula: record "nameless formula" has no formula',
       'FAILED "no record": a record is not an object',
-      '1 passed, 9 failed',
+      '1 passed, 10 failed',
     ]);
   });
 });

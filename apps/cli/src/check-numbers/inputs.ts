@@ -1,4 +1,4 @@
-import { isObject, type JsonObject } from './number-record';
+import { isObject, type Json, type JsonObject } from './number-record';
 
 /** Inputs of a record, read with their type; a missing or wrong one is an error that names the key. */
 export class Inputs {
@@ -15,15 +15,15 @@ export class Inputs {
 
   number(key: string): number {
     const value = this.value(key);
-    if (typeof value !== 'number') throw new TypeError(`input ${this.place}${key} is not a number`);
+    if (typeof value !== 'number') throw this.wrong(key, 'a number');
     return value;
   }
 
   numbers(key: string): readonly number[] {
     const value = this.value(key);
-    if (!Array.isArray(value)) throw new TypeError(`input ${this.place}${key} is not a list of numbers`);
+    if (!Array.isArray(value)) throw this.wrong(key, 'a list of numbers');
     return value.map((item, index) => {
-      if (typeof item !== 'number') throw new TypeError(`input ${this.place}${key}[${index}] is not a number`);
+      if (typeof item !== 'number') throw wrongInput(`${this.place}${key}[${index}]`, 'a number', item);
       return item;
     });
   }
@@ -32,14 +32,14 @@ export class Inputs {
   triple(key: string): readonly [number, number, number] {
     const [first, second, third, ...more] = this.numbers(key);
     if (first === undefined || second === undefined || third === undefined || more.length > 0) {
-      throw new TypeError(`input ${this.place}${key} is not a list of three numbers`);
+      throw this.wrong(key, 'a list of three numbers');
     }
     return [first, second, third];
   }
 
   text(key: string): string {
     const value = this.value(key);
-    if (typeof value !== 'string') throw new TypeError(`input ${this.place}${key} is not a text`);
+    if (typeof value !== 'string') throw this.wrong(key, 'a text');
     return value;
   }
 
@@ -51,7 +51,7 @@ export class Inputs {
 
   object(key: string): Inputs {
     const value = this.value(key);
-    if (!isObject(value)) throw new TypeError(`input ${this.place}${key} is not an object`);
+    if (!isObject(value)) throw this.wrong(key, 'an object');
     const inner = new Inputs(value, `${this.place}${key}.`);
     this.asked.set(key, inner);
     return inner;
@@ -69,4 +69,12 @@ export class Inputs {
     if (!this.asked.has(key)) this.asked.set(key, undefined);
     return this.json[key];
   }
+
+  private wrong(key: string, wanted: string): TypeError {
+    return wrongInput(`${this.place}${key}`, wanted, this.json[key]);
+  }
+}
+
+function wrongInput(place: string, wanted: string, value: Json | undefined): TypeError {
+  return new TypeError(`input ${place} must be ${wanted}, but is ${value === undefined ? 'missing' : JSON.stringify(value)}`);
 }

@@ -97,7 +97,7 @@ export const ROUND_PARTS: readonly FormulaEntry[] = [
 
 function facets(inputs: Inputs) {
   const focusAt = inputs.text('focus_at');
-  if (focusAt !== 'mid' && focusAt !== 'crown') throw new TypeError(`input focus_at is neither mid nor crown, but ${focusAt}`);
+  if (focusAt !== 'mid' && focusAt !== 'crown') throw new TypeError(`input focus_at must be mid or crown, but is ${focusAt}`);
   const found = cylinderFacets({
     radiusMm: inputs.number('R_mm'),
     usableDepthMm: inputs.number('usable_depth_total_mm'),
