@@ -121,6 +121,7 @@ describe('the exports of recipe-model', () => {
       'stepNumbers',
       'stepsDiff',
       'transferSetting',
+      'typedSetting',
       'wordsOf',
       'workPower',
     ]);

@@ -42,6 +42,7 @@ export {
   stepNumbers,
 } from './numbers/setting-numbers';
 export { type SettingRemark, settingRemarks } from './numbers/setting-remarks';
+export { type TypedMachine, type TypedStep, typedSetting } from './numbers/typed-setting';
 export { emptyPanelFor } from './panel/empty-panel';
 export { acceptEntered, type Entry, type EntryContext, type EntryRefusal, enterValue } from './panel/enter-value';
 export { neededKeys } from './panel/needed-keys';

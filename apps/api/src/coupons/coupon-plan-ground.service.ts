@@ -1,12 +1,11 @@
 import { Injectable } from '@nestjs/common';
-import type { MeasuredCalibration } from '@proofplate/recipe-model';
+import type { MeasuredCalibration, Optics } from '@proofplate/recipe-model';
 import { InvalidError, NotFoundError } from '../common/errors/domain-error';
 import type { Tx } from '../database/unit-of-work';
 import { CalibrationsService } from '../machines/calibrations.service';
 import { MachineLensesService } from '../machines/machine-lenses.service';
 import { MachinesService } from '../machines/machines.service';
 import { type Catalogue, type CatalogueKeys, CouponPlanCatalogueService, refuseArchived } from './coupon-plan-catalogue.service';
-import type { Optics } from './coupon-plan-numbers';
 import type { SettingMachine } from './coupon-plan-setting';
 
 export type CouponKeys = CatalogueKeys & { readonly machineId: string; readonly lensId: string };

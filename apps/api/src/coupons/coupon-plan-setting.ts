@@ -2,6 +2,7 @@ import {
   acceptEntered,
   type EnteredValue,
   type MeasuredCalibration,
+  neededKeys,
   PARAMETER_KEYS,
   PARAMETERS,
   type Panel,
@@ -50,17 +51,6 @@ export function enterValues(panel: Panel, typed: TypedValues, pointer: string): 
     else problems.push({ pointer: at, detail: entry.message });
   }
   return { result: values, problems };
-}
-
-/** Continuous beams are usual for these sources, so no frequency is a setting of its own. */
-const MAY_BE_CONTINUOUS = ['co2', 'diode'];
-
-/** What a complete setting on this machine cannot do without. */
-export function neededKeys({ panel, physical }: SettingMachine, fill: ParameterSet['fill']): ParameterKey[] {
-  const needed: ParameterKey[] = ['powerPercent', 'speedMmPerS', 'pulseWidthNs', 'passes'];
-  if (!MAY_BE_CONTINUOUS.includes(physical.sourceKind)) needed.push('frequencyKhz');
-  if (fill !== 'outline') needed.push('lineSpacingUm');
-  return needed.filter((key) => panelField(panel, key) !== undefined);
 }
 
 export const missingProblem = (key: ParameterKey, pointer: string): FieldProblem => ({

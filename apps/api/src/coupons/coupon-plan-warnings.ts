@@ -1,8 +1,19 @@
 import { type DerivedNumber, PANEL_UNITS } from '@proofplate/physics';
-import { PARAMETERS, type ParameterKey, type PhysicalProfile, type SetValue, showNumber } from '@proofplate/recipe-model';
+import {
+  isAbove,
+  isWithinRange,
+  largestPulseEnergyMj,
+  machineRange,
+  type Optics,
+  PARAMETERS,
+  type ParameterKey,
+  type PhysicalProfile,
+  type SetValue,
+  showNumber,
+} from '@proofplate/recipe-model';
 import { cellDose } from './cell-dose';
 import type { PlannedCell, PlannedGrid } from './coupon-plan-grid';
-import { numbersOf, type Optics } from './coupon-plan-numbers';
+import { numbersOf } from './coupon-plan-numbers';
 import type { StoredFactor } from './coupons.repository';
 import type { DoseCautionDto, PlanWarningDto } from './dto/coupon-preview.dto';
 
@@ -13,7 +24,6 @@ export type WarningContext = {
   readonly lens: { readonly name: string; readonly fieldSizeMm: number };
 };
 
-const SAME = 1 + 1e-9;
 const SHOWN_DIGITS = 3;
 
 /** What to look at before the plate is burnt; every warning says the way out. It refuses nothing. */
@@ -34,12 +44,12 @@ export function planWarnings(grid: PlannedGrid, context: WarningContext): PlanWa
 
 function doseWarning(grid: PlannedGrid, caution: DoseCautionDto | null): PlanWarningDto[] {
   if (caution === null) return [];
-  const isAbove = (cell: PlannedCell) => (cellDose(cell.parameters).value ?? 0) >= caution.doseJPerMm2;
-  const flagged = grid.cells.filter(isAbove);
+  const isTooMuch = (cell: PlannedCell) => (cellDose(cell.parameters).value ?? 0) >= caution.doseJPerMm2;
+  const flagged = grid.cells.filter(isTooMuch);
   if (flagged.length === 0) return [];
   const limit = `${short(caution.doseJPerMm2)} J/mm²`;
   const title = `${counted(flagged.length, 'cell')} at or above ${limit} may burn too deep`;
-  return [warning('dose', title, [sentence(caution.source), wayOut(grid, isAbove)].join(' '), flagged)];
+  return [warning('dose', title, [sentence(caution.source), wayOut(grid, isTooMuch)].join(' '), flagged)];
 }
 
 function energyWarning(
@@ -47,20 +57,16 @@ function energyWarning(
   physical: PhysicalProfile,
   energyOf: (cell: PlannedCell) => number | undefined,
 ): PlanWarningDto[] {
-  const limitOf = ({ parameters }: PlannedCell) => {
-    const widthNs = parameters.values.pulseWidthNs?.physical;
-    const limits = physical.maxPulseEnergyMj ?? [];
-    return (limits.find((limit) => limit.pulseWidthNs === widthNs) ?? limits.find((limit) => limit.pulseWidthNs === null))?.energyMj;
+  const isTooMuch = (cell: PlannedCell) => {
+    const limitMj = largestPulseEnergyMj(physical, cell.parameters.values.pulseWidthNs?.physical ?? null);
+    const energyMj = energyOf(cell);
+    return energyMj !== undefined && limitMj !== null && isAbove(energyMj, limitMj);
   };
-  const isAbove = (cell: PlannedCell) => {
-    const [energyMj, limitMj] = [energyOf(cell), limitOf(cell)];
-    return energyMj !== undefined && limitMj !== undefined && energyMj > limitMj * SAME;
-  };
-  const flagged = grid.cells.filter(isAbove);
+  const flagged = grid.cells.filter(isTooMuch);
   if (flagged.length === 0) return [];
   const why = 'The source cannot give this much at this pulse width, so the mark will be weaker than the numbers say.';
   const title = `${counted(flagged.length, 'cell')} above the source’s largest pulse energy`;
-  return [warning('pulse-energy', title, `${why} ${wayOut(grid, isAbove, 'Raise the frequency or lower the power.')}`, flagged)];
+  return [warning('pulse-energy', title, `${why} ${wayOut(grid, isTooMuch, 'Raise the frequency or lower the power.')}`, flagged)];
 }
 
 const GAPS = {
@@ -78,24 +84,19 @@ function gapWarning(grid: PlannedGrid, code: keyof typeof GAPS, overlapOf: (cell
 }
 
 function rangeWarnings(grid: PlannedGrid, physical: PhysicalProfile): PlanWarningDto[] {
-  const { frequencyRangeKhz, pulseWidthRangeNs, topSpeedMmPerS } = physical;
   return [
-    ...outside(grid, 'frequencyKhz', frequencyRangeKhz, 'the source’s range of frequencies'),
-    ...outside(grid, 'pulseWidthNs', pulseWidthRangeNs, 'the source’s range of pulse widths'),
-    ...outside(
-      grid,
-      'speedMmPerS',
-      topSpeedMmPerS === undefined ? undefined : { from: 0, to: topSpeedMmPerS },
-      'what the scan head can do',
-    ),
+    ...outside(grid, 'frequencyKhz', physical, 'the source’s range of frequencies'),
+    ...outside(grid, 'pulseWidthNs', physical, 'the source’s range of pulse widths'),
+    ...outside(grid, 'speedMmPerS', physical, 'what the scan head can do'),
   ];
 }
 
-function outside(grid: PlannedGrid, key: ParameterKey, range: { from: number; to: number } | undefined, what: string): PlanWarningDto[] {
+function outside(grid: PlannedGrid, key: ParameterKey, physical: PhysicalProfile, what: string): PlanWarningDto[] {
+  const range = machineRange(physical, key);
   if (range === undefined) return [];
-  const isOutside = (cell: PlannedCell) => {
-    const value = cell.parameters.values[key]?.physical;
-    return value !== undefined && (value * SAME < range.from || value > range.to * SAME);
+  const isOutside = ({ parameters }: PlannedCell) => {
+    const value = parameters.values[key]?.physical;
+    return value !== undefined && !isWithinRange(value, range);
   };
   const flagged = grid.cells.filter(isOutside);
   if (flagged.length === 0) return [];

@@ -4,6 +4,9 @@ import type { ParameterSet } from '../vocabulary/setting';
 
 export type AreaMm = { readonly widthMm: number; readonly heightMm: number };
 
+/** Overheads are always known: a delay that nobody gives is none. */
+export type OwnArea = MarkArea & { readonly lineOverheadMs: number; readonly jumpSettleMs: number; readonly pauseBetweenMs: number };
+
 const US_PER_MS = 1000;
 
 /**
@@ -18,7 +21,7 @@ export function markAreaOf(
   { values, delaysUs }: Pick<ParameterSet, 'values' | 'delaysUs'>,
   physical: PhysicalProfile,
   areaMm: AreaMm,
-): MarkArea {
+): OwnArea {
   const { jumpSpeedMmPerS, accelerationMmPerS2, laserOnDelayUs = 0, laserOffDelayUs = 0, jumpSettleMs = 0 } = physical;
   const speedMmPerS = values.speedMmPerS?.physical ?? 0;
   const rampMs = accelerationMmPerS2 === undefined || speedMmPerS <= 0 ? 0 : 2 * runIn(speedMmPerS, accelerationMmPerS2).timeMs;
