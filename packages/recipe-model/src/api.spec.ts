@@ -103,6 +103,8 @@ describe('the exports of recipe-model', () => {
       'nextRevisionState',
       'panelProblems',
       'parameterClassOf',
+      'partGround',
+      'partResults',
       'partSetUp',
       'powerShift',
       'rangesOverlap',

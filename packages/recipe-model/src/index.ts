@@ -74,7 +74,9 @@ export {
   type PartShape,
   type PartSide,
 } from './part/entered-part';
+export { type PartOpticsFacts, partGround } from './part/part-ground';
 export { lengthIn, lengthMm, lengthWords } from './part/part-lengths';
+export { type PartNumber, type PartResults, partResults } from './part/part-results';
 export { PART_INSIDE_NOT_CHECKED, PART_NOT_CHECKED, type PartSetUp, partSetUp } from './part/part-set-up';
 export { type DatedCalibration, type PowerShift, type PowerShiftInput, powerShift } from './power/power-shift';
 export { CALIBRATION_FREQUENCY_TOLERANCE, type MeasuredCalibration, type WorkPowerInput, workPower } from './power/work-power';
