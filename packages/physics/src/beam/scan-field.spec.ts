@@ -12,6 +12,11 @@ describe('scanField', () => {
     expect(diagonalLimitedSideMm * Math.SQRT2).toBeCloseTo(sideMm, 12);
   });
 
+  it('takes the optical angle: twice the turn of the mirror, which is what a lens for 163 mm and 110 mm states', () => {
+    const mirrorAngleDeg = 19.333 / 2;
+    expect(scanField(163, 2 * mirrorAngleDeg).sideMm).toBeCloseTo(110, 2);
+  });
+
   it('refuses a right angle', () => {
     expect(() => scanField(160, 90)).toThrow('opticalAngleDeg must be below 90, but is 90');
   });

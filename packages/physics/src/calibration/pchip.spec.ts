@@ -15,6 +15,15 @@ describe('pchip', () => {
     expect(values.map((value) => value.toFixed(4))).toEqual(['0.4640', '0.9645', '0.9965', '0.9992']);
   });
 
+  // The same table by other rules in print: 18.632812 (limiter of 1980 on mean secants), 18.682031 (Steffen), 18.6 (straight lines).
+  it('uses weighted harmonic slopes and no other monotone cubic', () => {
+    const x = [5, 10, 20, 40, 60, 80, 100];
+    const y = [0.1, 0.9, 3.1, 8.4, 13, 16.8, 19.2];
+    const curve = { x, y, slopes: pchipSlopes(x, y) };
+    expect(pchipValue(curve, 95)).toBeCloseTo(18.723841, 6);
+    expect(pchipValue(curve, 7.5)).toBeCloseTo(0.473707, 6);
+  });
+
   it('gives the points themselves and a straight line for points on one', () => {
     const x = [0, 1, 3, 4];
     const y = [1, 3, 7, 9];

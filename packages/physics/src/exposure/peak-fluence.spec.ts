@@ -1,4 +1,5 @@
 import { expectReference } from '../../test/expect-reference';
+import { averageFluence } from './average-fluence';
 import { peakFluence } from './peak-fluence';
 import { pulseEnergy } from './pulse-energy';
 
@@ -16,6 +17,11 @@ describe('peakFluence', () => {
       energyMj += peakJPerCm2 * Math.exp((-2 * r ** 2) / radiusUm ** 2) * ringCm2 * 1000;
     }
     expect(energyMj).toBeCloseTo(1, 5);
+  });
+
+  it('is twice the average fluence: 101.86 and 50.93 J/cm² for 1 mJ on 50 µm', () => {
+    expect(peakFluence(1, 50)).toBeCloseTo(101.859164, 6);
+    expect(averageFluence(1, 50)).toBeCloseTo(50.929582, 6);
   });
 
   it('refuses a negative spot', () => {
