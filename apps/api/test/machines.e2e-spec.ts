@@ -22,6 +22,15 @@ const get = (url: string, headers: Record<string, string> = shop.operator.header
 const patch = (machine: MachineDto, payload: object, version = machine.version) =>
   test.app.inject({ method: 'PATCH', url: `/api/machines/${machine.id}`, headers: editing(shop.lead, version), payload });
 
+describe('an address with what is no id', () => {
+  it.each(['machines', 'lenses', 'materials', 'finishes', 'effects', 'material-groups', 'photos'])(
+    'leads to no thing of %s, as that of an unknown one does',
+    async (things) => {
+      expectProblem(await get(`/api/${things}/no-id`), 404, 'not-found');
+    },
+  );
+});
+
 describe('POST /api/machines', () => {
   it('adds a machine with its first profile and writes it into the ledger', async () => {
     const machine = await makeMachine(test, shop.lead, { name: 'Bench 1' });

@@ -1,4 +1,4 @@
-import { Body, Controller, Get, HttpCode, Param, ParseUUIDPipe, Patch, Post, Query } from '@nestjs/common';
+import { Body, Controller, Get, HttpCode, Param, Patch, Post, Query } from '@nestjs/common';
 import { ApiBearerAuth, ApiCreatedResponse, ApiOkResponse, ApiOperation, ApiTags } from '@nestjs/swagger';
 import type { Actor } from '../common/actor';
 import { ApiIfMatch } from '../common/decorators/api-headers.decorator';
@@ -7,6 +7,7 @@ import { CurrentMember } from '../common/decorators/current-member.decorator';
 import { Idempotent } from '../common/decorators/idempotent.decorator';
 import { IfMatch } from '../common/decorators/if-match.decorator';
 import { ArchivedQuery } from '../common/pagination/archived.query';
+import { IdPipe } from '../common/pipes/id.pipe';
 import { CreateLensDto } from './dto/create-lens.dto';
 import { LensDto, LensPageDto } from './dto/lens.dto';
 import { UpdateLensDto } from './dto/update-lens.dto';
@@ -39,7 +40,7 @@ export class LensesController {
   @AtLeast('operator')
   @ApiOperation({ summary: 'One lens' })
   @ApiOkResponse({ type: LensDto })
-  get(@CurrentMember() actor: Actor, @Param('lensId', ParseUUIDPipe) lensId: string) {
+  get(@CurrentMember() actor: Actor, @Param('lensId', IdPipe) lensId: string) {
     return this.lenses.get(actor, lensId);
   }
 
@@ -48,12 +49,7 @@ export class LensesController {
   @ApiIfMatch()
   @ApiOperation({ summary: 'Change a lens; only what is given changes' })
   @ApiOkResponse({ type: LensDto })
-  update(
-    @CurrentMember() actor: Actor,
-    @Param('lensId', ParseUUIDPipe) lensId: string,
-    @IfMatch() version: number,
-    @Body() dto: UpdateLensDto,
-  ) {
+  update(@CurrentMember() actor: Actor, @Param('lensId', IdPipe) lensId: string, @IfMatch() version: number, @Body() dto: UpdateLensDto) {
     return this.lenses.update(actor, lensId, version, dto);
   }
 
@@ -63,7 +59,7 @@ export class LensesController {
   @ApiIfMatch()
   @ApiOperation({ summary: 'Take a lens out of the choices' })
   @ApiOkResponse({ type: LensDto })
-  archive(@CurrentMember() actor: Actor, @Param('lensId', ParseUUIDPipe) lensId: string, @IfMatch() version: number) {
+  archive(@CurrentMember() actor: Actor, @Param('lensId', IdPipe) lensId: string, @IfMatch() version: number) {
     return this.lenses.setArchived(actor, lensId, version, true);
   }
 
@@ -73,7 +69,7 @@ export class LensesController {
   @ApiIfMatch()
   @ApiOperation({ summary: 'Bring an archived lens back' })
   @ApiOkResponse({ type: LensDto })
-  restore(@CurrentMember() actor: Actor, @Param('lensId', ParseUUIDPipe) lensId: string, @IfMatch() version: number) {
+  restore(@CurrentMember() actor: Actor, @Param('lensId', IdPipe) lensId: string, @IfMatch() version: number) {
     return this.lenses.setArchived(actor, lensId, version, false);
   }
 }

@@ -1,9 +1,10 @@
-import { Body, Controller, Get, Param, ParseUUIDPipe, Post, Query } from '@nestjs/common';
+import { Body, Controller, Get, Param, Post, Query } from '@nestjs/common';
 import { ApiBearerAuth, ApiCreatedResponse, ApiOkResponse, ApiOperation, ApiTags } from '@nestjs/swagger';
 import type { Actor } from '../common/actor';
 import { AtLeast } from '../common/decorators/at-least.decorator';
 import { CurrentMember } from '../common/decorators/current-member.decorator';
 import { Idempotent } from '../common/decorators/idempotent.decorator';
+import { IdPipe } from '../common/pipes/id.pipe';
 import { CalibrationsService } from './calibrations.service';
 import {
   CalibrationDto,
@@ -24,7 +25,7 @@ export class CalibrationsController {
   @AtLeast('operator')
   @ApiOperation({ summary: 'Power calibrations of the machine, newest first' })
   @ApiOkResponse({ type: CalibrationPageDto })
-  list(@CurrentMember() actor: Actor, @Param('machineId', ParseUUIDPipe) machineId: string, @Query() query: ListCalibrationsQuery) {
+  list(@CurrentMember() actor: Actor, @Param('machineId', IdPipe) machineId: string, @Query() query: ListCalibrationsQuery) {
     return this.calibrations.list(actor, machineId, query);
   }
 
@@ -33,7 +34,7 @@ export class CalibrationsController {
   @Idempotent()
   @ApiOperation({ summary: 'Add a power calibration; it is never changed afterwards' })
   @ApiCreatedResponse({ type: CalibrationDto })
-  create(@CurrentMember() actor: Actor, @Param('machineId', ParseUUIDPipe) machineId: string, @Body() dto: CreateCalibrationDto) {
+  create(@CurrentMember() actor: Actor, @Param('machineId', IdPipe) machineId: string, @Body() dto: CreateCalibrationDto) {
     return this.calibrations.create(actor, machineId, dto);
   }
 
@@ -43,8 +44,8 @@ export class CalibrationsController {
   @ApiOkResponse({ type: CalibrationWattsDto })
   watts(
     @CurrentMember() actor: Actor,
-    @Param('machineId', ParseUUIDPipe) machineId: string,
-    @Param('calibrationId', ParseUUIDPipe) calibrationId: string,
+    @Param('machineId', IdPipe) machineId: string,
+    @Param('calibrationId', IdPipe) calibrationId: string,
     @Query() { percent }: CalibrationWattsQuery,
   ) {
     return this.calibrations.watts(actor, machineId, calibrationId, percent);

@@ -1,4 +1,4 @@
-import { Body, Controller, Get, Param, ParseUUIDPipe, Patch, Post } from '@nestjs/common';
+import { Body, Controller, Get, Param, Patch, Post } from '@nestjs/common';
 import { ApiBearerAuth, ApiCreatedResponse, ApiOkResponse, ApiOperation, ApiTags } from '@nestjs/swagger';
 import type { Actor } from '../common/actor';
 import { ApiIfMatch } from '../common/decorators/api-headers.decorator';
@@ -6,6 +6,7 @@ import { AtLeast } from '../common/decorators/at-least.decorator';
 import { CurrentMember } from '../common/decorators/current-member.decorator';
 import { Idempotent } from '../common/decorators/idempotent.decorator';
 import { IfMatch } from '../common/decorators/if-match.decorator';
+import { IdPipe } from '../common/pipes/id.pipe';
 import { CreateMachineLensDto, MachineLensDto, MachineLensListDto, UpdateMachineLensDto } from './dto/machine-lens.dto';
 import { MachineLensesService } from './machine-lenses.service';
 
@@ -19,7 +20,7 @@ export class MachineLensesController {
   @AtLeast('operator')
   @ApiOperation({ summary: 'Lenses of the machine with working distance and measured spot' })
   @ApiOkResponse({ type: MachineLensListDto })
-  list(@CurrentMember() actor: Actor, @Param('machineId', ParseUUIDPipe) machineId: string) {
+  list(@CurrentMember() actor: Actor, @Param('machineId', IdPipe) machineId: string) {
     return this.pairs.list(actor, machineId);
   }
 
@@ -28,7 +29,7 @@ export class MachineLensesController {
   @Idempotent()
   @ApiOperation({ summary: 'Put a lens on the machine’s list' })
   @ApiCreatedResponse({ type: MachineLensDto })
-  add(@CurrentMember() actor: Actor, @Param('machineId', ParseUUIDPipe) machineId: string, @Body() dto: CreateMachineLensDto) {
+  add(@CurrentMember() actor: Actor, @Param('machineId', IdPipe) machineId: string, @Body() dto: CreateMachineLensDto) {
     return this.pairs.add(actor, machineId, dto);
   }
 
@@ -39,8 +40,8 @@ export class MachineLensesController {
   @ApiOkResponse({ type: MachineLensDto })
   update(
     @CurrentMember() actor: Actor,
-    @Param('machineId', ParseUUIDPipe) machineId: string,
-    @Param('lensId', ParseUUIDPipe) lensId: string,
+    @Param('machineId', IdPipe) machineId: string,
+    @Param('lensId', IdPipe) lensId: string,
     @IfMatch() version: number,
     @Body() dto: UpdateMachineLensDto,
   ) {

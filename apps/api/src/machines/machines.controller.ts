@@ -1,4 +1,4 @@
-import { Body, Controller, Get, HttpCode, Param, ParseUUIDPipe, Patch, Post, Query } from '@nestjs/common';
+import { Body, Controller, Get, HttpCode, Param, Patch, Post, Query } from '@nestjs/common';
 import { ApiBearerAuth, ApiCreatedResponse, ApiOkResponse, ApiOperation, ApiTags } from '@nestjs/swagger';
 import type { Actor } from '../common/actor';
 import { ApiIfMatch } from '../common/decorators/api-headers.decorator';
@@ -7,6 +7,7 @@ import { CurrentMember } from '../common/decorators/current-member.decorator';
 import { Idempotent } from '../common/decorators/idempotent.decorator';
 import { IfMatch } from '../common/decorators/if-match.decorator';
 import { ArchivedQuery } from '../common/pagination/archived.query';
+import { IdPipe } from '../common/pipes/id.pipe';
 import { CreateMachineDto } from './dto/create-machine.dto';
 import { MachineDto, MachinePageDto } from './dto/machine.dto';
 import { MachineProfileListDto } from './dto/machine-profile.dto';
@@ -40,7 +41,7 @@ export class MachinesController {
   @AtLeast('operator')
   @ApiOperation({ summary: 'One machine with the profile in force' })
   @ApiOkResponse({ type: MachineDto })
-  get(@CurrentMember() actor: Actor, @Param('machineId', ParseUUIDPipe) machineId: string) {
+  get(@CurrentMember() actor: Actor, @Param('machineId', IdPipe) machineId: string) {
     return this.machines.get(actor, machineId);
   }
 
@@ -51,7 +52,7 @@ export class MachinesController {
   @ApiOkResponse({ type: MachineDto })
   update(
     @CurrentMember() actor: Actor,
-    @Param('machineId', ParseUUIDPipe) machineId: string,
+    @Param('machineId', IdPipe) machineId: string,
     @IfMatch() version: number,
     @Body() dto: UpdateMachineDto,
   ) {
@@ -62,7 +63,7 @@ export class MachinesController {
   @AtLeast('operator')
   @ApiOperation({ summary: 'Every version of the machine’s profile, newest first' })
   @ApiOkResponse({ type: MachineProfileListDto })
-  listProfiles(@CurrentMember() actor: Actor, @Param('machineId', ParseUUIDPipe) machineId: string) {
+  listProfiles(@CurrentMember() actor: Actor, @Param('machineId', IdPipe) machineId: string) {
     return this.machines.listProfiles(actor, machineId);
   }
 
@@ -72,7 +73,7 @@ export class MachinesController {
   @ApiIfMatch()
   @ApiOperation({ summary: 'Take a machine out of the choices' })
   @ApiOkResponse({ type: MachineDto })
-  archive(@CurrentMember() actor: Actor, @Param('machineId', ParseUUIDPipe) machineId: string, @IfMatch() version: number) {
+  archive(@CurrentMember() actor: Actor, @Param('machineId', IdPipe) machineId: string, @IfMatch() version: number) {
     return this.machines.setArchived(actor, machineId, version, true);
   }
 
@@ -82,7 +83,7 @@ export class MachinesController {
   @ApiIfMatch()
   @ApiOperation({ summary: 'Bring an archived machine back' })
   @ApiOkResponse({ type: MachineDto })
-  restore(@CurrentMember() actor: Actor, @Param('machineId', ParseUUIDPipe) machineId: string, @IfMatch() version: number) {
+  restore(@CurrentMember() actor: Actor, @Param('machineId', IdPipe) machineId: string, @IfMatch() version: number) {
     return this.machines.setArchived(actor, machineId, version, false);
   }
 }

@@ -1,4 +1,4 @@
-import { Body, Controller, Get, Param, ParseUUIDPipe, Patch, Post, Query } from '@nestjs/common';
+import { Body, Controller, Get, Param, Patch, Post, Query } from '@nestjs/common';
 import { ApiBearerAuth, ApiCreatedResponse, ApiOkResponse, ApiOperation, ApiTags } from '@nestjs/swagger';
 import type { Actor } from '../common/actor';
 import { ApiIfMatch } from '../common/decorators/api-headers.decorator';
@@ -6,6 +6,7 @@ import { AtLeast } from '../common/decorators/at-least.decorator';
 import { CurrentMember } from '../common/decorators/current-member.decorator';
 import { Idempotent } from '../common/decorators/idempotent.decorator';
 import { IfMatch } from '../common/decorators/if-match.decorator';
+import { IdPipe } from '../common/pipes/id.pipe';
 import { CautionsService } from './cautions.service';
 import { CautionDto, CautionPageDto, CautionsForDto, CautionsForQuery, CreateCautionDto, UpdateCautionDto } from './dto/caution.dto';
 
@@ -47,7 +48,7 @@ export class CautionsController {
   @ApiOkResponse({ type: CautionDto })
   tighten(
     @CurrentMember() actor: Actor,
-    @Param('cautionId', ParseUUIDPipe) cautionId: string,
+    @Param('cautionId', IdPipe) cautionId: string,
     @IfMatch() version: number,
     @Body() dto: UpdateCautionDto,
   ) {

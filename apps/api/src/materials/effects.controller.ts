@@ -1,4 +1,4 @@
-import { Body, Controller, Get, HttpCode, Param, ParseUUIDPipe, Patch, Post, Query } from '@nestjs/common';
+import { Body, Controller, Get, HttpCode, Param, Patch, Post, Query } from '@nestjs/common';
 import { ApiBearerAuth, ApiCreatedResponse, ApiOkResponse, ApiOperation, ApiTags } from '@nestjs/swagger';
 import type { Actor } from '../common/actor';
 import { ApiIfMatch } from '../common/decorators/api-headers.decorator';
@@ -7,6 +7,7 @@ import { CurrentMember } from '../common/decorators/current-member.decorator';
 import { Idempotent } from '../common/decorators/idempotent.decorator';
 import { IfMatch } from '../common/decorators/if-match.decorator';
 import { ArchivedQuery } from '../common/pagination/archived.query';
+import { IdPipe } from '../common/pipes/id.pipe';
 import { CreateEffectDto, EffectDto, EffectPageDto, UpdateEffectDto } from './dto/effect.dto';
 import { EffectsService } from './effects.service';
 
@@ -37,7 +38,7 @@ export class EffectsController {
   @AtLeast('operator')
   @ApiOperation({ summary: 'One effect' })
   @ApiOkResponse({ type: EffectDto })
-  get(@CurrentMember() actor: Actor, @Param('effectId', ParseUUIDPipe) effectId: string) {
+  get(@CurrentMember() actor: Actor, @Param('effectId', IdPipe) effectId: string) {
     return this.effects.get(actor, effectId);
   }
 
@@ -48,7 +49,7 @@ export class EffectsController {
   @ApiOkResponse({ type: EffectDto })
   update(
     @CurrentMember() actor: Actor,
-    @Param('effectId', ParseUUIDPipe) effectId: string,
+    @Param('effectId', IdPipe) effectId: string,
     @IfMatch() version: number,
     @Body() dto: UpdateEffectDto,
   ) {
@@ -61,7 +62,7 @@ export class EffectsController {
   @ApiIfMatch()
   @ApiOperation({ summary: 'Take an effect out of the choices' })
   @ApiOkResponse({ type: EffectDto })
-  archive(@CurrentMember() actor: Actor, @Param('effectId', ParseUUIDPipe) effectId: string, @IfMatch() version: number) {
+  archive(@CurrentMember() actor: Actor, @Param('effectId', IdPipe) effectId: string, @IfMatch() version: number) {
     return this.effects.setArchived(actor, effectId, version, true);
   }
 
@@ -71,7 +72,7 @@ export class EffectsController {
   @ApiIfMatch()
   @ApiOperation({ summary: 'Bring an archived effect back' })
   @ApiOkResponse({ type: EffectDto })
-  restore(@CurrentMember() actor: Actor, @Param('effectId', ParseUUIDPipe) effectId: string, @IfMatch() version: number) {
+  restore(@CurrentMember() actor: Actor, @Param('effectId', IdPipe) effectId: string, @IfMatch() version: number) {
     return this.effects.setArchived(actor, effectId, version, false);
   }
 }

@@ -1,4 +1,4 @@
-import { Body, Controller, Get, HttpCode, Param, ParseUUIDPipe, Patch, Post, Query } from '@nestjs/common';
+import { Body, Controller, Get, HttpCode, Param, Patch, Post, Query } from '@nestjs/common';
 import { ApiBearerAuth, ApiCreatedResponse, ApiOkResponse, ApiOperation, ApiTags } from '@nestjs/swagger';
 import type { Actor } from '../common/actor';
 import { ApiIfMatch } from '../common/decorators/api-headers.decorator';
@@ -7,6 +7,7 @@ import { CurrentMember } from '../common/decorators/current-member.decorator';
 import { Idempotent } from '../common/decorators/idempotent.decorator';
 import { IfMatch } from '../common/decorators/if-match.decorator';
 import { ArchivedQuery } from '../common/pagination/archived.query';
+import { IdPipe } from '../common/pipes/id.pipe';
 import { CreateFinishDto, FinishDto, FinishPageDto, UpdateFinishDto } from './dto/finish.dto';
 import { FinishesService } from './finishes.service';
 
@@ -37,7 +38,7 @@ export class FinishesController {
   @AtLeast('operator')
   @ApiOperation({ summary: 'One finish' })
   @ApiOkResponse({ type: FinishDto })
-  get(@CurrentMember() actor: Actor, @Param('finishId', ParseUUIDPipe) finishId: string) {
+  get(@CurrentMember() actor: Actor, @Param('finishId', IdPipe) finishId: string) {
     return this.finishes.get(actor, finishId);
   }
 
@@ -48,7 +49,7 @@ export class FinishesController {
   @ApiOkResponse({ type: FinishDto })
   update(
     @CurrentMember() actor: Actor,
-    @Param('finishId', ParseUUIDPipe) finishId: string,
+    @Param('finishId', IdPipe) finishId: string,
     @IfMatch() version: number,
     @Body() dto: UpdateFinishDto,
   ) {
@@ -61,7 +62,7 @@ export class FinishesController {
   @ApiIfMatch()
   @ApiOperation({ summary: 'Take a finish out of the choices' })
   @ApiOkResponse({ type: FinishDto })
-  archive(@CurrentMember() actor: Actor, @Param('finishId', ParseUUIDPipe) finishId: string, @IfMatch() version: number) {
+  archive(@CurrentMember() actor: Actor, @Param('finishId', IdPipe) finishId: string, @IfMatch() version: number) {
     return this.finishes.setArchived(actor, finishId, version, true);
   }
 
@@ -71,7 +72,7 @@ export class FinishesController {
   @ApiIfMatch()
   @ApiOperation({ summary: 'Bring an archived finish back' })
   @ApiOkResponse({ type: FinishDto })
-  restore(@CurrentMember() actor: Actor, @Param('finishId', ParseUUIDPipe) finishId: string, @IfMatch() version: number) {
+  restore(@CurrentMember() actor: Actor, @Param('finishId', IdPipe) finishId: string, @IfMatch() version: number) {
     return this.finishes.setArchived(actor, finishId, version, false);
   }
 }

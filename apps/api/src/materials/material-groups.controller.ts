@@ -1,4 +1,4 @@
-import { Body, Controller, Get, Param, ParseUUIDPipe, Patch, Post, Query } from '@nestjs/common';
+import { Body, Controller, Get, Param, Patch, Post, Query } from '@nestjs/common';
 import { ApiBearerAuth, ApiCreatedResponse, ApiOkResponse, ApiOperation, ApiTags } from '@nestjs/swagger';
 import type { Actor } from '../common/actor';
 import { ApiIfMatch } from '../common/decorators/api-headers.decorator';
@@ -7,6 +7,7 @@ import { CurrentMember } from '../common/decorators/current-member.decorator';
 import { Idempotent } from '../common/decorators/idempotent.decorator';
 import { IfMatch } from '../common/decorators/if-match.decorator';
 import { PageQuery } from '../common/pagination/page';
+import { IdPipe } from '../common/pipes/id.pipe';
 import { CreateMaterialGroupDto, MaterialGroupDto, MaterialGroupPageDto, UpdateMaterialGroupDto } from './dto/material-group.dto';
 import { MaterialGroupsService } from './material-groups.service';
 
@@ -37,7 +38,7 @@ export class MaterialGroupsController {
   @AtLeast('operator')
   @ApiOperation({ summary: 'One group of materials' })
   @ApiOkResponse({ type: MaterialGroupDto })
-  get(@CurrentMember() actor: Actor, @Param('groupId', ParseUUIDPipe) groupId: string) {
+  get(@CurrentMember() actor: Actor, @Param('groupId', IdPipe) groupId: string) {
     return this.groups.get(actor, groupId);
   }
 
@@ -48,7 +49,7 @@ export class MaterialGroupsController {
   @ApiOkResponse({ type: MaterialGroupDto })
   update(
     @CurrentMember() actor: Actor,
-    @Param('groupId', ParseUUIDPipe) groupId: string,
+    @Param('groupId', IdPipe) groupId: string,
     @IfMatch() version: number,
     @Body() dto: UpdateMaterialGroupDto,
   ) {

@@ -1,4 +1,4 @@
-import { Body, Controller, Get, HttpCode, Param, ParseUUIDPipe, Patch, Post, Query } from '@nestjs/common';
+import { Body, Controller, Get, HttpCode, Param, Patch, Post, Query } from '@nestjs/common';
 import { ApiBearerAuth, ApiCreatedResponse, ApiOkResponse, ApiOperation, ApiTags } from '@nestjs/swagger';
 import type { Actor } from '../common/actor';
 import { ApiIfMatch } from '../common/decorators/api-headers.decorator';
@@ -6,6 +6,7 @@ import { AtLeast } from '../common/decorators/at-least.decorator';
 import { CurrentMember } from '../common/decorators/current-member.decorator';
 import { Idempotent } from '../common/decorators/idempotent.decorator';
 import { IfMatch } from '../common/decorators/if-match.decorator';
+import { IdPipe } from '../common/pipes/id.pipe';
 import {
   CreateMaterialDto,
   ListMaterialsQuery,
@@ -51,7 +52,7 @@ export class MaterialsController {
   @AtLeast('operator')
   @ApiOperation({ summary: 'One material' })
   @ApiOkResponse({ type: MaterialDto })
-  get(@CurrentMember() actor: Actor, @Param('materialId', ParseUUIDPipe) materialId: string) {
+  get(@CurrentMember() actor: Actor, @Param('materialId', IdPipe) materialId: string) {
     return this.materials.get(actor, materialId);
   }
 
@@ -62,7 +63,7 @@ export class MaterialsController {
   @ApiOkResponse({ type: MaterialDto })
   update(
     @CurrentMember() actor: Actor,
-    @Param('materialId', ParseUUIDPipe) materialId: string,
+    @Param('materialId', IdPipe) materialId: string,
     @IfMatch() version: number,
     @Body() dto: UpdateMaterialDto,
   ) {
@@ -75,7 +76,7 @@ export class MaterialsController {
   @ApiIfMatch()
   @ApiOperation({ summary: 'Take a material out of the choices' })
   @ApiOkResponse({ type: MaterialDto })
-  archive(@CurrentMember() actor: Actor, @Param('materialId', ParseUUIDPipe) materialId: string, @IfMatch() version: number) {
+  archive(@CurrentMember() actor: Actor, @Param('materialId', IdPipe) materialId: string, @IfMatch() version: number) {
     return this.materials.setArchived(actor, materialId, version, true);
   }
 
@@ -85,7 +86,7 @@ export class MaterialsController {
   @ApiIfMatch()
   @ApiOperation({ summary: 'Bring an archived material back' })
   @ApiOkResponse({ type: MaterialDto })
-  restore(@CurrentMember() actor: Actor, @Param('materialId', ParseUUIDPipe) materialId: string, @IfMatch() version: number) {
+  restore(@CurrentMember() actor: Actor, @Param('materialId', IdPipe) materialId: string, @IfMatch() version: number) {
     return this.materials.setArchived(actor, materialId, version, false);
   }
 }

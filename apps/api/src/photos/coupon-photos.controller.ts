@@ -1,4 +1,4 @@
-import { Controller, Get, Param, ParseUUIDPipe, Post, Query, Req, Res } from '@nestjs/common';
+import { Controller, Get, Param, Post, Query, Req, Res } from '@nestjs/common';
 import {
   ApiBearerAuth,
   ApiBody,
@@ -14,6 +14,7 @@ import type { Actor } from '../common/actor';
 import { AtLeast } from '../common/decorators/at-least.decorator';
 import { CurrentMember } from '../common/decorators/current-member.decorator';
 import { UPLOAD_LIMIT_BYTES } from '../common/http/http-options';
+import { IdPipe } from '../common/pipes/id.pipe';
 import { ListPhotosQuery } from './dto/list-photos.query.dto';
 import { PhotoDto, PhotoPageDto } from './dto/photo.dto';
 import { PhotoIntakeService } from './photo-intake.service';
@@ -40,7 +41,7 @@ export class CouponPhotosController {
   @AtLeast('operator')
   @ApiOperation({ summary: 'Photos of a coupon, newest first' })
   @ApiOkResponse({ type: PhotoPageDto })
-  list(@CurrentMember() actor: Actor, @Param('couponId', ParseUUIDPipe) couponId: string, @Query() query: ListPhotosQuery) {
+  list(@CurrentMember() actor: Actor, @Param('couponId', IdPipe) couponId: string, @Query() query: ListPhotosQuery) {
     return this.photos.list(actor, couponId, query);
   }
 
@@ -56,7 +57,7 @@ export class CouponPhotosController {
   @ApiOkResponse({ type: PhotoDto, description: 'these bytes were sent before' })
   async upload(
     @CurrentMember() actor: Actor,
-    @Param('couponId', ParseUUIDPipe) couponId: string,
+    @Param('couponId', IdPipe) couponId: string,
     @Req() request: FastifyRequest,
     @Res({ passthrough: true }) reply: FastifyReply,
   ) {

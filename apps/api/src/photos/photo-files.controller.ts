@@ -1,7 +1,8 @@
-import { Controller, Get, Header, Param, ParseEnumPipe, ParseUUIDPipe, Query, StreamableFile } from '@nestjs/common';
+import { Controller, Get, Header, Param, ParseEnumPipe, Query, StreamableFile } from '@nestjs/common';
 import { ApiOkResponse, ApiOperation, ApiParam, ApiProduces, ApiTags } from '@nestjs/swagger';
 import { Public } from '../common/decorators/public.decorator';
 import { NotFoundError } from '../common/errors/domain-error';
+import { IdPipe } from '../common/pipes/id.pipe';
 import { Env } from '../config/env.validation';
 import { keptObjectKey } from '../storage/object-keys';
 import { ObjectMissingError } from '../storage/storage.errors';
@@ -31,8 +32,8 @@ export class PhotoFilesController {
   @Header('Cross-Origin-Resource-Policy', 'same-origin')
   @Header('X-Content-Type-Options', 'nosniff')
   async get(
-    @Param('photoId', ParseUUIDPipe) photoId: string,
-    @Param('size', new ParseEnumPipe(SIZES)) size: PhotoSize,
+    @Param('photoId', IdPipe) photoId: string,
+    @Param('size', new ParseEnumPipe(SIZES, { exceptionFactory: () => new NotFoundError() })) size: PhotoSize,
     @Query() { shop, object, expires, signature }: PhotoFileQuery,
   ): Promise<StreamableFile> {
     const address = { shopId: shop, photoId, size, sha256: object };

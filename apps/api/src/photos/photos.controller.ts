@@ -1,10 +1,11 @@
-import { Body, Controller, Get, HttpCode, Param, ParseUUIDPipe, Post, Put } from '@nestjs/common';
+import { Body, Controller, Get, HttpCode, Param, Post, Put } from '@nestjs/common';
 import { ApiBearerAuth, ApiOkResponse, ApiOperation, ApiTags } from '@nestjs/swagger';
 import type { Actor } from '../common/actor';
 import { ApiIfMatch } from '../common/decorators/api-headers.decorator';
 import { AtLeast } from '../common/decorators/at-least.decorator';
 import { CurrentMember } from '../common/decorators/current-member.decorator';
 import { IfMatch } from '../common/decorators/if-match.decorator';
+import { IdPipe } from '../common/pipes/id.pipe';
 import { PhotoDto } from './dto/photo.dto';
 import { SetCornersDto } from './dto/set-corners.dto';
 import { PhotosService } from './photos.service';
@@ -19,7 +20,7 @@ export class PhotosController {
   @AtLeast('operator')
   @ApiOperation({ summary: 'One photo with its state and addresses' })
   @ApiOkResponse({ type: PhotoDto })
-  get(@CurrentMember() actor: Actor, @Param('photoId', ParseUUIDPipe) photoId: string) {
+  get(@CurrentMember() actor: Actor, @Param('photoId', IdPipe) photoId: string) {
     return this.photos.get(actor, photoId);
   }
 
@@ -30,7 +31,7 @@ export class PhotosController {
   @ApiOkResponse({ type: PhotoDto })
   setCorners(
     @CurrentMember() actor: Actor,
-    @Param('photoId', ParseUUIDPipe) photoId: string,
+    @Param('photoId', IdPipe) photoId: string,
     @IfMatch() version: number,
     @Body() dto: SetCornersDto,
   ) {
@@ -42,7 +43,7 @@ export class PhotosController {
   @AtLeast('operator')
   @ApiOperation({ summary: 'Process a photo again that is stuck; safe to repeat' })
   @ApiOkResponse({ type: PhotoDto })
-  retry(@CurrentMember() actor: Actor, @Param('photoId', ParseUUIDPipe) photoId: string) {
+  retry(@CurrentMember() actor: Actor, @Param('photoId', IdPipe) photoId: string) {
     return this.photos.retry(actor, photoId);
   }
 }
