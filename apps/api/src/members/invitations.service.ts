@@ -42,7 +42,7 @@ export class InvitationsService {
   }
 
   async list(actor: Actor, query: PageQuery): Promise<Page<InvitationDto>> {
-    const [beforeId] = decodeCursor(query.cursor, ['string']) ?? [];
+    const [beforeId] = decodeCursor(query.cursor, ['id']) ?? [];
     const from = typeof beforeId === 'string' ? beforeId : undefined;
     const rows = await this.unitOfWork.read(actor, (tx) => this.repository.list(tx, actor.shopId, from, query.limit + 1));
     return pageOf(rows, query.limit, { item: ({ row, ...more }) => toInvitationDto(row, more, actor), cursor: ({ row }) => [row.id] });

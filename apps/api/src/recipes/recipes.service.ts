@@ -27,7 +27,7 @@ export class RecipesService {
   ) {}
 
   async list(actor: Actor, { limit, cursor, ...filter }: ListRecipesQuery): Promise<RecipePageDto> {
-    const [rank, activeAt, id] = decodeCursor(cursor, ['number', 'string', 'string']) ?? [];
+    const [rank, activeAt, id] = decodeCursor(cursor, ['number', 'moment', 'id']) ?? [];
     const after = rank === undefined ? {} : { after: { rank: Number(rank), activeAt: String(activeAt), id: String(id) } };
     return this.unitOfWork.read(actor, async (tx) => {
       const viewer = await this.views.viewerOf(tx, actor);

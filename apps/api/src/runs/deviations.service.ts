@@ -20,7 +20,7 @@ export class DeviationsService {
   ) {}
 
   async list(actor: Actor, query: ListDeviationsQuery): Promise<Page<DeviationDto>> {
-    const [beforeId] = decodeCursor(query.cursor, ['string']) ?? [];
+    const [beforeId] = decodeCursor(query.cursor, ['id']) ?? [];
     const wanted = {
       ...(query.revisionId === undefined ? {} : { revisionId: query.revisionId }),
       ...(beforeId === undefined ? {} : { beforeId: String(beforeId) }),

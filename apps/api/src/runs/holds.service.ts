@@ -25,7 +25,7 @@ export class HoldsService {
   ) {}
 
   async list(actor: Actor, query: ListHoldsQuery): Promise<Page<HoldDto>> {
-    const [beforeId] = decodeCursor(query.cursor, ['string']) ?? [];
+    const [beforeId] = decodeCursor(query.cursor, ['id']) ?? [];
     const page = { state: query.state, limit: query.limit + 1, ...(beforeId === undefined ? {} : { beforeId: String(beforeId) }) };
     const rows = await this.unitOfWork.read(actor, (tx) => this.holds.list(tx, actor.shopId, page));
     return pageOf(rows, query.limit, { item: (row) => toHoldDto(row, actor), cursor: ({ id }) => [id] });

@@ -25,7 +25,7 @@ export class RunListService {
   ) {}
 
   async list(actor: Actor, query: ListRunsQuery): Promise<Page<RunSummaryDto>> {
-    const [startedAt, id] = decodeCursor(query.cursor, ['string', 'string']) ?? [];
+    const [startedAt, id] = decodeCursor(query.cursor, ['moment', 'id']) ?? [];
     const after = startedAt === undefined ? {} : { after: { startedAt: String(startedAt), id: String(id) } };
     const page = { filter: filterOf(actor, query), limit: query.limit + 1, ...after };
     const views = await this.unitOfWork.read(actor, (tx) => this.runs.list(tx, actor.shopId, page));

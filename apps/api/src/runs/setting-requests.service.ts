@@ -22,7 +22,7 @@ export class SettingRequestsService {
 
   /** Trainees see their own, operators and leads everybody's. */
   async list(actor: Actor, query: ListRequestsQuery): Promise<Page<SettingRequestDto>> {
-    const [beforeId] = decodeCursor(query.cursor, ['string']) ?? [];
+    const [beforeId] = decodeCursor(query.cursor, ['id']) ?? [];
     const page = {
       limit: query.limit + 1,
       ...(query.state === undefined ? {} : { state: query.state }),

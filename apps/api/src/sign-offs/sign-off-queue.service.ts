@@ -16,7 +16,7 @@ export class SignOffQueueService {
   ) {}
 
   async list(actor: Actor, { limit, cursor }: PageQuery): Promise<SignOffQueueDto> {
-    const [submittedAt, id] = decodeCursor(cursor, ['string', 'string']) ?? [];
+    const [submittedAt, id] = decodeCursor(cursor, ['moment', 'id']) ?? [];
     const after = submittedAt === undefined ? {} : { after: { submittedAt: String(submittedAt), id: String(id) } };
     return this.unitOfWork.read(actor, async (tx) => {
       const rows = await this.signOffs.queue(tx, actor.shopId, { limit: limit + 1, ...after });

@@ -1,5 +1,6 @@
 import { type Problem, problem } from './problem';
 
+const NO_TIME = 'A day or a time is none that can be stored. Enter it again.';
 const RETRY_SOON = { 'retry-after': '1' };
 
 /** SQLSTATE → problem. Classes of two characters stand for all their members. */
@@ -9,6 +10,8 @@ const BY_SQLSTATE: Readonly<Record<string, () => Problem>> = {
   '23514': () => problem('conflict', 'The database refused a value that breaks a rule. Load the page again and check the entries.'),
   '22P05': () => problem('invalid-fields', 'A text holds a character that cannot be stored. Type it again.'),
   '22021': () => problem('invalid-fields', 'A text holds a character that cannot be stored. Type it again.'),
+  '22007': () => problem('invalid-fields', NO_TIME),
+  '22008': () => problem('invalid-fields', NO_TIME),
   '22003': () => problem('invalid-fields', 'A number is too large to be stored.'),
   '40001': () => problem('try-again', undefined, RETRY_SOON),
   '40P01': () => problem('try-again', undefined, RETRY_SOON),

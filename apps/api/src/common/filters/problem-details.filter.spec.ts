@@ -18,6 +18,7 @@ describe('problemOf()', () => {
   it.each([
     ['23505', 'already-exists', 409],
     ['23503', 'still-in-use', 409],
+    ['22008', 'invalid-fields', 422],
     ['40001', 'try-again', 503],
     ['57014', 'took-too-long', 503],
     ['57P01', 'try-again', 503],

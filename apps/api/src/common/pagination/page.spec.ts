@@ -24,4 +24,26 @@ describe('decodeCursor()', () => {
   it.each([['not base64 ❌'], ['bm90IGpzb24'], [encodeCursor([1])], [encodeCursor(['a', 'b'])]])('refuses %s', (cursor) => {
     expect(() => decodeCursor(cursor, ['string', 'number'])).toThrow(InvalidError);
   });
+
+  const id = '0192f3a4-0000-7000-8000-000000000001';
+
+  it.each([
+    ['id', id],
+    ['day', '2026-05-14'],
+    ['moment', '2026-05-14T08:30:00.123Z'],
+    ['moment', '2026-05-14 08:30:00.123456+00'],
+  ] as const)('gives back an %s as %s', (kind, part) => {
+    expect(decodeCursor(encodeCursor([part]), [kind])).toEqual([part]);
+  });
+
+  it.each([
+    ['id', 'C-0001'],
+    ['day', '2026-02-30'],
+    ['moment', 'yesterday'],
+    ['moment', '2026-02-30T08:30:00Z'],
+    ['number', 1.5],
+    ['number', 2 ** 60],
+  ] as const)('refuses an %s such as %s, which the database could not compare', (kind, part) => {
+    expect(() => decodeCursor(encodeCursor([part]), [kind])).toThrow(InvalidError);
+  });
 });

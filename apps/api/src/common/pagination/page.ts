@@ -1,7 +1,8 @@
 import { type Type as ClassOf } from '@nestjs/common';
 import { ApiProperty, ApiPropertyOptional } from '@nestjs/swagger';
 import { Type } from 'class-transformer';
-import { IsInt, IsOptional, IsString, Max, MaxLength, Min } from 'class-validator';
+import { IsInt, IsOptional, IsString, isUUID, Max, MaxLength, Min } from 'class-validator';
+import { isDay } from '../decorators/is-day';
 import { InvalidError } from '../errors/domain-error';
 
 export const DEFAULT_PAGE_SIZE = 25;
@@ -27,6 +28,8 @@ export class PageQuery {
 
 export type Page<T> = { readonly items: T[]; readonly nextCursor: string | null };
 export type CursorPart = string | number;
+/** What the sort value of a list is; it goes into a comparison of the database, which knows no other form. */
+export type CursorKind = 'string' | 'number' | 'id' | 'day' | 'moment';
 
 /** Response class of a list: `class MemberPageDto extends PageOf(MemberDto) {}`. */
 export function PageOf<T>(item: ClassOf<T>) {
@@ -45,13 +48,13 @@ export const encodeCursor = (parts: readonly CursorPart[]) => Buffer.from(JSON.s
 /**
  * The sort values behind a cursor, or undefined for the first page.
  *
- * @param kinds type of each sort value, in order
+ * @param kinds kind of each sort value, in order
  * @throws InvalidError when the text is not a cursor of this list
  */
-export function decodeCursor(cursor: string | undefined, kinds: readonly ('string' | 'number')[]): CursorPart[] | undefined {
+export function decodeCursor(cursor: string | undefined, kinds: readonly CursorKind[]): CursorPart[] | undefined {
   if (cursor === undefined) return undefined;
   const parts = parseCursor(cursor);
-  const fits = Array.isArray(parts) && parts.length === kinds.length && parts.every((part, index) => typeof part === kinds[index]);
+  const fits = Array.isArray(parts) && parts.length === kinds.length && parts.every((part, index) => isOfKind(part, kinds[index]));
   if (fits) return parts;
   throw new InvalidError('Start again from the first page.', [{ pointer: '#/cursor', detail: 'This is not a cursor of this list.' }]);
 }
@@ -66,6 +69,16 @@ export function pageOf<Row, Item>(
   const last = kept.at(-1);
   const hasMore = rows.length > limit && last !== undefined;
   return { items: kept.map(as.item), nextCursor: hasMore ? encodeCursor(as.cursor(last)) : null };
+}
+
+const MOMENT = /^(\d{4}-\d{2}-\d{2})[T ]\d{2}:\d{2}:\d{2}(?:\.\d{1,6})?(?:Z|[+-]\d{2}(?::\d{2})?)$/;
+
+function isOfKind(part: unknown, kind: CursorKind | undefined): boolean {
+  if (kind === 'number') return Number.isSafeInteger(part);
+  if (typeof part !== 'string') return false;
+  if (kind === 'id') return isUUID(part);
+  if (kind === 'day') return isDay(part);
+  return kind === 'string' || isDay(MOMENT.exec(part)?.[1] ?? '');
 }
 
 function parseCursor(cursor: string): unknown {
