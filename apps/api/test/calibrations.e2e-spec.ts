@@ -82,6 +82,11 @@ describe('POST /api/machines/:id/calibrations', () => {
     expect(pointersOf(expectProblem(answer, 422, 'invalid-fields'))).toEqual(['#/measuredOn', '#/meterDueOn']);
   });
 
+  it('refuses a reading of a day that is still to come, which would be the newest until then', async () => {
+    const problem = expectProblem(await post(reading({ measuredOn: '2999-01-01' })), 422, 'invalid-fields');
+    expect(pointersOf(problem)).toEqual(['#/measuredOn']);
+  });
+
   it('is for leads; another shop’s machine is not there', async () => {
     expectProblem(await post(reading(), shop.operator.headers), 403, 'not-permitted');
     expectProblem(await post(reading(), elsewhere.lead.headers), 404, 'not-found');

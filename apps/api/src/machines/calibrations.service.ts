@@ -5,6 +5,7 @@ import { InvalidError, NotFoundError } from '../common/errors/domain-error';
 import { decodeCursor, type Page, pageOf } from '../common/pagination/page';
 import { type Tx, UnitOfWork } from '../database/unit-of-work';
 import { LedgerService } from '../ledger/ledger.service';
+import { ShopsService } from '../shops/shops.service';
 import { pointProblems, type ReadingPoint } from './calibration-points';
 import { toCalibrationDto } from './calibrations.mapper';
 import { type CalibrationRow, CalibrationsRepository, type CalibrationValues, type CalibrationView } from './calibrations.repository';
@@ -21,11 +22,12 @@ export class CalibrationsService {
     private readonly unitOfWork: UnitOfWork,
     private readonly machines: MachinesService,
     private readonly calibrations: CalibrationsRepository,
+    private readonly shops: ShopsService,
     private readonly ledger: LedgerService,
   ) {}
 
   async list(actor: Actor, machineId: string, query: ListCalibrationsQuery): Promise<Page<CalibrationDto>> {
-    const [measuredOn, id] = decodeCursor(query.cursor, ['string', 'string']) ?? [];
+    const [measuredOn, id] = decodeCursor(query.cursor, ['day', 'id']) ?? [];
     const before = measuredOn === undefined ? {} : { before: { measuredOn: String(measuredOn), id: String(id) } };
     return this.unitOfWork.read(actor, async (tx) => {
       await this.machines.getMachineWithProfile(tx, actor.shopId, machineId);
@@ -43,6 +45,7 @@ export class CalibrationsService {
     return this.unitOfWork.run(actor, async (tx) => {
       const { machine } = await this.machines.getMachineWithProfile(tx, actor.shopId, machineId);
       if (machine.archivedAt !== null) throw new MachineArchivedError();
+      if (dto.measuredOn > (await this.shops.today(tx, actor.shopId))) throw measuredLater();
       const values = valuesOf(machineId, dto);
       const id = await this.calibrations.insert(tx, actor.shopId, actor.memberId, values);
       const entry = { actor, action: 'power-calibration.added', subjectType: 'power-calibration', subjectId: id };
@@ -82,6 +85,12 @@ export class CalibrationsService {
     return view;
   }
 }
+
+/** A reading of a later day would stay the newest, and fresh, until then. */
+const measuredLater = () =>
+  new InvalidError('One field needs another look.', [
+    { pointer: '#/measuredOn', detail: 'This day is still to come. Enter the day on which the meter was read.' },
+  ]);
 
 function valuesOf(machineId: string, dto: CreateCalibrationDto): CalibrationValues {
   return {

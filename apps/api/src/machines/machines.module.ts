@@ -1,5 +1,6 @@
 import { Module } from '@nestjs/common';
 import { LedgerModule } from '../ledger/ledger.module';
+import { ShopsModule } from '../shops/shops.module';
 import { CalibrationsController } from './calibrations.controller';
 import { CalibrationsRepository } from './calibrations.repository';
 import { CalibrationsService } from './calibrations.service';
@@ -11,7 +12,7 @@ import { MachinesRepository } from './machines.repository';
 import { MachinesService } from './machines.service';
 
 @Module({
-  imports: [LedgerModule],
+  imports: [LedgerModule, ShopsModule],
   controllers: [MachinesController, MachineLensesController, CalibrationsController],
   providers: [
     MachinesService,

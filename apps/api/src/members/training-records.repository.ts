@@ -1,8 +1,8 @@
 import { Injectable } from '@nestjs/common';
 import { schema, type Tx } from '@proofplate/db';
-import { and, desc, eq, sql } from 'drizzle-orm';
+import { and, desc, eq } from 'drizzle-orm';
 
-const { trainingRecord, member, shop } = schema;
+const { trainingRecord, member } = schema;
 
 export type NewTrainingRecord = {
   readonly id: string;
@@ -29,15 +29,5 @@ export class TrainingRecordsRepository {
       .innerJoin(member, and(eq(member.shopId, trainingRecord.shopId), eq(member.id, trainingRecord.createdBy)))
       .where(and(eq(trainingRecord.shopId, shopId), eq(trainingRecord.memberId, memberId)))
       .orderBy(desc(trainingRecord.taughtOn), desc(trainingRecord.id));
-  }
-
-  /** The day it is now where the shop is, such as 2026-05-14. */
-  async today(tx: Tx, shopId: string): Promise<string> {
-    const [row] = await tx
-      .select({ today: sql<string>`to_char(now() at time zone ${shop.timeZone}, 'YYYY-MM-DD')` })
-      .from(shop)
-      .where(eq(shop.id, shopId));
-    if (row === undefined) throw new Error('the transaction has no shop');
-    return row.today;
   }
 }

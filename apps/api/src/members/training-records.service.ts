@@ -3,6 +3,7 @@ import { uuidv7 } from 'uuidv7';
 import { type FieldProblem, InvalidError } from '../common/errors/domain-error';
 import { type Actor, type Tx, UnitOfWork } from '../database/unit-of-work';
 import { LedgerService } from '../ledger/ledger.service';
+import { ShopsService } from '../shops/shops.service';
 import { CreateTrainingRecordDto, TrainingRecordDto } from './dto/training-record.dto';
 import { MembersService } from './members.service';
 import { TrainingRecordsRepository } from './training-records.repository';
@@ -14,6 +15,7 @@ export class TrainingRecordsService {
     private readonly unitOfWork: UnitOfWork,
     private readonly repository: TrainingRecordsRepository,
     private readonly members: MembersService,
+    private readonly shops: ShopsService,
     private readonly ledger: LedgerService,
   ) {}
 
@@ -28,7 +30,7 @@ export class TrainingRecordsService {
   async create(actor: Actor, memberId: string, dto: CreateTrainingRecordDto): Promise<TrainingRecordDto[]> {
     return this.unitOfWork.run(actor, async (tx) => {
       await this.members.getActiveRow(tx, actor.shopId, memberId);
-      refuseWrongDays(dto, await this.repository.today(tx, actor.shopId));
+      refuseWrongDays(dto, await this.shops.today(tx, actor.shopId));
       const { subject, taughtBy, taughtOn, expiresOn } = dto;
       await this.repository.insert(tx, {
         ...{ id: uuidv7(), shopId: actor.shopId, memberId, subject, taughtBy, createdBy: actor.memberId },
@@ -42,7 +44,7 @@ export class TrainingRecordsService {
   }
 
   private async dtos(tx: Tx, { shopId }: Actor, memberId: string): Promise<TrainingRecordDto[]> {
-    const today = await this.repository.today(tx, shopId);
+    const today = await this.shops.today(tx, shopId);
     const rows = await this.repository.list(tx, shopId, memberId);
     return rows.map(({ row, recordedBy }) => {
       const expiresOn = row.expiresOn === null ? null : asDay(row.expiresOn);

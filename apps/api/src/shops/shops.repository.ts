@@ -28,6 +28,15 @@ export class ShopsRepository {
     return row;
   }
 
+  /** The day it is now where the shop is, such as 2026-05-14. */
+  async today(tx: Tx, shopId: string): Promise<string | undefined> {
+    const [row] = await tx
+      .select({ today: sql<string>`to_char(now() at time zone ${shop.timeZone}, 'YYYY-MM-DD')` })
+      .from(shop)
+      .where(eq(shop.id, shopId));
+    return row?.today;
+  }
+
   /** Undefined when the version is no longer the present one. */
   async update(tx: Tx, shopId: string, version: number, change: ShopChange): Promise<ShopRow | undefined> {
     const [row] = await tx

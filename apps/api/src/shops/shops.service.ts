@@ -31,6 +31,13 @@ export class ShopsService {
     return row;
   }
 
+  /** The day it is now where the shop is: a day that somebody enters is one of the shop's calendar. */
+  async today(tx: Tx, shopId: string): Promise<string> {
+    const today = await this.repository.today(tx, shopId);
+    if (today === undefined) throw new NotFoundError();
+    return today;
+  }
+
   async get(actor: Actor): Promise<ShopDto> {
     return this.unitOfWork.read(actor, async (tx) => toShopDto(await this.getRow(tx, actor.shopId), actor.role));
   }
