@@ -12,6 +12,7 @@ import { MachineLenses } from '../features/machines/components/machine-lenses';
 import { PanelPreview } from '../features/machines/components/panel-preview';
 import { ProfileHistory } from '../features/machines/components/profile-history';
 import { type Machine, setMachineArchived, useMachine } from '../features/machines/machines.api';
+import { PowerShifts } from '../features/recipes/power/power-shifts';
 import { paths } from '../lib/paths';
 
 export function Component() {
@@ -72,6 +73,7 @@ function Sections({ machine }: { machine: Machine }) {
       <chakra.div display="grid" gap="6" gridTemplateColumns="minmax(0, 1fr)">
         <MachineLenses machine={machine} lenses={lenses?.items ?? []} />
         <Calibrations machine={machine} />
+        <PowerShifts machine={machine} />
       </chakra.div>
       <chakra.div display="grid" gap="4" gridTemplateColumns="minmax(0, 1fr)">
         <chakra.section aria-labelledby="panel-title">

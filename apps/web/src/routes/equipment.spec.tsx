@@ -79,7 +79,12 @@ describe('the equipment page', () => {
 
 describe('adding a machine', () => {
   const answer = { 'POST /api/machines': () => ({ status: 201, body: machine }), 'GET /api/machines/m1': () => ({ body: machine }) };
-  const rest = { 'GET /api/machines/m1/lenses': none, 'GET /api/machines/m1/calibrations': none, 'GET /api/machines/m1/profiles': none };
+  const rest = {
+    'GET /api/machines/m1/lenses': none,
+    'GET /api/machines/m1/calibrations': none,
+    'GET /api/machines/m1/profiles': none,
+    'GET /api/recipes/power-shifts': none,
+  };
 
   it('sends numbers in their units and the panel in its order, after a row was moved, and opens the machine', async () => {
     const { user } = open('/equipment/machines/new', { ...answer, ...rest });
@@ -184,6 +189,7 @@ describe('power calibrations', () => {
     'GET /api/machines/m1': () => ({ body: machine }),
     'GET /api/machines/m1/lenses': none,
     'GET /api/machines/m1/profiles': listOf(machine.profile),
+    'GET /api/recipes/power-shifts': none,
     'GET /api/machines/m1/calibrations': listOf(calibration),
     'POST /api/machines/m1/calibrations': () => ({ status: 201, body: calibration }),
   };
@@ -192,6 +198,30 @@ describe('power calibrations', () => {
     open('/equipment/machines/m1', handlers);
     expect(await screen.findByRole('img', { name: /4 May 2026: 0 percent 0 watts, 50 percent 9 watts/ })).toBeVisible();
     expect(screen.getByText('entered by Hanne Voss')).toBeVisible();
+  });
+
+  it('show how the source has aged at one setting, and which recipes its watts have left', async () => {
+    const later = {
+      ...calibration,
+      id: 'c2',
+      measuredOn: '2026-11-02',
+      points: [0, 50, 100].map((percent) => ({ percent, watts: percent * 0.162 })),
+    };
+    const shift = {
+      ...{ stepIndex: 0, beforeW: 9, afterW: 8.1, shiftPercent: -10, citedOn: '2026-05-04', measuredOn: '2026-11-02' },
+      ...{ limitPercent: 5, isCheckDue: true },
+    };
+    const recipe = { id: 'r1', code: 'R-0012', title: 'Serial plate', revisionNumber: 2, machine: { id: 'm1', name: machine.name } };
+    open('/equipment/machines/m1', {
+      ...handlers,
+      'GET /api/machines/m1/calibrations': listOf(later, calibration),
+      'GET /api/recipes/power-shifts': listOf({ ...recipe, shift, reason: null }),
+    });
+    expect(await screen.findByRole('img', { name: /^At 100.%: 18.00.W on 4 May 2026, 16.20.W on 2 Nov 2026: −10.0.%\.$/ })).toBeVisible();
+    const recipes = within(screen.getByRole('region', { name: 'Recipes and their watts now' }));
+    expect(await recipes.findByRole('link', { name: 'R-0012' })).toBeVisible();
+    expect(recipes.getByText('Check due')).toBeVisible();
+    expect(recipes.getByText(/1 of 1 due for a check/)).toBeVisible();
   });
 
   it('are added from a pasted table; a pair that falls is named before anything is sent', async () => {

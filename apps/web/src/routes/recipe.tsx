@@ -13,6 +13,7 @@ import { Holds } from '../features/recipes/components/holds';
 import { RevisionBody } from '../features/recipes/components/revision-body';
 import { RevisionLadder } from '../features/recipes/components/revision-ladder';
 import { ProposeChangeButton } from '../features/recipes/forms/propose-change-button';
+import { CheckDue } from '../features/recipes/power/check-due';
 import { type Recipe, useRecipe } from '../features/recipes/recipes.api';
 import { recipeMark, recipeStateWord, revisionName } from '../features/recipes/revision-words';
 import { WithdrawDialog } from '../features/sign-offs/forms/withdraw-form';
@@ -62,6 +63,7 @@ function RecipePage({ recipe }: { recipe: Recipe }) {
       actions={<RecipeActions recipe={recipe} />}
     >
       <Holds recipe={recipe} />
+      <CheckDue recipe={recipe} />
       {currentRevision === null ? (
         <chakra.div display="grid" gap="4">
           <NoApproved recipe={recipe} />

@@ -68,6 +68,7 @@ export const makeAnswer = (rest: object = {}) => ({
   signature: { printedName: 'Hanne Voss', signedAt: '2026-03-03T08:12:00.000Z', isByAuthor: false },
   holdsUntil: '2026-09-30T10:00:00.000Z',
   isOverdue: false,
+  checkDue: null,
   contentHash: '7f3ac21e'.repeat(8),
   blockedBecause: [],
   allowedActions: ['start-run'],

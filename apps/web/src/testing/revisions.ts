@@ -147,6 +147,7 @@ export function makeRecipe(current: Revision | null, revisions: readonly Revisio
     current,
     underWay: revisions.find(({ id }) => id !== current?.id) ?? null,
     isHeld: false,
+    checkDue: null,
     face: null,
     last30Days: { good: 110, scrap: 2 },
     needsYou: null,

@@ -11,6 +11,8 @@ export type Recipe = Schemas['RecipeDto'];
 export type RecipeSummary = Schemas['RecipeSummaryDto'];
 export type RecipePage = Schemas['RecipePageDto'];
 export type RecipeFacets = Schemas['RecipeFacetsDto'];
+export type PowerShift = Schemas['PowerShiftDto'];
+export type RecipePowerShift = Schemas['RecipePowerShiftDto'];
 export type RecipeFace = Schemas['RecipeFaceDto'];
 export type Revision = Schemas['RecipeRevisionDto'];
 export type RevisionBrief = Schemas['RevisionBriefDto'];
@@ -52,6 +54,11 @@ export function useRecipes(filters: RecipeFilters) {
   const showMore = useCallback(() => void setSize(size + 1), [setSize, size]);
   const hasMore = data?.at(-1)?.nextCursor !== null;
   return { pages: data, error, isLoading, isValidating, retry: () => void mutate(), showMore, hasMore };
+}
+
+/** Approved settings of a machine with what later readings of the power meter say of them. */
+export function usePowerShifts(machineId: string): SWRResponse<Schemas['RecipePowerShiftPageDto'], ProblemError> {
+  return useRead<Schemas['RecipePowerShiftPageDto']>(`${RECIPES}/power-shifts`, { machineId, limit: LARGEST_PAGE });
 }
 
 /** Every row that fits, for a file: all pages, one after the other. */

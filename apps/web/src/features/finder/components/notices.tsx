@@ -2,6 +2,7 @@ import { chakra } from '@chakra-ui/react';
 import type { ReactNode } from 'react';
 import { StateShape } from '../../../components/state-mark';
 import { formatTime } from '../../../lib/format';
+import { shiftWords } from '../../../lib/power-shift-words';
 import { useSession } from '../../../lib/session';
 import type { FinderAnswer, FinderCaution, WithdrawnRecipe } from '../finder.api';
 
@@ -53,6 +54,11 @@ export function AnswerNotices({ answer }: { answer: FinderAnswer }) {
           {isBlocked
             ? 'The shop’s policy stops runs until then. Tell a lead.'
             : 'It may still be used. Compare the first piece with care, and tell a lead.'}
+        </Look>
+      )}
+      {answer.checkDue !== null && (
+        <Look title={shiftWords(answer.checkDue)}>
+          The setting stays as it was signed. Compare the first piece with care, and tell a lead.
         </Look>
       )}
       {!answer.isProfilePresent && (

@@ -9,9 +9,11 @@ import { ReadProblem } from '../../../components/read-problem';
 import { SkeletonBlock } from '../../../components/skeletons';
 import { useStatusLine } from '../../../components/status-line';
 import { formatDay, formatQuantity } from '../../../lib/format';
+import { Ageing } from '../ageing/ageing';
 import { CalibrationForm } from '../forms/calibration-form';
 import { type Calibration, type Machine, useCalibrations } from '../machines.api';
 import { CalibrationCurve } from './calibration-curve';
+import { conditionsOf } from './reading-conditions';
 
 /** How many earlier readings stand behind the newest in the picture. */
 const SHOWN_EARLIER = 3;
@@ -25,24 +27,27 @@ export function Calibrations({ machine }: { machine: Machine }) {
     announce('The power calibration is added. It stays as it is.');
   };
   return (
-    <chakra.section aria-labelledby="calibrations-title">
-      <Flex justify="space-between" align="center" gap="3" wrap="wrap">
-        <chakra.h2 id="calibrations-title">Power calibrations</chakra.h2>
-        {machine.allowedActions.includes('add-calibration') && (
-          <Button icon={<PlusIcon />} onClick={() => setIsAdding(true)}>
-            Add readings
-          </Button>
+    <>
+      <chakra.section aria-labelledby="calibrations-title">
+        <Flex justify="space-between" align="center" gap="3" wrap="wrap">
+          <chakra.h2 id="calibrations-title">Power calibrations</chakra.h2>
+          {machine.allowedActions.includes('add-calibration') && (
+            <Button icon={<PlusIcon />} onClick={() => setIsAdding(true)}>
+              Add readings
+            </Button>
+          )}
+        </Flex>
+        {data === undefined && error === undefined && <SkeletonBlock height="240px" label="Loading the calibrations" />}
+        {data === undefined && error !== undefined && <ReadProblem problem={error} onRetry={() => void mutate()} />}
+        {data !== undefined && <Readings calibrations={data.items} />}
+        {isAdding && (
+          <Dialog title="Add a power calibration" width="broad" onClose={() => setIsAdding(false)}>
+            <CalibrationForm machine={machine} onAdded={handleAdded} />
+          </Dialog>
         )}
-      </Flex>
-      {data === undefined && error === undefined && <SkeletonBlock height="240px" label="Loading the calibrations" />}
-      {data === undefined && error !== undefined && <ReadProblem problem={error} onRetry={() => void mutate()} />}
-      {data !== undefined && <Readings calibrations={data.items} />}
-      {isAdding && (
-        <Dialog title="Add a power calibration" width="broad" onClose={() => setIsAdding(false)}>
-          <CalibrationForm machine={machine} onAdded={handleAdded} />
-        </Dialog>
-      )}
-    </chakra.section>
+      </chakra.section>
+      {data !== undefined && data.items.length > 0 && <Ageing calibrations={data.items} />}
+    </>
   );
 }
 
@@ -104,11 +109,3 @@ const COLUMNS: readonly Column<Calibration>[] = [
     cell: ({ meter, meterDueOn }) => (meterDueOn === null ? meter : `${meter}, due ${formatDay(meterDueOn)}`),
   },
 ];
-
-function conditionsOf({ wavelengthNm, frequencyKhz, pulseWidthNs }: Calibration): string {
-  return [
-    formatQuantity(wavelengthNm, 'nm'),
-    ...(frequencyKhz === null ? [] : [formatQuantity(frequencyKhz, 'kHz')]),
-    ...(pulseWidthNs === null ? [] : [formatQuantity(pulseWidthNs, 'ns')]),
-  ].join(' · ');
-}

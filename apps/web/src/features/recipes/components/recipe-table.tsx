@@ -72,9 +72,10 @@ function columns(timeZone: string): readonly Column<RecipeSummary>[] {
 }
 
 /** The approved setting stays the row; a revision under way is a second line. */
-function RecipeState({ recipe: { state, current, underWay, isHeld } }: { recipe: RecipeSummary }) {
+function RecipeState({ recipe: { state, current, underWay, isHeld, checkDue } }: { recipe: RecipeSummary }) {
   return (
     <chakra.span display="inline-grid" justifyItems="start" py="1">
+      {checkDue !== null && <StateMark state="reproveDue">Check due: power moved</StateMark>}
       {isHeld && <StateMark state="caution">On hold</StateMark>}
       <StateMark state={recipeMark(state)}>{recipeStateWord(state)}</StateMark>
       {current !== null && underWay !== null && <StateMark state={markOf(underWay)}>{underWayWord(underWay)}</StateMark>}
