@@ -65,7 +65,7 @@ describe('POST /api/runs', () => {
       lot: 'B14',
       firstPiece: null,
       startedBy: { id: shop.trainee.id },
-      allowedActions: ['tick', 'first-piece', 'finish', 'bad-result'],
+      allowedActions: ['tick', 'set-up-part', 'first-piece', 'finish', 'bad-result'],
     });
     expect(Object.keys(run.ticks)).toEqual(['set-up.0', 'setting.0.powerPercent']);
     expect(run.contentHash).not.toBe('');
@@ -253,6 +253,8 @@ describe('first piece and finish', () => {
     expect(refused.firstPiece).toMatchObject({ ok: false, note: 'Too pale', byName: shop.trainee.printedName });
     expectProblem(await act(run, 'finish', { good: 1, scrap: 0 }), 409, 'first-piece-not-released');
     await act(run, 'first-piece', { ok: true });
+    const nothing = expectProblem(await act(run, 'finish', { good: 24, scrap: 2, notes: null, measurements: null }), 422, 'invalid-fields');
+    expect(pointersOf(nothing)).toEqual(['#/measurements', '#/notes']);
     const finished = (await act(run, 'finish', { good: 24, scrap: 2, notes: 'Two slipped' })).json<RunDto>();
     expect(finished).toMatchObject({ state: 'finished', good: 24, scrap: 2, notes: 'Two slipped', allowedActions: ['bad-result'] });
     expect(finished.finishedAt).not.toBeNull();

@@ -79,6 +79,12 @@ describe('PATCH /api/shop', () => {
     expectProblem(await patch(owner.headers, { name: 'X' }, '"v9"'), 412, 'stale-version');
   });
 
+  it('takes null for no value', async () => {
+    const { owner } = await makeStaffedShop(test);
+    const problem = expectProblem(await patch(owner.headers, { name: null, policy: null, password: null }), 422, 'invalid-fields');
+    expect(pointersOf(problem)).toEqual(['#/name', '#/password', '#/policy']);
+  });
+
   it('names every wrong field, nested ones too', async () => {
     const { owner } = await makeStaffedShop(test);
     const policy = { ...DEFAULT_SHOP_POLICY, minimumConfirmationMarks: 0, powerShiftPercent: '5', extra: 1 };

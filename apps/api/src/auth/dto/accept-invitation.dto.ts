@@ -1,6 +1,7 @@
 import { ApiProperty, ApiPropertyOptional } from '@nestjs/swagger';
 import { ROLES, type Role } from '@proofplate/recipe-model';
-import { IsOptional, IsString, MaxLength, MinLength } from 'class-validator';
+import { IsString, MaxLength, MinLength } from 'class-validator';
+import { MayBeAbsent } from '../../common/decorators/may-be-absent';
 import { Trimmed } from '../../common/decorators/trimmed';
 import { MAX_PERSON_NAME_LENGTH } from '../../members/dto/update-member.dto';
 import { MAX_TYPED_PASSWORD_LENGTH } from '../hashing/password-rules';
@@ -23,7 +24,7 @@ export class InvitationPreviewDto {
 
 export class AcceptInvitationDto extends InvitationTokenDto {
   @ApiPropertyOptional({ maxLength: MAX_PERSON_NAME_LENGTH, description: 'Name under signatures; needed for a new account' })
-  @IsOptional()
+  @MayBeAbsent()
   @Trimmed()
   @IsString()
   @MinLength(1)

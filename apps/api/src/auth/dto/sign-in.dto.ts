@@ -1,5 +1,6 @@
 import { ApiProperty, ApiPropertyOptional } from '@nestjs/swagger';
-import { IsEmail, IsOptional, IsString, IsUUID, MaxLength, MinLength } from 'class-validator';
+import { IsEmail, IsString, IsUUID, MaxLength, MinLength } from 'class-validator';
+import { MayBeAbsent } from '../../common/decorators/may-be-absent';
 import { Trimmed } from '../../common/decorators/trimmed';
 import { MAX_EMAIL_LENGTH } from '../../members/dto/create-invitation.dto';
 import { MAX_TYPED_PASSWORD_LENGTH } from '../hashing/password-rules';
@@ -18,7 +19,7 @@ export class SignInDto {
   password: string;
 
   @ApiPropertyOptional({ format: 'uuid', description: 'Which shop to work in, for people who are in several' })
-  @IsOptional()
+  @MayBeAbsent()
   @IsUUID()
   shopId?: string;
 }

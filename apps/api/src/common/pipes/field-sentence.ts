@@ -36,6 +36,7 @@ export function fieldSentence(error: ValidationError): string {
   const constraints = error.constraints ?? {};
   const names = Object.keys(constraints);
   const own = Object.values(constraints).find((message) => !isLibraryText(message, error.property));
+  if (error.value === null && !names.includes('whitelistValidation')) return 'Enter a value here, or leave the field out.';
   if (isMissing(error.value) && !names.includes('whitelistValidation')) return 'This is needed.';
   if (names.length === 1 && own !== undefined) return own;
   const name = KIND_FIRST.find((kind) => kind in constraints) ?? names[0] ?? '';
@@ -44,7 +45,7 @@ export function fieldSentence(error: ValidationError): string {
   return FIXED[name] ?? numbered(name, message) ?? oneOf(message) ?? own ?? 'This value cannot be used here.';
 }
 
-const isMissing = (value: unknown) => value === undefined || value === null || value === '';
+const isMissing = (value: unknown) => value === undefined || value === '';
 
 /** The library begins its own texts with the property or with "each value in". */
 const isLibraryText = (message: string, property: string) =>

@@ -1,5 +1,6 @@
 import { Type } from 'class-transformer';
 import { IsArray, IsEmail, IsIn, IsInt, IsString, MaxLength, Min, MinLength, ValidateNested } from 'class-validator';
+import { MayBeAbsent } from '../decorators/may-be-absent';
 import { InvalidError } from '../errors/domain-error';
 import { RequestValidationPipe } from './validation.pipe';
 
@@ -10,6 +11,7 @@ class PlanDto {
   @IsString() @MinLength(3) @MaxLength(5) name: string;
   @IsEmail() 'e/mail': string;
   @IsIn(['a', 'b']) kind: string;
+  @MayBeAbsent() @IsString() note?: string;
   @IsArray() @ValidateNested({ each: true }) @Type(() => StepDto) steps: StepDto[];
 }
 
@@ -34,6 +36,12 @@ describe('RequestValidationPipe', () => {
   it('lists all needed fields of an absent body', async () => {
     const errors = await check(undefined);
     expect(errors).toEqual(['name', 'e~1mail', 'kind', 'steps'].map((name) => ({ pointer: `#/${name}`, detail: 'This is needed.' })));
+  });
+
+  it('takes no null for a field that may be left out', async () => {
+    const plan = { name: 'abcd', 'e/mail': 'a@example.com', kind: 'a', steps: [] };
+    expect(await check({ ...plan, note: null })).toEqual([{ pointer: '#/note', detail: 'Enter a value here, or leave the field out.' }]);
+    expect(await check(plan)).toBeInstanceOf(PlanDto);
   });
 
   it.each([[[]], ['text'], [7]])('refuses %j where an object is wanted', async (value) => {

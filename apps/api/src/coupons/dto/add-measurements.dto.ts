@@ -1,8 +1,9 @@
 import { ApiProperty, ApiPropertyOptional } from '@nestjs/swagger';
 import { MEASUREMENT_METHODS, MEASUREMENT_QUANTITIES, type MeasurementMethod, type MeasurementQuantity } from '@proofplate/recipe-model';
 import { Type } from 'class-transformer';
-import { ArrayMaxSize, ArrayMinSize, IsArray, IsIn, IsOptional, IsUUID, ValidateNested } from 'class-validator';
+import { ArrayMaxSize, ArrayMinSize, IsArray, IsIn, IsUUID, ValidateNested } from 'class-validator';
 import { IsMoment } from '../../common/decorators/is-moment';
+import { MayBeAbsent } from '../../common/decorators/may-be-absent';
 import { NumberBetween } from '../../common/decorators/number-between.decorator';
 import { TrimmedText } from '../../common/decorators/trimmed-text.decorator';
 import { MAX_CELLS_AT_ONCE } from './batch-limits';
@@ -20,32 +21,32 @@ const LARGEST_VALUE = 1e9;
 /** Conditions without which a number of the method says nothing. */
 export class MeasurementConditionsDto {
   @ApiPropertyOptional({ enum: ILLUMINANTS, description: 'Colorimeter: illuminant' })
-  @IsOptional()
+  @MayBeAbsent()
   @IsIn([...ILLUMINANTS], { message: 'Choose the illuminant from the list.' })
   illuminant?: (typeof ILLUMINANTS)[number];
 
   @ApiPropertyOptional({ enum: OBSERVERS, description: 'Colorimeter: observer' })
-  @IsOptional()
+  @MayBeAbsent()
   @IsIn([...OBSERVERS], { message: 'Choose the observer, 2° or 10°.' })
   observer?: (typeof OBSERVERS)[number];
 
   @ApiPropertyOptional({ enum: GEOMETRIES, description: 'Colorimeter: geometry of light and view' })
-  @IsOptional()
+  @MayBeAbsent()
   @IsIn([...GEOMETRIES], { message: 'Choose the geometry from the list.' })
   geometry?: (typeof GEOMETRIES)[number];
 
   @ApiPropertyOptional({ description: 'Verifier: diameter of the aperture, mil (1/1000 inch)' })
-  @IsOptional()
+  @MayBeAbsent()
   @NumberBetween(1, 100, { what: 'The aperture', unit: 'mil' })
   apertureMil?: number;
 
   @ApiPropertyOptional({ description: 'Verifier: wavelength or kind of light, such as 660 nm', maxLength: MAX_LIGHT_LENGTH })
-  @IsOptional()
+  @MayBeAbsent()
   @TrimmedText(MAX_LIGHT_LENGTH)
   light?: string;
 
   @ApiPropertyOptional({ description: 'Verifier: angle of the light over the surface, degrees' })
-  @IsOptional()
+  @MayBeAbsent()
   @NumberBetween(0, 90, { what: 'The angle of the light', unit: '°' })
   angleDeg?: number;
 }
@@ -60,17 +61,17 @@ export class NewMeasurementDto {
   quantity: MeasurementQuantity;
 
   @ApiPropertyOptional({ type: Number, description: 'Value in the quantity’s unit; a code grade may be given by its letter instead' })
-  @IsOptional()
+  @MayBeAbsent()
   @NumberBetween(-LARGEST_VALUE, LARGEST_VALUE, { what: 'The value' })
   value?: number;
 
   @ApiPropertyOptional({ enum: CODE_GRADES, description: 'Letter of a code grade' })
-  @IsOptional()
+  @MayBeAbsent()
   @IsIn([...CODE_GRADES], { message: 'A code grade is A, B, C, D or F.' })
   grade?: (typeof CODE_GRADES)[number];
 
   @ApiPropertyOptional({ description: 'Unit; it is fixed by the quantity and may be left out' })
-  @IsOptional()
+  @MayBeAbsent()
   @TrimmedText(MAX_LIGHT_LENGTH)
   unit?: string;
 
@@ -79,38 +80,38 @@ export class NewMeasurementDto {
   method: MeasurementMethod;
 
   @ApiPropertyOptional({ type: MeasurementConditionsDto, description: 'Conditions of the method' })
-  @IsOptional()
+  @MayBeAbsent()
   @ValidateNested()
   @Type(() => MeasurementConditionsDto)
   methodDetail?: MeasurementConditionsDto;
 
   @ApiPropertyOptional({ description: 'Instrument, as the shop calls it', maxLength: MAX_INSTRUMENT_LENGTH })
-  @IsOptional()
+  @MayBeAbsent()
   @TrimmedText(MAX_INSTRUMENT_LENGTH)
   instrument?: string;
 
   @ApiPropertyOptional({ format: 'uuid', description: 'Photo of this coupon that it was read from' })
-  @IsOptional()
+  @MayBeAbsent()
   @IsUUID('all', { message: 'This does not name a photo.' })
   photoId?: string;
 
   @ApiPropertyOptional({ type: Number, description: 'Standard uncertainty in the same unit' })
-  @IsOptional()
+  @MayBeAbsent()
   @NumberBetween(0, LARGEST_VALUE, { what: 'The uncertainty' })
   uncertainty?: number;
 
   @ApiPropertyOptional({ format: 'date-time', description: 'When it was measured; absent: now' })
-  @IsOptional()
+  @MayBeAbsent()
   @IsMoment()
   measuredAt?: string;
 
   @ApiPropertyOptional({ format: 'uuid', description: 'Earlier measurement of the same cell and quantity that this takes the place of' })
-  @IsOptional()
+  @MayBeAbsent()
   @IsUUID('all', { message: 'This does not name a measurement.' })
   supersedesId?: string;
 
   @ApiPropertyOptional({ description: 'Why it takes the place of the earlier one', maxLength: MAX_REASON_LENGTH })
-  @IsOptional()
+  @MayBeAbsent()
   @TrimmedText(MAX_REASON_LENGTH)
   reason?: string;
 }

@@ -1,6 +1,7 @@
 import { ApiProperty, ApiPropertyOptional } from '@nestjs/swagger';
 import { Type } from 'class-transformer';
 import { ArrayMaxSize, ArrayUnique, IsArray, IsInt, IsOptional, IsUUID, Max, Min, ValidateNested } from 'class-validator';
+import { MayBeAbsent } from '../../common/decorators/may-be-absent';
 import { NumberBetween } from '../../common/decorators/number-between.decorator';
 import { TrimmedText } from '../../common/decorators/trimmed-text.decorator';
 import { TypedSettingDto } from './entered-setting.dto';
@@ -24,14 +25,14 @@ export class ConfirmRevisionDto {
   count: number;
 
   @ApiPropertyOptional({ description: 'Which mark step the cells carry, from 1; absent: the first', minimum: 1 })
-  @IsOptional()
+  @MayBeAbsent()
   @IsInt({ message: 'The step is a whole number.' })
   @Min(1, { message: 'Steps count from 1.' })
   @Max(MOST_STEPS, { message: 'There is no such step.' })
   stepNumber?: number;
 
   @ApiPropertyOptional({ description: 'Lot of the material; another lot proves more', maxLength: MAX_SHORT_LENGTH })
-  @IsOptional()
+  @MayBeAbsent()
   @TrimmedText(MAX_SHORT_LENGTH)
   lot?: string;
 
@@ -41,22 +42,22 @@ export class ConfirmRevisionDto {
   thicknessMm?: number | null;
 
   @ApiPropertyOptional({ description: 'Where the plate will be kept', maxLength: MAX_SHORT_LENGTH })
-  @IsOptional()
+  @MayBeAbsent()
   @TrimmedText(MAX_SHORT_LENGTH)
   storedAt?: string;
 
   @ApiPropertyOptional({ description: 'Notes', maxLength: MAX_NOTES_LENGTH })
-  @IsOptional()
+  @MayBeAbsent()
   @TrimmedText(MAX_NOTES_LENGTH)
   notes?: string;
 
   @ApiPropertyOptional({ description: `Side of a cell, mm; absent: ${CELL_MM.usual}` })
-  @IsOptional()
+  @MayBeAbsent()
   @NumberBetween(CELL_MM.least, CELL_MM.most, { what: 'The side of a cell', unit: 'mm' })
   cellMm?: number;
 
   @ApiPropertyOptional({ description: `Gap between cells, mm; absent: ${GAP_MM.usual}` })
-  @IsOptional()
+  @MayBeAbsent()
   @NumberBetween(GAP_MM.least, GAP_MM.most, { what: 'The gap between cells', unit: 'mm' })
   gapMm?: number;
 
@@ -64,13 +65,13 @@ export class ConfirmRevisionDto {
     type: TypedSettingDto,
     description: 'Setting of corner marks, letters and code; absent: as on the coupon that the draft rests on, else on the latest alike',
   })
-  @IsOptional()
+  @MayBeAbsent()
   @ValidateNested()
   @Type(() => TypedSettingDto)
   labelStep?: TypedSettingDto;
 
   @ApiPropertyOptional({ type: [String], description: 'Cautions that the planner has read and taken in' })
-  @IsOptional()
+  @MayBeAbsent()
   @IsArray()
   @ArrayMaxSize(200)
   @ArrayUnique()

@@ -4,6 +4,7 @@ import { PANEL_UNITS, type PanelUnit } from '@proofplate/physics';
 import { ASSISTS, type Assist, FILLS, type Fill, PARAMETERS, type ParameterKey } from '@proofplate/recipe-model';
 import { Type } from 'class-transformer';
 import { IsDefined, IsIn, IsOptional, ValidateNested } from 'class-validator';
+import { MayBeAbsent } from '../../common/decorators/may-be-absent';
 import { NumberBetween } from '../../common/decorators/number-between.decorator';
 
 const UNIT_CODES = Object.keys(PANEL_UNITS);
@@ -75,7 +76,7 @@ export class TypedSettingDto {
   assist: Assist;
 
   @ApiPropertyOptional({ type: TypedDelaysDto, description: 'Delays of the scan head, µs' })
-  @IsOptional()
+  @MayBeAbsent()
   @ValidateNested()
   @Type(() => TypedDelaysDto)
   delaysUs?: TypedDelaysDto;

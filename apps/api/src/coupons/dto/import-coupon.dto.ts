@@ -8,7 +8,6 @@ import {
   IsBoolean,
   IsIn,
   IsInt,
-  IsOptional,
   IsString,
   Max,
   MaxLength,
@@ -16,6 +15,7 @@ import {
   ValidateNested,
 } from 'class-validator';
 import { IsDay } from '../../common/decorators/is-day';
+import { MayBeAbsent } from '../../common/decorators/may-be-absent';
 import { NumberBetween } from '../../common/decorators/number-between.decorator';
 import { DoseDto } from './coupon.dto';
 import { TypedValueDto, TypedValuesDto } from './entered-setting.dto';
@@ -53,13 +53,13 @@ export class KnownGridDto {
   columns: number;
 
   @ApiPropertyOptional({ type: KnownFactorDto, description: 'What varies down the rows; absent: nobody knows' })
-  @IsOptional()
+  @MayBeAbsent()
   @ValidateNested()
   @Type(() => KnownFactorDto)
   rowFactor?: KnownFactorDto;
 
   @ApiPropertyOptional({ type: KnownFactorDto, description: 'What varies across the columns; absent: nobody knows' })
-  @IsOptional()
+  @MayBeAbsent()
   @ValidateNested()
   @Type(() => KnownFactorDto)
   columnFactor?: KnownFactorDto;
@@ -68,65 +68,65 @@ export class KnownGridDto {
 /** A plate that was burnt before it was logged here. What nobody knows is left out, and marked as unknown. */
 export class ImportCouponDto extends CouponSubjectDto {
   @ApiPropertyOptional({ format: 'date', description: 'Day on which it was marked; absent: not known' })
-  @IsOptional()
+  @MayBeAbsent()
   @IsDay()
   markedOn?: string;
 
   @ApiPropertyOptional({ description: 'true: the caller marked it; otherwise it is not known who did' })
-  @IsOptional()
+  @MayBeAbsent()
   @IsBoolean()
   markedByMe?: boolean;
 
   @ApiPropertyOptional({ description: 'true: source and scan head have not been changed since; otherwise that is not known' })
-  @IsOptional()
+  @MayBeAbsent()
   @IsBoolean()
   isMachineUnchanged?: boolean;
 
   @ApiPropertyOptional({ enum: FILLS, enumName: 'Fill', description: 'How the cells were filled; absent: not known' })
-  @IsOptional()
+  @MayBeAbsent()
   @IsIn([...FILLS], { message: 'Choose how the area was filled, or leave it unknown.' })
   fill?: Fill;
 
   @ApiPropertyOptional({ enum: ASSISTS, enumName: 'Assist', description: 'Assist; absent: not known' })
-  @IsOptional()
+  @MayBeAbsent()
   @IsIn([...ASSISTS], { message: 'Choose the assist, or leave it unknown.' })
   assist?: Assist;
 
   @ApiPropertyOptional({ description: 'Side of a cell, mm; absent: not known' })
-  @IsOptional()
+  @MayBeAbsent()
   @NumberBetween(CELL_MM.least, CELL_MM.most, { what: 'The side of a cell', unit: 'mm' })
   cellMm?: number;
 
   @ApiPropertyOptional({ description: 'Gap between cells, mm; absent: not known' })
-  @IsOptional()
+  @MayBeAbsent()
   @NumberBetween(GAP_MM.least, GAP_MM.most, { what: 'The gap between cells', unit: 'mm' })
   gapMm?: number;
 
   @ApiPropertyOptional({ type: TypedValuesDto, description: 'What was the same in every cell, as far as it is known' })
-  @IsOptional()
+  @MayBeAbsent()
   @ValidateNested()
   @Type(() => TypedValuesDto)
   common?: TypedValuesDto;
 
   @ApiPropertyOptional({ type: KnownGridDto, description: 'Size of the grid and the levels that are known; or give a table' })
-  @IsOptional()
+  @MayBeAbsent()
   @ValidateNested()
   @Type(() => KnownGridDto)
   grid?: KnownGridDto;
 
   @ApiPropertyOptional({ description: 'Rows pasted from a spreadsheet, headings first; or give a grid', maxLength: MAX_TABLE_LENGTH })
-  @IsOptional()
+  @MayBeAbsent()
   @IsString()
   @MaxLength(MAX_TABLE_LENGTH, { message: 'This table is too long. Paste one plate at a time.' })
   table?: string;
 
   @ApiPropertyOptional({ enum: ['.', ','], description: 'Decimal sign of the table; absent: a point' })
-  @IsOptional()
+  @MayBeAbsent()
   @IsIn(['.', ','], { message: 'The decimal sign is a point or a comma.' })
   decimalSign?: '.' | ',';
 
   @ApiPropertyOptional({ description: 'true: import the rows that can be read although others are refused' })
-  @IsOptional()
+  @MayBeAbsent()
   @IsBoolean()
   leaveOutRefusedRows?: boolean;
 }

@@ -1,6 +1,7 @@
 import { ApiProperty, ApiPropertyOptional } from '@nestjs/swagger';
 import { Type } from 'class-transformer';
-import { ArrayMaxSize, ArrayUnique, IsArray, IsOptional, IsUUID, ValidateNested } from 'class-validator';
+import { ArrayMaxSize, ArrayUnique, IsArray, IsUUID, ValidateNested } from 'class-validator';
+import { MayBeAbsent } from '../../common/decorators/may-be-absent';
 import { RequiredText } from '../../common/decorators/trimmed-text.decorator';
 import { MAX_CELLS_AT_ONCE } from './batch-limits';
 
@@ -19,7 +20,7 @@ export class UnratedCellDto {
 
 export class InspectCouponDto {
   @ApiPropertyOptional({ type: [UnratedCellDto], description: 'Marked cells that nobody rates, each with the reason' })
-  @IsOptional()
+  @MayBeAbsent()
   @IsArray()
   @ArrayMaxSize(MAX_CELLS_AT_ONCE)
   @ArrayUnique((cell: UnratedCellDto) => cell?.cellId, { message: 'Each cell once is enough.' })
@@ -30,7 +31,7 @@ export class InspectCouponDto {
 
 export class CorrectCouponDto {
   @ApiPropertyOptional({ format: 'uuid', description: 'Cell that it is about; absent: the whole coupon' })
-  @IsOptional()
+  @MayBeAbsent()
   @IsUUID('all', { message: 'This does not name a cell.' })
   cellId?: string;
 

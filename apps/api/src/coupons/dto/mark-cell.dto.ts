@@ -1,6 +1,7 @@
 import { ApiProperty, ApiPropertyOptional } from '@nestjs/swagger';
 import { Type } from 'class-transformer';
-import { IsIn, IsInt, IsOptional, IsUUID, Min, ValidateNested } from 'class-validator';
+import { IsIn, IsInt, IsUUID, Min, ValidateNested } from 'class-validator';
+import { MayBeAbsent } from '../../common/decorators/may-be-absent';
 import { TrimmedText } from '../../common/decorators/trimmed-text.decorator';
 import { CouponCellDto } from './coupon.dto';
 import { TypedValuesDto } from './entered-setting.dto';
@@ -25,13 +26,13 @@ export class MarkCellDto {
   outcome: (typeof MARKING_OUTCOMES)[number];
 
   @ApiPropertyOptional({ type: TypedValuesDto, description: 'Only with differs: the values that were really used, where they differ' })
-  @IsOptional()
+  @MayBeAbsent()
   @ValidateNested()
   @Type(() => TypedValuesDto)
   actual?: TypedValuesDto;
 
   @ApiPropertyOptional({ description: 'Why; needed when skipped', maxLength: MAX_NOTE_LENGTH })
-  @IsOptional()
+  @MayBeAbsent()
   @TrimmedText(MAX_NOTE_LENGTH)
   note?: string;
 }
@@ -49,12 +50,12 @@ export class UndoMarkDto {
 
 export class FinishMarkingDto {
   @ApiPropertyOptional({ description: 'Room, temperature and the like; absent: unchanged', maxLength: MAX_AMBIENT_LENGTH })
-  @IsOptional()
+  @MayBeAbsent()
   @TrimmedText(MAX_AMBIENT_LENGTH)
   ambientNotes?: string;
 
   @ApiPropertyOptional({ description: 'Where the plate is kept; absent: unchanged', maxLength: MAX_PLACE_LENGTH })
-  @IsOptional()
+  @MayBeAbsent()
   @TrimmedText(MAX_PLACE_LENGTH)
   storedAt?: string;
 }

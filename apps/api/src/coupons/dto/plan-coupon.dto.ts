@@ -2,6 +2,7 @@ import { ApiProperty, ApiPropertyOptional } from '@nestjs/swagger';
 import { LEVEL_SPACING_LABELS, type LevelSpacing, PARAMETER_KEYS, type ParameterKey } from '@proofplate/recipe-model';
 import { Type } from 'class-transformer';
 import { ArrayMaxSize, ArrayUnique, IsArray, IsDefined, IsIn, IsInt, IsOptional, IsUUID, Max, Min, ValidateNested } from 'class-validator';
+import { MayBeAbsent } from '../../common/decorators/may-be-absent';
 import { NumberBetween } from '../../common/decorators/number-between.decorator';
 import { TrimmedText } from '../../common/decorators/trimmed-text.decorator';
 import type { FillDrawnBy } from './coupon.dto';
@@ -23,7 +24,7 @@ export const GAP_MM = { least: 0.3, most: 10, usual: 1.2 } as const;
 /** Which coupon it is: the five keys, the plate and its notes. */
 export class CouponSubjectDto {
   @ApiPropertyOptional({ description: 'What the coupon is for, in the shop’s words', maxLength: MAX_TITLE_LENGTH })
-  @IsOptional()
+  @MayBeAbsent()
   @TrimmedText(MAX_TITLE_LENGTH)
   title?: string;
 
@@ -53,22 +54,22 @@ export class CouponSubjectDto {
   thicknessMm?: number | null;
 
   @ApiPropertyOptional({ description: 'Lot of the material', maxLength: MAX_LOT_LENGTH })
-  @IsOptional()
+  @MayBeAbsent()
   @TrimmedText(MAX_LOT_LENGTH)
   lot?: string;
 
   @ApiPropertyOptional({ description: 'Where the plate will be kept', maxLength: MAX_PLACE_LENGTH })
-  @IsOptional()
+  @MayBeAbsent()
   @TrimmedText(MAX_PLACE_LENGTH)
   storedAt?: string;
 
   @ApiPropertyOptional({ description: 'Notes', maxLength: MAX_NOTES_LENGTH })
-  @IsOptional()
+  @MayBeAbsent()
   @TrimmedText(MAX_NOTES_LENGTH)
   notes?: string;
 
   @ApiPropertyOptional({ type: [String], description: 'Cautions that the planner has read and taken in' })
-  @IsOptional()
+  @MayBeAbsent()
   @IsArray()
   @ArrayMaxSize(MAX_CAUTIONS)
   @ArrayUnique()
@@ -109,7 +110,7 @@ export class PlanCouponDto extends CouponSubjectDto {
   columns: PlannedFactorDto;
 
   @ApiPropertyOptional({ type: PlannedFactorDto, description: 'What varies down the rows; absent: one row' })
-  @IsOptional()
+  @MayBeAbsent()
   @ValidateNested()
   @Type(() => PlannedFactorDto)
   rows?: PlannedFactorDto;
@@ -121,7 +122,7 @@ export class PlanCouponDto extends CouponSubjectDto {
   base: TypedSettingDto;
 
   @ApiPropertyOptional({ type: TypedSettingDto, description: 'Setting of corner marks, letters and code' })
-  @IsOptional()
+  @MayBeAbsent()
   @ValidateNested()
   @Type(() => TypedSettingDto)
   labelStep?: TypedSettingDto;

@@ -18,6 +18,7 @@ import {
   ValidateIf,
   ValidateNested,
 } from 'class-validator';
+import { MayBeAbsent } from '../../common/decorators/may-be-absent';
 import { TrimmedText } from '../../common/decorators/trimmed-text.decorator';
 import { MAX_CELLS_AT_ONCE } from './batch-limits';
 
@@ -50,7 +51,7 @@ export class CellRatingChangeDto {
   outcome?: Outcome | null;
 
   @ApiPropertyOptional({ type: [String], description: 'Tags' })
-  @IsOptional()
+  @MayBeAbsent()
   @Transform(({ value }: { value: unknown }) =>
     Array.isArray(value) ? value.map((tag: unknown) => (typeof tag === 'string' ? tag.trim() : tag)) : value,
   )
@@ -63,7 +64,7 @@ export class CellRatingChangeDto {
   tags?: string[];
 
   @ApiPropertyOptional({ description: 'Note', maxLength: MAX_NOTE_LENGTH })
-  @IsOptional()
+  @MayBeAbsent()
   @TrimmedText(MAX_NOTE_LENGTH)
   note?: string;
 }

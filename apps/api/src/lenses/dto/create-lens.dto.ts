@@ -1,5 +1,5 @@
 import { ApiProperty, ApiPropertyOptional } from '@nestjs/swagger';
-import { IsOptional } from 'class-validator';
+import { MayBeAbsent } from '../../common/decorators/may-be-absent';
 import { NumberBetween } from '../../common/decorators/number-between.decorator';
 import { RequiredText, TrimmedText } from '../../common/decorators/trimmed-text.decorator';
 
@@ -23,7 +23,7 @@ export class CreateLensDto {
   fieldSizeMm: number;
 
   @ApiPropertyOptional({ description: 'Anything worth knowing, such as coating or protective glass', maxLength: MAX_NOTES_LENGTH })
-  @IsOptional()
+  @MayBeAbsent()
   @TrimmedText(MAX_NOTES_LENGTH)
   notes?: string;
 }

@@ -2,6 +2,7 @@ import { ApiProperty, ApiPropertyOptional } from '@nestjs/swagger';
 import { Type } from 'class-transformer';
 import { ArrayMaxSize, ArrayMinSize, IsArray, IsOptional, ValidateNested } from 'class-validator';
 import { IsDay } from '../../common/decorators/is-day';
+import { MayBeAbsent } from '../../common/decorators/may-be-absent';
 import { NumberBetween } from '../../common/decorators/number-between.decorator';
 import { RequiredText, TrimmedText } from '../../common/decorators/trimmed-text.decorator';
 import { PageOf, PageQuery } from '../../common/pagination/page';
@@ -59,7 +60,7 @@ export class CreateCalibrationDto {
   points: CalibrationPointDto[];
 
   @ApiPropertyOptional({ description: 'Anything that matters for the reading', maxLength: MAX_NOTES_LENGTH })
-  @IsOptional()
+  @MayBeAbsent()
   @TrimmedText(MAX_NOTES_LENGTH)
   notes?: string;
 }

@@ -1,6 +1,7 @@
 import { ApiProperty, ApiPropertyOptional } from '@nestjs/swagger';
 import { Type } from 'class-transformer';
 import { IsDefined, IsInt, IsOptional, IsUUID, Max, Min, ValidateNested } from 'class-validator';
+import { MayBeAbsent } from '../../common/decorators/may-be-absent';
 import { RequiredText, TrimmedText } from '../../common/decorators/trimmed-text.decorator';
 import { PanelDto } from './panel.dto';
 import { PhysicalProfileDto } from './physical-profile.dto';
@@ -16,12 +17,12 @@ export class CreateMachineDto {
   name: string;
 
   @ApiPropertyOptional({ description: 'Serial number from the type plate', maxLength: MAX_SERIAL_LENGTH })
-  @IsOptional()
+  @MayBeAbsent()
   @TrimmedText(MAX_SERIAL_LENGTH)
   serialNumber?: string;
 
   @ApiPropertyOptional({ description: 'Warm-up before marking, minutes' })
-  @IsOptional()
+  @MayBeAbsent()
   @IsInt({ message: WARM_UP_MESSAGE })
   @Min(0, { message: WARM_UP_MESSAGE })
   @Max(MAX_WARM_UP_MINUTES, { message: WARM_UP_MESSAGE })

@@ -1,6 +1,7 @@
 import { ApiProperty, ApiPropertyOptional } from '@nestjs/swagger';
 import { IsOptional, IsUUID } from 'class-validator';
 import { IsDay } from '../../common/decorators/is-day';
+import { MayBeAbsent } from '../../common/decorators/may-be-absent';
 import { NumberBetween } from '../../common/decorators/number-between.decorator';
 import { TrimmedText } from '../../common/decorators/trimmed-text.decorator';
 
@@ -15,7 +16,7 @@ export class UpdateMachineLensDto {
   workingDistanceMm?: number | null;
 
   @ApiPropertyOptional({ description: 'How focus is found on this machine with this lens', maxLength: MAX_FOCUS_METHOD_LENGTH })
-  @IsOptional()
+  @MayBeAbsent()
   @TrimmedText(MAX_FOCUS_METHOD_LENGTH)
   focusMethod?: string;
 

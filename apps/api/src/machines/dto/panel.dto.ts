@@ -2,7 +2,8 @@ import { ApiProperty, ApiPropertyOptional } from '@nestjs/swagger';
 import { PANEL_UNITS, type PanelUnit } from '@proofplate/physics';
 import { PARAMETER_KEYS, type ParameterKey } from '@proofplate/recipe-model';
 import { Type } from 'class-transformer';
-import { ArrayMaxSize, ArrayMinSize, IsArray, IsIn, IsNumber, IsOptional, ValidateNested } from 'class-validator';
+import { ArrayMaxSize, ArrayMinSize, IsArray, IsIn, IsNumber, ValidateNested } from 'class-validator';
+import { MayBeAbsent } from '../../common/decorators/may-be-absent';
 import { NumberBetween } from '../../common/decorators/number-between.decorator';
 import { RequiredText } from '../../common/decorators/trimmed-text.decorator';
 
@@ -26,34 +27,34 @@ export class PanelFieldDto {
   unit: PanelUnit;
 
   @ApiPropertyOptional({ description: 'Smallest value that the field takes, in its unit' })
-  @IsOptional()
+  @MayBeAbsent()
   @NumberBetween(-LARGEST_PANEL_VALUE, LARGEST_PANEL_VALUE, { what: 'The smallest value' })
   minimum?: number;
 
   @ApiPropertyOptional({ description: 'Largest value that the field takes, in its unit' })
-  @IsOptional()
+  @MayBeAbsent()
   @NumberBetween(-LARGEST_PANEL_VALUE, LARGEST_PANEL_VALUE, { what: 'The largest value' })
   maximum?: number;
 
   @ApiPropertyOptional({ description: 'Smallest change that the field shows, counted from zero' })
-  @IsOptional()
+  @MayBeAbsent()
   @NumberBetween(1e-9, LARGEST_PANEL_VALUE, { what: 'The step' })
   step?: number;
 
   @ApiPropertyOptional({ type: [Number], description: 'The only values that the field offers, where it is a list' })
-  @IsOptional()
+  @MayBeAbsent()
   @IsArray()
   @ArrayMaxSize(MAX_CHOICES)
   @IsNumber({ allowNaN: false, allowInfinity: false }, { each: true, message: 'Each choice must be a number.' })
   choices?: number[];
 
   @ApiPropertyOptional({ description: 'Physical value at 0 % of a percentage counted from the minimum' })
-  @IsOptional()
+  @MayBeAbsent()
   @NumberBetween(-LARGEST_PANEL_VALUE, LARGEST_PANEL_VALUE, { what: 'The value at 0 %' })
   rangeLow?: number;
 
   @ApiPropertyOptional({ description: 'Physical value at 100 %; for a field in watts the power at 100 %' })
-  @IsOptional()
+  @MayBeAbsent()
   @NumberBetween(-LARGEST_PANEL_VALUE, LARGEST_PANEL_VALUE, { what: 'The value at 100 %' })
   rangeHigh?: number;
 }

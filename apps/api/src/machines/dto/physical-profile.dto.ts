@@ -1,7 +1,8 @@
 import { ApiProperty, ApiPropertyOptional } from '@nestjs/swagger';
 import { SOURCE_KINDS, type SourceKind } from '@proofplate/recipe-model';
 import { Type } from 'class-transformer';
-import { ArrayMaxSize, IsArray, IsIn, IsNumber, IsOptional, Max, Min, ValidateIf, ValidateNested } from 'class-validator';
+import { ArrayMaxSize, IsArray, IsIn, IsNumber, Max, Min, ValidateIf, ValidateNested } from 'class-validator';
+import { MayBeAbsent } from '../../common/decorators/may-be-absent';
 import { NumberBetween } from '../../common/decorators/number-between.decorator';
 
 const MAX_PULSE_WIDTHS = 64;
@@ -61,7 +62,7 @@ export class PhysicalProfileDto {
   ratedPowerW: number;
 
   @ApiPropertyOptional({ type: [PulseEnergyLimitDto], description: 'Largest pulse energy for each pulse width' })
-  @IsOptional()
+  @MayBeAbsent()
   @IsArray()
   @ArrayMaxSize(MAX_PULSE_WIDTHS)
   @ValidateNested({ each: true })
@@ -69,29 +70,29 @@ export class PhysicalProfileDto {
   maxPulseEnergyMj?: PulseEnergyLimitDto[];
 
   @ApiPropertyOptional({ description: 'Beam quality M², 1 or more' })
-  @IsOptional()
+  @MayBeAbsent()
   @NumberBetween(1, 100, { what: 'M²' })
   m2?: number;
 
   @ApiPropertyOptional({ description: 'Beam diameter (1/e²) at the lens, mm' })
-  @IsOptional()
+  @MayBeAbsent()
   @NumberBetween(0.1, 200, { what: 'The beam diameter at the lens', unit: 'mm' })
   beamDiameterMm?: number;
 
   @ApiPropertyOptional({ type: FrequencyRangeDto, description: 'Range of pulse frequencies' })
-  @IsOptional()
+  @MayBeAbsent()
   @ValidateNested()
   @Type(() => FrequencyRangeDto)
   frequencyRangeKhz?: FrequencyRangeDto;
 
   @ApiPropertyOptional({ type: PulseWidthRangeDto, description: 'Range of pulse widths where the source lets them be set' })
-  @IsOptional()
+  @MayBeAbsent()
   @ValidateNested()
   @Type(() => PulseWidthRangeDto)
   pulseWidthRangeNs?: PulseWidthRangeDto;
 
   @ApiPropertyOptional({ type: [Number], description: 'The only pulse widths that the source offers, ns' })
-  @IsOptional()
+  @MayBeAbsent()
   @IsArray()
   @ArrayMaxSize(MAX_PULSE_WIDTHS)
   @IsNumber({ allowNaN: false, allowInfinity: false }, { each: true, message: 'Each pulse width must be a number of nanoseconds.' })
@@ -100,37 +101,37 @@ export class PhysicalProfileDto {
   pulseWidthsNs?: number[];
 
   @ApiPropertyOptional({ description: 'Fastest marking speed of the scan head, mm/s' })
-  @IsOptional()
+  @MayBeAbsent()
   @NumberBetween(0.01, 100_000, { what: 'The top speed', unit: 'mm/s' })
   topSpeedMmPerS?: number;
 
   @ApiPropertyOptional({ description: 'Speed of a jump with the beam off, mm/s' })
-  @IsOptional()
+  @MayBeAbsent()
   @NumberBetween(0.01, 100_000, { what: 'The jump speed', unit: 'mm/s' })
   jumpSpeedMmPerS?: number;
 
   @ApiPropertyOptional({ description: 'Acceleration of the spot, mm/s²' })
-  @IsOptional()
+  @MayBeAbsent()
   @NumberBetween(0.01, 1e9, { what: 'The acceleration', unit: 'mm/s²' })
   accelerationMmPerS2?: number;
 
   @ApiPropertyOptional({ description: 'Clear aperture of the scan head, mm' })
-  @IsOptional()
+  @MayBeAbsent()
   @NumberBetween(0.1, 200, { what: 'The aperture', unit: 'mm' })
   apertureMm?: number;
 
   @ApiPropertyOptional({ description: 'Settling time after a jump, ms' })
-  @IsOptional()
+  @MayBeAbsent()
   @NumberBetween(0, 1000, { what: 'The settling time', unit: 'ms' })
   jumpSettleMs?: number;
 
   @ApiPropertyOptional({ description: 'Laser-on delay, µs; may be negative' })
-  @IsOptional()
+  @MayBeAbsent()
   @NumberBetween(-100_000, 100_000, { what: 'The laser-on delay', unit: 'µs' })
   laserOnDelayUs?: number;
 
   @ApiPropertyOptional({ description: 'Laser-off delay, µs' })
-  @IsOptional()
+  @MayBeAbsent()
   @NumberBetween(-100_000, 100_000, { what: 'The laser-off delay', unit: 'µs' })
   laserOffDelayUs?: number;
 }

@@ -14,6 +14,7 @@ import {
   MaxLength,
   ValidateNested,
 } from 'class-validator';
+import { MayBeAbsent } from '../../common/decorators/may-be-absent';
 import { RequiredText } from '../../common/decorators/trimmed-text.decorator';
 import { PageOf, PageQuery } from '../../common/pagination/page';
 
@@ -27,7 +28,7 @@ const MAX_KEY_LENGTH = 160;
 /** What a caution applies to: every condition that is given must hold; without any it applies to all work. */
 export class CautionScopeDto {
   @ApiPropertyOptional({ enum: MATERIAL_FAMILY_KEYS, isArray: true, description: 'Families of material' })
-  @IsOptional()
+  @MayBeAbsent()
   @IsArray()
   @ArrayMaxSize(MAX_NAMED)
   @ArrayUnique()
@@ -35,7 +36,7 @@ export class CautionScopeDto {
   families?: MaterialFamily[];
 
   @ApiPropertyOptional({ type: [String], description: 'Materials of the shop' })
-  @IsOptional()
+  @MayBeAbsent()
   @IsArray()
   @ArrayMaxSize(MAX_NAMED)
   @ArrayUnique()
@@ -43,7 +44,7 @@ export class CautionScopeDto {
   materialIds?: string[];
 
   @ApiPropertyOptional({ type: [String], description: 'Finishes of the shop' })
-  @IsOptional()
+  @MayBeAbsent()
   @IsArray()
   @ArrayMaxSize(MAX_NAMED)
   @ArrayUnique()
@@ -51,14 +52,14 @@ export class CautionScopeDto {
   finishIds?: string[];
 
   @ApiPropertyOptional({ enum: SOURCE_KINDS, isArray: true, description: 'Kinds of laser source' })
-  @IsOptional()
+  @MayBeAbsent()
   @IsArray()
   @ArrayUnique()
   @IsIn(SOURCE_KINDS, { each: true, message: 'Choose kinds of source from the list.' })
   sourceKinds?: SourceKind[];
 
   @ApiPropertyOptional({ type: [String], description: 'Keys of effects' })
-  @IsOptional()
+  @MayBeAbsent()
   @IsArray()
   @ArrayMaxSize(MAX_NAMED)
   @ArrayUnique()
@@ -67,7 +68,7 @@ export class CautionScopeDto {
   effectKeys?: string[];
 
   @ApiPropertyOptional({ description: 'true: only work on a round part that turns' })
-  @IsOptional()
+  @MayBeAbsent()
   @IsIn([true], { message: 'Leave this out unless the caution is for round parts.' })
   roundPart?: boolean;
 }

@@ -1,7 +1,8 @@
 import { ApiProperty, ApiPropertyOptional, PartialType } from '@nestjs/swagger';
 import { COMPARISONS, type Comparison, MEASUREMENT_QUANTITIES, type MeasurementQuantity } from '@proofplate/recipe-model';
 import { Type } from 'class-transformer';
-import { ArrayMaxSize, IsArray, IsIn, IsOptional, IsString, MaxLength, ValidateNested } from 'class-validator';
+import { ArrayMaxSize, IsArray, IsIn, IsString, MaxLength, ValidateNested } from 'class-validator';
+import { MayBeAbsent } from '../../common/decorators/may-be-absent';
 import { NumberBetween } from '../../common/decorators/number-between.decorator';
 import { RequiredText, TrimmedText } from '../../common/decorators/trimmed-text.decorator';
 import { PageOf } from '../../common/pagination/page';
@@ -26,12 +27,12 @@ export class CriterionDto {
   value: number;
 
   @ApiPropertyOptional({ description: 'The upper limit of "between"' })
-  @IsOptional()
+  @MayBeAbsent()
   @NumberBetween(-LARGEST_LIMIT, LARGEST_LIMIT, { what: 'The upper limit' })
   upper?: number;
 
   @ApiPropertyOptional({ description: 'Unit of the limit; it is fixed by the quantity and may be left out', maxLength: MAX_UNIT_LENGTH })
-  @IsOptional()
+  @MayBeAbsent()
   @IsString()
   @MaxLength(MAX_UNIT_LENGTH)
   unit?: string;
@@ -43,7 +44,7 @@ export class CreateEffectDto {
   name: string;
 
   @ApiPropertyOptional({ type: [CriterionDto], description: 'What a mark must meet; recorded on a coupon before its inspection' })
-  @IsOptional()
+  @MayBeAbsent()
   @IsArray()
   @ArrayMaxSize(MAX_CRITERIA)
   @ValidateNested({ each: true })
@@ -51,7 +52,7 @@ export class CreateEffectDto {
   criteria?: CriterionDto[];
 
   @ApiPropertyOptional({ description: 'Where the criteria come from, and anything worth knowing', maxLength: MAX_NOTES_LENGTH })
-  @IsOptional()
+  @MayBeAbsent()
   @TrimmedText(MAX_NOTES_LENGTH)
   notes?: string;
 }

@@ -1,5 +1,5 @@
 import { ApiProperty, ApiPropertyOptional, PartialType } from '@nestjs/swagger';
-import { IsOptional } from 'class-validator';
+import { MayBeAbsent } from '../../common/decorators/may-be-absent';
 import { RequiredText, TrimmedText } from '../../common/decorators/trimmed-text.decorator';
 import { PageOf } from '../../common/pagination/page';
 import { MAX_NAME_LENGTH } from './material.dto';
@@ -15,12 +15,12 @@ export class CreateFinishDto {
     description: 'Preparation before marking: cleaned, degreased, passivated, oiled; grain direction',
     maxLength: MAX_STEPS_LENGTH,
   })
-  @IsOptional()
+  @MayBeAbsent()
   @TrimmedText(MAX_STEPS_LENGTH)
   preparation?: string;
 
   @ApiPropertyOptional({ description: 'Treatment after marking: wipe, brush, passivate, seal', maxLength: MAX_STEPS_LENGTH })
-  @IsOptional()
+  @MayBeAbsent()
   @TrimmedText(MAX_STEPS_LENGTH)
   treatment?: string;
 }

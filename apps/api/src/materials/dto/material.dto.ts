@@ -2,6 +2,7 @@ import { ApiProperty, ApiPropertyOptional, PartialType } from '@nestjs/swagger';
 import { type CautionLevel, MATERIAL_FAMILY_KEYS, type MaterialFamily } from '@proofplate/recipe-model';
 import { Transform, Type } from 'class-transformer';
 import { ArrayMaxSize, IsIn, IsOptional, ValidateNested } from 'class-validator';
+import { MayBeAbsent } from '../../common/decorators/may-be-absent';
 import { NumberBetween } from '../../common/decorators/number-between.decorator';
 import { RequiredText, TrimmedText } from '../../common/decorators/trimmed-text.decorator';
 import { ArchivedQuery } from '../../common/pagination/archived.query';
@@ -46,19 +47,19 @@ export class HeatCapacityDto {
 /** Numbers of the material, each with its source. */
 export class MaterialPropertiesDto {
   @ApiPropertyOptional({ type: ConductivityDto, description: 'Thermal conductivity' })
-  @IsOptional()
+  @MayBeAbsent()
   @ValidateNested()
   @Type(() => ConductivityDto)
   thermalConductivityWPerMK?: ConductivityDto;
 
   @ApiPropertyOptional({ type: DensityDto, description: 'Density' })
-  @IsOptional()
+  @MayBeAbsent()
   @ValidateNested()
   @Type(() => DensityDto)
   densityKgPerM3?: DensityDto;
 
   @ApiPropertyOptional({ type: HeatCapacityDto, description: 'Specific heat capacity' })
-  @IsOptional()
+  @MayBeAbsent()
   @ValidateNested()
   @Type(() => HeatCapacityDto)
   heatCapacityJPerKgK?: HeatCapacityDto;
@@ -77,17 +78,17 @@ export class CreateMaterialDto {
   family: string;
 
   @ApiPropertyOptional({ description: 'Grade or alloy', maxLength: MAX_WORD_LENGTH })
-  @IsOptional()
+  @MayBeAbsent()
   @TrimmedText(MAX_WORD_LENGTH)
   grade?: string;
 
   @ApiPropertyOptional({ description: 'Designation of a standard', maxLength: MAX_WORD_LENGTH })
-  @IsOptional()
+  @MayBeAbsent()
   @TrimmedText(MAX_WORD_LENGTH)
   standardDesignation?: string;
 
   @ApiPropertyOptional({ description: 'Who supplies it', maxLength: MAX_WORD_LENGTH })
-  @IsOptional()
+  @MayBeAbsent()
   @TrimmedText(MAX_WORD_LENGTH)
   supplier?: string;
 
@@ -97,13 +98,13 @@ export class CreateMaterialDto {
   thicknessMm?: number | null;
 
   @ApiPropertyOptional({ type: MaterialPropertiesDto, description: 'Numbers of the material, each with its source' })
-  @IsOptional()
+  @MayBeAbsent()
   @ValidateNested()
   @Type(() => MaterialPropertiesDto)
   properties?: MaterialPropertiesDto;
 
   @ApiPropertyOptional({ description: 'Anything worth knowing', maxLength: MAX_NOTES_LENGTH })
-  @IsOptional()
+  @MayBeAbsent()
   @TrimmedText(MAX_NOTES_LENGTH)
   notes?: string;
 }

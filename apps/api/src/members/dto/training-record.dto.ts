@@ -1,6 +1,6 @@
 import { ApiProperty, ApiPropertyOptional } from '@nestjs/swagger';
-import { IsOptional } from 'class-validator';
 import { IsDay } from '../../common/decorators/is-day';
+import { MayBeAbsent } from '../../common/decorators/may-be-absent';
 import { RequiredText } from '../../common/decorators/trimmed-text.decorator';
 
 const MAX_SUBJECT_LENGTH = 200;
@@ -20,7 +20,7 @@ export class CreateTrainingRecordDto {
   taughtOn: string;
 
   @ApiPropertyOptional({ format: 'date', description: 'Last day on which it counts; absent: it does not run out' })
-  @IsOptional()
+  @MayBeAbsent()
   @IsDay()
   expiresOn?: string;
 }

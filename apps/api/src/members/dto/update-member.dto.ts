@@ -2,6 +2,7 @@ import { ApiProperty, ApiPropertyOptional } from '@nestjs/swagger';
 import { ROLES, type Role, SOURCE_KINDS, type SourceKind } from '@proofplate/recipe-model';
 import { Type } from 'class-transformer';
 import { ArrayMaxSize, IsArray, IsIn, IsOptional, IsString, IsUUID, MaxLength, MinLength, ValidateNested } from 'class-validator';
+import { MayBeAbsent } from '../../common/decorators/may-be-absent';
 import { Trimmed } from '../../common/decorators/trimmed';
 
 export const MAX_PERSON_NAME_LENGTH = 120;
@@ -21,7 +22,7 @@ export class ProcessDto {
 
 export class UpdateMemberDto {
   @ApiPropertyOptional({ enum: [...ROLES] })
-  @IsOptional()
+  @MayBeAbsent()
   @IsIn(ROLES)
   role?: Role;
 
@@ -30,7 +31,7 @@ export class UpdateMemberDto {
     maxLength: MAX_PERSON_NAME_LENGTH,
     description: 'Name as it will stand under signatures from now on',
   })
-  @IsOptional()
+  @MayBeAbsent()
   @Trimmed()
   @IsString()
   @MinLength(1)

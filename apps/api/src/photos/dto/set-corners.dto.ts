@@ -1,6 +1,7 @@
 import { ApiProperty, ApiPropertyOptional } from '@nestjs/swagger';
 import { Type } from 'class-transformer';
-import { ArrayMaxSize, ArrayMinSize, IsArray, IsIn, IsNumber, IsOptional, Max, Min, ValidateNested } from 'class-validator';
+import { ArrayMaxSize, ArrayMinSize, IsArray, IsIn, IsNumber, Max, Min, ValidateNested } from 'class-validator';
+import { MayBeAbsent } from '../../common/decorators/may-be-absent';
 import { CornerDto } from './photo.dto';
 
 const CORNERS = 4;
@@ -25,7 +26,7 @@ export class SetCornersDto {
   corners: GivenCornerDto[];
 
   @ApiPropertyOptional({ enum: ['hand', 'marks'], default: 'hand', description: 'Set by a person, or found by the corner marks' })
-  @IsOptional()
+  @MayBeAbsent()
   @IsIn(['hand', 'marks'])
   foundBy: 'hand' | 'marks' = 'hand';
 }

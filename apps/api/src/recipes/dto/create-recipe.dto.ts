@@ -1,6 +1,7 @@
 import { ApiProperty, ApiPropertyOptional } from '@nestjs/swagger';
 import { Type } from 'class-transformer';
-import { ArrayMaxSize, ArrayMinSize, IsArray, IsIn, IsOptional, IsUUID, ValidateNested } from 'class-validator';
+import { ArrayMaxSize, ArrayMinSize, IsArray, IsIn, IsUUID, ValidateNested } from 'class-validator';
+import { MayBeAbsent } from '../../common/decorators/may-be-absent';
 import { RequiredText, TrimmedText } from '../../common/decorators/trimmed-text.decorator';
 import { EnterStepDto } from './mark-step.dto';
 import { RecipeScopeDto } from './scope.dto';
@@ -14,7 +15,7 @@ export type OtherRoute = (typeof OTHER_ROUTES)[number];
 /** A recipe whose first setting does not come from a coupon of the shop. */
 export class CreateRecipeDto {
   @ApiPropertyOptional({ description: 'Title; absent: made from material, finish and effect', maxLength: MAX_TITLE_LENGTH })
-  @IsOptional()
+  @MayBeAbsent()
   @TrimmedText(MAX_TITLE_LENGTH)
   title?: string;
 
@@ -55,7 +56,7 @@ export class CreateRecipeDto {
   steps: EnterStepDto[];
 
   @ApiPropertyOptional({ type: RecipeScopeDto, description: 'What it covers beyond the five keys' })
-  @IsOptional()
+  @MayBeAbsent()
   @ValidateNested()
   @Type(() => RecipeScopeDto)
   scope?: RecipeScopeDto;
@@ -71,7 +72,7 @@ export class RecipeFromCellDto {
   cellId: string;
 
   @ApiPropertyOptional({ description: 'Title; absent: made from material, finish and effect', maxLength: MAX_TITLE_LENGTH })
-  @IsOptional()
+  @MayBeAbsent()
   @TrimmedText(MAX_TITLE_LENGTH)
   title?: string;
 
@@ -79,7 +80,7 @@ export class RecipeFromCellDto {
     format: 'uuid',
     description: 'Recipe with the same material, finish, effect, machine and lens that gets the draft; absent: a new recipe',
   })
-  @IsOptional()
+  @MayBeAbsent()
   @IsUUID('all', { message: 'Choose a recipe of the shop.' })
   recipeId?: string;
 }
@@ -89,14 +90,14 @@ export class CreateDraftDto {
     format: 'uuid',
     description: 'Revision to copy; absent: the approved one, else the newest',
   })
-  @IsOptional()
+  @MayBeAbsent()
   @IsUUID('all', { message: 'Choose a revision of this recipe.' })
   basedOnRevisionId?: string;
 }
 
 export class UpdateRecipeDto {
   @ApiPropertyOptional({ description: 'Title', maxLength: MAX_TITLE_LENGTH })
-  @IsOptional()
+  @MayBeAbsent()
   @RequiredText(MAX_TITLE_LENGTH, 'Give the recipe a title.')
   title?: string;
 
@@ -104,7 +105,7 @@ export class UpdateRecipeDto {
     type: RecipeScopeDto,
     description: 'What it covers; it is signed with the setting, so it changes here only while nothing was submitted',
   })
-  @IsOptional()
+  @MayBeAbsent()
   @ValidateNested()
   @Type(() => RecipeScopeDto)
   scope?: RecipeScopeDto;

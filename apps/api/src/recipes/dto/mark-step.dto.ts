@@ -12,6 +12,7 @@ import {
 } from '@proofplate/recipe-model';
 import { Type } from 'class-transformer';
 import { IsBoolean, IsDefined, IsIn, IsOptional, IsUUID, ValidateNested } from 'class-validator';
+import { MayBeAbsent } from '../../common/decorators/may-be-absent';
 import { NumberBetween } from '../../common/decorators/number-between.decorator';
 import { RequiredText, TrimmedText } from '../../common/decorators/trimmed-text.decorator';
 import { ParameterSetDto } from '../../coupons/dto/parameter-set.dto';
@@ -68,22 +69,22 @@ const delay = (what: string): PropertyDecorator => NumberBetween(-LONGEST_DELAY_
 
 export class EnterDelaysDto {
   @ApiPropertyOptional({ description: 'Laser-on delay, µs' })
-  @IsOptional()
+  @MayBeAbsent()
   @delay('The laser-on delay')
   laserOn?: number;
 
   @ApiPropertyOptional({ description: 'Laser-off delay, µs' })
-  @IsOptional()
+  @MayBeAbsent()
   @delay('The laser-off delay')
   laserOff?: number;
 
   @ApiPropertyOptional({ description: 'Jump delay, µs' })
-  @IsOptional()
+  @MayBeAbsent()
   @delay('The jump delay')
   jump?: number;
 
   @ApiPropertyOptional({ description: 'Corner delay, µs' })
-  @IsOptional()
+  @MayBeAbsent()
   @delay('The corner delay')
   corner?: number;
 }
@@ -109,13 +110,13 @@ export class EnterStepDto {
   assist: Assist;
 
   @ApiPropertyOptional({ type: EnterDelaysDto, description: 'Delays of the scan head' })
-  @IsOptional()
+  @MayBeAbsent()
   @ValidateNested()
   @Type(() => EnterDelaysDto)
   delaysUs?: EnterDelaysDto;
 
   @ApiPropertyOptional({ description: 'Pause after the step (cool-down), s', default: 0 })
-  @IsOptional()
+  @MayBeAbsent()
   @NumberBetween(0, LONGEST_PAUSE_S, { what: 'The pause', unit: 's' })
   pauseAfterS: number = 0;
 }
@@ -127,12 +128,12 @@ export class SetUpStepDto {
   text: string;
 
   @ApiPropertyOptional({ description: 'What to watch out for', maxLength: MAX_SET_UP_TEXT_LENGTH })
-  @IsOptional()
+  @MayBeAbsent()
   @TrimmedText(MAX_SET_UP_TEXT_LENGTH)
   caution?: string;
 
   @ApiPropertyOptional({ description: 'Photo that shows it', format: 'uuid' })
-  @IsOptional()
+  @MayBeAbsent()
   @IsUUID('all', { message: 'This does not name a photo.' })
   photoId?: string;
 

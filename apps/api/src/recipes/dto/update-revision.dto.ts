@@ -1,8 +1,9 @@
 import { ApiPropertyOptional } from '@nestjs/swagger';
 import { ROUTE_KINDS, type RouteKind } from '@proofplate/recipe-model';
 import { Type } from 'class-transformer';
-import { ArrayMaxSize, IsArray, IsIn, IsOptional, IsUUID, ValidateIf, ValidateNested } from 'class-validator';
+import { ArrayMaxSize, IsArray, IsIn, IsUUID, ValidateIf, ValidateNested } from 'class-validator';
 import { IsMoment } from '../../common/decorators/is-moment';
+import { MayBeAbsent } from '../../common/decorators/may-be-absent';
 import { TrimmedText } from '../../common/decorators/trimmed-text.decorator';
 import { MAX_REASON_LENGTH, MAX_STEPS } from './create-recipe.dto';
 import { EnterStepDto, SetUpStepDto } from './mark-step.dto';
@@ -15,7 +16,7 @@ const isGiven = (_: unknown, value: unknown) => value !== undefined && value !==
 /** What changes in a draft; what is absent stays, a given list replaces the earlier one. */
 export class UpdateRevisionDto {
   @ApiPropertyOptional({ type: [EnterStepDto], description: 'Mark steps in their order, in the panel’s units' })
-  @IsOptional()
+  @MayBeAbsent()
   @IsArray()
   @ArrayMaxSize(MAX_STEPS)
   @ValidateNested({ each: true })
@@ -23,7 +24,7 @@ export class UpdateRevisionDto {
   steps?: EnterStepDto[];
 
   @ApiPropertyOptional({ type: [SetUpStepDto], description: 'Set-up steps in their order' })
-  @IsOptional()
+  @MayBeAbsent()
   @IsArray()
   @ArrayMaxSize(MAX_SET_UP_STEPS)
   @ValidateNested({ each: true })
@@ -31,29 +32,29 @@ export class UpdateRevisionDto {
   setUpSteps?: SetUpStepDto[];
 
   @ApiPropertyOptional({ type: LimitsOfUseDto, description: 'Limits of use' })
-  @IsOptional()
+  @MayBeAbsent()
   @ValidateNested()
   @Type(() => LimitsOfUseDto)
   limits?: LimitsOfUseDto;
 
   @ApiPropertyOptional({ type: RecipeScopeDto, description: 'What it covers beyond the five keys' })
-  @IsOptional()
+  @MayBeAbsent()
   @ValidateNested()
   @Type(() => RecipeScopeDto)
   scope?: RecipeScopeDto;
 
   @ApiPropertyOptional({ description: 'Reason for the change', maxLength: MAX_REASON_LENGTH })
-  @IsOptional()
+  @MayBeAbsent()
   @TrimmedText(MAX_REASON_LENGTH)
   reason?: string;
 
   @ApiPropertyOptional({ enum: ROUTE_KINDS, enumName: 'RouteKind', description: 'How the setting was come by' })
-  @IsOptional()
+  @MayBeAbsent()
   @IsIn(ROUTE_KINDS, { message: 'Choose how the setting was come by.' })
   route?: RouteKind;
 
   @ApiPropertyOptional({ description: 'Written grounds where it was not proved on coupons; given by a lead', maxLength: MAX_REASON_LENGTH })
-  @IsOptional()
+  @MayBeAbsent()
   @TrimmedText(MAX_REASON_LENGTH)
   grounds?: string;
 
@@ -78,7 +79,7 @@ export class UpdateRevisionDto {
   calibrationId?: string | null;
 
   @ApiPropertyOptional({ type: [String], description: 'Cautions that the author acknowledged' })
-  @IsOptional()
+  @MayBeAbsent()
   @IsArray()
   @ArrayMaxSize(MAX_CAUTIONS)
   @IsUUID('all', { each: true, message: 'Choose cautions of the list.' })

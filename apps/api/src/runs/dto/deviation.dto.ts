@@ -1,6 +1,7 @@
 import { ApiProperty, ApiPropertyOptional } from '@nestjs/swagger';
 import { IsInt, IsOptional, IsUUID, Max, Min } from 'class-validator';
 import { IsMoment } from '../../common/decorators/is-moment';
+import { MayBeAbsent } from '../../common/decorators/may-be-absent';
 import { RequiredText } from '../../common/decorators/trimmed-text.decorator';
 import { PageOf, PageQuery } from '../../common/pagination/page';
 
@@ -22,12 +23,12 @@ export class GrantDeviationDto {
   reason: string;
 
   @ApiPropertyOptional({ format: 'date-time', description: 'Ends by itself at this time' })
-  @IsOptional()
+  @MayBeAbsent()
   @IsMoment()
   endsAt?: string;
 
   @ApiPropertyOptional({ description: 'Ends by itself after so many parts, good and scrapped' })
-  @IsOptional()
+  @MayBeAbsent()
   @IsInt({ message: QUANTITY_MESSAGE })
   @Min(1, { message: QUANTITY_MESSAGE })
   @Max(MOST_PARTS, { message: QUANTITY_MESSAGE })

@@ -1,5 +1,6 @@
 import { ApiProperty, ApiPropertyOptional } from '@nestjs/swagger';
 import { IsIn, IsOptional, IsString, IsUUID, MaxLength } from 'class-validator';
+import { MayBeAbsent } from '../../common/decorators/may-be-absent';
 import { RequiredText } from '../../common/decorators/trimmed-text.decorator';
 import { PageOf, PageQuery } from '../../common/pagination/page';
 
@@ -8,12 +9,12 @@ const MAX_PASSWORD_LENGTH = 1024;
 
 export class PlaceHoldDto {
   @ApiPropertyOptional({ description: 'Recipe to hold; give this or machineId', format: 'uuid' })
-  @IsOptional()
+  @MayBeAbsent()
   @IsUUID('all', { message: 'This does not name a recipe.' })
   recipeId?: string;
 
   @ApiPropertyOptional({ description: 'Machine to hold; give this or recipeId', format: 'uuid' })
-  @IsOptional()
+  @MayBeAbsent()
   @IsUUID('all', { message: 'This does not name a machine.' })
   machineId?: string;
 
@@ -22,7 +23,7 @@ export class PlaceHoldDto {
   reason: string;
 
   @ApiPropertyOptional({ description: 'Own password; without it the session stands for the person' })
-  @IsOptional()
+  @MayBeAbsent()
   @IsString()
   @MaxLength(MAX_PASSWORD_LENGTH)
   password?: string;
@@ -34,7 +35,7 @@ export class ReleaseHoldDto {
   reason: string;
 
   @ApiPropertyOptional({ description: 'Own password; without it the session stands for the person' })
-  @IsOptional()
+  @MayBeAbsent()
   @IsString()
   @MaxLength(MAX_PASSWORD_LENGTH)
   password?: string;

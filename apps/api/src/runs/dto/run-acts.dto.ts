@@ -7,7 +7,8 @@ import {
   type Outcome,
 } from '@proofplate/recipe-model';
 import { Type } from 'class-transformer';
-import { ArrayMaxSize, IsArray, IsBoolean, IsIn, IsInt, IsOptional, IsUUID, Max, Min, ValidateNested } from 'class-validator';
+import { ArrayMaxSize, IsArray, IsBoolean, IsIn, IsInt, IsUUID, Max, Min, ValidateNested } from 'class-validator';
+import { MayBeAbsent } from '../../common/decorators/may-be-absent';
 import { NumberBetween } from '../../common/decorators/number-between.decorator';
 import { TrimmedText } from '../../common/decorators/trimmed-text.decorator';
 import { BAD_OUTCOMES } from './run.dto';
@@ -32,12 +33,12 @@ export class FirstPieceActDto {
   ok: boolean;
 
   @ApiPropertyOptional({ description: 'Remark', maxLength: MAX_NOTE_LENGTH, default: '' })
-  @IsOptional()
+  @MayBeAbsent()
   @TrimmedText(MAX_NOTE_LENGTH)
   note: string = '';
 
   @ApiPropertyOptional({ description: 'Photo of it', format: 'uuid' })
-  @IsOptional()
+  @MayBeAbsent()
   @IsUUID('all', { message: 'This does not name a photo.' })
   photoId?: string;
 }
@@ -72,7 +73,7 @@ export class FinishRunDto {
   scrap: number;
 
   @ApiPropertyOptional({ type: [MeasurePieceDto], description: 'Measurements by piece' })
-  @IsOptional()
+  @MayBeAbsent()
   @IsArray()
   @ArrayMaxSize(MOST_MEASUREMENTS)
   @ValidateNested({ each: true })
@@ -80,7 +81,7 @@ export class FinishRunDto {
   measurements: MeasurePieceDto[] = [];
 
   @ApiPropertyOptional({ description: 'Notes', maxLength: MAX_NOTE_LENGTH, default: '' })
-  @IsOptional()
+  @MayBeAbsent()
   @TrimmedText(MAX_NOTE_LENGTH)
   notes: string = '';
 }
@@ -91,7 +92,7 @@ export class TellBadResultDto {
   outcome: Outcome;
 
   @ApiPropertyOptional({ description: 'Remark', maxLength: MAX_NOTE_LENGTH, default: '' })
-  @IsOptional()
+  @MayBeAbsent()
   @TrimmedText(MAX_NOTE_LENGTH)
   note: string = '';
 }

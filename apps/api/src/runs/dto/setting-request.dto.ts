@@ -1,6 +1,7 @@
 import { ApiProperty, ApiPropertyOptional } from '@nestjs/swagger';
 import { IsIn, IsOptional, IsUUID } from 'class-validator';
 import { IsDay } from '../../common/decorators/is-day';
+import { MayBeAbsent } from '../../common/decorators/may-be-absent';
 import { RequiredText, TrimmedText } from '../../common/decorators/trimmed-text.decorator';
 import { PageOf, PageQuery } from '../../common/pagination/page';
 import { NamedDto } from '../../coupons/dto/coupon.dto';
@@ -12,12 +13,12 @@ export type RequestState = (typeof REQUEST_STATES)[number];
 
 export class AskForSettingDto {
   @ApiPropertyOptional({ description: 'Machine', format: 'uuid' })
-  @IsOptional()
+  @MayBeAbsent()
   @IsUUID('all', { message: 'This does not name a machine.' })
   machineId?: string;
 
   @ApiPropertyOptional({ description: 'Lens', format: 'uuid' })
-  @IsOptional()
+  @MayBeAbsent()
   @IsUUID('all', { message: 'This does not name a lens.' })
   lensId?: string;
 
@@ -26,27 +27,27 @@ export class AskForSettingDto {
   materialId: string;
 
   @ApiPropertyOptional({ description: 'Finish', format: 'uuid' })
-  @IsOptional()
+  @MayBeAbsent()
   @IsUUID('all', { message: 'This does not name a finish.' })
   finishId?: string;
 
   @ApiPropertyOptional({ description: 'Effect', format: 'uuid' })
-  @IsOptional()
+  @MayBeAbsent()
   @IsUUID('all', { message: 'This does not name an effect.' })
   effectId?: string;
 
   @ApiPropertyOptional({ description: 'Job that it is for', maxLength: MAX_REFERENCE_LENGTH, default: '' })
-  @IsOptional()
+  @MayBeAbsent()
   @TrimmedText(MAX_REFERENCE_LENGTH)
   jobReference: string = '';
 
   @ApiPropertyOptional({ format: 'date', description: 'Day when it is needed' })
-  @IsOptional()
+  @MayBeAbsent()
   @IsDay()
   neededOn?: string;
 
   @ApiPropertyOptional({ description: 'Remark', maxLength: MAX_NOTE_LENGTH, default: '' })
-  @IsOptional()
+  @MayBeAbsent()
   @TrimmedText(MAX_NOTE_LENGTH)
   note: string = '';
 }

@@ -1,6 +1,7 @@
 import { ApiProperty, ApiPropertyOptional } from '@nestjs/swagger';
 import { RUN_KINDS, type RunKind } from '@proofplate/recipe-model';
-import { ArrayMaxSize, ArrayUnique, IsArray, IsIn, IsOptional, IsUUID, Matches } from 'class-validator';
+import { ArrayMaxSize, ArrayUnique, IsArray, IsIn, IsUUID, Matches } from 'class-validator';
+import { MayBeAbsent } from '../../common/decorators/may-be-absent';
 import { TrimmedText } from '../../common/decorators/trimmed-text.decorator';
 
 const MAX_REFERENCE_LENGTH = 80;
@@ -32,22 +33,22 @@ export class StartRunDto {
   ticks: string[];
 
   @ApiPropertyOptional({ description: 'Job, as the shop calls it', maxLength: MAX_REFERENCE_LENGTH, default: '' })
-  @IsOptional()
+  @MayBeAbsent()
   @TrimmedText(MAX_REFERENCE_LENGTH)
   jobReference: string = '';
 
   @ApiPropertyOptional({ description: 'Part', maxLength: MAX_REFERENCE_LENGTH, default: '' })
-  @IsOptional()
+  @MayBeAbsent()
   @TrimmedText(MAX_REFERENCE_LENGTH)
   part: string = '';
 
   @ApiPropertyOptional({ description: 'Lot of the material', maxLength: MAX_REFERENCE_LENGTH, default: '' })
-  @IsOptional()
+  @MayBeAbsent()
   @TrimmedText(MAX_REFERENCE_LENGTH)
   lot: string = '';
 
   @ApiPropertyOptional({ description: 'Deviation that the run cites', format: 'uuid' })
-  @IsOptional()
+  @MayBeAbsent()
   @IsUUID('all', { message: 'This does not name a deviation.' })
   deviationId?: string;
 }

@@ -1,7 +1,8 @@
 import { ApiPropertyOptional } from '@nestjs/swagger';
 import { Type } from 'class-transformer';
-import { IsIn, IsOptional, IsString, IsTimeZone, MaxLength, MinLength, ValidateNested } from 'class-validator';
+import { IsIn, IsString, IsTimeZone, MaxLength, MinLength, ValidateNested } from 'class-validator';
 import { IsLocaleTag } from '../../common/decorators/is-locale-tag';
+import { MayBeAbsent } from '../../common/decorators/may-be-absent';
 import { Trimmed } from '../../common/decorators/trimmed';
 import { UNIT_SYSTEMS, type UnitSystem } from './shop.dto';
 import { ShopPolicyDto } from './shop-policy.dto';
@@ -11,7 +12,7 @@ const MAX_TYPED_PASSWORD_LENGTH = 512;
 
 export class UpdateShopDto {
   @ApiPropertyOptional({ minLength: 1, maxLength: MAX_SHOP_NAME_LENGTH })
-  @IsOptional()
+  @MayBeAbsent()
   @Trimmed()
   @IsString()
   @MinLength(1)
@@ -19,28 +20,28 @@ export class UpdateShopDto {
   name?: string;
 
   @ApiPropertyOptional({ enum: UNIT_SYSTEMS })
-  @IsOptional()
+  @MayBeAbsent()
   @IsIn(UNIT_SYSTEMS)
   unitSystem?: UnitSystem;
 
   @ApiPropertyOptional({ description: 'IANA time zone' })
-  @IsOptional()
+  @MayBeAbsent()
   @IsTimeZone()
   timeZone?: string;
 
   @ApiPropertyOptional({ description: 'BCP 47 language tag' })
-  @IsOptional()
+  @MayBeAbsent()
   @IsLocaleTag()
   locale?: string;
 
   @ApiPropertyOptional({ type: ShopPolicyDto, description: 'The whole policy; a change of it is a signed act' })
-  @IsOptional()
+  @MayBeAbsent()
   @ValidateNested()
   @Type(() => ShopPolicyDto)
   policy?: ShopPolicyDto;
 
   @ApiPropertyOptional({ description: 'Password of the owner who signs; needed when the policy changes' })
-  @IsOptional()
+  @MayBeAbsent()
   @IsString()
   @MaxLength(MAX_TYPED_PASSWORD_LENGTH)
   password?: string;

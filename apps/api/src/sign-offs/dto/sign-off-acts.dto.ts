@@ -1,5 +1,6 @@
 import { ApiProperty, ApiPropertyOptional } from '@nestjs/swagger';
-import { ArrayMaxSize, IsArray, IsNotEmpty, IsOptional, IsString, IsUUID, Matches, MaxLength } from 'class-validator';
+import { ArrayMaxSize, IsArray, IsNotEmpty, IsString, IsUUID, Matches, MaxLength } from 'class-validator';
+import { MayBeAbsent } from '../../common/decorators/may-be-absent';
 import { RequiredText, TrimmedText } from '../../common/decorators/trimmed-text.decorator';
 
 const MAX_COMMENT_LENGTH = 2000;
@@ -15,14 +16,14 @@ export class SubmitRevisionDto {
   acknowledgedCautionIds: string[];
 
   @ApiPropertyOptional({ description: 'A word to the lead', maxLength: MAX_COMMENT_LENGTH })
-  @IsOptional()
+  @MayBeAbsent()
   @TrimmedText(MAX_COMMENT_LENGTH)
   comment?: string;
 }
 
 export class RecallRevisionDto {
   @ApiPropertyOptional({ description: 'Why', maxLength: MAX_COMMENT_LENGTH })
-  @IsOptional()
+  @MayBeAbsent()
   @TrimmedText(MAX_COMMENT_LENGTH)
   comment?: string;
 }
@@ -51,7 +52,7 @@ export class ApproveRevisionDto {
   acknowledgedCautionIds: string[];
 
   @ApiPropertyOptional({ description: 'Comment', maxLength: MAX_COMMENT_LENGTH })
-  @IsOptional()
+  @MayBeAbsent()
   @TrimmedText(MAX_COMMENT_LENGTH)
   comment?: string;
 }
