@@ -15,7 +15,8 @@ import { cellDose } from './cell-dose';
 import type { PlannedCell, PlannedGrid } from './coupon-plan-grid';
 import { numbersOf } from './coupon-plan-numbers';
 import type { StoredFactor } from './coupons.repository';
-import type { DoseCautionDto, PlanWarningDto } from './dto/coupon-preview.dto';
+import type { DoseCautionDto } from './dto/coupon.dto';
+import type { PlanWarningDto } from './dto/coupon-preview.dto';
 
 export type WarningContext = {
   readonly optics: Optics;

@@ -8,10 +8,9 @@ import { type PlannedGrid, planGrid } from './coupon-plan-grid';
 import { CouponPlanGroundService, type PlanGround } from './coupon-plan-ground.service';
 import { markingTimeOf, numbersOf } from './coupon-plan-numbers';
 import { planWarnings } from './coupon-plan-warnings';
-import { CouponPlansRepository } from './coupon-plans.repository';
 import { CouponStoreService } from './coupon-plans-store.service';
 import { plateSize } from './coupons.mapper';
-import { doseCaution } from './dose-caution';
+import { DoseCautionService } from './dose-caution.service';
 import type { CouponDto } from './dto/coupon.dto';
 import type { CouponPreviewDto } from './dto/coupon-preview.dto';
 import type { PlanCouponDto } from './dto/plan-coupon.dto';
@@ -21,7 +20,7 @@ export class CouponPlansService {
   constructor(
     private readonly unitOfWork: UnitOfWork,
     private readonly grounds: CouponPlanGroundService,
-    private readonly plans: CouponPlansRepository,
+    private readonly doseCautions: DoseCautionService,
     private readonly store: CouponStoreService,
   ) {}
 
@@ -66,7 +65,7 @@ export class CouponPlansService {
   ): Promise<CouponPreviewDto> {
     const { rows, columns, rowFactor, columnFactor, baseSetting, cells } = grid;
     const plate = plateSize({ rows, columns, cellMm: dto.cellMm, gapMm: dto.gapMm });
-    const caution = doseCaution(dto.doseCautionJPerMm2 ?? null, await this.plans.spoiltCells(tx, actor.shopId, dto));
+    const caution = await this.doseCautions.find(tx, actor.shopId, dto, dto.doseCautionJPerMm2 ?? null);
     return {
       ...{ rows, columns, rowFactor, columnFactor, baseSetting, plate },
       cells: cells.map(({ address, row, column, runOrder, parameters }) => ({

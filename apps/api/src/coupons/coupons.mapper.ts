@@ -1,4 +1,5 @@
 import { couponLayout } from '@proofplate/imaging';
+import type { DoseCaution } from '@proofplate/recipe-model';
 import type { Actor } from '../common/actor';
 import { cellDose } from './cell-dose';
 import { couponActions } from './coupons.policy';
@@ -7,7 +8,10 @@ import type { CouponActDto, CouponCellDto, CouponDto, CouponHeadDto, PlateSizeDt
 
 export type WholeCoupon = { readonly view: CouponView; readonly grids: readonly StoredGrid[]; readonly cells: readonly StoredCell[] };
 
-export function toCouponDto({ view, grids, cells }: WholeCoupon, actor: Pick<Actor, 'role'>): CouponDto {
+export function toCouponDto(
+  { view, grids, cells }: WholeCoupon,
+  { actor, doseCaution }: { actor: Pick<Actor, 'role'>; doseCaution: DoseCaution | null },
+): CouponDto {
   const { coupon, profile, calibration, confirms } = view;
   return {
     ...toCouponHead(view),
@@ -18,6 +22,7 @@ export function toCouponDto({ view, grids, cells }: WholeCoupon, actor: Pick<Act
     notes: coupon.notes,
     unknownFields: coupon.unknownFields,
     sourceNote: coupon.sourceNote,
+    doseCaution,
     criteria: coupon.criteria,
     criteriaRecordedAt: isoOf(coupon.criteriaRecordedAt),
     acknowledgedCautionIds: coupon.acknowledgedCautionIds,

@@ -21,6 +21,7 @@ import { CouponStoreService } from './coupon-plans-store.service';
 import { CouponsController } from './coupons.controller';
 import { CouponsRepository } from './coupons.repository';
 import { CouponsService } from './coupons.service';
+import { DoseCautionService } from './dose-caution.service';
 
 @Module({
   imports: [LedgerModule, MachinesModule, PhotosModule],
@@ -36,11 +37,12 @@ import { CouponsService } from './coupons.service';
     CouponPlanGroundService,
     CouponPlanCatalogueService,
     CouponPlansRepository,
+    DoseCautionService,
     CouponMarkingService,
     CouponMarkingRepository,
     CouponArtworkService,
     CouponImportService,
   ],
-  exports: [CouponsService],
+  exports: [CouponsService, DoseCautionService],
 })
 export class CouponsModule {}

@@ -5,6 +5,7 @@ import { type Tx, UnitOfWork } from '../database/unit-of-work';
 import { CouponNotFoundError } from './coupons.errors';
 import { toCouponDto, type WholeCoupon } from './coupons.mapper';
 import { CouponsRepository, type StoredCoupon } from './coupons.repository';
+import { DoseCautionService } from './dose-caution.service';
 import type { CouponDto } from './dto/coupon.dto';
 
 const CODE = /^C-\d{4,9}$/u;
@@ -14,6 +15,7 @@ export class CouponsService {
   constructor(
     private readonly unitOfWork: UnitOfWork,
     private readonly coupons: CouponsRepository,
+    private readonly doseCautions: DoseCautionService,
   ) {}
 
   /** By id, or by the code that stands on the plate and in addresses. */
@@ -29,7 +31,8 @@ export class CouponsService {
 
   /** The answer of every act on a coupon. @throws CouponNotFoundError also for another shop's coupon */
   async getDto(tx: Tx, actor: Actor, id: string): Promise<CouponDto> {
-    return toCouponDto(await this.getWhole(tx, actor.shopId, id), actor);
+    const whole = await this.getWhole(tx, actor.shopId, id);
+    return toCouponDto(whole, { actor, doseCaution: await this.doseCautions.find(tx, actor.shopId, whole.view.coupon) });
   }
 
   /** A coupon with its grids and cells. @throws CouponNotFoundError also for another shop's coupon */

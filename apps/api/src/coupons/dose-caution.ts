@@ -1,7 +1,7 @@
 import { OUTCOME_LABELS, type Outcome } from '@proofplate/recipe-model';
 import { cellDose } from './cell-dose';
 import type { SpoiltCell } from './coupon-plans.repository';
-import type { DoseCautionDto } from './dto/coupon-preview.dto';
+import type { DoseCautionDto } from './dto/coupon.dto';
 
 /**
  * The dose from which cells are flagged: as typed, else the lowest one that spoilt a cell on this ground before. There is no number of

@@ -48,6 +48,7 @@ export type AnswerRow = {
   isProfilePresent: boolean;
   panel: Panel;
   physical: PhysicalProfile;
+  optics: { focalLengthMm: number; measuredSpotUm: number | null };
   signature: SignatureRow | null;
   holds: HoldRow[];
   reference: ReferenceCellRow | null;
@@ -80,6 +81,9 @@ export class FinderAnswersRepository {
             and (h.recipe_id = r.id or h.machine_id = r.machine_id)), '[]'::json) as holds,
         (select json_build_object('workingDistanceMm', ml.working_distance_mm, 'focusMethod', ml.focus_method) from machine_lens ml
           where ml.shop_id = r.shop_id and ml.machine_id = r.machine_id and ml.lens_id = r.lens_id) as focus,
+        (select json_build_object('focalLengthMm', l.focal_length_mm, 'measuredSpotUm', ml.measured_spot_um) from lens l
+          left join machine_lens ml on ml.shop_id = l.shop_id and ml.machine_id = r.machine_id and ml.lens_id = l.id
+          where l.shop_id = r.shop_id and l.id = r.lens_id) as optics,
         case when k.id is null then null else ${readingOf(sql`k`)} end as calibration,
         coalesce((select json_agg(${readingOf(sql`n`)} order by n.measured_on desc, n.id desc) from power_calibration n
           where n.shop_id = k.shop_id and n.machine_id = k.machine_id and (n.measured_on, n.id) > (k.measured_on, k.id)), '[]'::json)

@@ -3,6 +3,7 @@ import type { Actor } from '../common/actor';
 import type { PhotoUrlsDto } from '../photos/dto/photo.dto';
 import { asMeasured } from '../recipes/calibration-checks';
 import type { PowerShiftDto } from '../recipes/dto/power-shift.dto';
+import { revisionNumbers } from '../recipes/step-numbers';
 import type { FinderAnswerDto, FinderKeysDto, FinderRecipeDto, ReferenceCellDto, ReferencePhotoDto } from './dto/finder.dto';
 import { answerActions } from './finder.policy';
 import type { AnswerRow, PhotoRow, ReferenceCellRow } from './finder-answers.repository';
@@ -30,6 +31,7 @@ export function toAnswer(
     profileNumber: row.profileNumber,
     isProfilePresent: row.isProfilePresent,
     steps: row.content.steps,
+    ...revisionNumbers(row.content.steps, row),
     setUpSteps: row.content.setUpSteps,
     limits: row.content.limits,
     scope: row.content.scope,

@@ -16,8 +16,9 @@ import {
 } from '@proofplate/recipe-model';
 import { compareSides, type Side } from './compared-value';
 import type { ComparisonRowDto } from './dto/comparison.dto';
+import type { DerivedNumberDto } from './dto/derived-number.dto';
 import { newestOf } from './evidence-judgement';
-import { stepNumbers } from './step-numbers';
+import { type NumbersOn, revisionNumbers } from './step-numbers';
 import type { RevisionRecord } from './stored-revision';
 
 type Row = Omit<ComparisonRowDto, 'isSame' | 'values'> & { readonly sides: readonly Side[] };
@@ -29,6 +30,7 @@ export function comparisonRows(records: readonly RevisionRecord[], reference: Re
   const rows = [
     ...steps.flatMap((index) => enteredRows(records, reference, index)),
     ...steps.flatMap((index) => workRows(records, index)),
+    ...totalRows(records),
     ...markRows(records),
   ];
   const ids = records.map(({ revision }) => revision.id);
@@ -115,19 +117,36 @@ function workRows(records: readonly RevisionRecord[], index: number): Row[] {
   };
   const columns = records.map((record) => {
     const step = stepOf(record, index);
-    return step === undefined ? [] : stepNumbers(step, record);
+    const [numbers] = step === undefined ? [] : revisionNumbers([step], on(record)).derived;
+    // the average power has its row already
+    return numbers?.numbers.filter(({ key }) => key !== 'workPower') ?? [];
   });
   const keys = [...new Map(columns.flat().map(({ key, unit }) => [key, unit])).entries()];
   const derived = keys.map(([key, unit]): Row => {
-    const sides = columns.map((numbers): Side => {
-      const found = numbers.find((number) => number.key === key);
-      if (found === undefined) return ABSENT;
-      return found.value === null ? { kind: 'absent', missingBecause: found.missingBecause } : numberSide(found.value);
-    });
+    const sides = columns.map((numbers) => derivedSide(numbers.find((number) => number.key === key)));
     return { group: 'work', key, label: wordsOfKey(key), unit, step: index + 1, sides };
   });
   return [power, ...derived];
 }
+
+/** Sums over the steps, as soon as one of the revisions has several. */
+function totalRows(records: readonly RevisionRecord[]): Row[] {
+  const columns = records.map((record) => {
+    const { steps } = record.revision.content;
+    const { derived, derivedTotals } = revisionNumbers(steps, on(record));
+    return derivedTotals.length > 0 ? derivedTotals : (derived[0]?.numbers ?? []);
+  });
+  if (records.every(({ revision }) => revision.content.steps.length < 2)) return [];
+  return TOTALS.map(({ key, ofOne, label, unit }) => ({
+    ...{ group: 'work' as const, key, label, unit, step: null },
+    sides: columns.map((numbers) => derivedSide(numbers.find((number) => number.key === key || number.key === ofOne))),
+  }));
+}
+
+const TOTALS = [
+  { key: 'totalArealDose', ofOne: 'arealDose', label: 'Dose of all steps', unit: 'J/mm²' },
+  { key: 'totalTimePer100Mm2', ofOne: 'timePer100Mm2', label: 'Time for 100 mm², all steps', unit: 's' },
+] as const;
 
 /** Measurements of each revision's reference cell, the first of its basis. */
 function markRows(records: readonly RevisionRecord[]): Row[] {
@@ -141,6 +160,13 @@ function markRows(records: readonly RevisionRecord[]): Row[] {
       return measured === null ? { kind: 'absent', missingBecause: 'Not measured.' } : numberSide(measured);
     }),
   }));
+}
+
+const on = ({ profile: { physical, panel }, optics }: RevisionRecord): NumbersOn => ({ physical, panel, optics });
+
+function derivedSide(found: DerivedNumberDto | undefined): Side {
+  if (found === undefined) return ABSENT;
+  return found.value === null ? { kind: 'absent', missingBecause: found.missingBecause } : numberSide(found.value);
 }
 
 const numberSide = (value: number | undefined): Side => (value === undefined ? ABSENT : { kind: 'number', value, text: showNumber(value) });

@@ -1,12 +1,12 @@
 import { PANEL_UNITS } from '@proofplate/physics';
-import { type ChangeSide, showNumber, stepsDiff } from '@proofplate/recipe-model';
+import { type ChangeSide, type DoseCaution, showNumber, stepsDiff } from '@proofplate/recipe-model';
 import type { Actor } from '../common/actor';
 import type { PhotoUrlsDto } from '../photos/dto/photo.dto';
 import type { RecipeRevisionDto, RevisionBriefDto, StepChangeDto } from './dto/recipe-revision.dto';
 import type { SignOffDto } from './dto/sign-off.dto';
 import { type MapPhoto, toEvidenceCellDto, toEvidenceRunDto } from './evidence.mapper';
 import { revisionActions } from './recipe-revisions.policy';
-import { stepNumbers } from './step-numbers';
+import { revisionNumbers } from './step-numbers';
 import type { RevisionBrief, RevisionRecord, StoredSignOff } from './stored-revision';
 
 export type RevisionMapping = {
@@ -14,11 +14,12 @@ export type RevisionMapping = {
   readonly authorMaySign: boolean;
   readonly photoUrls: (photo: Parameters<MapPhoto>[0]) => PhotoUrlsDto | null;
   readonly contentHash: string;
+  readonly doseCaution: DoseCaution | null;
 };
 
 export function toRevisionDto(
   record: RevisionRecord,
-  { actor, authorMaySign, photoUrls, contentHash }: RevisionMapping,
+  { actor, authorMaySign, photoUrls, contentHash, doseCaution }: RevisionMapping,
 ): RecipeRevisionDto {
   const { revision, recipe, profile, calibration, brief, signOffs } = record;
   const { steps, setUpSteps, limits, scope } = revision.content;
@@ -41,7 +42,9 @@ export function toRevisionDto(
     cautions: record.cautions.map((caution) => ({ ...caution, isAcknowledged: revision.acknowledgedCautionIds.includes(caution.id) })),
     changes: reference === undefined ? [] : toStepChangeDtos(reference, brief),
     comparedWith: reference === undefined ? null : toRevisionBriefDto(reference, signOffsOf(reference.id)),
-    derived: steps.map((step, index) => ({ step: index + 1, numbers: stepNumbers(step, record) })),
+    ...revisionNumbers(steps, { physical, panel, optics: record.optics }, doseCaution),
+    optics: { ...record.optics },
+    doseCaution,
     contentHash,
     version: revision.version,
     allowedActions: revisionActions(actor, revision, authorMaySign),

@@ -1,4 +1,5 @@
 import { Module } from '@nestjs/common';
+import { CouponsModule } from '../coupons/coupons.module';
 import { JobsModule } from '../jobs/jobs.module';
 import { LedgerModule } from '../ledger/ledger.module';
 import { MachinesModule } from '../machines/machines.module';
@@ -25,7 +26,7 @@ import { RevisionViewsService } from './revision-views.service';
 import { ScheduledRevisionsService } from './scheduled-revisions.service';
 
 @Module({
-  imports: [JobsModule, LedgerModule, ShopsModule, MachinesModule, PhotosModule],
+  imports: [CouponsModule, JobsModule, LedgerModule, ShopsModule, MachinesModule, PhotosModule],
   controllers: [RecipesController, RecipeRevisionsController],
   providers: [
     RecipesService,

@@ -1,6 +1,7 @@
 import { Injectable } from '@nestjs/common';
 import type { Caution, CautionSubject } from '@proofplate/recipe-model';
 import type { Actor } from '../common/actor';
+import { DoseCautionService } from '../coupons/dose-caution.service';
 import type { Tx } from '../database/unit-of-work';
 import { isGeneralCaution, orderedCautionsFor } from '../materials/caution-order';
 import { CautionsService } from '../materials/cautions.service';
@@ -33,6 +34,7 @@ export class RevisionRecordsService {
     private readonly cautions: CautionsService,
     private readonly photos: PhotosService,
     private readonly shops: ShopsService,
+    private readonly doseCautions: DoseCautionService,
   ) {}
 
   /** @throws RevisionNotFoundError also for another shop's revision */
@@ -80,6 +82,7 @@ export class RevisionRecordsService {
       authorMaySign: policy.authorMaySign,
       photoUrls: (photo) => this.photos.urlsOf(photo),
       contentHash: hashOfRecord(record),
+      doseCaution: await this.doseCautions.find(tx, actor.shopId, keyIdsOf(record.recipe)),
     });
   }
 

@@ -1,17 +1,41 @@
-import type { DerivedNumber } from '@proofplate/physics';
-import type { MarkStep } from '@proofplate/recipe-model';
-import { numbersOf } from '../coupons/coupon-plan-numbers';
-import type { DerivedNumberDto } from './dto/derived-number.dto';
-import type { RevisionRecord } from './stored-revision';
+import {
+  type DoseCaution,
+  type MarkStep,
+  type Panel,
+  type PhysicalProfile,
+  type SettingNumber,
+  settingNumbers,
+} from '@proofplate/recipe-model';
+import type { DerivedNumberDto, StepNumbersDto } from './dto/derived-number.dto';
 
-/** Numbers that follow from a mark step on the machine and lens of its recipe. */
-export function stepNumbers({ parameters }: MarkStep, { profile, optics }: Pick<RevisionRecord, 'profile' | 'optics'>): DerivedNumberDto[] {
-  return [...numbersOf(parameters, { physical: profile.physical, ...optics }).values()].map(toDerivedNumberDto);
+/** Machine and lens that a setting is for, as one revision knows them. */
+export type NumbersOn = {
+  readonly physical: PhysicalProfile;
+  readonly panel: Panel;
+  readonly optics: { readonly focalLengthMm: number; readonly measuredSpotUm: number | null };
+};
+export type RevisionNumbers = { readonly derived: StepNumbersDto[]; readonly derivedTotals: DerivedNumberDto[] };
+
+/** Numbers that follow from mark steps on the machine and lens of their recipe, per step and in total. */
+export function revisionNumbers(
+  steps: readonly MarkStep[],
+  { physical, panel, optics }: NumbersOn,
+  doseCaution: DoseCaution | null = null,
+): RevisionNumbers {
+  const ground = { optics: { physical, ...optics }, panel, doseCaution };
+  const settings = steps.map(({ parameters }) => parameters);
+  const { steps: each, totals } = settingNumbers(settings, ground);
+  return {
+    derived: each.map(({ numbers, remarks }, index) => ({ step: index + 1, numbers: numbers.map(toDto), remarks: [...remarks] })),
+    derivedTotals: totals.map(toDto),
+  };
 }
 
-function toDerivedNumberDto({ key, unit, formula, source, ...number }: DerivedNumber): DerivedNumberDto {
-  const described = { key, unit, formula, source };
-  if (number.missingBecause !== undefined)
-    return { ...described, value: null, missingBecause: number.missingBecause, outOfRange: null, inputs: {} };
-  return { ...described, value: number.value, missingBecause: null, outOfRange: number.outOfRange ?? null, inputs: { ...number.inputs } };
+function toDto({ key, unit, formula, source, lookAt, ...number }: SettingNumber): DerivedNumberDto {
+  const described = { key, unit, formula, source, lookAt: [...lookAt] };
+  if (number.missingBecause !== undefined) {
+    const { missingBecause, isRuledOutByMode } = number;
+    return { ...described, value: null, missingBecause, isRuledOutByMode, inputs: {} };
+  }
+  return { ...described, value: number.value, missingBecause: null, isRuledOutByMode: false, inputs: { ...number.inputs } };
 }

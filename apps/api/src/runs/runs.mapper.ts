@@ -1,4 +1,5 @@
 import type { Actor } from '../common/actor';
+import { revisionNumbers } from '../recipes/step-numbers';
 import type { RunDto, RunSummaryDto } from './dto/run.dto';
 import type { OpenHold } from './runs.errors';
 import { runActions } from './runs.policy';
@@ -30,6 +31,8 @@ export function toRunSummary({ run, recipe, revision, machine, material, started
 
 export function toRunDto(view: RunView, holds: readonly OpenHold[], actor: Pick<Actor, 'role' | 'memberId'>): RunDto {
   const { run, revision, finish, effect, lensFitted, deviation, panel, startedBy } = view;
+  // a confirmation run keeps the steps of a draft that may since have changed
+  const steps = run.steps ?? revision.content.steps;
   return {
     ...toRunSummary(view),
     finish,
@@ -37,8 +40,8 @@ export function toRunDto(view: RunView, holds: readonly OpenHold[], actor: Pick<
     lensFitted,
     holds: holds.map(({ id, subject, reason, placedBy }) => ({ id, subject, reason, placedBy })),
     panel,
-    // a confirmation run keeps the steps of a draft that may since have changed
-    steps: run.steps ?? revision.content.steps,
+    steps,
+    ...revisionNumbers(steps, view),
     setUpSteps: revision.content.setUpSteps,
     ticks: run.ticks,
     measurements: run.measurements.map((measurement) => ({ ...measurement, meets: measurement.meets ?? null })),

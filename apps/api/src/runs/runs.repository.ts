@@ -1,12 +1,13 @@
 import { Injectable } from '@nestjs/common';
 import { schema, type Tx } from '@proofplate/db';
-import type { MarkStep, Panel, RevisionContent, RevisionState, RunKind } from '@proofplate/recipe-model';
+import type { MarkStep, Panel, PhysicalProfile, RevisionContent, RevisionState, RunKind } from '@proofplate/recipe-model';
 import { and, desc, eq, isNull, or, type SQL, sql } from 'drizzle-orm';
 import { alias } from 'drizzle-orm/pg-core';
 import type { RunState } from './dto/run.dto';
 import type { OpenHold } from './runs.errors';
 
-const { run, recipe, revision, machine, machineProfile, material, finish, effect, lens, member, deviation, hold, photo } = schema;
+const { run, recipe, revision, machine, machineProfile, material, finish, effect, lens, machineLens, member, deviation, hold, photo } =
+  schema;
 const fitted = alias(lens, 'fitted');
 
 type Named = { id: string; name: string };
@@ -27,6 +28,8 @@ export type RunView = {
   startedBy: Named;
   deviation: { id: string; description: string } | null;
   panel: Panel;
+  physical: PhysicalProfile;
+  optics: { focalLengthMm: number; measuredSpotUm: number | null };
 };
 export type RunFilter = {
   startedBy?: string;
@@ -129,6 +132,8 @@ export class RunsRepository {
         startedBy: { id: member.id, name: member.printedName },
         deviation: { id: deviation.id, description: deviation.description },
         panel: machineProfile.panel,
+        physical: machineProfile.physical,
+        optics: { focalLengthMm: lens.focalLengthMm, measuredSpotUm: machineLens.measuredSpotUm },
       })
       .from(run)
       .innerJoin(recipe, and(eq(recipe.shopId, shop), eq(recipe.id, run.recipeId)))
@@ -139,6 +144,11 @@ export class RunsRepository {
       .innerJoin(finish, and(eq(finish.shopId, shop), eq(finish.id, recipe.finishId)))
       .innerJoin(effect, and(eq(effect.shopId, shop), eq(effect.id, recipe.effectId)))
       .innerJoin(member, and(eq(member.shopId, shop), eq(member.id, run.createdBy)))
+      .innerJoin(lens, and(eq(lens.shopId, shop), eq(lens.id, recipe.lensId)))
+      .leftJoin(
+        machineLens,
+        and(eq(machineLens.shopId, shop), eq(machineLens.machineId, run.machineId), eq(machineLens.lensId, recipe.lensId)),
+      )
       .leftJoin(fitted, and(eq(fitted.shopId, shop), eq(fitted.id, run.lensFittedId)))
       .leftJoin(deviation, and(eq(deviation.shopId, shop), eq(deviation.id, run.deviationId)))
       .where(isWanted)
@@ -154,6 +164,7 @@ export class RunsRepository {
         content: row.revision.content as unknown as RevisionContent,
       },
       panel: row.panel as unknown as Panel,
+      physical: row.physical as unknown as PhysicalProfile,
     }));
   }
 }

@@ -1,5 +1,5 @@
 import { ApiProperty } from '@nestjs/swagger';
-import { DoseDto, GridFactorDto, PlateSizeDto } from './coupon.dto';
+import { DoseCautionDto, DoseDto, GridFactorDto, PlateSizeDto } from './coupon.dto';
 import { ParameterSetDto } from './parameter-set.dto';
 
 export class PreviewCellDto {
@@ -31,11 +31,6 @@ export class MarkingTimeDto {
   @ApiProperty({ type: Number, nullable: true, description: 'Time of all cells, s; null: see missingBecause' }) totalS: number | null;
   @ApiProperty({ type: Number, nullable: true, description: 'Of it with the beam on, s' }) beamOnS: number | null;
   @ApiProperty({ type: String, nullable: true, description: 'Why the time is not known' }) missingBecause: string | null;
-}
-
-export class DoseCautionDto {
-  @ApiProperty({ description: 'Dose from which cells are flagged, J/mm²' }) doseJPerMm2: number;
-  @ApiProperty({ description: 'Where the number comes from' }) source: string;
 }
 
 /** What a plan would give. Nothing is stored. */

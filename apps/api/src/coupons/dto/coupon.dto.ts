@@ -99,6 +99,11 @@ export class TestGridDto {
   @ApiProperty({ type: PlateSizeDto, description: 'Size of the plate' }) plate: PlateSizeDto;
 }
 
+export class DoseCautionDto {
+  @ApiProperty({ description: 'Dose from which cells are flagged, J/mm²' }) doseJPerMm2: number;
+  @ApiProperty({ description: 'Where the number comes from' }) source: string;
+}
+
 export class DoseDto {
   @ApiProperty({ type: Number, nullable: true, description: 'Areal dose, J/mm²; null: see missingBecause' }) value: number | null;
   @ApiProperty({ type: String, nullable: true, description: 'Why there is no dose' }) missingBecause: string | null;
@@ -158,6 +163,8 @@ export class CouponDto extends CouponHeadDto {
   @ApiProperty({ description: 'Notes; may be empty' }) notes: string;
   @ApiProperty({ type: [String], description: 'Fields that nobody knows any more' }) unknownFields: string[];
   @ApiProperty({ description: 'Where numbers of a published or rendered plate come from; may be empty' }) sourceNote: string;
+  @ApiProperty({ type: DoseCautionDto, nullable: true, description: 'Dose from which cells of this material and finish went wrong' })
+  doseCaution: DoseCautionDto | null;
   @ApiProperty({ type: [StoredCriterionDto], nullable: true, description: 'Acceptance criteria as recorded; null: not yet' })
   criteria: StoredCriterionDto[] | null;
   @ApiProperty({ type: String, nullable: true, format: 'date-time', description: 'When the criteria were recorded' })

@@ -2,6 +2,7 @@ import { ApiProperty } from '@nestjs/swagger';
 import { type CautionLevel, ROUTE_KINDS, type RouteKind } from '@proofplate/recipe-model';
 import { NamedDto } from '../../coupons/dto/coupon.dto';
 import { PanelDto } from '../../machines/dto/panel.dto';
+import { DerivedNumberDto, StepNumbersDto } from '../../recipes/dto/derived-number.dto';
 import { EvidencePhotoDto, EvidencePlateDto } from '../../recipes/dto/evidence.dto';
 import { MarkStepDto, SetUpStepDto } from '../../recipes/dto/mark-step.dto';
 import { PowerShiftDto } from '../../recipes/dto/power-shift.dto';
@@ -107,6 +108,9 @@ export class FinderAnswerDto extends FinderRecipeDto {
   @ApiProperty({ description: 'Version of the machine’s profile that it was proved on' }) profileNumber: number;
   @ApiProperty({ description: 'false: the machine’s source or optics were changed after it was proved' }) isProfilePresent: boolean;
   @ApiProperty({ type: [MarkStepDto], description: 'Mark steps in their order' }) steps: MarkStepDto[];
+  @ApiProperty({ type: [StepNumbersDto], description: 'Numbers that follow from each mark step' }) derived: StepNumbersDto[];
+  @ApiProperty({ type: [DerivedNumberDto], description: 'Totals over the mark steps; none for a single step' })
+  derivedTotals: DerivedNumberDto[];
   @ApiProperty({ type: [SetUpStepDto], description: 'Set-up steps in their order' }) setUpSteps: SetUpStepDto[];
   @ApiProperty({ type: LimitsOfUseDto, description: 'Limits of use' }) limits: LimitsOfUseDto;
   @ApiProperty({ type: RecipeScopeDto, description: 'What it covers' }) scope: RecipeScopeDto;

@@ -10,10 +10,10 @@ import {
   ROUTE_KINDS,
   type RouteKind,
 } from '@proofplate/recipe-model';
-import { NamedDto } from '../../coupons/dto/coupon.dto';
+import { DoseCautionDto, NamedDto } from '../../coupons/dto/coupon.dto';
 import { PanelDto } from '../../machines/dto/panel.dto';
 import { PhysicalProfileDto } from '../../machines/dto/physical-profile.dto';
-import { StepNumbersDto } from './derived-number.dto';
+import { DerivedNumberDto, StepNumbersDto } from './derived-number.dto';
 import { EvidenceDto } from './evidence.dto';
 import { MarkStepDto, SetUpStepDto } from './mark-step.dto';
 import { RecipeKeysDto } from './recipe-keys.dto';
@@ -56,6 +56,13 @@ export class RevisionProfileDto {
   @ApiProperty({ description: 'true: the machine is still what it was' }) isPresent: boolean;
   @ApiProperty({ type: PhysicalProfileDto, description: 'Source and scan head' }) physical: PhysicalProfileDto;
   @ApiProperty({ type: PanelDto, description: 'The fields of the control in its order' }) panel: PanelDto;
+}
+
+export class RevisionOpticsDto {
+  @ApiProperty({ description: 'Focal length of the lens, mm' }) focalLengthMm: number;
+  @ApiProperty({ type: Number, nullable: true, description: 'Spot diameter (1/e²) that somebody measured, µm' }) measuredSpotUm:
+    | number
+    | null;
 }
 
 export class RevisionCalibrationDto {
@@ -132,6 +139,11 @@ export class RecipeRevisionDto extends RevisionBriefDto {
   })
   comparedWith: RevisionBriefDto | null;
   @ApiProperty({ type: [StepNumbersDto], description: 'Numbers that follow from each mark step' }) derived: StepNumbersDto[];
+  @ApiProperty({ type: [DerivedNumberDto], description: 'Totals over the mark steps; none for a single step' })
+  derivedTotals: DerivedNumberDto[];
+  @ApiProperty({ type: RevisionOpticsDto, description: 'Lens and spot that the numbers rest on' }) optics: RevisionOpticsDto;
+  @ApiProperty({ type: DoseCautionDto, nullable: true, description: 'Dose from which cells of this material and finish went wrong' })
+  doseCaution: DoseCautionDto | null;
   @ApiProperty({ description: 'SHA-256 of the content as it stands now, hexadecimal; what a signature is bound to' }) contentHash: string;
   @ApiProperty({ description: 'Number of the stored version; the ETag is "v" and this number' }) version: number;
   @ApiProperty({

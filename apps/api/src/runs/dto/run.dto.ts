@@ -11,6 +11,7 @@ import {
 import { PageOf } from '../../common/pagination/page';
 import { NamedDto } from '../../coupons/dto/coupon.dto';
 import { PanelDto } from '../../machines/dto/panel.dto';
+import { DerivedNumberDto, StepNumbersDto } from '../../recipes/dto/derived-number.dto';
 import { MarkStepDto, SetUpStepDto } from '../../recipes/dto/mark-step.dto';
 
 export const RUN_STATES = ['started', 'finished', 'abandoned'] as const;
@@ -99,6 +100,9 @@ export class RunDto extends RunSummaryDto {
   @ApiProperty({ type: [RunHoldDto], description: 'Open holds; they come before everything else' }) holds: RunHoldDto[];
   @ApiProperty({ type: PanelDto, description: 'The fields of the machine’s control, in its order' }) panel: PanelDto;
   @ApiProperty({ type: [MarkStepDto], description: 'Mark steps as dialled in' }) steps: MarkStepDto[];
+  @ApiProperty({ type: [StepNumbersDto], description: 'Numbers that follow from each mark step' }) derived: StepNumbersDto[];
+  @ApiProperty({ type: [DerivedNumberDto], description: 'Totals over the mark steps; none for a single step' })
+  derivedTotals: DerivedNumberDto[];
   @ApiProperty({ type: [SetUpStepDto], description: 'Set-up steps' }) setUpSteps: SetUpStepDto[];
   @ApiProperty({
     type: 'object',
