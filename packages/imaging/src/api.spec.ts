@@ -27,6 +27,7 @@ it('exports exactly these names', () => {
     'moduleModulation',
     'parseCellAddress',
     'rowLetter',
+    'srgbFromLab',
     'symbolContrast',
     'symbolGrade',
     'symbolParameterGrade',

@@ -4,6 +4,7 @@ export { colourDifference2000, type DifferenceWeights } from './colour/colour-di
 export { labFromSrgb } from './colour/lab-from-srgb';
 export { labFromXyz } from './colour/lab-from-xyz';
 export { linearFromSrgb } from './colour/linear-from-srgb';
+export { srgbFromLab } from './colour/srgb-from-lab';
 export { COLOUR_WHITE, COLOUR_WHITE_NAME } from './colour/white-point';
 export { xyzFromLinearRgb } from './colour/xyz-from-linear-rgb';
 export { cellContrast } from './contrast/cell-contrast';

@@ -1,9 +1,8 @@
+import { colourDifference2000, type Lab, srgbFromLab } from '@proofplate/imaging';
 import { formatNumber } from './format';
 
 /** What is read of a cell. */
 export type MeasuredCell = { measurements: readonly { quantity: string; value: number | null }[] };
-
-export type Lab = { lightness: number; a: number; b: number };
 
 /** Newest value of a quantity that was measured as a number. */
 export function measured(cell: MeasuredCell | undefined, quantity: string): number | undefined {
@@ -17,16 +16,13 @@ export function labOf(cell: MeasuredCell | undefined): Lab | undefined {
   return lightness === undefined || a === undefined || b === undefined ? undefined : { lightness, a, b };
 }
 
-/** The colour as CSS shows it. */
-export function cssColour({ lightness, a, b }: Lab): string {
-  return `lab(${lightness}% ${a} ${b})`;
+/** The colour as a screen shows it, `#rrggbb`. */
+export function cssColour(lab: Lab): string {
+  const { red, green, blue } = srgbFromLab(lab);
+  return `#${[red, green, blue].map((channel) => Math.round(channel).toString(16).padStart(2, '0')).join('')}`;
 }
 
-/** ΔE*ab of two measured colours: the plain distance in L*a*b* (CIE 1976), not ΔE00. */
-export function deltaE76(one: Lab, other: Lab): number {
-  return Math.hypot(one.lightness - other.lightness, one.a - other.a, one.b - other.b);
-}
-
+/** `deltaE` is ΔE00. */
 export type ColourDifference = { deltaE: number | undefined; words: string } | undefined;
 
 /** How two marks differ to the eye; undefined where neither colour nor lightness of both was measured. */
@@ -38,7 +34,7 @@ export function colourDifference(before: MeasuredCell | undefined, after: Measur
   const change = lightnessAfter - lightnessBefore;
   const [labBefore, labAfter] = labs;
   return {
-    deltaE: labBefore === undefined || labAfter === undefined ? undefined : deltaE76(labBefore, labAfter),
+    deltaE: labBefore === undefined || labAfter === undefined ? undefined : colourDifference2000(labBefore, labAfter),
     words: lightnessWords(change),
   };
 }

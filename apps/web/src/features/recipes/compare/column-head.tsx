@@ -74,7 +74,7 @@ function Colour({ revision, reference }: Pick<ColumnHeadProps, 'revision' | 'ref
       {revision.id === reference?.id && <chakra.span color="fg.muted">the reference</chakra.span>}
       {difference?.deltaE !== undefined && (
         <span>
-          ΔE*<chakra.sub fontSize="0.75em">ab</chakra.sub> <b>{formatNumber(difference.deltaE, { decimals: 1 })}</b>
+          ΔE<chakra.sub fontSize="0.75em">00</chakra.sub> <b>{formatNumber(difference.deltaE, { decimals: 1 })}</b>
         </span>
       )}
       {difference !== undefined && difference.deltaE === undefined && difference.words}

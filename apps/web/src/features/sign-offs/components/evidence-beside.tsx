@@ -148,7 +148,7 @@ function CellNumbers({ cell }: { cell: EvidenceCell }) {
   return <FactList facts={[...facts, ...rating]} />;
 }
 
-/** ΔE*ab is named as such: the plain distance of 1976, larger than ΔE00 for strong colours. */
+/** ΔE00 is named as such: other colour differences are in use. */
 function Difference({ current, proposed }: { current: Revision; proposed: Revision }) {
   const difference = colourDifference(current.evidence.basis[0], proposed.evidence.basis[0]);
   return (
@@ -161,7 +161,7 @@ function Difference({ current, proposed }: { current: Revision; proposed: Revisi
             <>
               {difference.deltaE !== undefined && (
                 <b>
-                  ΔE*<chakra.sub fontSize="0.75em">ab</chakra.sub> {formatNumber(difference.deltaE, { decimals: 1 })}{' '}
+                  ΔE<chakra.sub fontSize="0.75em">00</chakra.sub> {formatNumber(difference.deltaE, { decimals: 1 })}{' '}
                 </b>
               )}
               between the two cells: {difference.words}

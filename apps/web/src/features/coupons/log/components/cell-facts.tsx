@@ -4,10 +4,10 @@ import { METHOD_LABELS, type MeasurementQuantity, QUANTITIES } from '@proofplate
 import { useMemo } from 'react';
 import { type Fact, FactList } from '../../../../components/fact-list';
 import { Swatch } from '../../../../components/swatch';
+import { cssColour } from '../../../../lib/colour-difference';
 import { formatNumber, formatQuantity } from '../../../../lib/format';
 import type { Coupon, CouponCell } from '../../coupons.api';
 import { derivedNumbersOf } from '../cell-numbers';
-import { labColour } from '../lab-colour';
 import type { Inspection, Measurement } from '../log.api';
 
 const COLOUR: readonly MeasurementQuantity[] = ['lightness', 'a', 'b'];
@@ -56,7 +56,7 @@ function colourFact(counting: ReadonlyMap<string, Measurement>): Fact {
   const [l, a, b] = COLOUR.map((quantity) => counting.get(quantity)?.value ?? undefined);
   if (l === undefined) return { label: 'Colour, L*a*b*', value: <NotMeasured /> };
   if (a === undefined || b === undefined) return { label: 'Lightness, L*', value: formatNumber(l, { decimals: 1 }) };
-  return { label: 'Colour, L*a*b*', value: <Swatch colour={labColour({ l, a, b })} lab={{ l, a, b }} /> };
+  return { label: 'Colour, L*a*b*', value: <Swatch colour={cssColour({ lightness: l, a, b })} lab={{ l, a, b }} /> };
 }
 
 function measuredFact(quantity: MeasurementQuantity, row: Measurement | undefined): Fact {
