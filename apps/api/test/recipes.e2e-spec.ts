@@ -333,6 +333,20 @@ describe('GET and PATCH /api/recipes/:id', () => {
     expectProblem(await call(test, elsewhere.lead, { method: 'PATCH', url, version: 1, payload }), 404, 'not-found');
   });
 
+  it('keeps the earlier scope in the ledger, and lets nobody change it in somebody else’s draft', async () => {
+    const draft = await draftFromCell(test, shop, coupon);
+    const url = `/recipes/${draft.recipe.id}`;
+    const { version } = await read<RecipeDto>(test, shop.operator, url);
+    const payload = { scope: { featureKind: 'code' } };
+    expect((await call(test, shop.operator, { method: 'PATCH', url, version, payload })).statusCode).toBe(200);
+    const [event] = (await read<{ items: object[] }>(test, shop.lead, `/ledger?subjectId=${draft.recipe.id}`)).items;
+    expect(event).toMatchObject({ action: 'recipe.changed', before: { scope: { featureKind: 'filled-area' } }, after: payload });
+    await created(test, shop.lead, `/api${url}/drafts`, {});
+    const change = { method: 'PATCH', url, version: version + 1, payload: { scope: { featureKind: 'single-line' } } } as const;
+    expectProblem(await call(test, shop.operator, change), 403, 'not-permitted');
+    expect((await call(test, shop.lead, change)).statusCode).toBe(200);
+  });
+
   it('refuses another scope once anything was submitted', async () => {
     const submitted = await makeSubmitted(test, shop);
     const url = `/recipes/${submitted.recipe.id}`;

@@ -11,8 +11,9 @@ import type { UpdateRecipeDto } from './dto/create-recipe.dto';
 import type { ListRecipesQuery } from './dto/list-recipes.query.dto';
 import type { RecipeDto, RecipePageDto } from './dto/recipe.dto';
 import { scopeAsStored } from './entered-content';
+import { mayEditDraft } from './recipe-revisions.policy';
 import { RecipeViewsService } from './recipe-views.service';
-import { RecipeNotFoundError, ScopeSignedError } from './recipes.errors';
+import { NotYourDraftError, RecipeNotFoundError, ScopeSignedError } from './recipes.errors';
 import { mayEditRecipe } from './recipes.policy';
 
 /** Finding recipes and changing what is not signed of them. */
@@ -53,18 +54,21 @@ export class RecipesService {
       if (before === undefined) throw new RecipeNotFoundError();
       if (!mayEditRecipe(actor, before)) throw new ForbiddenError('Whoever began the recipe changes it, or a lead.');
       if (before.version !== version) throw new StaleError(await this.views.getDto(tx, actor, id));
-      const scope = dto.scope == null ? undefined : await this.changeScope(tx, actor, id, dto.scope);
-      const change = { ...(dto.title == null ? {} : { title: dto.title }), ...(scope === undefined ? {} : { scope }) };
+      const scopes = dto.scope == null ? undefined : await this.changeScope(tx, actor, id, dto.scope);
+      const change = { ...(dto.title == null ? {} : { title: dto.title }), ...(scopes === undefined ? {} : { scope: scopes.after }) };
       await this.repositories.recipes.update(tx, { shopId: actor.shopId, id }, change);
       const entry = { actor, action: 'recipe.changed', subjectType: 'recipe', subjectId: id, subjectCode: before.code };
-      await this.ledger.record(tx, { ...entry, before: { title: before.title }, after: change });
+      const earlier = { title: before.title, ...(scopes === undefined ? {} : { scope: scopes.before }) };
+      await this.ledger.record(tx, { ...entry, before: earlier, after: change });
       return this.views.getDto(tx, actor, id);
     });
   }
 
+  /** The drafts follow, so whoever changes it must be one who may change each of them. */
   private async changeScope(tx: Tx, actor: Actor, recipeId: string, typed: NonNullable<UpdateRecipeDto['scope']>) {
     const ladder = await this.repositories.revisions.lockLadder(tx, actor.shopId, recipeId);
     if (ladder.some(({ number }) => number !== null)) throw new ScopeSignedError();
+    if (!ladder.every((draft) => mayEditDraft(actor, draft))) throw new NotYourDraftError('or a lead changes a draft');
     const problems = await this.entry.scopeProblems(tx, actor.shopId, typed);
     if (problems.length > 0) throw new InvalidError('The scope needs another look.', problems);
     const scope = scopeAsStored(typed);
@@ -73,6 +77,6 @@ export class RecipesService {
       const editorIds = isRewritten(draft, { ...draft, ...change }) ? withEditor(draft, actor.memberId) : draft.editorIds;
       await this.repositories.revisions.updateDraft(tx, { shopId: actor.shopId, id: draft.id }, { ...change, editorIds });
     }
-    return scope;
+    return { before: ladder[0]?.content.scope ?? {}, after: scope };
   }
 }
