@@ -328,6 +328,20 @@ describe('approving', () => {
     expect(late).toMatchObject({ checks: [{ key: 'never' }, { key: 'confirmation' }, { key: 'calibration' }] });
   });
 
+  it('signs for those cautions only that stand beside the work, each once', async () => {
+    const draft = await makeProvedDraft(test, shop);
+    const care = careIds(draft);
+    const acknowledgedCautionIds = [...care, ...care, randomUUID()];
+    const submitted = (await acts(test, draft.id).submit(shop.operator, draft, { acknowledgedCautionIds })).json<RecipeRevisionDto>();
+    expect((await acts(test, draft.id).approve(shop.lead, submitted, { acknowledgedCautionIds })).statusCode).toBe(200);
+    const kept = await asSuperuser(
+      test,
+      (sql) => sql<{ ids: string[] }[]>`select acknowledged_caution_ids as ids from sign_off where revision_id = ${draft.id}`,
+    );
+    expect(kept.map(({ ids }) => [...ids].sort())).toEqual([[...care].sort(), [...care].sort()]);
+    expect(care.length).toBeGreaterThan(0);
+  });
+
   it('refuses a second recipe that covers the same parts', async () => {
     const given = { scope: FOR_CUSTOMER('Dial works 7') };
     const [first, second] = [await makeSubmitted(test, shop, given), await makeSubmitted(test, shop, given)];

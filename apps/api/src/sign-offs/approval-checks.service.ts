@@ -93,6 +93,10 @@ export const toSign = ({ revision, recipe }: RevisionRecord) => ({
   sourceKind: recipe.machine.sourceKind,
 });
 
+/** Only cautions that stand beside the work can have been read for it; each counts once. */
+export const readForIt = ({ cautions }: Pick<RevisionRecord, 'cautions'>, ids: readonly string[]): string[] =>
+  cautions.map(({ id }) => id).filter((id) => ids.includes(id));
+
 /** What a signature keeps of the checks, for whoever reads it years later. */
 export function keptChecks(items: readonly ApprovalCheck[], { confirmation, facts }: Weighed) {
   const { count, lots, dayCount, spreads } = confirmation;

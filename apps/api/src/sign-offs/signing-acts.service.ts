@@ -9,7 +9,7 @@ import { RecipeRevisionsService } from '../recipes/recipe-revisions.service';
 import { RevisionStateError, StaleRevisionError } from '../recipes/recipes.errors';
 import { hashOfRecord } from '../recipes/revision-records.service';
 import type { LockedRevision } from '../recipes/stored-revision';
-import { ApprovalChecksService, keptChecks, toSign, type Weighed } from './approval-checks.service';
+import { ApprovalChecksService, keptChecks, readForIt, toSign, type Weighed } from './approval-checks.service';
 import type { ApproveRevisionDto, WithdrawRevisionDto } from './dto/sign-off-acts.dto';
 import { SignOffLettersService } from './sign-off-letters.service';
 import { ChecksFailError, NotForThisProcessError, SelfApprovalError } from './sign-offs.errors';
@@ -43,7 +43,7 @@ export class SigningActsService {
     if (superseded !== undefined) await this.recordSuperseded(tx, actor, superseded, record.recipe.code);
     await this.signatures.sign(tx, actor, record, {
       ...{ meaning: 'approved', method: 'password', action: state === 'approved' ? 'revision.approved' : 'revision.scheduled' },
-      ...{ comment, contentHash: dto.contentHash, acknowledgedCautionIds: dto.acknowledgedCautionIds },
+      ...{ comment, contentHash: dto.contentHash, acknowledgedCautionIds: readForIt(record, dto.acknowledgedCautionIds) },
       checks: keptChecks(items, weighed),
       after: { state, number: revision.number },
     });
