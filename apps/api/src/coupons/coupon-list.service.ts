@@ -25,7 +25,7 @@ export class CouponListService {
   ) {}
 
   async list(actor: Actor, query: ListCouponsQuery): Promise<Page<CouponSummaryDto>> {
-    const [createdAt, id] = decodeCursor(query.cursor, ['string', 'string']) ?? [];
+    const [createdAt, id] = decodeCursor(query.cursor, ['moment', 'id']) ?? [];
     const after = createdAt === undefined ? {} : { after: { createdAt: String(createdAt), id: String(id) } };
     return this.unitOfWork.read(actor, async (tx) => {
       const views = await this.coupons.list(tx, actor.shopId, { filter: filterOf(query), limit: query.limit + 1, ...after });

@@ -21,7 +21,7 @@ export class LensesService {
   ) {}
 
   async list(actor: Actor, query: ArchivedQuery): Promise<Page<LensDto>> {
-    const [name, id] = decodeCursor(query.cursor, ['string', 'string']) ?? [];
+    const [name, id] = decodeCursor(query.cursor, ['string', 'id']) ?? [];
     const after = name === undefined ? undefined : { name: String(name), id: String(id) };
     const rows = await this.unitOfWork.read(actor, (tx) =>
       this.lenses.list(tx, actor.shopId, { archived: query.archived, limit: query.limit + 1, ...(after === undefined ? {} : { after }) }),

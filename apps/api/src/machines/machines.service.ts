@@ -25,7 +25,7 @@ export class MachinesService {
   ) {}
 
   async list(actor: Actor, query: ArchivedQuery): Promise<Page<MachineDto>> {
-    const [name, id] = decodeCursor(query.cursor, ['string', 'string']) ?? [];
+    const [name, id] = decodeCursor(query.cursor, ['string', 'id']) ?? [];
     const after = name === undefined ? {} : { after: { name: String(name), id: String(id) } };
     const views = await this.unitOfWork.read(actor, (tx) =>
       this.machines.list(tx, actor.shopId, { archived: query.archived, limit: query.limit + 1, ...after }),

@@ -20,7 +20,7 @@ export class FinishesService {
   ) {}
 
   async list(actor: Actor, query: ArchivedQuery): Promise<Page<FinishDto>> {
-    const [name, id] = decodeCursor(query.cursor, ['string', 'string']) ?? [];
+    const [name, id] = decodeCursor(query.cursor, ['string', 'id']) ?? [];
     const after = name === undefined ? {} : { after: { name: String(name), id: String(id) } };
     const rows = await this.unitOfWork.read(actor, (tx) =>
       this.finishes.list(tx, actor.shopId, query.archived, { limit: query.limit + 1, ...after }),

@@ -22,7 +22,7 @@ export class MaterialGroupsService {
   ) {}
 
   async list(actor: Actor, query: PageQuery): Promise<Page<MaterialGroupDto>> {
-    const [name, id] = decodeCursor(query.cursor, ['string', 'string']) ?? [];
+    const [name, id] = decodeCursor(query.cursor, ['string', 'id']) ?? [];
     const after = name === undefined ? {} : { after: { name: String(name), id: String(id) } };
     const views = await this.unitOfWork.read(actor, (tx) => this.groups.list(tx, actor.shopId, { limit: query.limit + 1, ...after }));
     return pageOf(views, query.limit, { item: (view) => toMaterialGroupDto(view, actor), cursor: ({ group }) => [group.name, group.id] });

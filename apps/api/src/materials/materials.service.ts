@@ -31,7 +31,7 @@ export class MaterialsService {
   ) {}
 
   async list(actor: Actor, query: ListMaterialsQuery): Promise<Page<MaterialDto>> {
-    const [name, id] = decodeCursor(query.cursor, ['string', 'string']) ?? [];
+    const [name, id] = decodeCursor(query.cursor, ['string', 'id']) ?? [];
     const after = name === undefined ? {} : { after: { name: String(name), id: String(id) } };
     const filter = { archived: query.archived, families: query.family, words: query.q };
     return this.unitOfWork.read(actor, async (tx) => {

@@ -51,7 +51,7 @@ export class MembersService {
   }
 
   async list(actor: Actor, query: ListMembersQuery): Promise<Page<MemberDto>> {
-    const [name, id] = decodeCursor(query.cursor, ['string', 'string']) ?? [];
+    const [name, id] = decodeCursor(query.cursor, ['string', 'id']) ?? [];
     const after = typeof name === 'string' && typeof id === 'string' ? { after: [name, id] as const } : {};
     return this.unitOfWork.read(actor, async (tx) => {
       const rows = await this.repository.list(tx, actor.shopId, { state: query.state, ...after }, query.limit + 1);

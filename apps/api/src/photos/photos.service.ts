@@ -26,7 +26,7 @@ export class PhotosService {
   ) {}
 
   async list(actor: Actor, couponId: string, query: ListPhotosQuery): Promise<Page<PhotoDto>> {
-    const [beforeId] = decodeCursor(query.cursor, ['string']) ?? [];
+    const [beforeId] = decodeCursor(query.cursor, ['id']) ?? [];
     const page = beforeId === undefined ? {} : { beforeId: String(beforeId) };
     return this.unitOfWork.read(actor, async (tx) => {
       if ((await this.photos.findCoupon(tx, actor.shopId, couponId)) === undefined) throw new NotFoundError();
