@@ -276,7 +276,7 @@ describe('first piece and finish', () => {
     await created(test, shop.lead, '/api/holds', { recipeId: held.recipeId, reason: 'Wrong lot' });
     expectProblem(await act(run, 'first-piece', { ok: true }), 409, 'on-hold');
     const seen = (await get(`/api/runs/${run.code}`)).json<RunDto>();
-    expect(seen).toMatchObject({ holds: [{ reason: 'Wrong lot' }], allowedActions: ['tick', 'finish', 'bad-result'] });
+    expect(seen).toMatchObject({ holds: [{ reason: 'Wrong lot' }], allowedActions: ['tick', 'set-up-part', 'finish', 'bad-result'] });
     expect((await act(run, 'finish', { good: 0, scrap: 1 })).statusCode).toBe(200);
   });
 
@@ -286,7 +286,7 @@ describe('first piece and finish', () => {
     await withdrawRecipe(test, shop.lead, recipe);
     expectProblem(await act(run, 'first-piece', { ok: true }), 409, 'not-approved');
     const seen = (await get(`/api/runs/${run.code}`)).json<RunDto>();
-    expect(seen).toMatchObject({ firstPiece: null, allowedActions: ['tick', 'finish', 'bad-result'] });
+    expect(seen).toMatchObject({ firstPiece: null, allowedActions: ['tick', 'set-up-part', 'finish', 'bad-result'] });
     expect((await act(run, 'first-piece', { ok: false, note: 'Stopped.' })).statusCode).toBe(200);
     expect((await act(run, 'finish', { good: 0, scrap: 1 })).statusCode).toBe(200);
   });

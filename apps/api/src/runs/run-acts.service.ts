@@ -8,9 +8,10 @@ import { LedgerService } from '../ledger/ledger.service';
 import type { CitedRevision } from './cited-revisions.repository';
 import type { RunDto } from './dto/run.dto';
 import type { StartRunDto } from './dto/start-run.dto';
-import { RunNotFoundError } from './runs.errors';
+import { RunFinishedError, RunNotFoundError } from './runs.errors';
 import { toRunDto } from './runs.mapper';
-import { RunsRepository } from './runs.repository';
+import { readsAllRuns } from './runs.policy';
+import { type RunRow, RunsRepository } from './runs.repository';
 
 /** Writes the start of a run and reads runs back for their callers. */
 @Injectable()
@@ -54,6 +55,26 @@ export class RunActs {
     if (view === undefined) throw new RunNotFoundError();
     const holds = await this.runs.openHolds(tx, actor.shopId, { recipeId: view.recipe.id, machineId: view.machine.id });
     return toRunDto(view, holds, actor);
+  }
+
+  /** @throws RunNotFoundError also for another shop's run, and for a trainee somebody else's */
+  async assertReadable(tx: Tx, actor: Actor, id: string): Promise<void> {
+    const view = await this.runs.findView(tx, actor.shopId, id);
+    if (view === undefined || (!readsAllRuns(actor) && view.startedBy.id !== actor.memberId)) throw new RunNotFoundError();
+  }
+
+  /** @throws RunFinishedError once the run has ended */
+  async lockStarted(tx: Tx, actor: Actor, id: string): Promise<RunRow> {
+    const run = await this.lockOwn(tx, actor, id);
+    if (run.state !== 'started') throw new RunFinishedError();
+    return run;
+  }
+
+  /** @throws RunNotFoundError also for another shop's run, and for a trainee somebody else's */
+  async lockOwn(tx: Tx, actor: Actor, id: string): Promise<RunRow> {
+    const run = await this.runs.lock(tx, actor.shopId, id);
+    if (run === undefined || (!readsAllRuns(actor) && run.createdBy !== actor.memberId)) throw new RunNotFoundError();
+    return run;
   }
 }
 

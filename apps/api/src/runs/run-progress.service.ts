@@ -12,15 +12,7 @@ import type { TickRunDto } from './dto/start-run.dto';
 import { whyNotUsable } from './revision-use';
 import { RunActs } from './run-acts.service';
 import { tickProblems } from './run-ticks';
-import {
-  FirstPieceNotReleasedError,
-  NotReadyToStartError,
-  OnHoldError,
-  RevisionNotUsableError,
-  RunFinishedError,
-  RunNotFoundError,
-} from './runs.errors';
-import { readsAllRuns } from './runs.policy';
+import { FirstPieceNotReleasedError, NotReadyToStartError, OnHoldError, RevisionNotUsableError } from './runs.errors';
 import { type RunChange, type RunRow, RunsRepository } from './runs.repository';
 
 /** What happens between the start of a run and its end, and the bad result that may come out later. */
@@ -37,7 +29,7 @@ export class RunProgressService {
 
   async tick(actor: Actor, id: string, { tick, untick }: TickRunDto): Promise<RunDto> {
     return this.unitOfWork.run(actor, async (tx) => {
-      const run = await this.lockStarted(tx, actor, id);
+      const run = await this.acts.lockStarted(tx, actor, id);
       const revision = await this.cited.find(tx, actor.shopId, run.revisionId);
       const problems = revision === undefined ? [] : tickProblems(revision.content, [...tick, ...untick], { isStart: false });
       if (problems.length > 0) throw new NotReadyToStartError(problems);
@@ -51,7 +43,7 @@ export class RunProgressService {
   /** Looks at the first piece: releases the batch, or says that it does not match and leaves it for another try. */
   async firstPiece(actor: Actor, id: string, { ok, note, photoId }: FirstPieceActDto): Promise<RunDto> {
     return this.unitOfWork.run(actor, async (tx) => {
-      const run = await this.lockStarted(tx, actor, id);
+      const run = await this.acts.lockStarted(tx, actor, id);
       if (ok) await this.refuseStopped(tx, actor, run);
       if (photoId !== undefined && !(await this.runs.isPhotoOfShop(tx, actor.shopId, photoId)))
         throw new InvalidError('One field needs another look.', [{ pointer: '#/photoId', detail: 'This photo is not in the shop.' }]);
@@ -64,7 +56,7 @@ export class RunProgressService {
 
   async finish(actor: Actor, id: string, dto: FinishRunDto): Promise<RunDto> {
     return this.unitOfWork.run(actor, async (tx) => {
-      const run = await this.lockStarted(tx, actor, id);
+      const run = await this.acts.lockStarted(tx, actor, id);
       if (run.kind === 'production' && dto.good > 0 && run.firstPiece?.ok !== true) throw new FirstPieceNotReleasedError();
       if (run.kind === 'confirmation' && dto.measurements.length === 0) throw measurementsMissing();
       if (run.deviationId !== null)
@@ -83,7 +75,7 @@ export class RunProgressService {
   /** A bad result is told of a run at any time, also after its end. */
   async tellBadResult(actor: Actor, id: string, { outcome, note }: TellBadResultDto): Promise<RunDto> {
     return this.unitOfWork.run(actor, async (tx) => {
-      const run = await this.lockOwn(tx, actor, id);
+      const run = await this.acts.lockOwn(tx, actor, id);
       const badResult = { outcome, note, at: new Date().toISOString(), byName: actor.printedName };
       return this.write(tx, actor, run, { action: 'run.bad-result-told', change: { badResult }, told: badResult });
     });
@@ -107,19 +99,6 @@ export class RunProgressService {
     await this.runs.update(tx, actor.shopId, run.id, change);
     await this.ledger.record(tx, { actor, action, subjectType: 'run', subjectId: run.id, subjectCode: run.code, after: told });
     return this.acts.toDto(tx, actor, run.id);
-  }
-
-  private async lockStarted(tx: Tx, actor: Actor, id: string): Promise<RunRow> {
-    const run = await this.lockOwn(tx, actor, id);
-    if (run.state !== 'started') throw new RunFinishedError();
-    return run;
-  }
-
-  /** @throws RunNotFoundError also for another shop's run, and for a trainee somebody else's */
-  private async lockOwn(tx: Tx, actor: Actor, id: string): Promise<RunRow> {
-    const run = await this.runs.lock(tx, actor.shopId, id);
-    if (run === undefined || (!readsAllRuns(actor) && run.createdBy !== actor.memberId)) throw new RunNotFoundError();
-    return run;
   }
 }
 

@@ -12,6 +12,9 @@ import { DeviationsService } from './deviations.service';
 import { HoldsController } from './holds.controller';
 import { HoldsRepository } from './holds.repository';
 import { HoldsService } from './holds.service';
+import { PartSetUpsController } from './part-set-ups.controller';
+import { PartSetUpsRepository } from './part-set-ups.repository';
+import { PartSetUpsService } from './part-set-ups.service';
 import { RunActs } from './run-acts.service';
 import { RunListService } from './run-list.service';
 import { RunProgressService } from './run-progress.service';
@@ -22,16 +25,18 @@ import { SettingRequestsController } from './setting-requests.controller';
 import { SettingRequestsRepository } from './setting-requests.repository';
 import { SettingRequestsService } from './setting-requests.service';
 
-/** Runs with their first piece and counts, holds, deviations, and requests for settings. */
+/** Runs with their first piece, counts and round parts, holds, deviations, and requests for settings. */
 @Module({
   imports: [LedgerModule, MailModule, MaterialsModule, MembersModule, RecipesModule],
-  controllers: [RunsController, HoldsController, SettingRequestsController, DeviationsController],
+  controllers: [RunsController, PartSetUpsController, HoldsController, SettingRequestsController, DeviationsController],
   providers: [
     RunsService,
     RunActs,
     RunListService,
     RunProgressService,
     RunsRepository,
+    PartSetUpsService,
+    PartSetUpsRepository,
     CitedRevisionsService,
     CitedRevisionsRepository,
     HoldsService,

@@ -1,7 +1,7 @@
 import { type RunKind, roleAtLeast } from '@proofplate/recipe-model';
 import type { Actor } from '../common/actor';
 
-export type RunAction = 'tick' | 'first-piece' | 'finish' | 'bad-result';
+export type RunAction = 'tick' | 'set-up-part' | 'first-piece' | 'finish' | 'bad-result';
 type Acting = Pick<Actor, 'role' | 'memberId'>;
 
 /** Trainees see their own runs; from operator up everybody's. */
@@ -17,7 +17,7 @@ export function runActions(
 ): RunAction[] {
   if (!readsAllRuns(actor) && run.startedBy !== actor.memberId) return [];
   if (run.state !== 'started') return ['bad-result'];
-  return run.isStopped ? ['tick', 'finish', 'bad-result'] : ['tick', 'first-piece', 'finish', 'bad-result'];
+  return run.isStopped ? ['tick', 'set-up-part', 'finish', 'bad-result'] : ['tick', 'set-up-part', 'first-piece', 'finish', 'bad-result'];
 }
 
 /** What the member may do with a request for a setting. */

@@ -35,6 +35,6 @@ export const makeRun = (rest: object = {}) => ({
   ticks: { 'set-up.0': '2026-05-14T07:29:00.000Z' },
   contentHash: '7f3ac21e'.repeat(8),
   version: 1,
-  allowedActions: ['tick', 'first-piece', 'finish', 'bad-result'],
+  allowedActions: ['tick', 'set-up-part', 'first-piece', 'finish', 'bad-result'],
   ...rest,
 });

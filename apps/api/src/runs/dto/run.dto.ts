@@ -115,7 +115,8 @@ export class RunDto extends RunSummaryDto {
   @ApiProperty({ description: 'Notes; may be empty' }) notes: string;
   @ApiProperty({ description: 'SHA-256 of the content that was dialled in' }) contentHash: string;
   @ApiProperty({ description: 'Number of the stored version; the ETag is "v" and this number' }) version: number;
-  @ApiProperty({ type: [String], description: 'What the caller may do: tick, first-piece, finish, bad-result' }) allowedActions: string[];
+  @ApiProperty({ type: [String], description: 'What the caller may do: tick, set-up-part, first-piece, finish, bad-result' })
+  allowedActions: string[];
 }
 
 export class RunPageDto extends PageOf(RunSummaryDto) {}

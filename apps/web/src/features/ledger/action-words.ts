@@ -46,6 +46,7 @@ export const ACTIONS: Readonly<Record<string, ActionWords>> = {
   'revision.withdrawn': words('withdrew', 'withdrew a revision'),
   'run.started': words('started the run', 'started a run'),
   'run.ticked': words('ticked steps of the run', 'ticked steps of a run'),
+  'run.part-set-up-saved': words('saved the part set-up of the run', 'saved a part set-up'),
   'run.first-piece-released': words('released the first piece of', 'released a first piece'),
   'run.first-piece-refused': words('refused the first piece of', 'refused a first piece'),
   'run.bad-result-told': words('told of a bad result of', 'told of a bad result'),
