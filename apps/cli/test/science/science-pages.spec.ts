@@ -13,6 +13,8 @@ const indexed = tableRows(SCIENCE_INDEX, '| page | title | derived numbers that 
     keys: keys === '' ? [] : keys.split(', ').map((key) => key.replaceAll('`', '')),
   }),
 );
+const PHYSICS_FUNCTIONS = Object.entries(physics).flatMap(([name, exported]) => (typeof exported === 'function' ? [name] : []));
+const DOCSTRING_PARTS = [/@param/u, /@returns/u, /@throws|nothing is thrown/u, /Valid /u, /Source: /u, /docs\/science\/[\w-]+\.md/u];
 
 describe('a science page', () => {
   it.each(SCIENCE_PAGES.map((page) => [page.file, page] as const))(
@@ -77,10 +79,19 @@ describe('the code', () => {
     expect([...named].filter((file) => file === undefined || !existsSync(join(CHECKOUT, 'docs/science', file)))).toEqual([]);
   });
 
+  it('states result, errors, validity, source and page of every function of the physics package', () => {
+    const docstrings = new Map(sources.flatMap(docstringsOf));
+    const wanting = PHYSICS_FUNCTIONS.flatMap((name) => {
+      const text = docstrings.get(name) ?? '';
+      const missing = DOCSTRING_PARTS.filter((part) => !part.test(text));
+      return missing.length === 0 ? [] : [`${name}: ${missing.join(' ')}`];
+    });
+    expect(wanting).toEqual([]);
+  });
+
   it('has every function of the physics package on a page', () => {
     const texts = SCIENCE_PAGES.map(({ text }) => text).join('\n');
-    const functions = Object.entries(physics).flatMap(([name, exported]) => (typeof exported === 'function' ? [name] : []));
-    expect(functions.filter((name) => !new RegExp(`\\b${name}\\b`, 'u').test(texts))).toEqual([]);
+    expect(PHYSICS_FUNCTIONS.filter((name) => !new RegExp(`\\b${name}\\b`, 'u').test(texts))).toEqual([]);
   });
 });
 
@@ -102,6 +113,13 @@ function allDerivedNumbers(): readonly physics.DerivedNumber[] {
     { spot: { spotDiameterUm: 40, wavelengthNm: 1064, m2: 1.3 }, focusOffsetsMm: [], fieldSizeMm: 110 },
   );
   return [...steps.flatMap((each) => each.numbers), ...totals, ...numbers];
+}
+
+/** Docstrings of the exported functions of a file, by the function's name. */
+function docstringsOf(text: string): readonly (readonly [string, string])[] {
+  return [...text.matchAll(/\/\*\*((?:(?!\*\/)[\s\S])*)\*\/\nexport function (\w+)/gu)].map(
+    ([, comment = '', name = '']) => [name, comment] as const,
+  );
 }
 
 function sourceTexts(folder: string): readonly string[] {

@@ -10,6 +10,7 @@ const NM_PER_MM_MRAD = 1000;
  * @param m2            beam propagation ratio M^2, finite, >= 1
  * @returns beam parameter product, mm mrad (radius x half angle; diameter x full angle is four times as much)
  * @throws RangeError naming the argument and its value, if out of range
+ * Valid for any beam: M^2 holds what keeps it from the limit of diffraction.
  * Source: ISO 11145, ISO 11146-1; docs/science/beam.md
  */
 export function beamParameterProduct(wavelengthNm: number, m2: number): number {

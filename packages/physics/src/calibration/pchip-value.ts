@@ -13,6 +13,7 @@ export type PchipCurve = {
  * @param position  position, unit of x, finite, between the first and the last x
  * @returns value, unit of y
  * @throws RangeError naming the position and the range it misses: nothing is extrapolated
+ * Valid between the points; the curve keeps their rise and fall and adds no turn of its own.
  * Source: as pchipSlopes; docs/science/power-calibration.md
  */
 export function pchipValue(curve: PchipCurve, position: number): number {

@@ -10,6 +10,7 @@ const J_PER_CM2_PER_MJ_PER_UM2 = 1e5;
  * @param spotDiameterUm  1/e^2 diameter on the work, um, finite, > 0
  * @returns average fluence, J/cm^2; half of peakFluence
  * @throws RangeError naming the argument and its value, if out of range
+ * Valid for a round spot; all energy is spread over the 1/e^2 disc, which holds 86 % of a Gaussian pulse.
  * Source: ISO 11145 (energy density); docs/science/pulses.md
  */
 export function averageFluence(pulseEnergyMj: number, spotDiameterUm: number): number {

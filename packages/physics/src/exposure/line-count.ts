@@ -11,6 +11,7 @@ const ROUNDING_ALLOWANCE = 1e-9;
  * @param lineSpacingUm  distance of neighbouring lines, um, finite, > 0
  * @returns number of lines, >= 1
  * @throws RangeError naming the argument and its value, if out of range
+ * Valid for straight lines parallel to an edge.
  * Source: convention of docs/science/marking-time.md
  */
 export function lineCount(heightMm: number, lineSpacingUm: number): number {

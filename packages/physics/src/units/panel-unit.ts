@@ -37,7 +37,14 @@ export const PANEL_UNITS = {
 
 export type PanelUnit = keyof typeof PANEL_UNITS;
 
-/** True for the code of a panel unit, for input that comes from outside. */
+/**
+ * True for the code of a panel unit, for input that comes from outside.
+ *
+ * @param code  anything
+ * @returns whether it is a key of PANEL_UNITS
+ * Valid for any input; nothing is thrown.
+ * Source: own table; docs/science/units.md
+ */
 export function isPanelUnit(code: unknown): code is PanelUnit {
   return typeof code === 'string' && Object.hasOwn(PANEL_UNITS, code);
 }

@@ -11,6 +11,7 @@ export type SpacingUnits = { inch: number; linesPerInch: number; linesPerCm: num
  * @param spacingMm distance of neighbouring lines, mm, finite, > 0
  * @returns the spacing in inches and the line densities per inch, centimetre and millimetre
  * @throws RangeError naming the argument and its value
+ * Valid for even spacings.
  * Source: inch = 25.4 mm exactly; docs/science/units.md
  */
 export function spacingUnits(spacingMm: number): SpacingUnits {

@@ -9,6 +9,7 @@ export type SpeedUnits = { metresPerMinute: number; inchesPerSecond: number; mil
  * @param speedMmPerS speed, mm/s, finite
  * @returns the speed in m/min, in/s and mm/min
  * @throws RangeError naming the argument and its value
+ * Valid without limit: all factors are exact.
  * Source: inch = 25.4 mm exactly; docs/science/units.md
  */
 export function speedUnits(speedMmPerS: number): SpeedUnits {

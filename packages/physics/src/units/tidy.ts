@@ -6,6 +6,7 @@ const KEPT_DIGITS = 15;
  *
  * @param value finite
  * @returns the value at 15 significant digits; relative change at most 5e-16
+ * Valid for finite numbers; others come back as they are, nothing is thrown.
  * Source: own; docs/science/units.md
  */
 export function tidy(value: number): number {

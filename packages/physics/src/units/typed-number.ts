@@ -54,6 +54,7 @@ const MAX_DIGITS = 15;
  * @param options decimalSign: the sign of the person's locale; it orders the readings and is used in the messages,
  *                either sign is read where only one meaning is left
  * @returns the number with its unit (null if none was typed), or a refusal with a message in words
+ * Valid for decimal numbers without exponent; nothing is thrown.
  * Source: own; docs/science/units.md
  */
 export function parseTypedNumber(text: string, { decimalSign }: { decimalSign: DecimalSign }): TypedNumber {

@@ -31,6 +31,10 @@ describe('the shipped cautions', () => {
     }
   });
 
+  it('name the hydrogen chloride of PVC', () => {
+    expect(wordsAbout('vinyl').join(' ')).toContain('hydrogen chloride');
+  });
+
   it('ask for the safety data sheet of what is not listed', () => {
     expect(wordsAbout('mystery plastic').join(' ')).toContain('safety data sheet');
   });
