@@ -35,11 +35,6 @@ const SETTING = { values: {}, fill: 'both directions', assist: 'none' };
 const WORK = { materialId: '{material}', finishId: '{finish}', effectId: '{effect}', machineId: '{machine}', lensId: '{lens}' };
 const PLAN = { ...WORK, columns: COLUMNS, base: SETTING, cellMm: 5, gapMm: 1.2, fillDrawnBy: 'machine', acknowledgedCautionIds: [] };
 const OLD_PLATE = { ...WORK, acknowledgedCautionIds: [], grid: { rows: 2, columns: 2 } };
-const LENGTH = { value: 20, unit: 'mm' };
-const PART = {
-  ...{ shape: 'cylinder', side: 'outside', diameter: LENGTH, length: LENGTH, artworkHeight: { value: 5, unit: 'mm' } },
-  ...{ allowance: 'fluence loss', allowancePercent: 10, focusAt: 'mid', shownIn: 'mm' },
-};
 const CRITERION = { quantity: 'contrast', comparison: 'at least', value: 0.5 };
 
 const ACCOUNTS: readonly RightsRow[] = [
@@ -203,6 +198,9 @@ const RECIPES: readonly RightsRow[] = [
   row('PUT /api/revisions/:revisionId/evidence', 'operator', NO_TAG, { body: { basisCellIds: [], confirmationCellIds: [] } }),
   read('/api/revisions/:revisionId/evidence/candidates', 'operator'),
   read('/api/revisions/:revisionId/checks', 'operator'),
+  read('/api/revisions/:revisionId/transfers/targets', 'operator'),
+  row('POST /api/revisions/:revisionId/transfers/preview', 'operator', NO_BODY, { body: { machineId: '{machine}', lensId: '{lens}' } }),
+  row('POST /api/revisions/:revisionId/transfers', 'operator', NO_KEY, { body: { machineId: '{machine}', lensId: '{lens}' } }),
   row('POST /api/revisions/:revisionId/submit', 'operator', NO_KEY, { body: { acknowledgedCautionIds: [] } }),
   row('POST /api/revisions/:revisionId/recall', 'operator', NO_KEY, { body: {} }),
   row('POST /api/revisions/:revisionId/return', 'lead', NO_KEY, { body: { comment: 'Burn a coupon' } }),
@@ -224,11 +222,8 @@ const FLOOR: readonly RightsRow[] = [
   }),
   read('/api/runs/export.csv', 'trainee'),
   read('/api/runs/start-sheet/:revisionId', 'trainee'),
-  read('/api/runs/part-ground/:revisionId', 'trainee'),
   row('GET /api/runs/:run', 'trainee', { trainee: '404 not-found', operator: OK, lead: OK, owner: OK }, {}),
   row('PATCH /api/runs/:runId/ticks', 'trainee', NO_BODY, { body: { tick: [], untick: [] } }),
-  row('GET /api/runs/:runId/part-set-up', 'trainee', { trainee: '404 not-found', operator: OK, lead: OK, owner: OK }, {}),
-  row('POST /api/runs/:runId/part-set-up', 'trainee', NO_KEY, { body: PART }),
   row('POST /api/runs/:runId/first-piece', 'trainee', NO_KEY, { body: { ok: true } }),
   row('POST /api/runs/:runId/finish', 'trainee', NO_KEY, { body: { good: 1, scrap: 0 } }),
   row('POST /api/runs/:runId/bad-result', 'trainee', NO_KEY, { body: { outcome: 'burr' } }),

@@ -1,4 +1,4 @@
-import type { MarkStep, RecipeScope } from '@proofplate/recipe-model';
+import type { MarkStep, RecipeScope, RouteKind } from '@proofplate/recipe-model';
 import type { ShopPolicy } from '../shops/shop-policy';
 import type { EvidenceCell, RevisionCalibration, RevisionRecord } from './stored-revision';
 
@@ -15,6 +15,9 @@ export type ApprovalFacts = {
   readonly mates: readonly { readonly recipeCode: string; readonly scope: RecipeScope }[];
   readonly acknowledgedByAuthor: readonly string[];
 };
+
+/** Routes on which marks of the machine itself have to prove the setting. */
+export const provesOnCoupons = (route: RouteKind): boolean => route === 'coupons' || route === 'transferred';
 
 /**
  * Same material, finish, effect, machine in its physical state, and lens. A plate burnt before it was logged may be of a machine that was

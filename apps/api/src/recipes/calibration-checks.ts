@@ -1,6 +1,6 @@
 import { type MeasuredCalibration, type PowerShift, powerShift } from '@proofplate/recipe-model';
 import { type ApprovalCheck, check } from './approval-check';
-import type { ApprovalFacts } from './approval-facts';
+import { type ApprovalFacts, provesOnCoupons } from './approval-facts';
 import type { RevisionCalibration, RevisionHead } from './stored-revision';
 
 const MS_PER_DAY = 24 * 60 * 60 * 1000;
@@ -8,7 +8,7 @@ const MS_PER_DAY = 24 * 60 * 60 * 1000;
 /** Only where a setting was proved on coupons do its watts carry the proof; elsewhere an old or missing calibration is shown. */
 export function calibrationCheck({ record, policy, now }: ApprovalFacts): ApprovalCheck {
   const { calibration } = record;
-  const isAdvisory = record.revision.route !== 'coupons';
+  const isAdvisory = !provesOnCoupons(record.revision.route);
   if (calibration === null) {
     return check('calibration', 'Power calibration', {
       passes: false,

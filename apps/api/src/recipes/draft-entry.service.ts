@@ -35,6 +35,7 @@ export class DraftEntryService {
       ...rangeProblems({ thicknessMm: dto.limits?.thicknessMm, partDiameterMm: dto.limits?.partDiameterMm }, '#/limits'),
       ...(dto.scope == null ? [] : await this.scopeProblems(tx, actor.shopId, dto.scope)),
       ...dateProblems(dto),
+      ...routeProblems(draft, dto),
       ...calibration.problems,
     ];
     if (problems.length > 0)
@@ -105,6 +106,12 @@ function groundsOf(actor: Actor, draft: StoredRevision, { grounds }: UpdateRevis
       errors: [{ pointer: '#/grounds', detail: 'A lead writes the grounds.' }],
     });
   return { grounds, groundsBy: grounds === '' ? null : actor.memberId };
+}
+
+/** Where a setting was worked out from another machine's, saying otherwise would spare it the coupon. */
+function routeProblems({ route, basedOnId }: StoredRevision, { route: given }: UpdateRevisionDto): FieldProblem[] {
+  if (route !== 'transferred' || basedOnId === null || given == null || given === 'transferred' || given === 'coupons') return [];
+  return [{ pointer: '#/route', detail: 'It was transferred from another machine, and stays so until cells of a coupon are its basis.' }];
 }
 
 function dateProblems({ effectiveFrom, reviewDue }: UpdateRevisionDto): FieldProblem[] {

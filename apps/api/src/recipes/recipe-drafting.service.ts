@@ -5,6 +5,7 @@ import { type Tx, UnitOfWork } from '../database/unit-of-work';
 import { asMeasured } from './calibration-checks';
 import { DraftEntryService } from './draft-entry.service';
 import { DraftGroundService } from './draft-ground.service';
+import { DraftRecipeService } from './draft-recipe.service';
 import { DraftRepositories } from './draft-repositories';
 import { DraftStoreService } from './draft-store.service';
 import type { CreateDraftDto, CreateRecipeDto, RecipeFromCellDto } from './dto/create-recipe.dto';
@@ -12,10 +13,10 @@ import type { RecipeRevisionDto } from './dto/recipe-revision.dto';
 import { enterSteps, scopeAsStored, withPower } from './entered-content';
 import { firstContent, purposeOf } from './first-content';
 import type { NewDraft } from './recipe-revisions.repository';
-import { CouponNotMarkedError, DraftOpenError, OtherKeysError, RecipeNotFoundError, RevisionNotFoundError } from './recipes.errors';
+import { CouponNotMarkedError, RecipeNotFoundError, RevisionNotFoundError } from './recipes.errors';
 import type { KeyNames } from './recipes.repository';
 import { RevisionRecordsService } from './revision-records.service';
-import type { EvidenceCell, KeyIds, RevisionBrief } from './stored-revision';
+import type { EvidenceCell, RevisionBrief } from './stored-revision';
 
 /** Beginning drafts: from a cell, from elsewhere, from an earlier revision. */
 @Injectable()
@@ -23,6 +24,7 @@ export class RecipeDraftingService {
   constructor(
     private readonly unitOfWork: UnitOfWork,
     private readonly repositories: DraftRepositories,
+    private readonly draftRecipes: DraftRecipeService,
     private readonly ground: DraftGroundService,
     private readonly records: RevisionRecordsService,
     private readonly entry: DraftEntryService,
@@ -40,7 +42,7 @@ export class RecipeDraftingService {
       const recipeId =
         dto.recipeId === undefined
           ? await this.store.addRecipe(tx, actor, { ...keys, title: titleOf(dto.title, names), scope: content.scope })
-          : await this.recipeToDraftFor(tx, actor, dto.recipeId, keys);
+          : await this.draftRecipes.recipeToDraftFor(tx, actor, dto.recipeId, keys);
       const draft: NewDraft = {
         recipeId,
         content,
@@ -79,7 +81,7 @@ export class RecipeDraftingService {
     return this.unitOfWork.run(actor, async (tx) => {
       const recipe = await this.repositories.recipes.lock(tx, actor.shopId, recipeId);
       if (recipe === undefined) throw new RecipeNotFoundError();
-      await this.refuseSecondDraft(tx, actor, recipeId);
+      await this.draftRecipes.refuseSecondDraft(tx, actor, recipeId);
       const source = sourceOf(await this.repositories.revisions.ladders(tx, actor.shopId, [recipeId]), dto.basedOnRevisionId);
       const { mounting, calibration } = await this.ground.read(tx, actor.shopId, recipe);
       const { profile } = await this.records.get(tx, actor.shopId, source.id);
@@ -110,21 +112,6 @@ export class RecipeDraftingService {
     if (state === 'planned') throw new CouponNotMarkedError(`${code} is not marked yet. Mark it first.`);
     if (!cell.isMarked) throw new CouponNotMarkedError(`${cell.address} of ${code} was skipped. Choose a cell that was marked.`);
     return cell;
-  }
-
-  private async recipeToDraftFor(tx: Tx, actor: Actor, recipeId: string, keys: KeyIds): Promise<string> {
-    const recipe = await this.repositories.recipes.lock(tx, actor.shopId, recipeId);
-    if (recipe === undefined) throw new RecipeNotFoundError();
-    const isSame = (['materialId', 'finishId', 'effectId', 'machineId', 'lensId'] as const).every((key) => recipe[key] === keys[key]);
-    if (!isSame) throw new OtherKeysError();
-    await this.refuseSecondDraft(tx, actor, recipeId);
-    return recipeId;
-  }
-
-  private async refuseSecondDraft(tx: Tx, actor: Actor, recipeId: string): Promise<void> {
-    const ladder = await this.repositories.revisions.ladders(tx, actor.shopId, [recipeId]);
-    const open = ladder.find(({ state, createdBy }) => state === 'draft' && createdBy === actor.memberId);
-    if (open !== undefined) throw new DraftOpenError(open.id);
   }
 }
 

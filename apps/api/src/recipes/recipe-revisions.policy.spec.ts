@@ -11,14 +11,19 @@ describe('revisionActions()', () => {
   it.each<[RevisionState, object, string[], string[]]>([
     ['draft', OWN, ['edit', 'discard', 'submit', 'start-confirmation'], ['edit', 'discard', 'submit', 'start-confirmation']],
     ['draft', OTHERS, ['start-confirmation'], ['edit', 'discard', 'start-confirmation']],
-    ['in_review', OWN, ['recall', 'copy', 'start-confirmation'], ['recall', 'return', 'copy', 'start-confirmation']],
-    ['in_review', OTHERS, ['copy', 'start-confirmation'], ['return', 'approve', 'copy', 'start-confirmation']],
-    ['in_review', EDITED, ['copy', 'start-confirmation'], ['return', 'copy', 'start-confirmation']],
-    ['approved', OTHERS, ['copy'], ['withdraw', 'copy']],
-    ['scheduled', OTHERS, ['copy'], ['withdraw', 'copy']],
-    ['returned', OWN, ['copy'], ['copy']],
-    ['superseded', OTHERS, ['copy'], ['copy']],
-    ['withdrawn', OTHERS, ['copy'], ['copy']],
+    [
+      'in_review',
+      OWN,
+      ['recall', 'copy', 'transfer', 'start-confirmation'],
+      ['recall', 'return', 'copy', 'transfer', 'start-confirmation'],
+    ],
+    ['in_review', OTHERS, ['copy', 'transfer', 'start-confirmation'], ['return', 'approve', 'copy', 'transfer', 'start-confirmation']],
+    ['in_review', EDITED, ['copy', 'transfer', 'start-confirmation'], ['return', 'copy', 'transfer', 'start-confirmation']],
+    ['approved', OTHERS, ['copy', 'transfer'], ['withdraw', 'copy', 'transfer']],
+    ['scheduled', OTHERS, ['copy', 'transfer'], ['withdraw', 'copy', 'transfer']],
+    ['returned', OWN, ['copy', 'transfer'], ['copy', 'transfer']],
+    ['superseded', OTHERS, ['copy', 'transfer'], ['copy', 'transfer']],
+    ['withdrawn', OTHERS, ['copy', 'transfer'], ['copy', 'transfer']],
   ])('of a revision that is %s (%j): operators %j, leads %j, trainees nothing', (state, author, operators, leads) => {
     const revision = { ...OWN, ...author, state };
     expect(revisionActions(me('operator'), revision, false)).toEqual(operators);

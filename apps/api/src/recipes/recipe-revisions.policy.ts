@@ -10,6 +10,7 @@ export type RevisionActionName =
   | 'approve'
   | 'withdraw'
   | 'copy'
+  | 'transfer'
   | 'start-confirmation';
 
 export type Writers = { readonly createdBy: string; readonly editorIds: readonly string[] };
@@ -42,6 +43,8 @@ export function revisionActions(caller: Caller, revision: RevisionFacts, authorM
     ['approve', state === 'in_review' && leads && (!hasWritten(caller, revision) || authorMaySign)],
     ['withdraw', (state === 'approved' || state === 'scheduled') && leads],
     ['copy', state !== 'draft'],
+    // a draft may still change under what was worked out from it
+    ['transfer', state !== 'draft'],
     ['start-confirmation', state === 'draft' || state === 'in_review'],
   ];
   return allowed.filter(([, isAllowed]) => isAllowed).map(([action]) => action);

@@ -7,6 +7,7 @@ import { PhotosModule } from '../photos/photos.module';
 import { ShopsModule } from '../shops/shops.module';
 import { DraftEntryService } from './draft-entry.service';
 import { DraftGroundService } from './draft-ground.service';
+import { DraftRecipeService } from './draft-recipe.service';
 import { DraftRepositories } from './draft-repositories';
 import { DraftStoreService } from './draft-store.service';
 import { PowerShiftsService } from './power-shifts.service';
@@ -24,10 +25,14 @@ import { RevisionEvidenceRepository } from './revision-evidence.repository';
 import { RevisionRecordsService } from './revision-records.service';
 import { RevisionViewsService } from './revision-views.service';
 import { ScheduledRevisionsService } from './scheduled-revisions.service';
+import { TransferGroundService } from './transfer-ground.service';
+import { TransferPlacesRepository } from './transfer-places.repository';
+import { TransfersController } from './transfers.controller';
+import { TransfersService } from './transfers.service';
 
 @Module({
   imports: [CouponsModule, JobsModule, LedgerModule, ShopsModule, MachinesModule, PhotosModule],
-  controllers: [RecipesController, RecipeRevisionsController],
+  controllers: [RecipesController, RecipeRevisionsController, TransfersController],
   providers: [
     RecipesService,
     RecipeViewsService,
@@ -41,6 +46,10 @@ import { ScheduledRevisionsService } from './scheduled-revisions.service';
     DraftEntryService,
     DraftGroundService,
     DraftStoreService,
+    DraftRecipeService,
+    TransfersService,
+    TransferGroundService,
+    TransferPlacesRepository,
     DraftRepositories,
     RecipesRepository,
     RecipeListRepository,

@@ -102,6 +102,18 @@ describe('revisionChecks()', () => {
     expect(failing({ record: recordOf({ ...bare, revision: grounded, groundsByName: 'Hanne Voss' }) })).toEqual([]);
   });
 
+  it('needs marks on the target for a transfer, beside the grounds of a lead', () => {
+    const grounds = { grounds: 'Same spot and pulses by the numbers.' };
+    const transferred = { revision: revisionOf({ route: 'transferred', ...grounds }), groundsByName: 'Hanne Voss', basisCells: [] };
+    expect(failing({ record: recordOf(transferred) })).toEqual([]);
+    expect(failing({ record: recordOf({ ...transferred, proof: [] }) })).toEqual(['confirmation']);
+    expect(failing({ record: recordOf({ ...transferred, proof: proofCells(2) }) })).toEqual(['confirmation']);
+    const elsewhere = proofCells(3).map((cell) => ({ ...cell, coupon: { ...cell.coupon, physicalNumber: 2 } }));
+    expect(failing({ record: recordOf({ ...transferred, proof: elsewhere }) })).toEqual(['confirmation']);
+    const bare = { revision: revisionOf({ route: 'transferred' }), basisCells: [], calibration: null };
+    expect(failing({ record: recordOf(bare) })).toEqual(['grounds', 'calibration']);
+  });
+
   it('wants newer marks for an essential change, and old ones are enough for any other', () => {
     const current = { number: 1, steps: stepsAt(300), newestEvidenceAt: day('2026-05-09') };
     expect(failing({ current })).toEqual([]);
@@ -121,7 +133,7 @@ describe('revisionChecks()', () => {
 
 describe('reading order', () => {
   it('puts what blocks first, then what advises, then what passes', () => {
-    const record = recordOf({ revision: revisionOf({ route: 'transferred', reason: '' }), calibration: null });
+    const record = recordOf({ revision: revisionOf({ route: 'customer-given', reason: '' }), calibration: null });
     const ordered = inReadingOrder(revisionChecks(factsOf({ record })).items);
     expect(ordered.slice(0, 3).map(({ key, isAdvisory }) => [key, isAdvisory])).toEqual([
       ['reason', false],

@@ -1,6 +1,6 @@
 import { hasEssentialChange, scopesOverlap, showValue, stepsDiff } from '@proofplate/recipe-model';
 import { type ApprovalCheck, check } from './approval-check';
-import { type ApprovalFacts, isSameWork } from './approval-facts';
+import { type ApprovalFacts, isSameWork, provesOnCoupons } from './approval-facts';
 import { calibrationCheck, powerShiftCheck } from './calibration-checks';
 import { type Confirmation, confirmationOf } from './confirmation';
 import { basisCheck, confirmationCheck, criteriaCheck, newConfirmationCheck, photoCheck } from './evidence-checks';
@@ -21,6 +21,8 @@ export function revisionChecks(facts: ApprovalFacts): RevisionChecks {
     isSameWork: (cell) => isSameWork(cell, record),
   });
   const rests = route === 'coupons';
+  // a transfer is a proposal of formulas: it carries a lead's grounds, and marks on the target all the same
+  const isProved = provesOnCoupons(route);
   const items = [
     settingCheck(record),
     panelCheck(record),
@@ -28,9 +30,10 @@ export function revisionChecks(facts: ApprovalFacts): RevisionChecks {
     neverCheck(record),
     acknowledgedCheck(facts),
     ...(rests ? [] : [groundsCheck(record)]),
-    ...(rests ? [basisCheck(record), confirmationCheck(confirmation, facts.policy)] : []),
-    ...(rests && facts.current !== null ? [newConfirmationCheck(facts, confirmation)] : []),
-    ...(rests ? [criteriaCheck(record), photoCheck(record, facts.policy)] : []),
+    ...(rests ? [basisCheck(record)] : []),
+    ...(isProved ? [confirmationCheck(confirmation, facts.policy)] : []),
+    ...(isProved && facts.current !== null ? [newConfirmationCheck(facts, confirmation)] : []),
+    ...(isProved ? [criteriaCheck(record), photoCheck(record, facts.policy)] : []),
     ...(facts.current === null ? [] : [changesCheck(record, facts.current)]),
     profileCheck(record),
     calibrationCheck(facts),

@@ -8,7 +8,7 @@ import { makeStaffedShop } from './factories';
 type Given = Readonly<Record<string, unknown>>;
 
 /** A machine whose panel and scan head are described well enough for every number of a plan. */
-const PLANNING_MACHINE = {
+export const PLANNING_MACHINE = {
   physical: {
     sourceKind: 'fibre-mopa',
     wavelengthNm: 1064,

@@ -1617,6 +1617,57 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/api/revisions/{revisionId}/transfers/targets": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Machines and lenses that a submitted revision could be transferred to, with what that is worked out from */
+        get: operations["TransfersController_targets"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/revisions/{revisionId}/transfers/preview": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** What a transfer keeps and what the target’s panel would show, or why there is none; stores nothing */
+        post: operations["TransfersController_preview"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/revisions/{revisionId}/transfers": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Draft the transfer on the target; it cites its source and needs a coupon */
+        post: operations["TransfersController_create"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/api/revisions/{revisionId}/checks": {
         parameters: {
             query?: never;
@@ -3582,6 +3633,12 @@ export interface components {
             /** @description State of the revision */
             state: string;
         };
+        DoseCautionDto: {
+            /** @description Dose from which cells are flagged, J/mm² */
+            doseJPerMm2: number;
+            /** @description Where the number comes from */
+            source: string;
+        };
         CouponActDto: {
             /**
              * Format: date-time
@@ -3845,6 +3902,8 @@ export interface components {
             unknownFields: string[];
             /** @description Where numbers of a published or rendered plate come from; may be empty */
             sourceNote: string;
+            /** @description Dose from which cells of this material and finish went wrong */
+            doseCaution: components["schemas"]["DoseCautionDto"] | null;
             /** @description Acceptance criteria as recorded; null: not yet */
             criteria: components["schemas"]["StoredCriterionDto"][] | null;
             /**
@@ -4018,12 +4077,6 @@ export interface components {
             beamOnS: number | null;
             /** @description Why the time is not known */
             missingBecause: string | null;
-        };
-        DoseCautionDto: {
-            /** @description Dose from which cells are flagged, J/mm² */
-            doseJPerMm2: number;
-            /** @description Where the number comes from */
-            source: string;
         };
         PlanWarningDto: {
             /** @description dose, lines-apart, spots-apart, pulse-energy, out-of-range, no-dose, plate-too-large, no-labels, slow */
@@ -5222,6 +5275,12 @@ export interface components {
             /** @description Values to look at themselves */
             remarks: components["schemas"]["SettingRemarkDto"][];
         };
+        RevisionOpticsDto: {
+            /** @description Focal length of the lens, mm */
+            focalLengthMm: number;
+            /** @description Spot diameter (1/e²) that somebody measured, µm */
+            measuredSpotUm: number | null;
+        };
         RecipeRevisionDto: {
             /**
              * Format: uuid
@@ -5310,6 +5369,12 @@ export interface components {
             comparedWith: components["schemas"]["RevisionBriefDto"] | null;
             /** @description Numbers that follow from each mark step */
             derived: components["schemas"]["StepNumbersDto"][];
+            /** @description Totals over the mark steps; none for a single step */
+            derivedTotals: components["schemas"]["DerivedNumberDto"][];
+            /** @description Lens and spot that the numbers rest on */
+            optics: components["schemas"]["RevisionOpticsDto"];
+            /** @description Dose from which cells of this material and finish went wrong */
+            doseCaution: components["schemas"]["DoseCautionDto"] | null;
             /** @description SHA-256 of the content as it stands now, hexadecimal; what a signature is bound to */
             contentHash: string;
             /** @description Number of the stored version; the ETag is "v" and this number */
@@ -5624,6 +5689,191 @@ export interface components {
             basis: components["schemas"]["EvidenceCellDto"][];
             /** @description Cells with exactly the revision’s essential parameters */
             confirmation: components["schemas"]["EvidenceCellDto"][];
+        };
+        TransferCalibrationDto: {
+            /**
+             * Format: uuid
+             * @description Id of the power table
+             */
+            id: string;
+            /**
+             * Format: date
+             * @description Day of the reading
+             */
+            measuredOn: string;
+            /** @description Pulse frequency of the reading, kHz; null: continuous */
+            frequencyKhz: number | null;
+            /** @description Pulse width of the reading, ns; null: not settable */
+            pulseWidthNs: number | null;
+            /** @description The readings, percent rising */
+            points: components["schemas"]["CalibrationPointDto"][];
+        };
+        TransferPlaceDto: {
+            /** @description Machine */
+            machine: components["schemas"]["NamedDto"];
+            /** @description Lens */
+            lens: components["schemas"]["NamedDto"];
+            /** @description Focal length, mm */
+            focalLengthMm: number;
+            /** @description Measured 1/e² spot in focus, µm; null: computed from the beam */
+            measuredSpotUm: number | null;
+            /** @description Source and scan head */
+            physical: components["schemas"]["PhysicalProfileDto"];
+            /** @description The fields of the control in its order */
+            panel: components["schemas"]["PanelDto"];
+            /** @description Power tables in the order in which they are taken */
+            calibrations: components["schemas"]["TransferCalibrationDto"][];
+        };
+        TransferRecipeDto: {
+            /**
+             * Format: uuid
+             * @description Id of the recipe
+             */
+            id: string;
+            /** @description Code that people read */
+            code: string;
+            /** @description Title */
+            title: string;
+        };
+        TransferTargetDto: {
+            /** @description Machine */
+            machine: components["schemas"]["NamedDto"];
+            /** @description Lens */
+            lens: components["schemas"]["NamedDto"];
+            /** @description Focal length, mm */
+            focalLengthMm: number;
+            /** @description Measured 1/e² spot in focus, µm; null: computed from the beam */
+            measuredSpotUm: number | null;
+            /** @description Source and scan head */
+            physical: components["schemas"]["PhysicalProfileDto"];
+            /** @description The fields of the control in its order */
+            panel: components["schemas"]["PanelDto"];
+            /** @description Power tables in the order in which they are taken */
+            calibrations: components["schemas"]["TransferCalibrationDto"][];
+            /** @description Recipes of the same material, finish and effect that exist there already */
+            recipes: components["schemas"]["TransferRecipeDto"][];
+        };
+        TransferGroundDto: {
+            /** @description Machine and lens of the revision, as it was signed */
+            source: components["schemas"]["TransferPlaceDto"];
+            /** @description Mark steps of the revision */
+            steps: components["schemas"]["MarkStepDto"][];
+            /** @description Every other machine and lens of the shop */
+            targets: components["schemas"]["TransferTargetDto"][];
+        };
+        TransferChoiceDto: {
+            /** @description Pulse frequency on the target, kHz; absent: nearest to the source’s inside the interval */
+            frequencyKhz?: number;
+            /** @description Focus offset on the target, mm; absent: the same share of the Rayleigh length */
+            focusOffsetMm?: number;
+        };
+        PreviewTransferDto: {
+            /**
+             * Format: uuid
+             * @description Target machine
+             */
+            machineId: string;
+            /**
+             * Format: uuid
+             * @description Lens that is used on the target machine
+             */
+            lensId: string;
+            /** @description Choices by mark step, in their order */
+            choices?: components["schemas"]["TransferChoiceDto"][];
+        };
+        TransferReasonDto: {
+            /** @description Which reason */
+            code: string;
+            /** @description The reason in words, with the way out */
+            text: string;
+            /**
+             * @description Whose machine page brings what is missing
+             * @enum {string|null}
+             */
+            side: "source" | "target" | null;
+        };
+        TransferIntervalDto: {
+            /** @description Lowest frequency that keeps the numbers, kHz */
+            lowestKhz: number;
+            /** @description Highest, kHz; below the lowest where there is none */
+            highestKhz: number;
+            /** @description true: no frequency keeps the numbers */
+            isEmpty: boolean;
+            /**
+             * @description What ends it at the top
+             * @enum {string}
+             */
+            endsBy: "frequency range" | "rated power" | "scan speed";
+        };
+        KeptNumberDto: {
+            /** @description Which number */
+            key: string;
+            /** @description The number in words */
+            label: string;
+            /** @description Unit; 1: none */
+            unit: string;
+            /** @description On the source */
+            source: number;
+            /** @description On the target, with what its panel shows */
+            target: number;
+            /** @description (target − source) / source */
+            deviation: number;
+        };
+        TransferStepDto: {
+            /** @description Number of the mark step, from 1 */
+            step: number;
+            /**
+             * @description Whether the kept numbers agree
+             * @enum {string}
+             */
+            outcome: "equivalent" | "not equivalent" | "not known";
+            /** @description Why not, all of it */
+            reasons: components["schemas"]["TransferReasonDto"][];
+            /** @description Feasible frequencies of a pulsed step */
+            interval: components["schemas"]["TransferIntervalDto"] | null;
+            /** @description What the target’s panel would show; null: no number */
+            proposal: components["schemas"]["MarkStepDto"] | null;
+            /** @description What is kept, and how far the panel’s steps move it */
+            kept: components["schemas"]["KeptNumberDto"][];
+            /** @description Beam-on time over that of the source */
+            timeRatio: number | null;
+        };
+        TransferPreviewDto: {
+            /**
+             * @description The worst of the steps
+             * @enum {string}
+             */
+            outcome: "equivalent" | "not equivalent" | "not known";
+            /** @description true: a draft can be created; unless equivalent, only as not equivalent */
+            isDraftable: boolean;
+            /** @description Reasons that hold for all steps */
+            reasons: components["schemas"]["TransferReasonDto"][];
+            /** @description By mark step */
+            steps: components["schemas"]["TransferStepDto"][];
+        };
+        CreateTransferDto: {
+            /**
+             * Format: uuid
+             * @description Target machine
+             */
+            machineId: string;
+            /**
+             * Format: uuid
+             * @description Lens that is used on the target machine
+             */
+            lensId: string;
+            /** @description Choices by mark step, in their order */
+            choices?: components["schemas"]["TransferChoiceDto"][];
+            /**
+             * @description true: draft what comes nearest although it is not equivalent
+             * @default false
+             */
+            acceptNotEquivalent: boolean;
+            /**
+             * Format: uuid
+             * @description Recipe with the target’s five keys that gets the draft; absent: a new recipe
+             */
+            recipeId?: string;
         };
         ApprovalCheckDto: {
             /** @description Key of the check */
@@ -6060,6 +6310,10 @@ export interface components {
             panel: components["schemas"]["PanelDto"];
             /** @description Mark steps as dialled in */
             steps: components["schemas"]["MarkStepDto"][];
+            /** @description Numbers that follow from each mark step */
+            derived: components["schemas"]["StepNumbersDto"][];
+            /** @description Totals over the mark steps; none for a single step */
+            derivedTotals: components["schemas"]["DerivedNumberDto"][];
             /** @description Set-up steps */
             setUpSteps: components["schemas"]["SetUpStepDto"][];
             /** @description When each thing was ticked, by “set-up.<place>” and “setting.<step>.<parameter>” */
@@ -6546,6 +6800,10 @@ export interface components {
             isProfilePresent: boolean;
             /** @description Mark steps in their order */
             steps: components["schemas"]["MarkStepDto"][];
+            /** @description Numbers that follow from each mark step */
+            derived: components["schemas"]["StepNumbersDto"][];
+            /** @description Totals over the mark steps; none for a single step */
+            derivedTotals: components["schemas"]["DerivedNumberDto"][];
             /** @description Set-up steps in their order */
             setUpSteps: components["schemas"]["SetUpStepDto"][];
             /** @description Limits of use */
@@ -11491,6 +11749,128 @@ export interface operations {
                 };
                 content: {
                     "application/json": components["schemas"]["EvidenceCandidatesDto"];
+                };
+            };
+            /** @description needs the role operator or a higher one */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    TransfersController_targets: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                revisionId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["TransferGroundDto"];
+                };
+            };
+            /** @description needs the role operator or a higher one */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    TransfersController_preview: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                revisionId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["PreviewTransferDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["TransferPreviewDto"];
+                };
+            };
+            /** @description needs the role operator or a higher one */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    TransfersController_create: {
+        parameters: {
+            query?: never;
+            header: {
+                /** @description 8 to 128 visible characters, new for each act and the same for each retry */
+                "Idempotency-Key": string;
+            };
+            path: {
+                revisionId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["CreateTransferDto"];
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["RecipeRevisionDto"];
                 };
             };
             /** @description needs the role operator or a higher one */

@@ -127,6 +127,11 @@ export const PROBLEMS: Readonly<Record<string, ProblemText>> = {
     'The answer lists every check that fails under checks, each with the way out.',
   ),
   'draft-open': problem(409, 'You have an open draft of this recipe', 'Go on with it (its id is in revisionId), or discard it first.'),
+  'transfer-not-equivalent': problem(
+    409,
+    'What comes nearest is not equivalent',
+    'The answer says why under reasons. Send acceptNotEquivalent to draft it all the same, or choose another machine or lens.',
+  ),
   'scope-signed': problem(409, 'The scope is part of what was submitted', 'Propose a change and set the scope in its draft.'),
   'stale-version': problem(
     412,
@@ -155,6 +160,11 @@ export const PROBLEMS: Readonly<Record<string, ProblemText>> = {
     422,
     'The run cannot start yet',
     'Each entry of errors names what is missing: the lens that must be fitted, or a set-up step that must be ticked.',
+  ),
+  'transfer-not-possible': problem(
+    422,
+    'There is no setting to draft',
+    'Each entry of errors says what is missing of the source or the target, and where to enter it.',
   ),
   'idempotency-key-reused': problem(422, 'This Idempotency-Key belongs to another request', 'Use a new key for a new act.'),
   'version-required': problem(428, 'Say which version you are changing', 'Edits carry the header If-Match with the ETag that was read.'),
