@@ -32,10 +32,10 @@ export { type ClosedRange, isAbove, isWithinRange, largestPulseEnergyMj, machine
 export { type AreaMm, markAreaOf } from './numbers/mark-area';
 export { markOfSetting, type NumberedSetting } from './numbers/mark-of-setting';
 export type { Optics } from './numbers/optics';
+export type { SettingNumber } from './numbers/setting-number';
 export {
   type DoseCaution,
   type NumbersGround,
-  type SettingNumber,
   type SettingNumbers,
   type StepNumbers,
   settingNumbers,

@@ -2,7 +2,8 @@ import { PARAMETERS, type ParameterKey } from '../vocabulary/parameters';
 import type { PhysicalProfile } from '../vocabulary/profile';
 import type { ParameterValues } from '../vocabulary/setting';
 import type { NumberedSetting } from './mark-of-setting';
-import { type NumbersGround, type SettingNumber, settingNumbers, stepNumbers } from './setting-numbers';
+import type { SettingNumber } from './setting-number';
+import { type NumbersGround, settingNumbers, stepNumbers } from './setting-numbers';
 
 const physical: PhysicalProfile = {
   ...{ sourceKind: 'fibre-mopa', wavelengthNm: 1064, ratedPowerW: 60, m2: 1.3, beamDiameterMm: 10, jumpSpeedMmPerS: 5000 },

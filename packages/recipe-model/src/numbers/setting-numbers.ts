@@ -5,11 +5,10 @@ import { isAbove, largestPulseEnergyMj } from './machine-limits';
 import type { AreaMm } from './mark-area';
 import { markOfSetting, type NumberedSetting } from './mark-of-setting';
 import type { Optics } from './optics';
+import type { SettingNumber } from './setting-number';
 import { type SettingRemark, settingRemarks } from './setting-remarks';
 import { totalNumbers } from './total-numbers';
 
-/** A derived number with everything to look at before it is trusted; an empty list is the usual case. */
-export type SettingNumber = DerivedNumber & { readonly lookAt: readonly string[] };
 export type StepNumbers = { readonly numbers: readonly SettingNumber[]; readonly remarks: readonly SettingRemark[] };
 export type SettingNumbers = { readonly steps: readonly StepNumbers[]; readonly totals: readonly SettingNumber[] };
 

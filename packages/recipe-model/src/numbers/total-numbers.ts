@@ -1,5 +1,5 @@
 import type { Fill } from '@proofplate/physics';
-import type { SettingNumber } from './setting-numbers';
+import type { SettingNumber } from './setting-number';
 
 type NumberedStep = { readonly fill: Fill; readonly numbers: readonly SettingNumber[] };
 type Described = { readonly key: string; readonly unit: string; readonly formula: string; readonly source: string };
