@@ -13,7 +13,7 @@ function toResultsDto({ isMirrored, stripLimit, numbers }: PartResults): PartRes
 
 /** What was typed, without the fields that were left out. */
 export function enteredOf(dto: SavePartSetUpDto): EnteredPart {
-  const given = Object.entries(dto).filter(([, value]) => value !== undefined && value !== null);
+  const given = Object.entries(dto).filter(([, value]) => value !== undefined);
   const plain = given.map(([field, value]) => [field, typeof value === 'object' ? { ...value } : value]);
   // the request class has exactly the fields of an entered part
   return Object.fromEntries(plain) as EnteredPart;

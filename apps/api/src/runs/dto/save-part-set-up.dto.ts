@@ -12,7 +12,8 @@ import {
   type PartSide,
 } from '@proofplate/recipe-model';
 import { Type } from 'class-transformer';
-import { IsIn, IsOptional, ValidateNested } from 'class-validator';
+import { IsIn, ValidateNested } from 'class-validator';
+import { MayBeAbsent } from '../../common/decorators/may-be-absent';
 import { NumberBetween } from '../../common/decorators/number-between.decorator';
 
 /** Only what no part can have is refused here; what fits the shape is said by the same function as in the browser. */
@@ -31,7 +32,7 @@ export class EnteredLengthDto {
 function TypedLength(description: string): PropertyDecorator {
   return (target, property) => {
     ApiPropertyOptional({ type: EnteredLengthDto, description })(target, property);
-    IsOptional()(target, property);
+    MayBeAbsent()(target, property);
     ValidateNested()(target, property);
     Type(() => EnteredLengthDto)(target, property);
   };
@@ -69,17 +70,17 @@ export class SavePartSetUpDto {
   focusAt: FocusPlace;
 
   @ApiPropertyOptional({ description: 'Steepest angle between beam and normal at the edge of a strip, degrees; absent: no limit' })
-  @IsOptional()
+  @MayBeAbsent()
   @NumberBetween(-LARGEST, LARGEST, { what: 'The steepest angle', unit: '°' })
   steepestEdgeDeg?: number;
 
   @ApiPropertyOptional({ description: 'Index steps asked for; absent: the least number' })
-  @IsOptional()
+  @MayBeAbsent()
   @NumberBetween(-LARGEST, LARGEST, { what: 'Index steps' })
   indexSteps?: number;
 
   @ApiPropertyOptional({ description: 'Motor steps of one turn of the rotary, gear included' })
-  @IsOptional()
+  @MayBeAbsent()
   @NumberBetween(-1e9, 1e9, { what: 'Motor steps of one turn' })
   stepsPerTurn?: number;
 
