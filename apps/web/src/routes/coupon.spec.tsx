@@ -1,13 +1,10 @@
-import { configure, fireEvent, screen, waitFor, within } from '@testing-library/react';
+import { fireEvent, screen, waitFor, within } from '@testing-library/react';
 import { StatusLineProvider } from '../components/status-line';
 import { closeSession, openSession } from '../lib/session';
 import { fakeServer, problem } from '../testing/fake-server';
 import { renderRoutes } from '../testing/render';
 import { makeSessionAnswer } from '../testing/sessions';
 import { Component as CouponPage } from './coupon';
-
-// The page is large and jsdom slow: a test of several presses takes its time on a busy machine.
-configure({ asyncUtilTimeout: 10_000 });
 
 // Each test has a coupon of its own: a read that the test before left under way must not be taken for this one's.
 let count = 0;
