@@ -15,7 +15,7 @@ import { type Calibration, type Machine, useCalibrations } from '../machines.api
 import { CalibrationCurve } from './calibration-curve';
 import { conditionsOf } from './reading-conditions';
 
-/** How many earlier readings stand behind the newest in the picture. */
+/** How many earlier readings of the same conditions stand behind the newest in the picture. */
 const SHOWN_EARLIER = 3;
 
 export function Calibrations({ machine }: { machine: Machine }) {
@@ -59,7 +59,7 @@ function Readings({ calibrations }: { calibrations: readonly Calibration[] }) {
         Nobody has measured this source yet. Until then watts are worked out from the rated power and marked “not calibrated”.
       </chakra.p>
     );
-  const shown = earlier.slice(0, SHOWN_EARLIER);
+  const shown = earlier.filter((reading) => conditionsOf(reading) === conditionsOf(newest)).slice(0, SHOWN_EARLIER);
   return (
     <chakra.div mt="2" display="grid" gap="4">
       <Panel p="5">
@@ -69,7 +69,7 @@ function Readings({ calibrations }: { calibrations: readonly Calibration[] }) {
           earlier={shown.map(({ id, points }) => ({ key: id, points }))}
         />
         <chakra.p fontSize="sm" lineHeight="sm" color="fg.muted">
-          Solid: {formatDay(newest.measuredOn)}.
+          Solid: {formatDay(newest.measuredOn)} at {conditionsOf(newest)}.
           {shown.length > 0 && ` Dashed: ${shown.map(({ measuredOn }) => formatDay(measuredOn)).join(', ')}.`} Monotone piecewise cubic
           through the readings (Fritsch and Butland 1984); nothing is guessed beyond them.
         </chakra.p>

@@ -6,7 +6,7 @@ import { StateMark } from '../../../components/state-mark';
 import { TextLink } from '../../../components/text-link';
 import { formatDay, formatPercentChange, formatQuantity } from '../../../lib/format';
 import { paths } from '../../../lib/paths';
-import { type RecipePowerShift, usePowerShifts } from '../recipes.api';
+import { type PowerShift, type RecipePowerShift, usePowerShifts } from '../recipes.api';
 
 /** Which approved settings of a machine the latest readings have moved, those that need a check first. */
 export function PowerShifts({ machine }: { machine: { id: string } }) {
@@ -28,6 +28,7 @@ function Shifts({ items }: { items: readonly RecipePowerShift[] }) {
         No recipe is approved on this machine yet.
       </chakra.p>
     );
+  const moved = items.filter(hasShift).sort(byUrgency);
   const due = items.filter(({ shift }) => shift?.isCheckDue === true).length;
   const limit = items.find(({ shift }) => shift !== null)?.shift?.limitPercent;
   return (
@@ -36,15 +37,34 @@ function Shifts({ items }: { items: readonly RecipePowerShift[] }) {
         {due === 0 ? 'None is due for a check. ' : `${due} of ${items.length} due for a check. `}
         {limit !== undefined && `A setting is, once its watts have moved by more than ${formatQuantity(limit, '%')} since it was proved.`}
       </chakra.p>
-      <DataTable label="Recipes and their watts now" columns={COLUMNS} rows={[...items].sort(byUrgency)} rowKey={({ id }) => id} />
+      {moved.length > 0 && <DataTable label="Recipes and their watts now" columns={COLUMNS} rows={moved} rowKey={({ id }) => id} />}
+      <NothingToCompare items={items} />
     </>
   );
 }
 
-const sizeOf = ({ shift }: RecipePowerShift) => (shift === null ? -1 : Math.abs(shift.shiftPercent));
-const byUrgency = (one: RecipePowerShift, other: RecipePowerShift) => sizeOf(other) - sizeOf(one);
+/** The others in a line for each reason: a row of empty cells tells nobody anything. */
+function NothingToCompare({ items }: { items: readonly RecipePowerShift[] }) {
+  const reasons = [...new Set(items.flatMap(({ reason }) => (reason === null ? [] : [reason])))];
+  return reasons.map((reason) => (
+    <chakra.p key={reason} mt="2" color="fg.muted">
+      {reason}{' '}
+      {items
+        .filter((item) => item.reason === reason)
+        .map(({ id, code, title }) => (
+          <TextLink key={id} to={paths.recipe(code)} title={title} mr="2">
+            {code}
+          </TextLink>
+        ))}
+    </chakra.p>
+  ));
+}
 
-const COLUMNS: readonly Column<RecipePowerShift>[] = [
+type Moved = RecipePowerShift & { shift: PowerShift };
+const hasShift = (item: RecipePowerShift): item is Moved => item.shift !== null;
+const byUrgency = (one: Moved, other: Moved) => Math.abs(other.shift.shiftPercent) - Math.abs(one.shift.shiftPercent);
+
+const COLUMNS: readonly Column<Moved>[] = [
   {
     key: 'recipe',
     header: 'Recipe',
@@ -54,7 +74,7 @@ const COLUMNS: readonly Column<RecipePowerShift>[] = [
         <TextLink to={paths.recipe(code)} fontWeight="semibold">
           {code}
         </TextLink>
-        <chakra.span display="block" color="fg.muted">
+        <chakra.span display="block" color="fg.muted" fontWeight="normal">
           {title}, revision {revisionNumber}
         </chakra.span>
       </chakra.div>
@@ -64,25 +84,24 @@ const COLUMNS: readonly Column<RecipePowerShift>[] = [
     key: 'before',
     header: 'When proved',
     align: 'end',
-    cell: ({ shift }) => shift !== null && <Read watts={shift.beforeW} day={shift.citedOn} />,
+    cell: ({ shift }) => <Read watts={shift.beforeW} day={shift.citedOn} />,
   },
   {
     key: 'now',
     header: 'By the latest reading',
     align: 'end',
-    cell: ({ shift, reason }) =>
-      shift === null ? <chakra.span color="fg.muted">{reason}</chakra.span> : <Read watts={shift.afterW} day={shift.measuredOn} />,
+    cell: ({ shift }) => <Read watts={shift.afterW} day={shift.measuredOn} />,
   },
   {
     key: 'shift',
     header: 'Moved',
     align: 'end',
-    cell: ({ shift }) => shift !== null && formatPercentChange(shift.shiftPercent / 100, { decimals: 1 }),
+    cell: ({ shift }) => formatPercentChange(shift.shiftPercent / 100, { decimals: 1 }),
   },
   {
     key: 'due',
     header: 'Check',
-    cell: ({ shift }) => shift?.isCheckDue === true && <StateMark state="reproveDue">Check due</StateMark>,
+    cell: ({ shift }) => (shift.isCheckDue ? <StateMark state="reproveDue">Check due</StateMark> : 'within the policy'),
   },
 ];
 
