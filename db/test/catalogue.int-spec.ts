@@ -111,3 +111,10 @@ test('functions that run with their owner’s rights fix their search_path', asy
       and not exists (select from unnest(coalesce(p.proconfig, '{}')) as setting where setting like 'search_path=%')`;
   expect(rows.map((row) => row.name)).toEqual([]);
 });
+
+test('views read with the rights of whoever asks, so that row-level security holds in them', async () => {
+  const rows = await sql<{ name: string; options: string[] | null }[]>`
+    select c.relname as name, c.reloptions as options from pg_class c join pg_namespace n on n.oid = c.relnamespace
+    where n.nspname = 'public' and c.relkind in ('v', 'm') order by 1`;
+  expect([...rows]).toEqual([{ name: 'revision_now', options: ['security_invoker=true'] }]);
+});

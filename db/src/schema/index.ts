@@ -12,6 +12,6 @@ export {
   materialGroupMaterial,
 } from './materials';
 export { accountEvent, invitation, member, passwordReset, person, refreshToken, session, signInThrottle, trainingRecord } from './people';
-export { recipe, revision, revisionEvidence, signOff } from './recipes';
+export { recipe, revision, revisionEvidence, revisionNow, signOff } from './recipes';
 export { deviation, hold, partSetUp, run, settingRequest } from './runs';
 export { codeCounter, idempotencyKey, outbox, type ShopPolicyRow, shop } from './shops';

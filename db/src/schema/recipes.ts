@@ -1,5 +1,6 @@
-import { sql } from 'drizzle-orm';
+import { and, eq, getTableColumns, type SQL, sql } from 'drizzle-orm';
 import {
+  alias,
   boolean,
   check,
   doublePrecision,
@@ -8,7 +9,9 @@ import {
   integer,
   jsonb,
   pgTable,
+  pgView,
   primaryKey,
+  QueryBuilder,
   text,
   unique,
   uniqueIndex,
@@ -66,64 +69,87 @@ export const recipe = pgTable(
   ],
 );
 
+const revisionColumns = () => ({
+  ...tenantKey(),
+  recipeId: uuid().notNull(),
+  number: integer(),
+  state: text().notNull().default('draft'),
+  /** Mark steps, set-up steps and limits of use in the vocabulary of recipe-model. */
+  content: jsonb().$type<Record<string, unknown>>().notNull(),
+  profileId: uuid().notNull(),
+  calibrationId: uuid(),
+  reason: text().notNull().default(''),
+  basedOnId: uuid(),
+  route: text().notNull().default('coupons'),
+  grounds: text().notNull().default(''),
+  groundsBy: uuid(),
+  /** Members other than the author who changed the draft: they do not approve it. */
+  editorIds: jsonb().$type<string[]>().notNull().default([]),
+  effectiveFrom: moment(),
+  reviewDue: moment(),
+  contentHash: text(),
+  acknowledgedCautionIds: jsonb().$type<string[]>().notNull().default([]),
+  submittedAt: moment(),
+  approvedAt: moment(),
+  withdrawnAt: moment(),
+  supersededAt: moment(),
+  ...authorship(),
+  ...editVersion(),
+});
+
 /** One version of a recipe. Numbered at submit; from then on its content never changes. */
-export const revision = pgTable(
-  'revision',
-  {
-    ...tenantKey(),
-    recipeId: uuid().notNull(),
-    number: integer(),
-    state: text().notNull().default('draft'),
-    /** Mark steps, set-up steps and limits of use in the vocabulary of recipe-model. */
-    content: jsonb().$type<Record<string, unknown>>().notNull(),
-    profileId: uuid().notNull(),
-    calibrationId: uuid(),
-    reason: text().notNull().default(''),
-    basedOnId: uuid(),
-    route: text().notNull().default('coupons'),
-    grounds: text().notNull().default(''),
-    groundsBy: uuid(),
-    /** Members other than the author who changed the draft: they do not approve it. */
-    editorIds: jsonb().$type<string[]>().notNull().default([]),
-    effectiveFrom: moment(),
-    reviewDue: moment(),
-    contentHash: text(),
-    acknowledgedCautionIds: jsonb().$type<string[]>().notNull().default([]),
-    submittedAt: moment(),
-    approvedAt: moment(),
-    withdrawnAt: moment(),
-    supersededAt: moment(),
-    ...authorship(),
-    ...editVersion(),
-  },
-  (t) => [
-    primaryKey({ columns: [t.shopId, t.id] }),
-    unique('revision_recipe_unique').on(t.shopId, t.recipeId, t.id),
-    unique('revision_number_unique').on(t.shopId, t.recipeId, t.number),
-    uniqueIndex('revision_one_approved').on(t.shopId, t.recipeId).where(sql`${t.state} = 'approved'`),
-    uniqueIndex('revision_one_scheduled').on(t.shopId, t.recipeId).where(sql`${t.state} = 'scheduled'`),
-    foreignKey({ columns: [t.shopId, t.recipeId], foreignColumns: [recipe.shopId, recipe.id], name: 'revision_recipe_fk' }),
-    foreignKey({
-      columns: [t.shopId, t.profileId],
-      foreignColumns: [machineProfile.shopId, machineProfile.id],
-      name: 'revision_profile_fk',
-    }),
-    foreignKey({
-      columns: [t.shopId, t.calibrationId],
-      foreignColumns: [powerCalibration.shopId, powerCalibration.id],
-      name: 'revision_calibration_fk',
-    }),
-    foreignKey({ columns: [t.shopId, t.basedOnId], foreignColumns: [t.shopId, t.id], name: 'revision_based_on_fk' }),
-    foreignKey({ columns: [t.shopId, t.createdBy], foreignColumns: [member.shopId, member.id], name: 'revision_author_fk' }),
-    foreignKey({ columns: [t.shopId, t.groundsBy], foreignColumns: [member.shopId, member.id], name: 'revision_grounds_by_fk' }),
-    check('revision_state', sql`${t.state} in ('draft','in_review','returned','scheduled','approved','superseded','withdrawn')`),
-    check('revision_route', sql`${t.route} in ('coupons','earlier-experience','customer-given','transferred')`),
-    check('revision_number_from_submit', sql`(${t.state} = 'draft') = (${t.number} is null)`),
-    check('revision_hash_from_submit', sql`${t.state} = 'draft' or ${t.contentHash} is not null`),
-    index('revision_state_recent').on(t.shopId, t.state, t.submittedAt),
-    shopPolicy('revision'),
-  ],
-);
+export const revision = pgTable('revision', revisionColumns(), (t) => [
+  primaryKey({ columns: [t.shopId, t.id] }),
+  unique('revision_recipe_unique').on(t.shopId, t.recipeId, t.id),
+  unique('revision_number_unique').on(t.shopId, t.recipeId, t.number),
+  uniqueIndex('revision_one_approved').on(t.shopId, t.recipeId).where(sql`${t.state} = 'approved'`),
+  uniqueIndex('revision_one_scheduled').on(t.shopId, t.recipeId).where(sql`${t.state} = 'scheduled'`),
+  foreignKey({ columns: [t.shopId, t.recipeId], foreignColumns: [recipe.shopId, recipe.id], name: 'revision_recipe_fk' }),
+  foreignKey({
+    columns: [t.shopId, t.profileId],
+    foreignColumns: [machineProfile.shopId, machineProfile.id],
+    name: 'revision_profile_fk',
+  }),
+  foreignKey({
+    columns: [t.shopId, t.calibrationId],
+    foreignColumns: [powerCalibration.shopId, powerCalibration.id],
+    name: 'revision_calibration_fk',
+  }),
+  foreignKey({ columns: [t.shopId, t.basedOnId], foreignColumns: [t.shopId, t.id], name: 'revision_based_on_fk' }),
+  foreignKey({ columns: [t.shopId, t.createdBy], foreignColumns: [member.shopId, member.id], name: 'revision_author_fk' }),
+  foreignKey({ columns: [t.shopId, t.groundsBy], foreignColumns: [member.shopId, member.id], name: 'revision_grounds_by_fk' }),
+  check('revision_state', sql`${t.state} in ('draft','in_review','returned','scheduled','approved','superseded','withdrawn')`),
+  check('revision_route', sql`${t.route} in ('coupons','earlier-experience','customer-given','transferred')`),
+  check('revision_number_from_submit', sql`(${t.state} = 'draft') = (${t.number} is null)`),
+  check('revision_hash_from_submit', sql`${t.state} = 'draft' or ${t.contentHash} is not null`),
+  index('revision_state_recent').on(t.shopId, t.state, t.submittedAt),
+  shopPolicy('revision'),
+]);
+
+/**
+ * Revisions as they stand at the moment of reading. A scheduled one whose day has come is the approved one, and the one before it is
+ * superseded, whether or not the worker has come to write that down. Who reads a revision's state reads it here; who changes it locks the
+ * table and writes down first what is due. A migration that makes the view anew grants it anew.
+ */
+export const revisionNow = pgView('revision_now', revisionColumns()).with({ securityInvoker: true }).as(asOfNow());
+
+function asOfNow(): SQL {
+  const due = alias(revision, 'due');
+  const isDue = and(
+    eq(due.shopId, revision.shopId),
+    eq(due.recipeId, revision.recipeId),
+    eq(due.state, 'scheduled'),
+    sql`${due.effectiveFrom} <= now()`,
+  );
+  const state = sql`case when ${revision.state} = 'scheduled' and ${revision.effectiveFrom} <= now() then 'approved'
+    when ${revision.state} = 'approved' and ${due.id} is not null then 'superseded' else ${revision.state} end`;
+  const supersededAt = sql`case when ${revision.state} = 'approved' then ${due.effectiveFrom} else ${revision.supersededAt} end`;
+  return new QueryBuilder({ casing: 'snake_case' })
+    .select({ ...getTableColumns(revision), state: state.as('state'), supersededAt: supersededAt.as('superseded_at') })
+    .from(revision)
+    .leftJoin(due, isDue)
+    .getSQL();
+}
 
 /** Cells that a revision rests on (basis) or that proved it (confirmation). */
 export const revisionEvidence = pgTable(

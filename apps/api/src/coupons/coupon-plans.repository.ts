@@ -4,7 +4,7 @@ import type { ParameterSet, RevisionContent } from '@proofplate/recipe-model';
 import { and, desc, eq, inArray, isNotNull, or, sql } from 'drizzle-orm';
 import type { StoredCell, StoredCoupon, StoredGrid } from './coupons.repository';
 
-const { cell, cellRating, coupon, recipe, revision, revisionEvidence, testGrid } = schema;
+const { cell, cellRating, coupon, recipe, revision, revisionEvidence, revisionNow, testGrid } = schema;
 
 export type NewCoupon = Pick<StoredCoupon, 'code' | 'title' | 'purpose' | 'materialId' | 'finishId' | 'effectId' | 'machineId'> &
   Pick<StoredCoupon, 'profileId' | 'lensId' | 'calibrationId' | 'lot' | 'thicknessMm' | 'storedAt' | 'notes' | 'acknowledgedCautionIds'> &
@@ -63,15 +63,23 @@ export class CouponPlansRepository {
     }
   }
 
-  /** The recipes module stands above this one, so a confirmation coupon reads the revision itself. */
+  /**
+   * The recipes module stands above this one, so a confirmation coupon reads the revision itself: as it stands now, and as it stays until
+   * the transaction ends.
+   */
   async findRevision(tx: Tx, shopId: string, revisionId: string): Promise<RevisionToConfirm | undefined> {
+    await tx
+      .select({ id: revision.id })
+      .from(revision)
+      .where(and(eq(revision.shopId, shopId), eq(revision.id, revisionId)))
+      .for('share');
     const [row] = await tx
       .select({
-        id: revision.id,
-        state: revision.state,
-        content: revision.content,
-        profileId: revision.profileId,
-        calibrationId: revision.calibrationId,
+        id: revisionNow.id,
+        state: revisionNow.state,
+        content: revisionNow.content,
+        profileId: revisionNow.profileId,
+        calibrationId: revisionNow.calibrationId,
         recipe: {
           title: recipe.title,
           code: recipe.code,
@@ -82,10 +90,9 @@ export class CouponPlansRepository {
           lensId: recipe.lensId,
         },
       })
-      .from(revision)
-      .innerJoin(recipe, and(eq(recipe.shopId, revision.shopId), eq(recipe.id, revision.recipeId)))
-      .where(and(eq(revision.shopId, shopId), eq(revision.id, revisionId)))
-      .for('share', { of: revision });
+      .from(revisionNow)
+      .innerJoin(recipe, and(eq(recipe.shopId, revisionNow.shopId), eq(recipe.id, revisionNow.recipeId)))
+      .where(and(eq(revisionNow.shopId, shopId), eq(revisionNow.id, revisionId)));
     // the recipes module is the only way into this column, so it holds the model's shape
     return row === undefined ? undefined : { ...row, content: row.content as unknown as RevisionContent };
   }

@@ -17,7 +17,7 @@ import { alias } from 'drizzle-orm/pg-core';
 import type { CouponPurpose, FillDrawnBy, MarkState } from './dto/coupon.dto';
 
 const { coupon, testGrid, cell, material, finish, effect, machine, machineProfile, machineLens, lens, powerCalibration, member } = schema;
-const { recipe, revision } = schema;
+const { recipe, revisionNow } = schema;
 
 const author = alias(member, 'author');
 const marker = alias(member, 'marker');
@@ -132,11 +132,11 @@ export class CouponsRepository {
         },
         calibration: { id: powerCalibration.id, measuredOn: powerCalibration.measuredOn },
         confirms: {
-          id: revision.id,
-          recipeId: revision.recipeId,
+          id: revisionNow.id,
+          recipeId: revisionNow.recipeId,
           recipeCode: sql<string>`${recipe.code}`,
-          number: revision.number,
-          state: revision.state,
+          number: revisionNow.number,
+          state: revisionNow.state,
         },
         authorName: author.printedName,
         markerName: marker.printedName,
@@ -156,8 +156,8 @@ export class CouponsRepository {
         and(eq(machineLens.shopId, sameShop), eq(machineLens.machineId, coupon.machineId), eq(machineLens.lensId, coupon.lensId)),
       )
       .leftJoin(powerCalibration, and(eq(powerCalibration.shopId, sameShop), eq(powerCalibration.id, coupon.calibrationId)))
-      .leftJoin(revision, and(eq(revision.shopId, sameShop), eq(revision.id, coupon.confirmsRevisionId)))
-      .leftJoin(recipe, and(eq(recipe.shopId, sameShop), eq(recipe.id, revision.recipeId)))
+      .leftJoin(revisionNow, and(eq(revisionNow.shopId, sameShop), eq(revisionNow.id, coupon.confirmsRevisionId)))
+      .leftJoin(recipe, and(eq(recipe.shopId, sameShop), eq(recipe.id, revisionNow.recipeId)))
       .leftJoin(marker, and(eq(marker.shopId, sameShop), eq(marker.id, coupon.markedBy)))
       .leftJoin(inspector, and(eq(inspector.shopId, sameShop), eq(inspector.id, coupon.inspectedBy)))
       .leftJoin(sealer, and(eq(sealer.shopId, sameShop), eq(sealer.id, coupon.sealedBy)))

@@ -90,14 +90,14 @@ export class FinderAnswersRepository {
           as "laterReadings",
         coalesce((s.policy ->> 'powerShiftPercent')::double precision, 0) as "powerShiftPercent",
         (${referenceCell}) as reference
-      from revision v
+      from revision_now v
       join recipe r on r.shop_id = v.shop_id and r.id = v.recipe_id
       join shop s on s.id = v.shop_id
       join machine m on m.shop_id = r.shop_id and m.id = r.machine_id
       join machine_profile p on p.shop_id = v.shop_id and p.id = v.profile_id
       left join power_calibration k on k.shop_id = v.shop_id and k.id = v.calibration_id
       join machine_profile present on present.shop_id = m.shop_id and present.machine_id = m.id and present.number = m.profile_number
-      where v.shop_id = ${shopId} and (v.state = 'approved' or (v.state = 'scheduled' and v.effective_from <= now())) and v.id in (${ids})`);
+      where v.shop_id = ${shopId} and v.state = 'approved' and v.id in (${ids})`);
     return [...rows];
   }
 }

@@ -37,27 +37,21 @@ export type CatalogueRow = {
 
 @Injectable()
 export class FinderRepository {
-  /**
-   * Every recipe that is approved, or was until it was withdrawn. One row each: a scheduled revision whose day has come stands before the
-   * approved one even while the worker has not come to it, with the scope that it brings.
-   */
+  /** Every recipe that is approved, or was until it was withdrawn. One row each, with the scope of the revision that holds now. */
   async recipes(tx: Tx, shopId: string): Promise<RecipeRow[]> {
     const rows = await tx.execute<RecipeRow>(sql`
       select r.id as "recipeId", r.code, r.title, r.machine_id as "machineId", r.lens_id as "lensId", r.material_id as "materialId",
-        r.finish_id as "finishId", r.effect_id as "effectId", v.id as "revisionId", v.number as "revisionNumber",
-        case when v.state = 'withdrawn' then 'withdrawn' else 'approved' end as state,
-        case when v.state = 'scheduled' then v.content #> '{scope,partDiameterMm}' is not null
-          else r.part_diameter_from_mm is not null or r.part_diameter_to_mm is not null end as "isRound",
+        r.finish_id as "finishId", r.effect_id as "effectId", v.id as "revisionId", v.number as "revisionNumber", v.state,
+        v.content #> '{scope,partDiameterMm}' is not null as "isRound",
         coalesce((select json_agg(g.material_id) from material_group_material g
-          where g.shop_id = r.shop_id and g.material_group_id =
-            case when v.state = 'scheduled' then (v.content #>> '{scope,materialGroupId}')::uuid else r.material_group_id end), '[]'::json) as "groupMaterialIds",
+          where g.shop_id = r.shop_id and g.material_group_id = (v.content #>> '{scope,materialGroupId}')::uuid), '[]'::json) as "groupMaterialIds",
         case when v.state = 'withdrawn' then (
           select json_build_object('by', s.printed_name, 'at', s.signed_at, 'reason', s.comment) from sign_off s
           where s.shop_id = v.shop_id and s.revision_id = v.id and s.meaning = 'withdrawn' order by s.signed_at desc limit 1) end as withdrawal
       from (
-        select distinct on (recipe_id) shop_id, id, recipe_id, number, state, content from revision
-        where shop_id = ${shopId} and (state in ('approved', 'withdrawn') or (state = 'scheduled' and effective_from <= now()))
-        order by recipe_id, array_position(array['scheduled', 'approved', 'withdrawn'], state), number desc
+        select distinct on (recipe_id) shop_id, id, recipe_id, number, state, content from revision_now
+        where shop_id = ${shopId} and state in ('approved', 'withdrawn')
+        order by recipe_id, state = 'withdrawn', number desc
       ) v
       join recipe r on r.shop_id = v.shop_id and r.id = v.recipe_id
       order by r.code`);

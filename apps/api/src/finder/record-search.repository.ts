@@ -13,8 +13,7 @@ export class RecordSearchRepository {
     const sources: Record<FoundRow['kind'], SQL> = {
       recipe: sql`select id, code, title as name from recipe r where shop_id = ${shopId} and ${
         isApprovedOnly
-          ? sql`exists (select 1 from revision v where v.shop_id = r.shop_id and v.recipe_id = r.id
-              and (v.state = 'approved' or (v.state = 'scheduled' and v.effective_from <= now())))`
+          ? sql`exists (select 1 from revision_now v where v.shop_id = r.shop_id and v.recipe_id = r.id and v.state = 'approved')`
           : sql`true`
       }`,
       coupon: sql`select c.id, c.code, coalesce(nullif(c.title, ''), m.name) as name from coupon c

@@ -157,12 +157,12 @@ function faces({ shopId, memberId, maySign, maySignOwn }: Viewer): SQL {
       bool_or(v.state = 'in_review' and (${maySignOwn} or (v.created_by <> ${memberId}::uuid and not v.editor_ids ? ${memberId}))) as waits_for_signature,
       bool_or(v.state = 'draft' and v.created_by = ${memberId}::uuid) as is_own_draft,
       max(greatest(v.created_at, v.submitted_at, v.approved_at, v.superseded_at, v.withdrawn_at)) as moved_at
-    from revision v where v.shop_id = ${shopId} group by v.recipe_id),
+    from revision_now v where v.shop_id = ${shopId} group by v.recipe_id),
   newest as (
     select distinct on (v.recipe_id) v.recipe_id, v.id, v.state, v.created_by
-    from revision v where v.shop_id = ${shopId} and v.number is not null order by v.recipe_id, v.number desc),
+    from revision_now v where v.shop_id = ${shopId} and v.number is not null order by v.recipe_id, v.number desc),
   under_way as (
-    select distinct on (v.recipe_id) v.recipe_id, v.id from revision v left join newest n on n.recipe_id = v.recipe_id
+    select distinct on (v.recipe_id) v.recipe_id, v.id from revision_now v left join newest n on n.recipe_id = v.recipe_id
     where v.shop_id = ${shopId} and (v.state in ('in_review','draft','scheduled') or (v.state = 'returned' and v.id = n.id))
     order by v.recipe_id, array_position(array['in_review','draft','scheduled','returned'], v.state), v.number desc nulls first, v.id desc),
   face as (

@@ -10,13 +10,26 @@ import type {
   RouteKind,
   SourceKind,
 } from '@proofplate/recipe-model';
-import { and, asc, eq, gt, inArray, type SQL, sql } from 'drizzle-orm';
+import { and, asc, eq, getViewSelectedFields, gt, inArray, type SQL, sql } from 'drizzle-orm';
 import { alias, type PgUpdateSetSource } from 'drizzle-orm/pg-core';
 import type { SignOffMeaning } from './dto/sign-off.dto';
 import type { LockedRevision, RevisionBrief, RevisionHead, StoredRevision, StoredSignOff } from './stored-revision';
 
-const { revision, recipe, material, finish, effect, machine, machineProfile, machineLens, lens, powerCalibration, member, signOff } =
-  schema;
+const {
+  revision,
+  revisionNow,
+  recipe,
+  material,
+  finish,
+  effect,
+  machine,
+  machineProfile,
+  machineLens,
+  lens,
+  powerCalibration,
+  member,
+  signOff,
+} = schema;
 const author = alias(member, 'author');
 const groundsGiver = alias(member, 'grounds_giver');
 const presentProfile = alias(machineProfile, 'present_profile');
@@ -42,12 +55,17 @@ export type DraftChange = Partial<
 >;
 
 const isRevision = ({ shopId, id }: Key) => and(eq(revision.shopId, shopId), eq(revision.id, id));
-const isReviewOverdue = sql<boolean>`(${revision.state} = 'approved' and coalesce(${revision.reviewDue} < now(), false))`;
+/** What people read; the table itself is for changing and for locks. */
+const readColumns = getViewSelectedFields(revisionNow);
+const isReviewOverdue = sql<boolean>`(${revisionNow.state} = 'approved' and coalesce(${revisionNow.reviewDue} < now(), false))`;
 
 @Injectable()
 export class RecipeRevisionsRepository {
   async find(tx: Tx, shopId: string, id: string): Promise<StoredRevision | undefined> {
-    const [row] = await tx.select().from(revision).where(isRevision({ shopId, id }));
+    const [row] = await tx
+      .select()
+      .from(revisionNow)
+      .where(and(eq(revisionNow.shopId, shopId), eq(revisionNow.id, id)));
     return row === undefined ? undefined : toStoredRevision(row);
   }
 
@@ -70,7 +88,7 @@ export class RecipeRevisionsRepository {
 
   async heads(tx: Tx, shopId: string, ids: readonly string[]): Promise<RevisionHead[]> {
     if (ids.length === 0) return [];
-    const rows = await headQuery(tx).where(and(eq(revision.shopId, shopId), inArray(revision.id, [...ids])));
+    const rows = await headQuery(tx).where(and(eq(revisionNow.shopId, shopId), inArray(revisionNow.id, [...ids])));
     return rows.map(toHead);
   }
 
@@ -81,13 +99,13 @@ export class RecipeRevisionsRepository {
     { machineId, afterCode, limit }: { machineId?: string; afterCode?: string; limit: number },
   ): Promise<string[]> {
     const rows = await tx
-      .select({ id: revision.id })
-      .from(revision)
-      .innerJoin(recipe, and(eq(recipe.shopId, revision.shopId), eq(recipe.id, revision.recipeId)))
+      .select({ id: revisionNow.id })
+      .from(revisionNow)
+      .innerJoin(recipe, and(eq(recipe.shopId, revisionNow.shopId), eq(recipe.id, revisionNow.recipeId)))
       .where(
         and(
-          eq(revision.shopId, shopId),
-          eq(revision.state, 'approved'),
+          eq(revisionNow.shopId, shopId),
+          eq(revisionNow.state, 'approved'),
           machineId === undefined ? undefined : eq(recipe.machineId, machineId),
           afterCode === undefined ? undefined : gt(recipe.code, afterCode),
         ),
@@ -100,7 +118,7 @@ export class RecipeRevisionsRepository {
   /** The ladders of recipes: drafts first, then newest first. */
   async ladders(tx: Tx, shopId: string, recipeIds: readonly string[]): Promise<RevisionBrief[]> {
     if (recipeIds.length === 0) return [];
-    return this.briefs(tx, and(eq(revision.shopId, shopId), inArray(revision.recipeId, [...recipeIds])));
+    return this.briefs(tx, and(eq(revisionNow.shopId, shopId), inArray(revisionNow.recipeId, [...recipeIds])));
   }
 
   /** Oldest first. */
@@ -188,11 +206,11 @@ export class RecipeRevisionsRepository {
 
   private async briefs(tx: Tx, isWanted: SQL | undefined): Promise<RevisionBrief[]> {
     const rows = await tx
-      .select({ row: revision, authorName: author.printedName, isReviewOverdue })
-      .from(revision)
-      .innerJoin(author, and(eq(author.shopId, revision.shopId), eq(author.id, revision.createdBy)))
+      .select({ row: readColumns, authorName: author.printedName, isReviewOverdue })
+      .from(revisionNow)
+      .innerJoin(author, and(eq(author.shopId, revisionNow.shopId), eq(author.id, revisionNow.createdBy)))
       .where(isWanted)
-      .orderBy(sql`${revision.number} desc nulls first`, asc(revision.id));
+      .orderBy(sql`${revisionNow.number} desc nulls first`, asc(revisionNow.id));
     return rows.map(({ row, authorName, isReviewOverdue: isOverdue }) => ({
       ...toStoredRevision(row),
       authorName,
@@ -204,7 +222,7 @@ export class RecipeRevisionsRepository {
 function headQuery(tx: Tx) {
   return tx
     .select({
-      revision,
+      revision: readColumns,
       recipe: { id: recipe.id, code: recipe.code, title: recipe.title },
       material: { id: material.id, name: material.name, family: material.family },
       finish: { id: finish.id, name: finish.name },
@@ -218,14 +236,14 @@ function headQuery(tx: Tx) {
       focalLengthMm: lens.focalLengthMm,
       measuredSpotUm: machineLens.measuredSpotUm,
     })
-    .from(revision)
-    .innerJoin(recipe, and(eq(recipe.shopId, revision.shopId), eq(recipe.id, revision.recipeId)))
+    .from(revisionNow)
+    .innerJoin(recipe, and(eq(recipe.shopId, revisionNow.shopId), eq(recipe.id, revisionNow.recipeId)))
     .innerJoin(material, and(eq(material.shopId, recipe.shopId), eq(material.id, recipe.materialId)))
     .innerJoin(finish, and(eq(finish.shopId, recipe.shopId), eq(finish.id, recipe.finishId)))
     .innerJoin(effect, and(eq(effect.shopId, recipe.shopId), eq(effect.id, recipe.effectId)))
     .innerJoin(machine, and(eq(machine.shopId, recipe.shopId), eq(machine.id, recipe.machineId)))
     .innerJoin(lens, and(eq(lens.shopId, recipe.shopId), eq(lens.id, recipe.lensId)))
-    .innerJoin(machineProfile, and(eq(machineProfile.shopId, revision.shopId), eq(machineProfile.id, revision.profileId)))
+    .innerJoin(machineProfile, and(eq(machineProfile.shopId, revisionNow.shopId), eq(machineProfile.id, revisionNow.profileId)))
     .innerJoin(
       presentProfile,
       and(
@@ -234,8 +252,8 @@ function headQuery(tx: Tx) {
         eq(presentProfile.number, machine.profileNumber),
       ),
     )
-    .leftJoin(powerCalibration, and(eq(powerCalibration.shopId, revision.shopId), eq(powerCalibration.id, revision.calibrationId)))
-    .leftJoin(groundsGiver, and(eq(groundsGiver.shopId, revision.shopId), eq(groundsGiver.id, revision.groundsBy)))
+    .leftJoin(powerCalibration, and(eq(powerCalibration.shopId, revisionNow.shopId), eq(powerCalibration.id, revisionNow.calibrationId)))
+    .leftJoin(groundsGiver, and(eq(groundsGiver.shopId, revisionNow.shopId), eq(groundsGiver.id, revisionNow.groundsBy)))
     .leftJoin(
       machineLens,
       and(eq(machineLens.shopId, recipe.shopId), eq(machineLens.machineId, recipe.machineId), eq(machineLens.lensId, recipe.lensId)),

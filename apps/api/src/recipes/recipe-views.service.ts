@@ -12,7 +12,6 @@ import { toRevisionBriefDto } from './recipe-revisions.mapper';
 import { RecipeNotFoundError } from './recipes.errors';
 import { toFacetsDto, toHoldDto, toRecipeSummaryDto } from './recipes.mapper';
 import { RevisionRecordsService } from './revision-records.service';
-import { ScheduledRevisionsService } from './scheduled-revisions.service';
 import type { RevisionBrief } from './stored-revision';
 
 /** Reads recipes as their list and their page show them. */
@@ -22,7 +21,6 @@ export class RecipeViewsService {
     private readonly listing: RecipeListRepository,
     private readonly repositories: DraftRepositories,
     private readonly records: RevisionRecordsService,
-    private readonly scheduled: ScheduledRevisionsService,
     private readonly shops: ShopsService,
     private readonly photos: PhotosService,
     private readonly powerShifts: PowerShiftsService,
@@ -83,15 +81,6 @@ export class RecipeViewsService {
       createdAt: recipe.createdAt.toISOString(),
       version: recipe.version,
     };
-  }
-
-  async hasDueRevision(tx: Tx, shopId: string, id: string): Promise<boolean> {
-    const ladder = await this.repositories.revisions.ladders(tx, shopId, [id]);
-    return ladder.some(({ state, effectiveFrom }) => state === 'scheduled' && effectiveFrom !== null && effectiveFrom <= new Date());
-  }
-
-  async takeDue(tx: Tx, shopId: string, id: string): Promise<void> {
-    await this.scheduled.lockSettled(tx, shopId, id);
   }
 }
 

@@ -41,9 +41,6 @@ export class RecipesService {
   }
 
   async get(actor: Actor, id: string): Promise<RecipeDto> {
-    const isDue = await this.unitOfWork.read(actor, (tx) => this.views.hasDueRevision(tx, actor.shopId, id));
-    // the worker may not have come to it yet; whoever looks must see the setting that holds now
-    if (isDue) await this.unitOfWork.run({ shopId: actor.shopId }, (tx) => this.views.takeDue(tx, actor.shopId, id));
     return this.unitOfWork.read(actor, (tx) => this.views.getDto(tx, actor, id));
   }
 

@@ -3,7 +3,7 @@ import { schema, type Tx } from '@proofplate/db';
 import type { Criterion, Panel, RevisionContent, RevisionState, SourceKind } from '@proofplate/recipe-model';
 import { and, asc, eq, isNull, sql } from 'drizzle-orm';
 
-const { recipe, revision, machine, machineProfile, material, finish, effect, lens, shop } = schema;
+const { recipe, revision, revisionNow, machine, machineProfile, material, finish, effect, lens, shop } = schema;
 
 type Named = { id: string; name: string };
 /** A revision as a run cites it. */
@@ -23,13 +23,6 @@ export type CitedRevision = {
   effect: Named;
   panel: Panel;
 };
-
-/** A scheduled revision whose day has come is the approved one, even before the worker came to it. */
-const stateByTheClock = sql<RevisionState>`case
-  when ${revision.state} = 'scheduled' and ${revision.effectiveFrom} <= now() then 'approved'
-  when ${revision.state} = 'approved' and exists (select 1 from revision due where due.shop_id = ${revision.shopId}
-    and due.recipe_id = ${revision.recipeId} and due.state = 'scheduled' and due.effective_from <= now()) then 'superseded'
-  else ${revision.state} end`;
 
 @Injectable()
 export class CitedRevisionsRepository {
@@ -58,12 +51,12 @@ export class CitedRevisionsRepository {
   async find(tx: Tx, shopId: string, revisionId: string): Promise<CitedRevision | undefined> {
     const [row] = await tx
       .select({
-        id: revision.id,
-        number: revision.number,
-        state: stateByTheClock,
-        content: revision.content,
-        contentHash: revision.contentHash,
-        isOverdue: sql<boolean>`coalesce(${revision.reviewDue} < now(), false)`,
+        id: revisionNow.id,
+        number: revisionNow.number,
+        state: revisionNow.state,
+        content: revisionNow.content,
+        contentHash: revisionNow.contentHash,
+        isOverdue: sql<boolean>`coalesce(${revisionNow.reviewDue} < now(), false)`,
         policy: shop.policy,
         recipe: { id: recipe.id, code: recipe.code, title: recipe.title },
         machine: { id: machine.id, name: machine.name, sourceKind: machine.sourceKind },
@@ -73,22 +66,23 @@ export class CitedRevisionsRepository {
         effect: { id: effect.id, name: effect.name },
         panel: machineProfile.panel,
       })
-      .from(revision)
-      .innerJoin(recipe, and(eq(recipe.shopId, revision.shopId), eq(recipe.id, revision.recipeId)))
-      .innerJoin(machineProfile, and(eq(machineProfile.shopId, revision.shopId), eq(machineProfile.id, revision.profileId)))
+      .from(revisionNow)
+      .innerJoin(recipe, and(eq(recipe.shopId, revisionNow.shopId), eq(recipe.id, revisionNow.recipeId)))
+      .innerJoin(machineProfile, and(eq(machineProfile.shopId, revisionNow.shopId), eq(machineProfile.id, revisionNow.profileId)))
       .innerJoin(machine, and(eq(machine.shopId, recipe.shopId), eq(machine.id, recipe.machineId)))
       .innerJoin(lens, and(eq(lens.shopId, recipe.shopId), eq(lens.id, recipe.lensId)))
       .innerJoin(material, and(eq(material.shopId, recipe.shopId), eq(material.id, recipe.materialId)))
       .innerJoin(finish, and(eq(finish.shopId, recipe.shopId), eq(finish.id, recipe.finishId)))
       .innerJoin(effect, and(eq(effect.shopId, recipe.shopId), eq(effect.id, recipe.effectId)))
-      .innerJoin(shop, eq(shop.id, revision.shopId))
-      .where(and(eq(revision.shopId, shopId), eq(revision.id, revisionId)));
+      .innerJoin(shop, eq(shop.id, revisionNow.shopId))
+      .where(and(eq(revisionNow.shopId, shopId), eq(revisionNow.id, revisionId)));
     if (row === undefined) return undefined;
     const { policy, ...rest } = row;
     return {
       ...rest,
       overdueBlocks: policy.overdueBlocks,
       // constraints and the request classes of recipes and machines are the only ways into these columns
+      state: row.state as RevisionState,
       content: row.content as unknown as RevisionContent,
       machine: { ...row.machine, sourceKind: row.machine.sourceKind as SourceKind },
       panel: row.panel as unknown as Panel,

@@ -6,7 +6,7 @@ import { alias } from 'drizzle-orm/pg-core';
 import type { RunState } from './dto/run.dto';
 import type { OpenHold } from './runs.errors';
 
-const { run, recipe, revision, machine, machineProfile, material, finish, effect, lens, machineLens, member, deviation, hold, photo } =
+const { run, recipe, revisionNow, machine, machineProfile, material, finish, effect, lens, machineLens, member, deviation, hold, photo } =
   schema;
 const fitted = alias(lens, 'fitted');
 
@@ -123,7 +123,7 @@ export class RunsRepository {
       .select({
         run,
         recipe: { id: recipe.id, code: recipe.code, title: recipe.title },
-        revision: { id: revision.id, number: revision.number, state: revision.state, content: revision.content },
+        revision: { id: revisionNow.id, number: revisionNow.number, state: revisionNow.state, content: revisionNow.content },
         machine: { id: machine.id, name: machine.name },
         material: { id: material.id, name: material.name },
         finish: { id: finish.id, name: finish.name },
@@ -137,8 +137,8 @@ export class RunsRepository {
       })
       .from(run)
       .innerJoin(recipe, and(eq(recipe.shopId, shop), eq(recipe.id, run.recipeId)))
-      .innerJoin(revision, and(eq(revision.shopId, shop), eq(revision.id, run.revisionId)))
-      .innerJoin(machineProfile, and(eq(machineProfile.shopId, shop), eq(machineProfile.id, revision.profileId)))
+      .innerJoin(revisionNow, and(eq(revisionNow.shopId, shop), eq(revisionNow.id, run.revisionId)))
+      .innerJoin(machineProfile, and(eq(machineProfile.shopId, shop), eq(machineProfile.id, revisionNow.profileId)))
       .innerJoin(machine, and(eq(machine.shopId, shop), eq(machine.id, run.machineId)))
       .innerJoin(material, and(eq(material.shopId, shop), eq(material.id, recipe.materialId)))
       .innerJoin(finish, and(eq(finish.shopId, shop), eq(finish.id, recipe.finishId)))

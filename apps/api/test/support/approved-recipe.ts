@@ -66,7 +66,7 @@ export async function makeRecipe(test: TestApp, lead: TestMember, given: RecipeG
     steps: [{ purpose: 'fill', parameters: parameters(given.values), pauseAfterS: 0 }],
     setUpSteps,
     limits: { notes: 'Flat parts only' },
-    scope: {},
+    scope: given.materialGroupId === undefined ? {} : { materialGroupId: given.materialGroupId },
   };
   lastNumber += 1;
   const code = `R-${String(9000 + lastNumber)}`;
