@@ -2,6 +2,7 @@ import { Injectable } from '@nestjs/common';
 import { schema, type Tx } from '@proofplate/db';
 import type { CouponState, ParameterSet } from '@proofplate/recipe-model';
 import { and, eq, inArray, type SQL, sql } from 'drizzle-orm';
+import { containsText } from '../database/contains-text';
 import { CouponsRepository, type CouponView, createdToTheMs } from './coupons.repository';
 import type { CouponPurpose } from './dto/coupon.dto';
 
@@ -128,10 +129,7 @@ function isWanted(shopId: string, { state, purpose, materialId, effectId, machin
     machineId === undefined ? undefined : eq(coupon.machineId, machineId),
     ...words.map(
       (word) =>
-        sql`concat_ws(' ', ${coupon.code}, ${coupon.title}, ${coupon.lot}, ${coupon.storedAt}, ${material.name}, ${finish.name}) ilike ${likeText(word)}`,
+        sql`concat_ws(' ', ${coupon.code}, ${coupon.title}, ${coupon.lot}, ${coupon.storedAt}, ${material.name}, ${finish.name}) ilike ${containsText(word)}`,
     ),
   );
 }
-
-/** The word anywhere; its own signs are no wild cards. */
-const likeText = (word: string) => `%${word.replaceAll(/[\\%_]/g, String.raw`\$&`)}%`;

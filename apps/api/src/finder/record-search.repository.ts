@@ -1,6 +1,7 @@
 import { Injectable } from '@nestjs/common';
 import type { Tx } from '@proofplate/db';
 import { type SQL, sql } from 'drizzle-orm';
+import { containsText, literalText } from '../database/contains-text';
 
 export type FoundRow = { kind: 'recipe' | 'coupon' | 'material' | 'machine'; id: string; code: string; name: string };
 type Search = { words: readonly string[]; kinds: readonly FoundRow['kind'][]; isApprovedOnly: boolean };
@@ -35,15 +36,12 @@ export class RecordSearchRepository {
 /** Each word stands somewhere in code or name. */
 function holdsWords(words: readonly string[]): SQL {
   return sql.join(
-    words.map((word) => sql`concat_ws(' ', code, name) ilike ${`%${literal(word)}%`}`),
+    words.map((word) => sql`concat_ws(' ', code, name) ilike ${containsText(word)}`),
     sql` and `,
   );
 }
 
 function rank(words: readonly string[]): SQL {
-  const typed = literal(words.join(' '));
+  const typed = literalText(words.join(' '));
   return sql`case when code ilike ${typed} then 0 when code ilike ${`${typed}%`} then 1 when name ilike ${`${typed}%`} then 2 else 3 end`;
 }
-
-/** The word's own signs are no wild cards. */
-const literal = (word: string) => word.replaceAll(/[\\%_]/gu, String.raw`\$&`);

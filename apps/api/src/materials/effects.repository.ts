@@ -2,7 +2,7 @@ import { Injectable } from '@nestjs/common';
 import { schema, type Tx } from '@proofplate/db';
 import type { Criterion } from '@proofplate/recipe-model';
 import { and, asc, eq, isNotNull, isNull, like, ne, sql } from 'drizzle-orm';
-import { containsPattern } from './material-filter';
+import { containsText } from '../database/contains-text';
 import type { AfterName } from './materials.repository';
 
 const { effect } = schema;
@@ -54,7 +54,7 @@ export class EffectsRepository {
     const rows = await tx
       .select({ key: effect.key })
       .from(effect)
-      .where(and(eq(effect.shopId, shopId), like(effect.key, containsPattern(text))));
+      .where(and(eq(effect.shopId, shopId), like(effect.key, containsText(text))));
     return rows.map(({ key }) => key);
   }
 

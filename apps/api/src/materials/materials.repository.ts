@@ -2,7 +2,7 @@ import { Injectable } from '@nestjs/common';
 import { schema, type Tx } from '@proofplate/db';
 import type { MaterialFamily } from '@proofplate/recipe-model';
 import { and, asc, count, eq, ilike, inArray, isNotNull, isNull, ne, or, type SQL, sql } from 'drizzle-orm';
-import { containsPattern } from './material-filter';
+import { containsText } from '../database/contains-text';
 
 const { material } = schema;
 
@@ -98,7 +98,7 @@ export class MaterialsRepository {
 }
 
 function matches({ archived, families, words }: MaterialFilter): SQL | undefined {
-  const pattern = words === undefined || words === '' ? undefined : containsPattern(words);
+  const pattern = words === undefined || words === '' ? undefined : containsText(words);
   return and(
     archived ? isNotNull(material.archivedAt) : isNull(material.archivedAt),
     families === undefined ? undefined : inArray(material.family, [...families]),

@@ -2,6 +2,7 @@ import { Injectable } from '@nestjs/common';
 import { schema, type Tx } from '@proofplate/db';
 import type { MaterialFamily, SourceKind } from '@proofplate/recipe-model';
 import { and, eq, inArray, type SQL, sql } from 'drizzle-orm';
+import { containsText } from '../database/contains-text';
 import type { RecipeNeed, RecipeState } from './dto/recipe.dto';
 import type { EvidencePhoto } from './stored-revision';
 
@@ -203,15 +204,12 @@ function conditions({ recipeId, state, materialId, effectId, machineId, q }: Lis
     ...(effectId === undefined ? [] : [sql`effect_id = ${effectId}::uuid`]),
     ...(machineId === undefined ? [] : [sql`machine_id = ${machineId}::uuid`]),
     ...wordsOf(q).map(
-      (word) => sql`concat_ws(' ', code, title, material_name, finish_name, effect_name, machine_name, lens_name) ilike ${`%${word}%`}`,
+      (word) =>
+        sql`concat_ws(' ', code, title, material_name, finish_name, effect_name, machine_name, lens_name) ilike ${containsText(word)}`,
     ),
   ];
   return sql.join(parts, sql` and `);
 }
 
-/** Each word must be found somewhere; what means something to LIKE is taken literally. */
-const wordsOf = (q = '') =>
-  q
-    .split(/\s+/u)
-    .filter((word) => word !== '')
-    .map((word) => word.replace(/[\\%_]/gu, '\\$&'));
+/** Each word must be found somewhere. */
+const wordsOf = (q = '') => q.split(/\s+/u).filter((word) => word !== '');

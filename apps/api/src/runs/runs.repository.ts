@@ -3,6 +3,7 @@ import { schema, type Tx } from '@proofplate/db';
 import type { MarkStep, Panel, PhysicalProfile, RevisionContent, RevisionState, RunKind } from '@proofplate/recipe-model';
 import { and, desc, eq, isNull, or, type SQL, sql } from 'drizzle-orm';
 import { alias } from 'drizzle-orm/pg-core';
+import { containsText } from '../database/contains-text';
 import type { RunState } from './dto/run.dto';
 import type { OpenHold } from './runs.errors';
 
@@ -185,10 +186,7 @@ function isWanted(shopId: string, { startedBy, jobReference, recipeId, machineId
     state === undefined ? undefined : eq(run.state, state),
     ...words.map(
       (word) =>
-        sql`concat_ws(' ', ${run.code}, ${run.jobReference}, ${run.part}, ${run.lot}, ${recipe.code}, ${recipe.title}, ${material.name}) ilike ${likeText(word)}`,
+        sql`concat_ws(' ', ${run.code}, ${run.jobReference}, ${run.part}, ${run.lot}, ${recipe.code}, ${recipe.title}, ${material.name}) ilike ${containsText(word)}`,
     ),
   );
 }
-
-/** The word anywhere; its own signs are no wild cards. */
-const likeText = (word: string) => `%${word.replaceAll(/[\\%_]/gu, String.raw`\$&`)}%`;
