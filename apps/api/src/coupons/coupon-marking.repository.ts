@@ -42,11 +42,11 @@ export class CouponMarkingRepository {
   /** In the order of marking. */
   async marks(tx: Tx, shopId: string, couponId: string): Promise<Pick<StoredCell, 'address' | 'markState'>[]> {
     const rows = await tx
-      .select()
+      .select({ address: cell.address, markState: cell.markState })
       .from(cell)
       .where(and(eq(cell.shopId, shopId), eq(cell.couponId, couponId)))
       .orderBy(asc(cell.runOrder));
-    return rows.map(toStoredCell);
+    return rows.map(({ address, markState }) => ({ address, markState: markState as StoredCell['markState'] }));
   }
 
   async updateCoupon(tx: Tx, shopId: string, couponId: string, change: CouponChange): Promise<void> {
