@@ -6,6 +6,7 @@ const NAMES = [
   'MM_PER_INCH',
   'PANEL_UNITS',
   'ablationPerPulse',
+  'apodisationFactor',
   'areaRate',
   'arealDose',
   'averageFluence',

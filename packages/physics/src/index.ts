@@ -3,6 +3,7 @@ export { incubationFit } from './ablation/incubation-fit';
 export { type Incubation, incubationThreshold } from './ablation/incubation-threshold';
 export { type LiuFit, liuFit } from './ablation/liu-fit';
 export { type OptimumFluence, optimumFluence } from './ablation/optimum-fluence';
+export { apodisationFactor } from './beam/apodisation-factor';
 export { beamParameterProduct } from './beam/beam-parameter-product';
 export type { Caustic, CausticMeasurement } from './beam/caustic';
 export { causticByParabola } from './beam/caustic-by-parabola';

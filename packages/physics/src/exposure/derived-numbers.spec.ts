@@ -134,6 +134,20 @@ describe('derivedNumbers', () => {
     );
   });
 
+  it('flags a spot whose beam an aperture cuts, and says by how much, but does not change it', () => {
+    const beam = { wavelengthNm: 1064, focalLengthMm: 163, beamDiameterMm: 10, m2: 1.3 };
+    const cut = numberOf({ ...pulsed, spot: { ...beam, apertureMm: 10 } }, 'focalSpot');
+    expect(cut.value).toBeCloseTo(28.7066624939, 8);
+    // 1.83 over 4/π, the factors of the printed table.
+    expect(cut).toHaveProperty('outOfRange', expect.stringContaining('about 1.44 times as wide'));
+    expect(numberOf({ ...pulsed, spot: { ...beam, apertureMm: 10 } }, 'peakFluence')).toHaveProperty('outOfRange');
+    expect(numberOf({ ...pulsed, spot: { ...beam, apertureMm: 5 } }, 'focalSpot')).toHaveProperty(
+      'outOfRange',
+      expect.stringContaining('far wider'),
+    );
+    expect(numberOf({ ...pulsed, spot: { ...beam, apertureMm: 15 } }, 'focalSpot')).not.toHaveProperty('outOfRange');
+  });
+
   it('hands on the reason of an unknown power and never a zero', () => {
     const unknown = { ...pulsed, powerW: { unknownBecause: 'no calibration for this pulse width' } };
     for (const key of ['pulseEnergy', 'peakFluence', 'lineEnergy', 'arealDose']) {

@@ -65,6 +65,7 @@ function requireRanges({
   requireFinite(knownOf({ focusOffsetMm }));
   if (wobble !== undefined) requirePositive(knownOf({ wobbleDiameterUm: wobble.diameterUm, wobbleFrequencyKhz: wobble.frequencyKhz }));
   if ('spotDiameterUm' in spot) requirePositive({ spotDiameterUm: spot.spotDiameterUm });
+  if ('apertureMm' in spot && spot.apertureMm !== undefined) requirePositive({ apertureMm: spot.apertureMm });
 }
 
 function knownOf(quantities: Readonly<Record<string, Quantity | undefined>>): Record<string, number> {

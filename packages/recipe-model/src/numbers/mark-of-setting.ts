@@ -68,8 +68,13 @@ function wobbleOf(setting: NumberedSetting): Pick<MarkParameters, 'wobble'> {
 
 /** A measured spot counts before a computed one; out of focus it still needs wavelength and M². */
 function spotOf({ physical, focalLengthMm, measuredSpotUm }: Optics): MarkSpot {
-  const { wavelengthNm, m2, beamDiameterMm } = physical;
+  const { wavelengthNm, m2, beamDiameterMm, apertureMm } = physical;
   const beam = { wavelengthNm, m2: m2 ?? unknown('the machine’s page gives no M² of the beam') };
   if (measuredSpotUm !== null) return { spotDiameterUm: measuredSpotUm, ...beam };
-  return { ...beam, focalLengthMm, beamDiameterMm: beamDiameterMm ?? unknown('the machine’s page gives no beam diameter at the lens') };
+  return {
+    ...beam,
+    focalLengthMm,
+    beamDiameterMm: beamDiameterMm ?? unknown('the machine’s page gives no beam diameter at the lens'),
+    ...(typeof apertureMm === 'number' ? { apertureMm } : {}),
+  };
 }

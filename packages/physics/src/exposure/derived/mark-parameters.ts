@@ -12,7 +12,14 @@ export type Quantity = number | Unknown;
 /** The spot in focus: measured (with wavelength and M² when it is to be followed out of focus), or computed from the beam. */
 export type MarkSpot =
   | { readonly spotDiameterUm: number; readonly wavelengthNm?: Quantity; readonly m2?: Quantity }
-  | { readonly wavelengthNm: Quantity; readonly focalLengthMm: Quantity; readonly beamDiameterMm: Quantity; readonly m2: Quantity }
+  | {
+      readonly wavelengthNm: Quantity;
+      readonly focalLengthMm: Quantity;
+      readonly beamDiameterMm: Quantity;
+      readonly m2: Quantity;
+      /** Clear aperture at the lens; absent where nobody stated it. */
+      readonly apertureMm?: number;
+    }
   | Unknown;
 
 /** Rectangle to be filled and what the scan head needs beside the lines themselves. */

@@ -1,3 +1,4 @@
+import { apodisationFactor, LEAST_PRINTED_RATIO } from '../../beam/apodisation-factor';
 import { focusedSpotDiameter } from '../../beam/focused-spot-diameter';
 import { rayleighLength } from '../../beam/rayleigh-length';
 import { spotDiameterAtOffset } from '../../beam/spot-diameter-at-offset';
@@ -6,6 +7,7 @@ import type { MarkSpot, Quantity } from './mark-parameters';
 
 const SOURCE = 'ISO 11146-1; docs/science/beam.md';
 const PARAXIAL_FROM_F_OVER_D = 4;
+const UNCUT_FROM_RATIO = 1.5;
 const NOT_PARAXIAL = `the focal length is less than ${PARAXIAL_FROM_F_OVER_D} times the beam diameter: the paraxial formula no longer holds`;
 
 export type SpotNumbers = {
@@ -32,15 +34,28 @@ function focalSpotOf(spot: MarkSpot): DerivedNumber {
     const { spotDiameterUm } = spot;
     return { ...described, formula: 'd0 as measured', source: 'measured spot', value: spotDiameterUm, inputs: { spotDiameterUm } };
   }
-  const { wavelengthNm, focalLengthMm, beamDiameterMm, m2 } = spot;
+  const { wavelengthNm, focalLengthMm, beamDiameterMm, m2, apertureMm } = spot;
   return derive(
     { ...described, formula: 'd0 = 4 M² λ f / (π D)' },
     { wavelengthNm, focalLengthMm, beamDiameterMm, m2 },
     {
       compute: focusedSpotDiameter,
-      outOfRange: (known) => (known.focalLengthMm < PARAXIAL_FROM_F_OVER_D * known.beamDiameterMm ? NOT_PARAXIAL : undefined),
+      outOfRange: (known) => {
+        if (known.focalLengthMm < PARAXIAL_FROM_F_OVER_D * known.beamDiameterMm) return NOT_PARAXIAL;
+        return apertureMm === undefined ? undefined : cutBy(apertureMm, known.beamDiameterMm);
+      },
     },
   );
+}
+
+/** The value stays that of the formula; how far off it is stands beside it. */
+function cutBy(apertureMm: number, beamDiameterMm: number): string | undefined {
+  const ratio = apertureMm / beamDiameterMm;
+  if (ratio >= UNCUT_FROM_RATIO) return undefined;
+  const cut = `the aperture is less than ${UNCUT_FROM_RATIO} times the beam diameter and cuts the beam`;
+  if (ratio < LEAST_PRINTED_RATIO) return `${cut}: the spot is far wider than the formula says`;
+  const growth = apodisationFactor(apertureMm, beamDiameterMm) / (4 / Math.PI);
+  return `${cut}: the spot is about ${growth.toFixed(2)} times as wide as the formula says`;
 }
 
 function propagation(spot: MarkSpot): { readonly wavelengthNm: Quantity; readonly m2: Quantity } {
