@@ -1,86 +1,61 @@
-// Every page of the demo shop: no accessibility fault in light or dark, nothing wider than the screen, nothing the policy refuses.
-// With PROOFPLATE_PICTURES it also leaves pictures of each page in three sizes and both modes.
-import { accessibilityViolations } from './support/axe.mjs';
+// Every route of the router in the demo shop: no accessibility fault in light or dark, nothing wider than the screen, nothing the policy
+// refuses, nothing on the floor too small for a glove. With PROOFPLATE_PICTURES it also leaves pictures of each page in three sizes and both modes.
+import { BEFORE_SIGN_IN, FLOOR_PAGES, fromLetters, PAGES } from './steps/pages.mjs';
 import { journey } from './support/journey.mjs';
+import { pageFaults } from './support/page-faults.mjs';
 import { signIn } from './support/person.mjs';
-import { COLOUR_SCHEMES, takeScreenshots, VIEWPORTS } from './support/screenshots.mjs';
+import { Visits } from './support/routes.mjs';
+import { takeScreenshots } from './support/screenshots.mjs';
 
 const PICTURES = process.env.PROOFPLATE_PICTURES;
 const SIGN_INS = JSON.parse(process.env.PROOFPLATE_SIGN_INS ?? '[]');
-const NARROWEST = { width: 320, height: 640 };
-
-/** Pages that anybody reaches, then those of the shop by who looks at them. A page with a code is opened from its list. */
-const BEFORE_SIGN_IN = { 'sign-in': '/sign-in', 'sign-up': '/sign-up', 'forgot-password': '/forgot-password' };
-const PAGES = {
-  trainee: {
-    'at-the-machine': '/machine',
-    'at-the-machine-answer': '/machine?words=black%20anodised%20satin',
-    'at-the-machine-none': '/machine?words=oak',
-    runs: '/runs',
-    account: '/account',
-  },
-  operator: {
-    coupons: '/coupons',
-    coupon: { list: '/coupons?state=sealed', link: /^C-\d+/ },
-    'plan-a-coupon': '/coupons/plan',
-    'import-a-coupon': '/coupons/import',
-    recipes: '/recipes',
-    requests: '/requests',
-    equipment: '/equipment',
-    materials: '/materials',
-  },
-  lead: {
-    recipe: '/recipes/R-0002',
-    compare: { list: '/recipes/R-0002', link: /^Compare/ },
-    'sign-off-queue': '/sign-off',
-    'sign-off': { list: '/sign-off', link: /R-\d+/ },
-    finishes: '/materials/finishes',
-    groups: '/materials/groups',
-    effects: '/materials/effects',
-    cautions: '/materials/cautions',
-    'new-machine': '/equipment/machines/new',
-    'new-material': '/materials/new',
-    ledger: '/ledger',
-  },
-  owner: { people: '/people', 'shop-settings': '/shop-settings', 'no-such-page': '/no-such-page' },
-};
+/** Addresses that lead on by intention; any other page that turns out to be elsewhere was not seen. */
+const LEADS_ON = { '/': '/machine' };
 
 /** All that was found, so that one run tells everything. */
 const faults = [];
+const visits = new Visits();
 
 await journey(async ({ step, open }) => {
   const stranger = await open('stranger');
-  for (const [name, path] of Object.entries(BEFORE_SIGN_IN)) await step(name, () => look(stranger, name, path));
+  const lookAll = async (person, pages) => {
+    for (const [name, place] of Object.entries(pages)) await step(`${name}, as ${person.name}`, () => look(person, name, place));
+  };
+  await lookAll(stranger, BEFORE_SIGN_IN);
+  const people = {};
   for (const [role, pages] of Object.entries(PAGES)) {
-    const person = await open(role);
-    const account = SIGN_INS.find((known) => known.role === role);
-    if (account === undefined) throw new Error(`the demo shop has no ${role}`);
-    await signIn(person, account);
-    for (const [name, place] of Object.entries(pages)) await step(`${name}, as ${role}`, () => look(person, name, place));
+    people[role] = await open(role);
+    await signIn(people[role], accountOf(role));
+    await lookAll(people[role], pages);
   }
+  await lookAll(stranger, fromLetters({ owner: people.owner, stranger, forgetful: accountOf('trainee').email }));
+  for (const pattern of visits.missing) faults.push(`nobody looked at the route ${pattern}`);
   if (faults.length > 0) throw new Error(`${faults.length} faults:\n${faults.join('\n')}`);
 });
 
 async function look(person, name, place) {
   await reach(person, place);
   const { page } = person;
-  await page.setViewportSize(VIEWPORTS.desk);
-  for (const colorScheme of COLOUR_SCHEMES) {
-    await page.emulateMedia({ colorScheme });
-    const violations = await accessibilityViolations(page);
-    faults.push(...violations.map((violation) => `${name}, ${colorScheme}: ${violation}`));
-  }
-  await page.setViewportSize(NARROWEST);
-  const tooWide = await page.evaluate(() => document.documentElement.scrollWidth - document.documentElement.clientWidth);
-  if (tooWide > 0) faults.push(`${name} is ${tooWide} px wider than a screen of ${NARROWEST.width} px`);
+  const found = await pageFaults(page, { isFloor: FLOOR_PAGES.has(name) });
+  faults.push(...found.map((fault) => `${name}: ${fault}`));
   if (PICTURES !== undefined) await takeScreenshots(page, { name, folder: PICTURES });
-  await page.setViewportSize(VIEWPORTS.desk);
 }
 
-async function reach({ page, go }, place) {
-  const isPath = typeof place === 'string';
-  await go(isPath ? place : place.list);
-  if (!isPath) await page.getByRole('main').getByRole('link', { name: place.link }).first().click();
+async function reach(person, place) {
+  const { page, go } = person;
+  await (typeof place === 'string' ? go(place) : place(person));
   await page.getByRole('heading', { level: 1 }).waitFor();
   await page.waitForLoadState('networkidle');
+  const here = new URL(page.url()).pathname;
+  visits.add(here);
+  if (typeof place !== 'string') return;
+  const asked = new URL(place, page.url()).pathname;
+  visits.add(asked);
+  if (here !== (LEADS_ON[asked] ?? asked)) faults.push(`${asked} led to ${here}`);
+}
+
+function accountOf(role) {
+  const account = SIGN_INS.find((known) => known.role === role);
+  if (account === undefined) throw new Error(`the demo shop has no ${role}`);
+  return account;
 }

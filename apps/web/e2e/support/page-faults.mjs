@@ -1,0 +1,53 @@
+// What no page may have, measured on the page as it stands.
+import { accessibilityViolations } from './axe.mjs';
+import { COLOUR_SCHEMES, settled, VIEWPORTS } from './screenshots.mjs';
+
+const NARROWEST = { width: 320, height: 640 };
+/** 64 px less the line around a control. */
+const GLOVE_PX = 62;
+const CONTROLS = 'button, select, textarea, summary, input:not([type=hidden], [type=file]), a';
+
+/** Faults of accessibility in both modes, whatever is wider than its screen; with `isFloor` also controls too small for gloves. */
+export async function pageFaults(page, { isFloor = false } = {}) {
+  const faults = [];
+  await page.setViewportSize(VIEWPORTS.desk);
+  for (const colorScheme of COLOUR_SCHEMES) {
+    await page.emulateMedia({ colorScheme });
+    await settled(page);
+    const violations = await accessibilityViolations(page);
+    faults.push(...violations.map((violation) => `${colorScheme}: ${violation}`));
+  }
+  await page.setViewportSize(VIEWPORTS.tablet);
+  faults.push(...(await page.evaluate(sidewaysTables)).map((name) => `the table ${name} scrolls sideways at ${VIEWPORTS.tablet.width} px`));
+  for (const size of isFloor ? [VIEWPORTS.tablet, VIEWPORTS.phone] : []) {
+    await page.setViewportSize(size);
+    const small = await page.evaluate(smallControls, { selector: CONTROLS, leastPx: GLOVE_PX });
+    faults.push(...small.map((control) => `too small for a glove at ${size.width} px: ${control}`));
+  }
+  await page.setViewportSize(NARROWEST);
+  const tooWidePx = await page.evaluate(() => document.documentElement.scrollWidth - document.documentElement.clientWidth);
+  if (tooWidePx > 0) faults.push(`it is ${tooWidePx} px wider than a screen of ${NARROWEST.width} px`);
+  await page.setViewportSize(VIEWPORTS.desk);
+  return faults;
+}
+
+/** Runs in the page: tables of the ordinary kind whose frame is narrower than they are. */
+function sidewaysTables() {
+  return [...document.querySelectorAll('main table')]
+    .filter(({ parentElement }) => parentElement !== null && parentElement.scrollWidth > parentElement.clientWidth + 1)
+    .map((table) => table.getAttribute('aria-label') ?? 'without a name');
+}
+
+/** Runs in the page: controls that are drawn as such. Words that are links within a text or the breadcrumbs keep the height of their line. */
+function smallControls({ selector, leastPx }) {
+  return [...document.querySelectorAll(`main :is(${selector})`)].flatMap((control) => {
+    // A summary within a list gives its row the tap.
+    const target = (control.tagName === 'SUMMARY' ? control.closest('li') : null) ?? control;
+    const { width, height } = target.getBoundingClientRect();
+    const isDrawn = width > 1 && height > 1 && control.checkVisibility();
+    const isInText = control.tagName === 'A' && (getComputedStyle(control).display === 'inline' || control.closest('nav') !== null);
+    if (!isDrawn || isInText || height >= leastPx) return [];
+    const name = control.getAttribute('aria-label') ?? control.id ?? '';
+    return [`${control.tagName.toLowerCase()} “${(control.textContent || name).slice(0, 40)}”, ${Math.round(height)} px`];
+  });
+}
