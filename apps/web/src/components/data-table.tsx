@@ -12,6 +12,8 @@ export type Column<T> = {
   width?: string;
   /** On a phone the row becomes a card: 'title' leads it, 'picture' stands in its corner, 'hidden' is left out, 'fact' shows name and value. */
   onPhone?: 'title' | 'picture' | 'fact' | 'hidden';
+  /** Between phone and desk the column goes, and these words stand as a second line in another one. */
+  fold?: { into: string; words: (row: T) => ReactNode };
 };
 
 export type DataTableProps<T> = {
@@ -27,6 +29,7 @@ export type DataTableProps<T> = {
 };
 
 const CELL_DISPLAY = { base: 'flex', sm: 'table-cell' } as const;
+const FOLDED_CELL_DISPLAY = { base: 'flex', sm: 'none', lg: 'table-cell' } as const;
 
 /** A dense table with a sticky head. Below 600 px every row is a card; the roles keep it a table for screen readers. */
 export function DataTable<T>({ label, columns, rows, rowKey, density = 'target', isHighlighted }: DataTableProps<T>) {
@@ -51,11 +54,12 @@ export function DataTable<T>({ label, columns, rows, rowKey, density = 'target',
       >
         <chakra.thead role="rowgroup" display={{ base: 'none', sm: 'table-header-group' }} position="sticky" top="0" zIndex="sticky">
           <chakra.tr role="row">
-            {columns.map(({ key, header, isHeaderHidden, align, width }) => (
+            {columns.map(({ key, header, isHeaderHidden, align, width, fold }) => (
               <chakra.th
                 key={key}
                 role="columnheader"
                 scope="col"
+                display={fold === undefined ? undefined : { sm: 'none', lg: 'table-cell' }}
                 textAlign={align ?? 'start'}
                 width={width}
                 fontWeight="semibold"
@@ -87,7 +91,13 @@ export function DataTable<T>({ label, columns, rows, rowKey, density = 'target',
               p={{ base: '3', sm: '0' }}
             >
               {columns.map((column) => (
-                <Cell key={column.key} column={column} row={row} height={rowHeight} />
+                <Cell
+                  key={column.key}
+                  column={column}
+                  row={row}
+                  height={rowHeight}
+                  folded={columns.filter(({ fold }) => fold?.into === column.key)}
+                />
               ))}
             </chakra.tr>
           ))}
@@ -99,13 +109,15 @@ export function DataTable<T>({ label, columns, rows, rowKey, density = 'target',
 
 const PICTURE_PLACE = { position: { base: 'absolute', sm: 'static' }, top: '3', right: '3' } as const;
 
-function Cell<T>({ column, row, height }: { column: Column<T>; row: T; height: string }) {
-  const { header, isHeaderHidden, cell, align, onPhone = 'fact' } = column;
+type CellProps<T> = { column: Column<T>; row: T; height: string; folded: readonly Column<T>[] };
+
+function Cell<T>({ column, row, height, folded }: CellProps<T>) {
+  const { header, isHeaderHidden, cell, align, fold, onPhone = 'fact' } = column;
   const isFact = onPhone === 'fact' && isHeaderHidden !== true;
   return (
     <chakra.td
       role="cell"
-      display={onPhone === 'hidden' ? { base: 'none', sm: 'table-cell' } : CELL_DISPLAY}
+      display={cellDisplay(onPhone === 'hidden', fold !== undefined)}
       {...(onPhone === 'picture' ? PICTURE_PLACE : {})}
       alignItems="center"
       justifyContent={isFact ? 'space-between' : 'flex-start'}
@@ -129,7 +141,19 @@ function Cell<T>({ column, row, height }: { column: Column<T>; row: T; height: s
           {header}
         </chakra.span>
       )}
-      <chakra.div minW="0">{cell(row)}</chakra.div>
+      <chakra.div minW="0">
+        {cell(row)}
+        {folded.map(({ key, fold: second }) => (
+          <chakra.div key={key} display={{ base: 'none', sm: 'block', lg: 'none' }} fontWeight="normal" color="fg.muted">
+            {second?.words(row)}
+          </chakra.div>
+        ))}
+      </chakra.div>
     </chakra.td>
   );
+}
+
+function cellDisplay(isHiddenOnPhone: boolean, isFolded: boolean) {
+  const shown = isFolded ? FOLDED_CELL_DISPLAY : CELL_DISPLAY;
+  return isHiddenOnPhone ? { ...shown, base: 'none' } : shown;
 }

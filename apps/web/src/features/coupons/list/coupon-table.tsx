@@ -27,21 +27,41 @@ function columns(timeZone: string): readonly Column<CouponSummary>[] {
       cell: ({ face, code }) => face !== null && <CouponFace face={face} code={code} />,
     },
     { key: 'code', header: 'Code', onPhone: 'title', cell: (coupon) => <CodeLink coupon={coupon} /> },
-    { key: 'title', header: 'For', cell: ({ title }) => (title === '' ? NOTHING : title) },
+    {
+      key: 'title',
+      header: 'For',
+      cell: ({ title }) => (title === '' ? NOTHING : title),
+      fold: { into: 'code', words: ({ title }) => title },
+    },
     { key: 'material', header: 'Material and finish', cell: groundWords },
-    { key: 'effect', header: 'Effect', cell: ({ effect }) => lowerFirst(effect.name) },
+    {
+      key: 'effect',
+      header: 'Effect',
+      cell: ({ effect }) => lowerFirst(effect.name),
+      fold: { into: 'material', words: ({ effect }) => lowerFirst(effect.name) },
+    },
     { key: 'machine', header: 'Machine, lens', cell: ({ machine, lens }) => `${machine.name}, ${lens.name}` },
     { key: 'state', header: 'State', cell: (coupon) => <CouponState coupon={coupon} /> },
-    { key: 'rated', header: 'Rated', align: 'end', cell: ({ ratedCount, cellCount }) => `${ratedCount} of ${cellCount}` },
-    { key: 'best', header: 'Best', align: 'end', cell: ({ bestRating }) => bestRating ?? NOTHING },
+    { key: 'rated', header: 'Rated', align: 'end', cell: ({ ratedCount, cellCount }) => <Whole>{`${ratedCount} of ${cellCount}`}</Whole> },
+    {
+      key: 'best',
+      header: 'Best',
+      align: 'end',
+      cell: ({ bestRating }) => bestRating ?? NOTHING,
+      fold: { into: 'rated', words: ({ bestRating }) => bestRating !== null && `best ${bestRating}` },
+    },
     {
       key: 'marked',
       header: 'Marked',
       align: 'end',
-      cell: ({ markedAt }) => <chakra.span whiteSpace="nowrap">{markedAt === null ? NOTHING : formatDate(markedAt, timeZone)}</chakra.span>,
+      cell: ({ markedAt }) => <Whole>{markedAt === null ? NOTHING : formatDate(markedAt, timeZone)}</Whole>,
+      fold: { into: 'state', words: ({ markedAt }) => markedAt !== null && <Whole>marked {formatDate(markedAt, timeZone)}</Whole> },
     },
   ];
 }
+
+/** Words that stay on one line. */
+const Whole = chakra('span', { base: { whiteSpace: 'nowrap' } });
 
 /** A planned coupon leads on to the machine, every other one to its page. */
 function CodeLink({ coupon: { code, title, material, state } }: { coupon: CouponSummary }) {

@@ -1,4 +1,5 @@
 import { chakra } from '@chakra-ui/react';
+import type { ReactNode } from 'react';
 import { type Column, DataTable } from '../../../components/data-table';
 import { StateMark } from '../../../components/state-mark';
 import { TextLink } from '../../../components/text-link';
@@ -45,30 +46,55 @@ function columns(timeZone: string): readonly Column<RecipeSummary>[] {
       ),
     },
     { key: 'material', header: 'Material and finish', cell: ({ material, finish }) => `${material.name}, ${lowerFirst(finish.name)}` },
-    { key: 'effect', header: 'Effect', cell: ({ effect }) => lowerFirst(effect.name) },
+    {
+      key: 'effect',
+      header: 'Effect',
+      cell: ({ effect }) => lowerFirst(effect.name),
+      fold: { into: 'material', words: ({ effect }) => lowerFirst(effect.name) },
+    },
     { key: 'machine', header: 'Machine, lens', cell: ({ machine, lens }) => `${machine.name}, ${lens.name}` },
     { key: 'state', header: 'State', cell: (recipe) => <RecipeState recipe={recipe} /> },
-    { key: 'revision', header: 'Rev.', align: 'end', onPhone: 'hidden', cell: ({ current }) => current?.number ?? NOTHING },
+    {
+      key: 'revision',
+      header: 'Rev.',
+      align: 'end',
+      onPhone: 'hidden',
+      cell: ({ current }) => current?.number ?? NOTHING,
+      fold: { into: 'code', words: ({ current }) => current !== null && `rev. ${current.number}` },
+    },
     { key: 'parts', header: 'Parts, 30 d', align: 'end', onPhone: 'hidden', cell: ({ last30Days: { good, scrap } }) => good + scrap },
-    { key: 'scrap', header: 'Scrap, %', align: 'end', onPhone: 'hidden', cell: ({ last30Days }) => scrapShare(last30Days) },
+    {
+      key: 'scrap',
+      header: 'Scrap, %',
+      align: 'end',
+      onPhone: 'hidden',
+      cell: ({ last30Days }) => scrapShare(last30Days),
+      fold: {
+        into: 'parts',
+        words: ({ last30Days }) => last30Days.scrap > 0 && <chakra.span whiteSpace="nowrap">{scrapShare(last30Days)} % scrap</chakra.span>,
+      },
+    },
     {
       key: 'due',
       header: 'Re-prove by',
       align: 'end',
       cell: ({ current }) =>
-        current?.reviewDue == null ? (
-          NOTHING
-        ) : (
-          <chakra.span
-            whiteSpace="nowrap"
-            color={current.isReviewOverdue ? 'straw.fg' : undefined}
-            fontWeight={current.isReviewOverdue ? 'semibold' : undefined}
-          >
-            {formatDate(current.reviewDue, timeZone)}
-          </chakra.span>
-        ),
+        current?.reviewDue == null ? NOTHING : <ReviewDue current={current}>{formatDate(current.reviewDue, timeZone)}</ReviewDue>,
+      fold: {
+        into: 'state',
+        words: ({ current }) =>
+          current?.reviewDue != null && <ReviewDue current={current}>re-prove by {formatDate(current.reviewDue, timeZone)}</ReviewDue>,
+      },
     },
   ];
+}
+
+function ReviewDue({ current: { isReviewOverdue }, children }: { current: { isReviewOverdue: boolean }; children: ReactNode }) {
+  return (
+    <chakra.span whiteSpace="nowrap" color={isReviewOverdue ? 'straw.fg' : undefined} fontWeight={isReviewOverdue ? 'semibold' : undefined}>
+      {children}
+    </chakra.span>
+  );
 }
 
 /** The approved setting stays the row; a revision under way is a second line. */
