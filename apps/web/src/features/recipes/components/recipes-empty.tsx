@@ -24,8 +24,19 @@ export function NoRecipesYet({ mayPlan }: { mayPlan: boolean }) {
       kind="none-yet"
       title="No recipes yet"
       drawing={<Plate layout={EMPTY_PLATE} cells={{}} label="An empty plate" chosen="C4" />}
-      actions={mayPlan ? <PlanACoupon kind="primary" /> : undefined}
-      note={mayPlan ? 'Nobody at a machine sees a setting before a lead has signed it.' : undefined}
+      actions={
+        mayPlan ? (
+          <>
+            <PlanACoupon kind="primary" />
+            <ButtonLink to={paths.newRecipe}>Add a recipe by another route</ButtonLink>
+          </>
+        ) : undefined
+      }
+      note={
+        mayPlan
+          ? 'A setting that the shop knows already begins as a draft. Nobody at a machine sees a setting before a lead has signed it.'
+          : undefined
+      }
     >
       {mayPlan
         ? 'A recipe is a setting that was proved on a coupon and signed by a lead. Mark a coupon, rate its cells, and draft the first recipe from the best one.'
