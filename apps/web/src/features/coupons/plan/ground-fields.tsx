@@ -48,16 +48,21 @@ export function GroundFields({ form, choices }: { form: UseFormReturn<PlanValues
         error={at('finishId')}
         options={optionsOf(choices.finishes)}
       />
-      <SelectField
-        label="Effect wanted"
-        placeholder="Choose"
-        {...form.register('effectId')}
-        error={at('effectId')}
-        options={optionsOf(choices.effects)}
-      />
+      {/* The names of effects say what is kept and what goes: cut off they would be mistaken. */}
+      <chakra.div gridColumn="1 / -1">
+        <SelectField
+          label="Effect wanted"
+          placeholder="Choose"
+          {...form.register('effectId')}
+          error={at('effectId')}
+          options={optionsOf(choices.effects)}
+        />
+      </chakra.div>
       <NumberField label="Thickness" unit="mm" isOptional {...form.register('thicknessMm')} error={at('thicknessMm')} />
       <TextField label="Lot" isOptional {...form.register('lot')} error={at('lot')} />
-      <TextField label="What it is for" isOptional {...form.register('title')} error={at('title')} />
+      <chakra.div gridColumn="1 / -1">
+        <TextField label="What it is for" isOptional {...form.register('title')} error={at('title')} />
+      </chakra.div>
     </chakra.div>
   );
 }
