@@ -54,7 +54,8 @@ function Source({ children }: { children: ReactNode }) {
         {children}
       </chakra.div>
       <chakra.details display={{ base: 'block', sm: 'none' }} fontSize="sm" lineHeight="sm" color="fg.muted">
-        <chakra.summary py="1" cursor="pointer">
+        {/* The whole caution takes the tap: the word alone is too small for a glove. */}
+        <chakra.summary py="1" cursor="pointer" _after={{ content: '""', position: 'absolute', inset: '0' }}>
           Source
         </chakra.summary>
         {children}

@@ -10,11 +10,12 @@ export type SegmentedProps<T extends string> = {
   onChange: (value: T) => void;
   /** Fills the width, each choice the same. */
   isWide?: boolean;
+  /** 'glove' on screens that are used with gloves. */
+  size?: 'touch' | 'glove';
 };
 
 const Choice = chakra('button', {
   base: {
-    minHeight: { base: '46px', lg: '38px' },
     px: { base: '1.5', sm: '3.5' },
     flexGrow: '1',
     borderRight: 'hairline',
@@ -30,10 +31,14 @@ const Choice = chakra('button', {
       _hover: { bg: 'brand.solid' },
     },
   },
+  variants: {
+    // The line around the group adds 2 px.
+    size: { touch: { minHeight: { base: '46px', lg: '38px' } }, glove: { minHeight: { base: 'glove', lg: '54px' } } },
+  },
 });
 
 /** One of a few: a radio group in one tab stop. */
-export function Segmented<T extends string>({ label, choices, value, onChange, isWide = false }: SegmentedProps<T>) {
+export function Segmented<T extends string>({ label, choices, value, onChange, isWide = false, size = 'touch' }: SegmentedProps<T>) {
   const radio = useRovingRadio({ values: choices.map((choice) => choice.value), value, onChange });
   return (
     <chakra.div
@@ -48,7 +53,7 @@ export function Segmented<T extends string>({ label, choices, value, onChange, i
       overflow="hidden"
     >
       {choices.map((choice) => (
-        <Choice key={choice.value} type="button" flexBasis={isWide ? '0' : 'auto'} {...radio(choice.value)}>
+        <Choice key={choice.value} type="button" size={size} flexBasis={isWide ? '0' : 'auto'} {...radio(choice.value)}>
           {choice.label}
         </Choice>
       ))}

@@ -152,7 +152,7 @@ export function Tick({ label, isTicked, onChange }: TickProps) {
       aria-label={label}
       onClick={() => onChange(!isTicked)}
       width={{ base: '56px', sm: 'glove' }}
-      height={{ base: '60px', sm: 'glove' }}
+      height="glove"
       display="grid"
       placeItems="center"
       justifySelf="end"

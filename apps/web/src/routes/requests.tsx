@@ -18,6 +18,7 @@ export function Component() {
     <Page title="Requests for settings" crumbs={[{ label: 'Runs', to: paths.runs }, { label: 'Requests' }]}>
       <chakra.div mb="4">
         <Segmented
+          size="glove"
           label="Which requests"
           choices={STATES}
           value={state}

@@ -15,7 +15,9 @@ export function Component() {
       title="Runs"
       actions={
         <>
-          <ButtonLink to={paths.requests}>Requests for settings</ButtonLink>
+          <ButtonLink size="glove" to={paths.requests}>
+            Requests for settings
+          </ButtonLink>
           <CsvButton />
         </>
       }
@@ -41,7 +43,7 @@ function CsvButton() {
     }
   };
   return (
-    <Button icon={<DownloadIcon />} isBusy={isBusy} onClick={() => void handleClick()}>
+    <Button size="glove" icon={<DownloadIcon />} isBusy={isBusy} onClick={() => void handleClick()}>
       CSV
     </Button>
   );

@@ -30,12 +30,19 @@ export function CouponDownloads({ coupon }: { coupon: Pick<Coupon, 'id' | 'code'
   };
   return (
     <chakra.section aria-label="Files for the machine" display="grid" gap="2">
-      <Segmented label="What the laser does to the ground" choices={POLARITIES} value={polarity} onChange={setPolarity} isWide />
+      <Segmented
+        label="What the laser does to the ground"
+        choices={POLARITIES}
+        value={polarity}
+        onChange={setPolarity}
+        isWide
+        size="glove"
+      />
       <Flex gap="2" wrap="wrap">
-        <Button size="touch" flex="1" icon={<DownloadIcon />} isBusy={busy === 'artwork'} onClick={() => void save('artwork')}>
+        <Button size="glove" flex="1" icon={<DownloadIcon />} isBusy={busy === 'artwork'} onClick={() => void save('artwork')}>
           Artwork, SVG
         </Button>
-        <Button size="touch" flex="1" icon={<DownloadIcon />} isBusy={busy === 'cells'} onClick={() => void save('cells')}>
+        <Button size="glove" flex="1" icon={<DownloadIcon />} isBusy={busy === 'cells'} onClick={() => void save('cells')}>
           Cells, CSV
         </Button>
       </Flex>

@@ -17,7 +17,9 @@ export function WaitingCoupons({ machineId }: { machineId: string }) {
         {data.items.map(({ id, code, title, material, finish }) => (
           <li key={id}>
             <Flex align="center" gap="3" wrap="wrap">
-              <ButtonLink to={paths.markCoupon(code)}>Mark {code}</ButtonLink>
+              <ButtonLink size="glove" to={paths.markCoupon(code)}>
+                Mark {code}
+              </ButtonLink>
               <chakra.span fontSize="sm" lineHeight="sm" color="fg.muted" minW="0">
                 {title === '' ? `${material.name}, ${finish.name}` : title}
               </chakra.span>

@@ -24,7 +24,7 @@ export function FinderSlot({ slot, view, shownId, onChoose }: FinderSlotProps) {
     button.current?.focus();
   };
   return (
-    <chakra.span position="relative" display={{ base: 'inline', sm: 'inline-block' }} verticalAlign="top">
+    <chakra.span position="relative" display="inline-block" maxW="full" verticalAlign={{ base: 'middle', sm: 'top' }}>
       <Blank
         ref={button}
         type="button"
@@ -87,6 +87,11 @@ const Blank = chakra('button', {
     cursor: 'pointer',
     borderRadius: 'md',
     textAlign: 'start',
+    // 64 px and a gap of 8 for a gloved finger; the words of the sentence keep to the middle.
+    lineHeight: { base: '24px', sm: 'inherit' },
+    minHeight: { base: 'glove', sm: '0' },
+    py: { base: '5', sm: '0' },
+    my: { base: '1', sm: '0' },
     '&:hover [data-blank]': { bg: { sm: 'brand.muted' } },
     '&[data-open] [data-blank]': { outline: { sm: '2px solid' }, outlineColor: 'brand.focusRing', outlineOffset: '2px' },
   },

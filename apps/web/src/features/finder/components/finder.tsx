@@ -44,7 +44,7 @@ export function Finder({ holds, leadActs, ask }: FinderProps) {
         trailing={
           <>
             <WordsField words={choice.words ?? ''} onWords={setWords} />
-            <Flex align="center" gap="4" ml="auto">
+            <Flex align="center" gap={{ base: '3', sm: '4' }} wrap="wrap" justify="flex-end" ml="auto">
               {!isLoading && data.answer !== null && leadActs(data.answer)}
               <chakra.b role="status" whiteSpace="nowrap">
                 {isLoading ? 'Looking' : countWords(data)}

@@ -62,7 +62,7 @@ export function PlaceHoldButton({ subjects }: { subjects: HoldSubjects }) {
   const [isOpen, setIsOpen] = useState(false);
   return (
     <>
-      <Button kind="danger" size="touch" onClick={() => setIsOpen(true)}>
+      <Button kind="danger" size="glove" onClick={() => setIsOpen(true)}>
         Place a hold
       </Button>
       {isOpen && <PlaceHoldDialog subjects={subjects} onClose={() => setIsOpen(false)} />}

@@ -28,6 +28,7 @@ export function PlaceHoldDialog({ subjects, onClose }: { subjects: HoldSubjects;
     <Dialog title="Place a hold" onClose={onClose}>
       <Form form={form} labels={LABELS} onSubmit={submit}>
         <Segmented
+          size="glove"
           label="What is held"
           isWide
           choices={[

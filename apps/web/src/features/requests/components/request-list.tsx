@@ -75,9 +75,11 @@ function RequestCard({ request, onAnswer }: { request: SettingRequest; onAnswer:
           )}
         </chakra.div>
         <Flex gap="2" wrap="wrap">
-          <ButtonLink to={atTheMachine(request)}>Look at the machine</ButtonLink>
+          <ButtonLink size="glove" to={atTheMachine(request)}>
+            Look at the machine
+          </ButtonLink>
           {request.allowedActions.includes('answer') && (
-            <Button kind="primary" onClick={onAnswer} aria-label={`Answer ${askedBy}: ${work}`}>
+            <Button kind="primary" size="glove" onClick={onAnswer} aria-label={`Answer ${askedBy}: ${work}`}>
               Answer
             </Button>
           )}

@@ -48,6 +48,7 @@ export function RunList() {
       <Flex gap="3" wrap="wrap" align="center">
         <Search value={filters.q ?? ''} onSearch={(q) => change({ q })} />
         <Segmented
+          size="glove"
           label="Which runs"
           choices={STATES}
           value={STATES.find(({ value }) => value === filters.state)?.value ?? 'all'}
@@ -75,7 +76,7 @@ export function RunList() {
         </>
       )}
       {runs !== undefined && hasMore && (
-        <Button size="touch" justifySelf="start" onClick={showMore}>
+        <Button size="glove" justifySelf="start" onClick={showMore}>
           Show more runs
         </Button>
       )}
@@ -97,7 +98,15 @@ function JobTotals({ runs, isWhole }: { runs: readonly { good: number; scrap: nu
 function NoRuns({ isFiltered, onClear }: { isFiltered: boolean; onClear: () => void }) {
   if (isFiltered)
     return (
-      <EmptyState kind="none-match" title="No run matches" actions={<Button onClick={onClear}>Show all runs</Button>}>
+      <EmptyState
+        kind="none-match"
+        title="No run matches"
+        actions={
+          <Button size="glove" onClick={onClear}>
+            Show all runs
+          </Button>
+        }
+      >
         Take a word or a choice away.
       </EmptyState>
     );
@@ -120,7 +129,7 @@ function Search({ value, onSearch }: { value: string; onSearch: (words: string) 
   }, [typed, value]);
   return (
     <chakra.div width={{ base: 'full', sm: '300px' }}>
-      <InputFrame>
+      <InputFrame size="glove">
         <chakra.span color="fg.muted" lineHeight="none">
           <FindIcon />
         </chakra.span>

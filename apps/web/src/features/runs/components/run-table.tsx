@@ -29,7 +29,13 @@ function columns(timeZone: string, onJob: (jobReference: string) => void): reado
       onPhone: 'title',
       cell: ({ code, kind }) => (
         <>
-          <TextLink to={paths.run(code)} fontWeight="semibold" display="inline-block" py={{ base: '2.5', lg: '1' }}>
+          <TextLink
+            to={paths.run(code)}
+            fontWeight="semibold"
+            display="inline-flex"
+            alignItems="center"
+            minHeight={{ base: 'glove', lg: '6' }}
+          >
             {code}
           </TextLink>
           {kind !== 'production' && <chakra.span color="fg.muted"> {kindWord(kind).toLowerCase()}</chakra.span>}
@@ -46,7 +52,7 @@ function columns(timeZone: string, onJob: (jobReference: string) => void): reado
             color="brand.fg"
             textDecoration="underline"
             cursor="pointer"
-            minHeight={{ base: 'touch', lg: '6' }}
+            minHeight={{ base: 'glove', lg: '6' }}
             aria-label={`Runs of job ${jobReference}`}
             onClick={() => onJob(jobReference)}
           >
@@ -54,7 +60,7 @@ function columns(timeZone: string, onJob: (jobReference: string) => void): reado
           </chakra.button>
         ),
     },
-    { key: 'part', header: 'Part', cell: ({ part }) => part },
+    { key: 'part', header: 'Part', cell: ({ part }) => part, fold: { into: 'job', words: ({ part }) => part } },
     {
       key: 'recipe',
       header: 'Recipe',
@@ -67,7 +73,12 @@ function columns(timeZone: string, onJob: (jobReference: string) => void): reado
         </>
       ),
     },
-    { key: 'machine', header: 'Machine', cell: ({ machine }) => machine.name },
+    {
+      key: 'machine',
+      header: 'Machine',
+      cell: ({ machine }) => machine.name,
+      fold: { into: 'recipe', words: ({ machine }) => machine.name },
+    },
     { key: 'good', header: 'Good', align: 'end', cell: ({ good, state }) => (state === 'started' ? '' : good) },
     { key: 'scrap', header: 'Scrap', align: 'end', cell: ({ scrap, state }) => (state === 'started' ? '' : scrap) },
     {
@@ -83,7 +94,9 @@ function columns(timeZone: string, onJob: (jobReference: string) => void): reado
       header: 'Started',
       cell: ({ startedAt, startedBy }) => (
         <>
-          {formatDate(startedAt, timeZone)} {formatClock(startedAt, timeZone)}
+          <chakra.span whiteSpace="nowrap">
+            {formatDate(startedAt, timeZone)} {formatClock(startedAt, timeZone)}
+          </chakra.span>
           <chakra.span display="block" color="fg.muted">
             {startedBy.name}
           </chakra.span>
