@@ -429,7 +429,13 @@ describe('deviations', () => {
     const recipe = await makeRecipe(test, shop.lead);
     const { id } = (await grant(recipe, { maximumQuantity: 10 })).json<{ id: string }>();
     const run = await started(recipe, { deviationId: id });
-    expect(run.deviation).toMatchObject({ id });
+    expect(run.deviation).toEqual({
+      id,
+      description: 'Power 28 % for the thin sheet',
+      grantedBy: shop.lead.printedName,
+      endsAt: null,
+      maximumQuantity: 10,
+    });
     await act(run, 'first-piece', { ok: true });
     expectProblem(await act(run, 'finish', { good: 9, scrap: 2 }), 409, 'deviation-over');
     expect((await act(run, 'finish', { good: 9, scrap: 1 })).statusCode).toBe(200);

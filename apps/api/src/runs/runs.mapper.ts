@@ -45,7 +45,7 @@ export function toRunDto(view: RunView, holds: readonly OpenHold[], actor: Pick<
     setUpSteps: revision.content.setUpSteps,
     ticks: run.ticks,
     measurements: run.measurements.map((measurement) => ({ ...measurement, meets: measurement.meets ?? null })),
-    deviation,
+    deviation: deviation === null ? null : { ...deviation, endsAt: deviation.endsAt?.toISOString() ?? null },
     notes: run.notes,
     contentHash: run.contentHash,
     version: run.version,

@@ -27,7 +27,7 @@ export type RunView = {
   effect: Named;
   lensFitted: Named | null;
   startedBy: Named;
-  deviation: { id: string; description: string } | null;
+  deviation: { id: string; description: string; grantedBy: string; endsAt: Date | null; maximumQuantity: number | null } | null;
   panel: Panel;
   physical: PhysicalProfile;
   optics: { focalLengthMm: number; measuredSpotUm: number | null };
@@ -131,7 +131,13 @@ export class RunsRepository {
         effect: { id: effect.id, name: effect.name },
         lensFitted: { id: fitted.id, name: fitted.name },
         startedBy: { id: member.id, name: member.printedName },
-        deviation: { id: deviation.id, description: deviation.description },
+        deviation: {
+          id: deviation.id,
+          description: deviation.description,
+          grantedBy: deviation.grantedByName,
+          endsAt: deviation.endsAt,
+          maximumQuantity: deviation.maximumQuantity,
+        },
         panel: machineProfile.panel,
         physical: machineProfile.physical,
         optics: { focalLengthMm: lens.focalLengthMm, measuredSpotUm: machineLens.measuredSpotUm },

@@ -1,6 +1,7 @@
 import { useSearchParams } from 'react-router';
 import { Page } from '../components/page';
 import { WaitingCoupons } from '../features/coupons/mark/waiting-coupons';
+import { GrantDeviationButton } from '../features/deviations/forms/grant-deviation';
 import { Finder } from '../features/finder/components/finder';
 import type { Choice, FinderAnswer } from '../features/finder/finder.api';
 import { Holds, PlaceHoldButton } from '../features/holds/components/holds';
@@ -27,7 +28,13 @@ function AnswerHolds({ answer }: { answer: FinderAnswer }) {
 }
 
 function LeadActs({ answer }: { answer: FinderAnswer }) {
-  return answer.allowedActions.includes('place-hold') ? <PlaceHoldButton subjects={subjectsOf(answer)} /> : null;
+  const from = { revisionId: answer.revisionId, name: `${answer.code} revision ${answer.revisionNumber}` };
+  return (
+    <>
+      {answer.allowedActions.includes('grant-deviation') && <GrantDeviationButton from={from} size="glove" />}
+      {answer.allowedActions.includes('place-hold') && <PlaceHoldButton subjects={subjectsOf(answer)} />}
+    </>
+  );
 }
 
 const subjectsOf = ({ recipeId, code, title, machine }: FinderAnswer) => ({ recipe: { id: recipeId, name: `${code} ${title}` }, machine });

@@ -24,6 +24,7 @@ function openPage(at: string, handlers: Record<string, FakeHandler> = {}, shown:
   server = fakeServer({
     'GET /api/recipes': () => ({ body: makeRecipePage([recipe]) }),
     'GET /api/recipes/recipe-42': () => ({ body: shown }),
+    'GET /api/deviations': () => ({ body: { items: [], nextCursor: null } }),
     ...handlers,
   });
   const within = (page: React.ReactNode) => <StatusLineProvider>{page}</StatusLineProvider>;

@@ -1,4 +1,5 @@
 import { chakra } from '@chakra-ui/react';
+import { roleAtLeast } from '@proofplate/recipe-model';
 import { useState } from 'react';
 import { useParams } from 'react-router';
 import { Button, ButtonLink } from '../components/button';
@@ -9,6 +10,7 @@ import { SkeletonBlock } from '../components/skeletons';
 import { StateMark } from '../components/state-mark';
 import { useStatusLine } from '../components/status-line';
 import { TextLink } from '../components/text-link';
+import { DeviationsPanel } from '../features/deviations/components/deviations-panel';
 import { Holds } from '../features/recipes/components/holds';
 import { RevisionBody } from '../features/recipes/components/revision-body';
 import { RevisionLadder } from '../features/recipes/components/revision-ladder';
@@ -72,6 +74,12 @@ function RecipePage({ recipe }: { recipe: Recipe }) {
       ) : (
         <RevisionBody revision={currentRevision}>
           <RevisionLadder key={recipe.id} recipe={recipe} />
+          {member.role !== 'trainee' && currentRevision.state === 'approved' && (
+            <DeviationsPanel
+              from={{ revisionId: currentRevision.id, name: `${code} revision ${currentRevision.number}` }}
+              mayGrant={roleAtLeast(member.role, 'lead')}
+            />
+          )}
         </RevisionBody>
       )}
     </Page>

@@ -1,9 +1,9 @@
-import { screen, waitFor } from '@testing-library/react';
+import { screen, waitFor, within } from '@testing-library/react';
 import { StatusLineProvider } from '../components/status-line';
 import { closeSession, openSession } from '../lib/session';
 import { fakeServer, problem } from '../testing/fake-server';
 import { renderRoutes } from '../testing/render';
-import { makeRun, makeStartSheet } from '../testing/runs';
+import { makeDeviation, makeRun, makeStartSheet } from '../testing/runs';
 import { makeSessionAnswer } from '../testing/sessions';
 import { Component as RunStart } from './run-start';
 
@@ -86,6 +86,26 @@ describe('starting a run', () => {
     await user.selectOptions(await screen.findByLabelText('Lens fitted now'), 'F160');
     await user.click(screen.getByRole('button', { name: 'Start the run' }));
     expect(await screen.findByText('This revision is not approved.')).toBeVisible();
+  });
+
+  it('tells a trainee who granted a deviation and until when, and cites it', async () => {
+    sessionStorage.setItem('proofplate.ticks.revision-3', JSON.stringify(['set-up.0']));
+    const sheet = makeStartSheet({ deviations: [makeDeviation()] });
+    const { user } = openPage(sheet, { 'POST /api/runs': () => ({ status: 201, body: makeRun() }) });
+    const panel = await screen.findByRole('region', { name: 'Deviations' });
+    expect(within(panel).getByText(/^Granted by Hanne Voss, until 20 May 2026 18:00 CEST or for 50 parts/)).toBeVisible();
+    expect(within(panel).queryByRole('button')).toBeNull();
+    await user.selectOptions(screen.getByLabelText('Lens fitted now'), 'F160');
+    await user.selectOptions(screen.getByRole('combobox', { name: /^Deviation/ }), 'Power 28 % for the thin sheet');
+    await user.click(screen.getByRole('button', { name: 'Start the run' }));
+    await waitFor(() => expect(server.bodies('POST /api/runs')).toEqual([expect.objectContaining({ deviationId: 'd1' })]));
+  });
+
+  it('lets a lead grant a deviation where it is missing', async () => {
+    openSession(makeSessionAnswer('lead'));
+    const { user } = openPage(makeStartSheet());
+    await user.click(await screen.findByRole('button', { name: 'Grant a deviation' }));
+    expect(screen.getByRole('dialog', { name: 'Grant a deviation from R-0031 revision 3' })).toBeVisible();
   });
 
   it('cannot start under a hold, and shows it first', async () => {

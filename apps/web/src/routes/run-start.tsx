@@ -1,8 +1,10 @@
 import { chakra } from '@chakra-ui/react';
+import { roleAtLeast } from '@proofplate/recipe-model';
 import { useNavigate, useSearchParams } from 'react-router';
 import { Page } from '../components/page';
 import { ReadProblem } from '../components/read-problem';
 import { SkeletonBlock } from '../components/skeletons';
+import { StartDeviations } from '../features/deviations/components/deviations-panel';
 import { Holds } from '../features/holds/components/holds';
 import { RunSetUp } from '../features/runs/components/run-steps';
 import { StartForm } from '../features/runs/forms/start-form';
@@ -33,6 +35,7 @@ export function Component() {
 function Start({ sheet, wantedKind }: { sheet: StartSheet; wantedKind: string | null }) {
   const navigate = useNavigate();
   const { member } = useSession();
+  const mayLead = roleAtLeast(member.role, 'lead');
   const { recipe, revision, machine, material, finish, effect } = sheet;
   const { ticks, setTick, forget } = useKeptTicks(revision.id);
   const kind = sheet.kinds.find((one) => one === wantedKind) ?? sheet.kinds[0];
@@ -56,10 +59,19 @@ function Start({ sheet, wantedKind }: { sheet: StartSheet; wantedKind: string | 
       >
         {sheet.holds.length > 0 && (
           <chakra.div gridColumn="1 / -1">
-            <Holds holds={sheet.holds} subjects={subjects} mayRelease={member.role === 'lead' || member.role === 'owner'} />
+            <Holds holds={sheet.holds} subjects={subjects} mayRelease={mayLead} />
           </chakra.div>
         )}
-        <RunSetUp shown={sheet} ticks={ticks} onTick={setTick} />
+        <chakra.div display="grid" gap="4">
+          <RunSetUp shown={sheet} ticks={ticks} onTick={setTick} />
+          {revision.state === 'approved' && (
+            <StartDeviations
+              from={{ revisionId: revision.id, name: `${recipe.code} revision ${revision.number}` }}
+              mayGrant={mayLead}
+              deviations={sheet.deviations}
+            />
+          )}
+        </chakra.div>
         {kind === undefined ? (
           <p>This revision is {revision.state.replace('_', ' ')}: no run can be started with it.</p>
         ) : (

@@ -17,6 +17,7 @@ import { RunCards, RunSetUp } from '../features/runs/components/run-steps';
 import { kindWord, revisionWords, runMark } from '../features/runs/run-words';
 import { type Run, tickRun, useRun } from '../features/runs/runs.api';
 import { ProblemError } from '../lib/api';
+import { grantWords } from '../lib/deviation-words';
 import { formatTime } from '../lib/format';
 import { paths } from '../lib/paths';
 import { useSession } from '../lib/session';
@@ -122,6 +123,18 @@ function Counts({ run }: { run: Run }) {
   );
 }
 
+function CitedDeviation({ deviation }: { deviation: NonNullable<Run['deviation']> }) {
+  const { shop } = useSession();
+  return (
+    <>
+      {deviation.description}
+      <chakra.span display="block" fontSize="sm" lineHeight="sm" color="fg.muted">
+        {grantWords(deviation, shop.timeZone)}
+      </chakra.span>
+    </>
+  );
+}
+
 function RunFacts({ run }: { run: Run }) {
   const { shop } = useSession();
   const time = (at: string) => formatTime(at, shop.timeZone);
@@ -131,7 +144,7 @@ function RunFacts({ run }: { run: Run }) {
     { label: 'Lens fitted', value: run.lensFitted?.name ?? 'not said' },
     { label: 'Part', value: run.part === '' ? 'not said' : run.part },
     { label: 'Lot', value: run.lot === '' ? 'not said' : run.lot },
-    ...(run.deviation === null ? [] : [{ label: 'Deviation', value: run.deviation.description }]),
+    ...(run.deviation === null ? [] : [{ label: 'Deviation', value: <CitedDeviation deviation={run.deviation} /> }]),
     { label: 'Started', value: `${time(run.startedAt)}, ${run.startedBy.name}` },
     ...(run.finishedAt === null ? [] : [{ label: 'Finished', value: time(run.finishedAt) }]),
     { label: 'Content digest', value: run.contentHash.slice(0, 12) },

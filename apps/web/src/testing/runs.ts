@@ -38,3 +38,10 @@ export const makeRun = (rest: object = {}) => ({
   allowedActions: ['tick', 'set-up-part', 'first-piece', 'finish', 'bad-result'],
   ...rest,
 });
+
+export const makeDeviation = (rest: object = {}) => ({
+  ...{ id: 'd1', revisionId: 'revision-3', description: 'Power 28 % for the thin sheet', reason: 'Old stock' },
+  ...{ endsAt: '2026-05-20T16:00:00.000Z', maximumQuantity: 50, usedQuantity: 12, isLive: true },
+  ...{ grantedBy: 'Hanne Voss', grantedAt: '2026-05-13T08:00:00.000Z' },
+  ...rest,
+});

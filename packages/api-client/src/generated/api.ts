@@ -6248,6 +6248,15 @@ export interface components {
             id: string;
             /** @description What may differ */
             description: string;
+            /** @description Who granted it */
+            grantedBy: string;
+            /**
+             * Format: date-time
+             * @description Ends at this time; null: by quantity only
+             */
+            endsAt: string | null;
+            /** @description Ends after so many parts; null: by time only */
+            maximumQuantity: number | null;
         };
         RunDto: {
             /**

@@ -61,6 +61,12 @@ export class RunMeasurementDto {
 export class RunDeviationDto {
   @ApiProperty({ description: 'Id of the deviation', format: 'uuid' }) id: string;
   @ApiProperty({ description: 'What may differ' }) description: string;
+  @ApiProperty({ description: 'Who granted it' }) grantedBy: string;
+  @ApiProperty({ type: String, nullable: true, format: 'date-time', description: 'Ends at this time; null: by quantity only' })
+  endsAt: string | null;
+  @ApiProperty({ type: Number, nullable: true, description: 'Ends after so many parts; null: by time only' }) maximumQuantity:
+    | number
+    | null;
 }
 
 /** A run as a row of the list. */

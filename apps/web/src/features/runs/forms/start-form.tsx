@@ -5,8 +5,10 @@ import { Button } from '../../../components/button';
 import { SelectField, TextField } from '../../../components/field';
 import { Form, useSummaryForm } from '../../../components/form';
 import { StartIcon } from '../../../components/icons';
+import { grantWords } from '../../../lib/deviation-words';
 import { uuidFromRandom } from '../../../lib/device-id';
 import { setUpTick } from '../../../lib/kept-ticks';
+import { useSession } from '../../../lib/session';
 import { kindWord } from '../run-words';
 import { type Run, type RunKind, type StartSheet, startRun } from '../runs.api';
 
@@ -25,11 +27,13 @@ export type StartFormProps = { sheet: StartSheet; kind: RunKind; ticks: Readonly
 
 /** The last look before the batch: what is fitted, what is done, which job. */
 export function StartForm({ sheet, kind, ticks, onStarted }: StartFormProps) {
+  const { shop } = useSession();
   const clientId = useRef(uuidFromRandom());
   const form = useSummaryForm<Values>({
     defaultValues: { lensFittedId: '', kind, jobReference: '', part: '', lot: '', deviationId: '', ticks: '' },
   });
   const { errors, isSubmitting } = form.formState;
+  const cited = sheet.deviations.find(({ id }) => id === form.watch('deviationId'));
   const openSteps = sheet.setUpSteps.flatMap(({ mustTick }, index) => (mustTick && !ticks.has(setUpTick(index)) ? [index + 1] : []));
   const submit = async ({ deviationId, ticks: _shown, ...values }: Values, { idempotencyKey }: { idempotencyKey: string }) => {
     const body = {
@@ -80,7 +84,8 @@ export function StartForm({ sheet, kind, ticks, onStarted }: StartFormProps) {
           label={LABELS.deviationId}
           isOptional
           placeholder="none: mark as the setting says"
-          options={sheet.deviations.map(({ id, description, grantedBy }) => ({ value: id, label: `${description} (${grantedBy})` }))}
+          help={cited === undefined ? undefined : grantWords(cited, shop.timeZone)}
+          options={sheet.deviations.map(({ id, description }) => ({ value: id, label: description }))}
           minHeight={{ base: 'glove', lg: 'act' }}
           error={errors.deviationId?.message}
           {...form.register('deviationId')}
