@@ -118,6 +118,8 @@ describe('POST /api/coupons/import', () => {
       expect(pointersOf(bad)).toEqual(['#/fill', '#/markedOn']);
       const week = expectProblem(await post(url, known({ markedOn: '2019-W26' })), 422, 'invalid-fields');
       expect(pointersOf(week)).toEqual(['#/markedOn']);
+      const later = expectProblem(await post(url, known({ markedOn: '2999-01-01' })), 422, 'invalid-fields');
+      expect(pointersOf(later)).toEqual(['#/markedOn']);
     },
   );
 });

@@ -2,6 +2,7 @@ import { Injectable } from '@nestjs/common';
 import type { Actor } from '../common/actor';
 import type { FieldProblem } from '../common/errors/domain-error';
 import { type Tx, UnitOfWork } from '../database/unit-of-work';
+import { ShopsService } from '../shops/shops.service';
 import { cellDose } from './cell-dose';
 import { type EarlierPlate, earlierPlate } from './coupon-import-plate';
 import { CouponPlanGroundService } from './coupon-plan-ground.service';
@@ -21,6 +22,7 @@ export class CouponImportService {
     private readonly unitOfWork: UnitOfWork,
     private readonly grounds: CouponPlanGroundService,
     private readonly store: CouponStoreService,
+    private readonly shops: ShopsService,
   ) {}
 
   /** What would be stored, with every refused row; nothing is. */
@@ -80,9 +82,16 @@ export class CouponImportService {
   private async read(tx: Tx, actor: Actor, dto: ImportCouponDto) {
     const ground = await this.grounds.read(tx, actor.shopId, dto);
     const { panel, physical } = ground.machine;
-    return { ground, plate: earlierPlate({ panel, physical }, dto) };
+    const plate = earlierPlate({ panel, physical }, dto);
+    const isLater = dto.markedOn !== undefined && dto.markedOn > (await this.shops.today(tx, actor.shopId));
+    return { ground, plate: isLater ? { ...plate, problems: [MARKED_LATER, ...plate.problems] } : plate };
   }
 }
+
+const MARKED_LATER: FieldProblem = {
+  pointer: '#/markedOn',
+  detail: 'This day is still to come. Enter the day on which it was marked, or leave it out.',
+};
 
 const rowProblems = ({ refusedRows }: EarlierPlate): FieldProblem[] =>
   refusedRows.map(({ line, reason }) => ({ pointer: '#/table', detail: `Line ${line}: ${reason}` }));

@@ -2,6 +2,7 @@ import { Module } from '@nestjs/common';
 import { LedgerModule } from '../ledger/ledger.module';
 import { MachinesModule } from '../machines/machines.module';
 import { PhotosModule } from '../photos/photos.module';
+import { ShopsModule } from '../shops/shops.module';
 import { CouponArtworkController } from './coupon-artwork.controller';
 import { CouponArtworkService } from './coupon-artwork.service';
 import { CouponImportController } from './coupon-import.controller';
@@ -24,7 +25,7 @@ import { CouponsService } from './coupons.service';
 import { DoseCautionService } from './dose-caution.service';
 
 @Module({
-  imports: [LedgerModule, MachinesModule, PhotosModule],
+  imports: [LedgerModule, MachinesModule, PhotosModule, ShopsModule],
   controllers: [CouponsController, CouponPlansController, CouponMarkingController, CouponArtworkController, CouponImportController],
   providers: [
     CouponsService,
