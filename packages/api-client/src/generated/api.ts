@@ -1924,6 +1924,41 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/api/runs/part-ground/{revisionId}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Beam, lens and focus offsets that a round part for a revision is worked out with */
+        get: operations["PartSetUpsController_ground"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/runs/{runId}/part-set-up": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** The round part of a run as it was last saved, and what it is worked out with */
+        get: operations["PartSetUpsController_get"];
+        put?: never;
+        /** Keep a round part with its run; refused with each reason at its field */
+        post: operations["PartSetUpsController_save"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/api/holds": {
         parameters: {
             query?: never;
@@ -6339,7 +6374,7 @@ export interface components {
             contentHash: string;
             /** @description Number of the stored version; the ETag is "v" and this number */
             version: number;
-            /** @description What the caller may do: tick, first-piece, finish, bad-result */
+            /** @description What the caller may do: tick, set-up-part, first-piece, finish, bad-result */
             allowedActions: string[];
         };
         TickRunDto: {
@@ -6398,6 +6433,154 @@ export interface components {
              * @default
              */
             note: string;
+        };
+        PartGroundDto: {
+            /** @description Machine */
+            machine: components["schemas"]["NamedDto"];
+            /** @description Lens */
+            lens: components["schemas"]["NamedDto"];
+            /** @description Wavelength, nm */
+            wavelengthNm: number;
+            /** @description M² of the beam */
+            m2: number | null;
+            /** @description Beam diameter (1/e²) at the lens, mm */
+            beamDiameterMm: number | null;
+            /** @description Focal length of the lens, mm */
+            focalLengthMm: number;
+            /** @description Side of the marking field, mm */
+            fieldSizeMm: number;
+            /** @description Measured spot diameter (1/e²) in focus, µm */
+            measuredSpotUm: number | null;
+            /** @description Focus offset of each mark step, mm; positive: the surface lies farther from the lens */
+            focusOffsetsMm: number[];
+        };
+        /**
+         * @description Shape of the part
+         * @enum {string}
+         */
+        PartShape: "cylinder" | "ring" | "tube" | "cone";
+        /**
+         * @description Surface that is marked
+         * @enum {string}
+         */
+        PartSide: "outside" | "inside";
+        /**
+         * @description Unit that it was typed in
+         * @enum {string}
+         */
+        LengthUnit: "mm" | "in";
+        EnteredLengthDto: {
+            /** @description The number as typed */
+            value: number;
+            /** @description Unit that it was typed in */
+            unit: components["schemas"]["LengthUnit"];
+        };
+        /**
+         * @description What may be lost towards the edge of a strip
+         * @enum {string}
+         */
+        FocusAllowance: "fluence loss" | "spot growth";
+        /**
+         * @description Where the focus is set
+         * @enum {string}
+         */
+        FocusPlace: "mid" | "crown";
+        SavePartSetUpDto: {
+            /** @description Shape of the part */
+            shape: components["schemas"]["PartShape"];
+            /** @description Surface that is marked */
+            side: components["schemas"]["PartSide"];
+            /** @description Outside diameter of a cylinder, ring or tube */
+            diameter?: components["schemas"]["EnteredLengthDto"];
+            /** @description Wall of a ring or tube */
+            wall?: components["schemas"]["EnteredLengthDto"];
+            /** @description Diameter of the marked surface at the small end of a cone */
+            smallDiameter?: components["schemas"]["EnteredLengthDto"];
+            /** @description Diameter of the marked surface at the large end of a cone */
+            largeDiameter?: components["schemas"]["EnteredLengthDto"];
+            /** @description Length along the axis */
+            length?: components["schemas"]["EnteredLengthDto"];
+            /** @description Height of the artwork along the surface */
+            artworkHeight?: components["schemas"]["EnteredLengthDto"];
+            /** @description Width of the artwork round the part; absent: a whole turn */
+            artworkWidth?: components["schemas"]["EnteredLengthDto"];
+            /** @description Seam of a whole turn: overlap above zero, gap below; absent: edge to edge */
+            seam?: components["schemas"]["EnteredLengthDto"];
+            /** @description What may be lost towards the edge of a strip */
+            allowance: components["schemas"]["FocusAllowance"];
+            /** @description How much of it, % */
+            allowancePercent: number;
+            /** @description Where the focus is set */
+            focusAt: components["schemas"]["FocusPlace"];
+            /** @description Steepest angle between beam and normal at the edge of a strip, degrees; absent: no limit */
+            steepestEdgeDeg?: number;
+            /** @description Index steps asked for; absent: the least number */
+            indexSteps?: number;
+            /** @description Motor steps of one turn of the rotary, gear included */
+            stepsPerTurn?: number;
+            /** @description Unit of the machine’s control, in which the results are read */
+            shownIn: components["schemas"]["LengthUnit"];
+        };
+        PartNumberDto: {
+            /** @description Key of the number */
+            key: string;
+            /** @description Unit */
+            unit: string;
+            /** @description How it is computed */
+            formula: string;
+            /** @description Where the formula comes from */
+            source: string;
+            /** @description The value; null: see missingBecause */
+            value: number | null;
+            /** @description Why there is no value */
+            missingBecause: string | null;
+            /** @description true: it has no meaning for this shape */
+            isRuledOutByMode: boolean;
+            /** @description Limit of the formula that the inputs break */
+            outOfRange: string | null;
+            /** @description Numbers that went into it, by name with unit */
+            inputs: {
+                [key: string]: number;
+            };
+        };
+        PartResultsDto: {
+            /** @description true: mirror the artwork, once, in one place */
+            isMirrored: boolean;
+            /**
+             * @description What ends the widest strip; null: not known
+             * @enum {string|null}
+             */
+            stripLimit: "focus" | "edge angle" | "field" | null;
+            /** @description All measures */
+            numbers: components["schemas"]["PartNumberDto"][];
+        };
+        PartSetUpDto: {
+            /**
+             * Format: uuid
+             * @description Id
+             */
+            id: string;
+            /** @description How often it was saved for this run */
+            number: number;
+            /** @description What was typed */
+            entered: components["schemas"]["SavePartSetUpDto"];
+            /** @description Beam and lens that it was worked out with */
+            ground: components["schemas"]["PartGroundDto"];
+            /** @description What followed */
+            results: components["schemas"]["PartResultsDto"];
+            /** @description Who saved it */
+            savedBy: string;
+            /**
+             * Format: date-time
+             * @description When
+             */
+            savedAt: string;
+        };
+        RunPartSetUpDto: {
+            /** @description Last saved; null: none */
+            setUp: components["schemas"]["PartSetUpDto"] | null;
+            /** @description Beam and lens as they are recorded now */
+            ground: components["schemas"]["PartGroundDto"];
         };
         HoldDto: {
             /**
@@ -12516,6 +12699,103 @@ export interface operations {
                 };
                 content: {
                     "application/json": components["schemas"]["RunDto"];
+                };
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    PartSetUpsController_ground: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                revisionId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["PartGroundDto"];
+                };
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    PartSetUpsController_get: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                runId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["RunPartSetUpDto"];
+                };
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    PartSetUpsController_save: {
+        parameters: {
+            query?: never;
+            header: {
+                /** @description 8 to 128 visible characters, new for each act and the same for each retry */
+                "Idempotency-Key": string;
+            };
+            path: {
+                runId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["SavePartSetUpDto"];
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["PartSetUpDto"];
                 };
             };
             /** @description A problem, as docs/problems.md lists them */
