@@ -102,9 +102,10 @@ export const BENCH_SPECS: Readonly<Record<BenchKey, BenchSpec>> = {
         { pulseWidthNs: 30, energyMj: 0.5 },
         { pulseWidthNs: 60, energyMj: 0.6 },
         { pulseWidthNs: 100, energyMj: 0.75 },
+        { pulseWidthNs: 120, energyMj: 0.8 },
         { pulseWidthNs: 200, energyMj: 1 },
       ],
-      pulseWidthsNs: [8, 30, 60, 100, 200],
+      pulseWidthsNs: [8, 30, 60, 100, 120, 200],
       frequencyRangeKhz: { from: 1, to: 1000 },
       ...{
         topSpeedMmPerS: 7000,
@@ -120,7 +121,7 @@ export const BENCH_SPECS: Readonly<Record<BenchKey, BenchSpec>> = {
         { parameter: 'powerPercent', label: 'Power', ...SHARE, step: 0.5 },
         { parameter: 'speedMmPerS', label: 'Speed', unit: 'mm/s', minimum: 1, maximum: 7000, step: 1 },
         { parameter: 'frequencyKhz', label: 'Frequency', unit: 'kHz', minimum: 1, maximum: 1000, step: 1 },
-        { parameter: 'pulseWidthNs', label: 'Pulse width', unit: 'ns', choices: [8, 30, 60, 100, 200] },
+        { parameter: 'pulseWidthNs', label: 'Pulse width', unit: 'ns', choices: [8, 30, 60, 100, 120, 200] },
         { parameter: 'lineSpacingUm', label: 'Line spacing', unit: 'mm', minimum: 0.001, maximum: 2, step: 0.001 },
         { parameter: 'passes', label: 'Passes', unit: 'count', minimum: 1, maximum: 999, step: 1 },
         { parameter: 'focusOffsetMm', label: 'Focus offset', unit: 'mm', minimum: -20, maximum: 20, step: 0.1 },
@@ -163,6 +164,21 @@ export const BENCH_SPECS: Readonly<Record<BenchKey, BenchSpec>> = {
           [50, 9.9],
           [70, 14.1],
           [100, 20.2],
+        ],
+      },
+      // taken at the pulse width of Bench 1, so that its settings can be carried over
+      {
+        at: '2026-08-18T08:20:00Z',
+        ...METER,
+        frequencyKhz: 40,
+        pulseWidthNs: 120,
+        points: [
+          [10, 2.3],
+          [20, 5.1],
+          [30, 7.9],
+          [50, 13.6],
+          [70, 19.3],
+          [100, 27.8],
         ],
       },
       {

@@ -111,12 +111,15 @@ export const OTHER_RECIPES: readonly RecipeSpec[] = [
         ...{
           draftedAt: '2026-11-20T13:00:00Z',
           by: 'operator',
-          reason: 'Carried over from Bench 2 by dose; another pulse width, so it is not the same mark.',
+          reason: 'Set by eye on Bench 1 for a repair job last winter; the slip was found again.',
         },
         setting: {
           typed: { values: { ...FIBRE, powerPercent: 70, speedMmPerS: 260, frequencyKhz: 60, lineSpacingUm: 0.02, focusOffsetMm: 1 } },
         },
-        ...{ route: 'transferred', grounds: { by: 'lead', text: 'To be looked at beside a coupon before anything is marked with it.' } },
+        ...{
+          route: 'earlier-experience',
+          grounds: { by: 'lead', text: 'To be looked at beside a coupon before anything is marked with it.' },
+        },
         submittedAt: '2026-11-25T10:00:00Z',
       },
     ],
