@@ -19,6 +19,27 @@ describe('liuFit', () => {
     });
   }
 
+  it('gives the standard errors that a nonlinear fit of the same craters gives', () => {
+    const energiesUj = [4, 5, 6.5, 8, 10, 13, 18, 25];
+    const diametersUm = [12.1, 17.4, 22, 25.3, 28.9, 32.2, 37.1, 41];
+    const fit = liuFit(energiesUj, diametersUm);
+    // a nonlinear fit by scipy 1.17: packages/physics/test/reference/liu-errors.py
+    expect(fit.spotRadiusStandardErrorUm).toBeCloseTo(0.30607, 5);
+    expect(fit.thresholdEnergyStandardErrorUj).toBeCloseTo(0.1209, 5);
+    expect(fit.thresholdPeakFluenceStandardErrorJPerCm2).toBeCloseTo(0.00955, 5);
+  });
+
+  it('knows exact craters without any error', () => {
+    const energiesUj = [4, 5, 6.5, 8, 10];
+    const fit = liuFit(
+      energiesUj,
+      energiesUj.map((energyUj) => Math.sqrt(450 * Math.log(energyUj / 3))),
+    );
+    expect(fit.spotRadiusStandardErrorUm).toBeCloseTo(0, 9);
+    expect(fit.thresholdEnergyStandardErrorUj).toBeCloseTo(0, 9);
+    expect(fit.thresholdPeakFluenceStandardErrorJPerCm2).toBeCloseTo(0, 9);
+  });
+
   it('refuses craters that shrink, four points and an energy of zero', () => {
     expect(() => liuFit([1, 2, 3, 4, 5], [9, 8, 7, 6, 5])).toThrow('the craters must grow with the pulse energy');
     expect(() => liuFit([1, 2, 3, 4], [1, 2, 3, 4])).toThrow('pulseEnergiesUj must have at least 5 values, but has 4');

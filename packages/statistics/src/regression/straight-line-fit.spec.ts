@@ -15,6 +15,10 @@ describe('straightLineFit', () => {
     expect(fit.intercept).toBeCloseTo(0.3, 12);
     expect(fit.rSquared).toBeCloseTo(0.64, 12);
     expect(fit.slopeStandardError).toBeCloseTo(Math.sqrt(1.8 / 2 / 5), 12);
+    expect(fit.interceptStandardError).toBeCloseTo(Math.sqrt(0.9 * (1 / 4 + 1.5 ** 2 / 5)), 12);
+    expect(fit.centre.x).toBeCloseTo(1.5, 12);
+    expect(fit.centre.y).toBeCloseTo(1.5, 12);
+    expect(fit.centre.yStandardError).toBeCloseTo(Math.sqrt(0.9 / 4), 12);
   });
 
   it('refuses equal positions, two points and unequal lists', () => {

@@ -4,6 +4,9 @@ export type StraightLineFit = {
   readonly slope: number;
   readonly intercept: number;
   readonly slopeStandardError: number;
+  readonly interceptStandardError: number;
+  /** Where the line is known best: slope and height there are uncorrelated. */
+  readonly centre: { readonly x: number; readonly y: number; readonly yStandardError: number };
   readonly rSquared: number;
 };
 
@@ -14,7 +17,8 @@ const MIN_POINTS = 3;
  *
  * @param x  positions, finite, at least 3, not all equal
  * @param y  values, finite, as many as x
- * @returns slope and its standard error (residuals over n - 2), intercept, share of the variation explained (1 when y is constant)
+ * @returns slope and intercept with their standard errors (residuals over n - 2), the means of x and y with the standard error of the
+ *          line's height there, share of the variation explained (1 when y is constant)
  * @throws RangeError naming the argument and its value
  * Source: NIST/SEMATECH e-Handbook of Statistical Methods, 4.1.4.1
  */
@@ -29,10 +33,13 @@ export function straightLineFit(x: readonly number[], y: readonly number[]): Str
   const intercept = meanY - slope * meanX;
   const residual = y.reduce((sum, value, i) => sum + (value - meanY - slope * (x[i] - meanX)) ** 2, 0);
   const total = y.reduce((sum, value) => sum + (value - meanY) ** 2, 0);
+  const variance = residual / (x.length - 2);
   return {
     slope,
     intercept,
-    slopeStandardError: Math.sqrt(residual / (x.length - 2) / sxx),
+    slopeStandardError: Math.sqrt(variance / sxx),
+    interceptStandardError: Math.sqrt(variance * (1 / x.length + meanX ** 2 / sxx)),
+    centre: { x: meanX, y: meanY, yStandardError: Math.sqrt(variance / x.length) },
     rSquared: total === 0 ? 1 : 1 - residual / total,
   };
 }
