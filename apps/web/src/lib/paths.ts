@@ -15,6 +15,10 @@ export const paths = {
   recipe: (code: string) => `/recipes/${encodeURIComponent(code)}`,
   recipeRevision: (recipeId: string, revisionId: string) =>
     `/recipes/${encodeURIComponent(recipeId)}/revisions/${encodeURIComponent(revisionId)}`,
+  transferRevision: (recipeId: string, revisionId: string) =>
+    `/recipes/${encodeURIComponent(recipeId)}/revisions/${encodeURIComponent(revisionId)}/transfer`,
+  /** Of the approved revision. */
+  transferRecipe: (code: string) => `/recipes/${encodeURIComponent(code)}/transfer`,
   compareRevisions: (code: string) => `/recipes/${encodeURIComponent(code)}/compare`,
   signOffs: '/sign-off',
   signOff: (revisionId: string) => `/sign-off/${encodeURIComponent(revisionId)}`,

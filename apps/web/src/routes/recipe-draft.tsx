@@ -97,6 +97,7 @@ function RevisionActions({ revision }: { revision: Revision }) {
         </Button>
       )}
       {may('recall') && <RecallButton revision={revision} />}
+      {may('transfer') && <ButtonLink to={paths.transferRevision(recipe.code, id)}>Transfer…</ButtonLink>}
       {may('copy') && <ProposeChangeButton recipe={recipe} basedOnId={id} kind="plain" label="Propose a change from it" />}
       {(may('approve') || may('return')) && (
         <ButtonLink kind="primary" to={paths.signOff(id)}>

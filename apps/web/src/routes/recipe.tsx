@@ -108,7 +108,7 @@ function NoApproved({ recipe: { state, underWay, code } }: { recipe: Recipe }) {
 function RecipeActions({ recipe }: { recipe: Recipe }) {
   const [withdrawing, setWithdrawing] = useState<Recipe['revisions'][number]>();
   const announce = useStatusLine();
-  const { allowedActions, current, underWay, revisions, code } = recipe;
+  const { allowedActions, current, currentRevision, underWay, revisions, code } = recipe;
   const draft = underWay?.state === 'draft' ? underWay : undefined;
   return (
     <>
@@ -118,6 +118,9 @@ function RecipeActions({ recipe }: { recipe: Recipe }) {
             Withdraw revision {revision.number}
           </Button>
         ))}
+      {currentRevision?.allowedActions.includes('transfer') && (
+        <ButtonLink to={paths.transferRevision(code, currentRevision.id)}>Transfer…</ButtonLink>
+      )}
       {draft !== undefined && (
         <ButtonLink kind="primary" to={paths.recipeRevision(code, draft.id)}>
           Open the draft

@@ -46,11 +46,13 @@ function inInterval(
 ): StepFindings {
   const { numbers, target, choice } = about;
   const { lowestKhz: fromKhz, highestKhz: toKhz, sourceKhz } = interval;
-  const khz = choice.frequencyKhz ?? chosenFrequency(interval.calibrated, { sourceKhz, fromKhz, toKhz }, target);
-  if (!isInside(khz, fromKhz, toKhz)) {
-    const text = `${shown(khz)} kHz lies outside of ${shown(fromKhz)} to ${shown(toKhz)} kHz. Choose a frequency inside.`;
+  const { frequencyKhz: chosen } = choice;
+  if (chosen !== undefined && !isInside(chosen, fromKhz, toKhz)) {
+    const text = `${shown(chosen)} kHz lies outside of ${shown(fromKhz)} to ${shown(toKhz)} kHz. Choose a frequency inside.`;
     return { outcome: 'not known', reasons: [{ code: 'frequency outside interval', text }], interval, proposal: null };
   }
+  const bands = chosen === undefined ? interval.calibrated : [];
+  const khz = chosenFrequency(bands, { sourceKhz: chosen ?? sourceKhz, fromKhz, toKhz }, target);
   const proposed = propose(
     {
       ...{ frequencyKhz: khz, pulseWidthNs, focus },

@@ -1,9 +1,12 @@
 import { chakra } from '@chakra-ui/react';
-import { Button } from '../../../components/button';
+import { roleAtLeast } from '@proofplate/recipe-model';
+import { Button, ButtonLink } from '../../../components/button';
 import { CautionIcon, TickIcon } from '../../../components/icons';
 import { Panel } from '../../../components/page';
 import { EvidencePlate } from '../../../components/plate/evidence-plate';
 import { platePhotoOf } from '../../../components/plate/plate-photo';
+import { paths } from '../../../lib/paths';
+import { useSession } from '../../../lib/session';
 import { type FinderRecipe, type NearMiss, SLOTS, type SlotKey } from '../finder.api';
 import { inSentence } from '../sentence';
 
@@ -46,6 +49,7 @@ export function NearMisses({ misses, onShow }: NearMissesProps) {
 }
 
 function MissRow({ miss, isFirst, onShow }: { miss: NearMiss; isFirst: boolean; onShow: NearMissesProps['onShow'] }) {
+  const mayDraft = roleAtLeast(useSession().member.role, 'operator');
   const isElsewhereOnly = miss.differs.every(({ slot }) => slot === 'machine' || slot === 'lens');
   const act = isElsewhereOnly && miss.differs.some(({ slot }) => slot === 'machine') ? `Mark it on ${miss.machine.name}` : 'Show setting';
   return (
@@ -89,6 +93,20 @@ function MissRow({ miss, isFirst, onShow }: { miss: NearMiss; isFirst: boolean; 
         >
           {act}
         </Button>
+        {isElsewhereOnly && mayDraft && (
+          <ButtonLink
+            kind="quiet"
+            size="glove"
+            px="3"
+            mt="2"
+            whiteSpace="normal"
+            lineHeight="sm"
+            to={paths.transferRecipe(miss.code)}
+            aria-label={`Work out a transfer of ${miss.code}`}
+          >
+            Work out a transfer
+          </ButtonLink>
+        )}
       </chakra.span>
     </chakra.div>
   );
