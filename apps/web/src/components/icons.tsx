@@ -35,6 +35,12 @@ export const CouponIcon = icon(
 export const RecipeIcon = path('M4.5 2.75h11v14.5h-11zM7.5 6.5h5M7.5 10h5M7.5 13.5h3');
 export const SignOffIcon = path('M3 17.25h14M5.5 13.5l.6-3 7.2-7.2 2.4 2.4-7.2 7.2z');
 export const RunIcon = path('M4 4v12M8 4v12M12 4v12M16 4v12M2.5 13.5l15-7');
+export const RoundPartIcon = icon(
+  <>
+    <circle cx="10" cy="11.5" r="5.75" />
+    <path d="M10 2.5v3M5.5 5.2A8 8 0 0 1 10 3.6M10 11.5h.01" />
+  </>,
+);
 export const EquipmentIcon = icon(
   <>
     <rect x="5.5" y="2.5" width="9" height="6" />

@@ -4,6 +4,7 @@ import { useNavigate, useSearchParams } from 'react-router';
 import { Page } from '../components/page';
 import { ReadProblem } from '../components/read-problem';
 import { SkeletonBlock } from '../components/skeletons';
+import { TextLink } from '../components/text-link';
 import { StartDeviations } from '../features/deviations/components/deviations-panel';
 import { Holds } from '../features/holds/components/holds';
 import { RunSetUp } from '../features/runs/components/run-steps';
@@ -63,7 +64,12 @@ function Start({ sheet, wantedKind }: { sheet: StartSheet; wantedKind: string | 
           </chakra.div>
         )}
         <chakra.div display="grid" gap="4">
-          <RunSetUp shown={sheet} ticks={ticks} onTick={setTick} />
+          <chakra.div display="grid" gap="4">
+            <RunSetUp shown={sheet} ticks={ticks} onTick={setTick} />
+            <p>
+              Round part? <TextLink to={paths.partOfRevision(revision.id)}>Work out its part set-up</TextLink>
+            </p>
+          </chakra.div>
           {revision.state === 'approved' && (
             <StartDeviations
               from={{ revisionId: revision.id, name: `${recipe.code} revision ${revision.number}` }}

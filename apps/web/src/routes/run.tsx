@@ -8,6 +8,7 @@ import { SkeletonBlock } from '../components/skeletons';
 import { StateMark } from '../components/state-mark';
 import { TextLink } from '../components/text-link';
 import { Holds } from '../features/holds/components/holds';
+import { SavedPartPanel } from '../features/part-set-up/components/saved-part';
 import { ActProblem } from '../features/runs/components/act-problem';
 import { BadResult } from '../features/runs/components/bad-result';
 import { FinishRun } from '../features/runs/components/finish-run';
@@ -84,6 +85,7 @@ function RunPage({ run, onChange }: RunPageProps) {
           </chakra.div>
           <Steps run={run} onChange={onChange} />
         </chakra.div>
+        <SavedPartPanel run={run} mayChange={run.allowedActions.includes('set-up-part')} />
       </chakra.div>
     </Page>
   );

@@ -1,21 +1,13 @@
-import { chakra, Flex } from '@chakra-ui/react';
-import { Global } from '@emotion/react';
 import { useSearchParams } from 'react-router';
-import { Button, ButtonLink } from '../components/button';
+import { ButtonLink } from '../components/button';
 import { EmptyState } from '../components/empty-state';
-import { PrintIcon } from '../components/icons';
 import { Page } from '../components/page';
+import { PrintedPage } from '../components/printed-page';
 import { ReadProblem } from '../components/read-problem';
 import { SkeletonBlock } from '../components/skeletons';
 import { Sheet } from '../features/finder/components/sheet';
 import { useFinder } from '../features/finder/finder.api';
 import { paths } from '../lib/paths';
-
-/** The page of paper alone: no margins of the browser's own, nothing of the frame around it. */
-const PRINT_STYLES = {
-  '@page': { size: 'A4 portrait', margin: '0' },
-  '@media print': { 'html, body': { background: '#ffffff' }, main: { padding: '0 !important' } },
-};
 
 export function Component() {
   const [params] = useSearchParams();
@@ -24,7 +16,6 @@ export function Component() {
   const back = paths.machineWith(recipeId);
   return (
     <Page title="Set-up sheet" isTitleHidden>
-      <Global styles={PRINT_STYLES} />
       {data === undefined || isLoading ? (
         error === undefined ? (
           <SkeletonBlock height="480px" label="Loading the set-up sheet" />
@@ -34,26 +25,9 @@ export function Component() {
       ) : data.answer === null || data.answer.blockedBecause.length > 0 ? (
         <NoSheet reasons={data.answer?.blockedBecause ?? []} back={back} />
       ) : (
-        <>
-          <Flex gap="3" mb="4" css={{ '@media print': { display: 'none' } }}>
-            <Button kind="primary" size="primaryAct" icon={<PrintIcon />} onClick={() => window.print()}>
-              Print
-            </Button>
-            <ButtonLink to={back} size="glove">
-              Back to the machine
-            </ButtonLink>
-          </Flex>
-          <chakra.div
-            // The paper is wider than a phone: it scrolls sideways, by keys too.
-            role="region"
-            aria-label="The sheet as it prints"
-            tabIndex={0}
-            overflowX="auto"
-            css={{ '@media print': { overflow: 'visible' } }}
-          >
-            <Sheet answer={data.answer} cautions={data.cautions} />
-          </chakra.div>
-        </>
+        <PrintedPage back={{ to: back, label: 'Back to the machine' }}>
+          <Sheet answer={data.answer} cautions={data.cautions} />
+        </PrintedPage>
       )}
     </Page>
   );

@@ -4,14 +4,24 @@ const labels = (entries: readonly { label: string }[]) => entries.map(({ label }
 
 describe('the navigation', () => {
   it('shows a role only what it can use, in the order of the work', () => {
-    expect(labels(navigationFor('trainee'))).toEqual(['At the machine', 'Runs']);
-    expect(labels(navigationFor('operator'))).toEqual(['At the machine', 'Coupons', 'Recipes', 'Runs', 'Equipment', 'Materials', 'Ledger']);
+    expect(labels(navigationFor('trainee'))).toEqual(['At the machine', 'Runs', 'Part set-up']);
+    expect(labels(navigationFor('operator'))).toEqual([
+      'At the machine',
+      'Coupons',
+      'Recipes',
+      'Runs',
+      'Part set-up',
+      'Equipment',
+      'Materials',
+      'Ledger',
+    ]);
     expect(labels(navigationFor('lead'))).toEqual([
       'At the machine',
       'Coupons',
       'Recipes',
       'Sign-off',
       'Runs',
+      'Part set-up',
       'Equipment',
       'Materials',
       'People',

@@ -2,6 +2,7 @@ import { chakra } from '@chakra-ui/react';
 import { CellCloseUp, EvidencePlate } from '../../../components/plate/evidence-plate';
 import { platePhotoOf } from '../../../components/plate/plate-photo';
 import { besidePanel, settingRows, stepTitle } from '../../../components/setting-rows';
+import { Box, Line, Paper, Small, Title } from '../../../components/sheet-paper';
 import { formatDate, formatTime } from '../../../lib/format';
 import { decimalSignOf } from '../../../lib/read-number';
 import { useSession } from '../../../lib/session';
@@ -10,7 +11,6 @@ import { inSentence } from '../sentence';
 import { limitWords } from './cautions';
 import { measurementWords } from './mark-to-match';
 import { SheetCodePicture } from './sheet-code';
-import { Box, Line, Paper, Small, Title } from './sheet-paper';
 
 const MOST_MEASUREMENTS = 3;
 

@@ -1,0 +1,40 @@
+import { chakra } from '@chakra-ui/react';
+import type { LengthUnit, PartNumber, PartResults } from '@proofplate/recipe-model';
+import { DataTable } from '../../../components/data-table';
+import { inputText, numberLabel, valueText } from '../part-words';
+
+export type PartTableProps = { results: PartResults; shownIn: LengthUnit; locale: string };
+
+/** Everything the picture shows and all that it rests on: value, formula, what went in, source. */
+export function PartTable({ results, shownIn, locale }: PartTableProps) {
+  const rows = results.numbers.filter(({ isRuledOutByMode }) => !isRuledOutByMode);
+  return (
+    <DataTable<PartNumber>
+      label="All measures of the part"
+      density="dense"
+      rows={rows}
+      rowKey={({ key }) => key}
+      columns={[
+        { key: 'measure', header: 'Measure', cell: ({ key }) => numberLabel(key), onPhone: 'title' },
+        { key: 'value', header: 'Value', cell: (number) => <Value number={number} shownIn={shownIn} locale={locale} /> },
+        { key: 'formula', header: 'Formula', cell: ({ formula }) => formula },
+        { key: 'inputs', header: 'From', cell: ({ inputs }) => inputText(inputs, locale), onPhone: 'hidden' },
+        { key: 'source', header: 'Source', cell: ({ source }) => source, onPhone: 'hidden' },
+      ]}
+    />
+  );
+}
+
+function Value({ number, shownIn, locale }: { number: PartNumber; shownIn: LengthUnit; locale: string }) {
+  if (number.value === null) return <chakra.span color="fg.muted">not known because {number.missingBecause}</chakra.span>;
+  return (
+    <>
+      <chakra.b whiteSpace="nowrap">{valueText(number, shownIn, locale)}</chakra.b>
+      {number.outOfRange !== null && (
+        <chakra.span display="block" color="straw.fg">
+          Outside the formula’s range: {number.outOfRange}
+        </chakra.span>
+      )}
+    </>
+  );
+}
