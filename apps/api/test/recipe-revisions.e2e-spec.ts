@@ -4,6 +4,7 @@ import type { CalibrationDto } from '../src/machines/dto/calibration.dto';
 import type { ComparisonDto } from '../src/recipes/dto/comparison.dto';
 import type { EvidenceCandidatesDto } from '../src/recipes/dto/evidence.dto';
 import type { RecipeRevisionDto } from '../src/recipes/dto/recipe-revision.dto';
+import { ShopsService } from '../src/shops/shops.service';
 import { createTestApp, type TestApp } from './support/app';
 import { typed } from './support/coupons';
 import { asSuperuser } from './support/database';
@@ -334,6 +335,17 @@ describe('GET /api/revisions/compare', () => {
     expect(row('work', 'powerW')).toMatchObject({ unit: 'W', values: [{}, { size: { percent: expect.closeTo(50, 9) } }] });
     expect(row('work', 'arealDose')).toMatchObject({ isSame: false, values: [{}, { size: { percent: expect.closeTo(50, 9) } }] });
     expect(row('work', 'pulsePitch')).toMatchObject({ isSame: true });
+  });
+
+  it('reads the policy of the shop once, however many revisions are compared', async () => {
+    const other = await draftFromCell(test, shop, coupon, { as: shop.lead });
+    const reading = jest.spyOn(test.app.get(ShopsService, { strict: false }), 'getRow');
+    try {
+      expect((await compare([draft.id, other.id])).json<ComparisonDto>().revisions).toHaveLength(2);
+      expect(reading).toHaveBeenCalledTimes(1);
+    } finally {
+      reading.mockRestore();
+    }
   });
 
   it('compares with the revision that is asked for, and shows the reference cell’s measurements', async () => {

@@ -14,7 +14,7 @@ import { RecipeRevisionsRepository } from './recipe-revisions.repository';
 import { RevisionNotFoundError } from './recipes.errors';
 import { RevisionEvidenceRepository } from './revision-evidence.repository';
 import { hashOfRevision } from './revision-hash';
-import type { EvidenceKind, KeyIds, LinkedCell, RevisionCaution, RevisionHead, RevisionRecord } from './stored-revision';
+import type { EvidenceKind, EvidencePhoto, KeyIds, LinkedCell, RevisionCaution, RevisionHead, RevisionRecord } from './stored-revision';
 
 /** A revision in review as the queue shows it. */
 export type QueuedRevision = {
@@ -75,15 +75,17 @@ export class RevisionRecordsService {
     });
   }
 
-  async toDto(tx: Tx, actor: Actor, record: RevisionRecord): Promise<RecipeRevisionDto> {
+  /** The policy of the shop is read once for all of them. */
+  async toDtos(tx: Tx, actor: Actor, records: readonly RevisionRecord[]): Promise<RecipeRevisionDto[]> {
     const { policy } = await this.shops.getRow(tx, actor.shopId);
-    return toRevisionDto(record, {
-      actor,
-      authorMaySign: policy.authorMaySign,
-      photoUrls: (photo) => this.photos.urlsOf(photo),
-      contentHash: hashOfRecord(record),
-      doseCaution: await this.doseCautions.find(tx, actor.shopId, keyIdsOf(record.recipe)),
-    });
+    const dtos: RecipeRevisionDto[] = [];
+    for (const record of records) {
+      const doseCaution = await this.doseCautions.find(tx, actor.shopId, keyIdsOf(record.recipe));
+      const { authorMaySign } = policy;
+      const photoUrls = (photo: EvidencePhoto) => this.photos.urlsOf(photo);
+      dtos.push(toRevisionDto(record, { actor, authorMaySign, photoUrls, contentHash: hashOfRecord(record), doseCaution }));
+    }
+    return dtos;
   }
 
   async toQueued(tx: Tx, actor: Actor, records: readonly RevisionRecord[]): Promise<QueuedRevision[]> {
@@ -101,7 +103,9 @@ export class RevisionRecordsService {
   }
 
   async getDto(tx: Tx, actor: Actor, id: string): Promise<RecipeRevisionDto> {
-    return this.toDto(tx, actor, await this.get(tx, actor.shopId, id));
+    const [dto] = await this.toDtos(tx, actor, await this.list(tx, actor.shopId, [id]));
+    if (dto === undefined) throw new RevisionNotFoundError();
+    return dto;
   }
 
   /** One query for all: the shop's cautions are few, and each revision picks those that apply to it. */

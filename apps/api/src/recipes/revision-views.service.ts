@@ -31,8 +31,7 @@ export class RevisionViewsService {
   async compare(actor: Actor, { ids, referenceId }: CompareQuery): Promise<ComparisonDto> {
     return this.unitOfWork.read(actor, async (tx) => {
       const records = await this.records.list(tx, actor.shopId, ids);
-      const revisions: RecipeRevisionDto[] = [];
-      for (const record of records) revisions.push(await this.records.toDto(tx, actor, record));
+      const revisions = await this.records.toDtos(tx, actor, records);
       const reference =
         records.find(({ revision }) => revision.id === referenceId) ??
         records.find(({ revision }) => revision.state === 'approved') ??
