@@ -2,7 +2,7 @@ import { Injectable } from '@nestjs/common';
 import { schema, type Tx } from '@proofplate/db';
 import { and, desc, eq, type SQL, sql } from 'drizzle-orm';
 
-const { deviation, revision } = schema;
+const { deviation } = schema;
 
 export type DeviationRow = typeof deviation.$inferSelect & { usedQuantity: number; isLive: boolean };
 
@@ -50,14 +50,6 @@ export class DeviationsRepository {
   /** Runs that use up the same deviation finish one after the other. Its row is permanent and cannot be locked itself. */
   async takeTurn(tx: Tx, id: string): Promise<void> {
     await tx.execute(sql`select pg_advisory_xact_lock(hashtextextended(${`deviation ${id}`}, 0))`);
-  }
-
-  async stateOfRevision(tx: Tx, shopId: string, revisionId: string): Promise<string | undefined> {
-    const [row] = await tx
-      .select({ state: revision.state })
-      .from(revision)
-      .where(and(eq(revision.shopId, shopId), eq(revision.id, revisionId)));
-    return row?.state;
   }
 
   private async select(tx: Tx, isWanted: SQL | undefined, limit: number): Promise<DeviationRow[]> {

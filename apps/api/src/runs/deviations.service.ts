@@ -4,6 +4,7 @@ import { InvalidError, NotFoundError } from '../common/errors/domain-error';
 import { decodeCursor, type Page, pageOf } from '../common/pagination/page';
 import { type Tx, UnitOfWork } from '../database/unit-of-work';
 import { LedgerService } from '../ledger/ledger.service';
+import { CitedRevisionsService } from './cited-revisions.service';
 import { type DeviationRow, DeviationsRepository } from './deviations.repository';
 import type { DeviationDto, GrantDeviationDto, ListDeviationsQuery } from './dto/deviation.dto';
 import { DeviationOverError, RevisionNotUsableError } from './runs.errors';
@@ -16,6 +17,7 @@ export class DeviationsService {
   constructor(
     private readonly unitOfWork: UnitOfWork,
     private readonly deviations: DeviationsRepository,
+    private readonly cited: CitedRevisionsService,
     private readonly ledger: LedgerService,
   ) {}
 
@@ -33,8 +35,7 @@ export class DeviationsService {
     const { revisionId, description, reason, endsAt, maximumQuantity = null } = dto;
     refuseUnlimited(dto);
     return this.unitOfWork.run(actor, async (tx) => {
-      const state = await this.deviations.stateOfRevision(tx, actor.shopId, revisionId);
-      if (state === undefined) throw new NotFoundError('This revision is not in the shop. Choose it again.');
+      const { state } = await this.cited.lock(tx, actor, { revisionId, kind: 'production' });
       if (state !== 'approved') throw new RevisionNotUsableError('A deviation departs from an approved revision; this one is not.');
       const ends = endsAt === undefined ? null : new Date(endsAt);
       const values = { revisionId, description, reason, endsAt: ends, maximumQuantity, grantedByName: actor.printedName };
