@@ -10,6 +10,11 @@ const MOST_NAMED = 6;
 export function basisCheck(record: RevisionRecord): ApprovalCheck {
   const sealed = record.basis.filter(({ coupon, isMarked }) => isMarked && isCitable(coupon.state));
   const fitting = sealed.filter((cell) => isSameWork(cell, record));
+  const proofs = record.basis.filter(({ coupon }) => coupon.isProof);
+  if (proofs.length > 0) {
+    const found = `${namesOf(proofs)}: equal cells that prove a setting, not cells that one comes from.`;
+    return check('basis', 'Basis', { passes: false, found, wayOut: 'Take them out of the basis, and cite the cells that were tried out.' });
+  }
   const passes = fitting.length > 0;
   const found = passes
     ? `${namesOf(fitting)}, sealed.`

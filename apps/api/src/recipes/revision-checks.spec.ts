@@ -65,6 +65,16 @@ describe('revisionChecks()', () => {
     expect(failing({ record: recordOf({ basisCells: [cellOf('C-0001', { coupon: { physicalNumber: 2 } })] }) })).toEqual(['basis']);
   });
 
+  it('takes no proof cell for a basis, not even beside one that was tried out, and lets none be submitted', () => {
+    const proof = cellOf('C-0003', { coupon: { isProof: true } });
+    for (const basisCells of [[proof], [cellOf('C-0001'), proof]]) {
+      const record = recordOf({ basisCells });
+      expect(failing({ record })).toEqual(['basis']);
+      expect(detailOf('basis', { record })).toContain('C-0003');
+      expect(revisionChecks(factsOf({ record })).items.some(blocksSubmit)).toBe(true);
+    }
+  });
+
   it('asks for criteria that were there first, and for photos where the policy does', () => {
     const late = { criteriaRecordedAt: day('2026-05-05'), firstLookedAt: day('2026-05-04') };
     expect(failing({ record: recordOf({ basisCells: [cellOf('C-0001', { coupon: late })] }) })).toEqual(['criteria']);
