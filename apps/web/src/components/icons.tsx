@@ -55,6 +55,7 @@ export const PeopleIcon = icon(
   </>,
 );
 export const LedgerIcon = path('M8 12l4-4M9 5.5l1.6-1.6a3.4 3.4 0 0 1 4.8 4.8L14 10M11 14.5l-1.6 1.6a3.4 3.4 0 0 1-4.8-4.8L6 10');
+export const ScienceIcon = path('M7.5 2.75h5M8.5 2.75v5l-5 8.5a.75.75 0 0 0 .6 1h11.8a.75.75 0 0 0 .6-1l-5-8.5v-5M6 12.5h8');
 export const ShopIcon = path('M3.5 8.5v8.5h13V8.5M2.5 8.5 4 3.5h12l1.5 5zM8 17v-5h4v5');
 export const MoreIcon = icon(<path d="M4 10h.01M10 10h.01M16 10h.01" strokeWidth="2.5" />);
 export const FindIcon = icon(

@@ -47,6 +47,9 @@ export const paths = {
   /** Every event of the thing with this code. */
   ledgerOf: (code: string) => `/ledger?code=${encodeURIComponent(code)}`,
   shopSettings: '/shop-settings',
+  /** What the numbers mean. */
+  scienceIndex: '/science',
+  science: (page: string) => `/science/${encodeURIComponent(page)}`,
   account: '/account',
   more: '/more',
   signIn: '/sign-in',

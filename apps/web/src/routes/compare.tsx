@@ -1,9 +1,12 @@
+import { chakra } from '@chakra-ui/react';
 import { useParams, useSearchParams } from 'react-router';
 import { Button } from '../components/button';
 import { EmptyState } from '../components/empty-state';
 import { DownloadIcon } from '../components/icons';
+import { NumbersColumns } from '../components/numbers-panel/numbers-columns';
 import { Page } from '../components/page';
 import { ReadProblem } from '../components/read-problem';
+import { revisionNumbers } from '../components/setting-numbers';
 import { SkeletonBlock } from '../components/skeletons';
 import { Switch } from '../components/switch';
 import { AddRevision } from '../features/recipes/compare/add-revision';
@@ -101,6 +104,15 @@ function Compared({ comparison, choice, onChange }: ComparedProps) {
     <>
       <CompareTable {...props} />
       <CompareCards {...props} />
+      <chakra.div mt="4">
+        <NumbersColumns
+          columns={comparison.revisions.map((revision) => ({
+            key: revision.id,
+            label: revision.number === null ? 'Draft' : `Revision ${revision.number}`,
+            groups: revisionNumbers(revision),
+          }))}
+        />
+      </chakra.div>
     </>
   );
 }

@@ -2,8 +2,10 @@ import { chakra } from '@chakra-ui/react';
 import { useState } from 'react';
 import { useParams } from 'react-router';
 import { FactList } from '../components/fact-list';
+import { FoldedNumbers } from '../components/numbers-panel/folded-numbers';
 import { Page, Panel } from '../components/page';
 import { ReadProblem } from '../components/read-problem';
+import { revisionNumbers } from '../components/setting-numbers';
 import { SkeletonBlock } from '../components/skeletons';
 import { StateMark } from '../components/state-mark';
 import { TextLink } from '../components/text-link';
@@ -108,6 +110,7 @@ function Steps({ run, onChange }: RunPageProps) {
     <chakra.div display="grid" gap="4" order={{ base: 1, lg: 2 }}>
       <ActProblem problem={problem} />
       <RunCards shown={run} ticks={ticks} onTick={onTick} />
+      <FoldedNumbers summary="Numbers behind this setting" label="Numbers behind this setting" groups={revisionNumbers(run)} />
       <RunSetUp shown={run} ticks={ticks} onTick={onTick} />
     </chakra.div>
   );

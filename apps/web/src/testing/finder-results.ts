@@ -49,6 +49,8 @@ export const makeAnswer = (rest: object = {}) => ({
       },
     },
   ],
+  derived: [],
+  derivedTotals: [],
   setUpSteps: [
     { text: 'Seat the dial in fixture T-14', mustTick: true },
     { text: 'Wipe with isopropanol', caution: 'Flammable', mustTick: false },

@@ -131,7 +131,8 @@ function useRecords(typed: string, role: Role): readonly Entry[] {
 
 function pagesFor(role: Role): readonly Entry[] {
   const listed = navigationFor(role).map(({ to, label }) => ({ id: to, to, label, kind: 'page' }));
-  return [...listed, { id: paths.account, to: paths.account, label: 'Your account', kind: 'page' }];
+  const science = { id: paths.scienceIndex, to: paths.scienceIndex, label: 'How the numbers are worked out', kind: 'page' };
+  return [...listed, science, { id: paths.account, to: paths.account, label: 'Your account', kind: 'page' }];
 }
 
 function matches(label: string, typed: string): boolean {

@@ -1,6 +1,6 @@
 import { chakra, defineRecipe } from '@chakra-ui/react';
 import { Link, useOutletContext } from 'react-router';
-import { ChevronRightIcon, FindIcon } from '../../components/icons';
+import { ChevronRightIcon, FindIcon, ScienceIcon } from '../../components/icons';
 import { Page, Panel } from '../../components/page';
 import { paths } from '../../lib/paths';
 import { roleWord } from '../../lib/roles';
@@ -47,6 +47,13 @@ export function Component() {
               </RowLink>
             </chakra.li>
           ))}
+          <chakra.li borderBottom="hairline">
+            <RowLink to={paths.scienceIndex}>
+              <ScienceIcon />
+              How the numbers are worked out
+              <Trailing />
+            </RowLink>
+          </chakra.li>
           <li>
             <RowLink to={paths.account}>
               <chakra.span minW="0">

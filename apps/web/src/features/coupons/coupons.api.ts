@@ -159,6 +159,12 @@ export function useLensChoices(machineId: string): SWRResponse<Page<MachineLens>
   return useRead<Page<MachineLens>>(machineId === '' ? null : `/api/machines/${encodeURIComponent(machineId)}/lenses`);
 }
 
+/** The power table that a plan on this machine is worked out with. */
+export function useNewestCalibration(machineId: string): Schemas['CalibrationDto'] | undefined {
+  const newestFirst = useRead<Page<Schemas['CalibrationDto']>>(`/api/machines/${encodeURIComponent(machineId)}/calibrations`, { limit: 1 });
+  return newestFirst.data?.items[0];
+}
+
 export function useGroundChoices() {
   const materials = useRead<Page<Choice>>('/api/materials', ALL);
   const finishes = useRead<Page<Choice>>('/api/finishes', ALL);

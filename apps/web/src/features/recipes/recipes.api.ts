@@ -118,8 +118,9 @@ export function useComparison(ids: readonly string[], referenceId: string | unde
   return useRead<Comparison>(ids.length < 2 ? null : `${REVISIONS}/compare`, { ids: ids.join(','), referenceId });
 }
 
+/** Newest first. */
 export function useCalibrations(machineId: string): SWRResponse<{ items: readonly Calibration[] }, ProblemError> {
-  return useRead(`/api/machines/${machineId}/calibrations`, { limit: LARGEST_PAGE });
+  return useRead(machineId === '' ? null : `/api/machines/${machineId}/calibrations`, { limit: LARGEST_PAGE });
 }
 
 /** A recipe whose first setting does not come from a coupon, as a draft. */

@@ -1,6 +1,6 @@
 import { chakra } from '@chakra-ui/react';
 import type { Panel } from '@proofplate/recipe-model';
-import { type ReactNode, useEffect, useRef, useState } from 'react';
+import { type ReactNode, useDeferredValue, useEffect, useRef, useState } from 'react';
 import { useWatch } from 'react-hook-form';
 import { ActBar } from '../../../components/act-bar';
 import { Button } from '../../../components/button';
@@ -10,11 +10,13 @@ import { ProblemNotice } from '../../../components/problem-notice';
 import { SkeletonBlock, SkeletonForm } from '../../../components/skeletons';
 import { ProblemError } from '../../../lib/api';
 import { readNumber } from '../../../lib/read-number';
-import { type Coupon, planCoupon, useGroundChoices, useLensChoices, useMachineChoices } from '../coupons.api';
+import { type Coupon, type CouponPreview, planCoupon, useGroundChoices, useLensChoices, useMachineChoices } from '../coupons.api';
 import { planBody } from './plan-body';
 import { PlanForm } from './plan-form';
+import { PlanNumbers } from './plan-numbers';
 import { PlanFacts, PlanPreview } from './plan-preview';
 import { factorsFor, type PlanValues } from './plan-values';
+import type { CellPlace } from './planned-setting';
 import { ReadCautions } from './read-cautions';
 import { type LivePlan, useLivePlan } from './use-plan';
 
@@ -28,8 +30,11 @@ export function PlanCoupon({ initial, locale, onPlanned }: PlanCouponProps) {
   const machines = useMachineChoices().data?.items;
   const lenses = useLensChoices(machineId).data?.items ?? [];
   const { materials, finishes, effects } = useGroundChoices();
-  const panel = machines?.find(({ id }) => id === machineId)?.profile.panel;
+  const lensId = useWatch({ control: form.control, name: 'lensId' });
+  const machine = machines?.find(({ id }) => id === machineId);
+  const panel = machine?.profile.panel;
   const live = useLivePlan(form, panel, locale);
+  const [chosen, setChosen] = useState<string>();
   const [readCautionIds, setReadCautionIds] = useState<readonly string[]>([]);
 
   useEffect(() => {
@@ -67,11 +72,24 @@ export function PlanCoupon({ initial, locale, onPlanned }: PlanCouponProps) {
           panel={panel}
           isMachineChosen={machineId !== ''}
           preview={live.preview}
+          numbers={
+            machine !== undefined && (
+              <PlanNumbers
+                form={form}
+                machine={machine}
+                lens={lenses.find((own) => own.lensId === lensId)}
+                place={placeOf(live.preview, chosen)}
+                doseCaution={live.preview?.doseCaution ?? null}
+                cellMm={sizes.cellMm}
+                locale={locale}
+              />
+            )
+          }
           onSubmit={handleSubmit}
         />
       </div>
       <chakra.section aria-label="What the plan gives" position={{ lg: 'sticky' }} top={{ lg: '6' }} display="grid" gap="4" minW="0">
-        <Consequence live={live} panel={panel} sizes={sizes}>
+        <Consequence live={live} panel={panel} sizes={sizes} chosen={chosen} onChoose={setChosen}>
           <ReadCautions cautions={live.preview?.cautions ?? []} readIds={readCautionIds} onRead={setReadCautionIds} />
         </Consequence>
         <ActBar>
@@ -93,11 +111,16 @@ type ConsequenceProps = {
   live: LivePlan;
   panel: Panel | undefined;
   sizes: { cellMm: number; gapMm: number };
+  chosen: string | undefined;
+  onChoose: (address: string) => void;
   /** Cautions, between the plate and its facts. */
   children: ReactNode;
 };
 
-function Consequence({ live: { preview, waitsFor, problem, isLoading }, panel, sizes, children }: ConsequenceProps) {
+function Consequence({ live, panel, sizes, chosen, onChoose, children }: ConsequenceProps) {
+  const { waitsFor, problem, isLoading } = live;
+  // a plate of a hundred cells must not stand in the way of the next key
+  const preview = useDeferredValue(live.preview);
   if (problem !== undefined && problem.errors.length === 0) return <Refused problem={problem} />;
   if (preview === undefined || panel === undefined) {
     if (isLoading) return <SkeletonBlock height="420px" label="Working the plan out" />;
@@ -109,7 +132,7 @@ function Consequence({ live: { preview, waitsFor, problem, isLoading }, panel, s
   }
   return (
     <>
-      <PlanPreview preview={preview} panel={panel} {...sizes} />
+      <PlanPreview preview={preview} panel={panel} {...sizes} chosen={chosen} onChoose={onChoose} />
       {children}
       <PlanFacts preview={preview}>
         <chakra.span fontSize="sm" color="fg.muted">
@@ -136,6 +159,12 @@ function unreadable(messages: readonly { name: string; message: string }[]): Pro
   const errors = messages.map(({ name, message }) => ({ pointer: `#/${name.replaceAll('.', '/')}`, detail: message }));
   const title = 'Some fields need another look';
   return new ProblemError({ type: '/problems/invalid-fields', code: 'invalid-fields', title, detail: title, status: 422, errors });
+}
+
+/** The chosen cell; the first one until somebody chooses, and when the chosen one is no longer on the plate. */
+function placeOf(preview: CouponPreview | undefined, chosen: string | undefined): CellPlace {
+  const cell = preview?.cells.find(({ address }) => address === chosen);
+  return { row: cell?.rowIndex ?? 0, column: cell?.columnIndex ?? 0 };
 }
 
 function sizeOf(text: string, locale: string, usual: number): number {

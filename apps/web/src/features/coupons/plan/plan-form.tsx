@@ -1,5 +1,6 @@
 import { chakra } from '@chakra-ui/react';
 import { PARAMETER_KEYS, type Panel } from '@proofplate/recipe-model';
+import type { ReactNode } from 'react';
 import { type UseFormReturn, useWatch } from 'react-hook-form';
 import { Button } from '../../../components/button';
 import { NumberField } from '../../../components/field';
@@ -26,11 +27,13 @@ export type PlanFormProps = {
   panel: Panel | undefined;
   isMachineChosen: boolean;
   preview: CouponPreview | undefined;
+  /** What follows from what is typed, under the fields of the setting. */
+  numbers: ReactNode;
   onSubmit: (values: PlanValues, submit: { idempotencyKey: string }) => Promise<unknown>;
 };
 
 /** The left half of the plan: what is typed. */
-export function PlanForm({ form, choices, panel, isMachineChosen, preview, onSubmit }: PlanFormProps) {
+export function PlanForm({ form, choices, panel, isMachineChosen, preview, numbers, onSubmit }: PlanFormProps) {
   const [rows, columns] = useWatch({ control: form.control, name: ['rows.parameter', 'columns.parameter'] });
   return (
     <Form form={form} labels={labelsOf(panel)} onSubmit={onSubmit}>
@@ -47,6 +50,7 @@ export function PlanForm({ form, choices, panel, isMachineChosen, preview, onSub
             </chakra.h2>
             <SettingFields form={form} name="base" panel={panel} varied={[rows, columns]} />
           </Card>
+          {numbers}
           <LabelStepFields form={form} panel={panel} />
           <PlateFields form={form} />
         </>

@@ -2,7 +2,7 @@ import { chakra, Flex } from '@chakra-ui/react';
 import { couponLayout } from '@proofplate/imaging';
 import { PANEL_UNITS } from '@proofplate/physics';
 import { PARAMETERS, type Panel, showNumber } from '@proofplate/recipe-model';
-import { type ReactNode, useMemo, useState } from 'react';
+import { memo, type ReactNode, useMemo } from 'react';
 import { CautionIcon } from '../../../components/icons';
 import { Panel as Card } from '../../../components/page';
 import { HeatLegend } from '../../../components/plate/heat-legend';
@@ -16,12 +16,21 @@ import type { CouponPreview } from '../coupons.api';
 /** Warnings whose cells are flagged on the plate; the others are named in words only. */
 const FLAGGED = ['dose', 'pulse-energy', 'out-of-range'];
 
-export type PlanPreviewProps = { preview: CouponPreview; panel: Panel; cellMm: number; gapMm: number };
+export type PlanPreviewProps = {
+  preview: CouponPreview;
+  panel: Panel;
+  cellMm: number;
+  gapMm: number;
+  /** Address of the cell whose numbers are shown. */
+  chosen: string | undefined;
+  onChoose: (address: string) => void;
+};
 
-/** The right half of the plan: what it would give. */
-export function PlanPreview({ preview, panel, cellMm, gapMm }: PlanPreviewProps) {
+/** The right half of the plan: what it would give. A plate of many cells is drawn again only when it differs. */
+export const PlanPreview = memo(PlanPreviewCells);
+
+function PlanPreviewCells({ preview, panel, cellMm, gapMm, chosen, onChoose }: PlanPreviewProps) {
   const { rows, columns, cells, warnings } = preview;
-  const [chosen, setChosen] = useState<string>();
   const layout = useMemo(() => couponLayout({ rows, columns, cellMm, gapMm, reference: 'plan' }), [rows, columns, cellMm, gapMm]);
   const doses = cells.flatMap(({ dose }) => (dose.value === null ? [] : [dose.value]));
   const scale = responseScale(doses);
@@ -40,7 +49,7 @@ export function PlanPreview({ preview, panel, cellMm, gapMm }: PlanPreviewProps)
           cells={views}
           scale={scale}
           chosen={chosen}
-          onChoose={setChosen}
+          onChoose={onChoose}
           label={`Plan of the plate, ${rows} rows, ${columns} columns, coloured by dose`}
         />
       </PlateWithLevels>

@@ -1,6 +1,6 @@
 import type { Panel } from '@proofplate/recipe-model';
-import { useEffect, useMemo, useState } from 'react';
-import { type FieldPath, type UseFormReturn, useWatch } from 'react-hook-form';
+import { startTransition, useEffect, useMemo, useState } from 'react';
+import type { FieldPath, UseFormReturn } from 'react-hook-form';
 import { ProblemError } from '../../../lib/api';
 import { fieldNameFromPointer } from '../../../lib/form-problem';
 import { type CouponPreview, useCouponPreview } from '../coupons.api';
@@ -19,7 +19,7 @@ export type LivePlan = {
 
 /** The preview of what is typed right now. Refusals stand at their fields as soon as something was typed there. */
 export function useLivePlan(form: UseFormReturn<PlanValues>, panel: Panel | undefined, locale: string): LivePlan {
-  const values = useSettled(useWatch({ control: form.control }) as PlanValues);
+  const values = useSettledValues(form);
   const read = useMemo(() => planBody(values, panel, locale), [values, panel, locale]);
   const { data, error, isLoading } = useCouponPreview('body' in read ? read.body : undefined);
   const messages = useMemo(() => ('messages' in read ? read.messages : refusedFields(error)), [read, error]);
@@ -49,12 +49,25 @@ function refusedFields(error: ProblemError | undefined): FieldMessage[] {
   });
 }
 
-function useSettled<T>(value: T): T {
-  const [settled, setSettled] = useState(value);
-  const text = JSON.stringify(value);
+/** What is typed, once the keys rest. Nothing is drawn again while they don't: the numbers beside the form watch for themselves. */
+function useSettledValues(form: UseFormReturn<PlanValues>): PlanValues {
+  const [settled, setSettled] = useState(() => structuredClone(form.getValues()));
   useEffect(() => {
-    const timer = setTimeout(() => setSettled(JSON.parse(text)), TYPING_PAUSE_MS);
-    return () => clearTimeout(timer);
-  }, [text]);
+    let timer: ReturnType<typeof setTimeout> | undefined;
+    const settle = () => startTransition(() => setSettled(structuredClone(form.getValues())));
+    const unsubscribe = form.subscribe({
+      formState: { values: true },
+      callback: () => {
+        clearTimeout(timer);
+        timer = setTimeout(settle, TYPING_PAUSE_MS);
+      },
+    });
+    // what was set between the first drawing and now
+    settle();
+    return () => {
+      clearTimeout(timer);
+      unsubscribe();
+    };
+  }, [form]);
   return settled;
 }

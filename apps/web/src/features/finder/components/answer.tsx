@@ -3,8 +3,10 @@ import { ActBar } from '../../../components/act-bar';
 import { Button, ButtonLink } from '../../../components/button';
 import { FactList } from '../../../components/fact-list';
 import { PrintIcon, StartIcon } from '../../../components/icons';
+import { FoldedNumbers } from '../../../components/numbers-panel/folded-numbers';
 import { Panel } from '../../../components/page';
 import { SettingCard } from '../../../components/setting-card';
+import { revisionNumbers } from '../../../components/setting-numbers';
 import { besidePanel, settingRows, stepTitle } from '../../../components/setting-rows';
 import { SignatureLine } from '../../../components/signature-line';
 import { formatDate, formatTime } from '../../../lib/format';
@@ -27,7 +29,10 @@ export function Answer({ answer }: { answer: FinderAnswer }) {
         gap={{ base: '4', lg: '6' }}
         alignItems="start"
       >
-        <SettingCards answer={answer} ticks={ticks} onTick={setTick} />
+        <chakra.div display="grid" gap="4" minW="0">
+          <SettingCards answer={answer} ticks={ticks} onTick={setTick} />
+          <FoldedNumbers summary="Numbers behind this setting" label="Numbers behind this setting" groups={revisionNumbers(answer)} />
+        </chakra.div>
         <chakra.div display="grid" gap="4">
           {answer.reference !== null && <MarkToMatch reference={answer.reference} />}
           {answer.setUpSteps.length > 0 && <SetUpSteps steps={answer.setUpSteps} ticks={ticks} onTick={setTick} />}

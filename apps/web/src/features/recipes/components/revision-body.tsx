@@ -2,10 +2,10 @@ import { chakra } from '@chakra-ui/react';
 import type { ReactNode } from 'react';
 import { CautionList } from '../../../components/caution-list';
 import { GeneralCautions } from '../../../components/general-cautions';
+import { NumbersPanel } from '../../../components/numbers-panel/numbers-panel';
 import { Panel } from '../../../components/page';
-import { stepTitle } from '../../../components/setting-rows';
+import { revisionNumbers } from '../../../components/setting-numbers';
 import type { Revision } from '../recipes.api';
-import { DerivedNumbers } from './derived-numbers';
 import { EvidencePlates } from './evidence-plates';
 import { RevisionFacts, SetUpSteps } from './revision-facts';
 import { SettingCards } from './setting-cards';
@@ -28,17 +28,7 @@ export function RevisionBody({ revision, children }: { revision: Revision; child
             <SetUpSteps steps={revision.setUpSteps} />
           </Section>
           <Section title="What follows from it">
-            {revision.derived.map(({ numbers }, index) => {
-              const step = revision.steps[index];
-              if (step === undefined) return null;
-              const title = stepTitle(step, index, revision.steps.length);
-              return (
-                <chakra.div key={title} mt={index === 0 ? '0' : '3'}>
-                  {revision.steps.length > 1 && <h3>{title}</h3>}
-                  <DerivedNumbers numbers={numbers} label={title} />
-                </chakra.div>
-              );
-            })}
+            <NumbersPanel label="What follows from it" groups={revisionNumbers(revision)} />
           </Section>
         </chakra.div>
         <chakra.div display="grid" gap="4">

@@ -1,4 +1,4 @@
-import { acceptEntered, type EnteredValue, enterValue, PARAMETERS, type ParameterKey } from '@proofplate/recipe-model';
+import { acceptEntered, type EnteredValue, type Entry, enterValue, PARAMETERS, type ParameterKey } from '@proofplate/recipe-model';
 import { decimalSignOf, type NumberRule, readOptionalNumber } from '../../../lib/read-number';
 import type { Revision, RevisionChange } from '../recipes.api';
 import { DELAY_NAMES, type DraftValues, type RangeValues, type StepValues, storedText } from './draft-values';
@@ -80,13 +80,8 @@ function readSetting(step: StepValues, path: string, context: Context): Partial<
   );
   let speedMmPerS: number | undefined;
   for (const field of inOrder) {
-    const text = step.values[field.parameter] ?? '';
-    const stored = step.stored[field.parameter];
-    if (text.trim() === '') continue;
-    // "1.125" typed anew could be read in two ways; as it was stored it has one meaning.
-    const isAsStored = stored !== undefined && text === storedText(stored, field, context.locale);
-    const how = { decimalSign: decimalSignOf(context.locale), ...(speedMmPerS === undefined ? {} : { speedMmPerS }) };
-    const read = isAsStored ? acceptEntered(field, stored, how) : enterValue(field, text, how);
+    const read = readField(step, field, { locale: context.locale, ...(speedMmPerS === undefined ? {} : { speedMmPerS }) });
+    if (read === undefined) continue;
     if (read.kind === 'refused') {
       context.messages[`${path}.${field.parameter}`] = read.message;
       continue;
@@ -95,6 +90,21 @@ function readSetting(step: StepValues, path: string, context: Context): Partial<
     if (field.parameter === 'speedMmPerS') speedMmPerS = read.value.physical;
   }
   return entered;
+}
+
+/** What stands in one field of the panel; undefined: nothing. */
+export function readField(
+  { values, stored }: StepValues,
+  field: PanelField,
+  { locale, ...context }: { locale: string; speedMmPerS?: number },
+): Entry | undefined {
+  const text = values[field.parameter] ?? '';
+  if (text.trim() === '') return undefined;
+  const entered = stored[field.parameter];
+  const how = { decimalSign: decimalSignOf(locale), ...context };
+  // "1.125" typed anew could be read in two ways; as it was stored it has one meaning.
+  const isAsStored = entered !== undefined && text === storedText(entered, field, locale);
+  return isAsStored ? acceptEntered(field, entered, how) : enterValue(field, text, how);
 }
 
 function readSetUp({ setUpSteps }: DraftValues, { messages }: Context) {

@@ -1,13 +1,24 @@
 import { chakra } from '@chakra-ui/react';
 import type { Panel } from '@proofplate/recipe-model';
+import { useMemo } from 'react';
 import type { UseFormReturn } from 'react-hook-form';
 import { Button } from '../../../components/button';
 import { SelectField, TextAreaField, TextField } from '../../../components/field';
 import { Form, useSummaryForm } from '../../../components/form';
 import { Panel as Card } from '../../../components/page';
+import { measuredCalibration } from '../../../lib/measured-calibration';
 import { useSession } from '../../../lib/session';
 import { readSteps } from '../draft/read-draft';
-import { type Named, type Revision, startRecipe, useGroundChoices, useLensChoices, useMachineChoices } from '../recipes.api';
+import type { NumbersMachine } from '../draft/typed-numbers';
+import {
+  type Named,
+  type Revision,
+  startRecipe,
+  useCalibrations,
+  useGroundChoices,
+  useLensChoices,
+  useMachineChoices,
+} from '../recipes.api';
 import { StartStepFields } from './start-step-fields';
 import { emptyStart, ROUTE_OPTIONS, START_LABELS, type StartValues } from './start-values';
 
@@ -19,6 +30,7 @@ export function StartRecipe({ onStarted }: { onStarted: (draft: Revision) => voi
   const { shop } = useSession();
   const form = useSummaryForm<StartValues>({ defaultValues: emptyStart() });
   const machineId = form.watch('machineId');
+  const on = useStartMachine(form);
   const panel = useMachineChoices().data?.items.find(({ id }) => id === machineId)?.profile.panel;
   const handleSubmit = async (values: StartValues, { idempotencyKey }: { idempotencyKey: string }) => {
     const { steps: typed, title, ...rest } = values;
@@ -32,7 +44,7 @@ export function StartRecipe({ onStarted }: { onStarted: (draft: Revision) => voi
       {panel === undefined ? (
         <chakra.p color="fg.muted">Choose the machine first: its panel says what can be typed.</chakra.p>
       ) : (
-        <StartStepFields form={form} panel={panel} />
+        <StartStepFields form={form} panel={panel} on={on} />
       )}
       <div>
         <Button type="submit" kind="primary" isBusy={form.formState.isSubmitting}>
@@ -44,6 +56,21 @@ export function StartRecipe({ onStarted }: { onStarted: (draft: Revision) => voi
       </div>
     </Form>
   );
+}
+
+/** Machine, lens and newest power table, as soon as both are chosen. */
+function useStartMachine(form: UseFormReturn<StartValues>): NumbersMachine | undefined {
+  const [machineId, lensId] = form.watch(['machineId', 'lensId']);
+  const profile = useMachineChoices().data?.items.find(({ id }) => id === machineId)?.profile;
+  const lens = useLensChoices(machineId).data?.items.find((own) => own.lensId === lensId);
+  const [newest] = useCalibrations(machineId).data?.items ?? [];
+  return useMemo(() => {
+    if (profile === undefined || lens === undefined) return undefined;
+    const { physical, panel } = profile;
+    const { focalLengthMm, measuredSpotUm } = lens;
+    const machine = { physical, panel, ...(newest === undefined ? {} : { calibration: measuredCalibration(newest) }) };
+    return { machine, ground: { optics: { physical, focalLengthMm, measuredSpotUm }, panel } };
+  }, [profile, lens, newest]);
 }
 
 type Filled = { form: UseFormReturn<StartValues> };

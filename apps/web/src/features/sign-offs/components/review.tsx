@@ -3,8 +3,10 @@ import { type ReactNode, useState } from 'react';
 import { ButtonLink } from '../../../components/button';
 import { CautionList } from '../../../components/caution-list';
 import { CheckList } from '../../../components/check-list';
+import { NumbersColumns } from '../../../components/numbers-panel/numbers-columns';
 import { Panel } from '../../../components/page';
 import { ReadProblem } from '../../../components/read-problem';
+import { revisionNumbers } from '../../../components/setting-numbers';
 import { SignatureLine } from '../../../components/signature-line';
 import { SkeletonBlock } from '../../../components/skeletons';
 import { formatTime } from '../../../lib/format';
@@ -49,6 +51,7 @@ export function Review({ revision, onReturned }: ReviewProps) {
             />
           )}
           {comparedId === undefined && <FirstSetting revision={revision} />}
+          <NumbersColumns columns={numberColumns(comparedId === undefined ? undefined : current.data, revision)} />
         </chakra.div>
         <chakra.div display="grid" gap="4">
           {checks.error !== undefined && <ReadProblem problem={checks.error} thing="the checks" onRetry={() => void checks.mutate()} />}
@@ -65,6 +68,16 @@ export function Review({ revision, onReturned }: ReviewProps) {
       </chakra.div>
     </>
   );
+}
+
+/** The setting that holds today beside the proposed one. */
+function numberColumns(current: Revision | undefined, proposed: Revision) {
+  const shown = current === undefined ? [proposed] : [current, proposed];
+  return shown.map((revision) => ({
+    key: revision.id,
+    label: revision.number === null ? 'Draft' : `Revision ${revision.number}`,
+    groups: revisionNumbers(revision),
+  }));
 }
 
 /** Passing checks whose findings a signer weighs. */

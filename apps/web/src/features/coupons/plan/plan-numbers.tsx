@@ -1,0 +1,53 @@
+import { chakra } from '@chakra-ui/react';
+import { cellAddress, type DoseCaution, stepNumbers } from '@proofplate/recipe-model';
+import { useMemo } from 'react';
+import { type UseFormReturn, useWatch } from 'react-hook-form';
+import { NumbersPanel } from '../../../components/numbers-panel/numbers-panel';
+import { Panel } from '../../../components/page';
+import { numbersGroups } from '../../../components/setting-numbers';
+import { measuredCalibration } from '../../../lib/measured-calibration';
+import { type Machine, type MachineLens, useNewestCalibration } from '../coupons.api';
+import type { PlanValues } from './plan-values';
+import { type CellPlace, plannedSetting } from './planned-setting';
+
+export type PlanNumbersProps = {
+  form: UseFormReturn<PlanValues>;
+  machine: Machine;
+  lens: MachineLens | undefined;
+  place: CellPlace;
+  doseCaution: DoseCaution | null;
+  cellMm: number;
+  locale: string;
+};
+
+/** What follows from the chosen cell at every key; nothing else of the page is drawn again for it. */
+export function PlanNumbers({ form, machine, lens, place, doseCaution, cellMm, locale }: PlanNumbersProps) {
+  const [base, rows, columns] = useWatch({ control: form.control, name: ['base', 'rows', 'columns'] });
+  const calibration = useNewestCalibration(machine.id);
+  const typed = useMemo(() => {
+    const { physical, panel } = machine.profile;
+    return { physical, panel, ...(calibration === undefined ? {} : { calibration: measuredCalibration(calibration) }) };
+  }, [machine, calibration]);
+  const address = cellAddress(place.row, place.column);
+  if (lens === undefined)
+    return (
+      <Panel px="5" py="4" aria-label="Numbers">
+        <p>Choose the lens: spot, fluence and overlap depend on it.</p>
+      </Panel>
+    );
+  const { focalLengthMm, measuredSpotUm } = lens;
+  const numbers = stepNumbers(plannedSetting({ base, rows, columns }, typed, { place, locale }), {
+    optics: { physical: typed.physical, focalLengthMm, measuredSpotUm },
+    panel: typed.panel,
+    doseCaution,
+    areaMm: { widthMm: cellMm, heightMm: cellMm },
+  });
+  return (
+    <Panel px="5" py="4" aria-label={`Numbers of ${address}`}>
+      <chakra.h2 fontSize="md" lineHeight="md">
+        What follows in {address}
+      </chakra.h2>
+      <NumbersPanel label={`What follows in ${address}`} groups={numbersGroups([numbers])} />
+    </Panel>
+  );
+}
