@@ -71,6 +71,7 @@ describe('the exports of recipe-model', () => {
       'codesOf',
       'contentHash',
       'contentText',
+      'craterFit',
       'criterionText',
       'emptyPanelFor',
       'enterValue',

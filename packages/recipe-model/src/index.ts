@@ -10,6 +10,9 @@ export {
   type CautionScope,
 } from './cautions/caution';
 export { type CautionSubject, cautionsFor, isForbidden } from './cautions/cautions-for';
+export type { CraterCell, CraterFit, CraterIncubation, CraterPoint, CraterSeries, SeriesThreshold } from './craters/crater';
+export { craterFit } from './craters/crater-fit';
+export type { CraterGround } from './craters/read-crater';
 export { parameterClassOf, type SettingItem, type ShopClasses, settingItemLabel } from './diff/parameter-class';
 export { sameValue } from './diff/same-value';
 export { type ChangeSide, type ChangeSize, type SettingChange, settingDiff } from './diff/setting-diff';

@@ -54,6 +54,14 @@ describe('a measurement', () => {
     expect(pointers(empty)).toEqual(['#/m/value']);
   });
 
+  it('of a crater comes from a microscope or a calliper, and is 0 where a pulse left none', () => {
+    const crater: NewMeasurementDto = { cellId: 'c', quantity: 'crater-diameter', value: 0, method: 'microscope', instrument: 'M 2' };
+    expect(pointers(crater)).toEqual([]);
+    expect(pointers({ ...crater, method: 'calliper', value: 34.5, unit: 'µm' })).toEqual([]);
+    expect(pointers({ ...crater, method: 'photo', photoId: 'p' })).toEqual(['#/m/method']);
+    expect(pointers({ ...crater, value: -1 })).toEqual(['#/m/value']);
+  });
+
   it('from a photo names the photo, and one that supersedes names the reason', () => {
     expect(pointers({ cellId: 'c', quantity: 'contrast', value: 0.9, method: 'photo' })).toEqual(['#/m/photoId']);
     expect(pointers({ ...COLOUR, supersedesId: 'm' })).toEqual(['#/m/reason']);

@@ -17,6 +17,7 @@ const METHODS_OF: Readonly<Record<MeasurementQuantity, readonly MeasurementMetho
   'roughness-ra': ['profilometer', 'microscope'],
   'roughness-rz': ['profilometer', 'microscope'],
   'line-width': ['microscope', 'profilometer', 'calliper', 'photo'],
+  'crater-diameter': ['microscope', 'calliper'],
   'code-grade': ['verifier'],
   'tape-class': ['manual'],
   'wipe-test': ['manual'],
@@ -24,7 +25,7 @@ const METHODS_OF: Readonly<Record<MeasurementQuantity, readonly MeasurementMetho
 };
 
 type Limits = { readonly least: number; readonly most: number };
-/** What the quantity can be at all; depth is negative where the mark stands up. */
+/** What the quantity can be at all; depth is negative where the mark stands up, a crater is 0 where the pulse left none. */
 const LIMITS_OF: Readonly<Record<MeasurementQuantity, Limits>> = {
   lightness: { least: 0, most: 100 },
   a: { least: -128, most: 128 },
@@ -38,6 +39,7 @@ const LIMITS_OF: Readonly<Record<MeasurementQuantity, Limits>> = {
   'roughness-ra': { least: 0, most: 1000 },
   'roughness-rz': { least: 0, most: 5000 },
   'line-width': { least: 0, most: 10_000 },
+  'crater-diameter': { least: 0, most: 10_000 },
   'code-grade': { least: 0, most: 4 },
   'tape-class': { least: 0, most: 5 },
   'wipe-test': { least: 0, most: 1_000_000 },

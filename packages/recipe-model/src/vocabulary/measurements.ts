@@ -13,6 +13,7 @@ export type MeasurementQuantity =
   | 'roughness-ra'
   | 'roughness-rz'
   | 'line-width'
+  | 'crater-diameter'
   | 'code-grade'
   | 'tape-class'
   | 'wipe-test'
@@ -34,6 +35,7 @@ export const QUANTITIES: Readonly<Record<MeasurementQuantity, QuantityMeaning>> 
   'roughness-ra': { label: 'Roughness Ra', symbol: 'Ra', unit: 'µm', betterIs: 'neither' },
   'roughness-rz': { label: 'Roughness Rz', symbol: 'Rz', unit: 'µm', betterIs: 'neither' },
   'line-width': { label: 'Line width', symbol: 'w', unit: 'µm', betterIs: 'neither' },
+  'crater-diameter': { label: 'Crater diameter', symbol: 'D', unit: 'µm', betterIs: 'neither' },
   'code-grade': { label: 'Code grade', symbol: 'grade', unit: '1', betterIs: 'higher' },
   'tape-class': { label: 'Tape test class', symbol: 'class', unit: '1', betterIs: 'lower' },
   'wipe-test': { label: 'Wipe test, double rubs passed', symbol: 'rubs', unit: '×', betterIs: 'higher' },
@@ -66,6 +68,7 @@ export const MEASUREMENT_QUANTITIES: readonly MeasurementQuantity[] = [
   'roughness-ra',
   'roughness-rz',
   'line-width',
+  'crater-diameter',
   'code-grade',
   'tape-class',
   'wipe-test',

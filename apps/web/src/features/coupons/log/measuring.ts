@@ -16,6 +16,7 @@ export const TYPED_METHODS: Readonly<Record<MeasurementQuantity, readonly Measur
   'roughness-ra': ['profilometer', 'microscope'],
   'roughness-rz': ['profilometer', 'microscope'],
   'line-width': ['microscope', 'profilometer', 'calliper'],
+  'crater-diameter': ['microscope', 'calliper'],
   'code-grade': ['verifier'],
   'tape-class': ['manual'],
   'wipe-test': ['manual'],
