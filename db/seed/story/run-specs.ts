@@ -1,4 +1,5 @@
-import type { Role } from '@proofplate/recipe-model';
+import type { EnteredPart, Role } from '@proofplate/recipe-model';
+import { COMPASS_RING } from './round-part';
 
 /** One run as the shop's book would have it: day, slot, setting, who, job, part, lot, good, scrap, minutes. */
 export type BookedRun = {
@@ -16,6 +17,8 @@ export type BookedRun = {
   readonly badResult?: { readonly outcome: string; readonly note: string };
   readonly underDeviation?: boolean;
   readonly isOpen?: boolean;
+  /** Set up on the rotary and kept with the run. */
+  readonly roundPart?: EnteredPart;
 };
 
 type Row = readonly [
@@ -30,7 +33,7 @@ type Row = readonly [
   scrap: number,
   minutes: number,
 ];
-type More = Pick<BookedRun, 'notes' | 'badResult' | 'underDeviation' | 'isOpen'>;
+type More = Pick<BookedRun, 'notes' | 'badResult' | 'underDeviation' | 'isOpen' | 'roundPart'>;
 
 const run = ([day, slot, revision, by, job, part, lot, good, scrap, minutes]: Row, more: More = {}): BookedRun => ({
   ...{ day, slot, revision, by, job, part, lot, good, scrap, minutes },
@@ -72,7 +75,7 @@ export const BOOKED_RUNS: readonly BookedRun[] = [
   }),
   run(['2026-11-13', 'first', 'brass/1', 'operator', 'TW-26-0417', 'Depth-gauge bezel', 'MS-1192', 38, 0, 55]),
   run(['2026-11-16', 'second', 'clear/1', 'trainee', 'TW-26-0419', 'Scale, 120 mm', '6061-C11', 36, 0, 45]),
-  run(['2026-11-18', 'second', 'black/3', 'trainee', 'TW-26-0422', 'Compass ring', '6061-B22', 56, 0, 50]),
+  run(['2026-11-18', 'second', 'black/3', 'trainee', 'TW-26-0422', 'Compass ring', '6061-B22', 56, 0, 50], { roundPart: COMPASS_RING }),
   run(['2026-11-20', 'second', 'titanium/1', 'operator', 'TW-26-0424', 'Tag, 30 mm', 'TI2-081', 26, 0, 45]),
   run(['2026-11-26', 'first', 'black/3', 'trainee', 'TW-26-0429', 'Tide dial, 60 mm', '6061-B22', 48, 1, 50]),
   run(['2026-11-27', 'first', 'black/3', 'trainee', 'TW-26-0430', 'Tide dial, 60 mm', '6061-B22', 0, 0, 0], { isOpen: true }),

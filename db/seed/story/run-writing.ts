@@ -1,5 +1,5 @@
 import { schema } from '@proofplate/db';
-import { type Criterion, type MarkStep, meetsCriterion, QUANTITIES, type RunKind } from '@proofplate/recipe-model';
+import { type Criterion, type EnteredPart, type MarkStep, meetsCriterion, QUANTITIES, type RunKind } from '@proofplate/recipe-model';
 import { and, eq } from 'drizzle-orm';
 import type { MarkKind } from '../photos/mark-kinds';
 import { modelMark } from '../photos/mark-model';
@@ -10,6 +10,7 @@ import { byInstrument, evennessPercent, rounded } from './coupon-inspecting';
 import type { WorkSpec } from './coupon-specs';
 import { exposureOf } from './exposure';
 import type { RevisionRecord } from './records';
+import { keepRoundPart } from './round-part';
 
 const { run } = schema;
 
@@ -28,8 +29,10 @@ export type RunSpec = {
   readonly badResult?: { readonly outcome: string; readonly note: string };
   /** Left open: somebody is at it now. */
   readonly isOpen?: boolean;
+  readonly roundPart?: EnteredPart;
 };
 
+const PART_AFTER_MIN = 2;
 const FIRST_PIECE_AFTER_MIN = 4;
 
 /** A run from the start to its end: first piece before the batch, counts and measurements at the end, a bad result if one came out. */
@@ -48,6 +51,10 @@ export async function doRun(turn: Turn, cast: Cast, work: WorkSpec, revision: Re
   await turn.tx.insert(run).values({ ...authored(turn), id, ...values, steps, ticks, startedAt: turn.at });
   const told = telling(turn, id, code);
   await told('run.started', 0, { ...values, ticked });
+  if (spec.roundPart !== undefined) {
+    const part = await keepRoundPart(turn, { cast, work, revision, runId: id, entered: spec.roundPart });
+    await told('run.part-set-up-saved', PART_AFTER_MIN, part);
+  }
   if (kind !== 'daily-check') await releaseFirstPiece(turn, id, told);
   if (spec.isOpen !== true) await finish(turn, id, spec, told);
   return code;
