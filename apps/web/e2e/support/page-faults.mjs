@@ -5,6 +5,10 @@ import { COLOUR_SCHEMES, settled, VIEWPORTS } from './screenshots.mjs';
 const NARROWEST = { width: 320, height: 640 };
 /** 64 px less the line around a control. */
 const GLOVE_PX = 62;
+/** Between the desk and the tablet two columns are at their narrowest. */
+const NARROW_DESK = { width: 1024, height: 768 };
+/** A number, a unit or a short word never breaks; a longer one may have to. */
+const LONGEST_VALUE = 8;
 const CONTROLS = 'button, select, textarea, summary, input:not([type=hidden], [type=file]), a';
 
 /** Faults of accessibility in both modes, whatever is wider than its screen; with `isFloor` also controls too small for gloves. */
@@ -19,6 +23,11 @@ export async function pageFaults(page, { isFloor = false } = {}) {
   }
   await page.setViewportSize(VIEWPORTS.tablet);
   faults.push(...(await page.evaluate(sidewaysTables)).map((name) => `the table ${name} scrolls sideways at ${VIEWPORTS.tablet.width} px`));
+  for (const size of [VIEWPORTS.desk, NARROW_DESK, VIEWPORTS.tablet, VIEWPORTS.phone]) {
+    await page.setViewportSize(size);
+    const broken = await page.evaluate(brokenWords, { mostLetters: LONGEST_VALUE });
+    faults.push(...broken.map((word) => `“${word}” is broken within at ${size.width} px`));
+  }
   for (const size of isFloor ? [VIEWPORTS.tablet, VIEWPORTS.phone] : []) {
     await page.setViewportSize(size);
     const small = await page.evaluate(smallControls, { selector: CONTROLS, leastPx: GLOVE_PX });
@@ -36,6 +45,23 @@ function sidewaysTables() {
   return [...document.querySelectorAll('main table')]
     .filter(({ parentElement }) => parentElement !== null && parentElement.scrollWidth > parentElement.clientWidth + 1)
     .map((table) => table.getAttribute('aria-label') ?? 'without a name');
+}
+
+/** Runs in the page: short words and numbers that stand on more than one line. */
+function brokenWords({ mostLetters }) {
+  const texts = document.createTreeWalker(document.querySelector('main') ?? document.body, NodeFilter.SHOW_TEXT);
+  const broken = [];
+  for (let node = texts.nextNode(); node !== null; node = texts.nextNode()) {
+    for (const { 0: word, index } of node.data.matchAll(/[^\s\u00a0\u2009-]{2,}/g)) {
+      if (word.length > mostLetters || !node.parentElement.checkVisibility()) continue;
+      const range = document.createRange();
+      range.setStart(node, index);
+      range.setEnd(node, index + word.length);
+      const lines = new Set([...range.getClientRects()].filter(({ width }) => width > 0).map(({ top }) => Math.round(top)));
+      if (lines.size > 1) broken.push(word);
+    }
+  }
+  return [...new Set(broken)];
 }
 
 /** Runs in the page: controls that are drawn as such. Words that are links within a text or the breadcrumbs keep the height of their line. */

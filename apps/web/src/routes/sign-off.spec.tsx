@@ -1,4 +1,4 @@
-import { screen, waitFor } from '@testing-library/react';
+import { screen, waitFor, within } from '@testing-library/react';
 import { StatusLineProvider } from '../components/status-line';
 import { closeSession, openSession } from '../lib/session';
 import { type FakeHandler, fakeServer, lostConnection, problem } from '../testing/fake-server';
@@ -104,6 +104,52 @@ describe('the sign-off page', () => {
     expect(screen.getAllByText('10 points')[0]).toBeInTheDocument();
     expect(await screen.findByText('5 of 3 marks count.')).toBeVisible();
     expect(await screen.findByText('1 of 1 waiting, oldest first')).toBeVisible();
+  });
+
+  it('shows every number of what is signed, with its set-up, limits and scope, beside the comparison', async () => {
+    openPage();
+    const signed = await screen.findByRole('region', { name: 'What is signed' });
+    const card = within(signed).getByRole('region', { name: 'Setting of R-0042 revision 4' });
+    expect(card).toHaveTextContent(/Power12.1 W at the work50%.*Speed270mm\/s/);
+    expect(within(signed).getByText('Lens F160 fitted, protective glass clean, extraction on')).toBeVisible();
+    expect(within(signed).getByText('Filled area')).toBeVisible();
+    expect(await screen.findByRole('region', { name: 'What changes' })).toBeVisible();
+    expect(screen.getByRole('link', { name: 'Revision 4' })).toHaveAttribute('href', '/recipes/R-0042/revisions/revision-4');
+  });
+
+  it('shows the whole setting of a first revision, each mark step of it, and the grounds that stand for its evidence', async () => {
+    const grounds = 'Marked so since 2019 without one return.';
+    const first = {
+      ...proposed,
+      ...{ number: 1, comparedWith: null, route: 'earlier experience' as const, grounds },
+      groundsBy: { id: 'member-1', name: 'Hanne Voss' },
+      limits: { notes: 'Not on curved parts.', thicknessMm: { from: 2, to: 5 } },
+      steps: [makeStep(50), { ...makeStep(35), purpose: 'clean-up' as const }],
+      evidence: { basis: [], confirmation: [], runs: [] },
+    };
+    openPage({ 'GET /api/revisions/revision-4': () => ({ body: first }) });
+    const signed = await screen.findByRole('region', { name: 'What is signed' });
+    const cards = within(signed).getAllByRole('region', { name: 'Setting of R-0042 revision 1' });
+    expect(cards.map(({ textContent }) => textContent)).toEqual([
+      expect.stringMatching(/Step 1 of 2: anneal.*50%/),
+      expect.stringMatching(/Step 2 of 2: clean up.*35%/),
+    ]);
+    expect(within(signed).getByText('2 to 5 mm')).toBeVisible();
+    expect(within(signed).getByText('Not on curved parts.')).toBeVisible();
+    const evidence = screen.getByRole('region', { name: 'Evidence' });
+    expect(evidence).toHaveTextContent(`It rests on no coupon.Grounds of Hanne Voss: ${grounds}`);
+    expect(signed.compareDocumentPosition(await screen.findByLabelText('Your password'))).toBe(Node.DOCUMENT_POSITION_FOLLOWING);
+  });
+
+  it('says in a sentence that a signed revision no longer waits', async () => {
+    const others = [1, 2].map((number) => ({ id: `other-${number}`, number }));
+    openPage({
+      'GET /api/revisions/revision-4': () => ({ body: { ...proposed, state: 'approved' } }),
+      'GET /api/sign-offs/queue': () => ({
+        body: { items: others.map((revision) => ({ recipe: proposed.recipe, revision })), nextCursor: null, totalCount: 2 },
+      }),
+    });
+    expect(await screen.findByText('2 others wait')).toBeVisible();
   });
 
   it('signs with the password, the acknowledged cautions and the hash that was checked; it says so only after the answer', async () => {

@@ -5,6 +5,7 @@ import { ReadProblem } from '../components/read-problem';
 import { SkeletonBlock } from '../components/skeletons';
 import { useStatusLine } from '../components/status-line';
 import { TextLink } from '../components/text-link';
+import { RevisionSetting } from '../features/recipes/components/revision-setting';
 import { Review } from '../features/sign-offs/components/review';
 import { type Revision, useRevision, useSignOffQueue } from '../features/sign-offs/sign-offs.api';
 import { formatTime } from '../lib/format';
@@ -47,14 +48,16 @@ function SignOffPage({ revision }: { revision: Revision }) {
       crumbs={[QUEUE_CRUMB, { label: place.words }]}
       meta={
         <span>
-          {number === null ? 'Draft' : `Revision ${number}`}
+          <TextLink to={paths.recipeRevision(recipe.code, revision.id)}>{number === null ? 'Draft' : `Revision ${number}`}</TextLink>
           {submittedAt !== null && `, submitted by ${author.name} on ${formatTime(submittedAt, shop.timeZone)}`}. Reason:{' '}
           <chakra.span color="fg">{reason}</chakra.span>
         </span>
       }
       actions={place.next !== undefined && <TextLink to={paths.signOff(place.next.id)}>Next: {place.next.words}</TextLink>}
     >
-      <Review revision={revision} onReturned={handleReturned} />
+      <Review revision={revision} onReturned={handleReturned}>
+        <RevisionSetting revision={revision} />
+      </Review>
     </Page>
   );
 }
@@ -71,7 +74,13 @@ function usePlaceInQueue(revisionId: string): { words: string; next: { id: strin
       : { id: following.revision.id, words: `${following.recipe.code} revision ${following.revision.number}` };
   if (data === undefined) return { words: 'waiting', next: undefined };
   return {
-    words: index === -1 ? `not waiting, ${data.totalCount} others are` : `${index + 1} of ${data.totalCount} waiting, oldest first`,
+    words: index === -1 ? signedWords(data.totalCount) : `${index + 1} of ${data.totalCount} waiting, oldest first`,
     next,
   };
+}
+
+/** Of a revision that no longer waits: how many others do. */
+function signedWords(waitingCount: number): string {
+  if (waitingCount === 0) return 'nothing waits';
+  return waitingCount === 1 ? 'one other waits' : `${waitingCount} others wait`;
 }

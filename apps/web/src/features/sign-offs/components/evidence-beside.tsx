@@ -1,5 +1,6 @@
 import { chakra, Flex } from '@chakra-ui/react';
 import { couponLayout } from '@proofplate/imaging';
+import { ROUTE_KIND_LABELS } from '@proofplate/recipe-model';
 import type { ReactNode } from 'react';
 import { FactList } from '../../../components/fact-list';
 import { Panel } from '../../../components/page';
@@ -27,14 +28,12 @@ export function EvidenceBeside({ current, proposed }: EvidenceBesideProps) {
   const isOpen = proposed.state === 'in_review';
   return (
     <Panel aria-label="Evidence">
-      <chakra.div
-        display="grid"
-        gridTemplateColumns={{ base: 'minmax(0, 1fr)', sm: current === undefined ? 'minmax(0, 1fr)' : 'repeat(2, minmax(0, 1fr))' }}
-      >
+      <chakra.div display="grid" gridTemplateColumns={`repeat(auto-fit, minmax(min(100%, ${LEAST_SIDE}), 1fr))`} overflow="hidden">
         {current !== undefined && (
           <Side
             title={`${isOpen ? 'Current' : 'Before'}, revision ${current.number}`}
             mark={<StateMark state={MARK_OF[current.state]} />}
+            revision={current}
             cell={cells[0]}
             widestMm={widestMm}
           />
@@ -42,9 +41,9 @@ export function EvidenceBeside({ current, proposed }: EvidenceBesideProps) {
         <Side
           title={`${isOpen ? 'Proposed, revision' : 'Revision'} ${proposed.number}`}
           mark={<StateMark state={MARK_OF[proposed.state]} />}
+          revision={proposed}
           cell={cells[1]}
           widestMm={widestMm}
-          hasRule={current !== undefined}
         />
       </chakra.div>
       {current !== undefined && <Difference current={current} proposed={proposed} />}
@@ -75,41 +74,38 @@ const MARK_OF: Record<Revision['state'], MarkState> = {
   withdrawn: 'withdrawn',
 };
 
-type SideProps = { title: string; mark: ReactNode; cell: EvidenceCell | undefined; widestMm: number; hasRule?: boolean };
+/** A side holds a plate and its cell's numbers; two that do not fit stand one below the other, whatever the screen. */
+const LEAST_SIDE = '256px';
+const LEAST_PIECE = '104px';
 
-function Side({ title, mark, cell, widestMm, hasRule = false }: SideProps) {
+type SideProps = { title: string; mark: ReactNode; revision: Revision; cell: EvidenceCell | undefined; widestMm: number };
+
+function Side({ title, mark, revision, cell, widestMm }: SideProps) {
   return (
-    <chakra.div
-      px="4"
-      py="3"
-      borderLeft={{ sm: hasRule ? 'hairline' : 'none' }}
-      borderTop={{ base: hasRule ? 'hairline' : 'none', sm: 'none' }}
-      borderColor={{ base: 'border', sm: 'border' }}
-    >
+    // The line towards a neighbour falls on the panel's own where there is none.
+    <chakra.div px="4" py="3" ml="-1px" mt="-1px" borderLeft="hairline" borderTop="hairline">
       <Flex justify="space-between" gap="3" wrap="wrap">
         <b>{title}</b>
         {mark}
       </Flex>
       {cell === undefined ? (
-        <chakra.p mt="2" color="fg.muted">
-          It rests on no coupon.
-        </chakra.p>
+        <NoCoupon revision={revision} />
       ) : (
         <chakra.div
           display="grid"
-          gridTemplateColumns={{ base: 'repeat(auto-fit, minmax(130px, 1fr))', sm: 'minmax(0, 200px) minmax(0, 1fr)' }}
+          gridTemplateColumns={`repeat(auto-fit, minmax(${LEAST_PIECE}, 1fr))`}
           gap="3.5"
           mt="2"
           alignItems="start"
         >
-          <div>
+          <chakra.div maxW="200px">
             <EvidencePlate shape={shapeOf(cell)} photo={platePhotoOf(cell.photo, 'large')} chosen={cell.address} widestMm={widestMm} />
             <chakra.p fontSize="sm" lineHeight="sm" pt="1.5">
               <TextLink color="fg.muted" to={`${paths.coupon(cell.couponCode)}?cell=${cell.address}`}>
                 {cell.couponCode}, cell {cell.address}
               </TextLink>
             </chakra.p>
-          </div>
+          </chakra.div>
           <chakra.div maxW="148px">
             <CellCloseUp shape={shapeOf(cell)} photo={platePhotoOf(cell.photo, 'large')} address={cell.address} />
             <CellNumbers cell={cell} />
@@ -117,6 +113,29 @@ function Side({ title, mark, cell, widestMm, hasRule = false }: SideProps) {
         </chakra.div>
       )}
     </chakra.div>
+  );
+}
+
+/** Another route: its grounds are the evidence, in the words of the lead who gave them. */
+function NoCoupon({ revision: { route, grounds, groundsBy } }: { revision: Revision }) {
+  return (
+    <>
+      <chakra.p mt="2">
+        <chakra.b color="straw.fg">{ROUTE_KIND_LABELS[route]}.</chakra.b> It rests on no coupon.
+      </chakra.p>
+      {route !== 'coupons' && (
+        <chakra.p mt="1" overflowWrap="break-word">
+          {grounds === '' ? (
+            <chakra.span color="oxide.fg">No lead has written grounds.</chakra.span>
+          ) : (
+            <>
+              <b>Grounds{groundsBy === null ? '' : ` of ${groundsBy.name}`}: </b>
+              {grounds}
+            </>
+          )}
+        </chakra.p>
+      )}
+    </>
   );
 }
 

@@ -19,14 +19,20 @@ import { type ApprovalChecks, type Revision, useApprovalChecks, useProposedChang
 import { ChangeTable } from './change-table';
 import { EvidenceBeside } from './evidence-beside';
 
-export type ReviewProps = { revision: Revision; onReturned: () => void };
+export type ReviewProps = {
+  revision: Revision;
+  onReturned: () => void;
+  /** The revision itself, with every number: nobody signs what the page does not show. */
+  children: ReactNode;
+};
 
-/** Everything that a signer needs on one page: evidence, what changes, checks, and the signature. */
-export function Review({ revision, onReturned }: ReviewProps) {
+/** Everything that a signer needs on one page: evidence, what changes, the setting itself, checks, and the signature. */
+export function Review({ revision, onReturned, children }: ReviewProps) {
   const comparedId = revision.comparedWith?.id;
   const current = useRevision(comparedId);
   const change = useProposedChange(comparedId, revision.id);
   const checks = useApprovalChecks(revision.id);
+  const isFirst = comparedId === undefined;
   const never = revision.cautions.filter(({ level }) => level === 'never');
   return (
     <>
@@ -42,7 +48,14 @@ export function Review({ revision, onReturned }: ReviewProps) {
         alignItems="start"
       >
         <chakra.div display="grid" gap="4" gridTemplateColumns="minmax(0, 1fr)">
+          {isFirst && (
+            <chakra.p>
+              <b>The first setting of {revision.recipe.code}.</b> There is no approved revision to compare it with.
+            </chakra.p>
+          )}
+          {isFirst && children}
           <EvidenceBeside current={comparedId === undefined ? undefined : current.data} proposed={revision} />
+          {change.error !== undefined && <ReadProblem problem={change.error} thing="what changes" onRetry={() => void change.mutate()} />}
           {change.data !== undefined && (
             <ChangeTable
               comparison={change.data}
@@ -50,7 +63,7 @@ export function Review({ revision, onReturned }: ReviewProps) {
               after={`Revision ${revision.number ?? ''}`}
             />
           )}
-          {comparedId === undefined && <FirstSetting revision={revision} />}
+          {!isFirst && children}
           <NumbersColumns columns={numberColumns(comparedId === undefined ? undefined : current.data, revision)} />
         </chakra.div>
         <chakra.div display="grid" gap="4">
@@ -82,16 +95,6 @@ function numberColumns(current: Revision | undefined, proposed: Revision) {
 
 /** Passing checks whose findings a signer weighs. */
 const WEIGHED = new Set(['basis', 'confirmation', 'new-confirmation', 'criteria', 'photo', 'calibration', 'power-shift']);
-
-function FirstSetting({ revision: { recipe } }: { revision: Revision }) {
-  return (
-    <Panel px="5" py="4">
-      <p>
-        <b>The first setting of {recipe.code}.</b> There is no approved revision to compare it with.
-      </p>
-    </Panel>
-  );
-}
 
 /** How many marks count, over how many lots and days, with lowest, highest and mean. */
 function ConfirmationNumbers({ confirmation }: { confirmation: ApprovalChecks['confirmation'] }) {
