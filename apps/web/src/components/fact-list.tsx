@@ -6,7 +6,7 @@ export type Fact = { label: string; value: ReactNode; unit?: string };
 /** Names left, values right: the measured and the set values of a cell, the facts of a record. */
 export function FactList({ facts }: { facts: readonly Fact[] }) {
   return (
-    <chakra.dl display="grid" gridTemplateColumns="minmax(min-content, 1fr) auto" columnGap="3" fontSize="sm" lineHeight="sm">
+    <chakra.dl display="grid" gridTemplateColumns="minmax(min-content, 1fr) fit-content(68%)" columnGap="3" fontSize="sm" lineHeight="sm">
       {facts.map(({ label, value, unit }) => (
         <Fragment key={label}>
           <chakra.dt color="fg.muted" py="1">

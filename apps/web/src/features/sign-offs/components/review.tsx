@@ -43,8 +43,8 @@ export function Review({ revision, onReturned, children }: ReviewProps) {
       )}
       <chakra.div
         display="grid"
-        gridTemplateColumns={{ base: 'minmax(0, 1fr)', lg: 'minmax(0, 1fr) 392px' }}
-        gap={{ base: '4', lg: '6' }}
+        gridTemplateColumns={{ base: 'minmax(0, 1fr)', xl: 'minmax(0, 1fr) 392px' }}
+        gap={{ base: '4', xl: '6' }}
         alignItems="start"
       >
         <chakra.div display="grid" gap="4" gridTemplateColumns="minmax(0, 1fr)">
