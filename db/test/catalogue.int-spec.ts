@@ -17,6 +17,7 @@ const PERMANENT = [
   'part_set_up',
   'power_calibration',
   'sign_off',
+  'spot_measurement',
   'training_record',
 ];
 

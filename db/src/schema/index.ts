@@ -15,3 +15,4 @@ export { accountEvent, invitation, member, passwordReset, person, refreshToken, 
 export { recipe, revision, revisionEvidence, revisionNow, signOff } from './recipes';
 export { deviation, hold, partSetUp, run, settingRequest } from './runs';
 export { codeCounter, idempotencyKey, outbox, type ShopPolicyRow, shop } from './shops';
+export { spotMeasurement } from './spots';
