@@ -42,6 +42,13 @@ export { interactionTime } from './exposure/interaction-time';
 export { lineCount } from './exposure/line-count';
 export { lineEnergy } from './exposure/line-energy';
 export { lineOverlap } from './exposure/line-overlap';
+export {
+  type FittedMark,
+  type LoggedMark,
+  type MarkingOverheadFit,
+  type MarkingOverheads,
+  markingOverheadFit,
+} from './exposure/marking-overhead-fit';
 export { peakFluence } from './exposure/peak-fluence';
 export { peakIrradiance } from './exposure/peak-irradiance';
 export { pulseEnergy } from './exposure/pulse-energy';
@@ -49,6 +56,7 @@ export { pulseOverlap } from './exposure/pulse-overlap';
 export { pulsePitch } from './exposure/pulse-pitch';
 export { pulsesPerSpot } from './exposure/pulses-per-spot';
 export { type PulsesOverArea, pulsesPerSpotArea } from './exposure/pulses-per-spot-area';
+export { rectangleScanning, type ScannedRectangle, type Scanning } from './exposure/rectangle-scanning';
 export { rectangularPeakPower } from './exposure/rectangular-peak-power';
 export { runIn } from './exposure/run-in';
 export { scansPerSpot } from './exposure/scans-per-spot';

@@ -13,6 +13,8 @@ export type FilledRectangle = {
   readonly lineOverheadMs: number;
   readonly jumpSettleMs: number;
   readonly pauseBetweenMs: number;
+  /** Time that each scan over the area takes beside its lines; absent: none. */
+  readonly scanOverheadMs?: number;
   readonly passes: number;
   readonly fill: Exclude<Fill, 'outline'>;
 };
@@ -29,7 +31,7 @@ const MS_PER_S = 1000;
  *   one direction:   n (W/v + t_line) + (n-1) (sqrt(W^2 + h^2)/v_jump + t_settle)
  *   both directions: n (W/v + t_line) + (n-1) (h/v_jump + t_settle)
  *   crossed:         both directions of W x H and of H x W, with a pause between
- *   p passes:        p T + (p-1) t_pause
+ *   p passes:        p T + (p-1) t_pause, and t_scan for each scan
  *
  * @param mark.widthMm          W along the lines, mm, finite, > 0
  * @param mark.heightMm         H across the lines, mm, finite, > 0
@@ -39,6 +41,7 @@ const MS_PER_S = 1000;
  * @param mark.lineOverheadMs   laser-on and laser-off delay and, if used, run-in and run-out of a line, ms, finite, >= 0
  * @param mark.jumpSettleMs     settle time after a jump, ms, finite, >= 0
  * @param mark.pauseBetweenMs   pause between scans and between passes, ms, finite, >= 0
+ * @param mark.scanOverheadMs   t_scan, ms, finite, >= 0; absent: none
  * @param mark.passes           passes, whole, >= 1
  * @param mark.fill             how the area is scanned
  * @returns whole time and beam-on time, s; duty is the beam-on share of the scanning time, pauses left out
@@ -48,12 +51,12 @@ const MS_PER_S = 1000;
  */
 export function filledRectangleTime(mark: FilledRectangle): MarkingTime {
   const { widthMm, heightMm, lineSpacingUm, speedMmPerS, jumpSpeedMmPerS, passes } = mark;
-  const { lineOverheadMs, jumpSettleMs, pauseBetweenMs } = mark;
+  const { lineOverheadMs, jumpSettleMs, pauseBetweenMs, scanOverheadMs = 0 } = mark;
   requirePositive({ widthMm, heightMm, lineSpacingUm, speedMmPerS, jumpSpeedMmPerS });
-  requireAtLeast(0, { lineOverheadMs, jumpSettleMs, pauseBetweenMs });
+  requireAtLeast(0, { lineOverheadMs, jumpSettleMs, pauseBetweenMs, scanOverheadMs });
   requireWhole({ passes });
   const scans = scansOfOnePass(mark);
-  const scanningS = passes * scans.reduce((sum, scan) => sum + scan.timeS, 0);
+  const scanningS = passes * scans.reduce((sum, scan) => sum + scan.timeS + scanOverheadMs / MS_PER_S, 0);
   const beamOnS = passes * scans.reduce((sum, scan) => sum + scan.beamOnS, 0);
   const pauses = passes * scans.length - 1;
   return { totalS: scanningS + (pauses * pauseBetweenMs) / MS_PER_S, beamOnS, duty: beamOnS / scanningS };

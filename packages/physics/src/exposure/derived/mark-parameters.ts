@@ -30,6 +30,8 @@ export type MarkArea = {
   readonly lineOverheadMs: Quantity;
   readonly jumpSettleMs: Quantity;
   readonly pauseBetweenMs: Quantity;
+  /** What a scan takes beside its lines; absent: none. */
+  readonly scanOverheadMs?: Quantity;
 };
 
 export type MarkParameters = {

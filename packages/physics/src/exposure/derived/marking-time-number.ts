@@ -15,7 +15,7 @@ export function markingTimeNumber(mark: MarkParameters): DerivedNumber {
   const { area, fill, speedMmPerS, lineSpacingUm, passes } = mark;
   if (fill === 'outline') return absent(DESCRIBED, OUTLINE);
   if (area === undefined) return absent(DESCRIBED, { unknownBecause: 'the size of the filled area is not given' });
-  const inputs: Record<Exclude<keyof FilledRectangle, 'fill'>, Quantity> = {
+  const inputs: Record<Exclude<keyof FilledRectangle, 'fill' | 'scanOverheadMs'>, Quantity> = {
     widthMm: area.widthMm,
     heightMm: area.heightMm,
     jumpSpeedMmPerS: area.jumpSpeedMmPerS,
@@ -26,5 +26,8 @@ export function markingTimeNumber(mark: MarkParameters): DerivedNumber {
     lineSpacingUm,
     passes,
   };
-  return derive(DESCRIBED, inputs, { compute: (known) => filledRectangleTime({ ...known, fill }).totalS });
+  const { scanOverheadMs } = area;
+  if (scanOverheadMs === undefined)
+    return derive(DESCRIBED, inputs, { compute: (known) => filledRectangleTime({ ...known, fill }).totalS });
+  return derive(DESCRIBED, { ...inputs, scanOverheadMs }, { compute: (known) => filledRectangleTime({ ...known, fill }).totalS });
 }
