@@ -5,9 +5,10 @@ import { existsSync, readdirSync, readFileSync, statSync, writeFileSync } from '
 import { join } from 'node:path';
 import { CHECKOUT } from './checkout.mjs';
 
-const SOURCE_FOLDERS = ['apps', 'packages', 'db'];
-const NOT_SOURCE = new Set(['node_modules', 'dist', 'test', 'e2e', '.data', 'coverage']);
-const SOURCE_NAME = /\.(?:ts|tsx|css|html|json|woff2|svg)$/;
+/** The science pages are part of the web. */
+const SOURCE_FOLDERS = ['apps', 'packages', 'db', 'docs/science'];
+const NOT_SOURCE = new Set(['node_modules', 'dist', 'test', 'e2e', '.data', 'coverage', 'bench']);
+const SOURCE_NAME = /\.(?:ts|tsx|css|html|json|woff2|svg|md)$/;
 const STAMP = join(CHECKOUT, 'apps/web/dist/.built-from');
 const OUTPUTS = ['apps/api/dist/main.js', 'apps/web/dist/index.html', 'db/dist/index.js'];
 

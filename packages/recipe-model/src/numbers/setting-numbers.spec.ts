@@ -142,6 +142,12 @@ describe('stepNumbers()', () => {
     expect(keyed(setting({ speedMmPerS: 0 })).get('lineEnergy')?.missingBecause).toBe('the scan speed is zero');
   });
 
+  it('marks watts that no calibration stands behind', () => {
+    expect(keyed(setting()).get('workPower')?.lookAt).toEqual([]);
+    const uncalibrated = keyed(setting({}, { power: { watts: 30, basis: 'not calibrated' } }));
+    expect(uncalibrated.get('workPower')?.lookAt).toEqual([expect.stringContaining('Not calibrated')]);
+  });
+
   it('says which spots and lines do not touch', () => {
     const numbers = keyed(setting({ speedMmPerS: 6000, lineSpacingUm: 90 }));
     expect(numbers.get('pulseOverlap')).toMatchObject({ lookAt: [expect.stringContaining('spots do not touch')] });

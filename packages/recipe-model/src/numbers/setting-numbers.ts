@@ -54,7 +54,7 @@ export function stepNumbers(step: NumberedSetting, ground: NumbersGround): StepN
   const pulseWidthNs = step.values.pulseWidthNs?.physical ?? null;
   const limitMj = step.unknownBecause?.pulseWidthNs === undefined ? largestPulseEnergyMj(optics.physical, pulseWidthNs) : null;
   return {
-    numbers: numbers.map((derived) => ({ ...derived, lookAt: lookAtOf(derived, { limitMj, doseCaution }) })),
+    numbers: numbers.map((derived) => ({ ...derived, lookAt: lookAtOf(derived, { limitMj, doseCaution, power: step.power }) })),
     remarks: settingRemarks(step.values, optics.physical, panel),
   };
 }
@@ -74,12 +74,18 @@ function workPowerNumber({ power, values, unknownBecause = {} }: NumberedSetting
   };
 }
 
-type Limits = { readonly limitMj: number | null; readonly doseCaution?: DoseCaution | null | undefined };
+type Limits = {
+  readonly limitMj: number | null;
+  readonly doseCaution?: DoseCaution | null | undefined;
+  readonly power: NumberedSetting['power'];
+};
 
-function lookAtOf(derived: DerivedNumber, { limitMj, doseCaution }: Limits): string[] {
+function lookAtOf(derived: DerivedNumber, { limitMj, doseCaution, power }: Limits): string[] {
   if (derived.missingBecause !== undefined) return [];
   const { key, value, outOfRange } = derived;
   const remarks = outOfRange === undefined ? [] : [`Outside the formula’s range: ${outOfRange}.`];
+  if (key === 'workPower' && power.watts !== null && power.basis === 'not calibrated')
+    remarks.push('Not calibrated: what really reaches the work is known only from a power meter.');
   if (key === 'pulseOverlap' && value < 0)
     remarks.push('The spots do not touch along the line: bare ground stays between them. Lower the speed or raise the frequency.');
   if (key === 'lineOverlap' && value < 0)

@@ -20,7 +20,7 @@ function NumberRow({ id, number, isOpen, onToggle }: NumberRowProps) {
     // The keys are those of the button and of the link in its sheet.
     <li className="row" onKeyDown={handleKeyDown} {...(isOpen ? { 'data-number-open': '' } : {})}>
       <button type="button" ref={button} aria-expanded={isOpen} aria-controls={sheetId} onClick={() => onToggle(id)}>
-        <span className="label">{label}</span>
+        <span className="label">{label}</span>{' '}
         <span className="value">
           {lookAt.length > 0 && (
             <span className="flag">
