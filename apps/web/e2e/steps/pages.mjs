@@ -41,6 +41,9 @@ export const PAGES = {
     run: startRun,
     runs: '/runs',
     account: '/account',
+    science: '/science',
+    'science-page': '/science/pulses',
+    'science-unknown': '/science/no-such-model',
   },
   operator: {
     requests: askedFor,

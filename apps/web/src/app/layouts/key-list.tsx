@@ -2,6 +2,8 @@ import { chakra } from '@chakra-ui/react';
 import { Dialog } from '../../components/dialog';
 import { Keycap } from '../../components/keycap';
 import { Switch } from '../../components/switch';
+import { TextLink } from '../../components/text-link';
+import { paths } from '../../lib/paths';
 import { useShortcutList, useSingleKeySetting } from '../../lib/shortcuts';
 
 /** All keys of the page, under `?`. */
@@ -27,6 +29,11 @@ export function KeyList({ onClose }: { onClose: () => void }) {
           onChange={setAreSingleKeysOn}
           help="Off leaves only those with Ctrl or ⌘."
         />
+        <chakra.p mt="4">
+          <TextLink to={paths.scienceIndex} onClick={onClose}>
+            How the numbers are worked out
+          </TextLink>
+        </chakra.p>
       </chakra.div>
     </Dialog>
   );
