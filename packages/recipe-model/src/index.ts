@@ -32,7 +32,7 @@ export {
   type Sha256,
 } from './ledger/ledger-chain';
 export { type ClosedRange, isAbove, isWithinRange, largestPulseEnergyMj, machineRange } from './numbers/machine-limits';
-export { type AreaMm, markAreaOf } from './numbers/mark-area';
+export { type AreaMm, markAreaOf, type TimedAreaMm } from './numbers/mark-area';
 export { markOfSetting, type NumberedSetting } from './numbers/mark-of-setting';
 export type { Optics } from './numbers/optics';
 export type { SettingNumber } from './numbers/setting-number';
@@ -104,6 +104,10 @@ export {
   type RevisionAction,
   type RevisionState,
 } from './states/revision-state';
+export { type ClockedMark, overheadsFromMarks } from './time/clocked-mark';
+export { type HeadOverheads, headOverheads } from './time/head-overheads';
+export { type MarkTime, markTime, pausesOf, settingTime, type TimeGround } from './time/mark-time';
+export { type MarkedArea, type MarkedAreas, markedAreas } from './time/marked-area';
 export type {
   FrequencyBand,
   FrequencyInterval,

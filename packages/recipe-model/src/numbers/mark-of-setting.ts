@@ -1,7 +1,7 @@
 import type { MarkParameters, MarkSpot, Quantity } from '@proofplate/physics';
 import { PARAMETERS, type ParameterKey } from '../vocabulary/parameters';
 import type { ParameterSet } from '../vocabulary/setting';
-import { type AreaMm, markAreaOf } from './mark-area';
+import { markAreaOf, type TimedAreaMm } from './mark-area';
 import type { Optics } from './optics';
 
 /** A setting, and why some of its values are not known: not recorded on an old plate, typed wrongly, not typed yet. */
@@ -14,12 +14,12 @@ export type NumberedSetting = Pick<ParameterSet, 'values' | 'fill' | 'power' | '
  *
  * @param setting  values as set, fill, watts at the work; reasons for what nobody knows. No frequency and no reason for it: continuous beam
  * @param optics   source, lens and measured spot
- * @param areaMm   filled rectangle in mm, where the marking time is asked for
+ * @param areaMm   filled rectangle in mm with the overheads of the machine, where the marking time is asked for
  * @returns parameters for derivedNumbers()
  * Valid for one mark step; totals over steps are in settingNumbers().
  * Source: own definition; docs/science/scanning.md
  */
-export function markOfSetting(setting: NumberedSetting, optics: Optics, areaMm?: AreaMm): MarkParameters {
+export function markOfSetting(setting: NumberedSetting, optics: Optics, areaMm?: TimedAreaMm): MarkParameters {
   const { values, fill, unknownBecause: reasons = {} } = setting;
   const { frequencyKhz, pulseWidthNs } = values;
   const fillReason = reasons.fill === undefined ? undefined : unknown(reasons.fill);

@@ -1,6 +1,7 @@
 import { type DerivedNumber, derivedNumbers } from '@proofplate/physics';
 import type { Panel } from '../panel/panel';
 import { showNumber } from '../panel/show-number';
+import type { HeadOverheads } from '../time/head-overheads';
 import { isAbove, largestPulseEnergyMj } from './machine-limits';
 import type { AreaMm } from './mark-area';
 import { markOfSetting, type NumberedSetting } from './mark-of-setting';
@@ -22,6 +23,8 @@ export type NumbersGround = {
   readonly doseCaution?: DoseCaution | null;
   /** Filled rectangle, mm, where its marking time is asked for. */
   readonly areaMm?: AreaMm;
+  /** Overheads that hold for the machine; absent: those of its profile. */
+  readonly overheads?: HeadOverheads | undefined;
 };
 
 const SHOWN_DIGITS = 3;
@@ -49,8 +52,11 @@ export function settingNumbers(steps: readonly NumberedSetting[], ground: Number
 
 /** Numbers of one mark step; see settingNumbers(). */
 export function stepNumbers(step: NumberedSetting, ground: NumbersGround): StepNumbers {
-  const { optics, panel, doseCaution, areaMm } = ground;
-  const numbers = [workPowerNumber(step), ...derivedNumbers(markOfSetting(step, optics, areaMm))];
+  const { optics, panel, doseCaution, areaMm, overheads } = ground;
+  const numbers = [
+    workPowerNumber(step),
+    ...derivedNumbers(markOfSetting(step, optics, areaMm === undefined ? undefined : { ...areaMm, overheads })),
+  ];
   const pulseWidthNs = step.values.pulseWidthNs?.physical ?? null;
   const limitMj = step.unknownBecause?.pulseWidthNs === undefined ? largestPulseEnergyMj(optics.physical, pulseWidthNs) : null;
   return {
