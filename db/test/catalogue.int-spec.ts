@@ -12,6 +12,7 @@ const PERMANENT = [
   'coupon_correction',
   'deviation',
   'ledger_event',
+  'logged_time',
   'machine_profile',
   'measurement',
   'part_set_up',

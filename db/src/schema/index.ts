@@ -16,3 +16,4 @@ export { recipe, revision, revisionEvidence, revisionNow, signOff } from './reci
 export { deviation, hold, partSetUp, run, settingRequest } from './runs';
 export { codeCounter, idempotencyKey, outbox, type ShopPolicyRow, shop } from './shops';
 export { spotMeasurement } from './spots';
+export { loggedTime } from './times';
