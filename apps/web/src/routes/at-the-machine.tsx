@@ -37,7 +37,7 @@ function LeadActs({ answer }: { answer: FinderAnswer }) {
   );
 }
 
-const subjectsOf = ({ recipeId, code, title, machine }: FinderAnswer) => ({ recipe: { id: recipeId, name: `${code} ${title}` }, machine });
+const subjectsOf = ({ recipeId, code, title, machine }: FinderAnswer) => ({ recipe: { id: recipeId, code, title }, machine });
 
 function Ask({ choice: { machine, lens, material, finish, effect } }: { choice: Choice }) {
   if (material === undefined) return null;

@@ -1,10 +1,13 @@
 import { chakra } from '@chakra-ui/react';
+import { roleAtLeast } from '@proofplate/recipe-model';
 import { useParams } from 'react-router';
 import { Button, ButtonLink } from '../components/button';
 import { Page } from '../components/page';
 import { ReadProblem } from '../components/read-problem';
 import { SkeletonBlock } from '../components/skeletons';
 import { useArchiving } from '../components/use-archiving';
+import { Holds, PlaceHoldButton } from '../features/holds/components/holds';
+import { useOpenHolds } from '../features/holds/holds.api';
 import { useLenses } from '../features/lenses/lenses.api';
 import { Calibrations } from '../features/machines/components/calibrations';
 import { MachineFacts } from '../features/machines/components/machine-facts';
@@ -14,6 +17,7 @@ import { ProfileHistory } from '../features/machines/components/profile-history'
 import { type Machine, setMachineArchived, useMachine } from '../features/machines/machines.api';
 import { PowerShifts } from '../features/recipes/power/power-shifts';
 import { paths } from '../lib/paths';
+import { useSession } from '../lib/session';
 
 export function Component() {
   const { machineId = '' } = useParams();
@@ -28,6 +32,7 @@ export function Component() {
     >
       {machine === undefined && error === undefined && <SkeletonBlock height="480px" label="Loading the machine" />}
       {machine === undefined && error !== undefined && <ReadProblem problem={error} thing="this machine" onRetry={() => void mutate()} />}
+      {machine !== undefined && <MachineHolds machine={machine} />}
       {machine !== undefined && <Sections machine={machine} />}
     </Page>
   );
@@ -42,8 +47,26 @@ function Meta({ machine: { profile, archivedAt } }: { machine: Machine }) {
   );
 }
 
+/** Open holds on this very machine; undefined until they were read. */
+function useHoldsOn(machineId: string) {
+  return useOpenHolds().data?.items.filter(({ subject, subjectId }) => subject === 'machine' && subjectId === machineId);
+}
+
+function MachineHolds({ machine }: { machine: Machine }) {
+  const { member } = useSession();
+  const holds = useHoldsOn(machine.id) ?? [];
+  if (holds.length === 0) return null;
+  return (
+    <chakra.div mb="4">
+      <Holds holds={holds} subjects={{ machine }} mayRelease={roleAtLeast(member.role, 'lead')} />
+    </chakra.div>
+  );
+}
+
 function Acts({ machine }: { machine: Machine }) {
   const archive = useArchiving(setMachineArchived);
+  const { member } = useSession();
+  const mayHold = useHoldsOn(machine.id)?.length === 0 && machine.archivedAt === null && roleAtLeast(member.role, 'lead');
   return (
     <>
       {machine.allowedActions.includes('archive') && (
@@ -52,6 +75,7 @@ function Acts({ machine }: { machine: Machine }) {
         </Button>
       )}
       {machine.allowedActions.includes('restore') && <Button onClick={() => void archive(machine, false)}>Restore</Button>}
+      {mayHold && <PlaceHoldButton subjects={{ machine }} size="control" />}
       {machine.allowedActions.includes('edit') && (
         <ButtonLink kind="primary" to={paths.editMachine(machine.id)}>
           Change

@@ -47,7 +47,7 @@ const listOf =
 
 let server: ReturnType<typeof fakeServer>;
 function open(at: string, handlers: Parameters<typeof fakeServer>[0], role: Role = 'lead') {
-  server = fakeServer({ 'GET /api/lenses': none, 'GET /api/machines': none, ...handlers });
+  server = fakeServer({ 'GET /api/lenses': none, 'GET /api/machines': none, 'GET /api/holds': none, ...handlers });
   openSession(makeSessionAnswer(role));
   return renderRoutes(routes, at);
 }
@@ -163,6 +163,44 @@ describe('adding a machine', () => {
     await user.clear(label);
     await user.type(label, 'PWR');
     expect(within(screen.getByRole('region', { name: /^Setting of Example/ })).getByText('PWR')).toBeVisible();
+  });
+});
+
+describe('a hold on a machine', () => {
+  const shown = {
+    'GET /api/machines/m1': () => ({ body: machine }),
+    'GET /api/machines/m1/lenses': none,
+    'GET /api/machines/m1/calibrations': none,
+    'GET /api/machines/m1/profiles': none,
+    'GET /api/recipes/power-shifts': none,
+  };
+  const hold = { id: 'h1', subject: 'machine', subjectId: 'm1', reason: 'The mirror is loose', placedBy: 'Hanne Voss' };
+  const elsewhere = { ...hold, id: 'h2', subjectId: 'm2', reason: 'Of another machine' };
+
+  it('stands there before everything else and is released there', async () => {
+    const { user } = open('/equipment/machines/m1', {
+      ...shown,
+      'GET /api/holds': listOf(hold, elsewhere),
+      'POST /api/holds/h1/release': () => ({ body: {} }),
+    });
+    expect(await screen.findByRole('heading', { name: 'Bench 1 is on hold. Start no run.' })).toBeVisible();
+    expect(screen.queryByText('Of another machine')).toBeNull();
+    expect(screen.queryByRole('button', { name: 'Place a hold' })).toBeNull();
+    await user.click(screen.getByRole('button', { name: 'Release the hold' }));
+    expect(screen.getByRole('dialog', { name: 'Release the hold' })).toBeVisible();
+  });
+
+  it('is placed on its page by a lead, and by nobody else', async () => {
+    const { user, unmount } = open('/equipment/machines/m1', { ...shown, 'POST /api/holds': () => ({ status: 201, body: {} }) });
+    await user.click(await screen.findByRole('button', { name: 'Place a hold' }));
+    await user.type(screen.getByLabelText('Reason'), 'The mirror is loose');
+    await user.click(screen.getByRole('button', { name: 'Put Bench 1 on hold' }));
+    await waitFor(() => expect(server.bodies('POST /api/holds')).toEqual([{ machineId: 'm1', reason: 'The mirror is loose' }]));
+    unmount();
+    server.restore();
+    open('/equipment/machines/m1', shown, 'operator');
+    await screen.findByText('Profile version 1');
+    expect(screen.queryByRole('button', { name: 'Place a hold' })).toBeNull();
   });
 });
 

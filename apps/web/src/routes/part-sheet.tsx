@@ -27,7 +27,11 @@ export function Component() {
           <ReadProblem problem={error} thing="the part sheet" onRetry={() => void (run === undefined ? readRun() : readPart())} />
         )
       ) : known.setUp === null ? (
-        <EmptyState kind="none-match" title="No round part is kept with this run" actions={<ButtonLink to={back.to}>{back.label}</ButtonLink>}>
+        <EmptyState
+          kind="none-match"
+          title="No round part is kept with this run"
+          actions={<ButtonLink to={back.to}>{back.label}</ButtonLink>}
+        >
           Set one up on the page of the run first.
         </EmptyState>
       ) : (

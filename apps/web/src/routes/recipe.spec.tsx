@@ -1,4 +1,4 @@
-import { screen, within } from '@testing-library/react';
+import { screen, waitFor, within } from '@testing-library/react';
 import { StatusLineProvider } from '../components/status-line';
 import { closeSession, openSession } from '../lib/session';
 import { type FakeHandler, fakeServer } from '../testing/fake-server';
@@ -80,6 +80,31 @@ describe('the recipe page', () => {
       expect.stringMatching(/Revision 2.*Superseded.*Light at the rim/),
     ]);
     expect(screen.getAllByText(/Approved for use as lead operator, 3 Mar 2026 09:12 CET/)[0]).toBeVisible();
+  });
+
+  it('lets a lead place a hold here, on a button that names the recipe by its code', async () => {
+    const { user } = openPage(
+      '/recipes/R-0042',
+      { 'POST /api/holds': () => ({ status: 201, body: {} }) },
+      { ...recipe, allowedActions: ['hold'] },
+    );
+    await user.click(await screen.findByRole('button', { name: 'Place a hold' }));
+    await user.type(screen.getByLabelText('Reason'), 'Grey on the new lot');
+    await user.click(screen.getByRole('button', { name: 'Put R-0042 on hold' }));
+    await waitFor(() => expect(server.bodies('POST /api/holds')).toEqual([{ recipeId: 'recipe-42', reason: 'Grey on the new lot' }]));
+  });
+
+  it('says in its header that it is on hold and lets a lead release it', async () => {
+    const hold = { id: 'h1', subject: 'recipe', reason: 'Fumes', placedBy: 'Hanne Voss', placedAt: '2026-05-14T08:00:00.000Z' };
+    const held = { ...recipe, isHeld: true, holds: [hold], allowedActions: ['hold'] };
+    const { user } = openPage('/recipes/R-0042', { 'POST /api/holds/h1/release': () => ({ body: {} }) }, held);
+    expect(await screen.findByText('On hold')).toBeVisible();
+    expect(screen.queryByRole('button', { name: 'Place a hold' })).toBeNull();
+    await user.click(screen.getByRole('button', { name: 'Release the hold' }));
+    const dialog = screen.getByRole('dialog');
+    await user.type(within(dialog).getByLabelText('Reason'), 'The filter was full');
+    await user.click(within(dialog).getByRole('button', { name: 'Release the hold' }));
+    await waitFor(() => expect(server.bodies('POST /api/holds/h1/release')).toEqual([{ reason: 'The filter was full' }]));
   });
 
   it('shows a hold before everything else', async () => {

@@ -11,7 +11,7 @@ import { StateMark } from '../components/state-mark';
 import { useStatusLine } from '../components/status-line';
 import { TextLink } from '../components/text-link';
 import { DeviationsPanel } from '../features/deviations/components/deviations-panel';
-import { Holds } from '../features/recipes/components/holds';
+import { Holds, PlaceHoldButton } from '../features/holds/components/holds';
 import { RevisionBody } from '../features/recipes/components/revision-body';
 import { RevisionLadder } from '../features/recipes/components/revision-ladder';
 import { ProposeChangeButton } from '../features/recipes/forms/propose-change-button';
@@ -51,6 +51,7 @@ function RecipePage({ recipe }: { recipe: Recipe }) {
       crumbs={[...CRUMBS, { label: code }]}
       meta={
         <>
+          {recipe.isHeld && <StateMark state="withdrawn">On hold</StateMark>}
           <StateMark state={recipeMark(recipe.state)}>{recipeStateWord(recipe.state)}</StateMark>
           <span>
             {recipe.material.name}, {recipe.finish.name}
@@ -64,7 +65,11 @@ function RecipePage({ recipe }: { recipe: Recipe }) {
       }
       actions={<RecipeActions recipe={recipe} />}
     >
-      <Holds recipe={recipe} />
+      {recipe.holds.length > 0 && (
+        <chakra.div mb="4">
+          <Holds holds={recipe.holds} subjects={{ recipe, machine: recipe.machine }} mayRelease={recipe.allowedActions.includes('hold')} />
+        </chakra.div>
+      )}
       <CheckDue recipe={recipe} />
       {currentRevision === null ? (
         <chakra.div display="grid" gap="4">
@@ -108,7 +113,7 @@ function NoApproved({ recipe: { state, underWay, code } }: { recipe: Recipe }) {
 function RecipeActions({ recipe }: { recipe: Recipe }) {
   const [withdrawing, setWithdrawing] = useState<Recipe['revisions'][number]>();
   const announce = useStatusLine();
-  const { allowedActions, current, currentRevision, underWay, revisions, code } = recipe;
+  const { allowedActions, current, currentRevision, underWay, revisions, code, holds } = recipe;
   const draft = underWay?.state === 'draft' ? underWay : undefined;
   return (
     <>
@@ -118,6 +123,9 @@ function RecipeActions({ recipe }: { recipe: Recipe }) {
             Withdraw revision {revision.number}
           </Button>
         ))}
+      {allowedActions.includes('hold') && !holds.some(({ subject }) => subject === 'recipe') && (
+        <PlaceHoldButton subjects={{ recipe }} size="control" />
+      )}
       {currentRevision?.allowedActions.includes('transfer') && (
         <ButtonLink to={paths.transferRevision(code, currentRevision.id)}>Transfer…</ButtonLink>
       )}

@@ -40,7 +40,7 @@ function Start({ sheet, wantedKind }: { sheet: StartSheet; wantedKind: string | 
   const { recipe, revision, machine, material, finish, effect } = sheet;
   const { ticks, setTick, forget } = useKeptTicks(revision.id);
   const kind = sheet.kinds.find((one) => one === wantedKind) ?? sheet.kinds[0];
-  const subjects = { recipe: { id: recipe.id, name: `${recipe.code} ${recipe.title}` }, machine };
+  const subjects = { recipe, machine };
   return (
     <Page
       title="Start a run"

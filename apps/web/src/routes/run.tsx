@@ -53,7 +53,7 @@ type RunPageProps = { run: Run; onChange: (run: Run) => void };
 function RunPage({ run, onChange }: RunPageProps) {
   const { member } = useSession();
   const { mark, word } = runMark(run);
-  const subjects = { recipe: { id: run.recipe.id, name: `${run.recipe.code} ${run.recipe.title}` }, machine: run.machine };
+  const subjects = { recipe: run.recipe, machine: run.machine };
   const isOpen = run.state === 'started';
   return (
     <Page

@@ -4,8 +4,8 @@ import { Button } from '../../../components/button';
 import { StateShape } from '../../../components/state-mark';
 import { formatTime } from '../../../lib/format';
 import { useSession } from '../../../lib/session';
-import { type HoldSubjects, PlaceHoldDialog, ReleaseHoldDialog } from '../forms/hold-dialogs';
-import type { OpenHold } from '../holds.api';
+import { PlaceHoldDialog, ReleaseHoldDialog } from '../forms/hold-dialogs';
+import { type HoldSubjects, type OpenHold, subjectName } from '../holds.api';
 
 export type HoldsProps = { holds: readonly OpenHold[]; subjects: HoldSubjects; mayRelease: boolean };
 
@@ -36,7 +36,7 @@ export function Holds({ holds, subjects, mayRelease }: HoldsProps) {
                 <StateShape state="withdrawn" size={32} />
               </chakra.span>
               <chakra.div flex="1" minW="200px">
-                <chakra.h2 color="oxide.fg">{subjects[hold.subject].name} is on hold. Start no run.</chakra.h2>
+                <chakra.h2 color="oxide.fg">{subjectName(subjects, hold.subject)} is on hold. Start no run.</chakra.h2>
                 <p>{hold.reason}</p>
                 <chakra.p fontSize="sm" lineHeight="sm" color="fg.muted">
                   Placed by {hold.placedBy}
@@ -57,12 +57,14 @@ export function Holds({ holds, subjects, mayRelease }: HoldsProps) {
   );
 }
 
+export type PlaceHoldButtonProps = { subjects: HoldSubjects; size?: 'control' | 'glove' };
+
 /** A lead stops the use from where it is seen. */
-export function PlaceHoldButton({ subjects }: { subjects: HoldSubjects }) {
+export function PlaceHoldButton({ subjects, size = 'glove' }: PlaceHoldButtonProps) {
   const [isOpen, setIsOpen] = useState(false);
   return (
     <>
-      <Button kind="danger" size="glove" onClick={() => setIsOpen(true)}>
+      <Button kind="danger" size={size} onClick={() => setIsOpen(true)}>
         Place a hold
       </Button>
       {isOpen && <PlaceHoldDialog subjects={subjects} onClose={() => setIsOpen(false)} />}

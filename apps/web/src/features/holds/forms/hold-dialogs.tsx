@@ -5,39 +5,43 @@ import { TextAreaField } from '../../../components/field';
 import { Form, useSummaryForm } from '../../../components/form';
 import { Segmented } from '../../../components/segmented';
 import { useStatusLine } from '../../../components/status-line';
-import { type OpenHold, placeHold, releaseHold } from '../holds.api';
+import { type HoldSubjects, type OpenHold, placeHold, releaseHold, subjectName } from '../holds.api';
 
 const LABELS = { reason: 'Reason' };
 type Values = { reason: string };
 
-export type HoldSubjects = { recipe: { id: string; name: string }; machine: { id: string; name: string } };
-
 export function PlaceHoldDialog({ subjects, onClose }: { subjects: HoldSubjects; onClose: () => void }) {
   const announce = useStatusLine();
-  const [kind, setKind] = useState<'recipe' | 'machine'>('recipe');
+  const { recipe, machine } = subjects;
+  const [kind, setKind] = useState<OpenHold['subject']>(recipe === undefined ? 'machine' : 'recipe');
   const form = useSummaryForm<Values>({ defaultValues: { reason: '' } });
   const { errors, isSubmitting } = form.formState;
-  const { name } = subjects[kind];
+  const name = subjectName(subjects, kind);
   const submit = async ({ reason }: Values, { idempotencyKey }: { idempotencyKey: string }) => {
-    const subject = kind === 'recipe' ? { recipeId: subjects.recipe.id } : { machineId: subjects.machine.id };
-    await placeHold(subject, reason, idempotencyKey);
+    await placeHold(kind === 'recipe' ? { recipeId: recipe?.id ?? '' } : { machineId: machine?.id ?? '' }, reason, idempotencyKey);
     announce(`${name} is on hold. Everybody in the shop gets a mail.`);
     onClose();
   };
   return (
     <Dialog title="Place a hold" onClose={onClose}>
       <Form form={form} labels={LABELS} onSubmit={submit}>
-        <Segmented
-          size="glove"
-          label="What is held"
-          isWide
-          choices={[
-            { value: 'recipe', label: subjects.recipe.name },
-            { value: 'machine', label: subjects.machine.name },
-          ]}
-          value={kind}
-          onChange={setKind}
-        />
+        {recipe !== undefined && machine !== undefined ? (
+          <Segmented
+            size="glove"
+            label="What is held"
+            isWide
+            choices={[
+              { value: 'recipe', label: subjectName(subjects, 'recipe') },
+              { value: 'machine', label: machine.name },
+            ]}
+            value={kind}
+            onChange={setKind}
+          />
+        ) : (
+          <p>
+            On hold: <b>{name}</b>
+          </p>
+        )}
         <TextAreaField
           label={LABELS.reason}
           help="Whoever stands at the machine reads it first. No run starts until a lead releases the hold."
@@ -45,7 +49,7 @@ export function PlaceHoldDialog({ subjects, onClose }: { subjects: HoldSubjects;
           {...form.register('reason', { required: 'Say why: it is the first thing that is read at the machine' })}
         />
         <Button type="submit" kind="danger" size="glove" isBusy={isSubmitting}>
-          Put {name} on hold
+          Put {kind === 'recipe' ? recipe?.code : name} on hold
         </Button>
       </Form>
     </Dialog>
