@@ -1,3 +1,4 @@
+import { useState } from 'react';
 import { useParams, useSearchParams } from 'react-router';
 import { ButtonLink } from '../components/button';
 import { EmptyState } from '../components/empty-state';
@@ -18,8 +19,12 @@ export function Component() {
   const { data: ground, error, mutate } = useTransferGround(revisionId);
   const of = revision === undefined ? code : `${code}, ${revisionName(revision).toLowerCase()}`;
   const [machine, lens] = [search.get('machine'), search.get('lens')];
+  const inAddress = machine === null || lens === null ? undefined : `${machine}/${lens}`;
+  // the address follows a moment later; the choice must not wait for it
+  const [picked, setPicked] = useState<string>();
   const handleChoose = (key: string) => {
     const [machineId = '', lensId = ''] = key.split('/');
+    setPicked(key);
     setSearch({ machine: machineId, lens: lensId }, { replace: true });
   };
   return (
@@ -36,12 +41,7 @@ export function Component() {
       }
     >
       {ground !== undefined ? (
-        <TransferBody
-          revisionId={revisionId}
-          ground={ground}
-          chosen={machine === null || lens === null ? undefined : `${machine}/${lens}`}
-          onChoose={handleChoose}
-        />
+        <TransferBody revisionId={revisionId} ground={ground} chosen={picked ?? inAddress} onChoose={handleChoose} />
       ) : error?.code === 'revision-state' ? (
         <EmptyState
           kind="no-right"

@@ -33,7 +33,7 @@ export function pulsedStep(about: StepAbout, focus: TargetFocus, frequencyKhz: n
   });
   if (!transfer.solvable) {
     const nearest = nearestByDose(about, focus, { ...limits, pulsed: { ...limits, pulseWidthNs } });
-    const reasons = [whyNone(transfer, limits, interval), ...(nearest.reasons ?? [])];
+    const reasons = [whyNone({ transfer, limits, interval, machineName: target.machineName }), ...(nearest.reasons ?? [])];
     return { outcome: 'not equivalent', reasons, interval, proposal: nearest.value ?? null };
   }
   return inInterval(about, focus, { transfer, interval, pulseWidthNs });
@@ -82,14 +82,16 @@ function otherWidth(about: StepAbout, focus: TargetFocus, pulseWidthNs: number):
   return { ...nothing, outcome: 'not equivalent', reasons: [reason, ...(nearest.reasons ?? [])], proposal: nearest.value ?? null };
 }
 
-function whyNone(transfer: PulsedTransfer, limits: PulsedTarget, { endsBy, highestKhz }: FrequencyInterval): TransferReason {
+type Empty = { transfer: PulsedTransfer; limits: PulsedTarget; interval: FrequencyInterval; machineName: string };
+
+function whyNone({ transfer, limits, interval: { endsBy, highestKhz }, machineName }: Empty): TransferReason {
   const energy = `${shown(transfer.pulseEnergyMj)} mJ`;
   if (transfer.solvable || transfer.reason === 'pulse energy above limit') {
-    const text = `The spot asks for pulses of ${energy}; the source gives at most ${shown(limits.maxPulseEnergyMj)} mJ at this pulse width.`;
+    const text = `The spot asks for pulses of ${energy}; ${machineName} gives at most ${shown(limits.maxPulseEnergyMj)} mJ at this pulse width.`;
     return { code: 'pulse energy above limit', text };
   }
   const by = { 'rated power': `the rated ${shown(limits.maxPowerW)} W`, 'scan speed': 'the top speed', 'frequency range': 'its range' };
-  const text = `With pulses of ${energy}, ${by[endsBy]} ends the frequencies at ${shown(highestKhz)} kHz, below the ${shown(limits.minFrequencyKhz)} kHz where the source begins.`;
+  const text = `With pulses of ${energy}, ${by[endsBy]} ends the frequencies at ${shown(highestKhz)} kHz, below the ${shown(limits.minFrequencyKhz)} kHz where ${machineName} begins.`;
   return { code: 'frequency interval empty', text };
 }
 

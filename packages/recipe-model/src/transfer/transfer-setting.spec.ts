@@ -105,7 +105,7 @@ describe('a pulsed setting on another machine', () => {
   it('names the pulse energy that the source does not give, and what comes nearest by dose', () => {
     const [step] = fromReference(target({ maxPulseEnergyMj: [{ pulseWidthNs: null, energyMj: 1 }] }, { measuredSpotUm: 70 })).steps;
     expect(step?.outcome).toBe('not equivalent');
-    expect(step?.reasons[0]?.text).toBe('The spot asks for pulses of 1.53 mJ; the source gives at most 1 mJ at this pulse width.');
+    expect(step?.reasons[0]?.text).toBe('The spot asks for pulses of 1.53 mJ; Bench B gives at most 1 mJ at this pulse width.');
     const dose = step?.proposal?.kept.find(({ key }) => key === 'arealDose');
     const fluence = step?.proposal?.kept.find(({ key }) => key === 'peakFluence');
     expect(Math.abs(dose?.deviation ?? 1)).toBeLessThan(0.005);
@@ -118,7 +118,7 @@ describe('a pulsed setting on another machine', () => {
     expect(step?.interval?.highestKhz).toBeCloseTo(17.777778, 6);
     expect(step?.reasons[0]).toEqual({
       code: 'frequency interval empty',
-      text: 'With pulses of 1.13 mJ, the rated 20 W ends the frequencies at 17.8 kHz, below the 20 kHz where the source begins.',
+      text: 'With pulses of 1.13 mJ, the rated 20 W ends the frequencies at 17.8 kHz, below the 20 kHz where Bench B begins.',
     });
   });
 

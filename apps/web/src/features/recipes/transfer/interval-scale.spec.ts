@@ -33,6 +33,8 @@ describe('intervalWords()', () => {
   it('says that there is none, and that no table holds', () => {
     const none = interval({ isEmpty: true, highestKhz: 17.777, calibrated: [] });
     expect(intervalWords(none, 'Bench 2', undefined)).toContain('No frequency keeps the numbers: the rated power ends at 17.78 kHz.');
+    const tooStrong = interval({ isEmpty: true, calibrated: [] });
+    expect(intervalWords(tooStrong, 'Bench 2', undefined)).toContain('the pulses would have to be stronger than the machine gives');
     expect(intervalWords(interval({ calibrated: [] }), 'Bench 2', undefined)).toContain('No power table holds in it.');
   });
 });

@@ -17,18 +17,22 @@ export function intervalScale({ rangeFromKhz, rangeToKhz }: Pick<FrequencyInterv
 }
 
 const ENDS: Readonly<Record<FrequencyInterval['endsBy'], string>> = {
-  'frequency range': 'the range of the source',
+  'frequency range': 'its own range',
   'rated power': 'the rated power',
   'scan speed': 'the top speed',
 };
+
+/** True where the pulse energy stands in the way, which no frequency changes. */
+export const isByEnergy = ({ isEmpty, lowestKhz, highestKhz }: FrequencyInterval) => isEmpty && highestKhz >= lowestKhz;
 
 /** The drawing in words: what a person reads who does not see it. */
 export function intervalWords(interval: FrequencyInterval, machineName: string, chosenKhz: number | undefined): string {
   const khz = (value: number) => formatNumber(Number(value.toPrecision(4)));
   const { lowestKhz, highestKhz, isEmpty, endsBy, rangeFromKhz, rangeToKhz, sourceKhz, calibrated } = interval;
-  const found = isEmpty
-    ? `No frequency keeps the numbers: ${ENDS[endsBy]} ends at ${khz(highestKhz)} kHz.`
-    : `The numbers are kept from ${khz(lowestKhz)} to ${khz(highestKhz)} kHz, where ${ENDS[endsBy]} ends it.`;
+  const none = isByEnergy(interval)
+    ? 'No frequency keeps the numbers: the pulses would have to be stronger than the machine gives.'
+    : `No frequency keeps the numbers: ${ENDS[endsBy]} ends at ${khz(highestKhz)} kHz.`;
+  const found = isEmpty ? none : `The numbers are kept from ${khz(lowestKhz)} to ${khz(highestKhz)} kHz, where ${ENDS[endsBy]} ends it.`;
   const tables = calibrated.map(({ fromKhz, toKhz }) => `${khz(fromKhz)} to ${khz(toKhz)} kHz`);
   return [
     `Frequencies of ${machineName}, ${khz(rangeFromKhz)} to ${khz(rangeToKhz)} kHz.`,

@@ -13,7 +13,7 @@ import type { TransferGround, TransferTarget } from './transfer.api';
 import { TransferReasons } from './transfer-reasons';
 import { frequencyStepKhz, transferGroups } from './transfer-rows';
 import { TransferTable } from './transfer-table';
-import { asSteps } from './work-out';
+import { asSteps, nameOf } from './work-out';
 
 export type StepTransferProps = {
   ground: TransferGround;
@@ -81,8 +81,8 @@ export function StepTransfer({ ground, target, found, choice, onChoose }: StepTr
               ...{ step, found, sourcePanel: ground.source.panel, targetPanel: target.panel },
               decimalSign: decimalSignOf(shop.locale),
             })}
-            sourceName={ground.source.machine.name}
-            targetName={target.machine.name}
+            sourceName={nameOf(ground.source)}
+            targetName={nameOf(target)}
             isEquivalent={isEquivalent}
           />
           {proposal.leftOut.length > 0 && (
@@ -116,7 +116,7 @@ function FocusChoice({ found: { step, proposal }, choice, onChoose }: Pick<StepT
         name={`focus-${step}`}
         label="Focus offset on the target"
         unit="mm"
-        help="Empty: the same share of the Rayleigh length. In focus the spot is smallest."
+        help="Clear it for the same share of the Rayleigh length. The spot is smallest in focus."
         value={typing ?? typedNumber(shownMm ?? 0, shop.locale)}
         error={read !== undefined && 'message' in read ? read.message : undefined}
         onChange={(event) => handleTyped(event.currentTarget.value)}

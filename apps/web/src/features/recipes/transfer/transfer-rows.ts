@@ -20,7 +20,7 @@ type Sides = { step: MarkStep; found: TransferStep; sourcePanel: Panel; targetPa
 /** What is kept, what is dialled on both panels, and what follows. */
 export function transferGroups(sides: Sides): TransferGroup[] {
   return [
-    { title: 'Kept', rows: keptRows(sides) },
+    { title: sides.found.outcome === 'equivalent' ? 'Kept' : 'What a transfer would keep', rows: keptRows(sides) },
     { title: 'On the panels', rows: panelRows(sides) },
     { title: 'What follows', rows: followingRows(sides) },
   ].filter(({ rows }) => rows.length > 0);
@@ -34,18 +34,21 @@ function keptRows({ found: { proposal } }: Sides): TransferRow[] {
   }));
 }
 
-function panelRows({ step, found: { proposal }, sourcePanel, targetPanel, decimalSign }: Sides): TransferRow[] {
+function panelRows({ step, found: { proposal, source: numbers }, sourcePanel, targetPanel, decimalSign }: Sides): TransferRow[] {
   if (proposal === null) return [];
-  const before = settingRows(step, sourcePanel, decimalSign);
-  const after = settingRows({ ...step, parameters: proposal.parameters }, targetPanel, decimalSign);
-  const rowOf = (rows: typeof before, key: string) => rows.find((row) => row.key === key);
-  const withUnit = (row: (typeof before)[number] | undefined) =>
+  const onSource = settingRows(step, sourcePanel, decimalSign);
+  const onTarget = settingRows({ ...step, parameters: proposal.parameters }, targetPanel, decimalSign);
+  const rowOf = (rows: typeof onSource, key: string) => rows.find((row) => row.key === key);
+  const withUnit = (row: (typeof onSource)[number] | undefined) =>
     row === undefined ? '–' : [row.value, row.unit].filter((part) => part !== undefined && part !== '').join('\u00A0');
   const rows = PARAMETER_KEYS.flatMap((key) => {
-    const [source, target] = [rowOf(before, key), rowOf(after, key)];
+    const [source, target] = [rowOf(onSource, key), rowOf(onTarget, key)];
     if (source === undefined && target === undefined) return [];
     const label = target?.label ?? source?.label ?? PARAMETERS[key].label;
-    return [{ key, label, unit: '', source: withUnit(source), target: withUnit(target), change: '' }];
+    // a source with one pulse width shows none on its panel
+    const isFixedWidth = key === 'pulseWidthNs' && source === undefined && numbers?.pulseWidthNs != null;
+    const before = isFixedWidth ? `${shown(numbers.pulseWidthNs ?? 0)}\u00A0ns, fixed` : withUnit(source);
+    return [{ key, label, unit: '', source: before, target: withUnit(target), change: '' }];
   });
   const fill = FILL_LABELS[step.parameters.fill];
   return [...rows, { key: 'fill', label: 'Fill', unit: '', source: fill, target: fill, change: '' }];
@@ -70,7 +73,7 @@ function row(key: string, label: string, unit: string, source: number | null, ta
 }
 
 /** Beyond what the panel's steps could do. */
-const isNothing = (share: number) => Math.abs(share) < 5e-5;
+const isNothing = (share: number) => Math.abs(share) < 5e-4;
 const percent = (share: number) => formatPercentChange(share, { decimals: Math.abs(share) < 0.1 ? 1 : 0 });
 const shown = (value: number) => formatNumber(Number(value.toPrecision(3)));
 
