@@ -56,6 +56,9 @@ export const PAGES = {
     recipes: '/recipes',
     'new-recipe': '/recipes/new',
     draft: listed('/recipes?state=draft', /^R-\d+/, 'Open the draft'),
+    transfer: '/recipes/R-0007/transfer',
+    'transfer-equivalent': transferTo('R-0007', /Bench 2.*F160/),
+    'transfer-not-equivalent': transferTo('R-0003', /Bench 2.*F254/),
     equipment: '/equipment',
     machine: listed('/equipment', /^Bench 2/),
     materials: '/materials',
@@ -99,6 +102,16 @@ async function askedFor(person) {
   await page.getByText(/see it with your sentence filled in\. What becomes/).waitFor();
   await go('/requests');
   await page.getByText('TW-26-0500').first().waitFor();
+}
+
+/** An approved recipe with the machine and lens chosen that it is to go to. */
+function transferTo(code, target) {
+  return async ({ page, go }) => {
+    await go(`/recipes/${code}`);
+    await page.getByRole('main').getByRole('link', { name: /^Transfer/ }).click();
+    await page.getByRole('radio', { name: target }).click();
+    await page.getByRole('button', { name: /^Create draft/ }).waitFor();
+  };
 }
 
 async function markFirstCell(person) {
