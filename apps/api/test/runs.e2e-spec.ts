@@ -3,7 +3,8 @@ import type { LedgerEventDto } from '../src/ledger/dto/ledger-event.dto';
 import type { RunDto, RunPageDto } from '../src/runs/dto/run.dto';
 import type { StartSheetDto } from '../src/runs/dto/start-sheet.dto';
 import { createTestApp, type TestApp } from './support/app';
-import { type ApprovedRecipe, makeRecipe, withdrawRecipe } from './support/approved-recipe';
+import { type ApprovedRecipe, makeRecipe, supersedeRecipe, withdrawRecipe } from './support/approved-recipe';
+import { asSuperuser } from './support/database';
 import { created, fillStarterContent, makeLens, makeMaterial } from './support/equipment';
 import { makeStaffedShop, type TestMember } from './support/factories';
 import { newKey } from './support/idempotency';
@@ -291,6 +292,36 @@ describe('first piece and finish', () => {
     expect((await act(run, 'finish', { good: 0, scrap: 1 })).statusCode).toBe(200);
   });
 
+  it('says of a run under way that its revision was withdrawn, by whom and why, or superseded', async () => {
+    const [gone, renewed] = [await makeRecipe(test, shop.lead), await makeRecipe(test, shop.lead)];
+    const runs = [await started(gone), await started(renewed)];
+    expect(runs.map(({ stop }) => stop)).toEqual([null, null]);
+    await withdrawRecipe(test, shop.lead, gone, 'The tint came off');
+    await supersedeRecipe(test, shop.lead, renewed);
+    const [withdrawn, superseded] = await Promise.all(runs.map(async ({ code }) => (await get(`/api/runs/${code}`)).json<RunDto>()));
+    expect(withdrawn?.stop).toEqual({
+      ...{ because: 'withdrawn', by: shop.lead.printedName, reason: 'The tint came off' },
+      ...{ at: expect.stringMatching(/Z$/), approvedNumber: null },
+    });
+    expect(superseded).toMatchObject({
+      stop: { because: 'superseded', approvedNumber: 2 },
+      allowedActions: ['tick', 'set-up-part', 'finish', 'bad-result'],
+    });
+    expectProblem(await act(runs[1] as RunDto, 'first-piece', { ok: true }), 409, 'not-approved');
+    expect((await act(runs[1] as RunDto, 'finish', { good: 0, scrap: 1 })).json<RunDto>().stop).toBeNull();
+  });
+
+  it('carries the cautions of its work, those of all work told apart', async () => {
+    const ring = await makeRecipe(test, shop.lead);
+    const words = { subject: 'Clamp it', text: 'It slips.', source: 'The shop' };
+    await created(test, shop.lead, '/api/cautions', { level: 'care', ...words, appliesTo: { materialIds: [ring.material.id] } });
+    const { cautions } = await started(ring);
+    expect(cautions.filter(({ isGeneral }) => isGeneral).length).toBeGreaterThan(0);
+    expect(cautions.filter(({ isGeneral }) => !isGeneral)).toMatchObject([words]);
+    const sheet = (await get(`/api/runs/start-sheet/${ring.revisionId}`)).json<StartSheetDto>();
+    expect(sheet.cautions).toEqual(cautions);
+  });
+
   it('judges the pieces of a confirmation run by the criteria of the coupon, and needs at least one', async () => {
     const draft = await makeRecipe(test, shop.lead, { state: 'draft' });
     const run = await started(draft, { kind: 'confirmation', lot: 'B15' }, shop.operator);
@@ -358,6 +389,22 @@ describe('POST /api/runs/:id/bad-result', () => {
     await act(run, 'finish', { good: 0, scrap: 5 });
     const later = (await act(run, 'bad-result', { outcome: 'peeled', note: 'Customer sent one back' }, shop.operator)).json<RunDto>();
     expect(later).toMatchObject({ state: 'finished', scrap: 5, badResult: { outcome: 'peeled', byName: shop.operator.printedName } });
+  });
+
+  it('is told to every lead by letter, in the transaction of the act, but not to whoever tells it', async () => {
+    const run = await started(dial, { jobReference: 'J-26-0433' });
+    await act(run, 'bad-result', { outcome: 'peeled', note: 'Comes off with tape' }, shop.lead);
+    const letters = await asSuperuser(
+      test,
+      (sql) => sql<{ payload: { to: { address: string } } }[]>`
+        select payload from outbox where kind = 'bad-result' and payload ->> 'runCode' = ${run.code} and shop_id = ${shop.lead.shopId}`,
+    );
+    expect(letters.map(({ payload }) => payload)).toEqual([
+      expect.objectContaining({
+        to: expect.objectContaining({ address: shop.owner.email }),
+        ...{ outcome: 'Peeled', note: 'Comes off with tape', jobReference: 'J-26-0433', by: shop.lead.printedName },
+      }),
+    ]);
   });
 
   it('takes no good news', async () => {

@@ -2,7 +2,7 @@ import type { Letter } from './letter';
 import type { Mail } from './mail-kinds';
 import type { MailLinks } from './mail-links';
 import { invitationLetter, passwordResetLetter } from './templates/account-letters';
-import { approvedLetter, holdLetter, returnedLetter, submittedLetter, withdrawnLetter } from './templates/recipe-letters';
+import { approvedLetter, badResultLetter, holdLetter, returnedLetter, submittedLetter, withdrawnLetter } from './templates/recipe-letters';
 
 export function composeLetter(mail: Mail, links: MailLinks): Letter {
   switch (mail.kind) {
@@ -20,5 +20,7 @@ export function composeLetter(mail: Mail, links: MailLinks): Letter {
       return withdrawnLetter(mail.payload, links);
     case 'hold-placed':
       return holdLetter(mail.payload, links);
+    case 'bad-result':
+      return badResultLetter(mail.payload, links);
   }
 }

@@ -27,6 +27,20 @@ const MAILS: Mail[] = [
   { kind: 'revision-returned', payload: { ...revision, reason: EVIL } },
   { kind: 'revision-withdrawn', payload: { ...revision, reason: EVIL, stayingNumber: null } },
   { kind: 'hold-placed', payload: { to, shopName: EVIL, subject: EVIL, reason: EVIL, by: EVIL } },
+  {
+    kind: 'bad-result',
+    payload: {
+      to,
+      shopName: EVIL,
+      runCode: 'J-0007',
+      setting: EVIL,
+      machine: EVIL,
+      jobReference: EVIL,
+      outcome: 'Faint',
+      note: EVIL,
+      by: EVIL,
+    },
+  },
 ];
 
 describe.each(MAILS.map((mail) => [mail.kind, mail] as const))('the mail %s', (_, mail) => {

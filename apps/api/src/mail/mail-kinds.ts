@@ -32,6 +32,17 @@ export type MailPayloads = {
     readonly reason: string;
     readonly by: string;
   };
+  /** To every lead: what came out wrong at a machine. */
+  readonly 'bad-result': Addressed & {
+    readonly runCode: string;
+    /** "R-0007 Dark mark on 316L, revision 2". */
+    readonly setting: string;
+    readonly machine: string;
+    readonly jobReference: string;
+    readonly outcome: string;
+    readonly note: string;
+    readonly by: string;
+  };
 };
 
 export type MailKind = keyof MailPayloads;

@@ -11,6 +11,7 @@ export function mailLinks(publicOrigin: string) {
     revision: (recipeId: string, revisionId: string) =>
       page(`/recipes/${encodeURIComponent(recipeId)}/revisions/${encodeURIComponent(revisionId)}`),
     signOff: () => page('/sign-off'),
+    run: (code: string) => page(`/runs/${encodeURIComponent(code)}`),
     atTheMachine: () => page('/'),
   };
 }

@@ -7,6 +7,9 @@ const USABLE: Readonly<Record<RunKind, readonly RevisionState[]>> = {
   confirmation: ['draft', 'in_review', 'scheduled', 'approved'],
 };
 
+/** Nothing more is marked with it, also where a run is under way: it was withdrawn, or a newer revision took its place. */
+export const stopsRun = (state: RevisionState): boolean => state === 'withdrawn' || state === 'superseded';
+
 /** Why this kind of run may not cite a revision in that state; undefined: it may. */
 export function whyNotUsable(kind: RunKind, state: RevisionState): string | undefined {
   if (USABLE[kind].includes(state)) return undefined;

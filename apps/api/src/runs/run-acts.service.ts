@@ -8,6 +8,7 @@ import { LedgerService } from '../ledger/ledger.service';
 import type { CitedRevision } from './cited-revisions.repository';
 import type { RunDto } from './dto/run.dto';
 import type { StartRunDto } from './dto/start-run.dto';
+import { RunSurroundingsService } from './run-surroundings.service';
 import { RunFinishedError, RunNotFoundError } from './runs.errors';
 import { toRunDto } from './runs.mapper';
 import { readsAllRuns } from './runs.policy';
@@ -18,6 +19,7 @@ import { type RunRow, RunsRepository } from './runs.repository';
 export class RunActs {
   constructor(
     private readonly runs: RunsRepository,
+    private readonly surroundings: RunSurroundingsService,
     private readonly codes: Codes,
     private readonly ledger: LedgerService,
   ) {}
@@ -53,8 +55,7 @@ export class RunActs {
   async toDto(tx: Tx, actor: Actor, key: string): Promise<RunDto> {
     const view = await this.runs.findView(tx, actor.shopId, key);
     if (view === undefined) throw new RunNotFoundError();
-    const holds = await this.runs.openHolds(tx, actor.shopId, { recipeId: view.recipe.id, machineId: view.machine.id });
-    return toRunDto(view, holds, actor);
+    return toRunDto(view, await this.surroundings.around(tx, actor.shopId, view), actor);
   }
 
   /** @throws RunNotFoundError also for another shop's run, and for a trainee somebody else's */

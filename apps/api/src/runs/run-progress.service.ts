@@ -9,8 +9,9 @@ import { DeviationsService } from './deviations.service';
 import type { RunDto } from './dto/run.dto';
 import type { FinishRunDto, FirstPieceActDto, MeasurePieceDto, TellBadResultDto } from './dto/run-acts.dto';
 import type { TickRunDto } from './dto/start-run.dto';
-import { whyNotUsable } from './revision-use';
+import { stopsRun, whyNotUsable } from './revision-use';
 import { RunActs } from './run-acts.service';
+import { RunLettersService } from './run-letters.service';
 import { tickProblems } from './run-ticks';
 import { FirstPieceNotReleasedError, NotReadyToStartError, OnHoldError, RevisionNotUsableError } from './runs.errors';
 import { type RunChange, type RunRow, RunsRepository } from './runs.repository';
@@ -25,6 +26,7 @@ export class RunProgressService {
     private readonly deviations: DeviationsService,
     private readonly ledger: LedgerService,
     private readonly acts: RunActs,
+    private readonly letters: RunLettersService,
   ) {}
 
   async tick(actor: Actor, id: string, { tick, untick }: TickRunDto): Promise<RunDto> {
@@ -72,12 +74,14 @@ export class RunProgressService {
     });
   }
 
-  /** A bad result is told of a run at any time, also after its end. */
+  /** A bad result is told of a run at any time, also after its end; every lead gets a letter about it. */
   async tellBadResult(actor: Actor, id: string, { outcome, note }: TellBadResultDto): Promise<RunDto> {
     return this.unitOfWork.run(actor, async (tx) => {
       const run = await this.acts.lockOwn(tx, actor, id);
       const badResult = { outcome, note, at: new Date().toISOString(), byName: actor.printedName };
-      return this.write(tx, actor, run, { action: 'run.bad-result-told', change: { badResult }, told: badResult });
+      const dto = await this.write(tx, actor, run, { action: 'run.bad-result-told', change: { badResult }, told: badResult });
+      await this.letters.badResult(tx, actor, dto);
+      return dto;
     });
   }
 
@@ -86,8 +90,8 @@ export class RunProgressService {
     const revision = await this.cited.lock(tx, actor.shopId, run.revisionId);
     const holds = await this.runs.openHolds(tx, actor.shopId, run);
     if (holds.length > 0) throw new OnHoldError(holds);
-    const withdrawn = revision?.state === 'withdrawn' ? whyNotUsable(run.kind, revision.state) : undefined;
-    if (withdrawn !== undefined) throw new RevisionNotUsableError(withdrawn);
+    const stopped = revision !== undefined && stopsRun(revision.state) ? whyNotUsable(run.kind, revision.state) : undefined;
+    if (stopped !== undefined) throw new RevisionNotUsableError(stopped);
   }
 
   private async write(

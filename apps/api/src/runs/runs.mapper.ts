@@ -1,7 +1,8 @@
 import type { Actor } from '../common/actor';
 import { revisionNumbers } from '../recipes/step-numbers';
 import type { RunDto, RunSummaryDto } from './dto/run.dto';
-import type { OpenHold } from './runs.errors';
+import { stopsRun } from './revision-use';
+import type { RunSurroundings } from './run-surroundings.service';
 import { runActions } from './runs.policy';
 import type { RunView } from './runs.repository';
 
@@ -29,7 +30,7 @@ export function toRunSummary({ run, recipe, revision, machine, material, started
   };
 }
 
-export function toRunDto(view: RunView, holds: readonly OpenHold[], actor: Pick<Actor, 'role' | 'memberId'>): RunDto {
+export function toRunDto(view: RunView, { holds, stop, cautions }: RunSurroundings, actor: Pick<Actor, 'role' | 'memberId'>): RunDto {
   const { run, revision, finish, effect, lensFitted, deviation, panel, startedBy } = view;
   // a confirmation run keeps the steps of a draft that may since have changed
   const steps = run.steps ?? revision.content.steps;
@@ -39,6 +40,8 @@ export function toRunDto(view: RunView, holds: readonly OpenHold[], actor: Pick<
     effect,
     lensFitted,
     holds: holds.map(({ id, subject, reason, placedBy }) => ({ id, subject, reason, placedBy })),
+    stop,
+    cautions: [...cautions],
     panel,
     steps,
     ...revisionNumbers(steps, view),
@@ -52,7 +55,7 @@ export function toRunDto(view: RunView, holds: readonly OpenHold[], actor: Pick<
     allowedActions: runActions(actor, {
       state: run.state,
       startedBy: startedBy.id,
-      isStopped: holds.length > 0 || revision.state === 'withdrawn',
+      isStopped: holds.length > 0 || stopsRun(revision.state),
     }),
   };
 }

@@ -10,7 +10,7 @@ export const readsAllRuns = ({ role }: Pick<Actor, 'role'>) => roleAtLeast(role,
 /** Confirmation runs belong to whoever may draft and prove settings. */
 export const mayStart = ({ role }: Pick<Actor, 'role'>, kind: RunKind) => kind !== 'confirmation' || roleAtLeast(role, 'operator');
 
-/** What the member may do with a run. `isStopped`: under a hold, or its revision was withdrawn. */
+/** What the member may do with a run. `isStopped`: under a hold, or its revision was withdrawn or superseded. */
 export function runActions(
   actor: Acting,
   run: { readonly state: string; readonly startedBy: string; readonly isStopped: boolean },

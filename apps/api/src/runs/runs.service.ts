@@ -12,6 +12,7 @@ import type { StartRunDto } from './dto/start-run.dto';
 import type { StartSheetDto } from './dto/start-sheet.dto';
 import { whyNotUsable } from './revision-use';
 import { RunActs } from './run-acts.service';
+import { RunSurroundingsService } from './run-surroundings.service';
 import { tickProblems } from './run-ticks';
 import { ClientIdTakenError, NotReadyToStartError, OnHoldError, ReviewOverdueError, RevisionNotUsableError } from './runs.errors';
 import { mayStart } from './runs.policy';
@@ -26,6 +27,7 @@ export class RunsService {
     private readonly cited: CitedRevisionsService,
     private readonly deviations: DeviationsService,
     private readonly cautions: CautionsService,
+    private readonly surroundings: RunSurroundingsService,
     private readonly acts: RunActs,
   ) {}
 
@@ -45,6 +47,7 @@ export class RunsService {
         lenses: await this.cited.lenses(tx, actor.shopId),
         steps: isHidden ? [] : content.steps,
         setUpSteps: isHidden ? [] : content.setUpSteps,
+        cautions: await this.surroundings.cautionsOf(tx, actor.shopId, { ...revision, sourceKind: machine.sourceKind }),
         holds,
         deviations: await this.deviations.liveOf(tx, actor.shopId, id),
         kinds: RUN_KINDS.filter((kind) => mayStart(actor, kind) && whyNotUsable(kind, state) === undefined),

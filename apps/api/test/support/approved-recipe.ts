@@ -176,11 +176,39 @@ async function citeCell(tx: Parameters<Parameters<TestApp['unitOfWork']['run']>[
 }
 
 /** Takes an approved recipe out of use, as withdrawing does in the tables. */
-export async function withdrawRecipe(test: TestApp, lead: TestMember, { revisionId }: ApprovedRecipe): Promise<void> {
-  await test.unitOfWork.run({ shopId: lead.shopId }, async (tx) => {
+export async function withdrawRecipe(test: TestApp, lead: TestMember, { revisionId }: ApprovedRecipe, reason = ''): Promise<void> {
+  const { shopId, id: memberId, printedName, role } = lead;
+  await test.unitOfWork.run({ shopId }, async (tx) => {
     await tx
       .update(revision)
       .set({ state: 'withdrawn' })
-      .where(and(eq(revision.shopId, lead.shopId), eq(revision.id, revisionId)));
+      .where(and(eq(revision.shopId, shopId), eq(revision.id, revisionId)));
+    const act = { meaning: 'withdrawn', comment: reason, contentHash: 'as signed', ledgerHashBefore: 'as it was', method: 'password' };
+    await tx.insert(signOff).values({ shopId, revisionId, memberId, printedName, role, ...act });
+  });
+}
+
+/** Puts a second revision with the same content in the place of the approved one. */
+export async function supersedeRecipe(test: TestApp, lead: TestMember, { recipeId, revisionId }: ApprovedRecipe): Promise<void> {
+  const { shopId, id: createdBy } = lead;
+  await test.unitOfWork.run({ shopId }, async (tx) => {
+    const become = (id: string, change: Partial<typeof revision.$inferInsert>) =>
+      tx
+        .update(revision)
+        .set(change)
+        .where(and(eq(revision.shopId, shopId), eq(revision.id, id)));
+    const [old] = await tx
+      .select({ content: revision.content, profileId: revision.profileId })
+      .from(revision)
+      .where(and(eq(revision.shopId, shopId), eq(revision.id, revisionId)));
+    if (old === undefined) throw new Error(`no revision ${revisionId}`);
+    const [next] = await tx
+      .insert(revision)
+      .values({ shopId, createdBy, recipeId, ...old })
+      .returning({ id: revision.id });
+    const nextId = next?.id ?? '';
+    await become(nextId, { state: 'in_review', number: 2, contentHash: randomUUID().replaceAll('-', '') });
+    await become(revisionId, { state: 'superseded' });
+    await become(nextId, { state: 'approved' });
   });
 }

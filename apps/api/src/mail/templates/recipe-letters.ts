@@ -64,6 +64,21 @@ export function holdLetter({ to, shopName, subject, reason, by }: MailPayloads['
   };
 }
 
+export function badResultLetter(mail: MailPayloads['bad-result'], links: MailLinks): Letter {
+  const { to, shopName, runCode, setting, machine, jobReference, outcome, note, by } = mail;
+  const job = jobReference === '' ? '' : `, job ${jobReference}`;
+  return {
+    subject: `Bad result: ${runCode}, ${outcome.toLowerCase()}`,
+    paragraphs: [
+      greeting(to.name),
+      `${by} told a bad result at ${shopName}: ${outcome.toLowerCase()}. Run ${runCode}${job} on ${machine} with ${setting}.`,
+      ...said(by, note),
+      'Look at the pieces. A hold stops the recipe or the machine until it is clear what went wrong.',
+    ],
+    action: { label: 'Open the run', url: links.run(runCode) },
+  };
+}
+
 function name({ recipeCode, recipeTitle, revisionNumber }: RevisionMail): string {
   return `${recipeCode} ${recipeTitle}, revision ${revisionNumber}`;
 }

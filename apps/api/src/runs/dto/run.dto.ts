@@ -13,6 +13,7 @@ import { NamedDto } from '../../coupons/dto/coupon.dto';
 import { PanelDto } from '../../machines/dto/panel.dto';
 import { DerivedNumberDto, StepNumbersDto } from '../../recipes/dto/derived-number.dto';
 import { MarkStepDto, SetUpStepDto } from '../../recipes/dto/mark-step.dto';
+import { RunCautionDto, RunStopDto } from './run-surroundings.dto';
 
 export const RUN_STATES = ['started', 'finished', 'abandoned'] as const;
 export type RunState = (typeof RUN_STATES)[number];
@@ -104,6 +105,9 @@ export class RunDto extends RunSummaryDto {
   @ApiProperty({ type: NamedDto, description: 'Effect' }) effect: NamedDto;
   @ApiProperty({ type: NamedDto, nullable: true, description: 'Lens that was fitted' }) lensFitted: NamedDto | null;
   @ApiProperty({ type: [RunHoldDto], description: 'Open holds; they come before everything else' }) holds: RunHoldDto[];
+  @ApiProperty({ type: RunStopDto, nullable: true, description: 'Why a run under way must go no further; null: nothing stops it' })
+  stop: RunStopDto | null;
+  @ApiProperty({ type: [RunCautionDto], description: 'Cautions of the work, never first' }) cautions: RunCautionDto[];
   @ApiProperty({ type: PanelDto, description: 'The fields of the machine’s control, in its order' }) panel: PanelDto;
   @ApiProperty({ type: [MarkStepDto], description: 'Mark steps as dialled in' }) steps: MarkStepDto[];
   @ApiProperty({ type: [StepNumbersDto], description: 'Numbers that follow from each mark step' }) derived: StepNumbersDto[];

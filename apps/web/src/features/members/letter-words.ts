@@ -6,6 +6,7 @@ const LETTERS: Readonly<Record<string, { about: string; wayOut: string }>> = {
   'revision-approved': { about: 'Revision approved', wayOut: 'It is in force all the same. Tell the person.' },
   'revision-returned': { about: 'Revision returned', wayOut: 'The reason stands on the recipe’s page. Tell the person.' },
   'revision-withdrawn': { about: 'Revision withdrawn', wayOut: 'The machine shows it already. Tell whoever is at work with it.' },
+  'bad-result': { about: 'Bad result at a machine', wayOut: 'It stands under Runs all the same. Tell the person.' },
   'hold-placed': { about: 'Hold placed', wayOut: 'The machine shows it already. Tell whoever is at work with it.' },
 };
 
