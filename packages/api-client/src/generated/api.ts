@@ -3185,7 +3185,7 @@ export interface components {
              * @description What is measured
              * @enum {string}
              */
-            quantity: "lightness" | "a" | "b" | "chroma" | "hue-angle" | "contrast" | "delta-e-2000" | "evenness" | "depth" | "roughness-ra" | "roughness-rz" | "line-width" | "code-grade" | "tape-class" | "wipe-test" | "salt-spray-hours";
+            quantity: "lightness" | "a" | "b" | "chroma" | "hue-angle" | "contrast" | "delta-e-2000" | "evenness" | "depth" | "roughness-ra" | "roughness-rz" | "line-width" | "crater-diameter" | "code-grade" | "tape-class" | "wipe-test" | "salt-spray-hours";
             /**
              * @description How the measured value is compared
              * @enum {string}
@@ -3235,7 +3235,7 @@ export interface components {
              * @description What is measured
              * @enum {string}
              */
-            quantity: "lightness" | "a" | "b" | "chroma" | "hue-angle" | "contrast" | "delta-e-2000" | "evenness" | "depth" | "roughness-ra" | "roughness-rz" | "line-width" | "code-grade" | "tape-class" | "wipe-test" | "salt-spray-hours";
+            quantity: "lightness" | "a" | "b" | "chroma" | "hue-angle" | "contrast" | "delta-e-2000" | "evenness" | "depth" | "roughness-ra" | "roughness-rz" | "line-width" | "crater-diameter" | "code-grade" | "tape-class" | "wipe-test" | "salt-spray-hours";
             /**
              * @description How the measured value is compared
              * @enum {string}
@@ -4397,7 +4397,7 @@ export interface components {
          * @description What was measured
          * @enum {string}
          */
-        MeasurementQuantity: "lightness" | "a" | "b" | "chroma" | "hue-angle" | "contrast" | "delta-e-2000" | "evenness" | "depth" | "roughness-ra" | "roughness-rz" | "line-width" | "code-grade" | "tape-class" | "wipe-test" | "salt-spray-hours";
+        MeasurementQuantity: "lightness" | "a" | "b" | "chroma" | "hue-angle" | "contrast" | "delta-e-2000" | "evenness" | "depth" | "roughness-ra" | "roughness-rz" | "line-width" | "crater-diameter" | "code-grade" | "tape-class" | "wipe-test" | "salt-spray-hours";
         /**
          * @description How it was measured
          * @enum {string}
@@ -6140,6 +6140,26 @@ export interface components {
             /** @description Send as cursor for the next page; null at the end */
             nextCursor: string | null;
         };
+        RunCautionDto: {
+            /**
+             * Format: uuid
+             * @description Id of the caution
+             */
+            id: string;
+            /**
+             * @description never: it must not be marked
+             * @enum {string}
+             */
+            level: "never" | "care";
+            /** @description What to do, first */
+            subject: string;
+            /** @description Why */
+            text: string;
+            /** @description Where it comes from */
+            source: string;
+            /** @description true: it holds for all work, not for this one in particular */
+            isGeneral: boolean;
+        };
         RunHoldDto: {
             /**
              * Format: uuid
@@ -6213,6 +6233,8 @@ export interface components {
             steps: components["schemas"]["MarkStepDto"][];
             /** @description Set-up steps */
             setUpSteps: components["schemas"]["SetUpStepDto"][];
+            /** @description Cautions of the work, never first */
+            cautions: components["schemas"]["RunCautionDto"][];
             /** @description Open holds; nothing starts while there is one */
             holds: components["schemas"]["RunHoldDto"][];
             /** @description Deviations that a run may cite now */
@@ -6260,6 +6282,24 @@ export interface components {
              * @description Deviation that the run cites
              */
             deviationId?: string;
+        };
+        RunStopDto: {
+            /**
+             * @description What became of the revision
+             * @enum {string}
+             */
+            because: "withdrawn" | "superseded";
+            /** @description Who withdrew it; null: a newer revision took its place */
+            by: string | null;
+            /**
+             * Format: date-time
+             * @description When it was withdrawn
+             */
+            at: string | null;
+            /** @description Why it was withdrawn; may be empty */
+            reason: string;
+            /** @description Number of the revision that is approved now; null: none */
+            approvedNumber: number | null;
         };
         RunMeasurementDto: {
             /** @description Number of the piece from 1 */
@@ -6350,6 +6390,10 @@ export interface components {
             lensFitted: components["schemas"]["NamedDto"] | null;
             /** @description Open holds; they come before everything else */
             holds: components["schemas"]["RunHoldDto"][];
+            /** @description Why a run under way must go no further; null: nothing stops it */
+            stop: components["schemas"]["RunStopDto"] | null;
+            /** @description Cautions of the work, never first */
+            cautions: components["schemas"]["RunCautionDto"][];
             /** @description The fields of the machine’s control, in its order */
             panel: components["schemas"]["PanelDto"];
             /** @description Mark steps as dialled in */
