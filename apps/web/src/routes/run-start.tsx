@@ -1,10 +1,10 @@
 import { chakra } from '@chakra-ui/react';
 import { roleAtLeast } from '@proofplate/recipe-model';
 import { useNavigate, useSearchParams } from 'react-router';
+import { ButtonLink } from '../components/button';
 import { Page } from '../components/page';
 import { ReadProblem } from '../components/read-problem';
 import { SkeletonBlock } from '../components/skeletons';
-import { TextLink } from '../components/text-link';
 import { StartDeviations } from '../features/deviations/components/deviations-panel';
 import { Holds } from '../features/holds/components/holds';
 import { RunSetUp } from '../features/runs/components/run-steps';
@@ -66,9 +66,9 @@ function Start({ sheet, wantedKind }: { sheet: StartSheet; wantedKind: string | 
         <chakra.div display="grid" gap="4">
           <chakra.div display="grid" gap="4">
             <RunSetUp shown={sheet} ticks={ticks} onTick={setTick} />
-            <p>
-              Round part? <TextLink to={paths.partOfRevision(revision.id)}>Work out its part set-up</TextLink>
-            </p>
+            <ButtonLink to={paths.partOfRevision(revision.id)} size="glove">
+              Set up a round part
+            </ButtonLink>
           </chakra.div>
           {revision.state === 'approved' && (
             <StartDeviations

@@ -82,13 +82,20 @@ export function lengthFigure(mm: number, unit: LengthUnit, locale: string): stri
   return formatNumber(Number(lengthIn(mm, unit).toFixed(DECIMALS[unit])), { locale });
 }
 
+/** "16.364°": the sign stands close. */
+export function degrees(angle: number, decimals: number, locale: string): string {
+  return `${formatNumber(Number(angle.toFixed(decimals)), { locale })}°`;
+}
+
 /** A number of the table in the unit that is read at the machine. */
 export function valueText({ value, unit }: PartNumber, shownIn: LengthUnit, locale: string): string {
   if (value === null) return '';
   if (unit === 'mm') return lengthText(value, shownIn, locale);
   const figure = Number(value.toPrecision(5));
   if (unit === '1') return formatNumber(figure, { locale });
-  return formatQuantity(figure, unit.replace('deg', '°'), { locale });
+  return unit.startsWith('deg')
+    ? `${formatNumber(figure, { locale })}${unit.replace('deg', '°')}`
+    : formatQuantity(figure, unit, { locale });
 }
 
 /** Unit at the end of an input's name, longest first. */
@@ -105,7 +112,8 @@ export function inputText(inputs: Readonly<Record<string, number>>, locale: stri
     .map(([name, value]) => {
       const [ending, unit] = ENDINGS.find(([own]) => name.endsWith(own)) ?? ['', ''];
       const plain = name.slice(0, name.length - ending.length).replace(/[A-Z]/g, (letter) => ` ${letter.toLowerCase()}`);
-      return `${plain.trim()} ${formatQuantity(Number(value.toPrecision(6)), unit, { locale })}`;
+      const figure = Number(value.toPrecision(6));
+      return `${plain.trim()} ${unit === '°' ? `${formatNumber(figure, { locale })}°` : formatQuantity(figure, unit, { locale })}`;
     })
     .join(', ');
 }

@@ -1,7 +1,6 @@
 import { type EnteredPart, lengthMm, type PartResults } from '@proofplate/recipe-model';
 import type { ReactNode } from 'react';
-import { formatQuantity } from '../../../lib/format';
-import { lengthText, numberValue } from '../part-words';
+import { degrees, lengthText, numberValue } from '../part-words';
 import { seamWords } from './part-facts';
 
 export type Tone = {
@@ -23,8 +22,8 @@ type Subject = { readonly part: EnteredPart; readonly results: PartResults; read
 
 const WIDTH = 280;
 const HEIGHT = 236;
-const CENTRE = { x: WIDTH / 2, y: 132 };
-const RADIUS = 78;
+const CENTRE = { x: WIDTH / 2, y: 122 };
+const RADIUS = 72;
 /** More ticks would be a grey ring. */
 const MOST_TICKS = 72;
 const LETTERS = 14;
@@ -71,7 +70,17 @@ export function drawEnd({ part, results, locale, tone }: Subject): PartDrawing {
         <text x={CENTRE.x} y="14" textAnchor="middle" fontSize={LETTERS} fill={tone.ink}>
           beam
         </text>
-        <text x={CENTRE.x} y={CENTRE.y + (isInside ? -8 : 6)} textAnchor="middle" fontSize={LETTERS} fontWeight="600" fill={tone.ink}>
+        <text
+          x={CENTRE.x}
+          y={CENTRE.y + (isInside ? -8 : 6)}
+          textAnchor="middle"
+          fontSize={LETTERS}
+          fontWeight="600"
+          fill={tone.ink}
+          stroke={innerShare(part) === undefined ? tone.body : tone.ground}
+          strokeWidth="5"
+          paintOrder="stroke"
+        >
           {diameter}
         </text>
         <text x={CENTRE.x} y={HEIGHT - 8} textAnchor="middle" fontSize={LETTERS} fill={tone.ink}>
@@ -152,7 +161,7 @@ export function drawFlat({ part, results, locale, tone }: Subject): PartDrawing 
   const letter = Math.max(10, Math.min(64, height * 0.8, width * 0.6));
   const widthWords = lengthText(widthMm, part.shownIn, locale);
   const heightWords = lengthText(heightMm, part.shownIn, locale);
-  const turn = formatQuantity(Number((numberValue(results, 'wrapAngle') ?? 0).toFixed(1)), '°', { locale });
+  const turn = degrees(numberValue(results, 'wrapAngle') ?? 0, 1, locale);
   return {
     title: 'Artwork, flat',
     label: `The artwork flat: ${widthWords} wide, ${heightWords} high, ${results.isMirrored ? 'mirrored' : 'not mirrored'}.`,
@@ -165,10 +174,10 @@ export function drawFlat({ part, results, locale, tone }: Subject): PartDrawing 
             R
           </text>
         </g>
-        <text x={WIDTH / 2} y="14" textAnchor="middle" fontSize={LETTERS} fill={tone.ink}>
+        <text x={WIDTH / 2} y={y - 10} textAnchor="middle" fontSize={LETTERS} fill={tone.ink}>
           {heightWords} high
         </text>
-        <Measure x1={x} x2={x + width} y={190} words={widthWords} tone={tone} />
+        <Measure x1={x} x2={x + width} y={y + height + 16} words={widthWords} tone={tone} />
         <text x={WIDTH / 2} y={HEIGHT - 8} textAnchor="middle" fontSize={LETTERS} fill={tone.ink}>
           {turn} of turn, {results.isMirrored ? 'mirrored' : 'not mirrored'}
         </text>

@@ -2,7 +2,7 @@ import { chakra } from '@chakra-ui/react';
 import type { LengthUnit, PartResults } from '@proofplate/recipe-model';
 import type { ReactNode } from 'react';
 import { formatNumber, formatQuantity } from '../../../lib/format';
-import { findNumber, LIMIT_WORDS, lengthFigure, lengthText, numberValue } from '../part-words';
+import { degrees, findNumber, LIMIT_WORDS, lengthFigure, lengthText, numberValue } from '../part-words';
 
 export type PartFact = { label: string; value: ReactNode; note?: string };
 export type PartFactsProps = { results: PartResults; shownIn: LengthUnit; locale: string };
@@ -22,7 +22,7 @@ export function partFacts({ results, shownIn, locale }: PartFactsProps): PartFac
     {
       label: 'Artwork, width × height',
       value: `${lengthFigure(width, shownIn, locale)} × ${lengthText(height, shownIn, locale)}`,
-      note: `${formatQuantity(Number(value('wrapAngle').toFixed(2)), '°', { locale })} of turn, ${seamWords(results, shownIn, locale)}`,
+      note: `${degrees(value('wrapAngle'), 2, locale)} of turn, ${seamWords(results, shownIn, locale)}`,
     },
     results.isMirrored
       ? { label: 'Mirror', value: 'Yes', note: 'Once, in one place: in the artwork or on the control.' }
@@ -32,7 +32,7 @@ export function partFacts({ results, shownIn, locale }: PartFactsProps): PartFac
       : {
           label: 'Index steps',
           value: formatNumber(steps, { locale }),
-          ...(angle === null || angle === undefined ? {} : { note: `${formatQuantity(Number(angle.toFixed(4)), '°', { locale })} each` }),
+          ...(angle === null || angle === undefined ? {} : { note: `${degrees(angle, 4, locale)} each` }),
         },
     strip === null || strip === undefined
       ? { label: 'Strip in focus', value: <NotKnown>{reason('stripWidth')}</NotKnown> }
@@ -67,11 +67,11 @@ function taperFacts({ results, shownIn, locale }: PartFactsProps): PartFact[] {
   if (tilt === null || error === null) return [];
   const radii = `${lengthFigure(inner ?? 0, shownIn, locale)} to ${lengthText(outer ?? 0, shownIn, locale)}`;
   return [
-    { label: 'Tilt the part', value: formatQuantity(Number(tilt.toFixed(3)), '°', { locale }), note: 'so that the marked line lies level' },
+    { label: 'Tilt the part', value: degrees(tilt, 3, locale), note: 'so that the marked line lies level' },
     {
       label: 'Rectangle at its ends',
       value: `± ${formatQuantity(Number((error * 100).toFixed(2)), '%', { locale })} wide`,
-      note: `or draw a sector: ${formatQuantity(Number((sector ?? 0).toFixed(2)), '°', { locale })}, radius ${radii}`,
+      note: `or draw a sector: ${degrees(sector ?? 0, 2, locale)}, radius ${radii}`,
     },
   ];
 }

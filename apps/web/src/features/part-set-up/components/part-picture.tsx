@@ -21,7 +21,11 @@ const TONES: Readonly<Record<'screen' | 'paper', Tone>> = {
 export function PartPicture({ part, results, locale, tone = 'screen' }: PartPictureProps) {
   const subject = { part, results, locale, tone: TONES[tone] };
   return (
-    <chakra.div display="grid" gap="4" gridTemplateColumns="repeat(auto-fit, minmax(min(240px, 100%), 1fr))">
+    <chakra.div
+      display="grid"
+      gap="4"
+      gridTemplateColumns={tone === 'paper' ? 'repeat(3, minmax(0, 1fr))' : 'repeat(auto-fit, minmax(min(220px, 100%), 1fr))'}
+    >
       {[drawEnd(subject), drawSide(subject), drawFlat(subject)].map((drawing) => (
         <View key={drawing.title} drawing={drawing} tone={subject.tone} />
       ))}

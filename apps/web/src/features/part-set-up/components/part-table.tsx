@@ -1,6 +1,8 @@
 import { chakra } from '@chakra-ui/react';
 import type { LengthUnit, PartNumber, PartResults } from '@proofplate/recipe-model';
 import { DataTable } from '../../../components/data-table';
+import { TextLink } from '../../../components/text-link';
+import { paths } from '../../../lib/paths';
 import { inputText, numberLabel, valueText } from '../part-words';
 
 export type PartTableProps = { results: PartResults; shownIn: LengthUnit; locale: string };
@@ -19,9 +21,22 @@ export function PartTable({ results, shownIn, locale }: PartTableProps) {
         { key: 'value', header: 'Value', cell: (number) => <Value number={number} shownIn={shownIn} locale={locale} /> },
         { key: 'formula', header: 'Formula', cell: ({ formula }) => formula },
         { key: 'inputs', header: 'From', cell: ({ inputs }) => inputText(inputs, locale), onPhone: 'hidden' },
-        { key: 'source', header: 'Source', cell: ({ source }) => source, onPhone: 'hidden' },
+        { key: 'source', header: 'Source', cell: ({ source }) => <Source source={source} /> },
       ]}
     />
+  );
+}
+
+/** A page of docs/science, which the application shows itself. */
+const SCIENCE_PAGE = /(?:; )?docs\/science\/([a-z-]+)\.md$/u;
+
+function Source({ source }: { source: string }) {
+  const page = SCIENCE_PAGE.exec(source)?.[1];
+  if (page === undefined) return source;
+  return (
+    <span>
+      {source.replace(SCIENCE_PAGE, '')} <TextLink to={paths.science(page)}>{page}</TextLink>
+    </span>
   );
 }
 

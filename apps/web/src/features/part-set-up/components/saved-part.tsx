@@ -23,11 +23,15 @@ export function SavedPartPanel({ run, mayChange }: SavedPartPanelProps) {
         <h2 id="part-title">Part set-up</h2>
         <Flex gap="2" wrap="wrap">
           {saved !== null && (
-            <ButtonLink to={paths.partSheet(run.code)} icon={<PrintIcon />}>
+            <ButtonLink to={paths.partSheet(run.code)} size="glove" icon={<PrintIcon />}>
               Print
             </ButtonLink>
           )}
-          {mayChange && <ButtonLink to={paths.partOfRun(run.code)}>{saved === null ? 'Set up a round part' : 'Change'}</ButtonLink>}
+          {mayChange && (
+            <ButtonLink to={paths.partOfRun(run.code)} size="glove">
+              {saved === null ? 'Set up a round part' : 'Change'}
+            </ButtonLink>
+          )}
         </Flex>
       </Flex>
       {saved !== null && (
