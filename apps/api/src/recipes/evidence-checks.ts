@@ -1,4 +1,4 @@
-import { hasEssentialChange, isCitable } from '@proofplate/recipe-model';
+import { hasEssentialChange, isCitable, type RouteKind } from '@proofplate/recipe-model';
 import type { ShopPolicy } from '../shops/shop-policy';
 import { type ApprovalCheck, check } from './approval-check';
 import { type ApprovalFacts, isSameWork } from './approval-facts';
@@ -26,7 +26,7 @@ export function basisCheck(record: RevisionRecord): ApprovalCheck {
   return check('basis', 'Basis', { passes, found, wayOut: 'Cite a cell of a sealed coupon of the same work.' });
 }
 
-export function confirmationCheck(confirmation: Confirmation, { minimumConfirmationMarks }: ShopPolicy): ApprovalCheck {
+export function confirmationCheck(confirmation: Confirmation, { minimumConfirmationMarks }: ShopPolicy, route: RouteKind): ApprovalCheck {
   const { marks, count } = confirmation;
   const left = marks.filter(({ faults }) => faults.length > 0);
   const named = left.slice(0, MOST_NAMED).map(({ name, faults }) => `${name}: ${faults.join(', ')}.`);
@@ -38,7 +38,10 @@ export function confirmationCheck(confirmation: Confirmation, { minimumConfirmat
   return check('confirmation', 'Confirmation', {
     passes: count >= minimumConfirmationMarks,
     found: [summary, ...numbers, ...named, ...more].join(' '),
-    wayOut: 'Mark and seal a later coupon with exactly these parameters, or finish a confirmation run.',
+    wayOut:
+      route === 'transferred'
+        ? 'Mark and seal a coupon on this machine with exactly these parameters.'
+        : 'Mark and seal a later coupon with exactly these parameters, or finish a confirmation run.',
   });
 }
 

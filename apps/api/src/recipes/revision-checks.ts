@@ -31,7 +31,7 @@ export function revisionChecks(facts: ApprovalFacts): RevisionChecks {
     acknowledgedCheck(facts),
     ...(rests ? [] : [groundsCheck(record)]),
     ...(rests ? [basisCheck(record)] : []),
-    ...(isProved ? [confirmationCheck(confirmation, facts.policy)] : []),
+    ...(isProved ? [confirmationCheck(confirmation, facts.policy, route)] : []),
     ...(isProved && facts.current !== null ? [newConfirmationCheck(facts, confirmation)] : []),
     ...(isProved ? [criteriaCheck(record), photoCheck(record, facts.policy)] : []),
     ...(facts.current === null ? [] : [changesCheck(record, facts.current)]),
