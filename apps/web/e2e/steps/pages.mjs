@@ -40,6 +40,8 @@ export const PAGES = {
     'run-start': listed('/machine?words=black%20anodised%20satin', 'Start a run'),
     run: startRun,
     runs: '/runs',
+    'part-set-up': '/part-set-up',
+    'part-sheet': listed('/runs?q=TW-26-0422', /^J-\d+/, 'Print'),
     account: '/account',
     science: '/science',
     'science-page': '/science/pulses',
@@ -61,6 +63,7 @@ export const PAGES = {
     'transfer-not-equivalent': transferTo('R-0003', /Bench 2.*F254/),
     equipment: '/equipment',
     machine: listed('/equipment', /^Bench 2/),
+    'part-set-up-worked-out': workOutPart,
     materials: '/materials',
     material: listed('/materials', /black anodised 6061/i),
   },
@@ -102,6 +105,16 @@ async function askedFor(person) {
   await page.getByText(/see it with your sentence filled in\. What becomes/).waitFor();
   await go('/requests');
   await page.getByText('TW-26-0500').first().waitFor();
+}
+
+/** A ring on the first machine with its first lens, with everything that follows. */
+async function workOutPart({ page, go }) {
+  await go('/part-set-up');
+  for (const label of ['Machine', 'Lens']) await page.getByLabel(label, { exact: true }).selectOption({ index: 1 });
+  await page.getByRole('radio', { name: 'Ring' }).click();
+  const lengths = { 'Outside diameter': '1.25 in', Wall: '2', 'Length along the axis': '12', 'Artwork height': '8' };
+  for (const [label, text] of Object.entries(lengths)) await page.getByLabel(new RegExp(`^${label}`)).fill(text);
+  await page.getByText('All measures, with formula and source').click();
 }
 
 /** An approved recipe with the machine and lens chosen that it is to go to. */
