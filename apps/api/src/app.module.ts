@@ -13,6 +13,7 @@ import { HealthModule } from './health/health.module';
 import { LedgerModule } from './ledger/ledger.module';
 import { LensesModule } from './lenses/lenses.module';
 import { MachinesModule } from './machines/machines.module';
+import { MarkingTimesModule } from './machines/marking-times.module';
 import { MaterialsModule } from './materials/materials.module';
 import { MembersModule } from './members/members.module';
 import { PhotosModule } from './photos/photos.module';
@@ -38,6 +39,7 @@ export class AppModule {
         MembersModule,
         AuthModule,
         MachinesModule,
+        MarkingTimesModule,
         LensesModule,
         MaterialsModule,
         PhotosModule,

@@ -35,6 +35,11 @@ const SETTING = { values: {}, fill: 'both directions', assist: 'none' };
 const WORK = { materialId: '{material}', finishId: '{finish}', effectId: '{effect}', machineId: '{machine}', lensId: '{lens}' };
 const PLAN = { ...WORK, columns: COLUMNS, base: SETTING, cellMm: 5, gapMm: 1.2, fillDrawnBy: 'machine', acknowledgedCautionIds: [] };
 const OLD_PLATE = { ...WORK, acknowledgedCautionIds: [], grid: { rows: 2, columns: 2 } };
+const LENGTH = { value: 20, unit: 'mm' };
+const PART = {
+  ...{ shape: 'cylinder', side: 'outside', diameter: LENGTH, length: LENGTH, artworkHeight: { value: 5, unit: 'mm' } },
+  ...{ allowance: 'fluence loss', allowancePercent: 10, focusAt: 'mid', shownIn: 'mm' },
+};
 const CRITERION = { quantity: 'contrast', comparison: 'at least', value: 0.5 };
 
 const ACCOUNTS: readonly RightsRow[] = [
@@ -99,6 +104,10 @@ const EQUIPMENT: readonly RightsRow[] = [
     },
   }),
   row('GET /api/machines/:machineId/calibrations/:calibrationId/watts', 'operator', NO_BODY, { query: 'percent=50' }),
+  read('/api/machines/:machineId/logged-times', 'operator'),
+  row('POST /api/machines/:machineId/logged-times/:loggedTimeId/corrections', 'operator', NO_KEY, {
+    body: { counts: false, reason: 'Wrong piece' },
+  }),
   read('/api/lenses', 'operator'),
   row('POST /api/lenses', 'lead', NO_KEY),
   read('/api/lenses/:lensId', 'operator'),
@@ -150,6 +159,8 @@ const COUPONS: readonly RightsRow[] = [
   row('POST /api/coupons/:couponId/marking/start', 'operator', '409 coupon-state', {}),
   row('POST /api/coupons/:couponId/marking/cells', 'operator', NO_KEY, { body: { cellId: ID, cellVersion: 1, outcome: 'marked' } }),
   row('POST /api/coupons/:couponId/marking/undo', 'operator', NO_KEY, { body: { cellId: ID, cellVersion: 1 } }),
+  read('/api/coupons/:couponId/logged-times', 'operator'),
+  row('POST /api/coupons/:couponId/logged-times', 'operator', NO_KEY, { body: { seconds: 12 } }),
   row('POST /api/coupons/:couponId/marking/finish', 'operator', NO_KEY, { body: {} }),
   read('/api/coupons/:couponId/artwork.svg', 'operator'),
   read('/api/coupons/:couponId/cells.csv', 'operator'),
@@ -222,8 +233,14 @@ const FLOOR: readonly RightsRow[] = [
   }),
   read('/api/runs/export.csv', 'trainee'),
   read('/api/runs/start-sheet/:revisionId', 'trainee'),
+  read('/api/runs/part-ground/:revisionId', 'trainee'),
+  read('/api/runs/timing/:revisionId', 'trainee'),
   row('GET /api/runs/:run', 'trainee', { trainee: '404 not-found', operator: OK, lead: OK, owner: OK }, {}),
   row('PATCH /api/runs/:runId/ticks', 'trainee', NO_BODY, { body: { tick: [], untick: [] } }),
+  row('GET /api/runs/:runId/part-set-up', 'trainee', { trainee: '404 not-found', operator: OK, lead: OK, owner: OK }, {}),
+  row('POST /api/runs/:runId/part-set-up', 'trainee', NO_KEY, { body: PART }),
+  row('GET /api/runs/:runId/logged-times', 'trainee', { trainee: '404 not-found', operator: OK, lead: OK, owner: OK }, {}),
+  row('POST /api/runs/:runId/logged-times', 'trainee', NO_KEY, { body: { seconds: 12, widthMm: 20, heightMm: 10 } }),
   row('POST /api/runs/:runId/first-piece', 'trainee', NO_KEY, { body: { ok: true } }),
   row('POST /api/runs/:runId/finish', 'trainee', NO_KEY, { body: { good: 1, scrap: 0 } }),
   row('POST /api/runs/:runId/bad-result', 'trainee', NO_KEY, { body: { outcome: 'burr' } }),

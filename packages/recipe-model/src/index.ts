@@ -105,7 +105,7 @@ export {
   type RevisionState,
 } from './states/revision-state';
 export { type ClockedMark, overheadsFromMarks } from './time/clocked-mark';
-export { type HeadOverheads, headOverheads } from './time/head-overheads';
+export { type HeadDelays, type HeadOverheads, headOverheads } from './time/head-overheads';
 export { type MarkTime, markTime, pausesOf, settingTime, type TimeGround } from './time/mark-time';
 export { type MarkedArea, type MarkedAreas, markedAreas } from './time/marked-area';
 export type {

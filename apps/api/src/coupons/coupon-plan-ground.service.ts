@@ -1,10 +1,11 @@
 import { Injectable } from '@nestjs/common';
-import type { MeasuredCalibration, Optics } from '@proofplate/recipe-model';
+import type { MeasuredCalibration, Optics, TimeGround } from '@proofplate/recipe-model';
 import { InvalidError, NotFoundError } from '../common/errors/domain-error';
 import type { Tx } from '../database/unit-of-work';
 import { CalibrationsService } from '../machines/calibrations.service';
 import { MachineLensesService } from '../machines/machine-lenses.service';
 import { MachinesService } from '../machines/machines.service';
+import { MarkingTimesService } from '../machines/marking-times.service';
 import { type Catalogue, type CatalogueKeys, CouponPlanCatalogueService, refuseArchived } from './coupon-plan-catalogue.service';
 import type { SettingMachine } from './coupon-plan-setting';
 
@@ -14,6 +15,7 @@ export type CouponKeys = CatalogueKeys & { readonly machineId: string; readonly 
 export type PlanGround = Catalogue & {
   readonly machine: SettingMachine;
   readonly optics: Optics;
+  readonly time: TimeGround;
   readonly profileId: string;
   readonly calibrationId: string | null;
   readonly lens: { readonly name: string; readonly fieldSizeMm: number };
@@ -26,6 +28,7 @@ export class CouponPlanGroundService {
     private readonly machineLenses: MachineLensesService,
     private readonly calibrations: CalibrationsService,
     private readonly catalogue: CouponPlanCatalogueService,
+    private readonly times: MarkingTimesService,
   ) {}
 
   /**
@@ -45,6 +48,7 @@ export class CouponPlanGroundService {
       ...catalogue,
       machine: { panel, physical, ...(calibration === undefined ? {} : { calibration: measuredCalibration(calibration) }) },
       optics: { physical, focalLengthMm: lens.focalLengthMm, measuredSpotUm: pair.measuredSpotUm },
+      time: await this.times.ground(tx, shopId, machine.id),
       profileId: profile.id,
       calibrationId: calibration?.id ?? null,
       lens,

@@ -72,7 +72,7 @@ export class CouponPlansService {
         ...{ address, rowIndex: row, columnIndex: column, runOrder },
         dose: cellDose(parameters),
       })),
-      markingTime: markingTimeOf(cells, dto.cellMm, ground.machine.physical),
+      markingTime: markingTimeOf(cells, dto.cellMm, ground.time),
       powerBasis: powerBasis(cells),
       spotUm: numbersOf(baseSetting, ground.optics).get('spotAtWork')?.value ?? null,
       doseCaution: caution,

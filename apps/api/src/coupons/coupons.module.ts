@@ -1,6 +1,7 @@
 import { Module } from '@nestjs/common';
 import { LedgerModule } from '../ledger/ledger.module';
 import { MachinesModule } from '../machines/machines.module';
+import { MarkingTimesModule } from '../machines/marking-times.module';
 import { PhotosModule } from '../photos/photos.module';
 import { ShopsModule } from '../shops/shops.module';
 import { CouponArtworkController } from './coupon-artwork.controller';
@@ -19,14 +20,23 @@ import { CouponPlansRepository } from './coupon-plans.repository';
 import { CouponPlansService } from './coupon-plans.service';
 import { CouponConfirmationService } from './coupon-plans-confirmation.service';
 import { CouponStoreService } from './coupon-plans-store.service';
+import { CouponTimesController } from './coupon-times.controller';
+import { CouponTimesService } from './coupon-times.service';
 import { CouponsController } from './coupons.controller';
 import { CouponsRepository } from './coupons.repository';
 import { CouponsService } from './coupons.service';
 import { DoseCautionService } from './dose-caution.service';
 
 @Module({
-  imports: [LedgerModule, MachinesModule, PhotosModule, ShopsModule],
-  controllers: [CouponsController, CouponPlansController, CouponMarkingController, CouponArtworkController, CouponImportController],
+  imports: [LedgerModule, MachinesModule, MarkingTimesModule, PhotosModule, ShopsModule],
+  controllers: [
+    CouponsController,
+    CouponPlansController,
+    CouponMarkingController,
+    CouponArtworkController,
+    CouponImportController,
+    CouponTimesController,
+  ],
   providers: [
     CouponsService,
     CouponsRepository,
@@ -43,6 +53,7 @@ import { DoseCautionService } from './dose-caution.service';
     CouponMarkingRepository,
     CouponArtworkService,
     CouponImportService,
+    CouponTimesService,
   ],
   exports: [CouponsService, DoseCautionService],
 })

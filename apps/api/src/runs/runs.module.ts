@@ -1,5 +1,6 @@
 import { Module } from '@nestjs/common';
 import { LedgerModule } from '../ledger/ledger.module';
+import { MarkingTimesModule } from '../machines/marking-times.module';
 import { MailModule } from '../mail/mail.module';
 import { MaterialsModule } from '../materials/materials.module';
 import { MembersModule } from '../members/members.module';
@@ -22,6 +23,9 @@ import { RunListService } from './run-list.service';
 import { RunProgressService } from './run-progress.service';
 import { RunStopsRepository } from './run-stops.repository';
 import { RunSurroundingsService } from './run-surroundings.service';
+import { RunTimesController } from './run-times.controller';
+import { RunTimesRepository } from './run-times.repository';
+import { RunTimesService } from './run-times.service';
 import { RunsController } from './runs.controller';
 import { RunsRepository } from './runs.repository';
 import { RunsService } from './runs.service';
@@ -31,8 +35,8 @@ import { SettingRequestsService } from './setting-requests.service';
 
 /** Runs with their first piece, counts and round parts, holds, deviations, and requests for settings. */
 @Module({
-  imports: [LedgerModule, MailModule, MaterialsModule, MembersModule, RecipesModule, ShopsModule],
-  controllers: [RunsController, PartSetUpsController, HoldsController, SettingRequestsController, DeviationsController],
+  imports: [LedgerModule, MailModule, MarkingTimesModule, MaterialsModule, MembersModule, RecipesModule, ShopsModule],
+  controllers: [RunsController, PartSetUpsController, RunTimesController, HoldsController, SettingRequestsController, DeviationsController],
   providers: [
     RunsService,
     RunActs,
@@ -44,6 +48,8 @@ import { SettingRequestsService } from './setting-requests.service';
     RunsRepository,
     PartSetUpsService,
     PartSetUpsRepository,
+    RunTimesService,
+    RunTimesRepository,
     CitedRevisionsService,
     CitedRevisionsRepository,
     HoldsService,

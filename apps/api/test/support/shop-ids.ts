@@ -19,6 +19,7 @@ const PARAMETERS: Readonly<Record<string, string>> = {
   machineId: 'machine',
   lensId: 'lens',
   calibrationId: 'calibration',
+  loggedTimeId: 'logged time',
   materialId: 'material',
   finishId: 'finish',
   groupId: 'group',

@@ -13,6 +13,7 @@ export type HeadOverheads =
       /** null: the lines carry it. */
       readonly scanMs: number | null;
       readonly scanStandardErrorMs: number | null;
+      readonly scanMissingBecause: string | null;
       readonly spreadS: number;
     }
   | { readonly basis: 'profile'; readonly jumpSpeedMmPerS: number; readonly notFittedBecause: string }
@@ -32,8 +33,11 @@ const US_PER_MS = 1000;
 export function headOverheads({ jumpSpeedMmPerS }: Pick<PhysicalProfile, 'jumpSpeedMmPerS'>, fit: MarkingOverheads): HeadOverheads {
   if (jumpSpeedMmPerS === undefined) return { basis: 'not known', because: NO_JUMP_SPEED };
   if (fit.kind === 'not known') return { basis: 'profile', jumpSpeedMmPerS, notFittedBecause: fit.because };
-  const { n, lineMs, lineStandardErrorMs, scanMs, scanStandardErrorMs, spreadS } = fit;
-  return { basis: 'fitted', jumpSpeedMmPerS, n, lineMs, lineStandardErrorMs, scanMs, scanStandardErrorMs, spreadS };
+  const { n, lineMs, lineStandardErrorMs, scanMs, scanStandardErrorMs, scanMissingBecause, spreadS } = fit;
+  return {
+    ...{ basis: 'fitted', jumpSpeedMmPerS, n, spreadS },
+    ...{ lineMs, lineStandardErrorMs, scanMs, scanStandardErrorMs, scanMissingBecause },
+  };
 }
 
 export type LineOverheads = {
@@ -43,9 +47,12 @@ export type LineOverheads = {
   readonly scanOverheadMs?: number;
 };
 
+/** What a profile says of the time beside the lines. */
+export type HeadDelays = Pick<PhysicalProfile, 'accelerationMmPerS2' | 'laserOnDelayUs' | 'laserOffDelayUs' | 'jumpSettleMs'>;
+
 /** Overheads of a line at a speed: the fitted ones hold whatever the step's own delays, else delays of the step before the machine's. */
 export function lineOverheads(
-  physical: PhysicalProfile,
+  physical: HeadDelays,
   { speedMmPerS, delaysUs, overheads }: { speedMmPerS: number; delaysUs?: DelaysUs | undefined; overheads?: HeadOverheads | undefined },
 ): LineOverheads {
   if (overheads?.basis === 'fitted')

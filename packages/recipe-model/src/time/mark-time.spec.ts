@@ -29,6 +29,7 @@ const fitted: HeadOverheads = {
     scanStandardErrorMs: 5,
     spreadS: 0.1,
   },
+  scanMissingBecause: null,
 };
 
 describe('headOverheads()', () => {

@@ -1,11 +1,10 @@
 import { filledRectangleTime, rectangleScanning } from '@proofplate/physics';
 import type { AreaMm } from '../numbers/mark-area';
-import type { PhysicalProfile } from '../vocabulary/profile';
 import type { MarkStep } from '../vocabulary/setting';
-import { type HeadOverheads, lineOverheads } from './head-overheads';
+import { type HeadDelays, type HeadOverheads, lineOverheads } from './head-overheads';
 import { type MarkedArea, markedAreas } from './marked-area';
 
-export type TimeGround = { readonly physical: PhysicalProfile; readonly overheads: HeadOverheads };
+export type TimeGround = { readonly physical: HeadDelays; readonly overheads: HeadOverheads };
 
 export type MarkTime =
   | {

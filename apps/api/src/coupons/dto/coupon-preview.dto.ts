@@ -1,4 +1,5 @@
 import { ApiProperty } from '@nestjs/swagger';
+import { HeadOverheadsDto, MarkTimeDto } from '../../machines/dto/marking-time.dto';
 import { DoseCautionDto, DoseDto, GridFactorDto, PlateSizeDto } from './coupon.dto';
 import { ParameterSetDto } from './parameter-set.dto';
 
@@ -27,10 +28,10 @@ export class PlanCautionDto {
   @ApiProperty({ description: 'Where it comes from' }) source: string;
 }
 
-export class MarkingTimeDto {
-  @ApiProperty({ type: Number, nullable: true, description: 'Time of all cells, s; null: see missingBecause' }) totalS: number | null;
-  @ApiProperty({ type: Number, nullable: true, description: 'Of it with the beam on, s' }) beamOnS: number | null;
-  @ApiProperty({ type: String, nullable: true, description: 'Why the time is not known' }) missingBecause: string | null;
+export class PlanTimeDto extends MarkTimeDto {
+  @ApiProperty({ type: Number, nullable: true, description: 'Time of the quickest cell, s' }) quickestCellS: number | null;
+  @ApiProperty({ type: Number, nullable: true, description: 'Time of the slowest cell, s' }) slowestCellS: number | null;
+  @ApiProperty({ type: HeadOverheadsDto, description: 'Overheads of the scan head that the times rest on' }) overheads: HeadOverheadsDto;
 }
 
 /** What a plan would give. Nothing is stored. */
@@ -42,7 +43,7 @@ export class CouponPreviewDto {
   @ApiProperty({ type: ParameterSetDto, description: 'The same in every cell' }) baseSetting: ParameterSetDto;
   @ApiProperty({ type: [PreviewCellDto], description: 'Cells, row by row' }) cells: PreviewCellDto[];
   @ApiProperty({ type: PlateSizeDto, description: 'Size of the plate' }) plate: PlateSizeDto;
-  @ApiProperty({ type: MarkingTimeDto, description: 'Marking time of all cells, labels not counted' }) markingTime: MarkingTimeDto;
+  @ApiProperty({ type: PlanTimeDto, description: 'Marking time of all cells, labels not counted' }) markingTime: PlanTimeDto;
   @ApiProperty({ enum: ['calibration', 'not calibrated', 'mixed', 'unknown'], description: 'Where the watts come from' })
   powerBasis: 'calibration' | 'not calibrated' | 'mixed' | 'unknown';
   @ApiProperty({ type: Number, nullable: true, description: 'Spot on the work in the base setting, µm' }) spotUm: number | null;
