@@ -1,4 +1,5 @@
 import { createSystem, defaultBaseConfig, defineConfig } from '@chakra-ui/react';
+import { NUMBERS_CLASS, NUMBERS_STYLE } from '../components/numbers-panel/numbers-style';
 import { semanticColours, semanticShadows, tokens } from './theme-tokens';
 
 const config = defineConfig({
@@ -28,6 +29,7 @@ const config = defineConfig({
     },
     body: { fontSize: 'md', fontVariantNumeric: 'tabular-nums lining-nums', minHeight: '100dvh' },
     '*, *::before, *::after': { borderColor: 'border' },
+    [`.${NUMBERS_CLASS}`]: NUMBERS_STYLE,
     'h1, h2, h3': { fontWeight: 'semibold' },
     h1: { fontSize: '3xl', lineHeight: 'title', letterSpacing: 'title' },
     h2: { fontSize: 'xl', lineHeight: 'xl' },

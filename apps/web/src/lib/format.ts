@@ -19,7 +19,18 @@ export function formatNumber(
   value: number,
   { locale = 'en', decimals, significantDigits, isSigned = false }: NumberFormatOptions = {},
 ): string {
-  const text = new Intl.NumberFormat(locale, {
+  const text = formatterOf({ locale, decimals, significantDigits, isSigned }).format(value);
+  return text.replace('-', MINUS);
+}
+
+/** Making a formatter costs more than using it a hundred times, and a form formats dozens of numbers at every key. */
+const FORMATTERS = new Map<string, Intl.NumberFormat>();
+
+function formatterOf({ locale = 'en', decimals, significantDigits, isSigned = false }: NumberFormatOptions): Intl.NumberFormat {
+  const key = [locale, decimals ?? '', significantDigits ?? '', isSigned].join(' ');
+  const known = FORMATTERS.get(key);
+  if (known !== undefined) return known;
+  const made = new Intl.NumberFormat(locale, {
     useGrouping: false,
     signDisplay: isSigned ? 'exceptZero' : 'negative',
     ...(decimals === undefined ? {} : { minimumFractionDigits: decimals, maximumFractionDigits: decimals }),
@@ -27,8 +38,9 @@ export function formatNumber(
       ? {}
       : { minimumSignificantDigits: significantDigits, maximumSignificantDigits: significantDigits }),
     ...(decimals === undefined && significantDigits === undefined ? { maximumFractionDigits: 6 } : {}),
-  }).format(value);
-  return text.replace('-', MINUS);
+  });
+  FORMATTERS.set(key, made);
+  return made;
 }
 
 /** "900 mm/s" with a thin space that does not break; without a unit the number alone. */

@@ -14,8 +14,15 @@ export type ReadNumber = { value: number } | { message: string };
 
 /** Decimal sign of the shop's way of writing numbers. */
 export function decimalSignOf(locale: string): '.' | ',' {
-  return new Intl.NumberFormat(locale).formatToParts(0.5).some(({ type, value }) => type === 'decimal' && value === ',') ? ',' : '.';
+  const known = DECIMAL_SIGNS.get(locale);
+  if (known !== undefined) return known;
+  const isComma = new Intl.NumberFormat(locale).formatToParts(0.5).some(({ type, value }) => type === 'decimal' && value === ',');
+  DECIMAL_SIGNS.set(locale, isComma ? ',' : '.');
+  return isComma ? ',' : '.';
 }
+
+/** Asked for at every key in every field; a locale does not change its sign. */
+const DECIMAL_SIGNS = new Map<string, '.' | ','>();
 
 /**
  * Reads a number typed with or without its unit into the field's own unit. What can be read in two ways, lies outside the limits or

@@ -1,8 +1,7 @@
-import { chakra } from '@chakra-ui/react';
-import { type ReactNode, useCallback, useEffect, useRef, useState } from 'react';
+import { type ReactNode, useCallback, useEffect, useState } from 'react';
 import { CautionIcon } from '../icons';
 import { MemoNumberRow } from './number-row';
-import { NUMBERS_STYLE } from './numbers-style';
+import { NUMBERS_CLASS } from './numbers-style';
 import { type NumbersGroup, reasonsOf, type ShownNumber } from './shown-number';
 
 export type NumbersPanelProps = { label: string; groups: readonly NumbersGroup[] };
@@ -12,7 +11,6 @@ export type NumbersPanelProps = { label: string; groups: readonly NumbersGroup[]
  * nothing moves; what to look at and why a number is missing stand under the rows, so that a value may come and go while somebody types.
  */
 export function NumbersPanel({ label, groups }: NumbersPanelProps) {
-  const frame = useRef<HTMLElement>(null);
   const [openKey, setOpenKey] = useState<string>();
   const toggle = useCallback((key: string) => setOpenKey((open) => (open === key ? undefined : key)), []);
   useEffect(() => {
@@ -24,11 +22,11 @@ export function NumbersPanel({ label, groups }: NumbersPanelProps) {
     return () => document.removeEventListener('pointerdown', handlePress);
   }, [openKey]);
   return (
-    <chakra.section ref={frame} aria-label={label} css={NUMBERS_STYLE}>
+    <section aria-label={label} className={NUMBERS_CLASS}>
       {groups.map((group) => (
         <Group key={group.key} group={group} hasTitle={groups.length > 1} openKey={openKey} onToggle={toggle} />
       ))}
-    </chakra.section>
+    </section>
   );
 }
 

@@ -1,4 +1,9 @@
-/** One rule for all rows: a row of its own styled elements would cost more than the number in it, at every key that is pressed. */
+export const NUMBERS_CLASS = 'numbers';
+
+/**
+ * Part of the theme's global rules, read once: styled elements of its own would cost more than the numbers in them, at every key that
+ * is pressed.
+ */
 export const NUMBERS_STYLE = {
   fontSize: 'sm',
   lineHeight: 'sm',

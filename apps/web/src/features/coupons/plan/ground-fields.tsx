@@ -2,7 +2,8 @@ import { chakra } from '@chakra-ui/react';
 import type { UseFormReturn } from 'react-hook-form';
 import { NumberField, SelectField, TextField } from '../../../components/field';
 import { messageAt } from '../../../components/form';
-import type { Choice, Machine, MachineLens } from '../coupons.api';
+import type { Choice, Machine, MachineLens, ShopCaution } from '../coupons.api';
+import { NeverMarked } from './never-marked';
 import type { PlanValues } from './plan-values';
 
 export type GroundChoices = {
@@ -15,8 +16,15 @@ export type GroundChoices = {
 
 const optionsOf = (choices: readonly Choice[]) => choices.map(({ id, name }) => ({ value: id, label: name }));
 
+export type GroundFieldsProps = {
+  form: UseFormReturn<PlanValues>;
+  choices: GroundChoices;
+  /** Cautions that say never; each stands under the material that it is about. */
+  never: readonly ShopCaution[];
+};
+
 /** Which coupon it is: machine, lens, material, finish and the effect that is wanted. */
-export function GroundFields({ form, choices }: { form: UseFormReturn<PlanValues>; choices: GroundChoices }) {
+export function GroundFields({ form, choices, never }: GroundFieldsProps) {
   const at = (name: string) => messageAt(form.formState.errors, name);
   return (
     <chakra.div display="grid" gridTemplateColumns="repeat(2, minmax(0, 1fr))" gap="2" rowGap="3" alignItems="start">
@@ -48,6 +56,11 @@ export function GroundFields({ form, choices }: { form: UseFormReturn<PlanValues
         error={at('finishId')}
         options={optionsOf(choices.finishes)}
       />
+      {never.map((caution) => (
+        <chakra.div key={caution.id} gridColumn="1 / -1">
+          <NeverMarked caution={caution} />
+        </chakra.div>
+      ))}
       {/* The names of effects say what is kept and what goes: cut off they would be mistaken. */}
       <chakra.div gridColumn="1 / -1">
         <SelectField

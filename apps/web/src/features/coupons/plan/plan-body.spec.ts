@@ -1,5 +1,5 @@
 import type { Panel } from '@proofplate/recipe-model';
-import { planBody } from './plan-body';
+import { type PlanProfile, planBody } from './plan-body';
 import { emptyPlan, factorsFor, type PlanValues } from './plan-values';
 
 const panel: Panel = {
@@ -8,6 +8,10 @@ const panel: Panel = {
     { parameter: 'speedMmPerS', label: 'Speed', unit: 'mm/s', minimum: 1, maximum: 5000, step: 10 },
     { parameter: 'lineSpacingUm', label: 'Line spacing', unit: 'mm', step: 0.001 },
   ],
+};
+const profile: PlanProfile = {
+  panel,
+  physical: { sourceKind: 'co2', wavelengthNm: 10_600, ratedPowerW: 60, m2: 1.2, beamDiameterMm: 7 },
 };
 const plan = (given: Partial<PlanValues> = {}): PlanValues => ({
   ...emptyPlan(),
@@ -19,12 +23,12 @@ const plan = (given: Partial<PlanValues> = {}): PlanValues => ({
   ...given,
 });
 const bodyOf = (values: PlanValues, locale = 'en-GB') => {
-  const read = planBody(values, panel, locale);
+  const read = planBody(values, profile, locale);
   if (!('body' in read)) throw new Error(JSON.stringify(read.messages));
   return read.body;
 };
 const namesOf = (values: PlanValues) => {
-  const read = planBody(values, panel, 'en-GB');
+  const read = planBody(values, profile, 'en-GB');
   return 'messages' in read ? read.messages.map(({ name }) => name) : [];
 };
 
@@ -46,7 +50,7 @@ describe('planBody()', () => {
   });
 
   it('makes one row where nothing varies down the rows', () => {
-    expect(bodyOf(plan({ rows: { ...plan().rows, parameter: '' } }))).not.toHaveProperty('rows');
+    expect(bodyOf(plan({ rows: { ...plan().rows, parameter: '' }, base: { ...plan().base, values: { lineSpacingUm: '12 um', speedMmPerS: '800' } } }))).not.toHaveProperty('rows');
   });
 
   it('sends the seed only for a random order', () => {
@@ -57,6 +61,14 @@ describe('planBody()', () => {
   it('reads a decimal comma where the shop writes one', () => {
     const values = plan({ gapMm: '1,5', base: { values: { lineSpacingUm: '0,012' }, fill: 'crossed', assist: 'none' } });
     expect(bodyOf(values, 'de-DE')).toMatchObject({ gapMm: 1.5, base: { values: { lineSpacingUm: { value: 0.012, unit: 'mm' } } } });
+  });
+
+  it('names every value that a setting cannot do without, in all its cells and in its labels', () => {
+    const bare = plan({ base: { values: {}, fill: 'both directions', assist: 'none' }, hasLabelStep: true });
+    expect(namesOf(bare)).toEqual([
+      'base.values.lineSpacingUm',
+      ...['labelStep.values.powerPercent', 'labelStep.values.speedMmPerS', 'labelStep.values.lineSpacingUm'],
+    ]);
   });
 
   it('says every wrong field at once', () => {

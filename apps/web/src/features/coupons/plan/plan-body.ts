@@ -1,6 +1,7 @@
 import {
   type EntryContext,
   enterValue,
+  neededKeys,
   PARAMETER_KEYS,
   type Panel,
   type PanelField,
@@ -8,7 +9,7 @@ import {
   showValue,
 } from '@proofplate/recipe-model';
 import { decimalSignOf, type NumberRule, readNumber } from '../../../lib/read-number';
-import type { PlanBody } from '../coupons.api';
+import type { Machine, PlanBody } from '../coupons.api';
 import type { FactorValues, PlanValues, SettingValues } from './plan-values';
 
 export type FieldMessage = { name: string; message: string; isMissing: boolean };
@@ -31,22 +32,29 @@ const CHOICES = {
   effectId: 'Choose the effect that is wanted.',
 } as const;
 
-/** The request behind what was typed, or the words at each field. Numbers are read by the panel's rules before anything is sent. */
-export function planBody(values: PlanValues, panel: Panel | undefined, locale: string): ReadPlan {
+/** The machine's profile as far as a setting is read by it. */
+export type PlanProfile = { panel: Panel; physical: Machine['profile']['physical'] };
+
+/**
+ * The request behind what was typed, or the words at each field, all of them at once. Numbers are read by the panel's rules before
+ * anything is sent.
+ */
+export function planBody(values: PlanValues, profile: PlanProfile | undefined, locale: string): ReadPlan {
   const reader = new Reader(locale);
   for (const [name, message] of Object.entries(CHOICES)) {
     // the keys of CHOICES are keys of the plan
     if (values[name as keyof typeof CHOICES] === '') reader.miss(name, message);
   }
-  if (panel === undefined) return { messages: reader.messages };
+  if (profile === undefined) return { messages: reader.messages };
+  const { panel } = profile;
   const { rows, columns, base, labelStep } = values;
   const varied = [rows.parameter, columns.parameter];
   const body = {
     ...pickKeys(values),
     columns: reader.factor('columns', columns, panel),
     ...(rows.parameter === '' ? {} : { rows: reader.factor('rows', rows, panel) }),
-    base: reader.setting('base', base, { panel, varied }),
-    ...(values.hasLabelStep ? { labelStep: reader.setting('labelStep', labelStep, { panel, varied: [] }) } : {}),
+    base: reader.setting('base', base, { profile, varied }),
+    ...(values.hasLabelStep ? { labelStep: reader.setting('labelStep', labelStep, { profile, varied: [] }) } : {}),
     runOrderSeed: values.isRandom ? values.runOrderSeed : null,
     cellMm: reader.number('cellMm', values.cellMm, RULES.cellMm),
     gapMm: reader.number('gapMm', values.gapMm, RULES.gapMm),
@@ -97,14 +105,20 @@ class Reader {
   setting(
     name: string,
     { values, fill, assist }: SettingValues,
-    { panel, varied }: { panel: Panel; varied: readonly (ParameterKey | '')[] },
+    { profile, varied }: { profile: PlanProfile; varied: readonly (ParameterKey | '')[] },
   ): Typed {
     const typed: Typed['values'] = {};
+    const { panel } = profile;
+    const needed = neededKeys(profile, fill);
     for (const key of PARAMETER_KEYS) {
       const [field, text] = [panel.fields.find(({ parameter }) => parameter === key), values[key]?.trim() ?? ''];
-      if (field === undefined || text === '' || varied.includes(key)) continue;
+      if (field === undefined || varied.includes(key)) continue;
       // outline has no spacing; what was typed for a fill stays in the form
       if (key === 'lineSpacingUm' && fill === 'outline') continue;
+      if (text === '') {
+        if (needed.includes(key)) this.miss(`${name}.values.${key}`, `${field.label} is needed. Enter what the panel will show.`);
+        continue;
+      }
       const entry = enterValue(field, text, { ...this.context, speedMmPerS: this.speedOf(values, panel) });
       if (entry.kind === 'accepted') typed[key] = entry.value.entered;
       else this.messages.push({ name: `${name}.values.${key}`, message: entry.message, isMissing: false });

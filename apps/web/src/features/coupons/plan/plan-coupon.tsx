@@ -1,59 +1,76 @@
 import { chakra } from '@chakra-ui/react';
 import type { Panel } from '@proofplate/recipe-model';
-import { type ReactNode, useDeferredValue, useEffect, useRef, useState } from 'react';
+import { type ReactNode, useDeferredValue, useRef, useState } from 'react';
 import { useWatch } from 'react-hook-form';
 import { ActBar } from '../../../components/act-bar';
 import { Button } from '../../../components/button';
 import { EmptyState } from '../../../components/empty-state';
-import { useSummaryForm } from '../../../components/form';
+import { messageAt, useSummaryForm } from '../../../components/form';
 import { ProblemNotice } from '../../../components/problem-notice';
 import { SkeletonBlock, SkeletonForm } from '../../../components/skeletons';
 import { ProblemError } from '../../../lib/api';
+import { asSentence } from '../../../lib/format';
 import { readNumber } from '../../../lib/read-number';
-import { type Coupon, type CouponPreview, planCoupon, useGroundChoices, useLensChoices, useMachineChoices } from '../coupons.api';
+import {
+  type Coupon,
+  type CouponPreview,
+  planCoupon,
+  useCautionsFor,
+  useGroundChoices,
+  useLensChoices,
+  useMachineChoices,
+} from '../coupons.api';
+import { keptPlan } from './kept-plan';
 import { planBody } from './plan-body';
 import { PlanForm } from './plan-form';
 import { PlanNumbers } from './plan-numbers';
 import { PlanFacts, PlanPreview } from './plan-preview';
-import { factorsFor, type PlanValues } from './plan-values';
+import type { PlanValues } from './plan-values';
 import type { CellPlace } from './planned-setting';
 import { ReadCautions } from './read-cautions';
-import { type LivePlan, useLivePlan } from './use-plan';
+import { RestoredPlan } from './restored-plan';
+import { useKeptPlan } from './use-kept-plan';
+import { groundMessages, type LivePlan, useLivePlan } from './use-plan';
+import { useUsualChoices } from './use-usual-choices';
 
-export type PlanCouponProps = { initial: PlanValues; locale: string; onPlanned: (coupon: Coupon) => void };
+export type PlanCouponProps = {
+  initial: PlanValues;
+  /** Under which what is typed is kept until it is saved. */
+  keepAs: string;
+  locale: string;
+  onPlanned: (coupon: Coupon) => void;
+};
 
 /** Form at the left, consequence at the right: dose in every cell, what to look at, time and plate. */
-export function PlanCoupon({ initial, locale, onPlanned }: PlanCouponProps) {
-  const form = useSummaryForm<PlanValues>({ defaultValues: initial });
+export function PlanCoupon({ initial, keepAs, locale, onPlanned }: PlanCouponProps) {
+  const [begun] = useState(() => keptPlan(keepAs));
+  const form = useSummaryForm<PlanValues>({ defaultValues: begun ?? initial });
+  const kept = useKeptPlan(form, keepAs, { initial, wasKept: begun !== undefined });
   const frame = useRef<HTMLDivElement>(null);
-  const [machineId, cellMm, gapMm] = useWatch({ control: form.control, name: ['machineId', 'cellMm', 'gapMm'] });
+  const [machineId, lensId, cellMm, gapMm, readCautionIds] = useWatch({
+    control: form.control,
+    name: ['machineId', 'lensId', 'cellMm', 'gapMm', 'acknowledgedCautionIds'],
+  });
+  const [materialId, finishId, effectId] = useWatch({ control: form.control, name: ['materialId', 'finishId', 'effectId'] });
   const machines = useMachineChoices().data?.items;
   const lenses = useLensChoices(machineId).data?.items ?? [];
   const { materials, finishes, effects } = useGroundChoices();
-  const lensId = useWatch({ control: form.control, name: 'lensId' });
   const machine = machines?.find(({ id }) => id === machineId);
   const panel = machine?.profile.panel;
-  const live = useLivePlan(form, panel, locale);
+  const never = useCautionsFor({ materialId, finishId, effectId, machineId }).filter(({ level }) => level === 'never');
+  const [forbidding] = never;
+  const live = useLivePlan(form, { machine, never: forbidding, locale });
   const [chosen, setChosen] = useState<string>();
-  const [readCautionIds, setReadCautionIds] = useState<readonly string[]>([]);
-
-  useEffect(() => {
-    if (panel === undefined) return;
-    const factors = factorsFor(panel, form.getValues());
-    if (form.getValues('columns.parameter') !== factors.columns) form.setValue('columns.parameter', factors.columns);
-    if (form.getValues('rows.parameter') !== factors.rows && !form.formState.dirtyFields.rows)
-      form.setValue('rows.parameter', factors.rows);
-  }, [panel, form]);
-  useEffect(() => {
-    const [only] = lenses;
-    const mounted = lenses.find(({ isMounted }) => isMounted) ?? (lenses.length === 1 ? only : undefined);
-    if (form.getValues('lensId') === '' && mounted !== undefined) form.setValue('lensId', mounted.lensId);
-  }, [lenses, form]);
+  useUsualChoices(form, panel, lenses);
 
   const handleSubmit = async (values: PlanValues, { idempotencyKey }: { idempotencyKey: string }) => {
-    const read = planBody(values, panel, locale);
-    if ('messages' in read) throw unreadable(read.messages);
-    onPlanned(await planCoupon({ ...read.body, acknowledgedCautionIds: [...readCautionIds] }, idempotencyKey));
+    const read = planBody(values, machine?.profile, locale);
+    const ground = groundMessages(forbidding, live.preview?.cautions, values);
+    if (forbidding !== undefined) throw unreadable(ground);
+    if ('messages' in read || ground.length > 0) throw unreadable([...('messages' in read ? read.messages : []), ...ground]);
+    const coupon = await planCoupon({ ...read.body, acknowledgedCautionIds: values.acknowledgedCautionIds }, idempotencyKey);
+    kept.forget();
+    onPlanned(coupon);
   };
   if (machines === undefined || materials === undefined || finishes === undefined || effects === undefined)
     return <SkeletonForm fields={8} />;
@@ -65,12 +82,14 @@ export function PlanCoupon({ initial, locale, onPlanned }: PlanCouponProps) {
       gap={{ base: '6', lg: '8' }}
       alignItems="start"
     >
-      <div ref={frame}>
+      <chakra.div ref={frame} display="grid" gap="4">
+        {kept.isRestored && <RestoredPlan onStartAfresh={kept.startAfresh} />}
         <PlanForm
           form={form}
           choices={{ machines, lenses, materials, finishes, effects }}
           panel={panel}
           isMachineChosen={machineId !== ''}
+          never={never}
           preview={live.preview}
           numbers={
             machine !== undefined && (
@@ -87,11 +106,22 @@ export function PlanCoupon({ initial, locale, onPlanned }: PlanCouponProps) {
           }
           onSubmit={handleSubmit}
         />
-      </div>
+      </chakra.div>
       <chakra.section aria-label="What the plan gives" position={{ lg: 'sticky' }} top={{ lg: '6' }} display="grid" gap="4" minW="0">
-        <Consequence live={live} panel={panel} sizes={sizes} chosen={chosen} onChoose={setChosen}>
-          <ReadCautions cautions={live.preview?.cautions ?? []} readIds={readCautionIds} onRead={setReadCautionIds} />
-        </Consequence>
+        {forbidding === undefined ? (
+          <Consequence live={live} panel={panel} sizes={sizes} chosen={chosen} onChoose={setChosen}>
+            <ReadCautions
+              cautions={live.preview?.cautions ?? []}
+              readIds={readCautionIds}
+              onRead={(ids) => form.setValue('acknowledgedCautionIds', ids, { shouldDirty: true })}
+              error={messageAt(form.formState.errors, 'acknowledgedCautionIds')}
+            />
+          </Consequence>
+        ) : (
+          <EmptyState kind="none-match" title="There is nothing to plan">
+            {asSentence(forbidding.subject)} Choose another material; what you typed is still here.
+          </EmptyState>
+        )}
         <ActBar>
           <Button
             kind="primary"
@@ -124,11 +154,7 @@ function Consequence({ live, panel, sizes, chosen, onChoose, children }: Consequ
   if (problem !== undefined && problem.errors.length === 0) return <Refused problem={problem} />;
   if (preview === undefined || panel === undefined) {
     if (isLoading) return <SkeletonBlock height="420px" label="Working the plan out" />;
-    return (
-      <EmptyState kind="none-match" title="The plate appears as soon as the plan can be read">
-        {waitsFor.length === 0 ? 'Choose the machine first: its panel says what can be typed.' : waitsFor[0]?.message}
-      </EmptyState>
-    );
+    return <WaitsFor messages={waitsFor} />;
   }
   return (
     <>
@@ -140,6 +166,23 @@ function Consequence({ live, panel, sizes, chosen, onChoose, children }: Consequ
         </chakra.span>
       </PlanFacts>
     </>
+  );
+}
+
+/** Everything that is still open, at once: whoever fills it in sees the end of it. */
+function WaitsFor({ messages }: { messages: LivePlan['waitsFor'] }) {
+  return (
+    <EmptyState kind="none-match" title="The plate appears as soon as the plan can be read">
+      {messages.length === 0 ? (
+        'Choose the machine first: its panel says what can be typed.'
+      ) : (
+        <chakra.ul textAlign="start" columnGap="6" css={{ columnWidth: '220px' }}>
+          {messages.map(({ name, message }) => (
+            <li key={name}>{message}</li>
+          ))}
+        </chakra.ul>
+      )}
+    </EmptyState>
   );
 }
 

@@ -9,7 +9,7 @@ import { Panel as Card } from '../../../components/page';
 import { Segmented } from '../../../components/segmented';
 import { SkeletonForm } from '../../../components/skeletons';
 import { Switch } from '../../../components/switch';
-import type { CouponPreview } from '../coupons.api';
+import type { CouponPreview, ShopCaution } from '../coupons.api';
 import { FactorFields } from './factor-fields';
 import { type GroundChoices, GroundFields } from './ground-fields';
 import { newSeed, type PlanValues } from './plan-values';
@@ -26,6 +26,8 @@ export type PlanFormProps = {
   /** Panel of the chosen machine; undefined until one is chosen. */
   panel: Panel | undefined;
   isMachineChosen: boolean;
+  /** Cautions that forbid the work that is chosen: the fields behind them are not asked for. */
+  never: readonly ShopCaution[];
   preview: CouponPreview | undefined;
   /** What follows from what is typed, under the fields of the setting. */
   numbers: ReactNode;
@@ -33,12 +35,16 @@ export type PlanFormProps = {
 };
 
 /** The left half of the plan: what is typed. */
-export function PlanForm({ form, choices, panel, isMachineChosen, preview, numbers, onSubmit }: PlanFormProps) {
+export function PlanForm({ form, choices, panel, isMachineChosen, never, preview, numbers, onSubmit }: PlanFormProps) {
   const [rows, columns] = useWatch({ control: form.control, name: ['rows.parameter', 'columns.parameter'] });
   return (
     <Form form={form} labels={labelsOf(panel)} onSubmit={onSubmit}>
-      <GroundFields form={form} choices={choices} />
-      {panel === undefined ? (
+      <GroundFields form={form} choices={choices} never={never} />
+      {never.length > 0 ? (
+        <chakra.p color="fg.muted">
+          The rest of the plan is not asked for: this work must not be marked. What you typed there is kept.
+        </chakra.p>
+      ) : panel === undefined ? (
         isMachineChosen && <SkeletonForm fields={6} />
       ) : (
         <>
@@ -142,5 +148,6 @@ function labelsOf(panel: Panel | undefined): Readonly<Record<string, string>> {
     ...Object.fromEntries([...factor('rows', 'Rows'), ...factor('columns', 'Columns')]),
     ...Object.fromEntries([...setting('base', ''), ...setting('labelStep', 'Labels, ')]),
     ...{ 'base.fill': 'Fill', cellMm: 'Cell', gapMm: 'Gap', doseCautionJPerMm2: 'Flag cells from a dose of' },
+    acknowledgedCautionIds: 'Cautions',
   };
 }

@@ -20,21 +20,34 @@ export type PlanNumbersProps = {
   locale: string;
 };
 
-/** What follows from the chosen cell at every key; nothing else of the page is drawn again for it. */
-export function PlanNumbers({ form, machine, lens, place, doseCaution, cellMm, locale }: PlanNumbersProps) {
+/** What follows from the chosen cell. */
+export function PlanNumbers(props: PlanNumbersProps) {
+  const { lens, place } = props;
+  const address = cellAddress(place.row, place.column);
+  return (
+    <Panel px="5" py="4" aria-label={`Numbers of ${address}`}>
+      <chakra.h2 fontSize="md" lineHeight="md">
+        What follows in {address}
+      </chakra.h2>
+      {lens === undefined ? (
+        <p>Choose the lens: spot, fluence and overlap depend on it.</p>
+      ) : (
+        <LiveNumbers {...props} lens={lens} label={`What follows in ${address}`} />
+      )}
+    </Panel>
+  );
+}
+
+type LiveNumbersProps = PlanNumbersProps & { lens: MachineLens; label: string };
+
+/** Watches what is typed; nothing else of the page is drawn again at a key. */
+function LiveNumbers({ form, machine, lens, place, doseCaution, cellMm, locale, label }: LiveNumbersProps) {
   const [base, rows, columns] = useWatch({ control: form.control, name: ['base', 'rows', 'columns'] });
   const calibration = useNewestCalibration(machine.id);
   const typed = useMemo(() => {
     const { physical, panel } = machine.profile;
     return { physical, panel, ...(calibration === undefined ? {} : { calibration: measuredCalibration(calibration) }) };
   }, [machine, calibration]);
-  const address = cellAddress(place.row, place.column);
-  if (lens === undefined)
-    return (
-      <Panel px="5" py="4" aria-label="Numbers">
-        <p>Choose the lens: spot, fluence and overlap depend on it.</p>
-      </Panel>
-    );
   const { focalLengthMm, measuredSpotUm } = lens;
   const numbers = stepNumbers(plannedSetting({ base, rows, columns }, typed, { place, locale }), {
     optics: { physical: typed.physical, focalLengthMm, measuredSpotUm },
@@ -42,12 +55,5 @@ export function PlanNumbers({ form, machine, lens, place, doseCaution, cellMm, l
     doseCaution,
     areaMm: { widthMm: cellMm, heightMm: cellMm },
   });
-  return (
-    <Panel px="5" py="4" aria-label={`Numbers of ${address}`}>
-      <chakra.h2 fontSize="md" lineHeight="md">
-        What follows in {address}
-      </chakra.h2>
-      <NumbersPanel label={`What follows in ${address}`} groups={numbersGroups([numbers])} />
-    </Panel>
-  );
+  return <NumbersPanel label={label} groups={numbersGroups([numbers])} />;
 }

@@ -34,6 +34,8 @@ export type PlanValues = {
   gapMm: string;
   fillDrawnBy: 'machine' | 'artwork';
   doseCautionJPerMm2: string;
+  /** Cautions that the planner says to have read. */
+  acknowledgedCautionIds: string[];
 };
 
 /** Varied first, where the panel shows them. */
@@ -61,6 +63,7 @@ export function emptyPlan(): PlanValues {
       fillDrawnBy: 'machine',
       doseCautionJPerMm2: '',
     },
+    acknowledgedCautionIds: [],
   };
 }
 

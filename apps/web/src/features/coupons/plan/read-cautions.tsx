@@ -1,19 +1,22 @@
-import { chakra } from '@chakra-ui/react';
-import { useId } from 'react';
+import { chakra, Flex } from '@chakra-ui/react';
 import { CautionList } from '../../../components/caution-list';
 import { Checkbox } from '../../../components/facets';
+import { fieldId } from '../../../components/field';
 import { CautionIcon } from '../../../components/icons';
+import { StateShape } from '../../../components/state-mark';
 import type { CouponPreview } from '../coupons.api';
 
 export type ReadCautionsProps = {
   cautions: CouponPreview['cautions'];
   readIds: readonly string[];
-  onRead: (ids: readonly string[]) => void;
+  onRead: (ids: string[]) => void;
+  /** Said after Save, until they are read. */
+  error: string | undefined;
 };
 
 /** What to do is always in sight, the reason one tap away; that they were read is the planner's own word, never given for them. */
-export function ReadCautions({ cautions, readIds, onRead }: ReadCautionsProps) {
-  const id = useId();
+export function ReadCautions({ cautions, readIds, onRead, error }: ReadCautionsProps) {
+  const id = fieldId('acknowledgedCautionIds');
   if (cautions.length === 0) return null;
   const isRead = cautions.every((caution) => readIds.includes(caution.id));
   return (
@@ -48,10 +51,20 @@ export function ReadCautions({ cautions, readIds, onRead }: ReadCautionsProps) {
         <Checkbox
           id={id}
           checked={isRead}
+          aria-invalid={error === undefined ? undefined : true}
+          aria-describedby={error === undefined ? undefined : `${id}-note`}
           onChange={(event) => onRead(event.currentTarget.checked ? cautions.map((caution) => caution.id) : [])}
         />
         I have read {cautions.length === 1 ? 'this caution' : `these ${cautions.length} cautions`}
       </chakra.label>
+      {error !== undefined && (
+        <Flex id={`${id}-note`} gap="1.5" fontSize="sm" lineHeight="sm" color="oxide.fg">
+          <chakra.span pt="2px" lineHeight="none">
+            <StateShape state="fails" />
+          </chakra.span>
+          <span>{error}</span>
+        </Flex>
+      )}
     </chakra.section>
   );
 }

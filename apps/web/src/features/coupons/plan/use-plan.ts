@@ -1,9 +1,8 @@
-import type { Panel } from '@proofplate/recipe-model';
 import { startTransition, useEffect, useMemo, useState } from 'react';
 import type { FieldPath, UseFormReturn } from 'react-hook-form';
 import { ProblemError } from '../../../lib/api';
 import { fieldNameFromPointer } from '../../../lib/form-problem';
-import { type CouponPreview, useCouponPreview } from '../coupons.api';
+import { type CouponPreview, type Machine, type ShopCaution, useCouponPreview } from '../coupons.api';
 import { type FieldMessage, planBody } from './plan-body';
 import type { PlanValues } from './plan-values';
 
@@ -18,27 +17,44 @@ export type LivePlan = {
 };
 
 /** The preview of what is typed right now. Refusals stand at their fields as soon as something was typed there. */
-export function useLivePlan(form: UseFormReturn<PlanValues>, panel: Panel | undefined, locale: string): LivePlan {
+export function useLivePlan(
+  form: UseFormReturn<PlanValues>,
+  { machine, never, locale }: { machine: Machine | undefined; never: ShopCaution | undefined; locale: string },
+): LivePlan {
   const values = useSettledValues(form);
-  const read = useMemo(() => planBody(values, panel, locale), [values, panel, locale]);
+  const read = useMemo(() => planBody(values, machine?.profile, locale), [values, machine, locale]);
   const { data, error, isLoading } = useCouponPreview('body' in read ? read.body : undefined);
   const messages = useMemo(() => ('messages' in read ? read.messages : refusedFields(error)), [read, error]);
-  useFieldMessages(form, messages);
+  const ground = useMemo(() => groundMessages(never, data?.cautions, values), [never, data, values]);
+  useFieldMessages(form, ground, messages);
   const isAnswered = 'body' in read && error === undefined;
   return { preview: isAnswered ? data : undefined, waitsFor: messages, problem: 'body' in read ? error : undefined, isLoading };
 }
 
 /** A missing field says so after a refused submit only; while somebody fills the form in, it would nag. */
-function useFieldMessages(form: UseFormReturn<PlanValues>, messages: readonly FieldMessage[]): void {
+function useFieldMessages(form: UseFormReturn<PlanValues>, ground: readonly FieldMessage[], messages: readonly FieldMessage[]): void {
   const { setError, clearErrors } = form;
   const isSubmitted = form.formState.isSubmitted;
   useEffect(() => {
     clearErrors();
-    for (const { name, message, isMissing } of messages) {
+    for (const { name, message, isMissing } of [...messages, ...ground]) {
       // the names come from the plan's own fields
       if (!isMissing || isSubmitted) setError(name as FieldPath<PlanValues>, { type: 'read', message });
     }
-  }, [messages, setError, clearErrors, isSubmitted]);
+  }, [ground, messages, setError, clearErrors, isSubmitted]);
+}
+
+/** What no field of the setting can say: the work is forbidden, or its cautions are not read yet. */
+export function groundMessages(
+  never: Pick<ShopCaution, 'subject'> | undefined,
+  cautions: CouponPreview['cautions'] | undefined,
+  { acknowledgedCautionIds }: Pick<PlanValues, 'acknowledgedCautionIds'>,
+): FieldMessage[] {
+  if (never !== undefined) return [{ name: 'materialId', message: 'This must not be marked. Choose another material.', isMissing: false }];
+  const isRead = cautions === undefined || cautions.every(({ id }) => acknowledgedCautionIds.includes(id));
+  if (isRead) return [];
+  const which = cautions.length === 1 ? 'the caution' : `the ${cautions.length} cautions`;
+  return [{ name: 'acknowledgedCautionIds', message: `Read ${which} for this work and say so.`, isMissing: true }];
 }
 
 function refusedFields(error: ProblemError | undefined): FieldMessage[] {
