@@ -625,6 +625,40 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/api/machines/{machineId}/logged-times": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Logged marking times of the machine, and the overheads of the scan head that hold */
+        get: operations["MarkingTimesController_get"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/machines/{machineId}/logged-times/{loggedTimeId}/corrections": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Put a logged time right, or take it out of the count, with the reason; the first one stays on record */
+        post: operations["MarkingTimesController_correct"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/api/lenses": {
         parameters: {
             query?: never;
@@ -1338,6 +1372,24 @@ export interface paths {
         patch?: never;
         trace?: never;
     };
+    "/api/coupons/{couponId}/logged-times": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Predicted times of the cells, and the logged ones beside what is predicted */
+        get: operations["CouponTimesController_list"];
+        put?: never;
+        /** Log the clocked time of one cell or of all cells */
+        post: operations["CouponTimesController_log"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/api/coupons/{couponId}/inspection": {
         parameters: {
             query?: never;
@@ -1953,6 +2005,41 @@ export interface paths {
         put?: never;
         /** Keep a round part with its run; refused with each reason at its field */
         post: operations["PartSetUpsController_save"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/runs/timing/{revisionId}": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** What the marking time of a part with this setting is worked out with */
+        get: operations["RunTimesController_timing"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/runs/{runId}/logged-times": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Logged marking times of a run, each beside what is predicted */
+        get: operations["RunTimesController_list"];
+        put?: never;
+        /** Log the clocked time of one piece */
+        post: operations["RunTimesController_log"];
         delete?: never;
         options?: never;
         head?: never;
@@ -2907,6 +2994,138 @@ export interface components {
             reason: string | null;
             /** @description How the number was worked out */
             method: string | null;
+        };
+        HeadDelaysDto: {
+            /** @description Acceleration of the spot, mm/s² */
+            accelerationMmPerS2?: number;
+            /** @description Laser-on delay, µs */
+            laserOnDelayUs?: number;
+            /** @description Laser-off delay, µs */
+            laserOffDelayUs?: number;
+            /** @description Settling time after a jump, ms */
+            jumpSettleMs?: number;
+        };
+        HeadOverheadsDto: {
+            /**
+             * @description fitted from logged times, else of the profile, else not known
+             * @enum {string}
+             */
+            basis: "fitted" | "profile" | "not known";
+            /** @description Jump speed of the profile, mm/s */
+            jumpSpeedMmPerS?: number;
+            /** @description fitted: logged times that it rests on */
+            n?: number;
+            /** @description fitted: time per line, ms */
+            lineMs?: number;
+            /** @description fitted: its standard error, ms */
+            lineStandardErrorMs?: number;
+            /** @description fitted: time per scan, ms; null: see scanMissingBecause */
+            scanMs?: number | null;
+            /** @description fitted: its standard error, ms */
+            scanStandardErrorMs?: number | null;
+            /** @description fitted: why the time per scan is not known */
+            scanMissingBecause?: string | null;
+            /** @description fitted: standard deviation of logged less predicted, s */
+            spreadS?: number;
+            /** @description profile: why nothing is fitted */
+            notFittedBecause?: string;
+            /** @description not known: why */
+            because?: string;
+        };
+        TimeGroundDto: {
+            /** @description Delays of the profile */
+            physical: components["schemas"]["HeadDelaysDto"];
+            /** @description Overheads that hold */
+            overheads: components["schemas"]["HeadOverheadsDto"];
+        };
+        MarkedAreaDto: {
+            /** @description Line spacing, µm */
+            lineSpacingUm: number;
+            /** @description Scan speed, mm/s */
+            speedMmPerS: number;
+            /** @description Passes */
+            passes: number;
+            /**
+             * @description How the area is scanned
+             * @enum {string}
+             */
+            fill: "one direction" | "both directions" | "crossed";
+            /** @description Width along the lines, mm */
+            widthMm: number;
+            /** @description Height across the lines, mm */
+            heightMm: number;
+            /** @description How many of these rectangles were marked */
+            count: number;
+        };
+        MarkTimeDto: {
+            /** @description Time, s; null: see missingBecause */
+            totalS: number | null;
+            /** @description Of it with the beam on, s */
+            beamOnS: number | null;
+            /** @description Standard error, s; null: the overheads are not fitted */
+            errorS: number | null;
+            /** @description Why the time is not known */
+            missingBecause: string | null;
+        };
+        ReplacedTimeDto: {
+            /** @description Time before the correction, s */
+            seconds: number;
+            /** @description Who had logged it */
+            loggedBy: string;
+        };
+        LoggedTimeDto: {
+            /**
+             * Format: uuid
+             * @description Id of the logged time
+             */
+            id: string;
+            /** @description Code of the run */
+            runCode: string | null;
+            /** @description Code of the coupon */
+            couponCode: string | null;
+            /** @description Address of the cell; null: a run, or the whole coupon */
+            address: string | null;
+            /** @description What was marked */
+            areas: components["schemas"]["MarkedAreaDto"][];
+            /** @description Pauses between mark steps within the time, s */
+            pausesS: number;
+            /** @description Clocked time, s */
+            seconds: number;
+            /** @description false: somebody took it out of the count */
+            counts: boolean;
+            /** @description Profile of the machine at that time */
+            profileNumber: number;
+            /** @description false: the source or scan head changed since, and the time counts no longer */
+            isOfPresentMachine: boolean;
+            /** @description Far from what the other logged times say of it; it counts all the same */
+            isOutlier: boolean;
+            /** @description What the overheads that hold now predict for it */
+            predicted: components["schemas"]["MarkTimeDto"];
+            /** @description What this corrects */
+            replaced: components["schemas"]["ReplacedTimeDto"] | null;
+            /** @description Why it was corrected or taken out; empty: it was not */
+            reason: string;
+            /** @description Who logged it */
+            loggedBy: string;
+            /**
+             * Format: date-time
+             * @description When it was logged
+             */
+            loggedAt: string;
+        };
+        MachineMarkingTimeDto: {
+            /** @description What times are worked out with */
+            ground: components["schemas"]["TimeGroundDto"];
+            /** @description Logged times, newest first; at most 500 */
+            items: components["schemas"]["LoggedTimeDto"][];
+        };
+        CorrectLoggedTimeDto: {
+            /** @description true: the time is put right; false: it is taken out of the count */
+            counts: boolean;
+            /** @description The right time, s; only where it counts */
+            seconds?: number;
+            /** @description What was wrong */
+            reason: string;
         };
         LensDto: {
             /**
@@ -4105,13 +4324,21 @@ export interface components {
             /** @description Areal dose */
             dose: components["schemas"]["DoseDto"];
         };
-        MarkingTimeDto: {
-            /** @description Time of all cells, s; null: see missingBecause */
+        PlanTimeDto: {
+            /** @description Time, s; null: see missingBecause */
             totalS: number | null;
             /** @description Of it with the beam on, s */
             beamOnS: number | null;
+            /** @description Standard error, s; null: the overheads are not fitted */
+            errorS: number | null;
             /** @description Why the time is not known */
             missingBecause: string | null;
+            /** @description Time of the quickest cell, s */
+            quickestCellS: number | null;
+            /** @description Time of the slowest cell, s */
+            slowestCellS: number | null;
+            /** @description Overheads of the scan head that the times rest on */
+            overheads: components["schemas"]["HeadOverheadsDto"];
         };
         PlanWarningDto: {
             /** @description dose, lines-apart, spots-apart, pulse-energy, out-of-range, no-dose, plate-too-large, no-labels, slow */
@@ -4152,7 +4379,7 @@ export interface components {
             /** @description Size of the plate */
             plate: components["schemas"]["PlateSizeDto"];
             /** @description Marking time of all cells, labels not counted */
-            markingTime: components["schemas"]["MarkingTimeDto"];
+            markingTime: components["schemas"]["PlanTimeDto"];
             /**
              * @description Where the watts come from
              * @enum {string}
@@ -4355,6 +4582,32 @@ export interface components {
             ignoredHeadings: string[];
             /** @description What will be marked as unknown */
             unknownFields: string[];
+        };
+        CellTimeDto: {
+            /**
+             * Format: uuid
+             * @description Id of the cell
+             */
+            cellId: string;
+            /** @description Its predicted time */
+            predicted: components["schemas"]["MarkTimeDto"];
+        };
+        CouponTimesDto: {
+            /** @description Predicted time of all cells but the skipped ones, labels not counted */
+            whole: components["schemas"]["MarkTimeDto"];
+            /** @description Predicted time of each cell */
+            cells: components["schemas"]["CellTimeDto"][];
+            /** @description Logged times, newest first */
+            items: components["schemas"]["LoggedTimeDto"][];
+        };
+        LogCouponTimeDto: {
+            /** @description Clocked time of marking alone, without dialling in and without the labels, s */
+            seconds: number;
+            /**
+             * Format: uuid
+             * @description The cell; absent: all cells but the skipped ones
+             */
+            cellId?: string;
         };
         CellRatingDto: {
             /**
@@ -6625,6 +6878,51 @@ export interface components {
             setUp: components["schemas"]["PartSetUpDto"] | null;
             /** @description Beam and lens as they are recorded now */
             ground: components["schemas"]["PartGroundDto"];
+        };
+        TimedStepDto: {
+            /** @description Line spacing, µm */
+            lineSpacingUm: number;
+            /** @description Scan speed, mm/s */
+            speedMmPerS: number;
+            /** @description Passes */
+            passes: number;
+            /**
+             * @description How the area is scanned
+             * @enum {string}
+             */
+            fill: "one direction" | "both directions" | "crossed";
+        };
+        SettingTimingDto: {
+            /** @description Mark steps; none: see missingBecause */
+            steps: components["schemas"]["TimedStepDto"][];
+            /** @description Pauses between the mark steps, s */
+            pausesS: number;
+            /** @description Why the time of this setting cannot be worked out */
+            missingBecause: string | null;
+            /** @description Machine and its overheads */
+            ground: components["schemas"]["TimeGroundDto"];
+        };
+        AreaDto: {
+            /** @description Width of the marked area along the lines, mm */
+            widthMm: number;
+            /** @description Height of the marked area across the lines, mm */
+            heightMm: number;
+        };
+        RunTimesDto: {
+            /** @description What the time of a piece is worked out with */
+            timing: components["schemas"]["SettingTimingDto"];
+            /** @description Artwork of the part that was set up for the run */
+            partArea: components["schemas"]["AreaDto"] | null;
+            /** @description Logged times, newest first */
+            items: components["schemas"]["LoggedTimeDto"][];
+        };
+        LogRunTimeDto: {
+            /** @description Width of the marked area along the lines, mm */
+            widthMm: number;
+            /** @description Height of the marked area across the lines, mm */
+            heightMm: number;
+            /** @description Clocked time from the first line to the last one, s */
+            seconds: number;
         };
         HoldDto: {
             /**
@@ -8912,6 +9210,88 @@ export interface operations {
             };
         };
     };
+    MarkingTimesController_get: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                machineId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["MachineMarkingTimeDto"];
+                };
+            };
+            /** @description needs the role operator or a higher one */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    MarkingTimesController_correct: {
+        parameters: {
+            query?: never;
+            header: {
+                /** @description 8 to 128 visible characters, new for each act and the same for each retry */
+                "Idempotency-Key": string;
+            };
+            path: {
+                machineId: string;
+                loggedTimeId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["CorrectLoggedTimeDto"];
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["LoggedTimeDto"];
+                };
+            };
+            /** @description needs the role operator or a higher one */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
     LensesController_list: {
         parameters: {
             query?: {
@@ -11158,6 +11538,87 @@ export interface operations {
             };
         };
     };
+    CouponTimesController_list: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                couponId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["CouponTimesDto"];
+                };
+            };
+            /** @description needs the role operator or a higher one */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    CouponTimesController_log: {
+        parameters: {
+            query?: never;
+            header: {
+                /** @description 8 to 128 visible characters, new for each act and the same for each retry */
+                "Idempotency-Key": string;
+            };
+            path: {
+                couponId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["LogCouponTimeDto"];
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["LoggedTimeDto"];
+                };
+            };
+            /** @description needs the role operator or a higher one */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
     CouponInspectionController_get: {
         parameters: {
             query?: never;
@@ -12840,6 +13301,103 @@ export interface operations {
                 };
                 content: {
                     "application/json": components["schemas"]["PartSetUpDto"];
+                };
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    RunTimesController_timing: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                revisionId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["SettingTimingDto"];
+                };
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    RunTimesController_list: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                runId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["RunTimesDto"];
+                };
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    RunTimesController_log: {
+        parameters: {
+            query?: never;
+            header: {
+                /** @description 8 to 128 visible characters, new for each act and the same for each retry */
+                "Idempotency-Key": string;
+            };
+            path: {
+                runId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["LogRunTimeDto"];
+            };
+        };
+        responses: {
+            201: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["LoggedTimeDto"];
                 };
             };
             /** @description A problem, as docs/problems.md lists them */
