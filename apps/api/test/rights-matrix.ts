@@ -94,6 +94,7 @@ const EQUIPMENT: readonly RightsRow[] = [
   read('/api/machines/:machineId/lenses', 'operator'),
   row('POST /api/machines/:machineId/lenses', 'lead', NO_KEY, { body: { lensId: ID } }),
   row('PATCH /api/machines/:machineId/lenses/:lensId', 'lead', NO_TAG, { body: { workingDistanceMm: 180 } }),
+  read('/api/machines/:machineId/lenses/:lensId/spots', 'operator'),
   read('/api/machines/:machineId/calibrations', 'operator'),
   row('POST /api/machines/:machineId/calibrations', 'lead', NO_KEY, {
     body: {
@@ -165,6 +166,8 @@ const COUPONS: readonly RightsRow[] = [
   read('/api/coupons/:couponId/artwork.svg', 'operator'),
   read('/api/coupons/:couponId/cells.csv', 'operator'),
   read('/api/coupons/:couponId/inspection', 'operator'),
+  read('/api/coupons/:couponId/crater-fit', 'operator'),
+  row('POST /api/coupons/:couponId/crater-fit/measured-spot', 'lead', NO_KEY, { body: { shownSpotUm: 40 } }),
   row('PUT /api/coupons/:couponId/criteria', 'operator', NO_TAG, { body: { criteria: [CRITERION] } }),
   row('POST /api/coupons/:couponId/inspect', 'operator', NO_KEY, { body: {} }),
   row('POST /api/coupons/:couponId/seal', 'operator', NO_KEY, {}),

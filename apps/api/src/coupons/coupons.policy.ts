@@ -29,3 +29,8 @@ export function couponActions(
   if (!roleAtLeast(actor.role, 'operator')) return [];
   return [...BY_STATE[state], ...ALWAYS].filter((action) => action !== 'draft-recipe' || purpose !== 'confirmation');
 }
+
+/** What the member may do with the spot that a coupon's craters give: it becomes the machine's, so whoever may change the machine may. */
+export function craterFitActions(actor: Pick<Actor, 'role'>): 'save-spot'[] {
+  return roleAtLeast(actor.role, 'lead') ? ['save-spot'] : [];
+}

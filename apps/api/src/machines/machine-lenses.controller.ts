@@ -8,6 +8,7 @@ import { Idempotent } from '../common/decorators/idempotent.decorator';
 import { IfMatch } from '../common/decorators/if-match.decorator';
 import { IdPipe } from '../common/pipes/id.pipe';
 import { CreateMachineLensDto, MachineLensDto, MachineLensListDto, UpdateMachineLensDto } from './dto/machine-lens.dto';
+import { SpotMeasurementListDto } from './dto/spot-measurement.dto';
 import { MachineLensesService } from './machine-lenses.service';
 
 @ApiTags('machines')
@@ -46,5 +47,13 @@ export class MachineLensesController {
     @Body() dto: UpdateMachineLensDto,
   ) {
     return this.pairs.update(actor, { machineId, lensId }, version, dto);
+  }
+
+  @Get(':lensId/spots')
+  @AtLeast('operator')
+  @ApiOperation({ summary: 'Every spot that was measured of the lens on the machine, newest first' })
+  @ApiOkResponse({ type: SpotMeasurementListDto })
+  listSpots(@CurrentMember() actor: Actor, @Param('machineId', IdPipe) machineId: string, @Param('lensId', IdPipe) lensId: string) {
+    return this.pairs.listSpots(actor, { machineId, lensId });
   }
 }

@@ -10,6 +10,7 @@ import { MachineLensesService } from './machine-lenses.service';
 import { MachinesController } from './machines.controller';
 import { MachinesRepository } from './machines.repository';
 import { MachinesService } from './machines.service';
+import { SpotMeasurementsRepository } from './spot-measurements.repository';
 
 @Module({
   imports: [LedgerModule, ShopsModule],
@@ -20,6 +21,7 @@ import { MachinesService } from './machines.service';
     CalibrationsService,
     MachinesRepository,
     MachineLensesRepository,
+    SpotMeasurementsRepository,
     CalibrationsRepository,
   ],
   exports: [MachinesService, MachineLensesService, CalibrationsService],

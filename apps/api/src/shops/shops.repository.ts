@@ -1,6 +1,6 @@
 import { Injectable } from '@nestjs/common';
 import { schema, type Tx } from '@proofplate/db';
-import { and, eq, sql } from 'drizzle-orm';
+import { and, eq, type SQL, sql } from 'drizzle-orm';
 import type { UnitSystem } from './dto/shop.dto';
 import type { ShopPolicy } from './shop-policy';
 
@@ -30,11 +30,19 @@ export class ShopsRepository {
 
   /** The day it is now where the shop is, such as 2026-05-14. */
   async today(tx: Tx, shopId: string): Promise<string | undefined> {
+    return this.dayAt(tx, shopId, sql`now()`);
+  }
+
+  async dayOf(tx: Tx, shopId: string, at: Date): Promise<string | undefined> {
+    return this.dayAt(tx, shopId, sql`${at.toISOString()}::timestamptz`);
+  }
+
+  private async dayAt(tx: Tx, shopId: string, at: SQL): Promise<string | undefined> {
     const [row] = await tx
-      .select({ today: sql<string>`to_char(now() at time zone ${shop.timeZone}, 'YYYY-MM-DD')` })
+      .select({ day: sql<string>`to_char(${at} at time zone ${shop.timeZone}, 'YYYY-MM-DD')` })
       .from(shop)
       .where(eq(shop.id, shopId));
-    return row?.today;
+    return row?.day;
   }
 
   /** Undefined when the version is no longer the present one. */

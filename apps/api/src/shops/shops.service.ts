@@ -38,6 +38,13 @@ export class ShopsService {
     return today;
   }
 
+  /** The day on the shop's calendar on which something was. */
+  async dayOf(tx: Tx, shopId: string, at: Date): Promise<string> {
+    const day = await this.repository.dayOf(tx, shopId, at);
+    if (day === undefined) throw new NotFoundError();
+    return day;
+  }
+
   async get(actor: Actor): Promise<ShopDto> {
     return this.unitOfWork.read(actor, async (tx) => toShopDto(await this.getRow(tx, actor.shopId), actor.role));
   }

@@ -590,6 +590,23 @@ export interface paths {
         patch: operations["MachineLensesController_update"];
         trace?: never;
     };
+    "/api/machines/{machineId}/lenses/{lensId}/spots": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Every spot that was measured of the lens on the machine, newest first */
+        get: operations["MachineLensesController_listSpots"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
     "/api/machines/{machineId}/calibrations": {
         parameters: {
             query?: never;
@@ -1506,6 +1523,40 @@ export interface paths {
         put?: never;
         /** Add measurements of cells, all or none */
         post: operations["CouponRatingsController_addMeasurements"];
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/coupons/{couponId}/crater-fit": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        /** Threshold and effective spot from the crater diameters that are stored at present */
+        get: operations["CouponCraterFitController_get"];
+        put?: never;
+        post?: never;
+        delete?: never;
+        options?: never;
+        head?: never;
+        patch?: never;
+        trace?: never;
+    };
+    "/api/coupons/{couponId}/crater-fit/measured-spot": {
+        parameters: {
+            query?: never;
+            header?: never;
+            path?: never;
+            cookie?: never;
+        };
+        get?: never;
+        put?: never;
+        /** Make that spot the measured one of the coupon’s machine and lens; the ETag is that of the lens on the machine */
+        post: operations["CouponCraterFitController_saveSpot"];
         delete?: never;
         options?: never;
         head?: never;
@@ -2907,6 +2958,70 @@ export interface components {
              * @description Day of that measurement
              */
             spotMeasuredOn?: string | null;
+        };
+        SpotCouponDto: {
+            /**
+             * Format: uuid
+             * @description Id of the coupon
+             */
+            id: string;
+            /** @description Its code */
+            code: string;
+        };
+        SpotFitDto: {
+            /** @description Craters in the line */
+            pointCount: number;
+            /** @description Cells of these craters */
+            cells: string[];
+            /** @description Pulses on each place */
+            pulses: number;
+            /** @description Pulse width, ns; null: the one that the source has */
+            pulseWidthNs: number | null;
+            /** @description Threshold as pulse energy, µJ */
+            thresholdEnergyUj: number;
+            /** @description Its standard error, µJ */
+            thresholdEnergyStandardErrorUj: number;
+            /** @description Threshold as peak fluence, J/cm² */
+            thresholdPeakFluenceJPerCm2: number;
+            /** @description Its standard error, J/cm² */
+            thresholdPeakFluenceStandardErrorJPerCm2: number;
+        };
+        SpotMeasurementDto: {
+            /**
+             * Format: uuid
+             * @description Id of the measurement
+             */
+            id: string;
+            /** @description Spot diameter (1/e²) in focus, µm */
+            spotUm: number;
+            /** @description Standard error from the scatter of the craters, µm; null: not stated */
+            standardErrorUm: number | null;
+            /** @description How it was measured */
+            method: string;
+            /**
+             * Format: date
+             * @description Day of the measurement
+             */
+            measuredOn: string;
+            /** @description Coupon whose craters it comes from; null: typed */
+            coupon: components["schemas"]["SpotCouponDto"] | null;
+            /** @description What these craters gave; null: typed */
+            fit: components["schemas"]["SpotFitDto"] | null;
+            /** @description true: the machine uses this one with the lens now */
+            isInUse: boolean;
+            /**
+             * Format: date-time
+             * @description When it was entered
+             */
+            createdAt: string;
+            /** @description Who entered it */
+            createdByName: string;
+        };
+        SpotMeasurementListDto: {
+            /** @description Every spot that was entered, newest first */
+            items: components["schemas"]["SpotMeasurementDto"][];
+            /** @description Always null: the list is whole */
+            nextCursor: string | null;
         };
         CalibrationPointDto: {
             /** @description Power as set on the panel, percent */
@@ -4950,6 +5065,145 @@ export interface components {
         SavedMeasurementsDto: {
             /** @description The measurements as stored now */
             measurements: components["schemas"]["MeasurementDto"][];
+        };
+        CraterSeriesDto: {
+            /** @description Pulses on each place */
+            pulses: number;
+            /** @description Pulse width, ns; null: the one that the source has */
+            pulseWidthNs: number | null;
+            /** @description Focus offset, mm */
+            focusOffsetMm: number;
+        };
+        CraterPointDto: {
+            /** @description Address of the cell */
+            address: string;
+            /** @description Crater diameter that counts, µm */
+            diameterUm: number;
+            /** @description Pulse energy, µJ; null: see excludedBecause */
+            pulseEnergyUj: number | null;
+            /** @description What craters of one line share; null: not known */
+            series: components["schemas"]["CraterSeriesDto"] | null;
+            /** @description Why the line does not take it; null: it does */
+            excludedBecause: string | null;
+            /** @description true: more than ten thresholds, so more than the spot may widen it */
+            isFarAbove: boolean;
+        };
+        CraterLineDto: {
+            /** @description Radius of the spot (1/e²), µm */
+            spotRadiusUm: number;
+            /** @description Its standard error, µm */
+            spotRadiusStandardErrorUm: number;
+            /** @description Threshold as pulse energy, µJ */
+            thresholdEnergyUj: number;
+            /** @description Its standard error, µJ */
+            thresholdEnergyStandardErrorUj: number;
+            /** @description Threshold as peak fluence, J/cm² */
+            thresholdPeakFluenceJPerCm2: number;
+            /** @description Its standard error, J/cm² */
+            thresholdPeakFluenceStandardErrorJPerCm2: number;
+            /** @description Slope, µm² */
+            slopeUm2: number;
+            /** @description Its standard error, µm² */
+            slopeStandardErrorUm2: number;
+            /** @description D² at 1 µJ, µm² */
+            interceptUm2: number;
+            /** @description Share of the variation that the line explains */
+            rSquared: number;
+        };
+        SeriesThresholdDto: {
+            /** @description Pulses on each place */
+            pulses: number;
+            /** @description Craters in its line */
+            points: number;
+            /** @description Threshold as peak fluence, J/cm² */
+            thresholdPeakFluenceJPerCm2: number;
+            /** @description Its standard error, J/cm² */
+            standardErrorJPerCm2: number;
+        };
+        CraterIncubationDto: {
+            /** @description Incubation coefficient S; 1: none */
+            incubationCoefficient: number;
+            /** @description Threshold of a single pulse that it leads to, J/cm² */
+            singlePulseThresholdJPerCm2: number;
+            /** @description Thresholds that it rests on, fewest pulses first */
+            thresholds: components["schemas"]["SeriesThresholdDto"][];
+        };
+        CraterSpotDto: {
+            /** @description Diameter of the spot (1/e²), to 0.01 µm */
+            diameterUm: number;
+            /** @description Its standard error from the scatter, to 0.01 µm */
+            standardErrorUm: number;
+            /** @description The method in words, as it would stand at the machine */
+            method: string;
+            /**
+             * Format: date
+             * @description Day on which the last of its craters was measured
+             */
+            measuredOn: string;
+        };
+        CraterPlaceDto: {
+            /**
+             * Format: uuid
+             * @description Machine that marked the coupon
+             */
+            machineId: string;
+            /** @description Its name */
+            machineName: string;
+            /**
+             * Format: uuid
+             * @description Lens that it was marked with
+             */
+            lensId: string;
+            /** @description Its name */
+            lensName: string;
+            /** @description Measured spot in use, µm; null: none */
+            measuredSpotUm: number | null;
+            /** @description How that one was measured */
+            spotMethod: string | null;
+            /**
+             * Format: date
+             * @description Day of that measurement
+             */
+            spotMeasuredOn: string | null;
+            /** @description Number of the stored version of the lens on the machine; the ETag is "v" and this number */
+            version: number;
+        };
+        CraterFitDto: {
+            /**
+             * Format: uuid
+             * @description Coupon
+             */
+            couponId: string;
+            /** @description Every cell with a crater diameter, row by row */
+            points: components["schemas"]["CraterPointDto"][];
+            /** @description What the craters of the line share; null: none can be used */
+            series: components["schemas"]["CraterSeriesDto"] | null;
+            /** @description Craters in the line */
+            pointCount: number;
+            /** @description The line; null: see refusedBecause */
+            fit: components["schemas"]["CraterLineDto"] | null;
+            /** @description Why there is no line */
+            refusedBecause: string | null;
+            /** @description What to look at before the numbers are trusted */
+            remarks: string[];
+            /** @description From three numbers of pulses on; null before */
+            incubation: components["schemas"]["CraterIncubationDto"] | null;
+            /** @description The spot that the line gives; null: no line */
+            spot: components["schemas"]["CraterSpotDto"] | null;
+            /** @description Machine and lens with the spot in use; null: the lens is not on it */
+            place: components["schemas"]["CraterPlaceDto"] | null;
+            /** @description Why the spot cannot become the measured one; null: it can */
+            notSavableBecause: string | null;
+            /** @description Formula in words and symbols */
+            formula: string;
+            /** @description Where the formula comes from */
+            source: string;
+            /** @description What the caller may do: save-spot */
+            allowedActions: string[];
+        };
+        SaveCraterSpotDto: {
+            /** @description Diameter that the caller was shown, µm; refused when the stored craters give another one by now */
+            shownSpotUm: number;
         };
         /**
          * @description How it stands; due: approved with an overdue review
@@ -9083,6 +9337,44 @@ export interface operations {
             };
         };
     };
+    MachineLensesController_listSpots: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                machineId: string;
+                lensId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["SpotMeasurementListDto"];
+                };
+            };
+            /** @description needs the role operator or a higher one */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
     CalibrationsController_list: {
         parameters: {
             query?: {
@@ -11907,6 +12199,89 @@ export interface operations {
                 };
             };
             /** @description needs the role operator or a higher one */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    CouponCraterFitController_get: {
+        parameters: {
+            query?: never;
+            header?: never;
+            path: {
+                couponId: string;
+            };
+            cookie?: never;
+        };
+        requestBody?: never;
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["CraterFitDto"];
+                };
+            };
+            /** @description needs the role operator or a higher one */
+            403: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content?: never;
+            };
+            /** @description A problem, as docs/problems.md lists them */
+            default: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/problem+json": components["schemas"]["ProblemDto"];
+                };
+            };
+        };
+    };
+    CouponCraterFitController_saveSpot: {
+        parameters: {
+            query?: never;
+            header: {
+                /** @description 8 to 128 visible characters, new for each act and the same for each retry */
+                "Idempotency-Key": string;
+                /** @description ETag of the version that was read, such as "v3" */
+                "If-Match": string;
+            };
+            path: {
+                couponId: string;
+            };
+            cookie?: never;
+        };
+        requestBody: {
+            content: {
+                "application/json": components["schemas"]["SaveCraterSpotDto"];
+            };
+        };
+        responses: {
+            200: {
+                headers: {
+                    [name: string]: unknown;
+                };
+                content: {
+                    "application/json": components["schemas"]["CraterFitDto"];
+                };
+            };
+            /** @description needs the role lead or a higher one */
             403: {
                 headers: {
                     [name: string]: unknown;

@@ -65,6 +65,7 @@ export const ACTIONS: Readonly<Record<string, ActionWords>> = {
   ...keptAndRestored('machine'),
   'machine-lens.added': words('gave a machine another lens'),
   'machine-lens.changed': words('changed a lens on a machine'),
+  'machine-lens.spot-measured': words('measured the spot of a lens on a machine'),
   'power-calibration.added': words('added a power calibration'),
   'lens.created': named('added', 'lens'),
   'lens.changed': named('changed', 'lens'),
