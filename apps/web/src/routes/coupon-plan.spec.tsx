@@ -32,17 +32,21 @@ const preview = {
 };
 const page1 = (items: object[]) => () => ({ body: { items, nextCursor: null } });
 const choices = {
-  'GET /api/machines': page1([{ id: 'x', name: 'Bench 2', profile: { panel: { fields } } }]),
+  'GET /api/machines': page1([{ id: 'x', name: 'Bench 2', profile: { panel: { fields }, physical: { sourceKind: 'fibre-mopa' } } }]),
   'GET /api/machines/x/lenses': page1([{ lensId: 'l', lensName: 'F160', isMounted: true }]),
   'GET /api/materials': page1([{ id: 'm', name: 'Titanium tag' }]),
   'GET /api/finishes': page1([{ id: 'f', name: 'Bead blasted' }]),
   'GET /api/effects': page1([{ id: 'e', name: 'Colour anneal' }]),
+  'GET /api/cautions/for': () => ({ body: { isForbidden: false, items: [] } }),
 };
 
 // Every test draws the whole form and its plate.
 
 let server: ReturnType<typeof fakeServer>;
-beforeEach(() => openSession(makeSessionAnswer('operator')));
+beforeEach(() => {
+  sessionStorage.clear();
+  openSession(makeSessionAnswer('operator'));
+});
 afterEach(() => {
   server.restore();
   closeSession('left');
@@ -96,6 +100,7 @@ describe('planning a coupon', () => {
     await user.click(screen.getByRole('checkbox', { name: 'I have read this caution' }));
     await user.click(screen.getByRole('button', { name: 'Save the plan' }));
     expect(await screen.findByText('at the machine')).toBeVisible();
+    expect(sessionStorage).toHaveLength(0);
     expect(server.bodies('POST /api/coupons')).toEqual([
       expect.objectContaining({
         ...{ machineId: 'x', lensId: 'l', materialId: 'm', finishId: 'f', effectId: 'e', acknowledgedCautionIds: ['caution-1'] },
@@ -108,19 +113,65 @@ describe('planning a coupon', () => {
     ]);
   });
 
-  it('gives nobody’s word that cautions were read', async () => {
+  it('is not saved before the cautions are said to be read, and gives nobody’s word for it', async () => {
     const { user } = await openPage({ 'POST /api/coupons': () => ({ status: 201, body: { id: 'c', code: 'C-0124' } }) });
     fillIn();
     await screen.findAllByText('Keep the extraction on');
     await user.click(screen.getByRole('button', { name: 'Save the plan' }));
-    await screen.findByText('at the machine');
-    expect(server.bodies('POST /api/coupons')).toEqual([expect.objectContaining({ acknowledgedCautionIds: [] })]);
+    const box = screen.getByRole('checkbox', { name: 'I have read this caution' });
+    await waitFor(() => expect(box).toHaveAccessibleDescription('Read the caution for this work and say so.'));
+    expect(server.bodies('POST /api/coupons')).toEqual([]);
+    await user.click(screen.getByRole('link', { name: /^Cautions: Read the caution/ }));
+    expect(box).toHaveFocus();
+    await user.click(box);
+    await user.click(screen.getByRole('button', { name: 'Save the plan' }));
+    expect(await screen.findByText('at the machine')).toBeVisible();
+    expect(server.bodies('POST /api/coupons')).toEqual([expect.objectContaining({ acknowledgedCautionIds: ['caution-1'] })]);
+  });
+
+  it('refuses a material that must never be marked as soon as it is chosen, and asks for nothing more', async () => {
+    const never = { id: 'n', level: 'never', subject: 'Do not mark PVC.', text: 'It gives off hydrogen chloride.', source: 'A list' };
+    const { user } = await openPage({
+      'GET /api/cautions/for': ({ query }) => ({
+        body: query.get('materialId') === 'm' ? { isForbidden: true, items: [never] } : { isForbidden: false, items: [] },
+      }),
+    });
+    const refusal = await screen.findByRole('alert');
+    expect(refusal).toHaveTextContent('Never. Do not mark PVC.');
+    expect(refusal).toHaveTextContent('It gives off hydrogen chloride.');
+    expect(refusal).toHaveTextContent('Source: A list.');
+    expect(screen.queryByLabelText(/^From/)).not.toBeInTheDocument();
+    expect(screen.getByText(/The rest of the plan is not asked for/)).toBeVisible();
+    await user.click(screen.getByRole('button', { name: 'Save the plan' }));
+    await user.click(await screen.findByRole('link', { name: 'Material: This must not be marked. Choose another material.' }));
+    expect(screen.getByLabelText('Material')).toHaveFocus();
+    expect(server.bodies('POST /api/coupons')).toEqual([]);
+  });
+
+  it('gives what was typed back after the page was left, until it is saved or started afresh', async () => {
+    const first = await openPage();
+    fillIn();
+    first.unmount();
+    server.restore();
+    server = fakeServer({ ...choices, 'POST /api/coupons/preview': () => ({ body: preview }) });
+    const { user, unmount } = renderRoutes([{ path: '/coupons/plan', element: <PlanPage /> }], '/coupons/plan');
+    expect(await screen.findByText('The plan that you had begun is restored.')).toBeVisible();
+    expect(screen.getByLabelText(/^Speed/)).toHaveValue('800');
+    expect(screen.getByLabelText('Rows: what varies')).toHaveValue('');
+    await waitFor(() => expect(screen.getByLabelText('Lens')).toHaveValue('l'));
+    await user.click(screen.getByRole('button', { name: 'Start afresh' }));
+    expect(screen.getByLabelText('Machine')).toHaveValue('');
+    unmount();
+    renderRoutes([{ path: '/coupons/plan', element: <PlanPage /> }], '/coupons/plan');
+    expect(await screen.findByLabelText('Machine')).toHaveValue('');
+    expect(screen.queryByText('The plan that you had begun is restored.')).not.toBeInTheDocument();
   });
 
   it('says at once what the panel cannot show, and lists every missing field after Save, keeping what was typed', async () => {
     const { user } = await openPage();
     enter(/^Speed/, '805');
-    expect(await screen.findByText(/cannot show 805 mm\/s/)).toBeVisible();
+    expect(await screen.findAllByText(/cannot show 805 mm\/s/)).toHaveLength(2);
+    expect(screen.getByText('Line spacing is needed. Enter what the panel will show.')).toBeVisible();
     expect(screen.getByLabelText(/^From/)).toHaveAccessibleDescription('');
     await user.click(screen.getByRole('button', { name: 'Save the plan' }));
     await waitFor(() => expect(screen.getByLabelText(/^From/)).toHaveAccessibleDescription('Enter the first level.'));

@@ -4,6 +4,7 @@ import { Page } from '../components/page';
 import { ReadProblem } from '../components/read-problem';
 import { SkeletonForm } from '../components/skeletons';
 import { type Coupon, useCoupon } from '../features/coupons/coupons.api';
+import { planKey } from '../features/coupons/plan/kept-plan';
 import { PlanCoupon } from '../features/coupons/plan/plan-coupon';
 import { emptyPlan, planFrom } from '../features/coupons/plan/plan-values';
 import { ProveDraft } from '../features/coupons/plan/prove-draft';
@@ -34,15 +35,24 @@ export function Component() {
 }
 
 function EmptyPlan({ onPlanned }: { onPlanned: (coupon: Coupon) => void }) {
-  const { shop } = useSession();
+  const { shop, member } = useSession();
   const initial = useMemo(emptyPlan, []);
-  return <PlanCoupon initial={initial} locale={shop.locale} onPlanned={onPlanned} />;
+  const keepAs = planKey({ shopId: shop.id, memberId: member.id, from: undefined });
+  return <PlanCoupon initial={initial} keepAs={keepAs} locale={shop.locale} onPlanned={onPlanned} />;
 }
 
 function NextPlan({ code, onPlanned }: { code: string; onPlanned: (coupon: Coupon) => void }) {
-  const { shop } = useSession();
+  const { shop, member } = useSession();
   const { data, error, mutate } = useCoupon(code);
   if (error !== undefined) return <ReadProblem problem={error} thing="the coupon to begin from" onRetry={() => void mutate()} />;
   if (data === undefined) return <SkeletonForm fields={8} />;
-  return <PlanCoupon key={data.id} initial={planFrom(data, data.profile.panel, shop.locale)} locale={shop.locale} onPlanned={onPlanned} />;
+  return (
+    <PlanCoupon
+      key={data.id}
+      initial={planFrom(data, data.profile.panel, shop.locale)}
+      keepAs={planKey({ shopId: shop.id, memberId: member.id, from: data.code })}
+      locale={shop.locale}
+      onPlanned={onPlanned}
+    />
+  );
 }

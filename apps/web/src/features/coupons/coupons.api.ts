@@ -23,6 +23,7 @@ export type MarkBody = Schemas['MarkCellDto'];
 export type MarkedCell = Schemas['MarkedCellDto'];
 export type ParameterSet = Schemas['ParameterSetDto'];
 export type Polarity = 'dark on bright' | 'bright on dark';
+export type ShopCaution = Schemas['CautionDto'];
 type CouponPage = Schemas['CouponPageDto'];
 
 export type CouponFilters = {
@@ -170,4 +171,16 @@ export function useGroundChoices() {
   const finishes = useRead<Page<Choice>>('/api/finishes', ALL);
   const effects = useRead<Page<Choice>>('/api/effects', ALL);
   return { materials: materials.data?.items, finishes: finishes.data?.items, effects: effects.data?.items };
+}
+
+/** What is known of the work; an empty id is not known yet. */
+export type WorkInHand = { materialId: string; finishId: string; effectId: string; machineId: string };
+
+/** The cautions for the work as far as it is chosen, never first; nothing before the material is. */
+export function useCautionsFor({ materialId, ...rest }: WorkInHand): readonly ShopCaution[] {
+  const known = Object.fromEntries(Object.entries(rest).filter(([, id]) => id !== ''));
+  const path = materialId === '' ? null : '/api/cautions/for';
+  // those of another material must not stand beside this one for a moment
+  const read = useRead<Schemas['CautionsForDto']>(path, { materialId, ...known }, { keepPreviousData: false });
+  return read.data?.items ?? [];
 }
