@@ -43,7 +43,11 @@ export function partFacts({ results, shownIn, locale }: PartFactsProps): PartFac
         },
     focus === null
       ? { label: 'Set the focus', value: <NotKnown>{reason('focusBelowCrown')}</NotKnown> }
-      : { label: 'Set the focus', value: focusWords(focus, { results, shownIn, locale }) },
+      : {
+          label: 'Set the focus',
+          value: focusWords(focus, { results, shownIn, locale }),
+          note: 'A focus offset of the setting counts from there.',
+        },
     ...taperFacts({ results, shownIn, locale }),
   ];
 }
