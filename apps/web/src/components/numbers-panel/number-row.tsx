@@ -47,7 +47,10 @@ export const MemoNumberRow = memo(
 
 function Sheet({ number: { text, reason, formula, inputs, source, more, lookAt, label } }: { number: ShownNumber }) {
   const sheet = useRef<HTMLDivElement>(null);
-  useEffect(() => sheet.current?.scrollIntoView?.({ block: 'nearest' }), []);
+  useEffect(() => {
+    // it may answer with a promise, which an effect must not hand on
+    sheet.current?.scrollIntoView?.({ block: 'nearest' });
+  }, []);
   return (
     <div ref={sheet}>
       {text === undefined && <p>Not known because {reason}.</p>}
