@@ -1,11 +1,20 @@
 import { schema } from '@proofplate/db';
-import { type Criterion, type EnteredPart, type MarkStep, meetsCriterion, QUANTITIES, type RunKind } from '@proofplate/recipe-model';
+import {
+  type AreaMm,
+  type Criterion,
+  type EnteredPart,
+  type MarkStep,
+  meetsCriterion,
+  QUANTITIES,
+  type RunKind,
+} from '@proofplate/recipe-model';
 import { and, eq } from 'drizzle-orm';
 import type { MarkKind } from '../photos/mark-kinds';
 import { modelMark } from '../photos/mark-model';
 import { seededRandom, seedOf } from '../photos/noise';
 import { authored, minutesAfter, type Turn } from '../stage/stage';
 import { type Bench, type Cast, effectOf } from './cast';
+import { logPiece } from './clocked-piece';
 import { byInstrument, evennessPercent, rounded } from './coupon-inspecting';
 import type { WorkSpec } from './coupon-specs';
 import { exposureOf } from './exposure';
@@ -30,10 +39,13 @@ export type RunSpec = {
   /** Left open: somebody is at it now. */
   readonly isOpen?: boolean;
   readonly roundPart?: EnteredPart;
+  /** Marked area of the piece that somebody clocked. */
+  readonly clockedMm?: AreaMm;
 };
 
 const PART_AFTER_MIN = 2;
 const FIRST_PIECE_AFTER_MIN = 4;
+const CLOCKED_AFTER_MIN = 6;
 
 /** A run from the start to its end: first piece before the batch, counts and measurements at the end, a bad result if one came out. */
 export async function doRun(turn: Turn, cast: Cast, work: WorkSpec, revision: RevisionRecord, spec: RunSpec): Promise<string> {
@@ -56,6 +68,10 @@ export async function doRun(turn: Turn, cast: Cast, work: WorkSpec, revision: Re
     await told('run.part-set-up-saved', PART_AFTER_MIN, part);
   }
   if (kind !== 'daily-check') await releaseFirstPiece(turn, id, told);
+  if (spec.clockedMm !== undefined) {
+    const logged = await logPiece(turn, { cast, work, revision, runId: id, areaMm: spec.clockedMm });
+    await told('marking-time.logged', CLOCKED_AFTER_MIN, logged);
+  }
   if (spec.isOpen !== true) await finish(turn, id, spec, told);
   return code;
 }
