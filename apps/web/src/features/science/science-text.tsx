@@ -8,6 +8,11 @@ import { scienceLink } from './science-link';
 const PLUGINS = [remarkGfm];
 const COMPONENTS: Components = {
   a: ({ href, children }) => <PageLink to={scienceLink(href)}>{children}</PageLink>,
+  // wider than a phone, so it scrolls, and what scrolls must be reached by keyboard
+  pre: ({ children }) => (
+    // biome-ignore lint/a11y/noNoninteractiveTabindex: a region that scrolls needs the focus to be scrolled with keys
+    <pre tabIndex={0}>{children}</pre>
+  ),
   table: ({ children }) => (
     <chakra.div overflowX="auto" tabIndex={0} role="region" aria-label="Table" my="3">
       <table>{children}</table>
