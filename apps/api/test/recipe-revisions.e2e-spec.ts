@@ -1,5 +1,6 @@
 import { randomUUID } from 'node:crypto';
 import type { CouponDto } from '../src/coupons/dto/coupon.dto';
+import type { InspectionDto } from '../src/coupons/dto/inspection.dto';
 import type { CalibrationDto } from '../src/machines/dto/calibration.dto';
 import type { ComparisonDto } from '../src/recipes/dto/comparison.dto';
 import type { EvidenceCandidatesDto } from '../src/recipes/dto/evidence.dto';
@@ -270,6 +271,22 @@ describe('PUT /api/revisions/:id/evidence', () => {
     expectProblem(await call(test, elsewhere.operator, { url: `/revisions/${draft.id}/evidence/candidates` }), 404, 'not-found');
     expectProblem(await call(test, shop.trainee, { url: `/revisions/${draft.id}/evidence/candidates` }), 403, 'not-permitted');
     expectProblem(await call(test, undefined, { url: `/revisions/${draft.id}/evidence/candidates` }), 401, 'not-signed-in');
+  });
+
+  it('offers no cell of the coupon that the setting comes from as its proof', async () => {
+    const { basis, confirmation } = await read<EvidenceCandidatesDto>(test, shop.operator, `/revisions/${draft.id}/evidence/candidates`);
+    expect(basis.map(({ couponId }) => couponId)).toContain(coupon.id);
+    expect(confirmation.map(({ couponId }) => couponId)).not.toContain(coupon.id);
+  });
+
+  it('proposes for a proof the criteria that the coupon of its basis was judged by', async () => {
+    const proved = await makeProvedCoupon(test, shop);
+    const { criteria, proposedCriteria: ofEffect } = await read<InspectionDto>(test, shop.operator, `/coupons/${proved.id}/inspection`);
+    expect(criteria).not.toEqual(ofEffect);
+    const { id: revisionId } = await draftFromCell(test, shop, proved, { as: shop.lead });
+    const planned = await created<CouponDto>(test, shop.operator, '/api/coupons/confirmation', { revisionId, count: 2 });
+    const { proposedCriteria } = await read<InspectionDto>(test, shop.operator, `/coupons/${planned.id}/inspection`);
+    expect(proposedCriteria).toEqual(criteria);
   });
 
   it('neither offers nor takes the cells of a coupon of equal cells as what the setting comes from', async () => {

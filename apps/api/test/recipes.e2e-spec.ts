@@ -199,8 +199,14 @@ describe('POST /api/recipes/:id/drafts', () => {
   it('copies the approved revision with its evidence, once per author', async () => {
     const approved = await makeApproved(test, shop);
     const url = `/recipes/${approved.recipe.id}/drafts`;
-    const draft = await created<RecipeRevisionDto>(test, shop.operator, `/api${url}`, {});
-    expect(draft).toMatchObject({ state: 'draft', basedOnId: approved.id, reason: '', comparedWith: { id: approved.id }, changes: [] });
+    const draft = await created<RecipeRevisionDto>(test, shop.operator, `/api${url}`, { reason: ' Too light ' });
+    expect(draft).toMatchObject({
+      state: 'draft',
+      basedOnId: approved.id,
+      reason: 'Too light',
+      comparedWith: { id: approved.id },
+      changes: [],
+    });
     expect(draft.steps).toEqual(approved.steps);
     expect(draft.evidence.confirmation.map(({ cellId: id }) => id)).toEqual(approved.evidence.confirmation.map(({ cellId: id }) => id));
     const again = await call(test, shop.operator, { method: 'POST', url, payload: {} });

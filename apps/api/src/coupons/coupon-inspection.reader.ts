@@ -40,7 +40,7 @@ export class CouponInspectionReader {
       criteria: coupon.criteria,
       criteriaRecordedAt: coupon.criteriaRecordedAt?.toISOString() ?? null,
       areCriteriaFixed: ratings.length + measurements.length > 0 || coupon.state === 'inspected' || coupon.state === 'sealed',
-      proposedCriteria: await this.proposedCriteria(tx, shopId, coupon.effectId),
+      proposedCriteria: await this.proposedCriteria(tx, shopId, coupon),
       ratings: ratings.map(toCellRatingDto),
       measurements: toMeasurementDtos(measurements, measurements),
       corrections: (await this.corrections.ofCoupon(tx, shopId, couponId)).map(toCorrectionDto),
@@ -60,7 +60,14 @@ export class CouponInspectionReader {
     return { ...factsOf(whole, photos, await this.inspection.isPhotoRequired(tx, shopId)), ratings };
   }
 
-  private async proposedCriteria(tx: Tx, shopId: string, effectId: string): Promise<Criterion[]> {
+  /** A proof is judged as what it proves was: by the criteria of the coupon that the setting comes from. */
+  private async proposedCriteria(
+    tx: Tx,
+    shopId: string,
+    { effectId, confirmsRevisionId }: { readonly effectId: string; readonly confirmsRevisionId: string | null },
+  ): Promise<Criterion[]> {
+    const ofBasis = confirmsRevisionId === null ? null : await this.inspection.criteriaOfBasis(tx, shopId, confirmsRevisionId);
+    if (ofBasis !== null) return ofBasis;
     const { criteria } = await this.effects.getEffect(tx, shopId, effectId);
     // the request class of effects is the only way into the column, so it holds the model's shape
     return criteria as Criterion[];

@@ -1,10 +1,10 @@
 import { Injectable } from '@nestjs/common';
 import { schema, type Tx } from '@proofplate/db';
 import type { Criterion } from '@proofplate/recipe-model';
-import { and, eq, exists, or, sql } from 'drizzle-orm';
+import { and, eq, exists, isNotNull, or, sql } from 'drizzle-orm';
 import { type StoredCoupon, toStoredCoupon } from './coupons.repository';
 
-const { coupon, cell, cellRating, measurement, photo, shop } = schema;
+const { coupon, cell, cellRating, measurement, photo, revisionEvidence, shop } = schema;
 
 export type CellStanding = { readonly id: string; readonly address: string; readonly markState: string };
 export type PhotoStanding = { readonly id: string; readonly state: string; readonly hasCorners: boolean };
@@ -45,6 +45,26 @@ export class CouponInspectionRepository {
       .select({ id: cell.id, address: cell.address, markState: cell.markState })
       .from(cell)
       .where(and(eq(cell.shopId, shopId), eq(cell.couponId, couponId)));
+  }
+
+  /** Criteria of the coupon that a revision rests on; null where it rests on none or none were recorded. */
+  async criteriaOfBasis(tx: Tx, shopId: string, revisionId: string): Promise<Criterion[] | null> {
+    const [row] = await tx
+      .select({ criteria: coupon.criteria })
+      .from(revisionEvidence)
+      .innerJoin(coupon, and(eq(coupon.shopId, revisionEvidence.shopId), eq(coupon.id, revisionEvidence.couponId)))
+      .where(
+        and(
+          eq(revisionEvidence.shopId, shopId),
+          eq(revisionEvidence.revisionId, revisionId),
+          eq(revisionEvidence.kind, 'basis'),
+          isNotNull(coupon.criteria),
+        ),
+      )
+      .orderBy(coupon.code)
+      .limit(1);
+    // the request class of criteria is the only way into the column, so it holds the model's shape
+    return row === undefined ? null : (row.criteria as Criterion[] | null);
   }
 
   async recordCriteria(tx: Tx, shopId: string, id: string, criteria: Criterion[]): Promise<void> {

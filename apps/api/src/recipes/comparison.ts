@@ -17,9 +17,9 @@ import {
 import { compareSides, type Side } from './compared-value';
 import type { ComparisonRowDto } from './dto/comparison.dto';
 import type { DerivedNumberDto } from './dto/derived-number.dto';
-import { newestOf } from './evidence-judgement';
+import { essentialDifferences, newestOf } from './evidence-judgement';
 import { type NumbersOn, revisionNumbers } from './step-numbers';
-import type { RevisionRecord } from './stored-revision';
+import type { EvidenceCell, RevisionRecord } from './stored-revision';
 
 type Row = Omit<ComparisonRowDto, 'isSame' | 'values'> & { readonly sides: readonly Side[] };
 
@@ -148,18 +148,24 @@ const TOTALS = [
   { key: 'totalTimePer100Mm2', ofOne: 'timePer100Mm2', label: 'Time for 100 mm², all steps', unit: 's' },
 ] as const;
 
-/** Measurements of each revision's reference cell, the first of its basis. */
+/** Measurements of the first cell, of basis and proof, that was marked with exactly this setting. */
 function markRows(records: readonly RevisionRecord[]): Row[] {
-  const quantities = new Map(
-    records.flatMap(({ basis }) => basis.slice(0, 1).flatMap(({ measurements }) => measurements.map((m) => [m.quantity, m.unit]))),
-  );
+  const marks = records.map(markOf);
+  const quantities = new Map(marks.flatMap((cell) => cell?.measurements.map((m) => [m.quantity, m.unit] as const) ?? []));
   return [...quantities.entries()].map(([quantity, unit]) => ({
     ...{ group: 'mark' as const, key: quantity, label: labelOf(quantity), unit: unit === '1' ? '' : unit, step: null },
-    sides: records.map(({ basis }): Side => {
-      const measured = newestOf(basis[0]?.measurements ?? [], quantity, unit);
+    sides: marks.map((cell): Side => {
+      if (cell === undefined) return { kind: 'absent', missingBecause: 'No mark of this setting yet.' };
+      const measured = newestOf(cell.measurements, quantity, unit);
       return measured === null ? { kind: 'absent', missingBecause: 'Not measured.' } : numberSide(measured);
     }),
   }));
+}
+
+function markOf({ basis, confirmation, revision: { content } }: RevisionRecord): EvidenceCell | undefined {
+  return [...basis, ...confirmation].find(
+    ({ parameters, coupon }) => essentialDifferences(parameters, content.steps, coupon.unknownFields).length === 0,
+  );
 }
 
 const on = ({ profile: { physical, panel }, optics }: RevisionRecord): NumbersOn => ({ physical, panel, optics });

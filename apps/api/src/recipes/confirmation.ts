@@ -40,7 +40,7 @@ export type ConfirmationInput = {
 export function confirmationOf(input: ConfirmationInput): Confirmation {
   const basisMarkedAt = latest(input.basis.map(({ coupon }) => coupon.markedAt));
   const marks = [
-    ...input.confirmation.map((cell) => cellMark(cell, input, basisMarkedAt)),
+    ...input.confirmation.map((cell) => cellMark(cell, input)),
     ...input.runs.flatMap((run) => runMarks(run, input, basisMarkedAt)),
   ];
   const counting = marks.filter(({ faults }) => faults.length === 0);
@@ -60,18 +60,21 @@ export function countOf(counting: readonly ConfirmationMark[], stepCount: number
   return stepCount === 0 ? 0 : Math.min(...perStep);
 }
 
-function cellMark(cell: EvidenceCell, input: ConfirmationInput, basisMarkedAt: Date | null): ConfirmationMark {
+/** True for a mark on a later coupon than the ones that a setting comes from. */
+export function isLaterThanBasis({ coupon }: Pick<EvidenceCell, 'coupon'>, basis: readonly Pick<EvidenceCell, 'coupon'>[]): boolean {
+  const isBasisCoupon = basis.some((own) => own.coupon.id === coupon.id);
+  return !isBasisCoupon && isLater(coupon.markedAt, latest(basis.map((own) => own.coupon.markedAt)));
+}
+
+function cellMark(cell: EvidenceCell, input: ConfirmationInput): ConfirmationMark {
   const { coupon } = cell;
   const results = criterionResults(coupon.criteria ?? [], cell.measurements);
   const differences = essentialDifferences(cell.parameters, input.steps, coupon.unknownFields);
-  const isBasisCoupon = input.basis.some((basis) => basis.coupon.id === coupon.id);
   const faults = [
     ...(cell.isMarked ? [] : ['it was skipped']),
     ...(isCitable(coupon.state) ? [] : ['its coupon is not sealed']),
     ...(input.isSameWork(cell) ? [] : ['its coupon is of other material, finish, effect, machine or lens']),
-    ...(isBasisCoupon || !isLater(coupon.markedAt, basisMarkedAt)
-      ? ['its coupon is not later than the one that the setting comes from']
-      : []),
+    ...(isLaterThanBasis(cell, input.basis) ? [] : ['its coupon is not later than the one that the setting comes from']),
     ...(differences.length === 0 ? [] : [`it differs in ${differences.join(', ').toLowerCase()}`]),
     ...severalStepsFault(cell, input),
     ...criterionFaults(meetsAll(results)),

@@ -93,7 +93,7 @@ export class RecipeDraftingService {
         content: { ...source.content, steps },
         profileId: mounting.profileId,
         calibrationId: calibration?.id ?? source.calibrationId,
-        reason: '',
+        reason: dto.reason ?? '',
         basedOnId: source.id,
         ...{ route: source.route, grounds: source.grounds, groundsBy: source.groundsBy },
       };

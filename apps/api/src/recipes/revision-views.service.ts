@@ -3,6 +3,7 @@ import type { Actor } from '../common/actor';
 import { UnitOfWork } from '../database/unit-of-work';
 import { PhotosService } from '../photos/photos.service';
 import { comparisonRows } from './comparison';
+import { isLaterThanBasis } from './confirmation';
 import type { CompareQuery, ComparisonDto } from './dto/comparison.dto';
 import type { EvidenceCandidatesDto } from './dto/evidence.dto';
 import type { RecipeRevisionDto } from './dto/recipe-revision.dto';
@@ -41,14 +42,16 @@ export class RevisionViewsService {
     });
   }
 
-  /** Cells that a draft could cite: the best of the same work that was tried out, and those with exactly its essential parameters. */
+  /** Cells that a draft could cite: the best of the same work that was tried out, and later ones with exactly its essential parameters. */
   async candidates(actor: Actor, id: string): Promise<EvidenceCandidatesDto> {
     return this.unitOfWork.read(actor, async (tx) => {
-      const { recipe, revision } = await this.records.get(tx, actor.shopId, id);
+      const { recipe, revision, basis } = await this.records.get(tx, actor.shopId, id);
       const { steps } = revision.content;
       const cells = await this.evidence.candidates(tx, actor.shopId, keyIdsOf(recipe));
       const triedOut = cells.filter(({ coupon }) => !coupon.isProof);
-      const same = cells.filter(({ parameters, coupon }) => essentialDifferences(parameters, steps, coupon.unknownFields).length === 0);
+      const same = cells.filter(
+        (cell) => isLaterThanBasis(cell, basis) && essentialDifferences(cell.parameters, steps, cell.coupon.unknownFields).length === 0,
+      );
       const toDto = (cell: (typeof cells)[number]) => toEvidenceCellDto(cell, steps, (photo) => this.photos.urlsOf(photo));
       return { basis: triedOut.slice(0, MOST_SHOWN).map(toDto), confirmation: same.slice(0, MOST_SHOWN).map(toDto) };
     });

@@ -22,7 +22,7 @@ export const signsForProcess = ({ signsFor }: Pick<Signer, 'signsFor'>, { effect
 export function signerChecks(signer: Signer, revision: ToSign, authorMaySign: boolean): ApprovalCheck[] {
   const isOwn = hasWritten(signer, revision);
   return [
-    check('signer-not-author', 'Not your own', {
+    check('signer-not-author', 'Written by somebody else', {
       passes: maySignOwn(signer, revision, authorMaySign),
       found: isOwn
         ? authorMaySign
@@ -32,7 +32,7 @@ export function signerChecks(signer: Signer, revision: ToSign, authorMaySign: bo
       wayOut: 'Ask another lead.',
       blocks: 'approve',
     }),
-    check('signer-process', 'Your process', {
+    check('signer-process', 'A process that you sign for', {
       passes: signsForProcess(signer, revision),
       found: signsForProcess(signer, revision) ? 'You sign for this process.' : 'You are not named for this process.',
       wayOut: 'Ask a lead who is, or the owner.',

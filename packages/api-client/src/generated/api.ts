@@ -6136,6 +6136,8 @@ export interface components {
              * @description Revision to copy; absent: the approved one, else the newest
              */
             basedOnRevisionId?: string;
+            /** @description Reason for the change */
+            reason?: string;
         };
         ComparedValueDto: {
             /**

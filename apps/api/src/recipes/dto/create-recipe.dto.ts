@@ -93,6 +93,11 @@ export class CreateDraftDto {
   @MayBeAbsent()
   @IsUUID('all', { message: 'Choose a revision of this recipe.' })
   basedOnRevisionId?: string;
+
+  @ApiPropertyOptional({ description: 'Reason for the change', maxLength: MAX_REASON_LENGTH })
+  @MayBeAbsent()
+  @TrimmedText(MAX_REASON_LENGTH)
+  reason?: string;
 }
 
 export class UpdateRecipeDto {
