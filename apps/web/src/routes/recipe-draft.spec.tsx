@@ -1,9 +1,9 @@
 import { fireEvent, screen, waitFor, within } from '@testing-library/react';
 import { StatusLineProvider } from '../components/status-line';
 import { closeSession, openSession } from '../lib/session';
-import { type FakeHandler, type FakeRequest, fakeServer, problem } from '../testing/fake-server';
+import { type FakeHandler, type FakeRequest, fakeServer, lostConnection, problem } from '../testing/fake-server';
 import { renderRoutes } from '../testing/render';
-import { makeChecks, makeRevision, makeStep } from '../testing/revisions';
+import { makeChecks, makeEvidenceCell, makeRevision, makeStep } from '../testing/revisions';
 import { makeSessionAnswer } from '../testing/sessions';
 import { Component as DraftPage } from './recipe-draft';
 
@@ -31,6 +31,7 @@ const saves = ({ body }: FakeRequest) => ({ body: { ...draft, ...(body as object
 function openPage(handlers: Record<string, FakeHandler> = {}) {
   server = fakeServer({
     'GET /api/revisions/draft-1': () => ({ body: draft }),
+    'GET /api/revisions/draft-1/evidence/candidates': () => ({ body: { basis: [], confirmation: [] } }),
     'GET /api/revisions/draft-1/checks': () => ({ body: makeChecks() }),
     'GET /api/machines/x1/calibrations': () => ({ body: { items: [], nextCursor: null } }),
     [PATCH]: saves,
@@ -96,11 +97,11 @@ describe('the draft editor', () => {
     typeInto('Power, %', '60.5');
     typeInto('Reason for the change', 'darker');
     await waitFor(() => expect(server.bodies(PATCH)).toEqual([{ reason: 'darker' }]), { timeout: 8000 });
-    expect(await screen.findByText(/Nearest that it can: 60 % or 61 %/)).toBeVisible();
+    await waitFor(() => expect(screen.getByLabelText('Power, %')).toHaveAccessibleDescription(/Nearest that it can: 60 % or 61 %/));
     expect(screen.getByLabelText('Power, %')).toHaveValue('60.5');
   });
 
-  it('shows both values when somebody else saved meanwhile, and overwrites neither unseen', async () => {
+  it('shows both values when the draft was saved in another place meanwhile, and overwrites neither unseen', async () => {
     const theirs = { ...draft, version: 9, reason: 'theirs', steps: [makeStep(50)] };
     let isStale = true;
     const { user } = openPage({
@@ -118,7 +119,7 @@ describe('the draft editor', () => {
     const table = await screen.findByRole('table', { name: 'Reason: both values' }, { timeout: 8000 });
     expect(within(table).getByText('mine')).toBeVisible();
     expect(within(table).getByText('theirs')).toBeVisible();
-    expect(screen.getByText('only the other changed it')).toBeVisible();
+    expect(screen.getByText('changed only there')).toBeVisible();
     await user.click(screen.getByRole('button', { name: 'Save the draft as decided' }));
     await waitFor(() => expect(server.bodies(PATCH)).toHaveLength(2), { timeout: 8000 });
     expect(server.bodies(PATCH)[1]).toEqual({ reason: 'mine' });
@@ -129,6 +130,49 @@ describe('the draft editor', () => {
         ?.headers.get('if-match'),
     ).toBe('"v9"');
     expect(screen.getByLabelText('Power, %')).toHaveValue('50');
+  });
+
+  it('leads from what is not saved to the field that keeps it', async () => {
+    const { user } = openPage();
+    await screen.findByLabelText('Power, %');
+    typeInto('Power, %', '60.5');
+    await user.click(await screen.findByRole('link', { name: /^Step 1: Power: / }, { timeout: 8000 }));
+    expect(screen.getByLabelText('Power, %')).toHaveFocus();
+  });
+
+  it('sends again by itself what was not saved, as soon as the browser is back online', async () => {
+    let isGone = true;
+    openPage({ [PATCH]: (request) => (isGone ? lostConnection() : saves(request)) });
+    await screen.findByLabelText('Reason for the change');
+    typeInto('Reason for the change', 'darker');
+    expect(await screen.findByText(/^Not saved: no answer/, {}, { timeout: 8000 })).toBeVisible();
+    isGone = false;
+    fireEvent(window, new Event('online'));
+    expect(await screen.findByText('Saved')).toBeVisible();
+    expect(server.bodies(PATCH).at(-1)).toEqual({ reason: 'darker' });
+  });
+
+  it('cites every mark of a coupon that proves it in one act', async () => {
+    const marks = ['A1', 'A2'].map((address) => makeEvidenceCell({ cellId: `proof-${address}`, couponCode: 'C-0121', address }));
+    const basis = makeEvidenceCell({ cellId: 'basis-1' });
+    const resting = { ...draft, evidence: { basis: [basis], confirmation: [], runs: [] } };
+    const { user } = openPage({
+      'GET /api/revisions/draft-1': () => ({ body: resting }),
+      'GET /api/revisions/draft-1/evidence/candidates': () => ({ body: { basis: [], confirmation: marks } }),
+      'PUT /api/revisions/draft-1/evidence': () => ({ body: { ...resting, evidence: { ...resting.evidence, confirmation: marks } } }),
+    });
+    await user.click(await screen.findByRole('button', { name: 'Cite its 2 marks' }));
+    await waitFor(() => expect(screen.queryByRole('button', { name: 'Cite its 2 marks' })).toBeNull());
+    expect(server.bodies('PUT /api/revisions/draft-1/evidence')).toEqual([
+      { basisCellIds: ['basis-1'], confirmationCellIds: ['proof-A1', 'proof-A2'] },
+    ]);
+  });
+
+  it('stands in the order of the work: reason and evidence before submit', async () => {
+    openPage();
+    const submit = await screen.findByRole('button', { name: 'Submit for review' });
+    for (const earlier of [screen.getByLabelText('Reason for the change'), screen.getByRole('region', { name: 'Evidence' })])
+      expect(earlier.compareDocumentPosition(submit)).toBe(Node.DOCUMENT_POSITION_FOLLOWING);
   });
 
   it('changes the order of set-up steps by buttons', async () => {

@@ -91,11 +91,6 @@ function RevisionActions({ revision }: { revision: Revision }) {
   return (
     <>
       {comparedWith !== null && <ButtonLink to={`${paths.compareRevisions(recipe.code)}?ids=${comparedWith.id},${id}`}>Compare</ButtonLink>}
-      {may('discard') && (
-        <Button kind="danger" onClick={() => setIsDiscarding(true)}>
-          Throw away
-        </Button>
-      )}
       {may('recall') && <RecallButton revision={revision} />}
       {may('transfer') && <ButtonLink to={paths.transferRevision(recipe.code, id)}>Transfer…</ButtonLink>}
       {may('copy') && <ProposeChangeButton recipe={recipe} basedOnId={id} kind="plain" label="Propose a change from it" />}
@@ -103,6 +98,11 @@ function RevisionActions({ revision }: { revision: Revision }) {
         <ButtonLink kind="primary" to={paths.signOff(id)}>
           Review and sign
         </ButtonLink>
+      )}
+      {may('discard') && (
+        <Button kind="quiet" color="oxide.fg" onClick={() => setIsDiscarding(true)}>
+          Throw away
+        </Button>
       )}
       {isDiscarding && (
         <DiscardDialog

@@ -7,17 +7,17 @@ import { StateShape } from '../../../components/state-mark';
 import type { Conflict, ConflictPart, PartKey } from './draft-conflict';
 
 const CHOICES = [
-  { value: 'mine', label: 'Keep mine' },
-  { value: 'theirs', label: 'Take theirs' },
+  { value: 'mine', label: 'Keep what is here' },
+  { value: 'theirs', label: 'Take what was saved' },
 ] as const;
 
 const CHANGED_WORDS: Record<ConflictPart['changedBy'], string> = {
-  me: 'only you changed it',
-  them: 'only the other changed it',
-  both: 'both changed it',
+  me: 'changed only here',
+  them: 'changed only there',
+  both: 'changed in both places',
 };
 
-/** Two people were in one draft: both values of everything that differs, and a choice for each part. Nothing is overwritten unseen. */
+/** One draft was open in two places, of one person or of two: both values of everything that differs, and a choice for each part. Nothing is overwritten unseen. */
 export function ConflictView({ conflict, onResolve }: { conflict: Conflict; onResolve: (keepsMine: ReadonlySet<PartKey>) => void }) {
   const [keepsMine, setKeepsMine] = useState<ReadonlySet<PartKey>>(
     () => new Set(conflict.parts.filter(({ changedBy }) => changedBy !== 'them').map(({ key }) => key)),
@@ -32,9 +32,11 @@ export function ConflictView({ conflict, onResolve }: { conflict: Conflict; onRe
     <Panel role="alert" px="5" py="4" mb="4" borderColor="straw.emphasized">
       <Flex gap="2" align="center" color="straw.fg">
         <StateShape state="caution" />
-        <h2>Somebody else saved this draft meanwhile</h2>
+        <h2>This draft was saved in another place meanwhile</h2>
       </Flex>
-      <p>Nothing of yours is lost, and nothing of theirs was overwritten. Decide on each part, then save.</p>
+      <p>
+        By somebody else, or by you in another tab or on another device. Nothing is lost or overwritten. Decide on each part, then save.
+      </p>
       <chakra.ul mt="2">
         {conflict.parts.map((part) => (
           <chakra.li key={part.key} borderTop="hairline" py="3">
@@ -69,7 +71,7 @@ function BothValues({ part: { leaves, label } }: { part: ConflictPart }) {
     <chakra.table width="full" mt="2" fontSize="sm" lineHeight="sm" aria-label={`${label}: both values`}>
       <thead>
         <tr>
-          {['Where', 'Yours', 'Theirs'].map((head) => (
+          {['Where', 'Here', 'Saved there'].map((head) => (
             <chakra.th key={head} scope="col" textAlign="start" color="fg.muted" fontWeight="semibold" py="1" width="33%">
               {head}
             </chakra.th>

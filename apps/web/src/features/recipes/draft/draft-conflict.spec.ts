@@ -17,18 +17,22 @@ describe('two people in one draft', () => {
     expect(changedParts(base, partsOf(base))).toEqual({});
   });
 
-  it('both values of every differing part are shown, with who changed it', () => {
+  it('both values of every differing part are shown, in the words of the panel, with where it was changed', () => {
     const parts = conflictParts({
       saved: partsOf(base),
       mine: { ...base, steps: [step(55)], reason: 'mine' },
-      theirs: { ...base, steps: [step(50)], grounds: 'seen at the bench' },
+      theirs: { ...base, steps: [{ ...step(50), fill: 'crossed' }], grounds: 'seen at the bench' },
+      fields: [{ parameter: 'powerPercent', label: 'PWR', unit: 'percentFromZero', minimum: 0, maximum: 100, step: 1 }],
     });
     expect(parts).toEqual([
       {
         key: 'steps',
         label: 'Mark steps',
         changedBy: 'both',
-        leaves: [{ name: '1 values powerPercent', mine: '55 percentFromZero', theirs: '50 percentFromZero' }],
+        leaves: [
+          { name: 'Step 1: Fill', mine: 'one direction', theirs: 'crossed (two scans a pass)' },
+          { name: 'Step 1: PWR', mine: '55 %', theirs: '50 %' },
+        ],
       },
       { key: 'reason', label: 'Reason', changedBy: 'me', leaves: [{ name: '', mine: 'mine', theirs: 'darker' }] },
       { key: 'grounds', label: 'Grounds', changedBy: 'them', leaves: [{ name: '', mine: 'nothing', theirs: 'seen at the bench' }] },

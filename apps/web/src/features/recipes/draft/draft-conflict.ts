@@ -1,5 +1,8 @@
+import { PANEL_UNITS, type PanelUnit } from '@proofplate/physics';
+import { codeWords } from '../../../lib/code-words';
 import type { Revision, RevisionChange } from '../recipes.api';
 import type { DraftValues } from './draft-values';
+import { fieldWords } from './field-words';
 
 /** Parts of a draft that are saved, and decided on, as a whole. */
 export const PARTS = [
@@ -42,40 +45,56 @@ export type ConflictPart = {
 };
 export type Conflict = { theirs: Revision; parts: readonly ConflictPart[] };
 
+type PanelFields = Revision['profile']['panel']['fields'];
+type States = { saved: SavedParts; mine: RevisionChange; theirs: RevisionChange; fields: PanelFields };
+
 /** Every part in which the two drafts differ, with both values. */
-export function conflictParts(states: { saved: SavedParts; mine: RevisionChange; theirs: RevisionChange }): ConflictPart[] {
+export function conflictParts(states: States): ConflictPart[] {
   const mine = partsOf(states.mine);
   const theirs = partsOf(states.theirs);
   return PARTS.flatMap(({ key, label }) => {
     if (mine[key] === undefined || mine[key] === theirs[key]) return [];
     const changedBy = theirs[key] === states.saved[key] ? 'me' : mine[key] === states.saved[key] ? 'them' : 'both';
-    return [{ key, label, changedBy, leaves: differingLeaves(states.mine[key], states.theirs[key]) }];
+    return [{ key, label, changedBy, leaves: differingLeaves([key, states.mine[key], states.theirs[key]], states.fields) }];
   });
 }
 
-function differingLeaves(mine: unknown, theirs: unknown): DifferingLeaf[] {
+function differingLeaves([part, mine, theirs]: [PartKey, unknown, unknown], fields: PanelFields): DifferingLeaf[] {
   const left = leavesOf(mine);
   const right = leavesOf(theirs);
   const names = [...new Set([...left.keys(), ...right.keys()])];
   return names
-    .map((name) => ({ name, mine: left.get(name) ?? 'nothing', theirs: right.get(name) ?? 'nothing' }))
+    .map((name) => ({
+      name: name === '' ? '' : fieldWords(`${part}.${name}`, fields),
+      mine: left.get(name) ?? 'nothing',
+      theirs: right.get(name) ?? 'nothing',
+    }))
     .filter((leaf) => leaf.mine !== leaf.theirs);
 }
 
-/** "1 values powerPercent" → "60 percentFromZero": a value and its unit stay together. */
+/** "0.values.powerPercent" → "60 %": a value and its unit stay together. */
 function leavesOf(value: unknown, path: readonly string[] = []): Map<string, string> {
   const leaves = new Map<string, string>();
-  if (isEntered(value)) leaves.set(path.join(' '), `${value.value} ${value.unit}`);
+  if (isEntered(value)) leaves.set(path.join('.'), `${value.value} ${PANEL_UNITS[value.unit].symbol}`.trim());
   else if (typeof value === 'object' && value !== null) {
     for (const [key, own] of Object.entries(value)) {
-      const step = Array.isArray(value) ? String(Number(key) + 1) : key;
-      for (const [name, text] of leavesOf(own, [...path, step])) leaves.set(name, text);
+      for (const [name, text] of leavesOf(own, [...path, key])) leaves.set(name, text);
     }
-  } else leaves.set(path.join(' '), value === '' || value === null || value === undefined ? 'nothing' : String(value));
+  } else
+    leaves.set(
+      path.join('.'),
+      typeof value === 'boolean'
+        ? value
+          ? 'yes'
+          : 'no'
+        : value === '' || value === null || value === undefined
+          ? 'nothing'
+          : (codeWords(String(value)) ?? String(value)),
+    );
   return leaves;
 }
 
-function isEntered(value: unknown): value is { value: number; unit: string } {
+function isEntered(value: unknown): value is { value: number; unit: PanelUnit } {
   return typeof value === 'object' && value !== null && 'value' in value && 'unit' in value;
 }
 

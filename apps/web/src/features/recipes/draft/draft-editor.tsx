@@ -21,7 +21,7 @@ export type DraftEditorProps = {
   children: (saving: { flush: () => Promise<boolean>; isSaved: boolean }) => ReactNode;
 };
 
-/** A draft with everything that is signed later: setting left, proof and checks right. */
+/** A draft with everything that is signed later: setting left; reason, proof, checks and the way to submit right. */
 export function DraftEditor({ revision, children }: DraftEditorProps) {
   const draft = useDraft(revision);
   const { form, messages, conflict, flush, state } = draft;
@@ -29,7 +29,7 @@ export function DraftEditor({ revision, children }: DraftEditorProps) {
   return (
     <>
       <chakra.div mb="3">
-        <SavingLine draft={draft} />
+        <SavingLine draft={draft} fields={revision.profile.panel.fields} />
       </chakra.div>
       {conflict !== undefined && <ConflictView conflict={conflict} onResolve={draft.resolve} />}
       <CautionFields form={form} cautions={revision.cautions} />
@@ -45,10 +45,10 @@ export function DraftEditor({ revision, children }: DraftEditorProps) {
           <CoverFields form={form} messages={messages} />
         </chakra.div>
         <chakra.div display="grid" gap="4" gridTemplateColumns="minmax(0, 1fr)">
-          {children({ flush, isSaved: state === 'saved' && conflict === undefined })}
           <ReasonFields {...editing} />
           <EvidenceFields revision={revision} draft={draft} />
           {revision.allowedActions.includes('start-confirmation') && <ProveIt revision={revision} form={form} flush={flush} />}
+          {children({ flush, isSaved: state === 'saved' && conflict === undefined })}
         </chakra.div>
       </chakra.div>
     </>

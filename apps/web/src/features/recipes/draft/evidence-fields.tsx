@@ -12,7 +12,7 @@ import { ProblemNotice } from '../../../components/problem-notice';
 import { SkeletonBlock } from '../../../components/skeletons';
 import { StateMark } from '../../../components/state-mark';
 import { ProblemError } from '../../../lib/api';
-import { formatNumber } from '../../../lib/format';
+import { formatCount, formatNumber } from '../../../lib/format';
 import { EvidencePlates } from '../components/evidence-plates';
 import { type EvidenceCell, type EvidenceChoice, type Revision, setEvidence, useEvidenceCandidates } from '../recipes.api';
 import type { Draft } from './use-draft';
@@ -27,9 +27,51 @@ export function EvidenceFields({ revision, draft }: { revision: Revision; draft:
         <Button onClick={() => setIsChoosing(true)}>Choose cells</Button>
       </Flex>
       <EvidencePlates evidence={revision.evidence} />
+      <ProofOffers revision={revision} draft={draft} />
       {isChoosing && <EvidenceDialog revision={revision} draft={draft} onClose={() => setIsChoosing(false)} />}
     </Panel>
   );
+}
+
+/** Marks that prove exactly this setting and are cited by nobody yet: one act cites all of a coupon. */
+function ProofOffers({ revision, draft }: { revision: Revision; draft: Draft }) {
+  const { data } = useEvidenceCandidates(revision.id);
+  const [problem, setProblem] = useState<ProblemError>();
+  const { basis, confirmation } = revision.evidence;
+  const cited = confirmation.map(({ cellId }) => cellId);
+  const offers = byCoupon(data?.confirmation.filter(({ cellId }) => !cited.includes(cellId)) ?? []);
+  const handleCite = async (cells: readonly EvidenceCell[]) => {
+    const confirmationCellIds = [...cited, ...cells.map(({ cellId }) => cellId)];
+    try {
+      await draft.changeWith((version) =>
+        setEvidence(revision.id, version, { basisCellIds: basis.map(({ cellId }) => cellId), confirmationCellIds }),
+      );
+      setProblem(undefined);
+    } catch (failure) {
+      if (!(failure instanceof ProblemError)) throw failure;
+      setProblem(failure);
+    }
+  };
+  return (
+    <>
+      {problem !== undefined && (
+        <ProblemNotice what={`Nothing was changed. ${problem.title}.`} todo={problem.errors[0]?.detail ?? problem.detail} />
+      )}
+      {offers.map((cells) => (
+        <Flex key={cells[0]?.couponId} justify="space-between" align="center" gap="3" wrap="wrap" mt="3">
+          <span>
+            <b>{cells[0]?.couponCode}</b> has {formatCount(cells.length, 'later mark')} with exactly this setting.
+          </span>
+          <Button onClick={() => void handleCite(cells)}>{cells.length === 1 ? 'Cite its mark' : `Cite its ${cells.length} marks`}</Button>
+        </Flex>
+      ))}
+    </>
+  );
+}
+
+function byCoupon(cells: readonly EvidenceCell[]): EvidenceCell[][] {
+  const ids = [...new Set(cells.map(({ couponId }) => couponId))];
+  return ids.map((id) => cells.filter(({ couponId }) => couponId === id));
 }
 
 type EvidenceDialogProps = { revision: Revision; draft: Draft; onClose: () => void };

@@ -10,6 +10,8 @@ import { type DraftValues, draftValues } from './draft-values';
 import { type FieldMessages, readDraft } from './read-draft';
 
 const TYPING_PAUSE_MS = 700;
+/** Between two tries while nothing answers; a browser that is back online says so at once. */
+const RETRY_MS = 4000;
 
 export type SavingState = 'saved' | 'waiting' | 'saving' | 'needs-change' | 'unreachable' | 'refused';
 
@@ -46,7 +48,7 @@ export function useDraft(revision: Revision): Draft {
     async (mine: ReturnType<typeof readDraft>['change']) => {
       const theirs = await readRevision(revision.id);
       const theirChange = readDraft(draftValues(theirs, shop.locale), fields, shop.locale).change;
-      setConflict({ theirs, parts: conflictParts({ saved: saved.current, mine, theirs: theirChange }) });
+      setConflict({ theirs, parts: conflictParts({ saved: saved.current, mine, theirs: theirChange, fields }) });
     },
     [revision.id, fields, shop.locale],
   );
@@ -85,6 +87,8 @@ export function useDraft(revision: Revision): Draft {
     return inTurn(save);
   }, [inTurn, save]);
   useSaveAfterTyping({ form, timer, flush, isHeld: conflict !== undefined, onTyped: () => setState('waiting') });
+
+  useRetryUntilAnswered(state === 'unreachable', flush);
 
   const changeWith = useCallback(
     (work: (version: number) => Promise<Revision>) =>
@@ -130,6 +134,20 @@ function useSaveAfterTyping({ form, timer, flush, isHeld, onTyped }: SaveAfterTy
     return unsubscribe;
   }, [form, timer, flush, isHeld]);
   useEffect(() => () => clearTimeout(timer.current), [timer]);
+}
+
+/** What was not saved for want of an answer goes out again by itself. */
+function useRetryUntilAnswered(isUnanswered: boolean, flush: () => Promise<boolean>) {
+  useEffect(() => {
+    if (!isUnanswered) return undefined;
+    const retry = () => void flush();
+    const timer = setInterval(retry, RETRY_MS);
+    addEventListener('online', retry);
+    return () => {
+      clearInterval(timer);
+      removeEventListener('online', retry);
+    };
+  }, [isUnanswered, flush]);
 }
 
 /** Runs one piece of work after the other, whatever becomes of the one before. */
