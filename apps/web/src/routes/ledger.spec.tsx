@@ -54,7 +54,7 @@ describe('the ledger page', () => {
     expect(row).toHaveAttribute('aria-expanded', 'false');
     await user.click(row);
     const details = screen.getByRole('table', { name: 'What changed' });
-    expect(within(details).getByRole('row', { name: 'state in_review approved' })).toBeVisible();
+    expect(within(details).getByRole('row', { name: 'state in review approved' })).toBeVisible();
     expect(screen.getByText(HASH)).toBeVisible();
     expect(screen.getByRole('link', { name: 'Every event of R-0031' })).toHaveAttribute('href', '/ledger?code=R-0031');
   });

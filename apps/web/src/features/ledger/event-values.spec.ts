@@ -18,5 +18,16 @@ describe('changedValues()', () => {
     ]);
   });
 
+  it('says stored codes, parameters and their units as the product says them', () => {
+    const setting = { steps: [{ purpose: 'anneal', values: { speedMmPerS: { entered: { value: 800, unit: 'mm/s' }, physical: 800 } } }] };
+    expect(changedValues({ state: 'in_review' }, { state: 'approved', isByAuthor: false, content: setting })).toEqual([
+      { path: 'state', before: 'in review', after: 'approved' },
+      { path: 'signed by its author', before: '—', after: 'no' },
+      { path: 'setting › steps › 1 › purpose', before: '—', after: 'anneal' },
+      { path: 'setting › steps › 1 › values › scan speed › as entered', before: '—', after: '800 mm/s' },
+      { path: 'setting › steps › 1 › values › scan speed › at the work', before: '—', after: '800' },
+    ]);
+  });
+
   it('has nothing to show of an event without values', () => expect(changedValues(null, null)).toEqual([]));
 });

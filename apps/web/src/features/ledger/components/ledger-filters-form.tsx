@@ -1,5 +1,5 @@
 import { chakra } from '@chakra-ui/react';
-import { useEffect, useState } from 'react';
+import { useEffect, useRef, useState } from 'react';
 import { SelectField, TextField } from '../../../components/field';
 import { ACTIONS } from '../action-words';
 import { useLedgerActors } from '../ledger.api';
@@ -8,9 +8,10 @@ import { type FilterName, type LedgerFilters, readCode } from '../ledger-filters
 /** Two choices above three short fields on a tablet, all in one row on a desk. */
 const PLACES = {
   '& > *': { gridColumn: { base: 'auto', sm: 'span 2', xl: 'span 2' } },
-  '& > :nth-of-type(-n + 2)': { gridColumn: { base: 'auto', sm: 'span 3', xl: 'span 4' } },
+  '& > :nth-of-type(-n + 2)': { gridColumn: { base: 'auto', sm: 'span 3', xl: 'span 3' } },
 } as const;
 
+const TYPING_PAUSE_MS = 400;
 const ACTION_OPTIONS = Object.entries(ACTIONS).map(([value, { label }]) => ({ value, label }));
 
 export type LedgerFiltersFormProps = {
@@ -32,7 +33,7 @@ export function LedgerFiltersForm({ idPrefix, filters, onFilter }: LedgerFilters
       role="search"
       aria-label="Search the ledger"
       display="grid"
-      gridTemplateColumns={{ base: 'minmax(0, 1fr)', sm: 'repeat(6, minmax(0, 1fr))', xl: 'repeat(14, minmax(0, 1fr))' }}
+      gridTemplateColumns={{ base: 'minmax(0, 1fr)', sm: 'repeat(6, minmax(0, 1fr))', xl: 'repeat(12, minmax(0, 1fr))' }}
       gap="3"
       css={PLACES}
     >
@@ -73,13 +74,23 @@ export function LedgerFiltersForm({ idPrefix, filters, onFilter }: LedgerFilters
   );
 }
 
-/** Waits until what is typed is a code; Enter and leaving the field say so when it is none. */
+/** Results follow as soon as what is typed is a code; Enter and leaving the field say so when it is none. */
 function CodeField({ name, code, onCode }: { name: string; code: string; onCode: (code: string) => void }) {
   const [typed, setTyped] = useState(code);
   const [isTold, setIsTold] = useState(false);
   useEffect(() => setTyped(code), [code]);
   const isUnreadable = typed.trim() !== '' && readCode(typed) === undefined;
+  const timer = useRef<ReturnType<typeof setTimeout>>(undefined);
+  useEffect(() => () => clearTimeout(timer.current), []);
+  const handleType = (text: string) => {
+    setTyped(text);
+    clearTimeout(timer.current);
+    const read = text.trim() === '' ? '' : readCode(text);
+    // "R-1" is a code on the way to "R-12": the list waits for the pause.
+    if (read !== undefined && read !== code) timer.current = setTimeout(() => onCode(read), TYPING_PAUSE_MS);
+  };
   const settle = () => {
+    clearTimeout(timer.current);
     setIsTold(isUnreadable);
     if (!isUnreadable) onCode(readCode(typed) ?? '');
   };
@@ -92,7 +103,7 @@ function CodeField({ name, code, onCode }: { name: string; code: string; onCode:
       spellCheck={false}
       value={typed}
       error={isTold && isUnreadable ? 'Type a code like R-0031' : undefined}
-      onChange={(event) => setTyped(event.currentTarget.value)}
+      onChange={(event) => handleType(event.currentTarget.value)}
       onBlur={settle}
       onKeyDown={(event) => {
         if (event.key === 'Enter') settle();
