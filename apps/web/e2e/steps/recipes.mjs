@@ -50,9 +50,11 @@ export async function approve({ page, go }, { password, number }) {
 export async function proposeChange({ page, go }, { recipe }) {
   await go(`/recipes/${recipe}`);
   await page.getByRole('button', { name: 'Propose a change' }).click();
+  const dialog = page.getByRole('dialog');
+  await dialog.getByLabel('Reason for the change').fill('Wipe before marking: fingerprints showed.');
+  await dialog.getByRole('button', { name: 'Begin the draft' }).click();
   await page.waitForURL(/\/revisions\//);
   await acknowledgeCautions(page);
-  await page.getByLabel('Reason for the change').fill('Wipe before marking: fingerprints showed.');
   await page.getByRole('button', { name: 'Add a set-up step' }).click();
   await page.getByRole('textbox', { name: 'Set-up step 2' }).fill('Wipe with isopropanol, let it dry 30 s');
   await page.getByText('Saved', { exact: true }).waitFor();

@@ -1,5 +1,6 @@
 import { formatNumber, formatQuantity, formatUnit } from '../lib/format';
 import { paths } from '../lib/paths';
+import { isShare } from '../lib/share-numbers';
 import type { NumbersGroup, ShownNumber } from './numbers-panel/shown-number';
 import { stepTitle } from './setting-rows';
 
@@ -52,7 +53,6 @@ const FIRST = new Set([
   ...['workPower', 'spotAtWork', 'pulseEnergy', 'rectangularPeakPower', 'peakFluence', 'averageIrradiance'],
   ...['pulsePitch', 'pulseOverlap', 'lineOverlap', 'arealDose', 'timePer100Mm2', 'totalArealDose', 'totalTimePer100Mm2'],
 ]);
-const SHARES = new Set(['pulseOverlap', 'lineOverlap', 'coverageRipple']);
 const SHOWN_DIGITS = 3;
 const INPUT_DIGITS = 6;
 /** Below this a pulse energy reads better in the next smaller unit. */
@@ -120,7 +120,7 @@ export function numberLabel(key: string): string {
 
 function shownValue({ key, value, unit }: SettingNumber): Pick<ShownNumber, 'text' | 'unit'> {
   if (value === null || value === undefined) return { text: undefined, unit: '' };
-  if (SHARES.has(key)) return { text: formatNumber(value * 100, { decimals: 1 }), unit: '%' };
+  if (isShare(key)) return { text: formatNumber(value * 100, { decimals: 1 }), unit: '%' };
   if (unit === 'mJ' && Math.abs(value) < SMALL_MJ) return { text: rounded(value * 1000), unit: 'µJ' };
   return { text: rounded(value), unit: unit === '1' ? '' : formatUnit(unit) };
 }

@@ -5,6 +5,12 @@ export function symbolOf(quantity: string): string {
   return Object.entries(QUANTITIES).find(([key]) => key === quantity)?.[1].symbol ?? quantity;
 }
 
+/** "Evenness, U": the word first, since a symbol alone says nothing to whoever did not learn it. */
+export function quantityWords(quantity: string): string {
+  const meaning = Object.entries(QUANTITIES).find(([key]) => key === quantity)?.[1];
+  return meaning === undefined ? quantity : `${meaning.label}, ${meaning.symbol}`;
+}
+
 /** "by profilometer" and the like; a photo needs no word, since it is the picture beside the number. */
 export function methodWord(method: string): string {
   return (

@@ -23,6 +23,8 @@ export const paths = {
   signOffs: '/sign-off',
   signOff: (revisionId: string) => `/sign-off/${encodeURIComponent(revisionId)}`,
   runs: '/runs',
+  /** The runs of one recipe; the code is what the list calls it. */
+  runsOf: ({ id, code }: { id: string; code: string }) => `/runs?recipeId=${encodeURIComponent(id)}&recipe=${encodeURIComponent(code)}`,
   startRun: (revisionId: string) => `/runs/start?revision=${encodeURIComponent(revisionId)}`,
   requests: '/requests',
   run: (code: string) => `/runs/${encodeURIComponent(code)}`,

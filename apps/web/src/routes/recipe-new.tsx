@@ -11,7 +11,7 @@ export function Component() {
   const handleStarted = ({ id, recipe }: Revision) => void navigate(paths.recipeRevision(recipe.code, id));
   return (
     <Page
-      title="Add a recipe by another route"
+      title="Add a recipe without a coupon"
       crumbs={CRUMBS}
       meta={<span>For a setting that was not found on a coupon of the shop.</span>}
     >

@@ -82,6 +82,15 @@ describe('the recipe page', () => {
     expect(screen.getAllByText(/Approved for use as lead operator, 3 Mar 2026 09:12 CET/)[0]).toBeVisible();
   });
 
+  it('shows what each signature is bound to, short and in full, and leads to the runs of the recipe', async () => {
+    const { user } = openPage('/recipes/R-0042');
+    const signatures = await screen.findByRole('region', { name: 'Signatures' });
+    expect(signatures).toHaveTextContent('Signed digest aaaa aaaa …');
+    await user.click(within(signatures).getByRole('button', { name: 'Show all' }));
+    expect(signatures).toHaveTextContent(`Signed digest ${Array(16).fill('aaaa').join(' ')}`);
+    expect(screen.getByRole('link', { name: 'Runs' })).toHaveAttribute('href', '/runs?recipeId=recipe-42&recipe=R-0042');
+  });
+
   it('lets a lead place a hold here, on a button that names the recipe by its code', async () => {
     const { user } = openPage(
       '/recipes/R-0042',
@@ -155,12 +164,18 @@ describe('the recipe page', () => {
     expect(await screen.findByText('Revision 5 is withdrawn. R-0042 stays at revision 3.')).toBeVisible();
   });
 
-  it('begins a change as a draft of its own', async () => {
+  it('begins a change as a draft of its own, once its reason is given', async () => {
     const { user, router } = openPage('/recipes/R-0042', {
       'POST /api/recipes/recipe-42/drafts': () => ({ status: 201, body: { ...approved, id: 'draft-1', number: null, state: 'draft' } }),
     });
     await user.click(await screen.findByRole('button', { name: 'Propose a change' }));
+    await user.click(screen.getByRole('button', { name: 'Begin the draft' }));
+    expect((await screen.findAllByText(/Say why it should change/))[0]).toBeVisible();
+    expect(server.bodies('POST /api/recipes/recipe-42/drafts')).toEqual([]);
+    await user.type(screen.getByLabelText('Reason for the change'), 'Brown rims');
+    await user.click(screen.getByRole('button', { name: 'Begin the draft' }));
     await screen.findByText('elsewhere');
+    expect(server.bodies('POST /api/recipes/recipe-42/drafts')).toEqual([{ reason: 'Brown rims' }]);
     expect(router.state.location.pathname).toBe('/recipes/R-0042/revisions/draft-1');
   });
 

@@ -60,6 +60,7 @@ function RecipePage({ recipe }: { recipe: Recipe }) {
           <span>
             {recipe.machine.name}, {recipe.lens.name}
           </span>
+          <TextLink to={paths.runsOf(recipe)}>Runs</TextLink>
           {member.role !== 'trainee' && <TextLink to={paths.ledgerOf(code)}>In the ledger</TextLink>}
         </>
       }

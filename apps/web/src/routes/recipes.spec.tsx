@@ -67,7 +67,7 @@ describe('the list of recipes', () => {
     openPage(makeRecipePage([]));
     expect(await screen.findByRole('heading', { name: 'No recipes yet' })).toBeVisible();
     expect(screen.getAllByRole('link', { name: 'Plan a coupon' })).toHaveLength(2);
-    const others = screen.getAllByRole('link', { name: 'Add a recipe by another route' });
+    const others = screen.getAllByRole('link', { name: 'Add a recipe without a coupon' });
     expect(others.map((link) => link.getAttribute('href'))).toEqual(['/recipes/new', '/recipes/new']);
   });
 

@@ -22,7 +22,7 @@ export function Component() {
       actions={
         <>
           <CsvButton />
-          {mayPlan && <ButtonLink to={paths.newRecipe}>Add a recipe by another route</ButtonLink>}
+          {mayPlan && <ButtonLink to={paths.newRecipe}>Add a recipe without a coupon</ButtonLink>}
           {mayPlan && (
             <ButtonLink kind="primary" to={paths.planCoupon} icon={<PlusIcon />}>
               Plan a coupon

@@ -130,8 +130,10 @@ export async function startRecipe(body: NewRecipe, idempotencyKey: string): Prom
   return draft;
 }
 
-export async function startDraft(recipeId: string, basedOnRevisionId: string | undefined, idempotencyKey: string): Promise<Revision> {
-  const draft = await request<Revision>('post', `${RECIPES}/${recipeId}/drafts`, { body: { basedOnRevisionId }, idempotencyKey });
+type NewDraft = { basedOnRevisionId: string | undefined; reason: string };
+
+export async function startDraft(recipeId: string, body: NewDraft, idempotencyKey: string): Promise<Revision> {
+  const draft = await request<Revision>('post', `${RECIPES}/${recipeId}/drafts`, { body, idempotencyKey });
   await revalidate(RECIPES);
   return draft;
 }

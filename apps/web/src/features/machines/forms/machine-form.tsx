@@ -60,7 +60,7 @@ export function MachineForm({ form, lenses, submitLabel, onSubmit }: MachineForm
       </Part>
       <Part
         title="What the panel shows"
-        note="Order, labels and units as the machine’s own control has them. A change here proves nothing anew."
+        note="Order, labels and units as the machine’s own control has them. Changing it leaves every proof as it stands."
       >
         <PanelFields form={form} />
       </Part>

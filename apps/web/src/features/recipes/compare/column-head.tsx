@@ -7,6 +7,7 @@ import { Swatch } from '../../../components/swatch';
 import { TextLink } from '../../../components/text-link';
 import { colourDifference, cssColour, labOf } from '../../../lib/colour-difference';
 import { formatNumber } from '../../../lib/format';
+import { markedCellOf } from '../../../lib/marked-cell';
 import { paths } from '../../../lib/paths';
 import type { Revision } from '../recipes.api';
 import { markOf, revisionName } from '../revision-words';
@@ -19,12 +20,12 @@ export type ColumnHeadProps = {
 
 /** The cell that stands for a revision, its name, its state, and how far its colour is from the reference's. */
 export function ColumnHead({ revision, reference, onRemove }: ColumnHeadProps) {
-  const cell = revision.evidence.basis[0];
+  const cell = markedCellOf(revision.evidence);
   const name = revisionName(revision);
   return (
     <chakra.div display="grid" gridTemplateColumns="88px minmax(0, 1fr)" gap="3.5">
       {cell === undefined ? (
-        <chakra.span color="fg.muted">no coupon</chakra.span>
+        <chakra.span color="fg.muted">{noMarkWords(revision)}</chakra.span>
       ) : (
         <CellCloseUp shape={shapeOf(cell)} photo={platePhotoOf(cell.photo, 'large')} address={cell.address} />
       )}
@@ -64,10 +65,16 @@ export function ColumnHead({ revision, reference, onRemove }: ColumnHeadProps) {
   );
 }
 
+/** The picture of another setting would be no evidence of this one. */
+function noMarkWords({ evidence: { basis, confirmation }, state }: Revision): string {
+  if (basis.length + confirmation.length === 0) return 'no coupon';
+  return state === 'draft' || state === 'in_review' ? 'no mark of this setting yet' : 'no coupon cell of this setting';
+}
+
 function Colour({ revision, reference }: Pick<ColumnHeadProps, 'revision' | 'reference'>) {
-  const cell = revision.evidence.basis[0];
+  const cell = markedCellOf(revision.evidence);
   const lab = labOf(cell);
-  const difference = revision.id === reference?.id ? undefined : colourDifference(reference?.evidence.basis[0], cell);
+  const difference = revision.id === reference?.id ? undefined : colourDifference(reference && markedCellOf(reference.evidence), cell);
   return (
     <chakra.div display="flex" gap="1.5" alignItems="center" mt="1" whiteSpace="nowrap">
       {lab !== undefined && <Swatch colour={cssColour(lab)} />}

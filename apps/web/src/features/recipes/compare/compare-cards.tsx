@@ -3,6 +3,7 @@ import { Panel } from '../../../components/page';
 import { revisionName } from '../revision-words';
 import { ColumnHead } from './column-head';
 import { Change, type CompareTableProps } from './compare-table';
+import { leftOutWords } from './comparison-view';
 import { ReferenceChoice, WhyAndWho } from './reference-choice';
 
 /** Below 600 px every row is a card with one line for each revision. */
@@ -52,9 +53,9 @@ export function CompareCards({ comparison, view, onReference, onRemove }: Compar
             ))}
         </Panel>
       ))}
-      {view.hidden.length > 0 && (
+      {view.hidden.length + view.unknown.length > 0 && (
         <chakra.p fontSize="sm" color="fg.muted">
-          Equal rows hidden: {view.hidden.join(', ')}
+          {leftOutWords(view)}
         </chakra.p>
       )}
     </chakra.div>

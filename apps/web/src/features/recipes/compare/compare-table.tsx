@@ -4,7 +4,7 @@ import { ChangeTrack } from '../../../components/change-bar';
 import { Panel } from '../../../components/page';
 import type { Comparison } from '../recipes.api';
 import { ColumnHead } from './column-head';
-import type { CellView, ComparisonView, RowView } from './comparison-view';
+import { type CellView, type ComparisonView, leftOutWords, type RowView } from './comparison-view';
 import { ReferenceChoice, WhyAndWho } from './reference-choice';
 
 export type CompareTableProps = {
@@ -97,9 +97,9 @@ export function CompareTable({ comparison, view, onReference, onRemove }: Compar
           </tr>
         </tbody>
       </chakra.table>
-      {view.hidden.length > 0 && (
+      {view.hidden.length + view.unknown.length > 0 && (
         <chakra.p px="5" py="2.5" fontSize="sm" lineHeight="sm" color="fg.muted" borderTop="hairline">
-          Equal rows hidden: {view.hidden.join(', ')}
+          {leftOutWords(view)}
         </chakra.p>
       )}
     </Panel>

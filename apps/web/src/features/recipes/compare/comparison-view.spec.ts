@@ -1,7 +1,7 @@
 import { makeRevision } from '../../../testing/revisions';
 import type { Comparison, ComparisonRow } from '../recipes.api';
 import { addressOf, choiceFromAddress } from './compare-address';
-import { comparisonView } from './comparison-view';
+import { comparisonView, leftOutWords } from './comparison-view';
 
 type Side = Partial<ComparisonRow['values'][number]>;
 
@@ -22,6 +22,32 @@ const comparison = (rows: ComparisonRow[]): Comparison => ({ revisions: [], refe
 const options = { machineName: 'Bench 2', onlyDiffering: true };
 
 describe('comparisonView', () => {
+  it('names apart what is known of none: nobody can say that it is the same', () => {
+    const side = (revisionId: string, change: 'reference' | 'same') => ({
+      ...{ revisionId, value: null, text: null, missingBecause: 'The spot is not known.', change, size: null },
+    });
+    const dose = {
+      ...{ group: 'work' as const, key: 'arealDose', label: 'Dose', unit: 'J/mm²', step: 1, isSame: true },
+      values: [side('r3', 'reference'), side('r4', 'same')],
+    };
+    const view = comparisonView(comparison([dose]), options);
+    expect(view).toEqual({ groups: [], hidden: [], unknown: ['dose'] });
+    expect(leftOutWords(view)).toBe('Not known of any: dose');
+    expect(leftOutWords({ hidden: ['passes'], unknown: ['dose'] })).toBe('Equal rows hidden: passes. Not known of any: dose');
+  });
+
+  it('shows an overlap in percent, and its change in points', () => {
+    const sides: Side[] = [
+      { value: -0.25, change: 'reference' },
+      { value: -0.3, size: { delta: -0.05, symbol: '1', percent: -20, points: null } },
+    ];
+    const { groups } = comparisonView(
+      { ...comparison([row('lineOverlap', sides, { group: 'work', unit: '1' })]), referenceId: 'r2' },
+      options,
+    );
+    expect(groups[0]?.rows[0]).toMatchObject({ unit: '%', cells: [{ text: '−25.0' }, { text: '−30.0', change: '−5 points' }] });
+  });
+
   it('shows a change against the reference column wherever that stands', () => {
     const size = { delta: 50, symbol: 'mm/s', percent: 18.5, points: null };
     const { groups } = comparisonView(
@@ -50,7 +76,7 @@ describe('comparisonView', () => {
       ],
       { isSame: true },
     );
-    expect(comparisonView(comparison([same]), options)).toEqual({ groups: [], hidden: ['speed'] });
+    expect(comparisonView(comparison([same]), options)).toEqual({ groups: [], hidden: ['speed'], unknown: [] });
     const all = comparisonView(comparison([same]), { ...options, onlyDiffering: false });
     expect(all.groups[0]?.rows[0]?.cells[0]?.change).toBe('same');
     expect(all.hidden).toEqual([]);
@@ -81,7 +107,7 @@ describe('comparisonView', () => {
 
   it('takes computed numbers that read the same for the same', () => {
     const ripple = row('coverageRipple', [{ value: 2e-9 }, { value: 3e-11 }], { group: 'work', label: 'Coverage ripple', unit: '1' });
-    expect(comparisonView(comparison([ripple]), options)).toEqual({ groups: [], hidden: ['coverage ripple'] });
+    expect(comparisonView(comparison([ripple]), options)).toEqual({ groups: [], hidden: ['coverage ripple'], unknown: [] });
   });
 
   it('names the step of a row as soon as there is more than one', () => {

@@ -1,6 +1,7 @@
 import { alignedNumbers, changeShare, changeWords, kindWords, shownNumber } from '../../../lib/change-words';
 import { formatNumber } from '../../../lib/format';
 import { decimalsOf, symbolOf } from '../../../lib/measurement-words';
+import { isShare } from '../../../lib/share-numbers';
 import type { Comparison, ComparisonRow } from '../recipes.api';
 
 export type CellView = {
@@ -23,7 +24,13 @@ export type RowView = {
 };
 export type GroupView = { key: ComparisonRow['group']; title: string; rows: readonly RowView[] };
 
-export type ComparisonView = { groups: readonly GroupView[]; hidden: readonly string[] };
+export type ComparisonView = {
+  groups: readonly GroupView[];
+  /** Names of rows that are the same in all. */
+  hidden: readonly string[];
+  /** Names of rows that are known of none: nobody can say whether they are the same. */
+  unknown: readonly string[];
+};
 
 /** Computed numbers that show at once; the others open on demand. */
 const ASKED_FOR = new Set([
@@ -48,6 +55,7 @@ export function comparisonView(
   const hasSteps = rows.some(({ step }) => step !== null && step > 1);
   const shown = rows.filter((row) => !onlyDiffering || !looksSame(row));
   const hidden = rows.filter((row) => !shown.includes(row));
+  const names = (left: readonly ComparisonRow[]) => [...new Set(left.map((row) => lowerFirst(named(row, hasSteps))))];
   const titles: readonly (readonly [ComparisonRow['group'], string])[] = [
     ['entered', `As entered on ${machineName}’s panel`],
     ['work', 'At the work'],
@@ -60,8 +68,17 @@ export function comparisonView(
   }));
   return {
     groups: groups.filter(({ rows: own }) => own.length > 0),
-    hidden: [...new Set(hidden.map((row) => lowerFirst(named(row, hasSteps))))],
+    hidden: names(hidden.filter((row) => !isUnknown(row))),
+    unknown: names(hidden.filter(isUnknown)),
   };
+}
+
+/** What stands in no row, under the rows. */
+export function leftOutWords({ hidden, unknown }: Pick<ComparisonView, 'hidden' | 'unknown'>): string {
+  return [
+    ...(hidden.length === 0 ? [] : [`Equal rows hidden: ${hidden.join(', ')}`]),
+    ...(unknown.length === 0 ? [] : [`Not known of any: ${unknown.join(', ')}`]),
+  ].join('. ');
 }
 
 /** Computed numbers that read the same are the same to whoever compares them. */
@@ -69,6 +86,9 @@ function looksSame(row: ComparisonRow): boolean {
   const texts = new Set(row.values.map((side) => valueText(row, side)));
   return row.isSame || (row.group === 'work' && texts.size === 1);
 }
+
+const isUnknown = ({ values }: ComparisonRow) =>
+  values.every(({ value, text, missingBecause }) => value === null && text === null && missingBecause !== null);
 
 function inOrder(rows: readonly ComparisonRow[]): readonly ComparisonRow[] {
   const place = ({ group, key }: ComparisonRow) =>
@@ -81,14 +101,17 @@ function rowView(row: ComparisonRow, referenceId: string, hasSteps: boolean): Ro
   return {
     key: `${row.group} ${row.step ?? 0} ${row.key}`,
     label: named(row, hasSteps),
-    unit: row.unit === '1' ? '' : row.unit,
+    unit: isShare(row.key) ? '%' : row.unit === '1' ? '' : row.unit,
     isAside: row.group === 'work' && !ASKED_FOR.has(row.key),
     cells: row.values.map((side) => ({
       revisionId: side.revisionId,
       isReference: side.revisionId === referenceId,
       text: valueText(row, side),
       isMissing: side.value === null && side.text === null,
-      share: side.change === 'changed' && !CROSSES_ZERO.has(row.key) ? changeShare(reference?.value ?? null, side.value) : undefined,
+      share:
+        side.change === 'changed' && !CROSSES_ZERO.has(row.key) && !isShare(row.key)
+          ? changeShare(reference?.value ?? null, side.value)
+          : undefined,
       change: changeText(row, side),
     })),
   };
@@ -98,16 +121,18 @@ function valueText(row: ComparisonRow, { value, text, missingBecause }: Comparis
   if (value === null && text === null) return missingBecause === null ? 'not set' : 'not known';
   if (value === null) return text ?? '';
   if (row.group === 'mark') return formatNumber(value, { decimals: decimalsOf(row.key) });
+  if (isShare(row.key)) return shownNumber(value * 100);
   // The row's finest value decides the decimals of all: 0.010 beside 0.012.
   return row.group === 'work' ? shownNumber(value) : alignedNumbers(row.values.map((side) => side.value))(value);
 }
 
-function changeText({ group }: ComparisonRow, { change, size }: ComparisonRow['values'][number]): string {
+function changeText({ group, key }: ComparisonRow, { change, size, missingBecause }: ComparisonRow['values'][number]): string {
   if (change === 'reference') return '';
-  if (change === 'same') return 'same';
+  if (change === 'same') return missingBecause === null ? 'same' : '';
   const words = kindWords(change);
   if (words !== undefined) return words;
   if (size === null) return 'changed';
+  if (isShare(key)) return changeWords({ ...size, points: Number((size.delta * 100).toPrecision(3)) });
   // A share of a lightness means nothing to the eye; its difference does.
   return group === 'mark' ? formatNumber(Number(size.delta.toPrecision(3)), { isSigned: true }) : changeWords(size);
 }

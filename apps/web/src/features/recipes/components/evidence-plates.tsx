@@ -6,7 +6,7 @@ import { platePhotoOf } from '../../../components/plate/plate-photo';
 import { ProofMarks, shapeOf } from '../../../components/plate/proof-marks';
 import { TextLink } from '../../../components/text-link';
 import { formatNumber } from '../../../lib/format';
-import { decimalsOf, methodWord, symbolOf } from '../../../lib/measurement-words';
+import { decimalsOf, methodWord, quantityWords } from '../../../lib/measurement-words';
 import { paths } from '../../../lib/paths';
 import { useSession } from '../../../lib/session';
 import type { EvidenceCell, Revision } from '../recipes.api';
@@ -68,7 +68,7 @@ export function measuredFacts({ measurements, meanRating }: EvidenceCell): Fact[
   return [
     ...rating,
     ...[...newest.values()].map(({ quantity, value, grade, unit, method }) => ({
-      label: method === 'photo' ? symbolOf(quantity) : `${symbolOf(quantity)}, ${methodWord(method)}`,
+      label: method === 'photo' ? quantityWords(quantity) : `${quantityWords(quantity)}, ${methodWord(method)}`,
       value: grade ?? (value === null ? '—' : formatNumber(value, { decimals: decimalsOf(quantity) })),
       ...(unit === '1' ? {} : { unit }),
     })),

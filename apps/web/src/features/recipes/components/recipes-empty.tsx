@@ -28,7 +28,7 @@ export function NoRecipesYet({ mayPlan }: { mayPlan: boolean }) {
         mayPlan ? (
           <>
             <PlanACoupon kind="primary" />
-            <ButtonLink to={paths.newRecipe}>Add a recipe by another route</ButtonLink>
+            <ButtonLink to={paths.newRecipe}>Add a recipe without a coupon</ButtonLink>
           </>
         ) : undefined
       }

@@ -1,4 +1,5 @@
 import { chakra } from '@chakra-ui/react';
+import { Digest } from '../../../components/digest';
 import { SignatureLine } from '../../../components/signature-line';
 import type { MarkState } from '../../../components/state-mark';
 import { useSession } from '../../../lib/session';
@@ -32,6 +33,7 @@ export function Signatures({ signOffs }: { signOffs: readonly SignOff[] }) {
                     {signOff.comment}
                   </chakra.span>
                 )}
+                <Digest value={signOff.contentHash} />
               </>
             }
           />

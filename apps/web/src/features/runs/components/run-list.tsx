@@ -40,6 +40,7 @@ export function useRunFilters(): [RunFilters, (change: Partial<Record<keyof RunF
 
 export function RunList() {
   const [filters, change] = useRunFilters();
+  const [params] = useSearchParams();
   const { pages, error, retry, showMore, hasMore } = useRuns(filters);
   const runs = pages?.flatMap(({ items }) => items);
   const isFiltered = Object.keys(filters).length > 0;
@@ -54,6 +55,9 @@ export function RunList() {
           value={STATES.find(({ value }) => value === filters.state)?.value ?? 'all'}
           onChange={(state) => change({ state: state === 'all' ? undefined : state })}
         />
+        {filters.recipeId !== undefined && (
+          <RemovableChip label={`recipe ${params.get('recipe') ?? ''}`.trim()} onRemove={() => change({ recipeId: undefined })} />
+        )}
         {filters.jobReference !== undefined && (
           <RemovableChip label={`job ${filters.jobReference}`} onRemove={() => change({ jobReference: undefined })} />
         )}

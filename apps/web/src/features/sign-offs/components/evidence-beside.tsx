@@ -12,6 +12,7 @@ import { Swatch } from '../../../components/swatch';
 import { TextLink } from '../../../components/text-link';
 import { colourDifference, cssColour, labOf, measured } from '../../../lib/colour-difference';
 import { formatNumber } from '../../../lib/format';
+import { markedCellOf } from '../../../lib/marked-cell';
 import { decimalsOf } from '../../../lib/measurement-words';
 import { paths } from '../../../lib/paths';
 import { useSession } from '../../../lib/session';
@@ -22,7 +23,7 @@ export type EvidenceBesideProps = { current: Revision | undefined; proposed: Rev
 /** Evidence comes first: both plates in one scale, both cells, how they differ, and the marks that proved it again. */
 export function EvidenceBeside({ current, proposed }: EvidenceBesideProps) {
   const { shop } = useSession();
-  const cells = [current?.evidence.basis[0], proposed.evidence.basis[0]] as const;
+  const cells = [current && shownCell(current), shownCell(proposed)] as const;
   const widestMm = Math.max(0, ...cells.map((cell) => (cell === undefined ? 0 : plateWidthMm(cell))));
   const { confirmation, runs } = proposed.evidence;
   const isOpen = proposed.state === 'in_review';
@@ -64,6 +65,9 @@ export function EvidenceBeside({ current, proposed }: EvidenceBesideProps) {
   );
 }
 
+/** The mark of this very setting; a setting that nobody marked yet shows where it comes from, and says so. */
+const shownCell = ({ evidence }: Revision) => markedCellOf(evidence) ?? evidence.basis[0];
+
 const MARK_OF: Record<Revision['state'], MarkState> = {
   draft: 'draft',
   in_review: 'inReview',
@@ -104,6 +108,11 @@ function Side({ title, mark, revision, cell, widestMm }: SideProps) {
               <TextLink color="fg.muted" to={`${paths.coupon(cell.couponCode)}?cell=${cell.address}`}>
                 {cell.couponCode}, cell {cell.address}
               </TextLink>
+              {cell.essentialDifferences.length > 0 && (
+                <chakra.span display="block" color="straw.fg">
+                  no mark of this setting yet: {cell.essentialDifferences.join(', ').toLowerCase()} differs
+                </chakra.span>
+              )}
             </chakra.p>
           </chakra.div>
           <chakra.div maxW="148px">
@@ -169,7 +178,7 @@ function CellNumbers({ cell }: { cell: EvidenceCell }) {
 
 /** ΔE00 is named as such: other colour differences are in use. */
 function Difference({ current, proposed }: { current: Revision; proposed: Revision }) {
-  const difference = colourDifference(current.evidence.basis[0], proposed.evidence.basis[0]);
+  const difference = colourDifference(markedCellOf(current.evidence), markedCellOf(proposed.evidence));
   return (
     <Strip>
       <Flex justify="space-between" gap="3" wrap="wrap">

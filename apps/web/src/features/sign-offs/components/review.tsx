@@ -3,6 +3,7 @@ import { type ReactNode, useState } from 'react';
 import { ButtonLink } from '../../../components/button';
 import { CautionList } from '../../../components/caution-list';
 import { CheckList } from '../../../components/check-list';
+import { Digest } from '../../../components/digest';
 import { NumbersColumns } from '../../../components/numbers-panel/numbers-columns';
 import { Panel } from '../../../components/page';
 import { ReadProblem } from '../../../components/read-problem';
@@ -209,6 +210,11 @@ function Given({ revision }: { revision: Revision }) {
           }
           caption={`${last.meaning} as ${roleWord(last.role)}, ${formatTime(last.signedAt, shop.timeZone)}`}
         />
+      )}
+      {last !== undefined && (
+        <chakra.div px="1" fontSize="sm" color="fg.muted">
+          <Digest value={last.contentHash} />
+        </chakra.div>
       )}
       <chakra.div mt="4">
         <ButtonLink to={paths.recipe(recipe.code)}>Open {recipe.code}</ButtonLink>
