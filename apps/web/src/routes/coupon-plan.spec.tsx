@@ -32,11 +32,21 @@ const preview = {
 };
 const page1 = (items: object[]) => () => ({ body: { items, nextCursor: null } });
 const choices = {
-  'GET /api/machines': page1([{ id: 'x', name: 'Bench 2', profile: { panel: { fields }, physical: { sourceKind: 'fibre-mopa' } } }]),
-  'GET /api/machines/x/lenses': page1([{ lensId: 'l', lensName: 'F160', isMounted: true }]),
+  'GET /api/machines': page1([
+    {
+      id: 'x',
+      name: 'Bench 2',
+      profile: {
+        panel: { fields },
+        physical: { sourceKind: 'fibre-mopa', wavelengthNm: 1064, ratedPowerW: 20, m2: 1.5, beamDiameterMm: 7 },
+      },
+    },
+  ]),
+  'GET /api/machines/x/lenses': page1([{ lensId: 'l', lensName: 'F160', focalLengthMm: 160, measuredSpotUm: null, isMounted: true }]),
   'GET /api/materials': page1([{ id: 'm', name: 'Titanium tag' }]),
   'GET /api/finishes': page1([{ id: 'f', name: 'Bead blasted' }]),
   'GET /api/effects': page1([{ id: 'e', name: 'Colour anneal' }]),
+  'GET /api/machines/x/calibrations': page1([]),
   'GET /api/cautions/for': () => ({ body: { isForbidden: false, items: [] } }),
 };
 
@@ -52,7 +62,7 @@ afterEach(() => {
   closeSession('left');
 });
 
-async function openPage(handlers: Parameters<typeof fakeServer>[0] = {}) {
+async function openPage(handlers: Parameters<typeof fakeServer>[0] = {}, isForbidden = false) {
   server = fakeServer({ ...choices, 'POST /api/coupons/preview': () => ({ body: preview }), ...handlers });
   const page = (
     <StatusLineProvider>
@@ -74,6 +84,7 @@ async function openPage(handlers: Parameters<typeof fakeServer>[0] = {}) {
     ['Effect wanted', 'e'],
   ] as const)
     await user.selectOptions(screen.getByLabelText(label), id);
+  if (isForbidden) return rendered;
   await user.selectOptions(await screen.findByLabelText('Rows: what varies'), '');
   await user.click(screen.getByRole('switch', { name: 'Mark corner marks and letters' }));
   return rendered;
@@ -131,11 +142,14 @@ describe('planning a coupon', () => {
 
   it('refuses a material that must never be marked as soon as it is chosen, and asks for nothing more', async () => {
     const never = { id: 'n', level: 'never', subject: 'Do not mark PVC.', text: 'It gives off hydrogen chloride.', source: 'A list' };
-    const { user } = await openPage({
-      'GET /api/cautions/for': ({ query }) => ({
-        body: query.get('materialId') === 'm' ? { isForbidden: true, items: [never] } : { isForbidden: false, items: [] },
-      }),
-    });
+    const { user } = await openPage(
+      {
+        'GET /api/cautions/for': ({ query }) => ({
+          body: query.get('materialId') === 'm' ? { isForbidden: true, items: [never] } : { isForbidden: false, items: [] },
+        }),
+      },
+      true,
+    );
     const refusal = await screen.findByRole('alert');
     expect(refusal).toHaveTextContent('Never. Do not mark PVC.');
     expect(refusal).toHaveTextContent('It gives off hydrogen chloride.');
@@ -170,8 +184,8 @@ describe('planning a coupon', () => {
   it('says at once what the panel cannot show, and lists every missing field after Save, keeping what was typed', async () => {
     const { user } = await openPage();
     enter(/^Speed/, '805');
-    expect(await screen.findAllByText(/cannot show 805 mm\/s/)).toHaveLength(2);
-    expect(screen.getByText('Line spacing is needed. Enter what the panel will show.')).toBeVisible();
+    await waitFor(() => expect(screen.getByLabelText(/^Speed/)).toHaveAccessibleDescription(/cannot show 805 mm\/s/));
+    expect(screen.getByText('Still open: Columns, from · Columns, to · Line spacing.')).toBeVisible();
     expect(screen.getByLabelText(/^From/)).toHaveAccessibleDescription('');
     await user.click(screen.getByRole('button', { name: 'Save the plan' }));
     await waitFor(() => expect(screen.getByLabelText(/^From/)).toHaveAccessibleDescription('Enter the first level.'));

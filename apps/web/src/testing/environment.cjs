@@ -1,7 +1,8 @@
-// jsdom has no fetch; the one of Node is lent to it, with the classes that belong together.
+// What jsdom lacks is lent to it from Node: the deep copy, and fetch with the classes that belong together.
 const jsdom = require('jest-environment-jsdom');
 
 const LENT = [
+  'structuredClone',
   'fetch',
   'Request',
   'Response',

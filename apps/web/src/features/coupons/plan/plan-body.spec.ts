@@ -50,7 +50,11 @@ describe('planBody()', () => {
   });
 
   it('makes one row where nothing varies down the rows', () => {
-    expect(bodyOf(plan({ rows: { ...plan().rows, parameter: '' }, base: { ...plan().base, values: { lineSpacingUm: '12 um', speedMmPerS: '800' } } }))).not.toHaveProperty('rows');
+    expect(
+      bodyOf(
+        plan({ rows: { ...plan().rows, parameter: '' }, base: { ...plan().base, values: { lineSpacingUm: '12 um', speedMmPerS: '800' } } }),
+      ),
+    ).not.toHaveProperty('rows');
   });
 
   it('sends the seed only for a random order', () => {

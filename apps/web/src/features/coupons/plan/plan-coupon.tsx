@@ -11,6 +11,7 @@ import { SkeletonBlock, SkeletonForm } from '../../../components/skeletons';
 import { ProblemError } from '../../../lib/api';
 import { asSentence } from '../../../lib/format';
 import { readNumber } from '../../../lib/read-number';
+import { headOverheadsOf } from '../../../lib/time-words';
 import {
   type Coupon,
   type CouponPreview,
@@ -23,6 +24,7 @@ import {
 import { keptPlan } from './kept-plan';
 import { planBody } from './plan-body';
 import { PlanForm } from './plan-form';
+import { labelsOf } from './plan-labels';
 import { PlanNumbers } from './plan-numbers';
 import { PlanFacts, PlanPreview } from './plan-preview';
 import type { PlanValues } from './plan-values';
@@ -99,6 +101,7 @@ export function PlanCoupon({ initial, keepAs, locale, onPlanned }: PlanCouponPro
                 lens={lenses.find((own) => own.lensId === lensId)}
                 place={placeOf(live.preview, chosen)}
                 doseCaution={live.preview?.doseCaution ?? null}
+                overheads={live.preview === undefined ? undefined : headOverheadsOf(live.preview.markingTime.overheads)}
                 cellMm={sizes.cellMm}
                 locale={locale}
               />
@@ -113,7 +116,10 @@ export function PlanCoupon({ initial, keepAs, locale, onPlanned }: PlanCouponPro
             <ReadCautions
               cautions={live.preview?.cautions ?? []}
               readIds={readCautionIds}
-              onRead={(ids) => form.setValue('acknowledgedCautionIds', ids, { shouldDirty: true })}
+              onRead={(ids) => {
+                form.setValue('acknowledgedCautionIds', ids, { shouldDirty: true });
+                form.clearErrors('acknowledgedCautionIds');
+              }}
               error={messageAt(form.formState.errors, 'acknowledgedCautionIds')}
             />
           </Consequence>
@@ -154,7 +160,7 @@ function Consequence({ live, panel, sizes, chosen, onChoose, children }: Consequ
   if (problem !== undefined && problem.errors.length === 0) return <Refused problem={problem} />;
   if (preview === undefined || panel === undefined) {
     if (isLoading) return <SkeletonBlock height="420px" label="Working the plan out" />;
-    return <WaitsFor messages={waitsFor} />;
+    return <WaitsFor messages={waitsFor} labels={labelsOf(panel)} />;
   }
   return (
     <>
@@ -170,17 +176,22 @@ function Consequence({ live, panel, sizes, chosen, onChoose, children }: Consequ
 }
 
 /** Everything that is still open, at once: whoever fills it in sees the end of it. */
-function WaitsFor({ messages }: { messages: LivePlan['waitsFor'] }) {
+function WaitsFor({ messages, labels }: { messages: LivePlan['waitsFor']; labels: Readonly<Record<string, string>> }) {
+  const missing = messages.flatMap(({ name, message, isMissing }) => (isMissing ? [labels[name] ?? message] : []));
+  const refused = messages.filter(({ isMissing }) => !isMissing);
   return (
     <EmptyState kind="none-match" title="The plate appears as soon as the plan can be read">
       {messages.length === 0 ? (
         'Choose the machine first: its panel says what can be typed.'
       ) : (
-        <chakra.ul textAlign="start" columnGap="6" css={{ columnWidth: '220px' }}>
-          {messages.map(({ name, message }) => (
-            <li key={name}>{message}</li>
-          ))}
-        </chakra.ul>
+        <>
+          {missing.length > 0 && <p>Still open: {missing.join(' · ')}.</p>}
+          <ul>
+            {refused.map(({ name, message }) => (
+              <li key={name}>{message}</li>
+            ))}
+          </ul>
+        </>
       )}
     </EmptyState>
   );

@@ -1,5 +1,5 @@
 import { chakra } from '@chakra-ui/react';
-import { PARAMETER_KEYS, type Panel } from '@proofplate/recipe-model';
+import type { Panel } from '@proofplate/recipe-model';
 import type { ReactNode } from 'react';
 import { type UseFormReturn, useWatch } from 'react-hook-form';
 import { Button } from '../../../components/button';
@@ -12,6 +12,7 @@ import { Switch } from '../../../components/switch';
 import type { CouponPreview, ShopCaution } from '../coupons.api';
 import { FactorFields } from './factor-fields';
 import { type GroundChoices, GroundFields } from './ground-fields';
+import { labelsOf } from './plan-labels';
 import { newSeed, type PlanValues } from './plan-values';
 import { SettingFields } from './setting-fields';
 
@@ -126,28 +127,4 @@ function PlateFields({ form }: { form: UseFormReturn<PlanValues> }) {
       </chakra.div>
     </>
   );
-}
-
-/** Names and labels of every field, for the summary of a refused plan. */
-function labelsOf(panel: Panel | undefined): Readonly<Record<string, string>> {
-  const labelOf = new Map(panel?.fields.map(({ parameter, label }) => [parameter, label]));
-  const setting = (name: string, prefix: string) =>
-    PARAMETER_KEYS.flatMap((key) => {
-      const label = labelOf.get(key);
-      return label === undefined ? [] : [[`${name}.values.${key}`, `${prefix}${label}`] as const];
-    });
-  const factor = (name: string, title: string) => [
-    [`${name}.parameter`, `${title}, what varies`] as const,
-    [`${name}.from`, `${title}, from`] as const,
-    [`${name}.to`, `${title}, to`] as const,
-    [`${name}.count`, `${title}, levels`] as const,
-  ];
-  return {
-    ...{ machineId: 'Machine', lensId: 'Lens', materialId: 'Material', finishId: 'Finish', effectId: 'Effect wanted' },
-    ...{ thicknessMm: 'Thickness', lot: 'Lot', title: 'What it is for' },
-    ...Object.fromEntries([...factor('rows', 'Rows'), ...factor('columns', 'Columns')]),
-    ...Object.fromEntries([...setting('base', ''), ...setting('labelStep', 'Labels, ')]),
-    ...{ 'base.fill': 'Fill', cellMm: 'Cell', gapMm: 'Gap', doseCautionJPerMm2: 'Flag cells from a dose of' },
-    acknowledgedCautionIds: 'Cautions',
-  };
 }

@@ -8,16 +8,17 @@ export function RestoredPlan({ onStartAfresh }: { onStartAfresh: () => void }) {
       role="status"
       align="center"
       justify="space-between"
-      gap="3"
+      columnGap="2"
       wrap="wrap"
-      pl="3.5"
-      pr="1.5"
-      py="1"
+      pl="3"
+      pr="1"
+      fontSize="sm"
+      lineHeight="sm"
       border="hairline"
       borderRadius="md"
     >
       <chakra.span>The plan that you had begun is restored.</chakra.span>
-      <Button kind="quiet" onClick={onStartAfresh}>
+      <Button kind="quiet" px="2" fontSize="sm" onClick={onStartAfresh}>
         Start afresh
       </Button>
     </Flex>

@@ -25,23 +25,27 @@ export function useLivePlan(
   const read = useMemo(() => planBody(values, machine?.profile, locale), [values, machine, locale]);
   const { data, error, isLoading } = useCouponPreview('body' in read ? read.body : undefined);
   const messages = useMemo(() => ('messages' in read ? read.messages : refusedFields(error)), [read, error]);
-  const ground = useMemo(() => groundMessages(never, data?.cautions, values), [never, data, values]);
-  useFieldMessages(form, ground, messages);
+  const shown = useMemo(() => {
+    const ground = groundMessages(never, data?.cautions, values);
+    // forbidden work has no other field to mend
+    return never === undefined ? [...messages, ...ground] : ground;
+  }, [never, data, values, messages]);
+  useFieldMessages(form, shown);
   const isAnswered = 'body' in read && error === undefined;
   return { preview: isAnswered ? data : undefined, waitsFor: messages, problem: 'body' in read ? error : undefined, isLoading };
 }
 
 /** A missing field says so after a refused submit only; while somebody fills the form in, it would nag. */
-function useFieldMessages(form: UseFormReturn<PlanValues>, ground: readonly FieldMessage[], messages: readonly FieldMessage[]): void {
+function useFieldMessages(form: UseFormReturn<PlanValues>, messages: readonly FieldMessage[]): void {
   const { setError, clearErrors } = form;
   const isSubmitted = form.formState.isSubmitted;
   useEffect(() => {
     clearErrors();
-    for (const { name, message, isMissing } of [...messages, ...ground]) {
+    for (const { name, message, isMissing } of messages) {
       // the names come from the plan's own fields
       if (!isMissing || isSubmitted) setError(name as FieldPath<PlanValues>, { type: 'read', message });
     }
-  }, [ground, messages, setError, clearErrors, isSubmitted]);
+  }, [messages, setError, clearErrors, isSubmitted]);
 }
 
 /** What no field of the setting can say: the work is forbidden, or its cautions are not read yet. */
