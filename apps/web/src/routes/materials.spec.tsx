@@ -124,10 +124,11 @@ describe('the materials page', () => {
 
 describe('adding a material', () => {
   it('says at once which family a word of the trade stands for', async () => {
-    const { user } = open('/materials/new', {});
+    const { user } = open('/materials/new', { 'GET /api/cautions': () => ({ body: { items: [pvc], nextCursor: null } }) });
     const family = await screen.findByLabelText('What it is');
     await user.type(family, 'vinyl');
     expect(screen.getByText('This counts as: PVC.')).toBeVisible();
+    expect(await screen.findByRole('alert')).toHaveTextContent('Never. Do not mark PVC.Hydrogen chloride.Source: A list of materials.');
     await user.clear(family);
     await user.type(family, 'mystery alloy');
     expect(screen.getByText(/This counts as: Unknown/)).toBeVisible();

@@ -1,12 +1,15 @@
 import { chakra } from '@chakra-ui/react';
-import { MATERIAL_FAMILIES, MATERIAL_FAMILY_KEYS, materialFamilyOf } from '@proofplate/recipe-model';
+import { MATERIAL_FAMILIES, MATERIAL_FAMILY_KEYS, type MaterialFamily, materialFamilyOf } from '@proofplate/recipe-model';
 import { useId } from 'react';
 import { type UseFormReturn, useWatch } from 'react-hook-form';
 import { Button } from '../../../components/button';
 import { NumberField, TextAreaField, TextField } from '../../../components/field';
 import { Form, messageAt, useSummaryForm } from '../../../components/form';
+import { ProblemNotice } from '../../../components/problem-notice';
+import { asSentence } from '../../../lib/format';
 import { messageOf, type NumberRule, readOptionalNumber } from '../../../lib/read-number';
 import { useSession } from '../../../lib/session';
+import { useCautions } from '../cautions.api';
 import type { Material, MaterialBody } from '../materials.api';
 import { type MaterialValues, materialBody, materialValues, PROPERTY_RULES, THICKNESS } from './material-values';
 
@@ -94,8 +97,23 @@ function FamilyField({ form }: { form: UseFormReturn<MaterialValues> }) {
           <option key={key} value={MATERIAL_FAMILIES[key].label} />
         ))}
       </datalist>
+      {word.trim() !== '' && <NeverMarkedFamily family={family} />}
     </>
   );
+}
+
+/** A family that must never be marked is said before the material is added: it may be kept in the list, and nothing more. */
+function NeverMarkedFamily({ family }: { family: MaterialFamily }) {
+  const cautions = useCautions().data?.items ?? [];
+  const never = cautions.filter(({ level, appliesTo }) => level === 'never' && appliesTo.families?.includes(family) === true);
+  return never.map(({ id, subject, text, source }) => (
+    <ProblemNotice
+      key={id}
+      what={`Never. ${asSentence(subject)}`}
+      safe={text}
+      todo={`Source: ${asSentence(source)} Added, it stands in the list with this refusal; no coupon can be planned on it, no recipe drafted and no run started.`}
+    />
+  ));
 }
 
 function PropertyFields({ form }: { form: UseFormReturn<MaterialValues> }) {
