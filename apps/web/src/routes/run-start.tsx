@@ -7,6 +7,7 @@ import { ReadProblem } from '../components/read-problem';
 import { SkeletonBlock } from '../components/skeletons';
 import { StartDeviations } from '../features/deviations/components/deviations-panel';
 import { Holds } from '../features/holds/components/holds';
+import { RunCautions } from '../features/runs/components/run-cautions';
 import { RunSetUp } from '../features/runs/components/run-steps';
 import { StartForm } from '../features/runs/forms/start-form';
 import { type RunKind, type StartSheet, useStartSheet } from '../features/runs/runs.api';
@@ -61,6 +62,11 @@ function Start({ sheet, wantedKind }: { sheet: StartSheet; wantedKind: string | 
         {sheet.holds.length > 0 && (
           <chakra.div gridColumn="1 / -1">
             <Holds holds={sheet.holds} subjects={subjects} mayRelease={mayLead} />
+          </chakra.div>
+        )}
+        {kind !== undefined && sheet.cautions.length > 0 && (
+          <chakra.div gridColumn="1 / -1">
+            <RunCautions cautions={sheet.cautions} />
           </chakra.div>
         )}
         <chakra.div display="grid" gap="4">

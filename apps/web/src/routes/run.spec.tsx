@@ -89,6 +89,98 @@ describe('a run under way', () => {
     expect(server.bodies('PATCH /api/runs/run-7/ticks')).toEqual([{ tick: ['setting.0.powerPercent'], untick: [] }]);
   });
 
+  it('stops at the top when the revision was withdrawn, says what becomes of the pieces, and puts the setting away', async () => {
+    const stop = {
+      because: 'withdrawn',
+      by: 'Hanne Voss',
+      at: '2026-05-14T08:00:00.000Z',
+      reason: 'The tint came off',
+      approvedNumber: null,
+    };
+    openPage(makeRun({ stop, allowedActions: ['tick', 'finish', 'bad-result'] }));
+    const banner = await screen.findByRole('alert');
+    expect(banner).toHaveTextContent('R-0031 revision 3 was withdrawn. Mark no more pieces.');
+    expect(banner).toHaveTextContent('The tint came off');
+    expect(banner).toHaveTextContent('Keep the pieces already marked apart and tell a lead');
+    expect(banner).toHaveTextContent('without a released first piece every part counts as scrap');
+    expect(within(banner).getByRole('link', { name: 'Look for another setting' })).toHaveAttribute('href', '/machine');
+    expect(screen.queryByRole('button', { name: 'Power is set' })).toBeNull();
+  });
+
+  it('leads from a superseded revision to the one that took its place', async () => {
+    const stop = { because: 'superseded', by: null, at: null, reason: '', approvedNumber: 4 };
+    openPage(makeRun({ stop, firstPiece: released, allowedActions: ['tick', 'finish', 'bad-result'] }));
+    const link = await screen.findByRole('link', { name: 'Open revision 4' });
+    expect(link).toHaveAttribute('href', '/machine?recipe=recipe-31');
+    expect(screen.getByRole('alert')).toHaveTextContent('R-0031 revision 3 was replaced. Mark no more pieces with it.');
+  });
+
+  it('puts cautions, setting and set-up before the first piece; finished, the outcome leads', async () => {
+    const cautions = [{ id: 'c', level: 'care', subject: 'Clamp it', text: 'It slips.', source: 'The shop', isGeneral: false }];
+    const { unmount } = openPage(makeRun({ cautions }));
+    const names = async () => {
+      await screen.findByRole('region', { name: 'About the run' });
+      return screen
+        .getAllByText(/^(Clamp it|Set-up|First piece|Count and finish)$/)
+        .filter((found) => found.closest('summary') === null)
+        .map(({ textContent }) => textContent);
+    };
+    expect(await names()).toEqual(['Clamp it', 'Set-up', 'First piece', 'Count and finish']);
+    unmount();
+    openPage(makeRun({ cautions, state: 'finished', firstPiece: released, allowedActions: ['bad-result'] }));
+    expect(await names()).toEqual(['First piece', 'Set-up']);
+  });
+
+  it('says what comes next after a piece that does not match and after a bad result', async () => {
+    const bad = { outcome: 'faint', note: '', at: '2026-05-14T08:00:00.000Z', byName: 'Jonah Pell' };
+    openPage(makeRun({ firstPiece: { ...released, ok: false }, badResult: bad }));
+    const [afterPiece, afterResult] = (await screen.findAllByText('Stop the batch.')).map((found) => found.parentElement);
+    expect(afterPiece).toHaveTextContent('tell a lead: a lead can put the setting on hold');
+    expect(afterResult).toHaveTextContent('The leads were told by letter');
+  });
+
+  it('forgets why finishing was refused as soon as the first piece is released', async () => {
+    const { user } = openPage(makeRun(), {
+      'POST /api/runs/run-7/finish': () => problem(409, 'first-piece-not-released', 'The first piece was not released'),
+      'POST /api/runs/run-7/first-piece': () => ({ body: makeRun({ firstPiece: released, version: 2 }) }),
+    });
+    await user.click(await screen.findByRole('button', { name: 'One good more' }));
+    await user.click(screen.getByRole('button', { name: 'Finish J-0007' }));
+    expect(await screen.findByText('The first piece was not released.')).toBeVisible();
+    await user.click(screen.getByRole('button', { name: 'It matches' }));
+    expect(await screen.findByText('Released')).toBeVisible();
+    expect(screen.queryByText('The first piece was not released.')).toBeNull();
+    expect(screen.getByLabelText('Good')).toHaveValue('1');
+  });
+
+  it('looks again at once when an act is refused by what happened meanwhile', async () => {
+    let stop: object | null = null;
+    server = fakeServer({
+      'GET /api/runs/J-0007': () => ({ body: makeRun({ stop }) }),
+      'POST /api/runs/run-7/first-piece': () => {
+        stop = { because: 'withdrawn', by: null, at: null, reason: '', approvedNumber: null };
+        return problem(409, 'not-approved', 'This revision is not approved');
+      },
+    });
+    const page = (
+      <StatusLineProvider>
+        <RunPage />
+      </StatusLineProvider>
+    );
+    const { user } = renderRoutes([{ path: '/runs/:code', element: page }], '/runs/J-0007');
+    await user.click(await screen.findByRole('button', { name: 'It matches' }));
+    expect(await screen.findByText('R-0031 revision 3 was withdrawn. Mark no more pieces.')).toBeVisible();
+  });
+
+  it('leads a trainee to the machine and others to the recipe', async () => {
+    const { unmount } = openPage(makeRun());
+    expect(await screen.findByRole('link', { name: 'R-0031 revision 3' })).toHaveAttribute('href', '/machine?recipe=recipe-31');
+    unmount();
+    openSession(makeSessionAnswer('operator'));
+    openPage(makeRun());
+    expect(await screen.findByRole('link', { name: 'R-0031 revision 3' })).toHaveAttribute('href', '/recipes/R-0031');
+  });
+
   it('shows a hold first and takes the release of the first piece away', async () => {
     const hold = { id: 'h', subject: 'machine', reason: 'Fumes', placedBy: 'Hanne Voss' };
     openPage(makeRun({ holds: [hold], allowedActions: ['tick', 'finish', 'bad-result'] }));

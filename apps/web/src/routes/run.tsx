@@ -1,4 +1,5 @@
 import { chakra } from '@chakra-ui/react';
+import { roleAtLeast } from '@proofplate/recipe-model';
 import { useState } from 'react';
 import { useParams } from 'react-router';
 import { FactList } from '../components/fact-list';
@@ -9,14 +10,16 @@ import { revisionNumbers } from '../components/setting-numbers';
 import { SkeletonBlock } from '../components/skeletons';
 import { StateMark } from '../components/state-mark';
 import { TextLink } from '../components/text-link';
-import { Holds } from '../features/holds/components/holds';
+import { Holds, PlaceHoldButton } from '../features/holds/components/holds';
 import { SavedPartPanel } from '../features/part-set-up/components/saved-part';
 import { ActProblem } from '../features/runs/components/act-problem';
 import { BadResult } from '../features/runs/components/bad-result';
 import { FinishRun } from '../features/runs/components/finish-run';
 import { FirstPiece } from '../features/runs/components/first-piece';
 import { MeasuredPieces } from '../features/runs/components/measured-pieces';
+import { RunCautions } from '../features/runs/components/run-cautions';
 import { RunCards, RunSetUp } from '../features/runs/components/run-steps';
+import { RunStop } from '../features/runs/components/run-stop';
 import { kindWord, revisionWords, runMark } from '../features/runs/run-words';
 import { type Run, tickRun, useRun } from '../features/runs/runs.api';
 import { ProblemError } from '../lib/api';
@@ -50,11 +53,13 @@ export function Component() {
 
 type RunPageProps = { run: Run; onChange: (run: Run) => void };
 
+/** Under way the reading order is the order of safety: what stops it, cautions, setting, set-up, first piece, counts. After it the outcome leads. */
 function RunPage({ run, onChange }: RunPageProps) {
   const { member } = useSession();
   const { mark, word } = runMark(run);
   const subjects = { recipe: run.recipe, machine: run.machine };
   const isOpen = run.state === 'started';
+  const mayLead = roleAtLeast(member.role, 'lead');
   return (
     <Page
       title={run.code}
@@ -70,22 +75,27 @@ function RunPage({ run, onChange }: RunPageProps) {
           </span>
         </>
       }
+      actions={mayLead && isOpen && run.holds.length === 0 && <PlaceHoldButton subjects={subjects} />}
     >
       <chakra.div display="grid" gap="4" gridTemplateColumns="minmax(0, 1fr)">
-        <Holds holds={run.holds} subjects={subjects} mayRelease={member.role === 'lead' || member.role === 'owner'} />
+        <RunStop run={run} />
+        <Holds holds={run.holds} subjects={subjects} mayRelease={mayLead} />
+        {isOpen && <RunCautions cautions={run.cautions} />}
         <chakra.div
           display="grid"
           gap={{ base: '4', lg: '6' }}
           gridTemplateColumns={{ base: 'minmax(0, 1fr)', lg: 'repeat(2, minmax(0, 1fr))' }}
           alignItems="start"
         >
-          <chakra.div display="grid" gap="4" order={{ base: isOpen ? 1 : 2, lg: 1 }}>
+          {isOpen && run.stop === null && <Steps key="steps" run={run} onChange={onChange} />}
+          <chakra.div key="acts" display="grid" gap="4" gridTemplateColumns="minmax(0, 1fr)">
             {run.kind === 'production' && <FirstPiece run={run} onChange={onChange} />}
             {run.allowedActions.includes('finish') ? <FinishRun run={run} onChange={onChange} /> : <Counts run={run} />}
             {run.allowedActions.includes('bad-result') && <BadResult run={run} onChange={onChange} />}
             <RunFacts run={run} />
           </chakra.div>
-          <Steps run={run} onChange={onChange} />
+          {run.stop !== null && <StoppedSteps run={run} />}
+          {!isOpen && <Steps key="steps" run={run} onChange={onChange} />}
         </chakra.div>
         <SavedPartPanel run={run} mayChange={run.allowedActions.includes('set-up-part')} />
       </chakra.div>
@@ -107,12 +117,31 @@ function Steps({ run, onChange }: RunPageProps) {
   };
   const onTick = run.allowedActions.includes('tick') ? (key: string, isTicked: boolean) => void handleTick(key, isTicked) : undefined;
   return (
-    <chakra.div display="grid" gap="4" order={{ base: 1, lg: 2 }}>
+    <chakra.div display="grid" gap="4" gridTemplateColumns="minmax(0, 1fr)">
       <ActProblem problem={problem} />
       <RunCards shown={run} ticks={ticks} onTick={onTick} />
       <FoldedNumbers summary="Numbers behind this setting" label="Numbers behind this setting" groups={revisionNumbers(run)} />
       <RunSetUp shown={run} ticks={ticks} onTick={onTick} />
     </chakra.div>
+  );
+}
+
+/** Nobody dials in what was stopped; it can still be looked up. */
+function StoppedSteps({ run }: { run: Run }) {
+  return (
+    <chakra.details>
+      <chakra.summary
+        display="list-item"
+        py="2.5"
+        minHeight={{ base: 'touch', lg: '0' }}
+        width="fit-content"
+        color="brand.fg"
+        cursor="pointer"
+      >
+        What was dialled in
+      </chakra.summary>
+      <RunCards shown={run} ticks={new Set(Object.keys(run.ticks))} />
+    </chakra.details>
   );
 }
 
@@ -141,10 +170,17 @@ function CitedDeviation({ deviation }: { deviation: NonNullable<Run['deviation']
 }
 
 function RunFacts({ run }: { run: Run }) {
-  const { shop } = useSession();
+  const { shop, member } = useSession();
   const time = (at: string) => formatTime(at, shop.timeZone);
   const facts = [
-    { label: 'Recipe', value: <TextLink to={paths.recipe(run.recipe.code)}>{revisionWords(run)}</TextLink> },
+    {
+      label: 'Recipe',
+      value: (
+        <TextLink to={member.role === 'trainee' ? paths.machineWith(run.recipe.id) : paths.recipe(run.recipe.code)}>
+          {revisionWords(run)}
+        </TextLink>
+      ),
+    },
     { label: 'Kind', value: kindWord(run.kind) },
     { label: 'Lens fitted', value: run.lensFitted?.name ?? 'not said' },
     { label: 'Part', value: run.part === '' ? 'not said' : run.part },

@@ -1,7 +1,7 @@
 import { chakra } from '@chakra-ui/react';
 import { useState } from 'react';
 import { Button } from '../../../components/button';
-import { StateShape } from '../../../components/state-mark';
+import { StopBanner } from '../../../components/stop-banner';
 import { formatTime } from '../../../lib/format';
 import { useSession } from '../../../lib/session';
 import { PlaceHoldDialog, ReleaseHoldDialog } from '../forms/hold-dialogs';
@@ -19,36 +19,24 @@ export function Holds({ holds, subjects, mayRelease }: HoldsProps) {
       <chakra.div role="alert">
         <chakra.ul display="grid" gap="2">
           {holds.map((hold) => (
-            <chakra.li
-              key={hold.id}
-              display="flex"
-              flexWrap="wrap"
-              alignItems="center"
-              gap="4"
-              p="4"
-              bg="oxide.subtle"
-              border="hairline"
-              borderWidth="2px"
-              borderColor="oxide.solid"
-              borderRadius="md"
-            >
-              <chakra.span color="oxide.fg" lineHeight="none">
-                <StateShape state="withdrawn" size={32} />
-              </chakra.span>
-              <chakra.div flex="1" minW="200px">
-                <chakra.h2 color="oxide.fg">{subjectName(subjects, hold.subject)} is on hold. Start no run.</chakra.h2>
+            <li key={hold.id}>
+              <StopBanner
+                title={`${subjectName(subjects, hold.subject)} is on hold. Start no run.`}
+                actions={
+                  mayRelease && (
+                    <Button size="glove" onClick={() => setReleasing(hold)}>
+                      Release the hold
+                    </Button>
+                  )
+                }
+              >
                 <p>{hold.reason}</p>
                 <chakra.p fontSize="sm" lineHeight="sm" color="fg.muted">
                   Placed by {hold.placedBy}
                   {hold.placedAt === undefined ? '' : `, ${formatTime(hold.placedAt, shop.timeZone)}`}. A lead can release it.
                 </chakra.p>
-              </chakra.div>
-              {mayRelease && (
-                <Button size="glove" onClick={() => setReleasing(hold)}>
-                  Release the hold
-                </Button>
-              )}
-            </chakra.li>
+              </StopBanner>
+            </li>
           ))}
         </chakra.ul>
       </chakra.div>

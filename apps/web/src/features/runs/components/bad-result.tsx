@@ -10,6 +10,7 @@ import { useSession } from '../../../lib/session';
 import { type BadOutcome, type Run, tellBadResult } from '../runs.api';
 import { useAct } from '../use-act';
 import { ActProblem } from './act-problem';
+import { NextStep } from './next-step';
 
 const isBad = (outcome: Outcome): outcome is BadOutcome => outcome !== 'good';
 const BAD_OUTCOMES = codesOf(OUTCOME_LABELS).filter(isBad);
@@ -25,9 +26,9 @@ export function BadResult({ run, onChange }: { run: Run; onChange: (run: Run) =>
     problem,
   } = useAct<Run>((next) => {
     setIsOpen(false);
-    announce('The bad result is kept with the run.');
+    announce('The bad result is kept with the run, and the leads are told.');
     onChange(next);
-  });
+  }, run.version);
   const { badResult } = run;
   return (
     <Panel px="5" py="4" aria-labelledby="bad-result-title" display="grid" gap="3">
@@ -40,6 +41,12 @@ export function BadResult({ run, onChange }: { run: Run; onChange: (run: Run) =>
             {badResult.note === '' ? '' : `: ${badResult.note}`}
           </chakra.p>
         </div>
+      )}
+      {badResult !== null && (
+        <NextStep>
+          {run.state === 'started' && <b>Stop the batch. </b>}
+          Keep the pieces apart. The leads were told by letter; a lead decides about the pieces and can put the setting on hold.
+        </NextStep>
       )}
       <ActProblem problem={problem} />
       {isOpen ? (

@@ -28,7 +28,7 @@ export function FinishRun({ run, onChange }: { run: Run; onChange: (run: Run) =>
   } = useAct<Run>((next) => {
     announce(`${next.code} is finished: ${next.good} good, ${next.scrap} scrap.`);
     onChange(next);
-  });
+  }, run.version);
   const counts = { good: readCount(good), scrap: readCount(scrap) };
   const measured = typedPieces(pieces);
   const submit = (event: FormEvent) => {

@@ -12,6 +12,7 @@ import { useSession } from '../../../lib/session';
 import { judgeFirstPiece, type Run } from '../runs.api';
 import { useAct } from '../use-act';
 import { ActProblem } from './act-problem';
+import { NextStep } from './next-step';
 
 /** The first piece is compared before the batch goes on. */
 export function FirstPiece({ run, onChange }: { run: Run; onChange: (run: Run) => void }) {
@@ -24,7 +25,7 @@ export function FirstPiece({ run, onChange }: { run: Run; onChange: (run: Run) =
   } = useAct<Run>((next) => {
     setNote('');
     onChange(next);
-  });
+  }, run.version);
   const { firstPiece } = run;
   const mayJudge = run.allowedActions.includes('first-piece');
   const judge = (ok: boolean) => void act(ok ? 'release' : 'refuse', (key) => judgeFirstPiece(run, { ok, note }, key));
@@ -42,6 +43,13 @@ export function FirstPiece({ run, onChange }: { run: Run; onChange: (run: Run) =
           {firstPiece.note === '' ? '' : `: ${firstPiece.note}`}
         </chakra.p>
       )}
+      {firstPiece?.ok === false && run.state === 'started' && (
+        <NextStep>
+          <b>Stop the batch.</b> Check lens, focus and every value against the card, then mark another piece. If that does not match either,
+          tell a lead: a lead can put the setting on hold.
+        </NextStep>
+      )}
+      {firstPiece === null && run.stop !== null && <p>It was not looked at before the setting was stopped.</p>}
       {mayJudge && firstPiece?.ok !== true && (
         <>
           <p>
