@@ -10,6 +10,7 @@ import { useStatusLine } from '../components/status-line';
 import { TextLink } from '../components/text-link';
 import { groundWords, lowerFirst } from '../features/coupons/coupon-words';
 import { type Coupon, useCoupon } from '../features/coupons/coupons.api';
+import { CraterSection } from '../features/coupons/craters/crater-section';
 import { CouponLog } from '../features/coupons/log/components/coupon-log';
 import { CouponMeta } from '../features/coupons/log/components/coupon-meta';
 import { SealDialog } from '../features/coupons/log/forms/seal-dialog';
@@ -65,6 +66,11 @@ function CouponPage({ coupon }: { coupon: Coupon }) {
       )}
       {inspection !== undefined && (photos.data !== undefined || photos.error !== undefined) && (
         <CouponLog key={coupon.id} coupon={coupon} inspection={inspection} photos={photos.data?.items ?? []} />
+      )}
+      {inspection?.measurements.some(({ quantity }) => quantity === 'crater-diameter') === true && (
+        <Box mt="6">
+          <CraterSection coupon={coupon} />
+        </Box>
       )}
       {coupon.state === 'planned' && (
         <Box mt="4" maxW="form">

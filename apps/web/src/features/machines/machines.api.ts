@@ -1,3 +1,4 @@
+import type { components } from '@proofplate/api-client';
 import type { Panel, PhysicalProfile, SourceKind } from '@proofplate/recipe-model';
 import type { SWRResponse } from 'swr';
 import { type ProblemError, request } from '../../lib/api';
@@ -43,6 +44,8 @@ export type MachineLens = {
   version: number;
   allowedActions: readonly string[];
 };
+
+export type SpotMeasurement = components['schemas']['SpotMeasurementDto'];
 
 export type ReadingPoint = { percent: number; watts: number };
 export type Calibration = {
@@ -98,6 +101,13 @@ export function useMachineProfiles(id: string): SWRResponse<Page<MachineProfile>
 
 export function useMachineLenses(id: string): SWRResponse<Page<MachineLens>, ProblemError> {
   return useRead<Page<MachineLens>>(`${one(id)}/lenses`, undefined, FOR_EDITING);
+}
+
+export function useSpots({
+  machineId,
+  lensId,
+}: Pick<MachineLens, 'machineId' | 'lensId'>): SWRResponse<Page<SpotMeasurement>, ProblemError> {
+  return useRead<Page<SpotMeasurement>>(`${one(machineId)}/lenses/${encodeURIComponent(lensId)}/spots`);
 }
 
 export function useCalibrations(id: string): SWRResponse<Page<Calibration>, ProblemError> {

@@ -5,6 +5,7 @@ import { type SWRResponse, useSWRConfig } from 'swr';
 import { type ProblemError, request } from '../../../lib/api';
 import { revalidate, useRead } from '../../../lib/swr';
 import { COUPONS } from '../coupons.api';
+import { craterFitPath } from '../craters/craters.api';
 
 type Schemas = components['schemas'];
 export type Inspection = Schemas['InspectionDto'];
@@ -75,7 +76,7 @@ export function useInspectionCache(couponId: string) {
 
 export async function addMeasurements(couponId: string, measurements: readonly NewMeasurement[], idempotencyKey: string): Promise<void> {
   await request('post', `${couponPath(couponId)}/measurements`, { body: { measurements }, idempotencyKey });
-  await revalidate(inspectionPath(couponId));
+  await revalidate(inspectionPath(couponId), craterFitPath(couponId));
 }
 
 export async function recordCriteria(couponId: string, version: number, criteria: readonly Partial<Criterion>[]): Promise<void> {

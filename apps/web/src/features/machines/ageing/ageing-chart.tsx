@@ -1,8 +1,8 @@
 import { chakra } from '@chakra-ui/react';
 import { useRef } from 'react';
+import { axisTicks } from '../../../components/chart/axis-ticks';
+import { useDrawnWidth } from '../../../components/chart/use-drawn-width';
 import { formatDay, formatNumber } from '../../../lib/format';
-import { axisTicks } from '../components/axis-ticks';
-import { useDrawnWidth } from '../components/use-drawn-width';
 import type { AgeingPoint } from './ageing-series';
 
 const WIDEST = 640;

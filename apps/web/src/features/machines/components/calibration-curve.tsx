@@ -1,10 +1,10 @@
 import { chakra } from '@chakra-ui/react';
 import { powerAtPercent, powerCalibration } from '@proofplate/physics';
 import { useRef } from 'react';
+import { axisTicks } from '../../../components/chart/axis-ticks';
+import { useDrawnWidth } from '../../../components/chart/use-drawn-width';
 import { formatNumber } from '../../../lib/format';
 import type { ReadingPoint } from '../machines.api';
-import { axisTicks } from './axis-ticks';
-import { useDrawnWidth } from './use-drawn-width';
 
 const WIDEST = 640;
 const HEIGHT = 280;

@@ -10,6 +10,7 @@ import { useStatusLine } from '../../../components/status-line';
 import { formatDay, formatQuantity } from '../../../lib/format';
 import { AddMachineLensForm, ChangeMachineLensForm } from '../forms/machine-lens-form';
 import { type LensChoice, type Machine, type MachineLens, useMachineLenses } from '../machines.api';
+import { LensSpots } from './lens-spots';
 import { Missing } from './machine-list';
 
 type OpenDialog = { act: 'add' } | { act: 'edit'; pair: MachineLens };
@@ -50,6 +51,9 @@ export function MachineLenses({ machine, lenses }: { machine: Machine; lenses: r
           rowKey={({ id }) => id}
         />
       )}
+      {data?.items.map((pair) => (
+        <LensSpots key={pair.id} pair={pair} />
+      ))}
       {dialog?.act === 'add' && (
         <Dialog title="Add a lens to this machine" onClose={() => setDialog(undefined)}>
           <AddMachineLensForm machineId={machine.id} lenses={free} onDone={handleDone} />

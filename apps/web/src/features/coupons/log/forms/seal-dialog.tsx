@@ -6,9 +6,9 @@ import { TextField } from '../../../../components/field';
 import { SealIcon } from '../../../../components/icons';
 import { ProblemNotice } from '../../../../components/problem-notice';
 import { StateShape } from '../../../../components/state-mark';
-import { ProblemError } from '../../../../lib/api';
-import { useIdempotencyKey } from '../../../../lib/idempotency-key';
+import type { ProblemError } from '../../../../lib/api';
 import type { Coupon } from '../../coupons.api';
+import { useAct } from '../../use-act';
 import { finishInspection, type Inspection, type MissingItem, sealCoupon } from '../log.api';
 
 export type SealDialogProps = { coupon: Coupon; inspection: Inspection; onClose: () => void; onDone: (words: string) => void };
@@ -115,26 +115,4 @@ function ActProblem({ problem }: { problem: ProblemError }) {
       />
     </Box>
   );
-}
-
-/** An act that is carried out once, whatever the connection does. */
-function useAct() {
-  const key = useIdempotencyKey();
-  const [isBusy, setIsBusy] = useState(false);
-  const [problem, setProblem] = useState<ProblemError>();
-  const run = async (work: (idempotencyKey: string) => Promise<void>) => {
-    setIsBusy(true);
-    setProblem(undefined);
-    try {
-      await work(key.current());
-      key.renew();
-    } catch (error) {
-      if (!(error instanceof ProblemError)) throw error;
-      if (error.status !== 0 && error.status < 500) key.renew();
-      setProblem(error);
-    } finally {
-      setIsBusy(false);
-    }
-  };
-  return { run, isBusy, problem };
 }
