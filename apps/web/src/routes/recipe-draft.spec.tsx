@@ -69,7 +69,7 @@ describe('the draft editor', () => {
   it('shows the power table that is cited although the tables arrive later, and keeps it', async () => {
     const tables = ['2026-01-12', '2026-04-02'].map((measuredOn, index) => ({
       ...{ id: `table-${index + 1}`, measuredOn, meter: 'Thermopile' },
-      ...{ points: [], frequencyKhz: null, pulseWidthNs: null },
+      ...{ points: [20, 60, 100].map((percent) => ({ percent, watts: percent / 5 })), frequencyKhz: null, pulseWidthNs: null },
     }));
     const citing = { ...draft, calibration: tables[0] };
     let arrive: () => void = () => undefined;
