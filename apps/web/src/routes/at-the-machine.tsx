@@ -5,6 +5,7 @@ import { GrantDeviationButton } from '../features/deviations/forms/grant-deviati
 import { Finder } from '../features/finder/components/finder';
 import type { Choice, FinderAnswer } from '../features/finder/finder.api';
 import { Holds, PlaceHoldButton } from '../features/holds/components/holds';
+import { PartTime } from '../features/marking-time/components/part-time';
 import { AskForm } from '../features/requests/forms/ask-form';
 import { useSession } from '../lib/session';
 
@@ -16,6 +17,7 @@ export function Component() {
       <Finder
         holds={(answer) => <AnswerHolds answer={answer} />}
         leadActs={(answer) => <LeadActs answer={answer} />}
+        time={(answer) => <PartTime revisionId={answer.revisionId} />}
         ask={(choice) => <Ask choice={choice} />}
       />
       {machineId !== null && member.role !== 'trainee' && <WaitingCoupons machineId={machineId} />}

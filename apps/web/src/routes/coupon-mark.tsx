@@ -6,6 +6,7 @@ import { useStatusLine } from '../components/status-line';
 import { groundWords } from '../features/coupons/coupon-words';
 import { type Coupon, useCoupon } from '../features/coupons/coupons.api';
 import { MarkCoupon } from '../features/coupons/mark/mark-coupon';
+import { CouponClock } from '../features/marking-time/components/coupon-clock';
 import { paths } from '../lib/paths';
 import { useSession } from '../lib/session';
 
@@ -40,6 +41,7 @@ export function Component() {
           readAgain: () => mutate(),
         }}
         locale={shop.locale}
+        clock={(cell) => <CouponClock coupon={data} cell={cell} />}
         onFinished={handleFinished}
       />
     </Page>

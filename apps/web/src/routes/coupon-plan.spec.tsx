@@ -17,7 +17,10 @@ const preview = {
     rows: 1,
     columns: 2,
     rowFactor: null,
-    markingTime: { totalS: 73, beamOnS: 60, missingBecause: null },
+    markingTime: {
+      ...{ totalS: 73, beamOnS: 60, errorS: 1.2, missingBecause: null, quickestCellS: 30, slowestCellS: 43 },
+      overheads: { basis: 'profile', jumpSpeedMmPerS: 5000, notFittedBecause: 'no time is logged; it takes 3' },
+    },
     plate: { widthMm: 60, heightMm: 31.4 },
   },
   columnFactor: { parameter: 'powerPercent', spacing: 'steps', levels: [level(20, 'percentFromZero'), level(40, 'percentFromZero')] },

@@ -15,6 +15,7 @@ import { MachineLenses } from '../features/machines/components/machine-lenses';
 import { PanelPreview } from '../features/machines/components/panel-preview';
 import { ProfileHistory } from '../features/machines/components/profile-history';
 import { type Machine, setMachineArchived, useMachine } from '../features/machines/machines.api';
+import { MachineTime } from '../features/marking-time/components/machine-time';
 import { PowerShifts } from '../features/recipes/power/power-shifts';
 import { paths } from '../lib/paths';
 import { useSession } from '../lib/session';
@@ -98,6 +99,7 @@ function Sections({ machine }: { machine: Machine }) {
         <MachineLenses machine={machine} lenses={lenses?.items ?? []} />
         <Calibrations machine={machine} />
         <PowerShifts machine={machine} />
+        <MachineTime machine={machine} />
       </chakra.div>
       <chakra.div display="grid" gap="4" gridTemplateColumns="minmax(0, 1fr)">
         <chakra.section aria-labelledby="panel-title">

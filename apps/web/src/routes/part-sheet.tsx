@@ -5,6 +5,7 @@ import { Page } from '../components/page';
 import { PrintedPage } from '../components/printed-page';
 import { ReadProblem } from '../components/read-problem';
 import { SkeletonBlock } from '../components/skeletons';
+import { PartSheetTime } from '../features/marking-time/components/sheet-time';
 import { useCautions } from '../features/materials/cautions.api';
 import { PartSheet } from '../features/part-set-up/components/part-sheet';
 import { useRunPart } from '../features/part-set-up/part-set-up.api';
@@ -36,7 +37,12 @@ export function Component() {
         </EmptyState>
       ) : (
         <PrintedPage back={back}>
-          <PartSheet saved={known.setUp} run={run} cautions={cautions.items.filter(({ appliesTo }) => appliesTo.roundPart === true)} />
+          <PartSheet
+            saved={known.setUp}
+            run={run}
+            time={<PartSheetTime runId={run.id} />}
+            cautions={cautions.items.filter(({ appliesTo }) => appliesTo.roundPart === true)}
+          />
         </PrintedPage>
       )}
     </Page>

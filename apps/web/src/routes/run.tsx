@@ -11,6 +11,7 @@ import { SkeletonBlock } from '../components/skeletons';
 import { StateMark } from '../components/state-mark';
 import { TextLink } from '../components/text-link';
 import { Holds, PlaceHoldButton } from '../features/holds/components/holds';
+import { RunTime } from '../features/marking-time/components/run-time';
 import { SavedPartPanel } from '../features/part-set-up/components/saved-part';
 import { ActProblem } from '../features/runs/components/act-problem';
 import { BadResult } from '../features/runs/components/bad-result';
@@ -97,6 +98,7 @@ function RunPage({ run, onChange }: RunPageProps) {
           {run.stop !== null && <StoppedSteps run={run} />}
           {!isOpen && <Steps key="steps" run={run} onChange={onChange} />}
         </chakra.div>
+        <RunTime run={{ id: run.id, code: run.code, revisionId: run.revision.id, isOpen }} />
         <SavedPartPanel run={run} mayChange={run.allowedActions.includes('set-up-part')} />
       </chakra.div>
     </Page>

@@ -7,6 +7,7 @@ import { ReadProblem } from '../components/read-problem';
 import { SkeletonBlock } from '../components/skeletons';
 import { Sheet } from '../features/finder/components/sheet';
 import { useFinder } from '../features/finder/finder.api';
+import { SheetTime } from '../features/marking-time/components/sheet-time';
 import { paths } from '../lib/paths';
 
 export function Component() {
@@ -26,7 +27,7 @@ export function Component() {
         <NoSheet reasons={data.answer?.blockedBecause ?? []} back={back} />
       ) : (
         <PrintedPage back={{ to: back, label: 'Back to the machine' }}>
-          <Sheet answer={data.answer} cautions={data.cautions} />
+          <Sheet answer={data.answer} cautions={data.cautions} time={<SheetTime revisionId={data.answer.revisionId} />} />
         </PrintedPage>
       )}
     </Page>

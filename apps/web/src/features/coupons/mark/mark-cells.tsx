@@ -1,6 +1,6 @@
 import { chakra, Flex } from '@chakra-ui/react';
 import { FILL_LABELS } from '@proofplate/recipe-model';
-import { useState } from 'react';
+import { type ReactNode, useState } from 'react';
 import { ActBar } from '../../../components/act-bar';
 import { Button } from '../../../components/button';
 import { ProblemNotice } from '../../../components/problem-notice';
@@ -14,10 +14,17 @@ import { PausedNotice, usePause } from './pause';
 import { SkipDialog } from './skip-dialog';
 import type { Marking } from './use-marking';
 
-export type MarkCellsProps = { coupon: Coupon; ordered: readonly CouponCell[]; current: CouponCell; marking: Marking; locale: string };
+export type MarkCellsProps = {
+  coupon: Coupon;
+  ordered: readonly CouponCell[];
+  current: CouponCell;
+  marking: Marking;
+  locale: string;
+  clock: ReactNode;
+};
 
 /** One cell at a time, in the order of the run. */
-export function MarkCells({ coupon, ordered, current, marking, locale }: MarkCellsProps) {
+export function MarkCells({ coupon, ordered, current, marking, locale, clock }: MarkCellsProps) {
   const [open, setOpen] = useState<'differs' | 'skip'>();
   const [coolDownS, setCoolDownS] = useCoolDownSetting();
   const [coolUntilMs, setCoolUntilMs] = useState<number>();
@@ -60,9 +67,12 @@ export function MarkCells({ coupon, ordered, current, marking, locale }: MarkCel
       <NotDialled coupon={coupon} current={current} />
       <Flex gap="3" align="center" justify="space-between" wrap="wrap">
         <CoolDownSetting seconds={coolDownS} onChange={setCoolDownS} />
-        <Button size="glove" onClick={pause.begin}>
-          Pause
-        </Button>
+        <Flex gap="2" wrap="wrap">
+          {clock}
+          <Button size="glove" onClick={pause.begin}>
+            Pause
+          </Button>
+        </Flex>
       </Flex>
       <ActBar>
         <chakra.div display="grid" gridTemplateColumns="repeat(3, minmax(0, 1fr))" gap="2" css={{ '& > *': { px: '2' } }}>

@@ -1,18 +1,26 @@
+import type { ReactNode } from 'react';
 import { ButtonLink } from '../../../components/button';
 import { EmptyState } from '../../../components/empty-state';
 import { paths } from '../../../lib/paths';
 import { couponMark } from '../coupon-words';
-import type { Coupon } from '../coupons.api';
+import type { Coupon, CouponCell } from '../coupons.api';
 import { FinishMarking } from './finish-marking';
 import { MarkCells } from './mark-cells';
 import { MarkLabels } from './mark-labels';
 import { currentCell, inRunOrder, lastDone } from './marking-order';
 import { type CouponOnPage, useMarking } from './use-marking';
 
-export type MarkCouponProps = { coupon: Coupon; page: CouponOnPage; locale: string; onFinished: (coupon: Coupon) => void };
+export type MarkCouponProps = {
+  coupon: Coupon;
+  page: CouponOnPage;
+  locale: string;
+  /** The clock of a cell, or of all cells. */
+  clock: (cell?: CouponCell) => ReactNode;
+  onFinished: (coupon: Coupon) => void;
+};
 
 /** At the machine, gloves on: labels, then every cell in run order, then the plate is marked. */
-export function MarkCoupon({ coupon, page, locale, onFinished }: MarkCouponProps) {
+export function MarkCoupon({ coupon, page, locale, clock, onFinished }: MarkCouponProps) {
   const marking = useMarking(coupon, page);
   if (coupon.state !== 'planned') {
     return (
@@ -39,7 +47,15 @@ export function MarkCoupon({ coupon, page, locale, onFinished }: MarkCouponProps
   if (coupon.markingStartedAt === null) return <MarkLabels coupon={coupon} onStarted={(started) => page.change(() => started)} />;
   const ordered = inRunOrder(coupon);
   const current = currentCell(ordered);
-  if (current !== undefined) return <MarkCells coupon={coupon} ordered={ordered} current={current} marking={marking} locale={locale} />;
+  if (current !== undefined)
+    return <MarkCells coupon={coupon} ordered={ordered} current={current} marking={marking} locale={locale} clock={clock(current)} />;
   const last = lastDone(ordered);
-  return <FinishMarking coupon={coupon} onFinished={onFinished} onUndo={last === undefined ? undefined : () => void marking.undo(last)} />;
+  return (
+    <FinishMarking
+      coupon={coupon}
+      clock={clock()}
+      onFinished={onFinished}
+      onUndo={last === undefined ? undefined : () => void marking.undo(last)}
+    />
+  );
 }

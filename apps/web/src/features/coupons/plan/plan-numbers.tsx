@@ -1,5 +1,5 @@
 import { chakra } from '@chakra-ui/react';
-import { cellAddress, type DoseCaution, stepNumbers } from '@proofplate/recipe-model';
+import { cellAddress, type DoseCaution, type HeadOverheads, stepNumbers } from '@proofplate/recipe-model';
 import { useMemo } from 'react';
 import { type UseFormReturn, useWatch } from 'react-hook-form';
 import { NumbersPanel } from '../../../components/numbers-panel/numbers-panel';
@@ -16,6 +16,8 @@ export type PlanNumbersProps = {
   lens: MachineLens | undefined;
   place: CellPlace;
   doseCaution: DoseCaution | null;
+  /** Of the machine; undefined until the plan was worked out once. */
+  overheads: HeadOverheads | undefined;
   cellMm: number;
   locale: string;
 };
@@ -41,7 +43,7 @@ export function PlanNumbers(props: PlanNumbersProps) {
 type LiveNumbersProps = PlanNumbersProps & { lens: MachineLens; label: string };
 
 /** Watches what is typed; nothing else of the page is drawn again at a key. */
-function LiveNumbers({ form, machine, lens, place, doseCaution, cellMm, locale, label }: LiveNumbersProps) {
+function LiveNumbers({ form, machine, lens, place, doseCaution, overheads, cellMm, locale, label }: LiveNumbersProps) {
   const [base, rows, columns] = useWatch({ control: form.control, name: ['base', 'rows', 'columns'] });
   const calibration = useNewestCalibration(machine.id);
   const typed = useMemo(() => {
@@ -54,6 +56,7 @@ function LiveNumbers({ form, machine, lens, place, doseCaution, cellMm, locale, 
     panel: typed.panel,
     doseCaution,
     areaMm: { widthMm: cellMm, heightMm: cellMm },
+    overheads,
   });
   return <NumbersPanel label={label} groups={numbersGroups([numbers])} />;
 }

@@ -10,7 +10,8 @@ import { Plate } from '../../../components/plate/plate';
 import type { PlateCells } from '../../../components/plate/plate-types';
 import { type PlateFactor, PlateWithLevels } from '../../../components/plate/plate-with-levels';
 import { responseScale } from '../../../components/plate/response-scale';
-import { formatDuration, formatNumber, formatSize } from '../../../lib/format';
+import { asSentence, formatNumber, formatSize } from '../../../lib/format';
+import { basisWords, headOverheadsOf, timeText, timeWithError } from '../../../lib/time-words';
 import type { CouponPreview } from '../coupons.api';
 
 /** Warnings whose cells are flagged on the plate; the others are named in words only. */
@@ -100,22 +101,30 @@ function ChosenCell({ preview, place }: { preview: CouponPreview; place: CouponP
 /** Marking time and plate, as far as they are known, with what they rest on. */
 export function PlanFacts({ preview, children }: { preview: CouponPreview; children: ReactNode }) {
   const { cells, markingTime, plate, powerBasis, spotUm } = preview;
-  const { totalS, missingBecause } = markingTime;
+  const { totalS, errorS, missingBecause, quickestCellS, slowestCellS } = markingTime;
   return (
     <Card p="5" display="flex" flexWrap="wrap" alignItems="center" gap="4" rowGap="3">
-      <Fact label={`${cells.length} cells, marking time`} note={missingBecause ?? undefined}>
-        {totalS === null ? 'not known' : formatDuration(totalS)}
+      <Fact label={`${cells.length} cells, marking time`} note={missingBecause ?? cellTimeWords(quickestCellS, slowestCellS)}>
+        {totalS === null ? 'not known' : timeWithError({ totalS, errorS })}
       </Fact>
       <Fact label="Plate needed">{formatSize(Math.ceil(plate.widthMm), Math.ceil(plate.heightMm), 'mm')}</Fact>
       <chakra.p flexBasis="full" order="3" fontSize="sm" lineHeight="sm" color="fg.muted">
         {BASIS_WORDS[powerBasis]}
-        {spotUm !== null && `, spot ${formatNumber(spotUm, { decimals: 0 })} µm`}. Labels not counted.
+        {spotUm !== null && `, spot ${formatNumber(spotUm, { decimals: 0 })} µm`}. Time{' '}
+        {asSentence(basisWords(headOverheadsOf(markingTime.overheads)))} Labels not counted.
       </chakra.p>
       <Flex gap="2" wrap="wrap" ml="auto" align="center">
         {children}
       </Flex>
     </Card>
   );
+}
+
+/** One cell, or from the quickest to the slowest. */
+function cellTimeWords(quickestS: number | null, slowestS: number | null): string | undefined {
+  if (quickestS === null || slowestS === null) return undefined;
+  const [quickest, slowest] = [timeText(quickestS), timeText(slowestS)];
+  return quickest === slowest ? `${quickest} a cell` : `${quickest} to ${slowest} a cell`;
 }
 
 const BASIS_WORDS: Readonly<Record<CouponPreview['powerBasis'], string>> = {

@@ -1,4 +1,5 @@
 import { chakra } from '@chakra-ui/react';
+import type { ReactNode } from 'react';
 import { ActBar } from '../../../components/act-bar';
 import { Button, ButtonLink } from '../../../components/button';
 import { FactList } from '../../../components/fact-list';
@@ -19,7 +20,7 @@ import { MarkToMatch } from './mark-to-match';
 import { SetUpSteps } from './set-up-steps';
 
 /** The approved setting as it is dialled in: card, mark to match, set-up, signature, acts. */
-export function Answer({ answer }: { answer: FinderAnswer }) {
+export function Answer({ answer, time }: { answer: FinderAnswer; time: ReactNode }) {
   const { ticks, setTick } = useKeptTicks(answer.revisionId);
   return (
     <div>
@@ -32,6 +33,7 @@ export function Answer({ answer }: { answer: FinderAnswer }) {
         <chakra.div display="grid" gap="4" minW="0">
           <SettingCards answer={answer} ticks={ticks} onTick={setTick} />
           <FoldedNumbers summary="Numbers behind this setting" label="Numbers behind this setting" groups={revisionNumbers(answer)} />
+          {time}
         </chakra.div>
         <chakra.div display="grid" gap="4">
           {answer.reference !== null && <MarkToMatch reference={answer.reference} />}

@@ -19,12 +19,14 @@ export type FinderProps = {
   holds: (answer: FinderAnswer) => ReactNode;
   /** What a lead may do with the setting that is shown. */
   leadActs: (answer: FinderAnswer) => ReactNode;
+  /** How long a part takes with the setting that is shown. */
+  time: (answer: FinderAnswer) => ReactNode;
   /** Asks for the setting of the sentence. */
   ask: (choice: Choice) => ReactNode;
 };
 
 /** The sentence and what it leads to. The reading order is the order of safety: job, holds, cautions, setting, mark, set-up, signature, acts. */
-export function Finder({ holds, leadActs, ask }: FinderProps) {
+export function Finder({ holds, leadActs, time, ask }: FinderProps) {
   const { choice, finder, choose, setWords, show, startOver } = useSentence();
   const { data, error, isLoading, mutate } = finder;
   if (data === undefined) {
@@ -58,7 +60,14 @@ export function Finder({ holds, leadActs, ask }: FinderProps) {
       {isLoading ? (
         <SkeletonBlock height="420px" label="Looking" />
       ) : (
-        <Outcome result={data} choice={choice} holds={data.answer === null ? null : holds(data.answer)} ask={ask(choice)} onShow={show} />
+        <Outcome
+          result={data}
+          choice={choice}
+          holds={data.answer === null ? null : holds(data.answer)}
+          time={data.answer === null ? null : time(data.answer)}
+          ask={ask(choice)}
+          onShow={show}
+        />
       )}
     </chakra.div>
   );
@@ -68,11 +77,12 @@ type OutcomeProps = {
   result: FinderResult;
   choice: Choice;
   holds: ReactNode;
+  time: ReactNode;
   ask: ReactNode;
   onShow: ReturnType<typeof useSentence>['show'];
 };
 
-function Outcome({ result, choice, holds, ask, onShow }: OutcomeProps) {
+function Outcome({ result, choice, holds, time, ask, onShow }: OutcomeProps) {
   const { answer, cautions, isForbidden, matches, matchCount, withdrawn } = result;
   if (isForbidden) return <Forbidden cautions={cautions} />;
   if (answer !== null)
@@ -81,7 +91,7 @@ function Outcome({ result, choice, holds, ask, onShow }: OutcomeProps) {
         {holds}
         <AnswerNotices answer={answer} />
         <Cautions cautions={cautions} answer={answer} />
-        <Answer key={answer.revisionId} answer={answer} />
+        <Answer key={answer.revisionId} answer={answer} time={time} />
       </>
     );
   if (!isPartNamed(choice)) return <Begin count={matchCount} />;

@@ -1,4 +1,5 @@
 import { chakra } from '@chakra-ui/react';
+import type { ReactNode } from 'react';
 import { CellCloseUp, EvidencePlate } from '../../../components/plate/evidence-plate';
 import { platePhotoOf } from '../../../components/plate/plate-photo';
 import { besidePanel, settingRows, stepTitle } from '../../../components/setting-rows';
@@ -14,8 +15,10 @@ import { SheetCodePicture } from './sheet-code';
 
 const MOST_MEASUREMENTS = 3;
 
+export type SheetProps = { answer: FinderAnswer; cautions: readonly FinderCaution[]; time: ReactNode };
+
 /** One revision for one part on one page of A4, black on white: what is pinned to the machine. */
-export function Sheet({ answer, cautions }: { answer: FinderAnswer; cautions: readonly FinderCaution[] }) {
+export function Sheet({ answer, cautions, time }: SheetProps) {
   return (
     <Paper aria-label={`Set-up sheet of ${answer.code}`}>
       <Head answer={answer} />
@@ -25,6 +28,9 @@ export function Sheet({ answer, cautions }: { answer: FinderAnswer; cautions: re
         <chakra.div>
           {answer.reference !== null && <Match reference={answer.reference} />}
           <Limits answer={answer} />
+          <chakra.p mt="3mm" fontSize="10pt" lineHeight="13pt" _empty={{ display: 'none' }}>
+            {time}
+          </chakra.p>
         </chakra.div>
       </chakra.div>
       <SetUp steps={answer.setUpSteps} />

@@ -1,4 +1,5 @@
 import { chakra } from '@chakra-ui/react';
+import type { ReactNode } from 'react';
 import { Box, Line, Paper, Small, Title } from '../../../components/sheet-paper';
 import { formatQuantity, formatTime } from '../../../lib/format';
 import { useSession } from '../../../lib/session';
@@ -13,10 +14,12 @@ export type PartSheetProps = {
   saved: SavedPart;
   run: { code: string; jobReference: string; part: string; recipe: { code: string; title: string } };
   cautions: readonly { id: string; subject: string; text: string }[];
+  /** How long the marking takes, in a line. */
+  time: ReactNode;
 };
 
 /** The round part of a run on one page of A4, black on white. */
-export function PartSheet({ saved, run, cautions }: PartSheetProps) {
+export function PartSheet({ saved, run, cautions, time }: PartSheetProps) {
   const { shop, member } = useSession();
   const { entered, ground, results } = saved;
   return (
@@ -57,6 +60,9 @@ export function PartSheet({ saved, run, cautions }: PartSheetProps) {
             </chakra.li>
           ))}
         </ol>
+        <chakra.p mt="2mm" _empty={{ display: 'none' }}>
+          {time}
+        </chakra.p>
       </chakra.section>
       <chakra.section mt="4mm">
         <Title>The part</Title>
