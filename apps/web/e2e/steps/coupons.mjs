@@ -32,10 +32,10 @@ const LETTERS = { Power: '40', Speed: '600', ...SAME_IN_EVERY_CELL };
 export async function refuseNeverMaterial({ page, go }) {
   await go('/coupons/plan');
   await chooseKeys(page, { material: 'sign film' });
-  await fillPlan(page);
   await page.getByText('Do not mark PVC').first().waitFor();
+  await page.getByText('The rest of the plan is not asked for').waitFor();
   await page.getByRole('button', { name: 'Save the plan' }).click();
-  await page.getByText('This must not be marked.').first().waitFor();
+  await page.getByRole('link', { name: /This must not be marked/ }).waitFor();
   if (new URL(page.url()).pathname !== '/coupons/plan') throw new Error('a plan for PVC was saved');
 }
 
@@ -52,6 +52,7 @@ export async function planCoupon({ page, go }) {
   await chooseKeys(page);
   await page.getByLabel('Lot').fill('6061-B14');
   await fillPlan(page);
+  await page.getByRole('checkbox', { name: /^I have read/ }).check();
   await page.getByRole('button', { name: 'Save the plan' }).click();
   await page.waitForURL(/\/coupons\/C-\d+/);
   return /C-\d+/.exec(page.url())?.[0] ?? '';
@@ -60,6 +61,7 @@ export async function planCoupon({ page, go }) {
 /** The labels first where the plan has them, then every cell in run order. */
 export async function markCoupon({ page, go }, { code, cells }) {
   await go(`/coupons/${code}/mark`);
+  await page.getByRole('checkbox', { name: /^I have read/ }).check();
   await page.getByRole('button', { name: /^(Labels are marked|Start with the cells)$/ }).click();
   const heading = page.getByRole('heading', { level: 2, name: /^Cell / });
   for (let done = 0; done < cells; done += 1) {

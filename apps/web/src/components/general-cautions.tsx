@@ -4,8 +4,14 @@ import { CautionIcon } from './icons';
 
 export type GeneralCaution = { id: string; subject: string; text: string; source: string };
 
-/** Cautions of all work in one row, each with what to do; why and from where behind one tap. */
-export function GeneralCautions({ cautions }: { cautions: readonly GeneralCaution[] }) {
+export type GeneralCautionsProps = {
+  cautions: readonly GeneralCaution[];
+  /** What they are for, first in the row. */
+  lead?: string;
+};
+
+/** Cautions in one row, each with what to do; why and from where behind one tap. */
+export function GeneralCautions({ cautions, lead = 'With every job' }: GeneralCautionsProps) {
   if (cautions.length === 0) return null;
   return (
     <chakra.details bg="straw.subtle" border="hairline" borderColor="straw.emphasized" borderRadius="md">
@@ -25,7 +31,7 @@ export function GeneralCautions({ cautions }: { cautions: readonly GeneralCautio
           <CautionIcon size={20} />
         </chakra.span>
         <span>
-          <b>With every job: </b>
+          <b>{lead}: </b>
           {cautions.map(({ subject }) => asSentence(subject)).join(' ')}
         </span>
         <chakra.span pl="4" color="brand.fg" textDecoration="underline">

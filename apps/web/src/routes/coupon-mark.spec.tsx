@@ -30,6 +30,7 @@ const marked = { markState: 'marked', markedAt: '2026-05-14T08:00:00Z', version:
 const coupon = (rest: object = {}) => ({
   ...{ id: 'coupon-1', code: 'C-0124', title: '', purpose: 'exploration', state: 'planned', storedAt: '', ambientNotes: '' },
   material: { id: 'm', name: 'Titanium tag', family: 'titanium' },
+  effect: { id: 'e', name: 'Colour anneal' },
   ...{ finish: { id: 'f', name: 'Bead blasted' }, machine: { id: 'x', name: 'Bench 2' }, lens: { id: 'l', name: 'F160' } },
   profile: {
     panel: {
@@ -45,6 +46,10 @@ const coupon = (rest: object = {}) => ({
   ...rest,
 });
 const READ = 'GET /api/coupons/C-0124';
+const CAUTIONS = 'GET /api/cautions/for';
+const extraction = {
+  ...{ id: 'caution-1', level: 'care', subject: 'Keep the extraction on', text: 'Titanium dust can catch fire.', source: 'Manual' },
+};
 const MARK = 'POST /api/coupons/coupon-1/marking/cells';
 
 let server: ReturnType<typeof fakeServer>;
@@ -55,7 +60,7 @@ afterEach(() => {
 });
 
 function openPage(handlers: Parameters<typeof fakeServer>[0]) {
-  server = fakeServer(handlers);
+  server = fakeServer({ [CAUTIONS]: () => ({ body: { isForbidden: false, items: [extraction] } }), ...handlers });
   const page = (
     <StatusLineProvider>
       <MarkPage />
@@ -78,8 +83,37 @@ describe('marking a coupon', () => {
     });
     expect(await screen.findByText(/Prove this setting on a scrap edge/)).toBeVisible();
     expect(within(screen.getByRole('list', { name: 'Setting of the labels' })).getByText('500')).toBeVisible();
+    await user.click(await screen.findByRole('checkbox', { name: 'I have read this caution' }));
     await user.click(screen.getByRole('button', { name: 'Labels are marked' }));
     expect(await screen.findByRole('heading', { name: 'Cell A2' })).toBeVisible();
+  });
+
+  it('begins only after the cautions are said to be read, and keeps them in sight at every cell', async () => {
+    const START = 'POST /api/coupons/coupon-1/marking/start';
+    const { user } = openPage({ [READ]: () => ({ body: coupon({ markingStartedAt: null }) }), [START]: () => ({ body: coupon() }) });
+    const box = await screen.findByRole('checkbox', { name: 'I have read this caution' });
+    await user.click(screen.getByRole('button', { name: 'Labels are marked' }));
+    expect(box).toHaveFocus();
+    expect(box).toHaveAccessibleDescription('Read them and say so before you mark.');
+    expect(server.bodies(START)).toEqual([]);
+    await user.click(box);
+    await user.click(screen.getByRole('button', { name: 'Labels are marked' }));
+    expect(await screen.findByRole('heading', { name: 'Cell A2' })).toBeVisible();
+    expect(screen.getByText(/Keep the extraction on\./, { selector: 'summary span' })).toBeVisible();
+  });
+
+  it('refuses a cool-down that cannot be read, and waits as long as the last one said', async () => {
+    const { user } = openPage({ [READ]: () => ({ body: coupon() }) });
+    const field = await screen.findByLabelText(/^Cool-down/);
+    await user.clear(field);
+    await user.type(field, '1.5');
+    expect(field).toHaveAccessibleDescription('');
+    for (const text of ['-5', '99999', '1,500', 'soon']) {
+      await user.clear(field);
+      await user.type(field, text);
+      expect(field).toHaveValue(text);
+      expect(field).toHaveAccessibleDescription(/./);
+    }
   });
 
   it('goes on in run order, and says only what changes', async () => {

@@ -1,21 +1,22 @@
-import { chakra } from '@chakra-ui/react';
+import { chakra, Flex } from '@chakra-ui/react';
 import { useEffect, useId, useState } from 'react';
 import { Button } from '../../../components/button';
 import { InputFrame } from '../../../components/field';
+import { StateShape } from '../../../components/state-mark';
 import { formatDuration } from '../../../lib/format';
+import { readNumber, typedNumber } from '../../../lib/read-number';
 
 const KEPT_AS = 'proofplate.cool-down-s';
-const LONGEST_S = 3600;
+const COOL_DOWN = { what: 'The cool-down', unit: 's', least: 0, most: 3600 };
 const TICK_MS = 250;
 
 /** Seconds between two cells, as this device was last told; a reload keeps them. */
 export function useCoolDownSetting(): [number, (seconds: number) => void] {
   const [seconds, setSeconds] = useState(readKept);
   const change = (next: number) => {
-    const within = Math.min(LONGEST_S, Math.max(0, Math.round(next)));
-    setSeconds(within);
+    setSeconds(next);
     try {
-      localStorage.setItem(KEPT_AS, String(within));
+      localStorage.setItem(KEPT_AS, String(next));
     } catch {
       // a browser that keeps nothing still counts down
     }
@@ -26,7 +27,7 @@ export function useCoolDownSetting(): [number, (seconds: number) => void] {
 function readKept(): number {
   try {
     const kept = Number(localStorage.getItem(KEPT_AS));
-    return Number.isInteger(kept) && kept >= 0 && kept <= LONGEST_S ? kept : 0;
+    return kept >= COOL_DOWN.least && kept <= COOL_DOWN.most ? kept : 0;
   } catch {
     return 0;
   }
@@ -74,23 +75,48 @@ const Seconds = chakra('input', {
   base: { width: '4ch', bg: 'transparent', textAlign: 'right', outline: 'none !important', alignSelf: 'stretch' },
 });
 
-export function CoolDownSetting({ seconds, onChange }: { seconds: number; onChange: (seconds: number) => void }) {
+export type CoolDownSettingProps = { seconds: number; locale: string; onChange: (seconds: number) => void };
+
+/** Read like every number: what cannot be read is refused at the field, and the last wait that could be read stays in force. */
+export function CoolDownSetting({ seconds, locale, onChange }: CoolDownSettingProps) {
   const id = useId();
+  const [text, setText] = useState(() => typedNumber(seconds, locale));
+  const read = readNumber(text, COOL_DOWN, locale);
+  const isRefused = 'message' in read;
+  const handleChange = (next: string) => {
+    setText(next);
+    const again = readNumber(next, COOL_DOWN, locale);
+    if ('value' in again) onChange(again.value);
+  };
   return (
-    <chakra.label htmlFor={id} display="flex" alignItems="center" gap="2.5">
-      Cool-down
-      <chakra.span display="block" width="112px">
-        <InputFrame size="glove">
-          <Seconds
-            id={id}
-            inputMode="numeric"
-            autoComplete="off"
-            value={String(seconds)}
-            onChange={(event) => onChange(Number(event.currentTarget.value.replace(/\D/g, '')))}
-          />
-          <chakra.span color="fg.muted">s</chakra.span>
-        </InputFrame>
-      </chakra.span>
-    </chakra.label>
+    <div>
+      <chakra.label htmlFor={id} display="flex" alignItems="center" gap="2.5">
+        Cool-down
+        <chakra.span display="block" width="112px">
+          <InputFrame size="glove">
+            <Seconds
+              id={id}
+              inputMode="decimal"
+              autoComplete="off"
+              value={text}
+              aria-invalid={isRefused ? true : undefined}
+              aria-describedby={isRefused ? `${id}-note` : undefined}
+              onChange={(event) => handleChange(event.currentTarget.value)}
+            />
+            <chakra.span color="fg.muted">s</chakra.span>
+          </InputFrame>
+        </chakra.span>
+      </chakra.label>
+      {isRefused && (
+        <Flex id={`${id}-note`} mt="1" gap="1.5" maxW="320px" fontSize="sm" lineHeight="sm" color="oxide.fg">
+          <chakra.span pt="2px" lineHeight="none">
+            <StateShape state="fails" />
+          </chakra.span>
+          <span>
+            {read.message} Until then it is {formatDuration(seconds)}.
+          </span>
+        </Flex>
+      )}
+    </div>
   );
 }

@@ -5,10 +5,11 @@ import { ActBar } from '../../../components/act-bar';
 import { Button } from '../../../components/button';
 import { ProblemNotice } from '../../../components/problem-notice';
 import { VisuallyHidden } from '../../../components/visually-hidden';
-import type { Coupon, CouponCell } from '../coupons.api';
+import type { Coupon, CouponCell, ShopCaution } from '../coupons.api';
 import { CoolDown, CoolDownSetting, useCoolDownSetting, useSecondsLeft } from './cool-down';
 import { DialList } from './dial-list';
 import { DiffersDialog } from './differs-dialog';
+import { MarkCautions } from './mark-cautions';
 import { cellSetBefore, dialRows, lastDone, notOnPanel } from './marking-order';
 import { PausedNotice, usePause } from './pause';
 import { SkipDialog } from './skip-dialog';
@@ -18,13 +19,15 @@ export type MarkCellsProps = {
   coupon: Coupon;
   ordered: readonly CouponCell[];
   current: CouponCell;
+  /** They stand before the setting. */
+  cautions: readonly ShopCaution[];
   marking: Marking;
   locale: string;
   clock: ReactNode;
 };
 
 /** One cell at a time, in the order of the run. */
-export function MarkCells({ coupon, ordered, current, marking, locale, clock }: MarkCellsProps) {
+export function MarkCells({ coupon, ordered, current, cautions, marking, locale, clock }: MarkCellsProps) {
   const [open, setOpen] = useState<'differs' | 'skip'>();
   const [coolDownS, setCoolDownS] = useCoolDownSetting();
   const [coolUntilMs, setCoolUntilMs] = useState<number>();
@@ -46,6 +49,7 @@ export function MarkCells({ coupon, ordered, current, marking, locale, clock }: 
   return (
     // the bar of two rows is taller than the foot of a page allows for; nothing may stay under it
     <chakra.div display="grid" gap="3" maxW="640px" pb={{ base: '24', lg: '0' }}>
+      <MarkCautions cautions={cautions} />
       <CellHead current={current} ordered={ordered} />
       <chakra.p role="status" color="fg.muted" _empty={{ display: 'none' }}>
         {marking.note}
@@ -66,7 +70,7 @@ export function MarkCells({ coupon, ordered, current, marking, locale, clock }: 
       <DialList label={`Setting of ${current.address}`} rows={dialRows(panel, set, beforeSet)} isFirst={before === undefined} />
       <NotDialled coupon={coupon} current={current} />
       <Flex gap="3" align="center" justify="space-between" wrap="wrap">
-        <CoolDownSetting seconds={coolDownS} onChange={setCoolDownS} />
+        <CoolDownSetting seconds={coolDownS} locale={locale} onChange={setCoolDownS} />
         <Flex gap="2" wrap="wrap">
           {clock}
           <Button size="glove" onClick={pause.begin}>

@@ -3,7 +3,7 @@ import { ButtonLink } from '../../../components/button';
 import { EmptyState } from '../../../components/empty-state';
 import { paths } from '../../../lib/paths';
 import { couponMark } from '../coupon-words';
-import type { Coupon, CouponCell } from '../coupons.api';
+import { type Coupon, type CouponCell, useCautionsFor } from '../coupons.api';
 import { FinishMarking } from './finish-marking';
 import { MarkCells } from './mark-cells';
 import { MarkLabels } from './mark-labels';
@@ -22,6 +22,8 @@ export type MarkCouponProps = {
 /** At the machine, gloves on: labels, then every cell in run order, then the plate is marked. */
 export function MarkCoupon({ coupon, page, locale, clock, onFinished }: MarkCouponProps) {
   const marking = useMarking(coupon, page);
+  const { material, finish, effect, machine } = coupon;
+  const cautions = useCautionsFor({ materialId: material.id, finishId: finish.id, effectId: effect.id, machineId: machine.id });
   if (coupon.state !== 'planned') {
     return (
       <EmptyState
@@ -44,11 +46,22 @@ export function MarkCoupon({ coupon, page, locale, clock, onFinished }: MarkCoup
       </EmptyState>
     );
   }
-  if (coupon.markingStartedAt === null) return <MarkLabels coupon={coupon} onStarted={(started) => page.change(() => started)} />;
+  if (coupon.markingStartedAt === null)
+    return <MarkLabels coupon={coupon} cautions={cautions} onStarted={(started) => page.change(() => started)} />;
   const ordered = inRunOrder(coupon);
   const current = currentCell(ordered);
   if (current !== undefined)
-    return <MarkCells coupon={coupon} ordered={ordered} current={current} marking={marking} locale={locale} clock={clock(current)} />;
+    return (
+      <MarkCells
+        coupon={coupon}
+        ordered={ordered}
+        current={current}
+        cautions={cautions}
+        marking={marking}
+        locale={locale}
+        clock={clock(current)}
+      />
+    );
   const last = lastDone(ordered);
   return (
     <FinishMarking

@@ -5,18 +5,31 @@ import { ActBar } from '../../../components/act-bar';
 import { Button } from '../../../components/button';
 import { ProblemNotice } from '../../../components/problem-notice';
 import { ProblemError } from '../../../lib/api';
-import { type Coupon, startMarking } from '../coupons.api';
+import { type Coupon, type ShopCaution, startMarking } from '../coupons.api';
+import { NeverMarked } from '../plan/never-marked';
+import { READ_CAUTIONS_ID, ReadCautions } from '../plan/read-cautions';
 import { DialList } from './dial-list';
 import { CouponDownloads } from './downloads';
 import { dialRows } from './marking-order';
 
-/** Before the cells: the files, then corner marks, letters and code with their own setting. */
-export function MarkLabels({ coupon, onStarted }: { coupon: Coupon; onStarted: (coupon: Coupon) => void }) {
+export type MarkLabelsProps = { coupon: Coupon; cautions: readonly ShopCaution[]; onStarted: (coupon: Coupon) => void };
+
+/** Before the cells: cautions, then the files, then corner marks, letters and code with their own setting. */
+export function MarkLabels({ coupon, cautions, onStarted }: MarkLabelsProps) {
+  const [never, care] = [cautions.filter(({ level }) => level === 'never'), cautions.filter(({ level }) => level === 'care')];
+  const [readIds, setReadIds] = useState<readonly string[]>([]);
+  const [isAsked, setIsAsked] = useState(false);
+  const isRead = care.every(({ id }) => readIds.includes(id));
   const [isBusy, setIsBusy] = useState(false);
   const [problem, setProblem] = useState<ProblemError>();
   const [grid] = coupon.grids;
   const labelStep = grid?.labelStep ?? null;
   const handleStart = async () => {
+    setIsAsked(true);
+    if (!isRead) {
+      document.getElementById(READ_CAUTIONS_ID)?.focus();
+      return;
+    }
     setIsBusy(true);
     setProblem(undefined);
     try {
@@ -31,6 +44,15 @@ export function MarkLabels({ coupon, onStarted }: { coupon: Coupon; onStarted: (
   return (
     <chakra.div display="grid" gap="4" maxW="640px">
       {problem !== undefined && <ProblemNotice what="Marking was not started." safe="Nothing was stored." todo={problem.detail} />}
+      {never.map((caution) => (
+        <NeverMarked key={caution.id} caution={caution} />
+      ))}
+      <ReadCautions
+        cautions={care}
+        readIds={readIds}
+        onRead={setReadIds}
+        error={isAsked && !isRead ? 'Read them and say so before you mark.' : undefined}
+      />
       <CouponDownloads coupon={coupon} />
       <chakra.section aria-labelledby="labels-first" display="grid" gap="2">
         <chakra.h2 id="labels-first">{labelStep === null ? 'No setting for labels' : 'Labels first'}</chakra.h2>

@@ -6,6 +6,9 @@ import { CautionIcon } from '../../../components/icons';
 import { StateShape } from '../../../components/state-mark';
 import type { CouponPreview } from '../coupons.api';
 
+/** The summary of a refused plan leads to the tick by the name of its field. */
+export const READ_CAUTIONS_ID = fieldId('acknowledgedCautionIds');
+
 export type ReadCautionsProps = {
   cautions: CouponPreview['cautions'];
   readIds: readonly string[];
@@ -16,7 +19,7 @@ export type ReadCautionsProps = {
 
 /** What to do is always in sight, the reason one tap away; that they were read is the planner's own word, never given for them. */
 export function ReadCautions({ cautions, readIds, onRead, error }: ReadCautionsProps) {
-  const id = fieldId('acknowledgedCautionIds');
+  const id = READ_CAUTIONS_ID;
   if (cautions.length === 0) return null;
   const isRead = cautions.every((caution) => readIds.includes(caution.id));
   return (
