@@ -183,6 +183,15 @@ describe('PATCH /api/revisions/:id', () => {
     });
   });
 
+  it('begins a copy without the grounds, which were written for the setting as it was', async () => {
+    const own = await draftFromCell(test, shop, coupon);
+    const changed = await changeDraft(test, shop.operator, own, { route: 'customer-given' });
+    const grounded = await changeDraft(test, shop.lead, changed, { grounds: 'Customer drawing 4711, revision C.' });
+    const payload = { basedOnRevisionId: grounded.id, reason: 'Deeper' };
+    const copy = await created<RecipeRevisionDto>(test, shop.lead, `/api/recipes/${own.recipe.id}/drafts`, payload);
+    expect(copy).toMatchObject({ route: 'customer-given', grounds: '', groundsBy: null, basedOnId: grounded.id });
+  });
+
   it('refuses anonymous callers, trainees, other operators’ drafts and other shops', async () => {
     const leads = await draftFromCell(test, shop, coupon, { as: shop.lead });
     expectProblem(await patch({ reason: 'Mine' }, { id: leads.id, version: leads.version }), 403, 'not-permitted');

@@ -95,7 +95,8 @@ export class RecipeDraftingService {
         calibrationId: calibration?.id ?? source.calibrationId,
         reason: dto.reason ?? '',
         basedOnId: source.id,
-        ...{ route: source.route, grounds: source.grounds, groundsBy: source.groundsBy },
+        // a lead's grounds were written for the setting as it was, so they are written anew
+        route: source.route,
       };
       const links = isSameMachine ? await this.store.linksOf(tx, actor.shopId, source.id) : [];
       const id = await this.store.addDraft(tx, actor, draft, links);

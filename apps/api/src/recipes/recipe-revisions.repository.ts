@@ -36,8 +36,7 @@ const presentProfile = alias(machineProfile, 'present_profile');
 
 type RevisionRow = typeof revision.$inferSelect;
 type Key = { readonly shopId: string; readonly id: string };
-export type NewDraft = Pick<StoredRevision, 'recipeId' | 'content' | 'profileId' | 'calibrationId' | 'reason' | 'basedOnId' | 'route'> &
-  Pick<Partial<StoredRevision>, 'grounds' | 'groundsBy'>;
+export type NewDraft = Pick<StoredRevision, 'recipeId' | 'content' | 'profileId' | 'calibrationId' | 'reason' | 'basedOnId' | 'route'>;
 export type DraftChange = Partial<
   Pick<
     StoredRevision,
