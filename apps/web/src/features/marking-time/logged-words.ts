@@ -1,4 +1,5 @@
-import { formatCount, formatPercentChange, formatQuantity, formatSize } from '../../lib/format';
+import { showNumber } from '@proofplate/recipe-model';
+import { formatCount, formatPercentChange, formatQuantity } from '../../lib/format';
 import type { LoggedTime } from './marking-time.api';
 
 /** Where it was clocked: J-0007, C-0012 B4, C-0012 whole. */
@@ -11,12 +12,17 @@ export function markedWords({ areas }: LoggedTime): string {
   const [first] = areas;
   if (first === undefined) return '';
   const count = areas.reduce((sum, area) => sum + area.count, 0);
-  const size = formatSize(first.widthMm, first.heightMm, 'mm', { significantDigits: 4 });
+  const size = sizeWords(first);
   if (count > 1) return `${count} × ${size}`;
-  const speed = formatQuantity(first.speedMmPerS, 'mm/s', { significantDigits: 4 });
   const passes = first.passes === 1 ? '' : `, ${formatCount(first.passes, 'pass', 'passes')}`;
-  return `${size}, ${formatQuantity(first.lineSpacingUm, 'µm', { significantDigits: 3 })} at ${speed}${passes}`;
+  return `${size}, ${short(first.lineSpacingUm)} µm at ${short(first.speedMmPerS)} mm/s${passes}`;
 }
+
+/** Width × height without trailing zeros. */
+export const sizeWords = ({ widthMm, heightMm }: { widthMm: number; heightMm: number }) => `${short(widthMm)} × ${short(heightMm)} mm`;
+
+const SHOWN_DIGITS = 4;
+const short = (value: number) => showNumber(Number(value.toPrecision(SHOWN_DIGITS)));
 
 /** Logged against predicted, as a share. */
 export function differenceWords({ seconds, predicted }: LoggedTime): string {

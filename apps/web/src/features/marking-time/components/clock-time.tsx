@@ -66,7 +66,7 @@ export function ClockTime({ predictedS, isReady = () => true, onLog }: ClockTime
         </>
       ) : (
         <>
-          <Button kind="primary" size="primaryAct" shape="wide" isBusy={isBusy} onClick={clock.start}>
+          <Button size="primaryAct" shape="wide" isBusy={isBusy} onClick={clock.start}>
             Start the clock
           </Button>
           <TextField

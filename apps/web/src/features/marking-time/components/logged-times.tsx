@@ -45,13 +45,15 @@ const columnsOf = (timeZone: string): readonly Column<LoggedTime>[] => [
     key: 'logged',
     header: 'Logged',
     align: 'end',
-    cell: ({ seconds, counts }) => (counts ? timeText(seconds) : <s>{timeText(seconds)}</s>),
+    cell: ({ seconds, counts }) => <chakra.span whiteSpace="nowrap">{counts ? timeText(seconds) : <s>{timeText(seconds)}</s>}</chakra.span>,
   },
   {
     key: 'predicted',
     header: 'Predicted',
     align: 'end',
-    cell: ({ predicted: { totalS, errorS } }) => (totalS === null ? 'not known' : timeWithError({ totalS, errorS })),
+    cell: ({ predicted: { totalS, errorS } }) => (
+      <chakra.span whiteSpace="nowrap">{totalS === null ? 'not known' : timeWithError({ totalS, errorS })}</chakra.span>
+    ),
   },
   { key: 'difference', header: 'Difference', align: 'end', cell: differenceWords },
 ];

@@ -1,7 +1,8 @@
-import { asSentence, formatSize } from '../../../lib/format';
+import { asSentence } from '../../../lib/format';
 import { basisWords, headOverheadsOf, timeText } from '../../../lib/time-words';
 import { areaTime } from '../area-time';
 import { keptArea } from '../kept-area';
+import { sizeWords } from '../logged-words';
 import { useRunTimes, useSettingTiming } from '../marking-time.api';
 
 /** A part of this size says enough where nobody typed one. */
@@ -25,7 +26,7 @@ type SheetTimeLineProps = { timing: Parameters<typeof areaTime>[0]; areaMm: type
 
 function SheetTimeLine({ timing, areaMm }: SheetTimeLineProps) {
   const time = areaTime(timing, areaMm);
-  const size = formatSize(areaMm.widthMm, areaMm.heightMm, 'mm', { significantDigits: 4 });
+  const size = sizeWords(areaMm);
   if (time.totalS === null) return <>Time not known because {asSentence(time.missingBecause)}</>;
   return (
     <>

@@ -2,13 +2,16 @@ import { chakra } from '@chakra-ui/react';
 import { useRef } from 'react';
 import { axisTicks } from '../../../components/chart/axis-ticks';
 import { useDrawnWidth } from '../../../components/chart/use-drawn-width';
+import { formatNumber } from '../../../lib/format';
 import { timeText } from '../../../lib/time-words';
 import { whereWords } from '../logged-words';
 import type { LoggedTime } from '../marking-time.api';
 
 const WIDEST = 560;
 const HEIGHT = 300;
-const MARGIN = { left: 62, right: 16, top: 26, bottom: 46 };
+const LONGEST_IN_SECONDS = 600;
+const S_PER_MIN = 60;
+const MARGIN = { left: 48, right: 24, top: 26, bottom: 46 };
 
 type Placed = { time: LoggedTime; predictedS: number };
 
@@ -20,6 +23,7 @@ export function TimePlot({ items }: { items: readonly LoggedTime[] }) {
   if (points.length === 0) return null;
   const ticks = axisTicks(Math.max(...points.flatMap(({ time, predictedS }) => [time.seconds, predictedS])));
   const top = ticks.at(-1) ?? 1;
+  const axis = axisOf(top);
   const x = (seconds: number) => MARGIN.left + (seconds / top) * (width - MARGIN.left - MARGIN.right);
   const y = (seconds: number) => HEIGHT - MARGIN.bottom - (seconds / top) * (HEIGHT - MARGIN.top - MARGIN.bottom);
   return (
@@ -37,18 +41,18 @@ export function TimePlot({ items }: { items: readonly LoggedTime[] }) {
           <g key={tick}>
             <chakra.line x1={MARGIN.left} x2={width - MARGIN.right} y1={y(tick)} y2={y(tick)} stroke="border" />
             <chakra.text x={MARGIN.left - 8} y={y(tick) + 5} textAnchor="end" fill="fg.muted">
-              {timeTick(tick)}
+              {axis.text(tick)}
             </chakra.text>
             <chakra.text x={x(tick)} y={HEIGHT - MARGIN.bottom + 18} textAnchor="middle" fill="fg.muted">
-              {timeTick(tick)}
+              {axis.text(tick)}
             </chakra.text>
           </g>
         ))}
         <chakra.text x="0" y="14" fill="fg.muted">
-          Logged
+          Logged, {axis.unit}
         </chakra.text>
         <chakra.text x={width - MARGIN.right} y={HEIGHT - 6} textAnchor="end" fill="fg.muted">
-          Predicted
+          Predicted, {axis.unit}
         </chakra.text>
         <chakra.line x1={x(0)} y1={y(0)} x2={x(top)} y2={y(top)} stroke="fg.muted" strokeDasharray="5 4" />
         {points.map(({ time, predictedS }) => (
@@ -67,7 +71,11 @@ function Mark({ time: { counts, isOfPresentMachine, isOutlier }, x, y }: { time:
   return <chakra.circle cx={x} cy={y} r="5" fill="bg.panel" stroke="brand.solid" strokeWidth="2" />;
 }
 
-const timeTick = (seconds: number) => (seconds === 0 ? '0' : seconds < 60 ? `${seconds} s` : timeText(seconds));
+/** Seconds up to ten minutes, minutes beyond them. */
+function axisOf(topS: number): { unit: string; text: (seconds: number) => string } {
+  if (topS <= LONGEST_IN_SECONDS) return { unit: 's', text: (seconds) => formatNumber(seconds) };
+  return { unit: 'min', text: (seconds) => formatNumber(seconds / S_PER_MIN, { significantDigits: 3 }) };
+}
 
 function spoken(points: readonly Placed[]): string {
   const each = points.map(
