@@ -1,4 +1,4 @@
-import { formatNumber, formatQuantity, formatUnit } from '../lib/format';
+import { formatNumber, formatQuantity, formatUnit, inShopNumbers } from '../lib/format';
 import { paths } from '../lib/paths';
 import { isShare } from '../lib/share-numbers';
 import type { NumbersGroup, ShownNumber } from './numbers-panel/shown-number';
@@ -73,7 +73,7 @@ export function numbersGroups(
     key: `step-${index + 1}`,
     title: titleOf(index),
     numbers: numbers.filter(isAskedFor).map(shownNumber),
-    remarks: remarks.map(({ text }) => text),
+    remarks: remarks.map(({ text }) => inShopNumbers(text)),
   }));
   return [...all, ...each];
 }
@@ -103,13 +103,13 @@ function shownNumber(number: SettingNumber): ShownNumber {
     key,
     label: numberLabel(key),
     ...shownValue(number),
-    reason: reasonWords(missingBecause ?? ''),
+    reason: inShopNumbers(reasonWords(missingBecause ?? '')),
     isRuledOut: number.isRuledOutByMode === true,
     formula,
     inputs: inputWords(inputs),
     source: source.replace(SCIENCE_PAGE, ''),
     more: page === undefined ? undefined : paths.science(page),
-    lookAt,
+    lookAt: lookAt.map(inShopNumbers),
     isFirst: FIRST.has(key),
   };
 }

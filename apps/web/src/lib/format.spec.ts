@@ -1,15 +1,19 @@
+import { makeSessionAnswer } from '../testing/sessions';
 import {
   formatClock,
   formatCount,
   formatDate,
   formatDuration,
+  formatEntered,
   formatNumber,
   formatPercentChange,
   formatQuantity,
   formatSize,
   formatTime,
   formatUnit,
+  inShopNumbers,
 } from './format';
+import { closeSession, openSession, updateShop } from './session';
 
 describe('numbers', () => {
   it('carry a true minus, a sign where asked, and their unit behind a space that does not break', () => {
@@ -46,5 +50,37 @@ describe('times', () => {
 
   it('write September like the other months, in three letters', () => {
     expect(formatDate('2026-09-30T12:00:00Z', 'UTC')).toBe('30 Sep 2026');
+  });
+});
+
+describe('the shop that is open', () => {
+  const session = (locale: string) => ({ ...makeSessionAnswer(), shop: { ...makeSessionAnswer().shop, locale } });
+  afterEach(() => closeSession('left'));
+
+  it('decides the decimal sign of every number, without a word from the page', () => {
+    openSession(session('de-DE'));
+    expect([formatNumber(25.5), formatQuantity(176.5, 'mm'), formatSize(1.5, 2.25, 'mm')]).toEqual([
+      '25,5',
+      '176,5\u00A0mm',
+      '1,5 × 2,25\u00A0mm',
+    ]);
+    expect(formatEntered(-0.05)).toBe('−0,05');
+    expect(formatNumber(1234.5)).toBe('1234,5');
+  });
+
+  it('changes its way of writing at once, and leaves none behind', () => {
+    openSession(session('de-DE'));
+    updateShop({ name: 'Tidewater Marking', unitSystem: 'metric', timeZone: 'Europe/Berlin', locale: 'en-GB' });
+    expect(formatNumber(1.5)).toBe('1.5');
+    updateShop({ name: 'Tidewater Marking', unitSystem: 'metric', timeZone: 'Europe/Berlin', locale: 'de-DE' });
+    closeSession('left');
+    expect(formatNumber(1.5)).toBe('1.5');
+  });
+
+  it('writes the numbers of a computed sentence, and leaves names and addresses alone', () => {
+    openSession(session('de-DE'));
+    expect(inShopNumbers('At most 0.5 mm (0.25 to 1.75), by F163.5 and 1.2.3, in steps of 0.1.')).toBe(
+      'At most 0,5 mm (0,25 to 1,75), by F163.5 and 1.2.3, in steps of 0,1.',
+    );
   });
 });

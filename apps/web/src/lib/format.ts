@@ -1,3 +1,5 @@
+import { type DecimalSign, showNumber } from '@proofplate/recipe-model';
+
 // Numbers and times as the shop reads them. A number keeps its unit behind a thin space, a true minus, × and µ.
 
 /** The typeface's space is a fifth of an em: a thin space that does not break. */
@@ -5,7 +7,19 @@ const THIN_SPACE = '\u00A0';
 const MINUS = '\u2212';
 const MICRO = '\u00B5';
 
+/** How the shop that is open writes numbers and lengths. Nobody signed in: a point and millimetres. */
+export type ShopStyle = { locale: string; unitSystem: 'metric' | 'inch' };
+
+const NO_SHOP: ShopStyle = { locale: 'en', unitSystem: 'metric' };
+let shopStyle = NO_SHOP;
+
+/** The session says which shop is open, so that no page has to hand its style on. */
+export function setShopStyle(style: ShopStyle | undefined): void {
+  shopStyle = style ?? NO_SHOP;
+}
+
 export type NumberFormatOptions = {
+  /** Another way of writing than that of the shop that is open. */
   locale?: string | undefined;
   /** Fixed number of decimals. */
   decimals?: number | undefined;
@@ -17,7 +31,7 @@ export type NumberFormatOptions = {
 /** "0.030", "−17", "+0.5". */
 export function formatNumber(
   value: number,
-  { locale = 'en', decimals, significantDigits, isSigned = false }: NumberFormatOptions = {},
+  { locale = shopStyle.locale, decimals, significantDigits, isSigned = false }: NumberFormatOptions = {},
 ): string {
   const text = formatterOf({ locale, decimals, significantDigits, isSigned }).format(value);
   return text.replace('-', MINUS);
@@ -26,13 +40,13 @@ export function formatNumber(
 /** Making a formatter costs more than using it a hundred times, and a form formats dozens of numbers at every key. */
 const FORMATTERS = new Map<string, Intl.NumberFormat>();
 
-function formatterOf({ locale = 'en', decimals, significantDigits, isSigned = false }: NumberFormatOptions): Intl.NumberFormat {
+function formatterOf({ locale, decimals, significantDigits, isSigned }: NumberFormatOptions): Intl.NumberFormat {
   const key = [locale, decimals ?? '', significantDigits ?? '', isSigned].join(' ');
   const known = FORMATTERS.get(key);
   if (known !== undefined) return known;
   const made = new Intl.NumberFormat(locale, {
     useGrouping: false,
-    signDisplay: isSigned ? 'exceptZero' : 'negative',
+    signDisplay: isSigned === true ? 'exceptZero' : 'negative',
     ...(decimals === undefined ? {} : { minimumFractionDigits: decimals, maximumFractionDigits: decimals }),
     ...(significantDigits === undefined
       ? {}
@@ -55,6 +69,36 @@ export function formatUnit(unit: string): string {
     .replace(/\bu(?=(?:m|s|J|W)\b)/g, MICRO)
     .replace(/\^2/g, '²')
     .replace(/\^3/g, '³');
+}
+
+/** A number as somebody entered it, with all of its digits. */
+export function formatEntered(value: number): string {
+  return showNumber(value, shopDecimalSign());
+}
+
+/** Decimal sign of the shop that is open, for sentences that packages write. */
+export function shopDecimalSign(): DecimalSign {
+  return decimalSignOf(shopStyle.locale);
+}
+
+/** Decimal sign of a way of writing numbers. */
+export function decimalSignOf(locale: string): DecimalSign {
+  const known = DECIMAL_SIGNS.get(locale);
+  if (known !== undefined) return known;
+  const isComma = new Intl.NumberFormat(locale).formatToParts(0.5).some(({ type, value }) => type === 'decimal' && value === ',');
+  DECIMAL_SIGNS.set(locale, isComma ? ',' : '.');
+  return isComma ? ',' : '.';
+}
+
+/** Asked for at every key in every field; a locale does not change its sign. */
+const DECIMAL_SIGNS = new Map<string, DecimalSign>();
+
+/** A number of a sentence; what belongs to a name or an address, such as F163.5 or 1.2.3, is none. */
+const POINT_NUMBER = /(?<![\p{L}\p{N}.,-])(\d+)\.(\d+)(?![\p{L}\p{N}]|\.\d)/gu;
+
+/** A sentence that was computed with points, in the shop's way of writing. Not for words that people typed. */
+export function inShopNumbers(sentence: string): string {
+  return sentence.replace(POINT_NUMBER, `$1${shopDecimalSign()}$2`);
 }
 
 /** "81 × 72 mm". */

@@ -1,5 +1,7 @@
 import { isPanelUnit, type PanelUnit, parseTypedNumber, physicalValue } from '@proofplate/physics';
-import { formatUnit } from './format';
+import { decimalSignOf, formatNumber, formatUnit } from './format';
+
+export { decimalSignOf };
 
 export type NumberRule = {
   /** Subject of the message: "The wavelength". */
@@ -11,18 +13,6 @@ export type NumberRule = {
   isWhole?: boolean;
 };
 export type ReadNumber = { value: number } | { message: string };
-
-/** Decimal sign of the shop's way of writing numbers. */
-export function decimalSignOf(locale: string): '.' | ',' {
-  const known = DECIMAL_SIGNS.get(locale);
-  if (known !== undefined) return known;
-  const isComma = new Intl.NumberFormat(locale).formatToParts(0.5).some(({ type, value }) => type === 'decimal' && value === ',');
-  DECIMAL_SIGNS.set(locale, isComma ? ',' : '.');
-  return isComma ? ',' : '.';
-}
-
-/** Asked for at every key in every field; a locale does not change its sign. */
-const DECIMAL_SIGNS = new Map<string, '.' | ','>();
 
 /**
  * Reads a number typed with or without its unit into the field's own unit. What can be read in two ways, lies outside the limits or
@@ -36,7 +26,7 @@ export function readNumber(text: string, rule: NumberRule, locale: string): Read
   const value = read.unit === null ? read.value : converted(read.value, read.unit, rule.unit);
   if (value === undefined) return { message: unitMessage(rule) };
   const isWithin = value >= rule.least && value <= rule.most && (rule.isWhole !== true || Number.isInteger(value));
-  return isWithin ? { value } : { message: limitMessage(rule) };
+  return isWithin ? { value } : { message: limitMessage(rule, locale) };
 }
 
 /** As readNumber, for a field that may stay empty. */
@@ -82,8 +72,9 @@ function unitMessage({ what, unit }: NumberRule): string {
   return unit === '' ? `${what} has no unit. Enter the number alone.` : `${what} is kept in ${formatUnit(unit)}. Enter it in that unit.`;
 }
 
-function limitMessage({ what, unit, least, most, isWhole }: NumberRule): string {
-  return `${what} must be ${isWhole === true ? 'a whole number from ' : ''}${least} to ${most}${unit === '' ? '' : ` ${formatUnit(unit)}`}.`;
+function limitMessage({ what, unit, least, most, isWhole }: NumberRule, locale: string): string {
+  const kind = isWhole === true ? 'a whole number from ' : '';
+  return `${what} must be ${kind}${formatNumber(least, { locale })} to ${formatNumber(most, { locale })}${unit === '' ? '' : ` ${formatUnit(unit)}`}.`;
 }
 
 const lowerFirst = (words: string) => (/^[A-Z][a-z]/.test(words) ? words.charAt(0).toLowerCase() + words.slice(1) : words);

@@ -1,5 +1,6 @@
 // Who is signed in. The access token lives in this module's memory only; the refresh cookie is out of reach of scripts.
 import { useSyncExternalStore } from 'react';
+import { setShopStyle } from './format';
 
 export type Role = 'trainee' | 'operator' | 'lead' | 'owner';
 export type UnitSystem = 'metric' | 'inch';
@@ -98,6 +99,7 @@ async function acrossTabs(work: () => Promise<boolean>): Promise<boolean> {
 
 function change(next: SessionState): void {
   state = next;
+  setShopStyle(next.status === 'signed-in' ? next.session.shop : undefined);
   for (const listener of listeners) listener();
 }
 

@@ -60,7 +60,7 @@ export function acceptEntered(field: PanelField, entered: EnteredValue, context:
     const unit = PANEL_UNITS[entered.unit].label;
     return refused('wrong unit', `${field.label} is not measured in ${unit}. This panel shows ${PANEL_UNITS[field.unit].label}.`);
   }
-  const impossible = impossibility(field, entered, symbol);
+  const impossible = impossibility(field, entered, symbol, context.decimalSign);
   if (impossible !== undefined) return impossible;
   try {
     const physical = physicalValue(entered.value, panelScale(field, entered.unit, context.speedMmPerS));
@@ -73,18 +73,23 @@ export function acceptEntered(field: PanelField, entered: EnteredValue, context:
   }
 }
 
-function impossibility(field: PanelField, { value, unit }: EnteredValue, symbol: string): EntryRefusal | undefined {
+function impossibility(
+  field: PanelField,
+  { value, unit }: EnteredValue,
+  symbol: string,
+  decimalSign?: DecimalSign,
+): EntryRefusal | undefined {
   const meaning = PARAMETERS[field.parameter];
-  if (value < 0 && !meaning.mayBeNegative) return impossible(field, value, 'cannot be below zero');
+  if (value < 0 && !meaning.mayBeNegative) return impossible(field, value, 'cannot be below zero', decimalSign);
   // A percent from the minimum is zero at the minimum itself, which is a real value.
-  if (value === 0 && !meaning.mayBeZero && unit !== 'percentFromMinimum') return impossible(field, value, 'cannot be zero');
-  if (meaning.wholeNumber && !Number.isInteger(value)) return impossible(field, value, `must be a whole number (${symbol})`);
+  if (value === 0 && !meaning.mayBeZero && unit !== 'percentFromMinimum') return impossible(field, value, 'cannot be zero', decimalSign);
+  if (meaning.wholeNumber && !Number.isInteger(value)) return impossible(field, value, `must be a whole number (${symbol})`, decimalSign);
   return undefined;
 }
 
-function impossible(field: PanelField, value: number, why: string): EntryRefusal {
+function impossible(field: PanelField, value: number, why: string, decimalSign?: DecimalSign): EntryRefusal {
   const nearest = nearestShowable(field, value).map((near) => ({ value: near, unit: field.unit }));
-  return { ...refused('impossible', `${field.label} ${why}.${nearestWords(nearest)}`), nearest };
+  return { ...refused('impossible', `${field.label} ${why}.${nearestWords(nearest, decimalSign)}`), nearest };
 }
 
 function cannotShow(

@@ -1,3 +1,4 @@
+import type { DecimalSign } from '@proofplate/physics';
 import { showNumber } from '../panel/show-number';
 import type { Criterion } from './criteria';
 import { QUANTITIES } from './measurements';
@@ -17,9 +18,9 @@ export function meetsCriterion(criterion: Criterion, value: number): boolean {
 }
 
 /** The criterion in words: "Depth between 20 and 30 µm". */
-export function criterionText({ quantity, comparison, value, upper, unit }: Criterion): string {
+export function criterionText({ quantity, comparison, value, upper, unit }: Criterion, decimalSign: DecimalSign = '.'): string {
   const { label } = QUANTITIES[quantity];
   const ending = unit === '1' ? '' : ` ${unit}`;
-  if (comparison !== 'between') return `${label} ${comparison} ${showNumber(value)}${ending}`;
-  return `${label} between ${showNumber(value)} and ${upper === undefined ? '?' : showNumber(upper)}${ending}`;
+  if (comparison !== 'between') return `${label} ${comparison} ${showNumber(value, decimalSign)}${ending}`;
+  return `${label} between ${showNumber(value, decimalSign)} and ${upper === undefined ? '?' : showNumber(upper, decimalSign)}${ending}`;
 }

@@ -91,5 +91,6 @@ describe('meetsCriterion', () => {
       'Depth between 20 and 30 µm',
     );
     expect(criterionText({ quantity: 'lightness', comparison: 'at most', value: 30, unit: '1' })).toBe('Lightness at most 30');
+    expect(criterionText({ quantity: 'contrast', comparison: 'at least', value: 0.5, unit: '1' }, ',')).toContain(' at least 0,5');
   });
 });

@@ -1,6 +1,7 @@
 import { PANEL_UNITS, type PanelUnit } from '@proofplate/physics';
 import { PARAMETER_KEYS, PARAMETERS } from '@proofplate/recipe-model';
 import { codeWords } from '../../lib/code-words';
+import { formatEntered } from '../../lib/format';
 import { FIELD_WORDS } from './field-words';
 
 /** One value of an event: what it was and what it is. */
@@ -31,6 +32,7 @@ function leaves(value: unknown, path: readonly string[] = []): Map<string, strin
 function valueText(value: unknown): string {
   if (typeof value === 'boolean') return value ? 'yes' : 'no';
   if (value === '') return 'empty';
+  if (typeof value === 'number') return formatEntered(value);
   if (typeof value !== 'string') return String(value);
   return codeWords(value) ?? (CODE.test(value) ? value.replaceAll('_', ' ') : value);
 }

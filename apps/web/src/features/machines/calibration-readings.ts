@@ -1,3 +1,4 @@
+import { formatEntered } from '../../lib/format';
 import type { ReadingPoint } from './machines.api';
 import { readTwoColumns } from './two-columns';
 
@@ -29,4 +30,4 @@ function pointsMessage(points: readonly ReadingPoint[]): string | undefined {
   return undefined;
 }
 
-const words = ({ percent, watts }: ReadingPoint) => `${percent} % ${watts} W`;
+const words = ({ percent, watts }: ReadingPoint) => `${formatEntered(percent)} % ${formatEntered(watts)} W`;

@@ -1,5 +1,5 @@
 import { alignedNumbers, changeShare, changeWords, kindWords, shownNumber } from '../../lib/change-words';
-import { formatNumber, formatQuantity } from '../../lib/format';
+import { formatNumber, formatQuantity, inShopNumbers } from '../../lib/format';
 import type { Comparison, ComparisonRow } from './sign-offs.api';
 
 /** Numbers at the work that a signer weighs; the others stand in Compare. */
@@ -60,7 +60,7 @@ function valueText({ values, group }: ComparisonRow, index: number): string {
 
 /** Power: points of the panel and what they are in watts. */
 function noteOf({ key, group, step, values }: ComparisonRow, rows: readonly ComparisonRow[]): string {
-  if (group !== 'entered') return values[1]?.missingBecause ?? '';
+  if (group !== 'entered') return inShopNumbers(values[1]?.missingBecause ?? '');
   const points = values[1]?.size?.points ?? null;
   if (key !== 'powerPercent' || points === null) return '';
   const watts = rows.find((row) => row.group === 'work' && row.key === 'powerW' && row.step === step)?.values.map(({ value }) => value);

@@ -10,6 +10,7 @@ import {
   showValue,
 } from '@proofplate/recipe-model';
 import type { PlateFactor } from '../../../components/plate/plate-with-levels';
+import { shopDecimalSign } from '../../../lib/format';
 import type { Coupon, CouponCell, TestGrid } from '../coupons.api';
 
 type DecimalSign = '.' | ',';
@@ -73,7 +74,7 @@ export function spokenSetting(cell: CouponCell, grid: TestGrid, panel: Panel): s
   const words = keys.flatMap((key) => {
     const value = values[key];
     if (value === undefined) return [];
-    const { text, spoken } = shown(key, value, { panel, decimalSign: '.' });
+    const { text, spoken } = shown(key, value, { panel, decimalSign: shopDecimalSign() });
     return [`${PARAMETERS[key].label.toLowerCase()} ${text} ${spoken}`.trim()];
   });
   return [...words, ...(cell.markState === 'skipped' ? ['skipped'] : [])].join(', ');

@@ -1,4 +1,5 @@
 import type { Panel } from '@proofplate/recipe-model';
+import { setShopStyle } from '../../../lib/format';
 import type { CouponCell, ParameterSet } from '../coupons.api';
 import { cellSetBefore, currentCell, dialRows, inRunOrder, lastDone, notOnPanel } from './marking-order';
 
@@ -62,5 +63,15 @@ describe('dialRows()', () => {
     const extra = set(1, 1);
     extra.values.pulseWidthNs = { entered: { value: 30, unit: 'ns' }, physical: 30 };
     expect(notOnPanel(panel, extra)).toEqual(['Pulse width']);
+  });
+});
+
+describe('the numerals of the dial', () => {
+  afterEach(() => setShopStyle(undefined));
+
+  it('are written as the shop writes numbers, beside what stood there before', () => {
+    setShopStyle({ locale: 'de-DE', unitSystem: 'metric' });
+    const [speed, power] = dialRows(panel, set(0.05, 12.5), set(0.05, 7.5));
+    expect([speed?.value, power?.value, power?.before]).toEqual(['0,05', '12,5', '7,5']);
   });
 });

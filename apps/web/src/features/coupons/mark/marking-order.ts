@@ -1,5 +1,6 @@
 import { PANEL_UNITS } from '@proofplate/physics';
-import { PARAMETERS, type Panel, type ParameterSet as Setting, sameValue, showNumber, showValue } from '@proofplate/recipe-model';
+import { PARAMETERS, type Panel, type ParameterSet as Setting, sameValue, showValue } from '@proofplate/recipe-model';
+import { formatEntered, shopDecimalSign } from '../../../lib/format';
 import type { Coupon, CouponCell, ParameterSet } from '../coupons.api';
 
 export type DialRow = {
@@ -38,7 +39,8 @@ export function dialRows(panel: Panel, set: ParameterSet, before?: ParameterSet)
     if (value === undefined) return [];
     const earlier = before?.values[field.parameter];
     const isChanged = before !== undefined && (earlier === undefined || !sameValue(earlier, value));
-    const text = (one: NonNullable<typeof earlier>) => showValue(field, one)?.text ?? showNumber(one.entered.value);
+    const text = (one: NonNullable<typeof earlier>) =>
+      showValue(field, one, { decimalSign: shopDecimalSign() })?.text ?? formatEntered(one.entered.value);
     const unit = PANEL_UNITS[field.unit];
     return [
       {

@@ -1,11 +1,12 @@
 import { chakra } from '@chakra-ui/react';
 import { PANEL_UNITS } from '@proofplate/physics';
-import { LEVEL_SPACING_LABELS, type LevelSpacing, type Panel, showNumber } from '@proofplate/recipe-model';
+import { LEVEL_SPACING_LABELS, type LevelSpacing, type Panel } from '@proofplate/recipe-model';
 import { type UseFormReturn, useWatch } from 'react-hook-form';
 import { NumberField, SelectField } from '../../../components/field';
 import { messageAt } from '../../../components/form';
 import { Panel as Card } from '../../../components/page';
 import { Segmented } from '../../../components/segmented';
+import { formatEntered } from '../../../lib/format';
 import type { CouponPreview } from '../coupons.api';
 import { type PlanValues, varying } from './plan-values';
 
@@ -51,7 +52,7 @@ export function FactorFields({ form, name, panel, stored }: FactorFieldsProps) {
           />
           {stored != null && stored.parameter === parameter && (
             <chakra.p fontSize="sm" lineHeight="sm" color="fg.muted">
-              {stored.levels.map(({ entered }) => showNumber(entered.value)).join(', ')} {unit}
+              {stored.levels.map(({ entered }) => formatEntered(entered.value)).join(', ')} {unit}
             </chakra.p>
           )}
         </>

@@ -1,7 +1,7 @@
 import { chakra, Flex } from '@chakra-ui/react';
 import { couponLayout } from '@proofplate/imaging';
 import { PANEL_UNITS } from '@proofplate/physics';
-import { PARAMETERS, type Panel, showNumber } from '@proofplate/recipe-model';
+import { PARAMETERS, type Panel } from '@proofplate/recipe-model';
 import { memo, type ReactNode, useMemo } from 'react';
 import { CautionIcon } from '../../../components/icons';
 import { Panel as Card } from '../../../components/page';
@@ -10,7 +10,7 @@ import { Plate } from '../../../components/plate/plate';
 import type { PlateCells } from '../../../components/plate/plate-types';
 import { type PlateFactor, PlateWithLevels } from '../../../components/plate/plate-with-levels';
 import { responseScale } from '../../../components/plate/response-scale';
-import { asSentence, formatNumber, formatSize } from '../../../lib/format';
+import { asSentence, formatEntered, formatNumber, formatSize, inShopNumbers } from '../../../lib/format';
 import { basisWords, headOverheadsOf, timeText, timeWithError } from '../../../lib/time-words';
 import type { CouponPreview } from '../coupons.api';
 
@@ -63,7 +63,8 @@ function PlanPreviewCells({ preview, panel, cellMm, gapMm, chosen, onChoose }: P
       {warnings.map(({ code, title, detail, addresses }) => (
         <Warning key={code + title}>
           <b>{title}</b>
-          {addresses.length > 0 && <chakra.span color="fg.muted"> ({namedCells(addresses, FLAGGED.includes(code))})</chakra.span>}. {detail}
+          {addresses.length > 0 && <chakra.span color="fg.muted"> ({namedCells(addresses, FLAGGED.includes(code))})</chakra.span>}.{' '}
+          {inShopNumbers(detail)}
         </Warning>
       ))}
     </chakra.div>
@@ -85,7 +86,7 @@ function ChosenCell({ preview, place }: { preview: CouponPreview; place: CouponP
   const level = (factor: CouponPreview['rowFactor'], index: number) => {
     const value = factor?.levels[index]?.entered;
     if (factor === null || value === undefined) return undefined;
-    return `${PARAMETERS[factor.parameter].label.toLowerCase()} ${showNumber(value.value)} ${PANEL_UNITS[value.unit].symbol}`;
+    return `${PARAMETERS[factor.parameter].label.toLowerCase()} ${formatEntered(value.value)} ${PANEL_UNITS[value.unit].symbol}`;
   };
   const words = [level(preview.rowFactor, place.rowIndex), level(preview.columnFactor, place.columnIndex)].filter(
     (word) => word !== undefined,
@@ -104,7 +105,10 @@ export function PlanFacts({ preview, children }: { preview: CouponPreview; child
   const { totalS, errorS, missingBecause, quickestCellS, slowestCellS } = markingTime;
   return (
     <Card p="5" display="flex" flexWrap="wrap" alignItems="center" gap="4" rowGap="3">
-      <Fact label={`${cells.length} cells, marking time`} note={missingBecause ?? cellTimeWords(quickestCellS, slowestCellS)}>
+      <Fact
+        label={`${cells.length} cells, marking time`}
+        note={missingBecause === null ? cellTimeWords(quickestCellS, slowestCellS) : inShopNumbers(missingBecause)}
+      >
         {totalS === null ? 'not known' : timeWithError({ totalS, errorS })}
       </Fact>
       <Fact label="Plate needed">{formatSize(Math.ceil(plate.widthMm), Math.ceil(plate.heightMm), 'mm')}</Fact>
@@ -158,7 +162,7 @@ function viewsOf({ cells, warnings, rowFactor, columnFactor }: CouponPreview): P
     const value = factor?.levels[index]?.entered;
     return factor === null || value === undefined
       ? undefined
-      : `${PARAMETERS[factor.parameter].label.toLowerCase()} ${showNumber(value.value)} ${PANEL_UNITS[value.unit].spoken}`;
+      : `${PARAMETERS[factor.parameter].label.toLowerCase()} ${formatEntered(value.value)} ${PANEL_UNITS[value.unit].spoken}`;
   };
   const views: Record<string, PlateCells[string]> = {};
   for (const { address, rowIndex, columnIndex, dose } of cells) {
@@ -191,5 +195,5 @@ function factorOf(factor: CouponPreview['rowFactor'], panel: Panel): PlateFactor
   if (factor === null || first === undefined) return { title: '', levels: [''] };
   const label = panel.fields.find(({ parameter }) => parameter === factor.parameter)?.label ?? PARAMETERS[factor.parameter].label;
   const title = `${label}, ${PANEL_UNITS[first.entered.unit].symbol}`;
-  return { title, levels: factor.levels.map(({ entered }) => showNumber(entered.value)) };
+  return { title, levels: factor.levels.map(({ entered }) => formatEntered(entered.value)) };
 }

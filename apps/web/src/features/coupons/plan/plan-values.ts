@@ -7,6 +7,7 @@ import {
   type ParameterKey,
   showValue,
 } from '@proofplate/recipe-model';
+import { formatEntered } from '../../../lib/format';
 import { typedNumber } from '../../../lib/read-number';
 import type { Coupon, ParameterSet } from '../coupons.api';
 
@@ -59,7 +60,7 @@ export function emptyPlan(): PlanValues {
       isRandom: true,
       runOrderSeed: newSeed(),
       cellMm: '5',
-      gapMm: '1.2',
+      gapMm: formatEntered(1.2),
       fillDrawnBy: 'machine',
       doseCautionJPerMm2: '',
     },

@@ -9,6 +9,7 @@ import {
   type TypedMachine,
   typedSetting,
 } from '@proofplate/recipe-model';
+import { inShopNumbers } from '../../../lib/format';
 import { decimalSignOf, readNumber } from '../../../lib/read-number';
 import type { FactorValues, PlanValues } from './plan-values';
 
@@ -51,7 +52,7 @@ function readLevel(field: PanelField, { from, to, count, spacing }: FactorValues
   if (wrong !== undefined || first === undefined || last === undefined) return wrong;
   const { speedMmPerS } = how;
   const found = levels({ field, from: first, to: last, count: many.value, spacing, ...(speedMmPerS === undefined ? {} : { speedMmPerS }) });
-  if (found.kind === 'refused') return refused(found.message);
+  if (found.kind === 'refused') return refused(inShopNumbers(found.message));
   const value = found.values[Math.min(index, found.values.length - 1)];
   return value === undefined ? undefined : { kind: 'accepted', value };
 }

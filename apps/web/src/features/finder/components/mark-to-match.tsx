@@ -2,7 +2,7 @@ import { chakra } from '@chakra-ui/react';
 import { Panel } from '../../../components/page';
 import { CellCloseUp, EvidencePlate } from '../../../components/plate/evidence-plate';
 import { platePhotoOf } from '../../../components/plate/plate-photo';
-import { formatDate, formatNumber } from '../../../lib/format';
+import { formatDate, formatNumber, inShopNumbers } from '../../../lib/format';
 import { decimalsOf, methodWord, symbolOf } from '../../../lib/measurement-words';
 import { useSession } from '../../../lib/session';
 import type { ReferenceCell } from '../finder.api';
@@ -58,5 +58,5 @@ export function measurementWords({ quantity, value, grade, unit, method, criteri
   const number = value === null ? (grade ?? '') : formatNumber(value, { decimals: decimalsOf(quantity) });
   const ending = unit === '1' || value === null ? '' : ` ${unit}`;
   const by = method === 'photo' ? '' : `, by ${methodWord(method)}`;
-  return `${name} ${number}${ending}${criterion === null ? '' : `, ${criterion}`}${by}`;
+  return `${name} ${number}${ending}${criterion === null ? '' : `, ${inShopNumbers(criterion)}`}${by}`;
 }

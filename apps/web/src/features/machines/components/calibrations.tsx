@@ -8,7 +8,7 @@ import { Panel } from '../../../components/page';
 import { ReadProblem } from '../../../components/read-problem';
 import { SkeletonBlock } from '../../../components/skeletons';
 import { useStatusLine } from '../../../components/status-line';
-import { formatDay, formatQuantity } from '../../../lib/format';
+import { formatDay, formatEntered, formatQuantity } from '../../../lib/format';
 import { Ageing } from '../ageing/ageing';
 import { CalibrationForm } from '../forms/calibration-form';
 import { type Calibration, type Machine, useCalibrations } from '../machines.api';
@@ -64,7 +64,7 @@ function Readings({ calibrations }: { calibrations: readonly Calibration[] }) {
     <chakra.div mt="2" display="grid" gap="4">
       <Panel p="5">
         <CalibrationCurve
-          label={`Power over percent on ${formatDay(newest.measuredOn)}: ${newest.points.map(({ percent, watts }) => `${percent} percent ${watts} watts`).join(', ')}`}
+          label={`Power over percent on ${formatDay(newest.measuredOn)}: ${newest.points.map(({ percent, watts }) => `${formatEntered(percent)} percent ${formatEntered(watts)} watts`).join(', ')}`}
           newest={{ key: newest.id, points: newest.points }}
           earlier={shown.map(({ id, points }) => ({ key: id, points }))}
         />

@@ -1,7 +1,7 @@
 import { chakra } from '@chakra-ui/react';
 import type { ReactNode } from 'react';
 import { Box, Line, Paper, Small, Title } from '../../../components/sheet-paper';
-import { formatQuantity, formatTime } from '../../../lib/format';
+import { formatNumber, formatQuantity, formatTime } from '../../../lib/format';
 import { useSession } from '../../../lib/session';
 import type { SavedPart } from '../part-set-up.api';
 import { FIELD_LABELS, SHAPE_WORDS } from '../part-words';
@@ -114,5 +114,5 @@ function typedWords({ entered }: SavedPart, locale: string): string {
     if (length === undefined) return [];
     return [`${FIELD_LABELS[field].toLowerCase()} ${formatQuantity(length.value, length.unit, { locale })}`];
   });
-  return `Typed: ${lengths.join(', ')}; ${entered.allowance} ${entered.allowancePercent} %.`;
+  return `Typed: ${lengths.join(', ')}; ${entered.allowance} ${formatNumber(entered.allowancePercent, { locale })} %.`;
 }

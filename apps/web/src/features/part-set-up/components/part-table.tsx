@@ -2,6 +2,7 @@ import { chakra } from '@chakra-ui/react';
 import type { LengthUnit, PartNumber, PartResults } from '@proofplate/recipe-model';
 import { DataTable } from '../../../components/data-table';
 import { TextLink } from '../../../components/text-link';
+import { inShopNumbers } from '../../../lib/format';
 import { paths } from '../../../lib/paths';
 import { inputText, numberLabel, valueText } from '../part-words';
 
@@ -41,13 +42,14 @@ function Source({ source }: { source: string }) {
 }
 
 function Value({ number, shownIn, locale }: { number: PartNumber; shownIn: LengthUnit; locale: string }) {
-  if (number.value === null) return <chakra.span color="fg.muted">not known because {number.missingBecause}</chakra.span>;
+  if (number.value === null)
+    return <chakra.span color="fg.muted">not known because {inShopNumbers(number.missingBecause ?? '')}</chakra.span>;
   return (
     <>
       <chakra.b whiteSpace="nowrap">{valueText(number, shownIn, locale)}</chakra.b>
       {number.outOfRange !== null && (
         <chakra.span display="block" color="straw.fg">
-          Outside the formula’s range: {number.outOfRange}
+          Outside the formula’s range: {inShopNumbers(number.outOfRange)}
         </chakra.span>
       )}
     </>

@@ -1,5 +1,6 @@
 import { PANEL_UNITS, type PanelUnit } from '@proofplate/physics';
 import { codeWords } from '../../../lib/code-words';
+import { formatEntered } from '../../../lib/format';
 import type { Revision, RevisionChange } from '../recipes.api';
 import type { DraftValues } from './draft-values';
 import { fieldWords } from './field-words';
@@ -75,7 +76,7 @@ function differingLeaves([part, mine, theirs]: [PartKey, unknown, unknown], fiel
 /** "0.values.powerPercent" → "60 %": a value and its unit stay together. */
 function leavesOf(value: unknown, path: readonly string[] = []): Map<string, string> {
   const leaves = new Map<string, string>();
-  if (isEntered(value)) leaves.set(path.join('.'), `${value.value} ${PANEL_UNITS[value.unit].symbol}`.trim());
+  if (isEntered(value)) leaves.set(path.join('.'), `${formatEntered(value.value)} ${PANEL_UNITS[value.unit].symbol}`.trim());
   else if (typeof value === 'object' && value !== null) {
     for (const [key, own] of Object.entries(value)) {
       for (const [name, text] of leavesOf(own, [...path, key])) leaves.set(name, text);

@@ -1,6 +1,7 @@
 import { chakra } from '@chakra-ui/react';
 import type { TransferReason } from '@proofplate/recipe-model';
 import { TextLink } from '../../../components/text-link';
+import { inShopNumbers } from '../../../lib/format';
 import { paths } from '../../../lib/paths';
 import type { TransferPlaceRecord } from './transfer.api';
 
@@ -16,7 +17,8 @@ export function TransferReasons({ reasons, source, target }: TransferReasonsProp
         const place = placeOf(reason);
         return (
           <chakra.li key={reason.text} overflowWrap="anywhere">
-            {reason.text} {place !== undefined && <TextLink to={paths.machineDetail(place.machine.id)}>Open {place.machine.name}</TextLink>}
+            {inShopNumbers(reason.text)}{' '}
+            {place !== undefined && <TextLink to={paths.machineDetail(place.machine.id)}>Open {place.machine.name}</TextLink>}
           </chakra.li>
         );
       })}

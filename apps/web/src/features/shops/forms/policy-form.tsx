@@ -6,6 +6,7 @@ import { Form, messageAt, useSummaryForm } from '../../../components/form';
 import { PasswordField } from '../../../components/password-field';
 import { useStatusLine } from '../../../components/status-line';
 import { Switch } from '../../../components/switch';
+import { formatEntered } from '../../../lib/format';
 import { changeShop, type Shop, type ShopPolicy } from '../shops.api';
 
 type PolicyNumber = 'minimumConfirmationMarks' | 'reviewEveryDays' | 'calibrationAgeDays' | 'powerShiftPercent';
@@ -92,7 +93,7 @@ export function PolicyForm({ shop }: { shop: Shop }) {
 function numberMessage(text: string, { label, unit, least, most, isWhole }: NumberRule): string | true {
   const value = readNumber(text);
   const isRight = value >= least && value <= most && (!isWhole || Number.isInteger(value));
-  return isRight || `${label} ${least} to ${most} ${unit}${isWhole ? ', a whole number' : ''}`;
+  return isRight || `${label} ${formatEntered(least)} to ${formatEntered(most)} ${unit}${isWhole ? ', a whole number' : ''}`;
 }
 
 function readNumber(text: string): number {
@@ -105,7 +106,7 @@ function typed({ secondFactorForSigning: _, ...policy }: ShopPolicy): Values['po
     minimumConfirmationMarks: String(policy.minimumConfirmationMarks),
     reviewEveryDays: String(policy.reviewEveryDays),
     calibrationAgeDays: String(policy.calibrationAgeDays),
-    powerShiftPercent: String(policy.powerShiftPercent),
+    powerShiftPercent: formatEntered(policy.powerShiftPercent),
   };
 }
 

@@ -1,6 +1,6 @@
 import { chakra, Flex } from '@chakra-ui/react';
 import { StateShape } from '../../../../components/state-mark';
-import { formatNumber } from '../../../../lib/format';
+import { formatNumber, inShopNumbers } from '../../../../lib/format';
 import type { CellVerdict } from '../log.api';
 
 /** How the cell stands against the criteria, and which of them it fails. */
@@ -24,7 +24,7 @@ export function CellVerdictLine({ verdict, count }: { verdict: CellVerdict | und
 function words(total: number, failed: readonly CellVerdict['results'][number][], open: number): string {
   if (total === 0) return 'No measured criteria: ratings alone decide.';
   if (failed.length > 0) {
-    return `Fails: ${failed.map(({ criterion, value }) => `${criterion} (measured ${formatNumber(value ?? 0)})`).join('; ')}.`;
+    return `Fails: ${failed.map(({ criterion, value }) => `${inShopNumbers(criterion)} (measured ${formatNumber(value ?? 0)})`).join('; ')}.`;
   }
   if (open > 0) return `${total - open} of ${total} criteria met, ${open} not measured.`;
   if (total === 1) return 'Meets the criterion.';

@@ -5,6 +5,7 @@ import { Button } from '../../../../components/button';
 import { NumberField, SelectField } from '../../../../components/field';
 import { Form, messageAt, useSummaryForm } from '../../../../components/form';
 import { CrossIcon, PlusIcon } from '../../../../components/icons';
+import { shopDecimalSign } from '../../../../lib/format';
 import { messageOf, readNumber, typedNumber } from '../../../../lib/read-number';
 import { type Criterion, recordCriteria } from '../log.api';
 
@@ -118,7 +119,7 @@ export function CriteriaWords({ criteria }: { criteria: readonly Criterion[] }) 
 }
 
 const wordsOf = ({ upper, unit, ...rest }: Criterion) =>
-  criterionText({ ...rest, unit: unit ?? QUANTITIES[rest.quantity].unit, ...(upper === undefined ? {} : { upper }) });
+  criterionText({ ...rest, unit: unit ?? QUANTITIES[rest.quantity].unit, ...(upper === undefined ? {} : { upper }) }, shopDecimalSign());
 
 const rule = (what: string, quantity: Criterion['quantity']) => {
   const { unit } = QUANTITIES[quantity];
