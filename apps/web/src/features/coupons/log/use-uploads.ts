@@ -23,7 +23,7 @@ const TOO_LARGE = new ProblemError({
 
 let lastKey = 0;
 
-/** Uploads of a coupon, one after the other, each with its progress; a refused one stays until it is put away. */
+/** Uploads of a coupon, one after the other, each with its progress; a refused one stays until it is put away or another photo arrived. */
 export function useUploads(couponId: string) {
   const [uploads, setUploads] = useState<readonly Upload[]>([]);
   const controllers = useRef(new Map<number, AbortController>());
@@ -46,6 +46,8 @@ export function useUploads(couponId: string) {
         await uploadPhoto({ path: photosPath(couponId), file, signal: controller.signal, onProgress: (share) => change(key, { share }) });
         await readPhotosAgain(couponId);
         drop(key);
+        // the good photo answers the failed one before it; its words would stand beside what is mended
+        setUploads((all) => all.filter((each) => each.problem === undefined || each.key > key));
       } catch (error) {
         if (error instanceof ProblemError) change(key, { problem: error });
         else if (!(error instanceof DOMException && error.name === 'AbortError')) throw error;

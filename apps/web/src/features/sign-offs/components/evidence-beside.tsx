@@ -5,6 +5,7 @@ import type { ReactNode } from 'react';
 import { FactList } from '../../../components/fact-list';
 import { Panel } from '../../../components/page';
 import { CellCloseUp, EvidencePlate } from '../../../components/plate/evidence-plate';
+import { PlainPhoto } from '../../../components/plate/plain-photo';
 import { platePhotoOf } from '../../../components/plate/plate-photo';
 import { ProofMarks, shapeOf } from '../../../components/plate/proof-marks';
 import { type MarkState, StateMark } from '../../../components/state-mark';
@@ -116,12 +117,27 @@ function Side({ title, mark, revision, cell, widestMm }: SideProps) {
             </chakra.p>
           </chakra.div>
           <chakra.div maxW="148px">
-            <CellCloseUp shape={shapeOf(cell)} photo={platePhotoOf(cell.photo, 'large')} address={cell.address} />
+            <CellPicture cell={cell} />
             <CellNumbers cell={cell} />
           </chakra.div>
         </chakra.div>
       )}
     </chakra.div>
+  );
+}
+
+/** The cell out of the photo; a photo without corners stands as it was taken, since no cell can be cut out of it. */
+function CellPicture({ cell }: { cell: EvidenceCell }) {
+  const photo = platePhotoOf(cell.photo, 'large');
+  const urls = cell.photo?.urls ?? null;
+  if (photo !== undefined || urls === null) return <CellCloseUp shape={shapeOf(cell)} photo={photo} address={cell.address} />;
+  return (
+    <>
+      <PlainPhoto urls={urls} label={`Photo of ${cell.couponCode}`} />
+      <chakra.p fontSize="sm" lineHeight="sm" color="fg.muted">
+        The whole plate as it was taken: its corners are not set.
+      </chakra.p>
+    </>
   );
 }
 

@@ -22,7 +22,7 @@ import { Corrections } from './corrections';
 import { CouponPlate } from './coupon-plate';
 import { CriteriaPanel } from './criteria-panel';
 import { DraftButton } from './draft-button';
-import { KeyHints } from './key-hints';
+import { KeyHints, ListedKeys } from './key-hints';
 import { PhotoCaption, PhotoStrip } from './photo-strip';
 import { Conflict, NotSaved } from './rating-notices';
 import { TouchBar } from './touch-bar';
@@ -95,7 +95,15 @@ function Log({ coupon, inspection, photos, choice, ratings }: LogProps) {
             photo={platePhoto}
             decimalSign={decimalSign}
             isRatingShown={isRatingShown}
-            caption={<PhotoCaption shown={shown} hasPhotos={photos.length > 0} timeZone={shop.timeZone} onCorners={setCornersOf} />}
+            caption={
+              <PhotoCaption
+                shown={shown}
+                hasPhotos={photos.length > 0}
+                isImported={coupon.isImported}
+                timeZone={shop.timeZone}
+                onCorners={setCornersOf}
+              />
+            }
             onRate={page.rateAndMove}
             onOpen={openPanel}
           />
@@ -111,6 +119,7 @@ function Log({ coupon, inspection, photos, choice, ratings }: LogProps) {
               <Button onClick={() => setIsMeasuring(true)}>Enter measurements</Button>
             )}
           </PhotoStrip>
+          <ListedKeys />
           {page.mayRate && <KeyHints move={page.move} onMove={page.setMove} />}
         </chakra.section>
         <Box display="grid" gap="4" alignContent="start" minW="0">

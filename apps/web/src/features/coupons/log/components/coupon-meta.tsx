@@ -27,6 +27,7 @@ export function CouponMeta({ coupon, inspection, timeZone }: { coupon: Coupon; i
       <Fact>{calibration === null ? 'No power table' : `Power table of ${formatDay(calibration.measuredOn)}`}</Fact>
       {ground.some((part) => part !== '') && <Fact>{ground.filter((part) => part !== '').join(', ')}</Fact>}
       {coupon.storedAt !== '' && <Fact>Kept in {coupon.storedAt}</Fact>}
+      {coupon.sourceNote !== '' && <chakra.span overflowWrap="anywhere">Source: {coupon.sourceNote}</chakra.span>}
       {coupon.isInvented && <Fact>Invented for the demo shop</Fact>}
       {confirms !== null && (
         <span>

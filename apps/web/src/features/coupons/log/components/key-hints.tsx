@@ -16,11 +16,16 @@ const HINTS: readonly (readonly [keys: readonly string[], meaning: string])[] = 
 
 export type KeyHintsProps = { move: MoveAfterRating; onMove: (move: MoveAfterRating) => void };
 
-/** The keys of the page at a desk, and where a rating leads to. */
-export function KeyHints({ move, onMove }: KeyHintsProps) {
+/** The keys that the plate handles itself, under `?` whether or not its cells may be rated now: pressed, they say why not. */
+export function ListedKeys() {
   useListedKeys('← ↑ ↓ → Home End', 'Move over the plate');
   useListedKeys('0 – 5', 'Rate the cell and move on');
   useListedKeys('Enter', 'Open the cell');
+  return null;
+}
+
+/** The keys of the page at a desk, and where a rating leads to. */
+export function KeyHints({ move, onMove }: KeyHintsProps) {
   return (
     <Flex
       ml={{ base: '0', sm: '48px' }}

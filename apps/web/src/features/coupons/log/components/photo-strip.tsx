@@ -2,12 +2,14 @@ import { chakra, Flex } from '@chakra-ui/react';
 import { type ChangeEvent, type ReactNode, useId } from 'react';
 import { Button } from '../../../../components/button';
 import { CrossIcon, PhotoIcon } from '../../../../components/icons';
+import { PlainPhoto } from '../../../../components/plate/plain-photo';
 import { StateMark } from '../../../../components/state-mark';
 import { formatDate } from '../../../../lib/format';
 import { type Photo, retryPhoto } from '../log.api';
 import { type Upload, useUploads } from '../use-uploads';
 
 const TYPES = 'image/jpeg,image/png,image/webp';
+const THUMBNAIL_PX = 64;
 
 export type PhotoStripProps = {
   couponId: string;
@@ -26,11 +28,9 @@ export function PhotoStrip({ couponId, photos, shown, timeZone, mayAdd, onShow, 
   return (
     <chakra.section aria-label="Photos" ml={{ base: '0', sm: '48px' }} mb="2" fontSize="sm" lineHeight="sm">
       <chakra.ul display="grid" gap="2">
-        {photos
-          .filter((photo) => photo.id !== shown?.id)
-          .map((photo) => (
-            <PhotoRow key={photo.id} photo={photo} timeZone={timeZone} onShow={onShow} />
-          ))}
+        {photos.map((photo) => (
+          <PhotoRow key={photo.id} photo={photo} isShown={photo.id === shown?.id} timeZone={timeZone} onShow={onShow} />
+        ))}
         {uploads.map((upload) => (
           <UploadRow key={upload.key} upload={upload} onDrop={() => drop(upload.key)} />
         ))}
@@ -43,15 +43,22 @@ export function PhotoStrip({ couponId, photos, shown, timeZone, mayAdd, onShow, 
   );
 }
 
-export type PhotoCaptionProps = { shown: Photo | undefined; hasPhotos: boolean; timeZone: string; onCorners: (photo: Photo) => void };
+export type PhotoCaptionProps = {
+  shown: Photo | undefined;
+  hasPhotos: boolean;
+  /** The plate was burnt before it was entered, so nothing was planned here. */
+  isImported: boolean;
+  timeZone: string;
+  onCorners: (photo: Photo) => void;
+};
 
 /** Which photo lies under the cells, and how it was laid there. */
-export function PhotoCaption({ shown, timeZone, onCorners, hasPhotos }: PhotoCaptionProps) {
+export function PhotoCaption({ shown, timeZone, onCorners, hasPhotos, isImported }: PhotoCaptionProps) {
   const words =
     shown === undefined
       ? hasPhotos
         ? 'No photo is ready yet.'
-        : 'No photo yet. The plate is drawn as it was planned.'
+        : `No photo yet. The plate is drawn as it was ${isImported ? 'entered' : 'planned'}.`
       : `Photo of ${formatDate(shown.capturedAt ?? shown.createdAt, timeZone)}${cornerWords(shown)}`;
   return (
     <Flex gap="3" align="center" color="fg.muted" fontSize="sm" lineHeight="sm">
@@ -73,33 +80,39 @@ export function PhotoCaption({ shown, timeZone, onCorners, hasPhotos }: PhotoCap
   );
 }
 
-function cornerWords({ corners, cornersFoundBy }: Photo): string {
-  if (corners === null) return '. It can be laid under the cells once its four corners are set.';
+function cornerWords({ corners, cornersFoundBy, allowedActions }: Photo): string {
+  if (corners === null)
+    return allowedActions.includes('set-corners')
+      ? '. It can be laid under the cells once its four corners are set.'
+      : ', not laid under the cells: its corners were not set. The whole picture opens from the list below.';
   if (cornersFoundBy === 'marks') return ', laid on its four corner marks.';
   return cornersFoundBy === 'render' ? ', an invented picture whose corners are known.' : ', laid on four corners set by hand.';
 }
 
-function PhotoRow({ photo, timeZone, onShow }: { photo: Photo; timeZone: string; onShow: (photo: Photo) => void }) {
-  const { id, state, urls, refusedReason, createdAt, allowedActions } = photo;
+type PhotoRowProps = { photo: Photo; isShown: boolean; timeZone: string; onShow: (photo: Photo) => void };
+
+function PhotoRow({ photo, isShown, timeZone, onShow }: PhotoRowProps) {
+  const { id, state, urls, corners, refusedReason, createdAt, capturedAt, allowedActions } = photo;
+  const label = `Photo of ${formatDate(capturedAt ?? createdAt, timeZone)}`;
   return (
     <Row>
-      {urls !== null && <chakra.img src={urls.small} alt="" width="48px" height="48px" objectFit="cover" borderRadius="sm" />}
+      {urls !== null && <PlainPhoto urls={urls} label={label} sizePx={THUMBNAIL_PX} />}
       <chakra.div flex="1" minW="0">
-        <div>Sent {formatDate(createdAt, timeZone)}</div>
+        <div>{label}</div>
         {state === 'refused' ? (
           <chakra.div color="oxide.fg">
             <StateMark state="fails">Refused</StateMark>
             <chakra.div>{refusedReason}</chakra.div>
           </chakra.div>
         ) : state === 'ready' ? (
-          <chakra.span color="fg.muted">ready</chakra.span>
+          <chakra.span color="fg.muted">{readyWords(isShown, corners !== null)}</chakra.span>
         ) : (
           <chakra.span color="fg.muted" role="status">
             being processed, you may leave the page
           </chakra.span>
         )}
       </chakra.div>
-      {state === 'ready' && <Button onClick={() => onShow(photo)}>Show</Button>}
+      {state === 'ready' && !isShown && <Button onClick={() => onShow(photo)}>Show</Button>}
       {allowedActions.includes('retry') && (
         <Button aria-label={`Process the photo ${id.slice(-4)} again`} onClick={() => void retryPhoto(photo)}>
           Process again
@@ -107,6 +120,11 @@ function PhotoRow({ photo, timeZone, onShow }: { photo: Photo; timeZone: string;
       )}
     </Row>
   );
+}
+
+function readyWords(isShown: boolean, hasCorners: boolean): string {
+  if (!hasCorners) return 'not laid flat: without corners';
+  return isShown ? 'under the cells' : 'can be laid under the cells';
 }
 
 function UploadRow({ upload: { name, share, problem }, onDrop }: { upload: Upload; onDrop: () => void }) {
