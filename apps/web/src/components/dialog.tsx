@@ -1,5 +1,5 @@
 import { chakra, Flex } from '@chakra-ui/react';
-import { type ReactNode, useEffect, useId, useRef } from 'react';
+import { type ReactNode, useId, useLayoutEffect, useRef } from 'react';
 import { Button } from './button';
 import { CrossIcon } from './icons';
 
@@ -35,7 +35,8 @@ export type DialogProps = {
 export function Dialog({ title, isTitleHidden = false, width = 'narrow', place = 'middle', onClose, children, actions }: DialogProps) {
   const dialog = useRef<HTMLDialogElement>(null);
   const titleId = useId();
-  useEffect(() => {
+  // closed before it leaves the page: only then the browser gives the focus back
+  useLayoutEffect(() => {
     const element = dialog.current;
     element?.showModal();
     return () => element?.close();

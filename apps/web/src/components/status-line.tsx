@@ -6,6 +6,9 @@ import { CrossIcon } from './icons';
 /** Undo stays for longer than this while the pointer or the focus is on it. */
 const SHOWN_FOR_MS = 12_000;
 
+/** The bar that rates cells is the act that is repeated: nothing may lie over it. */
+const ABOVE_RATING_BAR = { 'body:has([data-rating-bar]) &': { bottom: { base: 'calc(var(--pp-sizes-bar) + 104px)', lg: '6' } } };
+
 export type StatusMessage = { text: string; undo?: () => void };
 
 const StatusContext = createContext<((message: StatusMessage | string) => void) | undefined>(undefined);
@@ -49,6 +52,7 @@ export function StatusLineProvider({ children }: { children: ReactNode }) {
         position="fixed"
         insetX="0"
         bottom={{ base: 'calc(var(--pp-sizes-bar) + 16px)', lg: '6' }}
+        css={ABOVE_RATING_BAR}
         zIndex="status"
         display="flex"
         justifyContent="center"

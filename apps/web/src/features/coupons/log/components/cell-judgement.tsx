@@ -53,22 +53,29 @@ export function CellJudgement({ address, own, others, knownTags, onChange, tags,
   );
 }
 
-/** The meaning of the rating between the ends of the scale, and the way to none. */
+/** What every number of the scale means, before one is chosen; and the way to none. */
 function RatingCaption({ rating, onClear }: { rating: number | null; onClear: () => void }) {
   const known = RATINGS.find((each) => each === rating);
   return (
-    <Flex justify="space-between" align="center" gap="2" fontSize="sm" lineHeight="sm" color="fg.muted" mt={{ lg: '-2' }} minHeight="28px">
-      <chakra.span display={{ base: 'none', lg: 'inline' }}>{RATING_CAPTIONS[0]}</chakra.span>
+    <Box fontSize="sm" lineHeight="sm" color="fg.muted" mt={{ lg: '-1' }}>
+      <chakra.ol
+        aria-label="What the ratings mean"
+        display="grid"
+        gridTemplateColumns={{ base: 'repeat(2, minmax(0, 1fr))', sm: 'repeat(3, minmax(0, 1fr))' }}
+        columnGap="3"
+      >
+        {RATINGS.map((each) => (
+          <chakra.li key={each} color={each === known ? 'fg' : undefined} fontWeight={each === known ? 'semibold' : undefined}>
+            {each} {RATING_CAPTIONS[each]}
+          </chakra.li>
+        ))}
+      </chakra.ol>
       {known !== undefined && (
-        <span>
-          {known}: {RATING_CAPTIONS[known]}{' '}
-          <Button kind="quiet" fontSize="sm" fontWeight="normal" minHeight={{ base: 'touch', lg: '28px' }} px="2" onClick={onClear}>
-            Take it away
-          </Button>
-        </span>
+        <Button kind="quiet" fontSize="sm" fontWeight="normal" minHeight={{ base: 'touch', lg: '28px' }} px="2" ml="-2" onClick={onClear}>
+          Take the {known} away
+        </Button>
       )}
-      <chakra.span display={{ base: 'none', lg: 'inline' }}>{RATING_CAPTIONS[5]}</chakra.span>
-    </Flex>
+    </Box>
   );
 }
 

@@ -25,6 +25,9 @@ import {
 import { type Photo, setCorners } from '../log.api';
 import { CornerStage } from './corner-stage';
 
+/** Two lines of words and the quiet button below them, as the first step needs on a narrow screen. */
+const HEAD_HEIGHT = { base: '112px', sm: '72px', lg: '48px' };
+
 const NUDGES = [
   { key: 'ArrowLeft', label: 'left', sign: '←' },
   { key: 'ArrowUp', label: 'up', sign: '↑' },
@@ -39,6 +42,7 @@ export function CornerEditor({ coupon, grid, photo, onClose, onSaved }: CornerEd
   const [history, setHistory] = useState<CornerHistory>({ present: photo.corners ?? [], past: [] });
   const [active, setActive] = useState(0);
   const [isGridShown, setIsGridShown] = useState(true);
+  const [isNudging, setIsNudging] = useState(false);
   const [isBusy, setIsBusy] = useState(false);
   const [problem, setProblem] = useState<ProblemError>();
   const corners = history.present;
@@ -97,14 +101,17 @@ export function CornerEditor({ coupon, grid, photo, onClose, onSaved }: CornerEd
           heightPx={heightPx}
           corners={corners}
           active={active}
+          isNudging={isNudging}
           onActive={setActive}
           onPlace={handlePlace}
           onMove={(index, point, isStart) =>
             setHistory((before) => (isStart ? withChange : withoutTrace)(before, moved(before.present, index, point)))
           }
         />
-        <Box>
+        <Box onFocus={() => setIsNudging(true)} onBlur={() => setIsNudging(false)}>
           <NudgeButtons active={active} isDisabled={corners[active] === undefined} onNudge={handleNudge} />
+        </Box>
+        <Box gridColumn={{ md: '2' }}>
           {isComplete(corners) && (
             <>
               <Flex justify="space-between" align="center" mt="3" mb="1.5" fontSize="sm">
@@ -121,16 +128,22 @@ export function CornerEditor({ coupon, grid, photo, onClose, onSaved }: CornerEd
 }
 
 function NextCorner({ corners, onStart }: { corners: Corners; onStart: () => void }) {
+  // one height for every step: the picture must not move under the finger
   if (isComplete(corners)) {
-    return <chakra.p color="fg.muted">Drag a corner, or choose it and press the arrow keys: 1 pixel, with Shift 10.</chakra.p>;
+    return (
+      <Flex align="center" minHeight={HEAD_HEIGHT}>
+        <chakra.p color="fg.muted">Drag a corner, or choose it and press the arrow keys: 1 pixel, with Shift 10.</chakra.p>
+      </Flex>
+    );
   }
   return (
-    <Flex gap="3" align="center" wrap="wrap" role="status">
+    <Flex columnGap="3" align="center" wrap="wrap" role="status" minHeight={HEAD_HEIGHT}>
       <span>
         Press corner {corners.length + 1} of the plate: the one <b>{CORNER_NAMES[corners.length]}</b>, on the edge of the metal.
+        {corners.length === 0 && ' The origin mark stands next to A1, where the letters and the numbers begin.'}
       </span>
       {corners.length === 0 && (
-        <Button kind="quiet" onClick={onStart}>
+        <Button kind="quiet" px="0" onClick={onStart}>
           Place all four, then move them
         </Button>
       )}
@@ -140,8 +153,8 @@ function NextCorner({ corners, onStart }: { corners: Corners; onStart: () => voi
 
 function NudgeButtons({ active, isDisabled, onNudge }: { active: number; isDisabled: boolean; onNudge: (key: string) => void }) {
   return (
-    <Flex gap="2" align="center" wrap="wrap" role="group" aria-label={`Move corner ${active + 1}`}>
-      <chakra.span fontSize="sm" fontWeight="semibold" minW="72px">
+    <Box display="grid" gridTemplateColumns="repeat(4, 44px)" gap="2" role="group" aria-label={`Move corner ${active + 1}`}>
+      <chakra.span gridColumn="1 / -1" fontSize="sm" fontWeight="semibold">
         Corner {active + 1}
       </chakra.span>
       {NUDGES.map(({ key, label, sign }) => (
@@ -149,7 +162,7 @@ function NudgeButtons({ active, isDisabled, onNudge }: { active: number; isDisab
           {sign}
         </Button>
       ))}
-    </Flex>
+    </Box>
   );
 }
 

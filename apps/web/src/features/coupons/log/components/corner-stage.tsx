@@ -1,5 +1,5 @@
 import { Box, chakra } from '@chakra-ui/react';
-import { type KeyboardEvent, type PointerEvent, useRef } from 'react';
+import { type KeyboardEvent, type PointerEvent, useRef, useState } from 'react';
 import { CORNER_NAMES, type Corners, nudgeOf } from '../corner-history';
 import type { PhotoCorner } from '../log.api';
 
@@ -17,6 +17,8 @@ export type CornerStageProps = {
   heightPx: number;
   corners: Corners;
   active: number;
+  /** The buttons beside it move the corner. */
+  isNudging: boolean;
   onActive: (index: number) => void;
   onPlace: (point: PhotoCorner) => void;
   /** `isStart`: the change begins here and Undo leads back before it. */
@@ -24,7 +26,8 @@ export type CornerStageProps = {
 };
 
 /** The upright photo with its numbered handles: tap to place, drag, or nudge with the arrow keys. */
-export function CornerStage({ url, widthPx, heightPx, corners, active, onActive, onPlace, onMove }: CornerStageProps) {
+export function CornerStage({ url, widthPx, heightPx, corners, active, isNudging, onActive, onPlace, onMove }: CornerStageProps) {
+  const [isHeld, setIsHeld] = useState(false);
   const stage = useRef<HTMLDivElement>(null);
   const isDragging = useRef(false);
   const pointOf = ({ clientX, clientY }: { clientX: number; clientY: number }): PhotoCorner => {
@@ -35,6 +38,7 @@ export function CornerStage({ url, widthPx, heightPx, corners, active, onActive,
   const handleDown = (index: number) => (event: PointerEvent<HTMLButtonElement>) => {
     event.currentTarget.setPointerCapture(event.pointerId);
     isDragging.current = false;
+    setIsHeld(true);
     onActive(index);
   };
   const handleDrag = (index: number) => (event: PointerEvent<HTMLButtonElement>) => {
@@ -47,6 +51,7 @@ export function CornerStage({ url, widthPx, heightPx, corners, active, onActive,
     const corner = corners[index];
     if (step === undefined || corner === undefined) return;
     event.preventDefault();
+    setIsHeld(true);
     onMove(index, { x: corner.x + step.x / widthPx, y: corner.y + step.y / heightPx }, true);
   };
   const shown = corners[active];
@@ -75,9 +80,11 @@ export function CornerStage({ url, widthPx, heightPx, corners, active, onActive,
           onKeyDown={handleKey(index)}
           onPointerDown={handleDown(index)}
           onPointerMove={handleDrag(index)}
+          onLostPointerCapture={() => setIsHeld(false)}
+          onBlur={() => setIsHeld(false)}
         />
       ))}
-      {shown !== undefined && <Loupe url={url} corner={shown} aspect={heightPx / widthPx} stage={stage.current} />}
+      {shown !== undefined && (isHeld || isNudging) && <Loupe url={url} corner={shown} aspect={heightPx / widthPx} stage={stage.current} />}
     </Box>
   );
 }
@@ -110,6 +117,8 @@ type HandleProps = {
   onKeyDown: (event: KeyboardEvent) => void;
   onPointerDown: (event: PointerEvent<HTMLButtonElement>) => void;
   onPointerMove: (event: PointerEvent<HTMLButtonElement>) => void;
+  onLostPointerCapture: () => void;
+  onBlur: () => void;
 };
 
 function Handle({ number, name, corner, isActive, ...on }: HandleProps) {
@@ -150,7 +159,7 @@ function Handle({ number, name, corner, isActive, ...on }: HandleProps) {
   );
 }
 
-/** Magnifies the corner in the middle of the picture: away from the finger, and where no corner of a plate lies. */
+/** Magnifies the corner while it is moved, in the middle of the picture: away from the finger, and off the cells as soon as it rests. */
 function Loupe({ url, corner, aspect, stage }: { url: string; corner: PhotoCorner; aspect: number; stage: HTMLDivElement | null }) {
   const stagePx = stage?.clientWidth ?? 600;
   const loupePx = stagePx < SMALL_STAGE_PX ? LOUPE_PX.small : LOUPE_PX.large;

@@ -7,6 +7,8 @@ import { formatTime } from '../../../../lib/format';
 import { CriteriaForm, CriteriaWords } from '../forms/criteria-form';
 import type { Inspection } from '../log.api';
 
+const CRITERIA_ID = 'criteria';
+
 export type CriteriaPanelProps = { couponId: string; inspection: Inspection; locale: string; timeZone: string };
 
 /** The criteria: to be recorded first, then standing as they are. */
@@ -16,7 +18,7 @@ export function CriteriaPanel({ couponId, inspection, locale, timeZone }: Criter
   const mayRecord = allowedActions.includes('record-criteria') && !areCriteriaFixed;
   if (criteria !== null && !isChanging) {
     return (
-      <Panel px="5" py="3" aria-label="Acceptance criteria">
+      <Panel id={CRITERIA_ID} tabIndex={-1} px="5" py="3" aria-label="Acceptance criteria">
         <Flex justify="space-between" align="baseline" gap="3" wrap="wrap">
           <h2>Acceptance criteria</h2>
           {mayRecord && (
@@ -57,7 +59,11 @@ export function CriteriaPanel({ couponId, inspection, locale, timeZone }: Criter
         version={version}
         criteria={criteria ?? proposedCriteria}
         locale={locale}
-        onRecorded={() => setIsChanging(false)}
+        onRecorded={() => {
+          setIsChanging(false);
+          // the form that had the focus is gone, and the panel stands elsewhere
+          requestAnimationFrame(() => document.getElementById(CRITERIA_ID)?.focus());
+        }}
       />
     </chakra.section>
   );

@@ -15,6 +15,7 @@ export type TouchBarProps = {
 export function TouchBar({ address, rating, isDisabled, onRate, onStep }: TouchBarProps) {
   return (
     <Box
+      data-rating-bar
       display={{ base: 'flex', lg: 'none' }}
       position="fixed"
       insetX="0"

@@ -71,7 +71,12 @@ function CriterionRow({ form, index, locale, onRemove }: CriterionRowProps) {
   const error = (field: string) => messageAt(form.formState.errors, `${name}.${field}`);
   const validate = (what: string) => (text: string) => messageOf(readNumber(text, rule(what, quantity), locale));
   return (
-    <Box display="grid" gridTemplateColumns={{ base: '1fr 1fr', sm: '2fr 1fr 1fr auto' }} gap="2" alignItems="start">
+    <Box
+      display="grid"
+      gridTemplateColumns={{ base: '1fr 1fr', sm: 'minmax(0, 5fr) minmax(0, 4fr) minmax(0, 3fr) auto' }}
+      gap="2"
+      alignItems="start"
+    >
       <Box gridColumn={{ base: '1 / -1', sm: 'auto' }}>
         <SelectField
           label="What is measured"
