@@ -8,7 +8,13 @@ export function symbolOf(quantity: string): string {
 /** "Evenness, U": the word first, since a symbol alone says nothing to whoever did not learn it. */
 export function quantityWords(quantity: string): string {
   const meaning = Object.entries(QUANTITIES).find(([key]) => key === quantity)?.[1];
-  return meaning === undefined ? quantity : `${meaning.label}, ${meaning.symbol}`;
+  return meaning === undefined ? quantity : withSymbol(meaning.label, quantity, ', ');
+}
+
+/** A label and its symbol, once where the label says it already: "Roughness Ra", "Wipe test, double rubs passed". */
+export function withSymbol(label: string, quantity: string, between = ' '): string {
+  const symbol = symbolOf(quantity);
+  return label.includes(symbol) ? label : `${label}${between}${symbol}`;
 }
 
 /** "by profilometer" and the like; a photo needs no word, since it is the picture beside the number. */

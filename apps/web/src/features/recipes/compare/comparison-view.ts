@@ -1,6 +1,6 @@
 import { alignedNumbers, changeShare, changeWords, kindWords, shownNumber } from '../../../lib/change-words';
 import { formatNumber } from '../../../lib/format';
-import { decimalsOf, symbolOf } from '../../../lib/measurement-words';
+import { decimalsOf, withSymbol } from '../../../lib/measurement-words';
 import { isShare } from '../../../lib/share-numbers';
 import type { Comparison, ComparisonRow } from '../recipes.api';
 
@@ -138,7 +138,7 @@ function changeText({ group, key }: ComparisonRow, { change, size, missingBecaus
 }
 
 function named({ group, key, label, step }: ComparisonRow, hasSteps: boolean): string {
-  if (group === 'mark') return `${label} ${symbolOf(key)}`;
+  if (group === 'mark') return withSymbol(label, key);
   return hasSteps && step !== null ? `Step ${step}: ${label}` : label;
 }
 
