@@ -1,6 +1,7 @@
 import { type SignIn, seedDemoShop } from '@proofplate/db/seed';
 import { passwordFault } from '../src/auth/hashing/password-rules';
 import type { CouponDto } from '../src/coupons/dto/coupon.dto';
+import type { CraterFitDto } from '../src/coupons/dto/crater-fit.dto';
 import type { FinderDto } from '../src/finder/dto/finder.dto';
 import type { LedgerVerificationDto } from '../src/ledger/dto/ledger-event.dto';
 import type { PhotoDto } from '../src/photos/dto/photo.dto';
@@ -144,6 +145,19 @@ describe('the coupons of the demo shop', () => {
         expect([answer.statusCode, answer.headers['content-type']]).toEqual([200, 'image/jpeg']);
       }
     }
+  });
+});
+
+describe('the craters of the demo shop', () => {
+  it('give back the spot and the incubation that they were drawn with, and the spot can become the measured one', async () => {
+    const [plate] = await all<{ id: string; title: string }>('lead', '/api/coupons').then((coupons) =>
+      coupons.filter(({ title }) => title.includes('craters')),
+    );
+    const found = await read<CraterFitDto>('lead', `/api/coupons/${plate?.id}/crater-fit`);
+    const { spotRadiusUm = 0, spotRadiusStandardErrorUm = 0 } = found.fit ?? {};
+    expect(Math.abs(spotRadiusUm - 19.2)).toBeLessThan(3 * spotRadiusStandardErrorUm);
+    expect(found.incubation?.incubationCoefficient).toBeCloseTo(0.88, 1);
+    expect(found).toMatchObject({ pointCount: 8, notSavableBecause: null, place: { measuredSpotUm: 36 } });
   });
 });
 

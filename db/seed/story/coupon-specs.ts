@@ -12,6 +12,8 @@ export type WorkSpec = {
   readonly bench: BenchKey;
   readonly lens: LensKey;
 };
+/** What the invented craters of a plate are drawn with: spot radius w, threshold of one pulse, incubation coefficient. */
+export type CraterSpec = { readonly spotRadiusUm: number; readonly thresholdUj: number; readonly incubationCoefficient: number };
 export type CouponSpec = WorkSpec & {
   readonly key: string;
   readonly at: string;
@@ -21,6 +23,8 @@ export type CouponSpec = WorkSpec & {
   readonly lot: string;
   readonly storedAt: string;
   readonly reached: CouponReached;
+  /** Of a plate of single pulses, whose craters somebody measures. */
+  readonly craters?: CraterSpec;
   readonly grid: { readonly rows: TypedFactor; readonly columns: TypedFactor; readonly base: TypedSetting };
 };
 export type ProofSpec = Pick<CouponSpec, 'key' | 'at' | 'by' | 'kind' | 'lot' | 'storedAt' | 'reached'> &
@@ -148,6 +152,26 @@ export const COUPON_SPECS: readonly CouponSpec[] = [
       rows: speed(200, 1000, 6),
       columns: power(40, 90, 6),
       base: { values: { frequencyKhz: 60, lineSpacingUm: 0.02, passes: 1, focusOffsetMm: 1 } },
+    },
+  },
+  {
+    ...{ ...WORK.steel, effect: 'deep-engrave', key: 'steel, craters', at: '2026-11-27T09:00:00Z', by: 'operator' },
+    ...{
+      kind: 'stainless dark anneal',
+      reached: 'inspected',
+      title: '316L, craters of single pulses',
+      lot: '316L-2310',
+      storedAt: 'Drawer 4',
+    },
+    // fast and wide enough that no two pulses touch: 117 µm from pulse to pulse, 150 µm from line to line
+    craters: { spotRadiusUm: 19.2, thresholdUj: 17.4, incubationCoefficient: 0.88 },
+    grid: {
+      rows: { parameter: 'passes', from: 1, to: 4, count: 3, spacing: 'ratios' },
+      columns: { parameter: 'powerPercent', from: 10, to: 45, count: 8, spacing: 'ratios' },
+      base: {
+        values: { speedMmPerS: 7000, frequencyKhz: 60, pulseWidthNs: 8, lineSpacingUm: 0.15, focusOffsetMm: 0 },
+        fill: 'one direction',
+      },
     },
   },
 ];

@@ -1,5 +1,6 @@
 import { minutesAfter, type Stage } from '../stage/stage';
 import type { Cast } from './cast';
+import { measureCraters } from './coupon-craters';
 import { measureCells, moveOn, rateBest, rateCells, recordCriteria } from './coupon-inspecting';
 import { markCoupon } from './coupon-marking';
 import { burn, photograph } from './coupon-photographing';
@@ -10,7 +11,17 @@ import type { Script } from './script';
 import { teller } from './shop';
 
 /** Minutes from the plan of a coupon to its later acts; the longest plate is marked within half an hour. */
-const AFTER = { marking: 15, photo: 60, criteria: 70, measuring: 80, rating: 90, secondRating: 100, inspected: 110, sealed: 120 };
+const AFTER = {
+  marking: 15,
+  photo: 60,
+  criteria: 70,
+  measuring: 80,
+  craters: 85,
+  rating: 90,
+  secondRating: 100,
+  inspected: 110,
+  sealed: 120,
+};
 const SHARE_OF_HALF = 0.55;
 
 export type World = { readonly stage: Stage; readonly cast: Cast; readonly made: Made; readonly script: Script };
@@ -51,6 +62,8 @@ function writeInspection({ stage, cast, made, script }: World, spec: CouponSpec 
   });
   script.add(later(AFTER.criteria), by, (turn) => recordCriteria(turn, record()));
   script.add(later(AFTER.measuring), by, (turn) => measureCells(turn, record(), bench));
+  const craters = 'craters' in spec ? spec.craters : undefined;
+  if (craters !== undefined) script.add(later(AFTER.craters), by, (turn) => measureCraters(turn, record(), craters));
   script.add(later(AFTER.rating), by, (turn) => rateCells(turn, record(), record().cells));
   const second = cast.people[spec.by === 'lead' ? 'operator' : 'lead'];
   script.add(later(AFTER.secondRating), teller(second), (turn) => rateBest(turn, record()));

@@ -6,7 +6,7 @@ import type { Bench, BenchKey, Calibration, Cast, Lens, LensKey, People } from '
 import { PUBLISHED_PANEL } from './published-panel';
 import { teller } from './shop';
 
-const { lens, machine, machineLens, machineProfile, powerCalibration } = schema;
+const { lens, machine, machineLens, machineProfile, powerCalibration, spotMeasurement } = schema;
 
 const SET_UP = new Date('2026-01-12T09:00:00Z');
 const RELABELLED = new Date('2026-01-14T10:00:00Z');
@@ -95,6 +95,10 @@ async function placeBench(turn: Turn, spec: BenchSpec, lenses: Readonly<Record<L
     };
     const id = turn.newId();
     await turn.tx.insert(machineLens).values({ ...authored(turn), id, ...pair });
+    if (spot !== undefined) {
+      const measured = { machineLensId: id, spotUm: spot.um, method: spot.method, measuredOn: spot.on };
+      await turn.tx.insert(spotMeasurement).values({ ...authored(turn), id: turn.newId(), ...measured });
+    }
     await turn.tell({ action: 'machine-lens.added', subjectType: 'machine-lens', subjectId: id, after: pair });
   }
   return placed;
