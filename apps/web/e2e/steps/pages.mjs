@@ -51,6 +51,7 @@ export const PAGES = {
     requests: askedFor,
     coupons: '/coupons',
     coupon: listed('/coupons?state=sealed', /^C-\d+/),
+    'coupon-craters': listed('/coupons?q=craters', /^C-\d+/),
     'coupon-mark': listed('/coupons?state=planned', /^Mark C-\d+/),
     'coupon-mark-cell': markFirstCell,
     'plan-a-coupon': '/coupons/plan',

@@ -67,6 +67,8 @@ describe('threshold and spot of a coupon', () => {
     expect(plain(picture.getAttribute('aria-label'))).toContain('a line through 2 of them with slope 1800 µm²: spot 60.00 ± 0.80 µm');
     const section = screen.getByRole('region', { name: 'Threshold and spot' });
     expect(plain(section.textContent)).toContain('Threshold, peak fluence2.122 ± 0.061 J/cm²');
+    expect(screen.getByRole('region', { name: 'Left out of the line' })).toHaveTextContent('A3: pulses touch: one every 20 µm');
+    fireEvent.click(screen.getByText(/^4 craters with pulse energy/));
     const rows = within(screen.getByRole('table', { name: 'Craters' })).getAllByRole('row');
     expect(rows.map((row) => within(row).getAllByRole('cell').at(-1)?.textContent)).toEqual([
       expect.stringContaining('yes'),

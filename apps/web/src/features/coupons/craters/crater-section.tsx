@@ -15,6 +15,7 @@ import { CraterResults } from './crater-results';
 import { CraterTable } from './crater-table';
 import { seriesWords, withError } from './crater-words';
 import { type CraterFit, useCraterFit } from './craters.api';
+import { leftOutByReason } from './left-out';
 import { SaveSpotDialog } from './save-spot-dialog';
 
 const TITLE_ID = 'craters-title';
@@ -51,7 +52,7 @@ function Found({ found }: { found: CraterFit }) {
           <CraterPlot label={plotWords(found)} points={points} line={fit} />
           {series !== null && (
             <chakra.p fontSize="sm" lineHeight="sm" color="fg.muted" mt="1">
-              Filled: craters of {seriesWords(series)}. {points.some(isLeftOut) && 'Hollow: left out, see the table. '}
+              Filled: craters of {seriesWords(series)}. {points.some(isLeftOut) && 'Hollow: left out. '}
               {fit !== null && 'The stroke on the axis is the threshold.'}
             </chakra.p>
           )}
@@ -64,13 +65,31 @@ function Found({ found }: { found: CraterFit }) {
       {remarks.map((remark) => (
         <Look key={remark}>{remark}</Look>
       ))}
+      <LeftOut points={points} />
       <CraterTable points={points} />
-      <chakra.p fontSize="sm" lineHeight="sm" color="fg.muted" maxW="prose">
+      <chakra.p fontSize="sm" lineHeight="sm" color="fg.muted" maxW="640px">
         {found.formula}. {found.source}. It holds for a Gaussian spot, one threshold, the same number of pulses on each place, spots that do
         not touch, and up to about ten thresholds. It proves no setting.{' '}
         <TextLink to={paths.science('ablation')}>More about this: threshold and spot from craters</TextLink>
       </chakra.p>
     </Box>
+  );
+}
+
+function LeftOut({ points }: { points: CraterFit['points'] }) {
+  const groups = leftOutByReason(points);
+  if (groups.length === 0) return null;
+  return (
+    <section aria-label="Left out of the line">
+      <chakra.h3 mb="1">Left out of the line</chakra.h3>
+      <ul>
+        {groups.map(({ reason, addresses }) => (
+          <li key={reason}>
+            <b>{addresses.join(', ')}</b>: {reason}
+          </li>
+        ))}
+      </ul>
+    </section>
   );
 }
 

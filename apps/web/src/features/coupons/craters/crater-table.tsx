@@ -1,10 +1,24 @@
 import { chakra } from '@chakra-ui/react';
 import { type Column, DataTable } from '../../../components/data-table';
-import { formatNumber } from '../../../lib/format';
+import { formatCount, formatNumber } from '../../../lib/format';
 import type { CraterPoint } from './craters.api';
 
-/** Every crater with its numbers, and why the line leaves it out. */
+/** Closed it would not be printed. */
+const OPEN_IN_PRINT = { '@media print': { '&::details-content': { contentVisibility: 'visible', height: 'auto' } } };
+
+/** Every crater with its numbers, and why the line leaves it out. On a phone every row is a card, so it opens when it is asked for. */
 export function CraterTable({ points }: { points: readonly CraterPoint[] }) {
+  return (
+    <chakra.details css={OPEN_IN_PRINT}>
+      <chakra.summary cursor="pointer" color="brand.fg" py="2.5" width="fit-content">
+        {formatCount(points.length, 'crater')} with pulse energy and place in the line
+      </chakra.summary>
+      <Table points={points} />
+    </chakra.details>
+  );
+}
+
+function Table({ points }: { points: readonly CraterPoint[] }) {
   return <DataTable label="Craters" density="dense" columns={COLUMNS} rows={points} rowKey={({ address }) => address} />;
 }
 
