@@ -2,6 +2,7 @@ import { randomUUID } from 'node:crypto';
 import type { MaterialDto, MaterialFacetsDto } from '../src/materials/dto/material.dto';
 import type { MaterialGroupDto } from '../src/materials/dto/material-group.dto';
 import { createTestApp, type TestApp } from './support/app';
+import { makeRecipe } from './support/approved-recipe';
 import { created, editing, fillStarterContent, makeMaterial } from './support/equipment';
 import { makeStaffedShop } from './support/factories';
 import { newKey } from './support/idempotency';
@@ -121,6 +122,30 @@ describe('groups of materials', () => {
     expect(group.materials.map(({ id }) => id).sort()).toEqual([a.id, b.id].sort());
     const changed = (await patch(`/api/material-groups/${group.id}`, 1, { materialIds: [b.id] })).json<MaterialGroupDto>();
     expect(changed).toMatchObject({ name: '300 series', materials: [{ id: b.id, name: b.name }], version: 2 });
+  });
+
+  it.each(['in_review', 'scheduled', 'approved'] as const)(
+    'take no further material while a revision that is %s covers them',
+    async (state) => {
+      const [a, b] = [await makeMaterial(test, shop.lead), await makeMaterial(test, shop.lead)];
+      const group = await created<MaterialGroupDto>(test, shop.lead, '/api/material-groups', { name: randomUUID(), materialIds: [a.id] });
+      const { recipeId, code } = await makeRecipe(test, shop.lead, { material: a, materialGroupId: group.id, state });
+      const url = `/api/material-groups/${group.id}`;
+      const problem = expectProblem(await patch(url, 1, { materialIds: [a.id, b.id] }), 409, 'group-signed');
+      expect(problem).toMatchObject({ recipes: [{ id: recipeId, code }], detail: expect.stringContaining('Make another group') });
+      expect((await get(url)).json<MaterialGroupDto>()).toMatchObject({ version: 1, materials: [{ id: a.id }] });
+      const left = (await patch(url, 1, { name: `${group.name} b`, materialIds: [] })).json<MaterialGroupDto>();
+      expect(left).toMatchObject({ name: `${group.name} b`, materials: [] });
+      expectProblem(await patch(url, 2, { materialIds: [b.id] }), 409, 'group-signed');
+    },
+  );
+
+  it.each(['draft', 'returned', 'withdrawn', 'superseded'] as const)('take further ones where a revision is only %s', async (state) => {
+    const [a, b] = [await makeMaterial(test, shop.lead), await makeMaterial(test, shop.lead)];
+    const group = await created<MaterialGroupDto>(test, shop.lead, '/api/material-groups', { name: randomUUID(), materialIds: [a.id] });
+    await makeRecipe(test, shop.lead, { material: a, materialGroupId: group.id, state });
+    const wider = (await patch(`/api/material-groups/${group.id}`, 1, { materialIds: [a.id, b.id] })).json<MaterialGroupDto>();
+    expect(wider.materials).toHaveLength(2);
   });
 
   it('refuse a material of another shop, a double and a repeated name', async () => {

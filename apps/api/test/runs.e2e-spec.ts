@@ -5,7 +5,7 @@ import type { StartSheetDto } from '../src/runs/dto/start-sheet.dto';
 import { createTestApp, type TestApp } from './support/app';
 import { type ApprovedRecipe, makeRecipe, supersedeRecipe, withdrawRecipe } from './support/approved-recipe';
 import { asSuperuser } from './support/database';
-import { created, fillStarterContent, makeLens, makeMaterial } from './support/equipment';
+import { created, editing, fillStarterContent, makeLens, makeMaterial } from './support/equipment';
 import { makeStaffedShop, type TestMember } from './support/factories';
 import { newKey } from './support/idempotency';
 import { expectProblem, pointersOf } from './support/problem';
@@ -140,6 +140,19 @@ describe('POST /api/runs', () => {
       const problem = expectProblem(await start(never, { kind }, shop.lead), 409, 'never-mark');
       expect(problem).toMatchObject({ cautions: [{ source: expect.any(String) }] });
     }
+  });
+
+  it('refuses a recipe that covers such a material by its group, until a lead takes it out', async () => {
+    const vinyl = await makeMaterial(test, shop.lead, { family: 'pvc' });
+    const group = await created<{ id: string }>(test, shop.lead, '/api/material-groups', { name: randomUUID(), materialIds: [vinyl.id] });
+    const covering = await makeRecipe(test, shop.lead, { materialGroupId: group.id });
+    const sheet = (await get(`/api/runs/start-sheet/${covering.revisionId}`)).json<StartSheetDto>();
+    expect(sheet.cautions[0]).toMatchObject({ level: 'never' });
+    const problem = expectProblem(await start(covering), 409, 'never-mark');
+    expect(problem).toMatchObject({ detail: expect.stringContaining('out of the group'), cautions: [{ source: expect.any(String) }] });
+    const headers = editing(shop.lead, 1);
+    await test.app.inject({ method: 'PATCH', url: `/api/material-groups/${group.id}`, headers, payload: { materialIds: [] } });
+    await started(covering);
   });
 
   it('refuses an overdue setting only where the policy says so', async () => {

@@ -1,3 +1,4 @@
+import { randomUUID } from 'node:crypto';
 import type { RecipeDto } from '../src/recipes/dto/recipe.dto';
 import type { RecipeRevisionDto } from '../src/recipes/dto/recipe-revision.dto';
 import type { ApprovalChecksDto } from '../src/sign-offs/dto/checks.dto';
@@ -5,7 +6,7 @@ import type { SignOffQueueDto } from '../src/sign-offs/dto/sign-off-queue.dto';
 import { createTestApp, type TestApp } from './support/app';
 import { typed } from './support/coupons';
 import { asSuperuser } from './support/database';
-import { created } from './support/equipment';
+import { created, makeMaterial } from './support/equipment';
 import { makeMember, type TestMember } from './support/factories';
 import { expectProblem, pointersOf } from './support/problem';
 import {
@@ -189,6 +190,32 @@ describe('submitting', () => {
       428,
       'version-required',
     );
+  });
+
+  it('weighs the cautions of every material of the covered group, again at the signature', async () => {
+    const other = await makeMaterial(test, shop.lead);
+    const appliesTo = { materialIds: [other.id] };
+    const words = { subject: 'The back sheet.', text: 'It gives off chlorine.', source: 'Data sheet 12' };
+    const care = await created<{ id: string }>(test, shop.lead, '/api/cautions', { level: 'care', appliesTo, ...words });
+    const group = await created<{ id: string }>(test, shop.lead, '/api/material-groups', { name: randomUUID(), materialIds: [other.id] });
+    const draft = await makeProvedDraft(test, shop, { scope: { ...FOR_CUSTOMER(randomUUID()), materialGroupId: group.id } });
+    const { submit } = acts(test, draft.id);
+    const acknowledgedCautionIds = draft.cautions.map(({ id }) => id).filter((id) => id !== care.id);
+    const unread = expectProblem(await submit(shop.operator, draft, { acknowledgedCautionIds }), 409, 'checks-fail');
+    expect(unread).toMatchObject({ checks: [{ key: 'cautions-author' }] });
+    const submitted = (await submit(shop.operator, draft)).json<RecipeRevisionDto>();
+    expect(submitted.cautions).toContainEqual(expect.objectContaining({ id: care.id, isAcknowledged: true }));
+    await created(test, shop.lead, '/api/cautions', { level: 'never', appliesTo, ...words });
+    const refused = expectProblem(await acts(test, draft.id).approve(shop.lead, submitted), 409, 'checks-fail');
+    expect(refused).toMatchObject({ checks: [{ key: 'never', detail: expect.stringContaining('The back sheet. (Data sheet 12)') }] });
+  });
+
+  it('is refused where a material of the covered group must never be marked', async () => {
+    const vinyl = await makeMaterial(test, shop.lead, { family: 'pvc' });
+    const group = await created<{ id: string }>(test, shop.lead, '/api/material-groups', { name: randomUUID(), materialIds: [vinyl.id] });
+    const draft = await makeProvedDraft(test, shop, { scope: { ...FOR_CUSTOMER(randomUUID()), materialGroupId: group.id } });
+    const problem = expectProblem(await acts(test, draft.id).submit(shop.operator, draft), 409, 'checks-fail');
+    expect(problem).toMatchObject({ checks: [{ key: 'never', detail: expect.stringContaining('out of the covered group') }] });
   });
 
   it('of another route needs a lead’s grounds instead of coupons', async () => {

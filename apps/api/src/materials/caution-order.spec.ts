@@ -1,5 +1,5 @@
 import type { Caution, CautionScope } from '@proofplate/recipe-model';
-import { cautionsNaming, isGeneralCaution, orderedCautionsFor } from './caution-order';
+import { cautionsNaming, isGeneralCaution, orderedCautionsFor, orderedCautionsForAny } from './caution-order';
 
 const caution = (id: string, level: Caution['level'], appliesTo: CautionScope): Caution => ({
   id,
@@ -27,6 +27,16 @@ describe('orderedCautionsFor', () => {
 
   it('leaves out what is bound to another effect or to round parts', () => {
     expect(ids(orderedCautionsFor({ family: 'brass', effectKey: 'frost' }, cautions))).toEqual(['brass', 'all work']);
+  });
+});
+
+describe('orderedCautionsForAny', () => {
+  it('takes what applies to any of the materials, once each, never first', () => {
+    const subjects = [
+      { family: 'brass', materialId: 'm2', effectKey: 'frost' },
+      { family: 'wood', materialId: 'm1', effectKey: 'frost' },
+    ] as const;
+    expect(ids(orderedCautionsForAny(subjects, cautions))).toEqual(['this sheet', 'wood', 'brass', 'all work']);
   });
 });
 

@@ -1,9 +1,17 @@
 import { type Caution, type CautionScope, type CautionSubject, cautionsFor } from '@proofplate/recipe-model';
 
+/** More than any caution reaches by being narrow. */
+const NEVER_FIRST = 100;
+
 /** The cautions for a piece of work: never first, then those that name its material, then the narrower before the general. */
-export function orderedCautionsFor(subject: CautionSubject, cautions: readonly Caution[]): Caution[] {
-  const byNarrowness = [...cautions].sort((a, b) => narrowness(b.appliesTo) - narrowness(a.appliesTo));
-  return cautionsFor(subject, byNarrowness);
+export const orderedCautionsFor = (subject: CautionSubject, cautions: readonly Caution[]): Caution[] =>
+  orderedCautionsForAny([subject], cautions);
+
+/** The cautions for work on any of several materials, each once and in the same order. */
+export function orderedCautionsForAny(subjects: readonly CautionSubject[], cautions: readonly Caution[]): Caution[] {
+  const applying = cautions.filter((caution) => subjects.some((subject) => cautionsFor(subject, [caution]).length > 0));
+  const rank = ({ level, appliesTo }: Caution) => (level === 'never' ? NEVER_FIRST : 0) + narrowness(appliesTo);
+  return applying.sort((a, b) => rank(b) - rank(a));
 }
 
 /** Those of them that name the material or its family: what a list of materials shows in the row. */

@@ -5,11 +5,12 @@ import { type FieldProblem, InvalidError, NotFoundError, StaleError } from '../c
 import type { Page } from '../common/pagination/page';
 import { type Tx, UnitOfWork } from '../database/unit-of-work';
 import { LedgerService } from '../ledger/ledger.service';
-import { orderedCautionsFor } from './caution-order';
+import { orderedCautionsForAny } from './caution-order';
 import { isAtLeastAsStrict, isAtLeastAsWide, scopeAsStored } from './caution-scope';
 import { toCautionDto } from './cautions.mapper';
 import { type CautionRow, CautionsRepository, type CautionValues } from './cautions.repository';
 import type { CautionDto, CautionsForDto, CautionsForQuery, CreateCautionDto, UpdateCautionDto } from './dto/caution.dto';
+import { type GroupedMaterial, MaterialGroupsRepository } from './material-groups.repository';
 import { CautionLoosenedError, ForbiddenByCautionError, NotInCatalogueError } from './materials.errors';
 import { MaterialsRepository } from './materials.repository';
 
@@ -20,6 +21,8 @@ export type WorkInHand = {
   readonly effectId?: string | undefined;
   readonly sourceKind?: SourceKind | undefined;
   readonly roundPart?: boolean | undefined;
+  /** A group whose materials the work covers too. */
+  readonly materialGroupId?: string | undefined;
 };
 
 @Injectable()
@@ -28,6 +31,7 @@ export class CautionsService {
     private readonly unitOfWork: UnitOfWork,
     private readonly cautions: CautionsRepository,
     private readonly materials: MaterialsRepository,
+    private readonly groups: MaterialGroupsRepository,
     private readonly ledger: LedgerService,
   ) {}
 
@@ -86,7 +90,8 @@ export class CautionsService {
   /** The cautions that stand beside a piece of work, never first. @throws NotFoundError when a named thing is not in the shop */
   async cautionsFor(tx: Tx, shopId: string, work: WorkInHand): Promise<CautionRow[]> {
     const [subject, rows] = [await this.subjectOf(tx, shopId, work), await this.cautions.list(tx, shopId)];
-    const applying = orderedCautionsFor(subject, rows);
+    const covered = work.materialGroupId === undefined ? [] : await this.coveredMaterials(tx, shopId, [work.materialGroupId]);
+    const applying = orderedCautionsForAny(subjectsOf(subject, covered), rows);
     return applying.flatMap(({ id }) => rows.filter((row) => row.id === id));
   }
 
@@ -98,12 +103,19 @@ export class CautionsService {
    */
   async assertMayBeMarked(tx: Tx, shopId: string, work: WorkInHand): Promise<void> {
     const forbidding = (await this.cautionsFor(tx, shopId, work)).filter(({ level }) => level === 'never');
-    if (forbidding.length > 0) throw new ForbiddenByCautionError(forbidding);
+    if (forbidding.length === 0) return;
+    const own = await this.cautionsFor(tx, shopId, { ...work, materialGroupId: undefined });
+    throw new ForbiddenByCautionError(forbidding, { isOfGroup: own.every(({ level }) => level !== 'never') });
   }
 
   /** Every caution of the shop as the model holds them, for lists that match many materials at once. */
   async allCautions(tx: Tx, shopId: string): Promise<Caution[]> {
     return this.cautions.list(tx, shopId);
+  }
+
+  /** The materials of groups that work covers. */
+  async coveredMaterials(tx: Tx, shopId: string, groupIds: readonly string[]): Promise<GroupedMaterial[]> {
+    return this.groups.materialsOf(tx, shopId, groupIds);
   }
 
   private async subjectOf(tx: Tx, shopId: string, work: WorkInHand): Promise<CautionSubject> {
@@ -145,6 +157,12 @@ export class CautionsService {
     if (problems.length > 0) throw new InvalidError('What the caution applies to needs another look.', problems);
   }
 }
+
+/** The work on its own material, and the same work on each other that it covers. */
+export const subjectsOf = (subject: CautionSubject, covered: readonly Pick<GroupedMaterial, 'id' | 'family'>[]): CautionSubject[] => [
+  subject,
+  ...covered.map(({ id, family }) => ({ ...subject, materialId: id, family })),
+];
 
 const scopeProblem = (list: string, detail: string): FieldProblem => ({
   pointer: `#/appliesTo/${list}`,

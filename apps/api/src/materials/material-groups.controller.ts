@@ -45,7 +45,9 @@ export class MaterialGroupsController {
   @Patch(':groupId')
   @AtLeast('lead')
   @ApiIfMatch()
-  @ApiOperation({ summary: 'Change a group of materials; only what is given changes' })
+  @ApiOperation({
+    summary: 'Change a group of materials; only what is given changes, and nothing is added that would widen a submitted revision',
+  })
   @ApiOkResponse({ type: MaterialGroupDto })
   update(
     @CurrentMember() actor: Actor,

@@ -8,7 +8,7 @@ import { LedgerService } from '../ledger/ledger.service';
 import type { CreateMaterialGroupDto, MaterialGroupDto, UpdateMaterialGroupDto } from './dto/material-group.dto';
 import { toMaterialGroupDto } from './material-groups.mapper';
 import { MaterialGroupsRepository, type MaterialGroupView } from './material-groups.repository';
-import { NotInCatalogueError } from './materials.errors';
+import { GroupSignedError, NotInCatalogueError } from './materials.errors';
 import { MaterialsRepository } from './materials.repository';
 
 /** Materials that one approval may cover, named one by one. */
@@ -54,6 +54,7 @@ export class MaterialGroupsService {
       await this.groups.rename(tx, actor.shopId, id, dto.name ?? row.name);
       if (dto.materialIds != null) {
         await this.refuseUnknownMaterials(tx, actor.shopId, dto.materialIds);
+        await this.refuseWidening(tx, actor.shopId, before, dto.materialIds);
         await this.groups.replaceMaterials(tx, actor.shopId, id, dto.materialIds);
       }
       const after = await this.getGroup(tx, actor.shopId, id);
@@ -70,8 +71,20 @@ export class MaterialGroupsService {
     return view;
   }
 
+  /** A recipe that covers the group would cover one material more than what was signed. */
+  private async refuseWidening(tx: Tx, shopId: string, { group, materials }: MaterialGroupView, ids: readonly string[]): Promise<void> {
+    if (ids.every((id) => materials.some((material) => material.id === id))) return;
+    const covering = await this.groups.recipesCovering(tx, shopId, group.id);
+    if (covering.length > 0) throw new GroupSignedError(covering);
+  }
+
   private async refuseTakenName(tx: Tx, shopId: string, name: string, exceptId?: string): Promise<void> {
     if (await this.groups.isNameTaken(tx, shopId, name, exceptId)) throw new NameTakenError('group', name);
+  }
+
+  /** Whoever signs for the group signs for the materials that it has: none is added until the signature is stored. */
+  async lockAsCovered(tx: Tx, shopId: string, groupId: string): Promise<void> {
+    await this.groups.lockAsCovered(tx, shopId, groupId);
   }
 
   private async refuseUnknownMaterials(tx: Tx, shopId: string, materialIds: readonly string[]): Promise<void> {

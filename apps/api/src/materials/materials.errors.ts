@@ -21,9 +21,12 @@ export class ForbiddenByCautionError extends ConflictError {
   override readonly code = 'never-mark';
   override readonly title = 'This must not be marked';
 
-  constructor(cautions: readonly Caution[]) {
+  constructor(cautions: readonly Caution[], { isOfGroup = false }: { isOfGroup?: boolean } = {}) {
     const subjects = cautions.map(({ subject, source }) => `${subject} (${source})`).join(' ');
-    super(`${subjects} Choose another material, or ask the laser safety officer.`, {
+    const wayOut = isOfGroup
+      ? 'It applies to a material of the group that this covers. Ask a lead to take that material out of the group, or ask the laser safety officer.'
+      : 'Choose another material, or ask the laser safety officer.';
+    super(`${subjects} ${wayOut}`, {
       cautions: cautions.map(({ id, subject, text, source }) => ({ id, subject, text, source })),
     });
   }
@@ -32,4 +35,16 @@ export class ForbiddenByCautionError extends ConflictError {
 export class CautionLoosenedError extends ConflictError {
   override readonly code = 'caution-loosened';
   override readonly title = 'A caution only gets tighter';
+}
+
+/** A submitted revision covers the group: one material more would widen what was signed. */
+export class GroupSignedError extends ConflictError {
+  override readonly code = 'group-signed';
+  override readonly title = 'The group is part of what was submitted';
+
+  constructor(recipes: readonly { readonly id: string; readonly code: string; readonly title: string }[]) {
+    const codes = recipes.map(({ code }) => code).join(', ');
+    const covers = recipes.length === 1 ? 'covers' : 'cover';
+    super(`${codes} ${covers} this group. Make another group with the material, and propose a change that covers it.`, { recipes });
+  }
 }

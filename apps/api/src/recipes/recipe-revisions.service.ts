@@ -1,6 +1,7 @@
 import { Injectable } from '@nestjs/common';
 import type { Actor } from '../common/actor';
 import type { Tx } from '../database/unit-of-work';
+import { MaterialGroupsService } from '../materials/material-groups.service';
 import type { RecipeRevisionDto } from './dto/recipe-revision.dto';
 import { RecipeRevisionsRepository } from './recipe-revisions.repository';
 import { RecipeNotFoundError, RevisionNotFoundError } from './recipes.errors';
@@ -17,6 +18,7 @@ export class RecipeRevisionsService {
     private readonly recipes: RecipesRepository,
     private readonly records: RevisionRecordsService,
     private readonly scheduled: ScheduledRevisionsService,
+    private readonly groups: MaterialGroupsService,
   ) {}
 
   /** Everything about a revision. @throws RevisionNotFoundError also for another shop's revision */
@@ -37,7 +39,7 @@ export class RecipeRevisionsService {
 
   /**
    * Locks what a signature depends on, always in the same order: the recipes that answer the same question, then every revision of this
-   * one. A scheduled revision whose day has come is made current on the way.
+   * one, then the group that it covers. A scheduled revision whose day has come is made current on the way.
    *
    * @throws RevisionNotFoundError also for another shop's revision
    */
@@ -49,6 +51,8 @@ export class RecipeRevisionsService {
     const ladder = await this.scheduled.lockSettled(tx, shopId, recipeId);
     const revision = ladder.find((rung) => rung.id === id);
     if (revision === undefined) throw new RevisionNotFoundError();
+    const { materialGroupId } = revision.content.scope;
+    if (materialGroupId !== undefined) await this.groups.lockAsCovered(tx, shopId, materialGroupId);
     return { revision, ladder };
   }
 

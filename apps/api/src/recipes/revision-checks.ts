@@ -80,12 +80,15 @@ function reasonCheck({ revision }: RevisionRecord): ApprovalCheck {
   return check('reason', 'Reason', { passes, found: passes ? revision.reason : 'No reason is given.', wayOut: 'Say why this setting.' });
 }
 
-function neverCheck({ cautions }: RevisionRecord): ApprovalCheck {
+function neverCheck({ cautions, revision }: RevisionRecord): ApprovalCheck {
   const never = cautions.filter(({ level }) => level === 'never');
   return check('never', 'Nothing forbids it', {
     passes: never.length === 0,
     found: never.length === 0 ? 'No caution says never.' : never.map(({ subject, source }) => `${subject} (${source})`).join(' '),
-    wayOut: 'Choose another material, or ask the laser safety officer.',
+    wayOut:
+      revision.content.scope.materialGroupId === undefined
+        ? 'Choose another material, or ask the laser safety officer.'
+        : 'Choose another material, take the one that it names out of the covered group, or ask the laser safety officer.',
   });
 }
 

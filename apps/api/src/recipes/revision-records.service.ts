@@ -3,8 +3,8 @@ import type { Caution, CautionSubject } from '@proofplate/recipe-model';
 import type { Actor } from '../common/actor';
 import { DoseCautionService } from '../coupons/dose-caution.service';
 import type { Tx } from '../database/unit-of-work';
-import { isGeneralCaution, orderedCautionsFor } from '../materials/caution-order';
-import { CautionsService } from '../materials/cautions.service';
+import { isGeneralCaution, orderedCautionsForAny } from '../materials/caution-order';
+import { CautionsService, subjectsOf } from '../materials/cautions.service';
 import { PhotosService } from '../photos/photos.service';
 import { ShopsService } from '../shops/shops.service';
 import type { RecipeRevisionDto, RevisionBriefDto, RevisionRecipeDto } from './dto/recipe-revision.dto';
@@ -108,10 +108,19 @@ export class RevisionRecordsService {
     return dto;
   }
 
-  /** One query for all: the shop's cautions are few, and each revision picks those that apply to it. */
+  /**
+   * Those of its own material and of every material of the group that it covers. One query for all: the shop's cautions are few, and
+   * each revision picks those that apply to it.
+   */
   private async cautionsOf(tx: Tx, shopId: string, heads: readonly RevisionHead[]): Promise<Map<string, RevisionCaution[]>> {
     const all = await this.cautions.allCautions(tx, shopId);
-    return new Map(heads.map((head) => [head.revision.id, orderedCautionsFor(subjectOf(head), all).map(toRevisionCaution)]));
+    const groupIds = heads.flatMap((head) => groupIdOf(head) ?? []);
+    const covered = await this.cautions.coveredMaterials(tx, shopId, groupIds);
+    const applying = (head: RevisionHead) => {
+      const ofGroup = covered.filter(({ groupId }) => groupId === groupIdOf(head));
+      return orderedCautionsForAny(subjectsOf(subjectOf(head), ofGroup), all);
+    };
+    return new Map(heads.map((head) => [head.revision.id, applying(head).map(toRevisionCaution)]));
   }
 }
 
@@ -119,6 +128,8 @@ function toRevisionCaution(caution: Caution): RevisionCaution {
   const { id, level, subject, text, source } = caution;
   return { id, level, subject, text, source, isGeneral: isGeneralCaution(caution) };
 }
+
+const groupIdOf = ({ revision }: RevisionHead) => revision.content.scope.materialGroupId;
 
 function subjectOf({ revision, recipe }: RevisionHead): CautionSubject {
   const { scope, limits } = revision.content;

@@ -2,7 +2,7 @@ import { Injectable } from '@nestjs/common';
 import type { RevisionContent, SourceKind } from '@proofplate/recipe-model';
 import type { Tx } from '../database/unit-of-work';
 import { isGeneralCaution } from '../materials/caution-order';
-import { CautionsService } from '../materials/cautions.service';
+import { CautionsService, type WorkInHand } from '../materials/cautions.service';
 import type { RunCautionDto, RunStopDto } from './dto/run-surroundings.dto';
 import { stopsRun } from './revision-use';
 import { RunStopsRepository } from './run-stops.repository';
@@ -53,15 +53,8 @@ export class RunSurroundingsService {
   }
 
   /** The cautions of a piece of work as they stand before its setting. */
-  async cautionsOf(tx: Tx, shopId: string, { material, finish, effect, sourceKind, content }: CitedWork): Promise<RunCautionDto[]> {
-    const { scope, limits } = content;
-    const rows = await this.cautions.cautionsFor(tx, shopId, {
-      materialId: material.id,
-      finishId: finish.id,
-      effectId: effect.id,
-      sourceKind,
-      roundPart: scope.partDiameterMm !== undefined || limits.partDiameterMm !== undefined,
-    });
+  async cautionsOf(tx: Tx, shopId: string, cited: CitedWork): Promise<RunCautionDto[]> {
+    const rows = await this.cautions.cautionsFor(tx, shopId, workOf(cited));
     return rows.map((row) => ({
       id: row.id,
       level: row.level,
@@ -71,4 +64,16 @@ export class RunSurroundingsService {
       isGeneral: isGeneralCaution(row),
     }));
   }
+}
+
+/** The work as cautions ask for it: with every material that the revision covers. */
+export function workOf({ material, finish, effect, sourceKind, content: { scope, limits } }: CitedWork): WorkInHand {
+  return {
+    materialId: material.id,
+    finishId: finish.id,
+    effectId: effect.id,
+    sourceKind,
+    roundPart: scope.partDiameterMm !== undefined || limits.partDiameterMm !== undefined,
+    materialGroupId: scope.materialGroupId,
+  };
 }

@@ -12,7 +12,7 @@ import type { StartRunDto } from './dto/start-run.dto';
 import type { StartSheetDto } from './dto/start-sheet.dto';
 import { whyNotUsable } from './revision-use';
 import { RunActs } from './run-acts.service';
-import { RunSurroundingsService } from './run-surroundings.service';
+import { RunSurroundingsService, workOf } from './run-surroundings.service';
 import { tickProblems } from './run-ticks';
 import { ClientIdTakenError, NotReadyToStartError, OnHoldError, ReviewOverdueError, RevisionNotUsableError } from './runs.errors';
 import { mayStart } from './runs.policy';
@@ -69,16 +69,10 @@ export class RunsService {
   }
 
   private async refuseUnfit(tx: Tx, actor: Actor, dto: StartRunDto, revision: CitedRevision): Promise<void> {
-    const { recipe, machine, material, finish, effect, lens, content } = revision;
+    const { recipe, machine, lens, content } = revision;
     const holds = await this.runs.openHolds(tx, actor.shopId, { recipeId: recipe.id, machineId: machine.id });
     if (holds.length > 0) throw new OnHoldError(holds);
-    await this.cautions.assertMayBeMarked(tx, actor.shopId, {
-      materialId: material.id,
-      finishId: finish.id,
-      effectId: effect.id,
-      sourceKind: machine.sourceKind,
-      roundPart: content.scope.partDiameterMm !== undefined || content.limits.partDiameterMm !== undefined,
-    });
+    await this.cautions.assertMayBeMarked(tx, actor.shopId, workOf({ ...revision, sourceKind: machine.sourceKind }));
     const unusable = whyNotUsable(dto.kind, revision.state);
     if (unusable !== undefined) throw new RevisionNotUsableError(unusable);
     if (dto.kind === 'production' && revision.isOverdue && revision.overdueBlocks) throw new ReviewOverdueError();

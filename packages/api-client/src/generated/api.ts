@@ -935,7 +935,7 @@ export interface paths {
         delete?: never;
         options?: never;
         head?: never;
-        /** Change a group of materials; only what is given changes */
+        /** Change a group of materials; only what is given changes, and nothing is added that would widen a submitted revision */
         patch: operations["MaterialGroupsController_update"];
         trace?: never;
     };

@@ -132,6 +132,11 @@ export const PROBLEMS: Readonly<Record<string, ProblemText>> = {
     'What comes nearest is not equivalent',
     'The answer says why under reasons. Send acceptNotEquivalent to draft it all the same, or choose another machine or lens.',
   ),
+  'group-signed': problem(
+    409,
+    'The group is part of what was submitted',
+    'The answer names the recipes that cover the group. Make another group with the material, and propose a change that covers it.',
+  ),
   'scope-signed': problem(409, 'The scope is part of what was submitted', 'Propose a change and set the scope in its draft.'),
   'stale-version': problem(
     412,
