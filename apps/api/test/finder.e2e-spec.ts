@@ -130,6 +130,26 @@ describe('GET /api/finder', () => {
     expect(withdrawn).toMatchObject([{ code: gone.code, by: shop.lead.printedName, reason: 'The tint came off' }]);
   });
 
+  it('says so to whoever comes by a link to the recipe, by id or code, and to whoever types its name', async () => {
+    const gone = await makeRecipe(test, shop.lead, { state: 'withdrawn', withdrawnBecause: 'Rims turn brown', title: 'Umbra ring' });
+    const ways: Record<string, string>[] = [
+      { recipeId: gone.recipeId },
+      { recipeId: gone.code },
+      { words: 'umbra' },
+      { machineId: gone.machine.id },
+    ];
+    for (const query of ways)
+      expect(await found(query)).toMatchObject({ answer: null, withdrawn: [{ code: gone.code, reason: 'Rims turn brown' }] });
+    expect((await found({ recipeId: dial.code })).answer?.code).toBe(dial.code);
+    expect((await found({})).withdrawn).toEqual([]);
+  });
+
+  it('offers the nearest where some of the typed words lead nowhere, and names those words', async () => {
+    const { nearMisses, matchCount } = await found({ words: 'satin purple' });
+    expect(matchCount).toBe(0);
+    expect(nearMisses[0]).toMatchObject({ code: dial.code, missingWords: ['purple'], differs: [] });
+  });
+
   it('shows the cautions of the work, the narrower before the general', async () => {
     const { cautions, isForbidden } = await found(keysOf(dial));
     expect(isForbidden).toBe(false);

@@ -38,7 +38,7 @@ describe('POST /api/setting-requests', () => {
       finishId: finish.id,
       effectId: effect.id,
       jobReference: 'J-26-0418',
-      neededOn: '2026-05-19',
+      neededOn: '2999-05-19',
       note: 'Twenty dials',
     });
     expect(answer.statusCode).toBe(201);
@@ -50,7 +50,7 @@ describe('POST /api/setting-requests', () => {
       finish: { name: finish.name },
       effect: { name: effect.name },
       jobReference: 'J-26-0418',
-      neededOn: '2026-05-19',
+      neededOn: '2999-05-19',
       askedBy: shop.trainee.printedName,
       answer: null,
       allowedActions: [],
@@ -60,6 +60,11 @@ describe('POST /api/setting-requests', () => {
   it('asks nobody for a setting of what must never be marked', async () => {
     const vinyl = await makeMaterial(test, shop.lead, { family: 'pvc' });
     expectProblem(await ask({ materialId: vinyl.id }), 409, 'never-mark');
+  });
+
+  it('refuses a day that is past, at its field', async () => {
+    const problem = expectProblem(await ask({ neededOn: '2020-01-01' }), 422, 'invalid-fields');
+    expect(problem.errors).toEqual([{ pointer: '#/neededOn', detail: 'Enter today or a later day.' }]);
   });
 
   it('names what is not in the shop, and every wrong field', async () => {

@@ -130,7 +130,11 @@ describe('POST /api/revisions/:id/transfers', () => {
     const again = await transfer(bodyFor(), { key });
     expect(again.headers['idempotency-replayed']).toBe('true');
     expect(again.json<RecipeRevisionDto>().id).toBe(draft.id);
-    const events = await read<{ items: { action: string; subjectId: string }[] }>(test, shop.operator, `/ledger?subjectCode=${draft.recipe.code}`);
+    const events = await read<{ items: { action: string; subjectId: string }[] }>(
+      test,
+      shop.operator,
+      `/ledger?subjectCode=${draft.recipe.code}`,
+    );
     expect(events.items.map(({ action }) => action).sort()).toEqual(['recipe.created', 'revision.drafted']);
   });
 

@@ -138,6 +138,12 @@ function settledIn(slot: SlotKey, matches: readonly Candidate[]): string | null 
   return matches.every(({ keys }) => keys[slot] === first.keys[slot]) ? first.keys[slot] : null;
 }
 
+/** The words that a recipe is found by. */
+export function labelsBy(items: readonly SlotItem[]): (candidate: Candidate) => string {
+  const named = namesById(items);
+  return (candidate) => labelOf(candidate, named);
+}
+
 function namesById(items: readonly SlotItem[]): Map<string, SlotItem> {
   return new Map(items.map((item) => [item.id, item]));
 }

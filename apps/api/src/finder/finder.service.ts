@@ -1,5 +1,5 @@
 import { Injectable } from '@nestjs/common';
-import { type Caution, MATERIAL_FAMILIES, SOURCE_KIND_LABELS } from '@proofplate/recipe-model';
+import { type Caution, MATERIAL_FAMILIES, matchesWords, SOURCE_KIND_LABELS } from '@proofplate/recipe-model';
 import type { Actor } from '../common/actor';
 import { NotFoundError } from '../common/errors/domain-error';
 import { Env } from '../config/env.validation';
@@ -12,8 +12,8 @@ import type { FinderQuery } from './dto/finder.query.dto';
 import { type NameOf, toAnswer, toFinderRecipe, toReferenceCell, type UrlsOf } from './finder.mapper';
 import { type CatalogueRow, FinderRepository, familyOf, type RecipeRow, sourceKindOf } from './finder.repository';
 import { type AnswerRow, FinderAnswersRepository } from './finder-answers.repository';
-import { type Candidate, fillSlots, fits, type Sentence, SLOT_KEYS, type SlotChoice, type SlotItem } from './finder-slots';
-import { type NearMiss, nearMisses } from './near-misses';
+import { type Candidate, fillSlots, fits, labelsBy, type Sentence, SLOT_KEYS, type SlotChoice, type SlotItem } from './finder-slots';
+import { type NearMiss, nearByWords, nearMisses } from './near-misses';
 import { qrModules } from './sheet-code';
 
 const MOST_MATCHES = 12;
@@ -25,6 +25,14 @@ type Ground = {
   readonly candidates: readonly Candidate[];
   readonly catalogue: ReadonlyMap<string, CatalogueRow>;
   readonly nameOf: NameOf;
+};
+
+/** What the sentence says, and by which words a recipe is found. */
+type Asked = {
+  readonly choice: SlotChoice;
+  readonly words: string;
+  readonly recipe: string | undefined;
+  readonly labelOf: (candidate: Candidate) => string;
 };
 
 @Injectable()
@@ -48,14 +56,13 @@ export class FinderService {
   async find(actor: Actor, query: FinderQuery): Promise<FinderDto> {
     return this.unitOfWork.read(actor, async (tx) => {
       const ground = await this.ground(tx, actor.shopId, query);
-      const sentence = fillSlots(ground.candidates, itemsOf(ground.catalogue), { choice: ground.choice, words: query.words ?? '' });
+      const items = itemsOf(ground.catalogue);
+      const asked: Asked = { choice: ground.choice, words: query.words ?? '', recipe: query.recipeId, labelOf: labelsBy(items) };
+      const sentence = fillSlots(ground.candidates, items, asked);
       const only = onlyMatch(sentence, query);
       const cautions = cautionsOf(await this.finder.cautions(tx, actor.shopId), ground, only);
       const isForbidden = cautions.some(({ level }) => level === 'never');
-      const near =
-        sentence.matches.length > 0 || isForbidden
-          ? []
-          : nearMisses(ground.candidates, ground.choice, (id) => ground.catalogue.get(id)?.kind);
+      const near = sentence.matches.length > 0 || isForbidden ? [] : nearest(ground, asked);
       const wanted = only === undefined || isForbidden ? near.map(({ candidate }) => candidate) : [only];
       const found = await this.answers.answers(
         tx,
@@ -65,10 +72,11 @@ export class FinderService {
       const rowOf = (candidate: Candidate) => found.find(({ revisionId }) => revisionId === candidate.revisionId);
       return {
         ...headOf(sentence, ground),
+        approvedCount: ground.candidates.length,
         cautions: cautions.map(toFinderCaution),
         isForbidden,
         answer: only === undefined || isForbidden ? null : this.answerOf(actor, only, rowOf(only), ground.nameOf),
-        withdrawn: sentence.matches.length > 0 ? [] : withdrawnOf(ground),
+        withdrawn: only === undefined ? withdrawnOf(ground, sentence, asked) : [],
         nearMisses: near.map((miss) => toNearMiss(miss, rowOf(miss.candidate), { ground, urlsOf: this.urlsOf })),
       };
     });
@@ -101,9 +109,13 @@ function toFinderCaution(caution: Caution): FinderCautionDto {
   return { id, level, subject, text, source, isGeneral: isGeneralCaution(caution) };
 }
 
+/** By its id, or by the code that people read. */
+const isNamed = ({ recipeId, code }: Candidate, recipe: string) => recipe === recipeId || recipe === code;
+
 /** The recipe that answers: the only one left, and only if the part was named. */
 function onlyMatch({ matches }: Sentence, query: FinderQuery): Candidate | undefined {
-  if (query.recipeId !== undefined) return matches.find(({ recipeId }) => recipeId === query.recipeId);
+  const { recipeId } = query;
+  if (recipeId !== undefined) return matches.find((candidate) => isNamed(candidate, recipeId));
   const isPartNamed = query.materialId !== undefined || (query.words ?? '') !== '';
   return isPartNamed && matches.length === 1 ? matches[0] : undefined;
 }
@@ -143,10 +155,22 @@ function cautionsOf(cautions: readonly Caution[], { choice, catalogue, rows }: G
   );
 }
 
-function withdrawnOf({ rows, choice, nameOf }: Ground): WithdrawnRecipeDto[] {
-  if (choice.material === undefined) return [];
+/** Nothing answers: what comes nearest to the chosen slots, or to the typed words where the material is still open. */
+function nearest({ candidates, choice, catalogue }: Ground, asked: Asked): NearMiss[] {
+  if (choice.material === undefined && asked.words !== '') return nearByWords(candidates, asked, asked.labelOf);
+  return nearMisses(candidates, choice, (id) => catalogue.get(id)?.kind);
+}
+
+/** What was withdrawn of what was asked for: the recipe that an address names, else all that fit a sentence which nothing answers. */
+function withdrawnOf({ rows, nameOf }: Ground, { matches }: Sentence, { choice, words, recipe, labelOf }: Asked): WithdrawnRecipeDto[] {
+  if (recipe === undefined && matches.length > 0) return [];
   return rows
-    .filter((row) => row.state === 'withdrawn' && fits(toCandidate(row), choice))
+    .filter((row) => row.state === 'withdrawn')
+    .filter((row) =>
+      recipe === undefined
+        ? fits(toCandidate(row), choice) && matchesWords(words, labelOf(toCandidate(row)))
+        : isNamed(toCandidate(row), recipe),
+    )
     .slice(0, MOST_MATCHES)
     .map((row) => ({
       ...toFinderRecipe(toCandidate(row), nameOf),
@@ -157,7 +181,7 @@ function withdrawnOf({ rows, choice, nameOf }: Ground): WithdrawnRecipeDto[] {
 }
 
 function toNearMiss(
-  { candidate, differs }: NearMiss,
+  { candidate, differs, missingWords }: NearMiss,
   row: AnswerRow | undefined,
   { ground, urlsOf }: { ground: Ground; urlsOf: UrlsOf },
 ): NearMissDto {
@@ -177,6 +201,7 @@ function toNearMiss(
   return {
     ...toFinderRecipe(candidate, nameOf),
     differs: differs.map((slot) => ({ slot, ...nameIn(slot) })),
+    missingWords: [...missingWords],
     whyNot,
     reference: row == null || row.reference === null ? null : toReferenceCell(row.reference, urlsOf),
   };

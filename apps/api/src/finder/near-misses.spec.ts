@@ -1,5 +1,5 @@
 import type { Candidate, SlotKey } from './finder-slots';
-import { nearMisses } from './near-misses';
+import { nearByWords, nearMisses } from './near-misses';
 
 const wanted = { machine: 'bench1', lens: 'f254', material: 'grade2', finish: 'brushed', effect: 'blue' };
 const differing = (code: string, differs: Partial<Record<SlotKey, string>>): Candidate => {
@@ -46,5 +46,30 @@ describe('nearMisses()', () => {
   it('names the slots that differ', () => {
     const [miss] = nearMisses([differing('both', { machine: 'bench2', lens: 'f160' })], wanted, () => undefined);
     expect(miss?.differs).toEqual(['machine', 'lens']);
+  });
+});
+
+describe('nearByWords()', () => {
+  const labels: Record<string, string> = { blue: 'Titanium brushed blue', grey: 'Titanium brushed grey', brass: 'Brass dial' };
+  const recipes = Object.keys(labels).map((code) => differing(code, code === 'grey' ? { machine: 'bench2' } : {}));
+  const near = (words: string, choice: Partial<typeof wanted> = {}) =>
+    nearByWords(recipes, { choice, words }, ({ code }) => labels[code] ?? '').map(({ candidate, missingWords }) => [
+      candidate.code,
+      ...missingWords,
+    ]);
+
+  it('puts what has most of the words first and names the words that it lacks', () => {
+    expect(near('titanium blue purple')).toEqual([
+      ['blue', 'purple'],
+      ['grey', 'blue', 'purple'],
+    ]);
+  });
+
+  it('prefers what is on the chosen machine, and offers nothing that has none of the words', () => {
+    expect(near('titanium purple', { machine: 'bench2' })).toEqual([
+      ['grey', 'purple'],
+      ['blue', 'purple'],
+    ]);
+    expect(near('purple')).toEqual([]);
   });
 });

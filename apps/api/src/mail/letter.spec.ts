@@ -67,6 +67,10 @@ describe('the mail of a withdrawal', () => {
   const textOf = (stayingNumber: number | null) =>
     writeMail(composeLetter({ kind: 'revision-withdrawn', payload: { ...revision, reason: 'Brown rims', stayingNumber } }, links)).text;
 
+  it('leads to the recipe by the code that people read', () => {
+    expect(textOf(null)).toContain('https://proofs.example.invalid/recipes/R-0001/revisions/v%3F1');
+  });
+
   it('says what holds afterwards', () => {
     expect(textOf(null)).toContain('this recipe has no approved setting now');
     expect(textOf(2)).toContain('revision 2 stays the approved one');

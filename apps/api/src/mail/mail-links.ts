@@ -8,8 +8,8 @@ export function mailLinks(publicOrigin: string) {
   return {
     acceptInvitation: (token: string) => page('/accept-invitation', token),
     resetPassword: (token: string) => page('/reset-password', token),
-    revision: (recipeId: string, revisionId: string) =>
-      page(`/recipes/${encodeURIComponent(recipeId)}/revisions/${encodeURIComponent(revisionId)}`),
+    revision: (recipeCode: string, revisionId: string) =>
+      page(`/recipes/${encodeURIComponent(recipeCode)}/revisions/${encodeURIComponent(revisionId)}`),
     signOff: () => page('/sign-off'),
     run: (code: string) => page(`/runs/${encodeURIComponent(code)}`),
     atTheMachine: () => page('/'),

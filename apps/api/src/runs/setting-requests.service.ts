@@ -5,6 +5,7 @@ import { decodeCursor, type Page, pageOf } from '../common/pagination/page';
 import { type Tx, UnitOfWork } from '../database/unit-of-work';
 import { LedgerService } from '../ledger/ledger.service';
 import { CautionsService } from '../materials/cautions.service';
+import { ShopsService } from '../shops/shops.service';
 import type { AnswerRequestDto, AskForSettingDto, ListRequestsQuery, RequestState, SettingRequestDto } from './dto/setting-request.dto';
 import { RequestAnsweredError } from './runs.errors';
 import { readsAllRuns, requestActions } from './runs.policy';
@@ -17,6 +18,7 @@ export class SettingRequestsService {
     private readonly unitOfWork: UnitOfWork,
     private readonly requests: SettingRequestsRepository,
     private readonly cautions: CautionsService,
+    private readonly shops: ShopsService,
     private readonly ledger: LedgerService,
   ) {}
 
@@ -36,6 +38,8 @@ export class SettingRequestsService {
   /** Nobody is asked to find a setting for what must never be marked. */
   async ask(actor: Actor, dto: AskForSettingDto): Promise<SettingRequestDto> {
     return this.unitOfWork.run(actor, async (tx) => {
+      if (dto.neededOn !== undefined && dto.neededOn < (await this.shops.today(tx, actor.shopId)))
+        throw new InvalidError('One field needs another look.', [{ pointer: '#/neededOn', detail: 'Enter today or a later day.' }]);
       const unknown = await this.requests.unknownSlots(tx, actor.shopId, dto);
       if (unknown.length > 0)
         throw new InvalidError(

@@ -7691,6 +7691,8 @@ export interface components {
             revisionNumber: number;
             /** @description What differs; everything else is the same */
             differs: components["schemas"]["DifferenceDto"][];
+            /** @description Typed words that are not found in it */
+            missingWords: string[];
             /** @description Why it can’t be carried over as it stands, in words */
             whyNot: string;
             /** @description Plate and cell that stand for it */
@@ -7699,6 +7701,8 @@ export interface components {
         FinderDto: {
             /** @description The slots of the sentence with their options */
             slots: components["schemas"]["SlotsDto"];
+            /** @description Approved recipes of the shop */
+            approvedCount: number;
             /** @description Approved recipes that fit */
             matchCount: number;
             /** @description The first of them, by code */
@@ -7709,7 +7713,7 @@ export interface components {
             isForbidden: boolean;
             /** @description The one approved setting; null: none, several, or forbidden */
             answer: components["schemas"]["FinderAnswerDto"] | null;
-            /** @description Recipes for exactly this that were withdrawn and have no approved revision */
+            /** @description Recipes for exactly this, or named by the address, that were withdrawn and have no approved revision */
             withdrawn: components["schemas"]["WithdrawnRecipeDto"][];
             /** @description Where nothing fits: what comes nearest */
             nearMisses: components["schemas"]["NearMissDto"][];
@@ -14120,7 +14124,7 @@ export interface operations {
                 finishId?: string;
                 /** @description Effect */
                 effectId?: string;
-                /** @description One recipe, where several are left that differ in scope only */
+                /** @description One recipe by id or code: a link to it, or one of several left that differ in scope only */
                 recipeId?: string;
                 /** @description Words that narrow all slots at once, such as “blk anod” */
                 words?: string;

@@ -139,6 +139,7 @@ export class DifferenceDto {
 
 export class NearMissDto extends FinderRecipeDto {
   @ApiProperty({ type: [DifferenceDto], description: 'What differs; everything else is the same' }) differs: DifferenceDto[];
+  @ApiProperty({ type: [String], description: 'Typed words that are not found in it' }) missingWords: string[];
   @ApiProperty({ description: 'Why it can’t be carried over as it stands, in words' }) whyNot: string;
   @ApiProperty({ type: ReferenceCellDto, nullable: true, description: 'Plate and cell that stand for it' })
   reference: ReferenceCellDto | null;
@@ -152,6 +153,7 @@ export class WithdrawnRecipeDto extends FinderRecipeDto {
 
 export class FinderDto {
   @ApiProperty({ type: SlotsDto, description: 'The slots of the sentence with their options' }) slots: SlotsDto;
+  @ApiProperty({ description: 'Approved recipes of the shop' }) approvedCount: number;
   @ApiProperty({ description: 'Approved recipes that fit' }) matchCount: number;
   @ApiProperty({ type: [FinderRecipeDto], description: 'The first of them, by code' }) matches: FinderRecipeDto[];
   @ApiProperty({ type: [FinderCautionDto], description: 'Cautions of the chosen or answered work, never first' })
@@ -159,7 +161,10 @@ export class FinderDto {
   @ApiProperty({ description: 'true: a caution says never' }) isForbidden: boolean;
   @ApiProperty({ type: FinderAnswerDto, nullable: true, description: 'The one approved setting; null: none, several, or forbidden' })
   answer: FinderAnswerDto | null;
-  @ApiProperty({ type: [WithdrawnRecipeDto], description: 'Recipes for exactly this that were withdrawn and have no approved revision' })
+  @ApiProperty({
+    type: [WithdrawnRecipeDto],
+    description: 'Recipes for exactly this, or named by the address, that were withdrawn and have no approved revision',
+  })
   withdrawn: WithdrawnRecipeDto[];
   @ApiProperty({ type: [NearMissDto], description: 'Where nothing fits: what comes nearest' }) nearMisses: NearMissDto[];
 }

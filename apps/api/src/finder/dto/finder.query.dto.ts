@@ -1,8 +1,9 @@
 import { ApiProperty, ApiPropertyOptional } from '@nestjs/swagger';
-import { IsOptional, IsUUID } from 'class-validator';
+import { IsOptional, IsUUID, Matches } from 'class-validator';
 import { RequiredText, TrimmedText } from '../../common/decorators/trimmed-text.decorator';
 
 const MAX_WORDS_LENGTH = 120;
+const RECIPE_KEY = /^(?:R-\d{1,9}|[0-9a-f]{8}(?:-[0-9a-f]{4}){3}-[0-9a-f]{12})$/iu;
 
 /** The sentence as far as it is filled in. */
 export class FinderQuery {
@@ -31,9 +32,9 @@ export class FinderQuery {
   @IsUUID('all', { message: 'This does not name an effect.' })
   effectId?: string;
 
-  @ApiPropertyOptional({ format: 'uuid', description: 'One recipe, where several are left that differ in scope only' })
+  @ApiPropertyOptional({ description: 'One recipe by id or code: a link to it, or one of several left that differ in scope only' })
   @IsOptional()
-  @IsUUID('all', { message: 'This does not name a recipe.' })
+  @Matches(RECIPE_KEY, { message: 'This does not name a recipe.' })
   recipeId?: string;
 
   @ApiPropertyOptional({ description: 'Words that narrow all slots at once, such as “blk anod”', maxLength: MAX_WORDS_LENGTH })

@@ -87,6 +87,6 @@ function said(by: string, words: string | undefined): string[] {
   return words === undefined || words.trim() === '' ? [] : [`${by} wrote: ${words}`];
 }
 
-function revisionAction({ recipeId, revisionId }: RevisionMail, links: MailLinks) {
-  return { label: 'Open the revision', url: links.revision(recipeId, revisionId) };
+function revisionAction({ recipeCode, revisionId }: RevisionMail, links: MailLinks) {
+  return { label: 'Open the revision', url: links.revision(recipeCode, revisionId) };
 }
