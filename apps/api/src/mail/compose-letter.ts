@@ -4,12 +4,13 @@ import type { MailLinks } from './mail-links';
 import { invitationLetter, passwordResetLetter } from './templates/account-letters';
 import { approvedLetter, badResultLetter, holdLetter, returnedLetter, submittedLetter, withdrawnLetter } from './templates/recipe-letters';
 
-export function composeLetter(mail: Mail, links: MailLinks): Letter {
+/** Times of the letter are those of the shop's clock. */
+export function composeLetter(mail: Mail, links: MailLinks, timeZone: string): Letter {
   switch (mail.kind) {
     case 'invitation':
-      return invitationLetter(mail.payload, links);
+      return invitationLetter(mail.payload, links, timeZone);
     case 'password-reset':
-      return passwordResetLetter(mail.payload, links);
+      return passwordResetLetter(mail.payload, links, timeZone);
     case 'revision-submitted':
       return submittedLetter(mail.payload, links);
     case 'revision-approved':

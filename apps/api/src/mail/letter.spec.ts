@@ -44,7 +44,7 @@ const MAILS: Mail[] = [
 ];
 
 describe.each(MAILS.map((mail) => [mail.kind, mail] as const))('the mail %s', (_, mail) => {
-  const written = writeMail(composeLetter(mail, links));
+  const written = writeMail(composeLetter(mail, links, 'Europe/Berlin'));
 
   it('has a subject of one line', () => {
     expect(written.subject).not.toMatch(/[\r\n]/);
@@ -65,7 +65,9 @@ describe.each(MAILS.map((mail) => [mail.kind, mail] as const))('the mail %s', (_
 
 describe('the mail of a withdrawal', () => {
   const textOf = (stayingNumber: number | null) =>
-    writeMail(composeLetter({ kind: 'revision-withdrawn', payload: { ...revision, reason: 'Brown rims', stayingNumber } }, links)).text;
+    writeMail(
+      composeLetter({ kind: 'revision-withdrawn', payload: { ...revision, reason: 'Brown rims', stayingNumber } }, links, 'Europe/Berlin'),
+    ).text;
 
   it('leads to the recipe by the code that people read', () => {
     expect(textOf(null)).toContain('https://proofs.example.invalid/recipes/R-0001/revisions/v%3F1');
@@ -98,4 +100,16 @@ describe('oneLine', () => {
     expect(oneLine('a\r\nb\u2028c\u0000d\u202ee')).toBe('a b c d e');
     expect(oneLine('x'.repeat(500))).toHaveLength(200);
   });
+});
+
+describe('a time in a letter', () => {
+  it.each(MAILS.filter(({ kind }) => kind === 'invitation' || kind === 'password-reset'))(
+    'is that of the shop’s clock, with the name of its zone: $kind',
+    (mail) => {
+      const inBerlin = writeMail(composeLetter(mail, links, 'Europe/Berlin')).text;
+      expect(inBerlin).toContain('until 2 January 2030 04:04 in the time zone Europe/Berlin.');
+      const inTokyo = writeMail(composeLetter(mail, links, 'Asia/Tokyo')).text;
+      expect(inTokyo).toContain('until 2 January 2030 12:04 in the time zone Asia/Tokyo.');
+    },
+  );
 });

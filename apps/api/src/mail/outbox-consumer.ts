@@ -25,16 +25,20 @@ export class OutboxConsumer {
   ) {}
 
   async send({ shopId, outboxId }: Job<'mail.send'>): Promise<void> {
-    const row = await this.unitOfWork.read({ shopId }, (tx) => this.repository.find(tx, shopId, outboxId));
+    const found = await this.unitOfWork.read({ shopId }, async (tx) => ({
+      row: await this.repository.find(tx, shopId, outboxId),
+      timeZone: await this.repository.timeZoneOf(tx, shopId),
+    }));
+    const { row, timeZone } = found;
     if (row?.state !== 'waiting') return;
-    const delivery = await this.deliver(row);
+    const delivery = await this.deliver(row, timeZone);
     await this.settle(row, delivery);
   }
 
-  private async deliver(row: OutboxRow): Promise<Delivery> {
+  private async deliver(row: OutboxRow, timeZone: string): Promise<Delivery> {
     // The row was written by OutboxService.add, which takes nothing but a Mail.
     const mail = { kind: row.kind, payload: row.payload } as unknown as Mail;
-    const letter = composeLetter(mail, mailLinks(this.env.PUBLIC_ORIGIN));
+    const letter = composeLetter(mail, mailLinks(this.env.PUBLIC_ORIGIN), timeZone);
     if (letter === undefined) return { outcome: 'never', reason: `There is no template for ${row.kind}.` };
     return this.mailer.deliver(row.id, mail.payload.to, letter);
   }

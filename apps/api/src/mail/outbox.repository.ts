@@ -2,7 +2,7 @@ import { Injectable } from '@nestjs/common';
 import { schema, type Tx } from '@proofplate/db';
 import { and, desc, eq, sql } from 'drizzle-orm';
 
-const { outbox } = schema;
+const { outbox, shop } = schema;
 
 export type OutboxRow = typeof outbox.$inferSelect;
 export type NewOutboxRow = { readonly shopId: string; readonly kind: string; readonly payload: Record<string, unknown> };
@@ -21,6 +21,11 @@ export class OutboxRepository {
   async find(tx: Tx, shopId: string, id: string): Promise<OutboxRow | undefined> {
     const [row] = await tx.select().from(outbox).where(isRow(shopId, id));
     return row;
+  }
+
+  async timeZoneOf(tx: Tx, shopId: string): Promise<string> {
+    const [row] = await tx.select({ timeZone: shop.timeZone }).from(shop).where(eq(shop.id, shopId));
+    return row?.timeZone ?? 'UTC';
   }
 
   async markSent(tx: Tx, shopId: string, id: string): Promise<void> {
