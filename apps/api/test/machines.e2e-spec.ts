@@ -1,6 +1,7 @@
 import { randomUUID } from 'node:crypto';
 import type { LedgerEventDto } from '../src/ledger/dto/ledger-event.dto';
 import type { MachineDto } from '../src/machines/dto/machine.dto';
+import type { MachineLensListDto } from '../src/machines/dto/machine-lens.dto';
 import type { MachineProfileDto } from '../src/machines/dto/machine-profile.dto';
 import { createTestApp, type TestApp } from './support/app';
 import { editing, fibreMachine, makeLens, makeMachine } from './support/equipment';
@@ -21,6 +22,13 @@ afterAll(() => test.close());
 const get = (url: string, headers: Record<string, string> = shop.operator.headers) => test.app.inject({ url, headers });
 const patch = (machine: MachineDto, payload: object, version = machine.version) =>
   test.app.inject({ method: 'PATCH', url: `/api/machines/${machine.id}`, headers: editing(shop.lead, version), payload });
+
+/** Lenses that the ledger says were put on the machine. */
+async function addedLenses(machineId: string) {
+  const { items } = (await get('/api/ledger?action=machine-lens.added&limit=100', shop.lead.headers)).json<{ items: LedgerEventDto[] }>();
+  const added = items.map(({ after }) => after as { machineId: string; lensId: string });
+  return added.filter((pair) => pair.machineId === machineId).map(({ lensId }) => lensId);
+}
 
 describe('an address with what is no id', () => {
   it.each(['machines', 'lenses', 'materials', 'finishes', 'effects', 'material-groups', 'photos'])(
@@ -45,6 +53,24 @@ describe('POST /api/machines', () => {
     expect(machine.profile.panel.fields.map(({ label }) => label)).toEqual(['POWER', 'SPEED', 'FREQ', 'LINE']);
     const events = (await get(`/api/ledger?subjectId=${machine.id}`, shop.lead.headers)).json<{ items: LedgerEventDto[] }>().items;
     expect(events).toMatchObject([{ action: 'machine.created', actorName: shop.lead.printedName }]);
+  });
+
+  it('puts the lens that is mounted on the machine, and writes that into the ledger', async () => {
+    const lens = await makeLens(test, shop.lead);
+    const machine = await makeMachine(test, shop.lead, { mountedLensId: lens.id });
+    const { items } = (await get(`/api/machines/${machine.id}/lenses`)).json<MachineLensListDto>();
+    expect(items).toMatchObject([{ lensId: lens.id, isMounted: true, workingDistanceMm: null, measuredSpotUm: null }]);
+    expect(await addedLenses(machine.id)).toEqual([lens.id]);
+  });
+
+  it('puts a lens on once, however often it is mounted', async () => {
+    const lens = await makeLens(test, shop.lead);
+    const created = await makeMachine(test, shop.lead);
+    const mounted = (await patch(created, { mountedLensId: lens.id })).json<MachineDto>();
+    const bare = (await patch(mounted, { mountedLensId: null })).json<MachineDto>();
+    await patch(bare, { mountedLensId: lens.id });
+    expect((await get(`/api/machines/${created.id}/lenses`)).json<MachineLensListDto>().items).toHaveLength(1);
+    expect(await addedLenses(created.id)).toEqual([lens.id]);
   });
 
   it('refuses a repeated name at its field', async () => {

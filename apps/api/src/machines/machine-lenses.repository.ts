@@ -9,6 +9,15 @@ export type MachineLensValues = Pick<
   MachineLensRow,
   'workingDistanceMm' | 'focusMethod' | 'measuredSpotUm' | 'spotMethod' | 'spotMeasuredOn'
 >;
+/** A lens on a machine of which nobody has said more yet. */
+export const NOTHING_KNOWN: MachineLensValues = {
+  workingDistanceMm: null,
+  focusMethod: '',
+  measuredSpotUm: null,
+  spotMethod: null,
+  spotMeasuredOn: null,
+};
+
 export type MachineLensView = {
   pair: MachineLensRow;
   lens: { id: string; name: string; focalLengthMm: number; fieldSizeMm: number };

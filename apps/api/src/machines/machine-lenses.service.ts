@@ -6,7 +6,13 @@ import { LedgerService } from '../ledger/ledger.service';
 import type { CreateMachineLensDto, MachineLensDto, MachineLensListDto, UpdateMachineLensDto } from './dto/machine-lens.dto';
 import type { SpotMeasurementListDto } from './dto/spot-measurement.dto';
 import { toMachineLensDto, toSpotMeasurementDtos } from './machine-lenses.mapper';
-import { MachineLensesRepository, type MachineLensRow, type MachineLensValues, type MachineLensView } from './machine-lenses.repository';
+import {
+  MachineLensesRepository,
+  type MachineLensRow,
+  type MachineLensValues,
+  type MachineLensView,
+  NOTHING_KNOWN,
+} from './machine-lenses.repository';
 import { MachineArchivedError } from './machines.errors';
 import { MachinesService } from './machines.service';
 import { type MeasuredSpot, SpotMeasurementsRepository } from './spot-measurements.repository';
@@ -111,14 +117,6 @@ export class MachineLensesService {
     await this.spots.insert(tx, { shopId, machineLensId, createdBy: memberId }, measured);
   }
 }
-
-const NOTHING_KNOWN: MachineLensValues = {
-  workingDistanceMm: null,
-  focusMethod: '',
-  measuredSpotUm: null,
-  spotMethod: null,
-  spotMeasuredOn: null,
-};
 
 const valuesOf = (row: MachineLensRow): MachineLensValues => {
   const { workingDistanceMm, focusMethod, measuredSpotUm, spotMethod, spotMeasuredOn } = row;

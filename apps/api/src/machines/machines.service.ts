@@ -10,6 +10,7 @@ import type { CreateMachineDto } from './dto/create-machine.dto';
 import type { MachineDto } from './dto/machine.dto';
 import type { MachineProfileListDto } from './dto/machine-profile.dto';
 import type { UpdateMachineDto } from './dto/update-machine.dto';
+import { MachineLensesRepository, NOTHING_KNOWN } from './machine-lenses.repository';
 import { MachineArchivedError, MachineNotFoundError } from './machines.errors';
 import { toMachineDto, toMachineProfileDto } from './machines.mapper';
 import { type MachineProfileRow, MachinesRepository, type MachineView } from './machines.repository';
@@ -21,6 +22,7 @@ export class MachinesService {
   constructor(
     private readonly unitOfWork: UnitOfWork,
     private readonly machines: MachinesRepository,
+    private readonly pairs: MachineLensesRepository,
     private readonly ledger: LedgerService,
   ) {}
 
@@ -68,6 +70,7 @@ export class MachinesService {
         subjectId: id,
         after: { ...values, ...parts },
       });
+      await this.putMountedOn(tx, actor, id, mountedLensId);
       return toMachineDto(await this.getMachineWithProfile(tx, actor.shopId, id), actor);
     });
   }
@@ -96,6 +99,7 @@ export class MachinesService {
       });
       const after = await this.getMachineWithProfile(tx, actor.shopId, id);
       await this.recordChange(tx, actor, before, after);
+      await this.putMountedOn(tx, actor, id, after.machine.mountedLensId);
       return toMachineDto(after, actor);
     });
   }
@@ -137,6 +141,14 @@ export class MachinesService {
   private async recordChange(tx: Tx, actor: Actor, before: MachineView, after: MachineView): Promise<void> {
     const entry = { actor, action: 'machine.changed', subjectType: 'machine', subjectId: after.machine.id };
     await this.ledger.record(tx, { ...entry, before: ledgerBody(before), after: ledgerBody(after) });
+  }
+
+  /** A lens that is mounted is on the machine; working distance and spot may be said later. */
+  private async putMountedOn(tx: Tx, actor: Actor, machineId: string, lensId: string | null): Promise<void> {
+    if (lensId === null || (await this.pairs.find(tx, actor.shopId, machineId, lensId)) !== undefined) return;
+    const pair = { machineId, lensId, ...NOTHING_KNOWN };
+    const id = await this.pairs.insert(tx, actor.shopId, actor.memberId, pair);
+    await this.ledger.record(tx, { actor, action: 'machine-lens.added', subjectType: 'machine-lens', subjectId: id, after: pair });
   }
 
   private async refuseTakenName(tx: Tx, shopId: string, name: string, exceptId?: string): Promise<void> {

@@ -52,6 +52,7 @@ export function MachineForm({ form, lenses, submitLabel, onSubmit }: MachineForm
         label="Lens that is mounted now"
         options={lenses.map(({ id, name }) => ({ value: id, label: name }))}
         placeholder="none, or not known"
+        help="Choosing it puts it on the machine; its working distance and spot are entered on the machine’s page."
         error={errors.mountedLensId?.message}
         {...form.register('mountedLensId')}
       />
