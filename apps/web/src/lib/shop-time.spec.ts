@@ -1,4 +1,4 @@
-import { instantInZone } from './shop-time';
+import { dayInZone, instantInZone } from './shop-time';
 
 describe('instantInZone', () => {
   // Offsets as the IANA time zone database gives them: London UTC+1 in May and UTC in January, Kathmandu UTC+5:45 all year.
@@ -19,4 +19,11 @@ describe('instantInZone', () => {
   it('gives nothing for what is no time', () => {
     expect(instantInZone('tomorrow', 'Europe/London')).toBeUndefined();
   });
+});
+
+it.each([
+  ['2026-05-14T22:30:00Z', 'Europe/Berlin', '2026-05-15'],
+  ['2026-05-14T02:30:00Z', 'America/New_York', '2026-05-13'],
+])('%s is a day of the calendar in %s: %s', (at, timeZone, day) => {
+  expect(dayInZone(new Date(at), timeZone)).toBe(day);
 });

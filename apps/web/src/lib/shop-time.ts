@@ -17,3 +17,10 @@ function offsetMs(atMs: number, timeZone: string): number {
   const shownMs = Date.UTC(value('year'), value('month') - 1, value('day'), value('hour'), value('minute'), value('second'));
   return shownMs - Math.floor(atMs / 1000) * 1000;
 }
+
+/** The day on a zone's calendar, "2026-05-14". */
+export function dayInZone(at: Date, timeZone: string): string {
+  const parts = new Intl.DateTimeFormat('en-GB', { timeZone, year: 'numeric', month: '2-digit', day: '2-digit' }).formatToParts(at);
+  const value = (type: Intl.DateTimeFormatPartTypes) => parts.find((part) => part.type === type)?.value ?? '';
+  return `${value('year')}-${value('month')}-${value('day')}`;
+}

@@ -192,6 +192,7 @@ describe('without one answer', () => {
     code: 'R-0047',
     title: 'Titanium grade 2, blue',
     differs: [{ slot: 'machine', has: 'Bench 2', wanted: 'Bench 1' }],
+    missingWords: [] as string[],
     whyNot: 'It needs a pulse width of 30 ns.',
   };
 
@@ -218,20 +219,64 @@ describe('without one answer', () => {
     );
   });
 
+  const gone = {
+    ...{ ...KEYS, recipeId: 'r', code: 'R-0040', title: 'Bright', revisionNumber: 2 },
+    ...{ by: 'Hanne Voss', at: '2026-05-14T08:00:00Z', reason: 'It wipes off' },
+  };
+
   it('says at once that a recipe was withdrawn', async () => {
-    const gone = {
-      ...KEYS,
-      recipeId: 'r',
-      code: 'R-0040',
-      title: 'Bright',
-      revisionNumber: 2,
-      by: 'Hanne Voss',
-      at: '2026-05-14T08:00:00Z',
-      reason: 'It wipes off',
-    };
     openPage(makeFinderResult({ matchCount: 0, withdrawn: [gone] }), '/machine?material=black');
     expect(await screen.findByRole('heading', { name: 'R-0040 Bright was withdrawn' })).toBeVisible();
     expect(screen.getByText('It wipes off')).toBeVisible();
+  });
+
+  it('says so to whoever comes by a link, and leads on to another setting for the same part', async () => {
+    const { user, router } = openPage(makeFinderResult({ withdrawn: [gone] }), '/machine?recipe=R-0040');
+    expect(await screen.findByRole('heading', { name: 'R-0040 Bright was withdrawn' })).toBeVisible();
+    expect(screen.getByText(/withdrawn by Hanne Voss/)).toBeVisible();
+    expect(screen.getByText('No approved recipe')).toBeVisible();
+    await user.click(screen.getByRole('button', { name: 'Look for another setting' }));
+    await waitFor(() =>
+      expect(Object.fromEntries(new URLSearchParams(router.state.location.search))).toEqual({
+        ...{ machine: 'bench2', lens: 'f160', material: 'black', finish: 'satin', effect: 'white' },
+      }),
+    );
+  });
+
+  it('never says that nothing is approved yet where only this place has nothing', async () => {
+    openPage(makeFinderResult({ matchCount: 0, withdrawn: [gone] }), '/machine?machine=bench2');
+    expect(await screen.findByRole('heading', { name: 'R-0040 Bright was withdrawn' })).toBeVisible();
+    expect(screen.getByText(/No recipe is approved for what is chosen so far/)).toBeVisible();
+    expect(screen.queryByText(/approved yet/)).toBeNull();
+  });
+
+  it('offers the nearest and asks, where typed words lead to nothing', async () => {
+    const miss = { ...near, differs: [], missingWords: ['purple'], whyNot: '' };
+    const { user } = openPage(makeFinderResult({ matchCount: 0, nearMisses: [miss] }), '/machine?words=titanium%20purple', {
+      'POST /api/setting-requests': () => ({ status: 201, body: {} }),
+    });
+    expect(await screen.findByRole('heading', { name: 'No approved recipe has all of “titanium purple”' })).toBeVisible();
+    const table = screen.getByRole('table', { name: 'Nearest approved recipes' });
+    expect(within(table).getByText('not “purple”')).toBeVisible();
+    expect(within(table).queryByText('same')).toBeNull();
+    expect(within(table).getByRole('button', { name: 'Show setting: R-0047' })).toBeVisible();
+    await user.click(screen.getByRole('button', { name: 'Ask for this setting' }));
+    expect(screen.getByText('Choose what is marked', { selector: 'p, span, a' })).toBeVisible();
+    await user.selectOptions(screen.getByLabelText('Material'), 'black');
+    await user.click(screen.getByRole('button', { name: 'Ask for this setting' }));
+    await waitFor(() =>
+      expect(server.bodies('POST /api/setting-requests')).toEqual([
+        { materialId: 'black', jobReference: '', note: 'Looked for “titanium purple”.' },
+      ]),
+    );
+  });
+
+  it('refuses a day that is past at its field', async () => {
+    const { user } = openPage(makeFinderResult({ matchCount: 0 }), '/machine?material=black');
+    await user.type(await screen.findByLabelText(/^Needed by/), '2020-01-01');
+    await user.click(screen.getByRole('button', { name: 'Ask for this setting' }));
+    expect((await screen.findAllByText('Enter today or a later day.')).length).toBeGreaterThan(0);
+    expect(server.requests.filter(({ method }) => method === 'POST')).toEqual([]);
   });
 
   it('offers what is left while several fit', async () => {
@@ -242,6 +287,30 @@ describe('without one answer', () => {
     );
     await user.click(await screen.findByRole('button', { name: /R-0032 Dial, thick/ }));
     await waitFor(() => expect(new URLSearchParams(router.state.location.search).get('recipe')).toBe('r2'));
+  });
+});
+
+describe('a shop without an approved recipe', () => {
+  const empty = makeFinderResult({ approvedCount: 0, matchCount: 0 });
+
+  it.each(['operator', 'lead', 'owner'] as const)('tells the %s what comes first, with links and what is there already', async (role) => {
+    openSession(makeSessionAnswer(role));
+    openPage(empty);
+    const steps = within(await screen.findByRole('list')).getAllByRole('listitem');
+    expect(steps.map((step) => within(step).getByRole('link').getAttribute('href'))).toEqual([
+      '/equipment',
+      '/materials',
+      '/coupons',
+      '/recipes',
+    ]);
+    expect(steps.map((step) => step.textContent?.includes('in the shop'))).toEqual([true, true, false, false]);
+    expect(screen.queryByRole('searchbox')).toBeNull();
+  });
+
+  it('gives a trainee no way that ends at a closed door', async () => {
+    openPage(empty);
+    expect(await screen.findByRole('heading', { name: 'No recipe is approved yet' })).toBeVisible();
+    expect(screen.queryByRole('link')).toBeNull();
   });
 });
 

@@ -3,7 +3,7 @@ import { Page } from '../components/page';
 import { WaitingCoupons } from '../features/coupons/mark/waiting-coupons';
 import { GrantDeviationButton } from '../features/deviations/forms/grant-deviation';
 import { Finder } from '../features/finder/components/finder';
-import type { Choice, FinderAnswer } from '../features/finder/finder.api';
+import type { Choice, FinderAnswer, FinderResult } from '../features/finder/finder.api';
 import { Holds, PlaceHoldButton } from '../features/holds/components/holds';
 import { PartTime } from '../features/marking-time/components/part-time';
 import { AskForm } from '../features/requests/forms/ask-form';
@@ -18,7 +18,7 @@ export function Component() {
         holds={(answer) => <AnswerHolds answer={answer} />}
         leadActs={(answer) => <LeadActs answer={answer} />}
         time={(answer) => <PartTime revisionId={answer.revisionId} />}
-        ask={(choice) => <Ask choice={choice} />}
+        ask={(choice, result) => <Ask choice={choice} result={result} />}
       />
       {machineId !== null && member.role !== 'trainee' && <WaitingCoupons machineId={machineId} />}
     </Page>
@@ -41,17 +41,18 @@ function LeadActs({ answer }: { answer: FinderAnswer }) {
 
 const subjectsOf = ({ recipeId, code, title, machine }: FinderAnswer) => ({ recipe: { id: recipeId, code, title }, machine });
 
-function Ask({ choice: { machine, lens, material, finish, effect } }: { choice: Choice }) {
-  if (material === undefined) return null;
+function Ask({ choice: { machine, lens, material, finish, effect, words }, result }: { choice: Choice; result: FinderResult }) {
   return (
     <AskForm
       asked={{
-        materialId: material,
+        ...(material === undefined ? {} : { materialId: material }),
         ...(machine === undefined ? {} : { machineId: machine }),
         ...(lens === undefined ? {} : { lensId: lens }),
         ...(finish === undefined ? {} : { finishId: finish }),
         ...(effect === undefined ? {} : { effectId: effect }),
       }}
+      materials={result.slots.material.options}
+      words={words ?? ''}
     />
   );
 }

@@ -85,6 +85,7 @@ export const makeFinderResult = (rest: object = {}) => ({
     finish: makeSlot([KEYS.finish]),
     effect: makeSlot([KEYS.effect]),
   },
+  approvedCount: 57,
   matchCount: 57,
   matches: [],
   cautions: [],

@@ -45,6 +45,8 @@ export function useSentence() {
       change(words === '' ? rest : { ...rest, words }, { replace: true });
     },
     show: (recipe: FinderRecipe) => change({ ...keysOf(recipe), recipe: recipe.recipeId }),
+    /** The same part without that recipe: what comes nearest, and the request for a setting. */
+    lookFor: (recipe: FinderRecipe) => change(keysOf(recipe)),
     startOver: () => change(placeOf(choice)),
   };
 }

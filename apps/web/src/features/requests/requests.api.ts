@@ -6,7 +6,7 @@ import { revalidate, useRead } from '../../lib/swr';
 type Schemas = components['schemas'];
 export type SettingRequest = Schemas['SettingRequestDto'];
 type RequestPage = Schemas['SettingRequestPageDto'];
-export type AskedSetting = { machineId?: string; lensId?: string; materialId: string; finishId?: string; effectId?: string };
+export type AskedSetting = { machineId?: string; lensId?: string; materialId?: string; finishId?: string; effectId?: string };
 export type RequestState = SettingRequest['state'];
 
 const REQUESTS = '/api/setting-requests';
@@ -17,7 +17,7 @@ export function useRequests(state: RequestState): SWRResponse<RequestPage, Probl
 }
 
 export async function askForSetting(
-  body: AskedSetting & { jobReference: string; neededOn?: string; note: string },
+  body: AskedSetting & { materialId: string; jobReference: string; neededOn?: string; note: string },
   idempotencyKey: string,
 ): Promise<void> {
   await request<SettingRequest>('post', REQUESTS, { body, idempotencyKey });

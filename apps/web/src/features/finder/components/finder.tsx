@@ -4,14 +4,10 @@ import { ReadProblem } from '../../../components/read-problem';
 import { SkeletonBlock } from '../../../components/skeletons';
 import { formatCount } from '../../../lib/format';
 import type { Choice, FinderAnswer, FinderResult } from '../finder.api';
-import { isPartNamed } from '../sentence';
 import { useSentence } from '../use-sentence';
-import { Answer } from './answer';
-import { Cautions } from './cautions';
-import { ChooseRecipe } from './choose-recipe';
 import { FinderSentence } from './finder-sentence';
-import { NearMisses } from './near-misses';
-import { AnswerNotices, Forbidden, Withdrawn } from './notices';
+import { FirstSteps } from './first-steps';
+import { Outcome } from './outcome';
 import { WordsField } from './words-field';
 
 export type FinderProps = {
@@ -22,12 +18,12 @@ export type FinderProps = {
   /** How long a part takes with the setting that is shown. */
   time: (answer: FinderAnswer) => ReactNode;
   /** Asks for the setting of the sentence. */
-  ask: (choice: Choice) => ReactNode;
+  ask: (choice: Choice, result: FinderResult) => ReactNode;
 };
 
 /** The sentence and what it leads to. The reading order is the order of safety: job, holds, cautions, setting, mark, set-up, signature, acts. */
 export function Finder({ holds, leadActs, time, ask }: FinderProps) {
-  const { choice, finder, choose, setWords, show, startOver } = useSentence();
+  const { choice, finder, choose, setWords, show, lookFor, startOver } = useSentence();
   const { data, error, isLoading, mutate } = finder;
   if (data === undefined) {
     const isGone = error?.status === 404;
@@ -37,6 +33,7 @@ export function Finder({ holds, leadActs, time, ask }: FinderProps) {
       <ReadProblem problem={error} thing="the finder" onRetry={() => void mutate()} />
     );
   }
+  if (data.approvedCount === 0 && data.withdrawn.length === 0) return <FirstSteps result={data} />;
   return (
     <chakra.div display="grid" gap={{ base: '3', sm: '4' }} gridTemplateColumns="minmax(0, 1fr)">
       <FinderSentence
@@ -49,7 +46,7 @@ export function Finder({ holds, leadActs, time, ask }: FinderProps) {
             <Flex align="center" gap={{ base: '3', sm: '4' }} wrap="wrap" justify="flex-end" ml="auto">
               {!isLoading && data.answer !== null && leadActs(data.answer)}
               <chakra.b role="status" whiteSpace="nowrap">
-                {isLoading ? 'Looking' : countWords(data)}
+                {isLoading ? 'Looking' : countWords(data, choice)}
               </chakra.b>
               <StartOver onClick={startOver} />
             </Flex>
@@ -65,84 +62,12 @@ export function Finder({ holds, leadActs, time, ask }: FinderProps) {
           choice={choice}
           holds={data.answer === null ? null : holds(data.answer)}
           time={data.answer === null ? null : time(data.answer)}
-          ask={ask(choice)}
+          ask={ask(choice, data)}
           onShow={show}
+          onLookFor={lookFor}
         />
       )}
     </chakra.div>
-  );
-}
-
-type OutcomeProps = {
-  result: FinderResult;
-  choice: Choice;
-  holds: ReactNode;
-  time: ReactNode;
-  ask: ReactNode;
-  onShow: ReturnType<typeof useSentence>['show'];
-};
-
-function Outcome({ result, choice, holds, time, ask, onShow }: OutcomeProps) {
-  const { answer, cautions, isForbidden, matches, matchCount, withdrawn } = result;
-  if (isForbidden) return <Forbidden cautions={cautions} />;
-  if (answer !== null)
-    return (
-      <>
-        {holds}
-        <AnswerNotices answer={answer} />
-        <Cautions cautions={cautions} answer={answer} />
-        <Answer key={answer.revisionId} answer={answer} time={time} />
-      </>
-    );
-  if (!isPartNamed(choice)) return <Begin count={matchCount} />;
-  return (
-    <>
-      <Withdrawn recipes={withdrawn} />
-      {matchCount > 0 ? (
-        <ChooseRecipe recipes={matches} count={matchCount} onShow={onShow} />
-      ) : (
-        <None result={result} choice={choice} ask={ask} onShow={onShow} />
-      )}
-    </>
-  );
-}
-
-function None({ result: { nearMisses }, choice, ask, onShow }: Pick<OutcomeProps, 'result' | 'choice' | 'ask' | 'onShow'>) {
-  if (choice.material === undefined)
-    return (
-      <section>
-        <chakra.h2 fontSize="2xl" lineHeight="title">
-          Nothing approved is called “{choice.words}”
-        </chakra.h2>
-        <chakra.p color="fg.muted">Take a word away, or choose the material in the sentence.</chakra.p>
-      </section>
-    );
-  return (
-    <>
-      <div>
-        <chakra.h2 fontSize="3xl" lineHeight="title">
-          No approved recipe for this yet
-        </chakra.h2>
-        <chakra.p color="fg.muted">
-          Do not try a setting on a customer’s part.{' '}
-          {nearMisses.length > 0 ? 'These approved recipes come nearest; what differs is named.' : 'Nothing approved comes near it.'}
-        </chakra.p>
-      </div>
-      <div>
-        <NearMisses misses={nearMisses} onShow={onShow} />
-      </div>
-      {ask}
-    </>
-  );
-}
-
-function Begin({ count }: { count: number }) {
-  return (
-    <chakra.p color="fg.muted" fontSize="lg">
-      {count === 0
-        ? 'No recipe is approved yet. As soon as a lead has signed one, it is found here.'
-        : 'Choose the material, type a few letters of it, or scan the code of a set-up sheet. The one approved setting comes up by itself.'}
-    </chakra.p>
   );
 }
 
@@ -165,7 +90,7 @@ function StartOver({ onClick }: { onClick: () => void }) {
   );
 }
 
-function countWords({ isForbidden, matchCount }: FinderResult): string {
+function countWords({ isForbidden, matchCount, answer }: FinderResult, { recipe }: Choice): string {
   if (isForbidden) return 'Must not be marked';
-  return matchCount === 0 ? 'No approved recipe' : formatCount(matchCount, 'approved recipe');
+  return matchCount === 0 || (recipe !== undefined && answer === null) ? 'No approved recipe' : formatCount(matchCount, 'approved recipe');
 }

@@ -50,7 +50,7 @@ export function NearMisses({ misses, onShow }: NearMissesProps) {
 
 function MissRow({ miss, isFirst, onShow }: { miss: NearMiss; isFirst: boolean; onShow: NearMissesProps['onShow'] }) {
   const mayDraft = roleAtLeast(useSession().member.role, 'operator');
-  const isElsewhereOnly = miss.differs.every(({ slot }) => slot === 'machine' || slot === 'lens');
+  const isElsewhereOnly = miss.missingWords.length === 0 && miss.differs.every(({ slot }) => slot === 'machine' || slot === 'lens');
   const act = isElsewhereOnly && miss.differs.some(({ slot }) => slot === 'machine') ? `Mark it on ${miss.machine.name}` : 'Show setting';
   return (
     <chakra.div
@@ -77,6 +77,11 @@ function MissRow({ miss, isFirst, onShow }: { miss: NearMiss; isFirst: boolean; 
         <chakra.span display={{ base: 'inline', lg: 'block' }} ml={{ base: '1.5', lg: '0' }}>
           {miss.title}
         </chakra.span>
+        {miss.missingWords.length > 0 && (
+          <chakra.b display="block" color="straw.fg">
+            not {miss.missingWords.map((word) => `“${word}”`).join(', ')}
+          </chakra.b>
+        )}
       </chakra.span>
       {SLOTS.map((slot) => (
         <SlotCell key={slot} slot={slot} miss={miss} />
@@ -114,6 +119,13 @@ function MissRow({ miss, isFirst, onShow }: { miss: NearMiss; isFirst: boolean; 
 
 function SlotCell({ slot, miss }: { slot: SlotKey; miss: NearMiss }) {
   const difference = miss.differs.find((one) => one.slot === slot);
+  if (difference === undefined && miss.missingWords.length > 0)
+    // Words were typed, so the sentence asks for nothing that this could be the same as.
+    return (
+      <chakra.span role="cell" display={{ base: 'none', lg: 'block' }} color="fg.muted" overflowWrap="anywhere">
+        {inSentence(slot, miss[slot].name)}
+      </chakra.span>
+    );
   if (difference === undefined)
     return (
       <chakra.span role="cell" display={{ base: 'none', lg: 'inline-flex' }} alignItems="center" gap="2" color="fg.muted">

@@ -1,5 +1,6 @@
 import { chakra } from '@chakra-ui/react';
 import type { ReactNode } from 'react';
+import { Button } from '../../../components/button';
 import { StateShape } from '../../../components/state-mark';
 import { formatTime } from '../../../lib/format';
 import { shiftWords } from '../../../lib/power-shift-words';
@@ -25,19 +26,26 @@ export function Forbidden({ cautions }: { cautions: readonly FinderCaution[] }) 
   );
 }
 
-export function Withdrawn({ recipes }: { recipes: readonly WithdrawnRecipe[] }) {
+export type WithdrawnProps = { recipes: readonly WithdrawnRecipe[]; onLookFor?: (recipe: WithdrawnRecipe) => void };
+
+export function Withdrawn({ recipes, onLookFor }: WithdrawnProps) {
   const { shop } = useSession();
   return (
     <>
-      {recipes.map(({ recipeId, code, title, revisionNumber, by, at, reason }) => (
-        <Stop key={recipeId} title={`${code} ${title} was withdrawn`}>
-          {reason !== '' && <p>{reason}</p>}
+      {recipes.map((recipe) => (
+        <Stop key={recipe.recipeId} title={`${recipe.code} ${recipe.title} was withdrawn`}>
+          {recipe.reason !== '' && <p>{recipe.reason}</p>}
           <p>Do not mark with it any more, also not from paper or memory.</p>
           <chakra.p fontSize="sm" color="fg.muted">
-            Revision {revisionNumber}
-            {by === null ? '' : `, withdrawn by ${by}`}
-            {at === null ? '' : `, ${formatTime(at, shop.timeZone)}`}
+            Revision {recipe.revisionNumber}
+            {recipe.by === null ? '' : `, withdrawn by ${recipe.by}`}
+            {recipe.at === null ? '' : `, ${formatTime(recipe.at, shop.timeZone)}`}
           </chakra.p>
+          {onLookFor !== undefined && (
+            <Button size="glove" mt="3" onClick={() => onLookFor(recipe)}>
+              Look for another setting
+            </Button>
+          )}
         </Stop>
       ))}
     </>
