@@ -54,6 +54,29 @@ describe('the page that opens a shop', () => {
     expect(server.requests).toEqual([]);
   });
 
+  it('names a blank name and a text that is too long in the same answer as the rest, without asking the server', async () => {
+    server = fakeServer({});
+    const { user } = await openPage();
+    await user.click(screen.getByLabelText('Name of the shop'));
+    await user.paste('x'.repeat(121));
+    await user.type(screen.getByLabelText('Your name'), '   ');
+    await user.click(screen.getByLabelText('Password'));
+    await user.paste('long password '.repeat(10));
+    await user.click(screen.getByRole('button', { name: 'Open the shop' }));
+    const summary = await screen.findByRole('alert', { name: '4 entries need a change' });
+    expect(
+      within(summary)
+        .getAllByRole('link')
+        .map(({ textContent }) => textContent),
+    ).toEqual([
+      'Name of the shop: Use at most 120 characters; these are 121.',
+      'Your name: Enter your name as it shall stand under what you sign',
+      'E-mail: Enter the e-mail address you sign in with',
+      'Password: Use at most 128 characters',
+    ]);
+    expect(server.requests).toEqual([]);
+  });
+
   it('leads from the summary to the field', async () => {
     server = fakeServer({});
     const { user } = await openPage();

@@ -5,6 +5,7 @@ import { Form, useSummaryForm } from '../../../components/form';
 import { PasswordField } from '../../../components/password-field';
 import type { UnitSystem } from '../../../lib/session';
 import { NUMBER_STYLE_OPTIONS, UNIT_SYSTEM_OPTIONS, zoneOptions } from '../../../lib/shop-options';
+import { LONGEST_NAME, textRules } from '../../../lib/text-rules';
 import { deviceTimeZone } from '../../../lib/time-zones';
 import { signUp } from '../auth.api';
 import { emailRules, nameRules, newPasswordRules, PASSWORD_HELP } from './credentials';
@@ -38,7 +39,7 @@ export function SignUpForm() {
         label={LABELS.shopName}
         autoComplete="organization"
         error={errors.shopName?.message}
-        {...form.register('shopName', { required: 'Enter the name that stands on set-up sheets' })}
+        {...form.register('shopName', textRules('Enter the name that stands on set-up sheets', LONGEST_NAME))}
       />
       <TextField
         label={LABELS.name}

@@ -6,6 +6,7 @@ import { Form, useSummaryForm } from '../../../components/form';
 import { useStatusLine } from '../../../components/status-line';
 import { useSession } from '../../../lib/session';
 import { instantInZone } from '../../../lib/shop-time';
+import { textRules } from '../../../lib/text-rules';
 import { grantDeviation } from '../deviations.api';
 
 const LABELS = { description: 'What may differ', reason: 'Why', endsAt: 'Ends at', maximumQuantity: 'Ends after' };
@@ -51,13 +52,13 @@ function GrantDeviationDialog({ from: { revisionId, name }, onClose }: { from: D
           label={LABELS.description}
           help="The field of the panel or the step, and from where to where."
           error={errors.description?.message}
-          {...form.register('description', { required: 'Say what may differ and by how much' })}
+          {...form.register('description', textRules('Say what may differ and by how much', 1000))}
         />
         <TextAreaField
           label={LABELS.reason}
           rows={2}
           error={errors.reason?.message}
-          {...form.register('reason', { required: 'Say why' })}
+          {...form.register('reason', textRules('Say why', 1000))}
         />
         <TextField
           label={LABELS.endsAt}

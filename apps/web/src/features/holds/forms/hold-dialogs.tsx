@@ -5,6 +5,7 @@ import { TextAreaField } from '../../../components/field';
 import { Form, useSummaryForm } from '../../../components/form';
 import { Segmented } from '../../../components/segmented';
 import { useStatusLine } from '../../../components/status-line';
+import { textRules } from '../../../lib/text-rules';
 import { type HoldSubjects, type OpenHold, placeHold, releaseHold, subjectName } from '../holds.api';
 
 const LABELS = { reason: 'Reason' };
@@ -46,7 +47,7 @@ export function PlaceHoldDialog({ subjects, onClose }: { subjects: HoldSubjects;
           label={LABELS.reason}
           help="Whoever stands at the machine reads it first. No run starts until a lead releases the hold."
           error={errors.reason?.message}
-          {...form.register('reason', { required: 'Say why: it is the first thing that is read at the machine' })}
+          {...form.register('reason', textRules('Say why: it is the first thing that is read at the machine', 1000))}
         />
         <Button type="submit" kind="danger" size="glove" isBusy={isSubmitting}>
           Put {kind === 'recipe' ? recipe?.code : name} on hold
@@ -75,7 +76,7 @@ export function ReleaseHoldDialog({ hold, onClose }: { hold: OpenHold; onClose: 
           label={LABELS.reason}
           help="What was found, and why it may be used again. It is kept in the ledger."
           error={errors.reason?.message}
-          {...form.register('reason', { required: 'Say what was found and why it may be used again' })}
+          {...form.register('reason', textRules('Say what was found and why it may be used again', 1000))}
         />
         <Button type="submit" kind="primary" size="glove" isBusy={isSubmitting}>
           Release the hold

@@ -1,4 +1,4 @@
-import type { UseFormReturn } from 'react-hook-form';
+import { type UseFormReturn, useWatch } from 'react-hook-form';
 import { Button } from '../../../components/button';
 import { NumberField, SelectField, TextField } from '../../../components/field';
 import { Form, useSummaryForm } from '../../../components/form';
@@ -73,6 +73,7 @@ export function ChangeMachineLensForm({ pair, onDone }: { pair: MachineLens; onD
 function PairFields({ form }: { form: UseFormReturn<Values> }) {
   const { locale } = useSession().shop;
   const { errors } = form.formState;
+  const isSpotTyped = useWatch({ control: form.control, name: 'measuredSpotUm' }).trim() !== '';
   const isMeasured = () => form.getValues('measuredSpotUm').trim() !== '';
   const spotMessage = (text: string) => {
     const hasRest = form.getValues('spotMethod').trim() !== '' || form.getValues('spotMeasuredOn') !== '';
@@ -106,15 +107,16 @@ function PairFields({ form }: { form: UseFormReturn<Values> }) {
       />
       <TextField
         label={LABELS.spotMethod}
-        isOptional
-        help="Such as knife edge, or crater widths."
+        isOptional={!isSpotTyped}
+        help={isSpotTyped ? 'Needed with a measured spot. Such as knife edge, or crater widths.' : 'Such as knife edge, or crater widths.'}
         error={errors.spotMethod?.message}
         {...form.register('spotMethod', { validate: (text) => !isMeasured() || text.trim() !== '' || 'Say how the spot was measured.' })}
       />
       <TextField
         type="date"
         label={LABELS.spotMeasuredOn}
-        isOptional
+        isOptional={!isSpotTyped}
+        help={isSpotTyped ? 'Needed with a measured spot.' : undefined}
         error={errors.spotMeasuredOn?.message}
         {...form.register('spotMeasuredOn', {
           validate: (day) => !isMeasured() || day !== '' || 'Say on which day the spot was measured.',

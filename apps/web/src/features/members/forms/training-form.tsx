@@ -1,6 +1,7 @@
 import { Button } from '../../../components/button';
 import { TextField } from '../../../components/field';
 import { Form, useSummaryForm } from '../../../components/form';
+import { textRules } from '../../../lib/text-rules';
 import { addTraining, type Member } from '../members.api';
 
 const LABELS = { subject: 'What was taught', taughtBy: 'Who taught it', taughtOn: 'When', expiresOn: 'Counts until' };
@@ -19,12 +20,12 @@ export function TrainingForm({ member, onAdded }: { member: Member; onAdded: (su
         label={LABELS.subject}
         help="Laser safety, the rotary device, fire watch: as your shop calls it."
         error={errors.subject?.message}
-        {...form.register('subject', { required: 'Say what was taught' })}
+        {...form.register('subject', textRules('Say what was taught', 200))}
       />
       <TextField
         label={LABELS.taughtBy}
         error={errors.taughtBy?.message}
-        {...form.register('taughtBy', { required: 'Say who taught it' })}
+        {...form.register('taughtBy', textRules('Say who taught it', 120))}
       />
       <TextField
         label={LABELS.taughtOn}

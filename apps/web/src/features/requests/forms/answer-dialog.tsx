@@ -3,6 +3,7 @@ import { Dialog } from '../../../components/dialog';
 import { SelectField, TextAreaField } from '../../../components/field';
 import { Form, useSummaryForm } from '../../../components/form';
 import { useStatusLine } from '../../../components/status-line';
+import { textRules } from '../../../lib/text-rules';
 import { answerRequest, type SettingRequest } from '../requests.api';
 
 const LABELS = { state: 'What became of it', answer: 'Answer' };
@@ -32,7 +33,7 @@ export function AnswerDialog({ request, onClose }: { request: SettingRequest; on
           label={LABELS.answer}
           help="The code of the recipe, or why there will be none."
           error={errors.answer?.message}
-          {...form.register('answer', { required: 'Say what became of it' })}
+          {...form.register('answer', textRules('Say what became of it', 1000))}
         />
         <Button type="submit" kind="primary" size="touch" isBusy={isSubmitting}>
           Answer {request.askedBy}

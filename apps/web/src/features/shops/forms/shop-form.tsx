@@ -3,6 +3,7 @@ import { SelectField, TextField } from '../../../components/field';
 import { Form, useSummaryForm } from '../../../components/form';
 import { useStatusLine } from '../../../components/status-line';
 import { NUMBER_STYLE_OPTIONS, UNIT_SYSTEM_OPTIONS, withOwnValue, zoneOptions } from '../../../lib/shop-options';
+import { LONGEST_NAME, textRules } from '../../../lib/text-rules';
 import { changeShop, type Shop } from '../shops.api';
 
 const LABELS = { name: 'Name of the shop', unitSystem: 'Units', locale: 'Numbers are written', timeZone: 'Time zone' };
@@ -23,7 +24,7 @@ export function ShopForm({ shop }: { shop: Shop }) {
         label={LABELS.name}
         help="Stands on every set-up sheet."
         error={errors.name?.message}
-        {...form.register('name', { required: 'Enter the name that stands on set-up sheets' })}
+        {...form.register('name', textRules('Enter the name that stands on set-up sheets', LONGEST_NAME))}
       />
       <SelectField
         label={LABELS.unitSystem}

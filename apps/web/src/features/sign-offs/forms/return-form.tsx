@@ -2,6 +2,7 @@ import { Button } from '../../../components/button';
 import { Dialog } from '../../../components/dialog';
 import { TextAreaField } from '../../../components/field';
 import { Form, useSummaryForm } from '../../../components/form';
+import { textRules } from '../../../lib/text-rules';
 import { type Revision, returnRevision } from '../sign-offs.api';
 import { explainSigning, signedAct, unansweredSigning } from '../signing-problem';
 
@@ -30,7 +31,7 @@ export function ReturnDialog({ revision, onClose, onReturned }: ReturnDialogProp
           label={LABELS.comment}
           help={`${revision.author.name} gets these words by mail and starts a new draft from this revision.`}
           error={errors.comment?.message}
-          {...form.register('comment', { required: 'Say what the author should do.' })}
+          {...form.register('comment', textRules('Say what the author should do.', 2000))}
         />
         <Button type="submit" kind="primary" size="touch" isBusy={isSubmitting}>
           {act}

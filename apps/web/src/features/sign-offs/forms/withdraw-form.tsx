@@ -4,6 +4,7 @@ import { Dialog } from '../../../components/dialog';
 import { TextAreaField } from '../../../components/field';
 import { Form, useSummaryForm } from '../../../components/form';
 import { PasswordField } from '../../../components/password-field';
+import { textRules } from '../../../lib/text-rules';
 import { withdrawRevision } from '../sign-offs.api';
 import { explainSigning, signedAct, unansweredSigning } from '../signing-problem';
 
@@ -42,7 +43,7 @@ export function WithdrawDialog({ revision, recipeCode, onClose, onWithdrawn }: W
         <TextAreaField
           label={LABELS.reason}
           error={errors.reason?.message}
-          {...form.register('reason', { required: 'Say why it must not be used any more.' })}
+          {...form.register('reason', textRules('Say why it must not be used any more.', 2000))}
         />
         <PasswordField
           label={LABELS.password}
