@@ -2,9 +2,11 @@
 import { spawnSync } from 'node:child_process';
 import { existsSync, readFileSync } from 'node:fs';
 import { join } from 'node:path';
+import { fileURLToPath } from 'node:url';
 import { ensurePostgres, installDebianPackages } from '../../../../db/postgres/binaries.mjs';
 import { CHECKOUT } from './checkout.mjs';
 
+const SAY_EVERY_MS = 20_000;
 const OLDEST_NODE = [20, 19];
 const CHROMIUM_PATHS = ['/usr/bin/chromium', '/usr/bin/chromium-browser', '/usr/bin/google-chrome'];
 
@@ -18,11 +20,21 @@ export function requireNode() {
 export function ensurePackages(say) {
   if (!packagesAreCurrent()) {
     say('Installing npm packages …');
-    const result = spawnSync('npm', ['ci', '--no-audit', '--no-fund'], { cwd: CHECKOUT, stdio: ['ignore', 'ignore', 'inherit'] });
-    if (result.status !== 0) throw new Error('npm ci failed; see the lines above.');
+    const status = runSayingSo('npm', ['ci', '--no-audit', '--no-fund'], 'Still installing npm packages');
+    if (status !== 0) throw new Error('npm ci failed; see the lines above.');
   }
   const patch = spawnSync(process.execPath, [join(CHECKOUT, 'db/patches/apply.mjs')], { stdio: ['ignore', 'ignore', 'inherit'] });
   if (patch.status !== 0) throw new Error('The PostgreSQL driver could not be patched; see the lines above.');
+}
+
+/**
+ * Runs a quiet program to its end and prints a line every so often, so that nobody takes a slow network for a hang. A program of its own
+ * prints them: this thread waits.
+ */
+export function runSayingSo(program, args, words, everyMs = SAY_EVERY_MS) {
+  const runner = fileURLToPath(new URL('say-so.mjs', import.meta.url));
+  const call = [runner, String(everyMs), words, program, ...args];
+  return spawnSync(process.execPath, call, { cwd: CHECKOUT, stdio: ['ignore', 'inherit', 'inherit'] }).status;
 }
 
 export { ensurePostgres };
