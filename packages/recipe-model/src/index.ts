@@ -164,6 +164,7 @@ export {
   type MaterialFamily,
   materialFamilyOf,
 } from './vocabulary/material-families';
+export { LIMITS_OF_QUANTITY, METHODS_OF_QUANTITY, type QuantityLimits, quantityProblem } from './vocabulary/measurement-rules';
 export {
   MEASUREMENT_METHODS,
   MEASUREMENT_QUANTITIES,

@@ -10,6 +10,15 @@ describe('criteriaProblems', () => {
     ).toEqual([]);
   });
 
+  it('refuses a limit that the quantity cannot reach', () => {
+    const problems = criteriaProblems([
+      { quantity: 'evenness', comparison: 'at least', value: -3 },
+      { quantity: 'wipe-test', comparison: 'at least', value: 25.5 },
+      { quantity: 'lightness', comparison: 'between', value: 20, upper: 120 },
+    ]);
+    expect(problems.map(({ pointer }) => pointer)).toEqual(['#/criteria/0/value', '#/criteria/1/value', '#/criteria/2/upper']);
+  });
+
   it('names a wrong unit, crossed limits, a stray upper limit and a repeated demand', () => {
     const problems = criteriaProblems([
       { quantity: 'depth', comparison: 'at least', value: 5, unit: 'mm' },

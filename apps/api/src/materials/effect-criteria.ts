@@ -1,9 +1,9 @@
-import { type Criterion, QUANTITIES } from '@proofplate/recipe-model';
+import { type Criterion, QUANTITIES, quantityProblem } from '@proofplate/recipe-model';
 import type { FieldProblem } from '../common/errors/domain-error';
 
 export type EnteredCriterion = Omit<Criterion, 'unit'> & { readonly unit?: string | undefined };
 
-/** What a single field cannot see: a unit that is not the quantity's, limits the wrong way round, the same demand twice. */
+/** What a single field cannot see: a limit that the quantity cannot reach, a unit that is not its own, limits the wrong way round, the same demand twice. */
 export function criteriaProblems(criteria: readonly EnteredCriterion[]): FieldProblem[] {
   return criteria.flatMap((criterion, index) => {
     const { quantity, comparison, value, upper, unit } = criterion;
@@ -11,6 +11,8 @@ export function criteriaProblems(criteria: readonly EnteredCriterion[]): FieldPr
     const isDouble = criteria.findIndex((other) => other.quantity === quantity && other.comparison === comparison) < index;
     return [
       ...(isDouble ? [{ pointer: `${pointer}/quantity`, detail: 'This demand stands in the list already.' }] : []),
+      ...impossible(quantity, { pointer: `${pointer}/value`, limit: value }),
+      ...impossible(quantity, { pointer: `${pointer}/upper`, limit: upper }),
       ...(unit !== undefined && unit !== QUANTITIES[quantity].unit
         ? [{ pointer: `${pointer}/unit`, detail: `${QUANTITIES[quantity].label} is given in ${unitWords(QUANTITIES[quantity].unit)}.` }]
         : []),
@@ -22,6 +24,11 @@ export function criteriaProblems(criteria: readonly EnteredCriterion[]): FieldPr
         : []),
     ];
   });
+}
+
+function impossible(quantity: Criterion['quantity'], { pointer, limit }: { pointer: string; limit: number | undefined }): FieldProblem[] {
+  const detail = limit === undefined ? undefined : quantityProblem(quantity, limit);
+  return detail === undefined ? [] : [{ pointer, detail }];
 }
 
 /** Criteria as stored: the quantity's own unit beside each limit. */

@@ -56,6 +56,20 @@ describe('enterValue', () => {
     expect(enterValue(SPEED, '0.5')).toMatchObject({ nearest: [{ value: 1 }, { value: 2 }] });
   });
 
+  it('ends a percent at 100, also where the panel states no end or one beyond it', () => {
+    for (const maximum of [undefined, 7000]) {
+      const power: PanelField = {
+        parameter: 'powerPercent',
+        label: 'Power',
+        unit: 'percentFromZero',
+        step: 1,
+        ...(maximum === undefined ? {} : { maximum }),
+      };
+      expect(enterValue(power, '120')).toMatchObject({ kind: 'refused', nearest: [{ value: 99 }, { value: 100 }] });
+      expect(enterValue(power, '100')).toMatchObject({ kind: 'accepted' });
+    }
+  });
+
   it('refuses what cannot be, and never suggests it', () => {
     expect(enterValue(SPEED, '0')).toMatchObject({ reason: 'impossible', nearest: [{ value: 1 }, { value: 2 }] });
     expect(enterValue(PASSES, '1.5')).toMatchObject({ reason: 'impossible', nearest: [{ value: 1 }, { value: 2 }] });

@@ -32,6 +32,13 @@ describe('panelProblems', () => {
     ]);
   });
 
+  it('ends a percent of a range at 100', () => {
+    expect(messages({ parameter: 'powerPercent', label: 'Power', unit: 'percentFromZero', maximum: 7000 })).toEqual([
+      'Power: a percent of the range ends at 100 %.',
+    ]);
+    expect(messages({ parameter: 'powerPercent', label: 'Power', unit: 'percentFromZero', maximum: 100 })).toEqual([]);
+  });
+
   it('refuses units that the parameter does not have, and says which it has', () => {
     expect(messages({ ...SPEED, unit: 'kHz' })[0]).toContain('Scan speed is not shown in kilohertz. Possible: millimetres per second, ');
   });

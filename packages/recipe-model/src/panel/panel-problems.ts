@@ -44,12 +44,14 @@ function unitProblem({ parameter, unit, label }: PanelField): string {
 }
 
 /** A percent of anything but power is a number only with its range; so are watts with the power at 100 %. */
-function rangeProblems({ parameter, unit, label, rangeLow, rangeHigh }: PanelField): [boolean, string][] {
+function rangeProblems({ parameter, unit, label, rangeLow, rangeHigh, minimum, maximum, choices }: PanelField): [boolean, string][] {
   const isShare = unit === 'percentFromZero' || unit === 'percentFromMinimum';
+  const numbers = [minimum, maximum, ...(choices ?? [])].filter((number) => number !== undefined);
   const needsRange = isShare && parameter !== 'powerPercent';
   return [
     [needsRange && rangeHigh === undefined, `${label}: a percent needs the value at 100 %.`],
     [needsRange && unit === 'percentFromMinimum' && rangeLow === undefined, `${label}: a percent from the minimum needs the value at 0 %.`],
+    [isShare && numbers.some((number) => number > 100), `${label}: a percent of the range ends at 100 %.`],
     [unit === 'W' && !(rangeHigh !== undefined && rangeHigh > 0), `${label}: watts need the power at 100 %.`],
   ];
 }

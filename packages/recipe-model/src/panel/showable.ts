@@ -3,6 +3,7 @@ import type { PanelField } from './panel';
 
 /** Relative agreement within which two panel values are the same; conversion noise stays far below it. */
 const SAME = 1e-9;
+const WHOLE_PERCENT = 100;
 
 /** The step of the field; a whole-number parameter steps by one where the panel states none. */
 export function stepOf(field: PanelField): number | undefined {
@@ -14,7 +15,8 @@ export function stepOf(field: PanelField): number | undefined {
 export function isShowable(field: PanelField, shown: number): boolean {
   if (field.choices !== undefined) return field.choices.some((choice) => isSame(choice, shown));
   if (field.minimum !== undefined && shown < field.minimum && !isSame(field.minimum, shown)) return false;
-  if (field.maximum !== undefined && shown > field.maximum && !isSame(field.maximum, shown)) return false;
+  const maximum = highestOf(field);
+  if (maximum !== undefined && shown > maximum && !isSame(maximum, shown)) return false;
   const step = stepOf(field);
   if (step === undefined || isLimit(field, shown)) return true;
   return Math.abs(shown - onStep(Math.round(shown / step), step)) <= SAME * Math.max(Math.abs(shown), step);
@@ -40,7 +42,8 @@ export function roundToPanel(field: PanelField, wanted: number): number | undefi
 }
 
 function candidatesNear(field: PanelField, wanted: number): number[] {
-  const { minimum = Number.NEGATIVE_INFINITY, maximum = Number.POSITIVE_INFINITY } = field;
+  const { minimum = Number.NEGATIVE_INFINITY } = field;
+  const maximum = highestOf(field) ?? Number.POSITIVE_INFINITY;
   const limits = [minimum, maximum].filter(Number.isFinite);
   const step = stepOf(field);
   if (step === undefined) return limits;
@@ -48,6 +51,12 @@ function candidatesNear(field: PanelField, wanted: number): number[] {
   const below = Math.floor(inside / step + SAME);
   const steps = [below - 1, below, below + 1, below + 2].map((count) => onStep(count, step));
   return [...limits, ...steps].filter((candidate) => candidate >= minimum && candidate <= maximum && isAllowed(field, candidate));
+}
+
+/** A percent of a range ends at 100 %, whatever the panel is said to show. */
+function highestOf({ unit, maximum }: PanelField): number | undefined {
+  if (unit !== 'percentFromZero' && unit !== 'percentFromMinimum') return maximum;
+  return Math.min(maximum ?? WHOLE_PERCENT, WHOLE_PERCENT);
 }
 
 /** A suggestion must not be one that the parameter itself refuses, such as zero passes. */

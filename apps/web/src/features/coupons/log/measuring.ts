@@ -1,34 +1,21 @@
-import { type MeasurementMethod, type MeasurementQuantity, QUANTITIES } from '@proofplate/recipe-model';
+import {
+  LIMITS_OF_QUANTITY,
+  METHODS_OF_QUANTITY,
+  type MeasurementMethod,
+  type MeasurementQuantity,
+  QUANTITIES,
+} from '@proofplate/recipe-model';
 import { readNumber } from '../../../lib/read-number';
 import type { Measurement, MeasurementConditions, NewMeasurement } from './log.api';
 
-/** Quantities with the methods that can give them; numbers from photos are computed, not typed. */
-export const TYPED_METHODS: Readonly<Record<MeasurementQuantity, readonly MeasurementMethod[]>> = {
-  lightness: ['colorimeter'],
-  a: ['colorimeter'],
-  b: ['colorimeter'],
-  chroma: ['colorimeter'],
-  'hue-angle': ['colorimeter'],
-  contrast: ['colorimeter', 'verifier'],
-  'delta-e-2000': ['colorimeter'],
-  evenness: ['colorimeter', 'microscope'],
-  depth: ['profilometer', 'microscope', 'calliper', 'manual'],
-  'roughness-ra': ['profilometer', 'microscope'],
-  'roughness-rz': ['profilometer', 'microscope'],
-  'line-width': ['microscope', 'profilometer', 'calliper'],
-  'crater-diameter': ['microscope', 'calliper'],
-  'code-grade': ['verifier'],
-  'tape-class': ['manual'],
-  'wipe-test': ['manual'],
-  'salt-spray-hours': ['manual'],
-};
+/** Methods whose numbers somebody types; those from photos are computed. */
+export const typedMethods = (quantity: MeasurementQuantity): readonly MeasurementMethod[] =>
+  METHODS_OF_QUANTITY[quantity].filter((method) => method !== 'photo');
 
 export const ILLUMINANTS = ['D65', 'D50', 'A', 'C', 'F2', 'F11'] as const;
 export const OBSERVERS = ['2°', '10°'] as const;
 export const GEOMETRIES = ['45/0', '0/45', 'd/8 gloss included', 'd/8 gloss excluded'] as const;
 const GRADES = ['A', 'B', 'C', 'D', 'F'] as const;
-/** Widest limits of all quantities; the server knows each one’s own. */
-const LARGEST = 1e9;
 
 export type Grade = (typeof GRADES)[number];
 export type ReadResult = { value: number } | { grade: Grade } | { message: string };
@@ -38,7 +25,7 @@ export function readResult(text: string, quantity: MeasurementQuantity, locale: 
   const letter = GRADES.find((grade) => grade === text.trim().toUpperCase());
   if (quantity === 'code-grade' && letter !== undefined) return { grade: letter };
   const { label, unit } = QUANTITIES[quantity];
-  return readNumber(text, { what: label, unit: unit === '1' ? '' : unit, least: -LARGEST, most: LARGEST }, locale);
+  return readNumber(text, { what: label, unit: unit === '1' ? '' : unit, ...LIMITS_OF_QUANTITY[quantity] }, locale);
 }
 
 export type MeasuringCommon = {

@@ -5,7 +5,16 @@ import { PhotoCaption, PhotoStrip } from './photo-strip';
 
 const photo = (id: string, rest: Partial<Photo> = {}): Photo => ({
   ...{ id, couponId: 'c', state: 'ready', refusedReason: null, widthPx: 1200, heightPx: 900, colourProfile: null, cornersFoundBy: null },
-  ...{ lightNotes: '', flags: [], createdBy: 'Hanne Voss', version: 1, corners: null, allowedActions: [] },
+  ...{
+    lightNotes: '',
+    flags: [],
+    createdBy: 'Hanne Voss',
+    version: 1,
+    receivedSha256: 'r',
+    masterSha256: 'm',
+    corners: null,
+    allowedActions: [],
+  },
   ...{ urls: { master: `/${id}.jpg`, small: `/${id}-small.jpg`, large: `/${id}-large.jpg` } },
   ...{ createdAt: '2026-05-13T08:00:00Z', capturedAt: '2026-05-13T07:00:00Z' },
   ...rest,

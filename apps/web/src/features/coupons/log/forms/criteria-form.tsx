@@ -1,5 +1,12 @@
 import { Box, chakra, Flex } from '@chakra-ui/react';
-import { COMPARISON_LABELS, COMPARISONS, criterionText, MEASUREMENT_QUANTITIES, QUANTITIES } from '@proofplate/recipe-model';
+import {
+  COMPARISON_LABELS,
+  COMPARISONS,
+  criterionText,
+  LIMITS_OF_QUANTITY,
+  MEASUREMENT_QUANTITIES,
+  QUANTITIES,
+} from '@proofplate/recipe-model';
 import { useFieldArray } from 'react-hook-form';
 import { Button } from '../../../../components/button';
 import { NumberField, SelectField } from '../../../../components/field';
@@ -8,8 +15,6 @@ import { CrossIcon, PlusIcon } from '../../../../components/icons';
 import { shopDecimalSign } from '../../../../lib/format';
 import { messageOf, readNumber, typedNumber } from '../../../../lib/read-number';
 import { type Criterion, recordCriteria } from '../log.api';
-
-const LARGEST_LIMIT = 1e6;
 
 type CriterionFields = { quantity: Criterion['quantity']; comparison: Criterion['comparison']; value: string; upper: string };
 type CriteriaFields = { criteria: CriterionFields[] };
@@ -128,7 +133,7 @@ const wordsOf = ({ upper, unit, ...rest }: Criterion) =>
 
 const rule = (what: string, quantity: Criterion['quantity']) => {
   const { unit } = QUANTITIES[quantity];
-  return { what, unit: unit === '1' ? '' : unit, least: -LARGEST_LIMIT, most: LARGEST_LIMIT };
+  return { what, unit: unit === '1' ? '' : unit, ...LIMITS_OF_QUANTITY[quantity] };
 };
 
 const fieldsOf = ({ quantity, comparison, value, upper }: Criterion, locale: string): CriterionFields => ({

@@ -11,7 +11,7 @@ import { useIdempotencyKey } from '../../../../lib/idempotency-key';
 import { readOptionalNumber } from '../../../../lib/read-number';
 import type { CouponCell, TestGrid } from '../../coupons.api';
 import { addMeasurements, type Inspection, type MeasurementConditions } from '../log.api';
-import { counting, measurementsOf, readResult, refusedCells, TYPED_METHODS } from '../measuring';
+import { counting, measurementsOf, readResult, refusedCells, typedMethods } from '../measuring';
 import { MeasureConditions } from './measure-conditions';
 import { MeasureGrid } from './measure-grid';
 
@@ -31,7 +31,7 @@ export type MeasureDialogProps = {
 /** One quantity, one method, and a field for each cell. */
 export function MeasureDialog({ couponId, grid, cells, inspection, locale, onClose, onSaved }: MeasureDialogProps) {
   const [quantity, setQuantity] = useState<keyof typeof QUANTITIES>('lightness');
-  const [method, setMethod] = useState(TYPED_METHODS.lightness[0] ?? 'manual');
+  const [method, setMethod] = useState(typedMethods('lightness')[0] ?? 'manual');
   const [conditions, setConditions] = useState<MeasurementConditions>({});
   const [instrument, setInstrument] = useState('');
   const [uncertainty, setUncertainty] = useState('');
@@ -57,7 +57,7 @@ export function MeasureDialog({ couponId, grid, cells, inspection, locale, onClo
   const handleQuantity = (next: string) => {
     const found = MEASUREMENT_QUANTITIES.find((code) => code === next) ?? 'lightness';
     setQuantity(found);
-    if (!TYPED_METHODS[found].includes(method)) handleMethod(TYPED_METHODS[found][0] ?? 'manual');
+    if (!typedMethods(found).includes(method)) handleMethod(typedMethods(found)[0] ?? 'manual');
     setRefused(NO_TEXTS);
   };
   const handleMethod = (next: typeof method) => {
@@ -118,8 +118,8 @@ export function MeasureDialog({ couponId, grid, cells, inspection, locale, onClo
           name="method"
           label="How"
           value={method}
-          onChange={({ target }) => handleMethod(TYPED_METHODS[quantity].find((code) => code === target.value) ?? method)}
-          options={TYPED_METHODS[quantity].map((code) => ({ value: code, label: METHOD_LABELS[code] }))}
+          onChange={({ target }) => handleMethod(typedMethods(quantity).find((code) => code === target.value) ?? method)}
+          options={typedMethods(quantity).map((code) => ({ value: code, label: METHOD_LABELS[code] }))}
         />
         {method !== 'manual' && (
           <TextField
