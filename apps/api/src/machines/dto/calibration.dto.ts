@@ -1,7 +1,7 @@
 import { ApiProperty, ApiPropertyOptional } from '@nestjs/swagger';
 import { Type } from 'class-transformer';
 import { ArrayMaxSize, ArrayMinSize, IsArray, IsOptional, ValidateNested } from 'class-validator';
-import { IsDay } from '../../common/decorators/is-day';
+import { HasBegun, IsDay } from '../../common/decorators/is-day';
 import { MayBeAbsent } from '../../common/decorators/may-be-absent';
 import { NumberBetween } from '../../common/decorators/number-between.decorator';
 import { RequiredText, TrimmedText } from '../../common/decorators/trimmed-text.decorator';
@@ -26,6 +26,7 @@ export class CalibrationPointDto {
 export class CreateCalibrationDto {
   @ApiProperty({ description: 'Day of the reading', format: 'date' })
   @IsDay()
+  @HasBegun()
   measuredOn: string;
 
   @ApiProperty({ description: 'Meter and its number', maxLength: MAX_METER_LENGTH })

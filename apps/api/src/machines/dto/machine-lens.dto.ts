@@ -1,6 +1,6 @@
 import { ApiProperty, ApiPropertyOptional } from '@nestjs/swagger';
 import { IsOptional, IsUUID } from 'class-validator';
-import { IsDay } from '../../common/decorators/is-day';
+import { HasBegun, IsDay } from '../../common/decorators/is-day';
 import { MayBeAbsent } from '../../common/decorators/may-be-absent';
 import { NumberBetween } from '../../common/decorators/number-between.decorator';
 import { TrimmedText } from '../../common/decorators/trimmed-text.decorator';
@@ -33,6 +33,7 @@ export class UpdateMachineLensDto {
   @ApiPropertyOptional({ type: String, nullable: true, format: 'date', description: 'Day of that measurement' })
   @IsOptional()
   @IsDay()
+  @HasBegun()
   spotMeasuredOn?: string | null;
 }
 
