@@ -3,6 +3,7 @@ import { LedgerService } from '../src/ledger/ledger.service';
 import { firstFault, GENESIS_HASH, type LinkedEvent, linkEvent } from '../src/ledger/ledger-chain';
 import { createTestApp, type TestApp } from './support/app';
 import { asSuperuser } from './support/database';
+import { editing } from './support/equipment';
 import { makeMember, makeShop, makeStaffedShop, type TestMember } from './support/factories';
 import { expectProblem, pointersOf } from './support/problem';
 
@@ -95,7 +96,7 @@ describe('GET /api/ledger/actors', () => {
     const shop = await makeShop(test);
     const owner = await makeMember(test, shop, 'owner', { printedName: 'Amy Rook' });
     const left = await makeMember(test, shop, 'operator', { printedName: 'Ben Holt' });
-    await test.app.inject({ method: 'DELETE', url: `/api/members/${left.id}`, headers: owner.headers });
+    await test.app.inject({ method: 'DELETE', url: `/api/members/${left.id}`, headers: editing(owner, 1) });
     expect((await get(owner.headers, '/actors')).json()).toEqual({
       items: [
         { memberId: owner.id, name: 'Amy Rook', isActive: true },

@@ -1,5 +1,5 @@
 import { createTestApp, type TestApp } from './support/app';
-import { effectByKey, fillStarterContent } from './support/equipment';
+import { editing, effectByKey, fillStarterContent } from './support/equipment';
 import { makeMember, makeShop, makeStaffedShop } from './support/factories';
 import { expectProblem, pointersOf } from './support/problem';
 
@@ -62,7 +62,7 @@ describe('one member', () => {
     const url = `/api/members/${foreign.operator.id}`;
     expectProblem(await call('GET', url, staff.owner.headers), 404, 'not-found');
     expectProblem(await call('PATCH', url, { ...staff.owner.headers, 'if-match': '"v1"' }, { role: 'lead' }), 404, 'not-found');
-    expectProblem(await call('DELETE', url, staff.owner.headers), 404, 'not-found');
+    expectProblem(await call('DELETE', url, editing(staff.owner, 1)), 404, 'not-found');
   });
 });
 
@@ -138,26 +138,37 @@ describe('DELETE /api/members/:id', () => {
   it('ends the sessions of the member at once and keeps the record', async () => {
     const member = await makeMember(test, staff.shop, 'operator');
     expect((await call('GET', '/api/session', member.headers)).statusCode).toBe(200);
-    expect((await call('DELETE', `/api/members/${member.id}`, staff.owner.headers)).statusCode).toBe(204);
+    expect((await call('DELETE', `/api/members/${member.id}`, editing(staff.owner, 1))).statusCode).toBe(204);
     expectProblem(await call('GET', '/api/session', member.headers), 401, 'session-over');
     const removed = await call('GET', `/api/members/${member.id}`, staff.owner.headers);
     expect(removed.json()).toMatchObject({ state: 'removed', email: null, allowedActions: [] });
-    expectProblem(await call('DELETE', `/api/members/${member.id}`, staff.owner.headers), 404, 'not-found');
+    expectProblem(await call('DELETE', `/api/members/${member.id}`, editing(staff.owner, 2)), 404, 'not-found');
+  });
+
+  it('needs to know who is removed: not somebody whose role was changed meanwhile', async () => {
+    const member = await makeMember(test, staff.shop, 'operator');
+    const url = `/api/members/${member.id}`;
+    await call('PATCH', url, editing(staff.owner, 1), { role: 'lead' });
+    expectProblem(await call('DELETE', url, staff.owner.headers), 428, 'version-required');
+    const late = expectProblem(await call('DELETE', url, editing(staff.owner, 1)), 412, 'stale-version');
+    expect(late.current).toMatchObject({ role: 'lead', version: 2 });
+    expect((await call('GET', '/api/session', member.headers)).statusCode).toBe(200);
+    expect((await call('DELETE', url, editing(staff.owner, 2))).statusCode).toBe(204);
   });
 
   it('is for owners, and not for the last one of them', async () => {
     for (const member of [staff.trainee, staff.operator, staff.lead])
-      expectProblem(await call('DELETE', `/api/members/${staff.trainee.id}`, member.headers), 403, 'not-permitted');
-    expectProblem(await call('DELETE', `/api/members/${staff.trainee.id}`), 401, 'not-signed-in');
-    expectProblem(await call('DELETE', `/api/members/${staff.owner.id}`, staff.owner.headers), 409, 'last-owner');
+      expectProblem(await call('DELETE', `/api/members/${staff.trainee.id}`, editing(member, 1)), 403, 'not-permitted');
+    expectProblem(await call('DELETE', `/api/members/${staff.trainee.id}`, { 'if-match': '"v1"' }), 401, 'not-signed-in');
+    expectProblem(await call('DELETE', `/api/members/${staff.owner.id}`, editing(staff.owner, 1)), 409, 'last-owner');
   });
 
   it('leaves one of two owners who remove each other at the same moment', async () => {
     const shop = await makeShop(test);
     const [one, other] = [await makeMember(test, shop, 'owner'), await makeMember(test, shop, 'owner')];
     const answers = await Promise.all([
-      call('DELETE', `/api/members/${other.id}`, one.headers),
-      call('DELETE', `/api/members/${one.id}`, other.headers),
+      call('DELETE', `/api/members/${other.id}`, editing(one, 1)),
+      call('DELETE', `/api/members/${one.id}`, editing(other, 1)),
     ]);
     expect(answers.map(({ statusCode }) => statusCode).filter((status) => status === 204)).toHaveLength(1);
   });

@@ -67,7 +67,7 @@ const SHOP: readonly RightsRow[] = [
   read('/api/members', 'lead'),
   read('/api/members/:id', 'lead'),
   row('PATCH /api/members/:id', 'owner', NO_TAG, { body: { role: 'operator' } }),
-  row('DELETE /api/members/:id', 'owner', '204', {}),
+  row('DELETE /api/members/:id', 'owner', NO_TAG, {}),
   read('/api/members/:id/training-records', 'lead'),
   row('POST /api/members/:id/training-records', 'owner', NO_KEY, {
     body: { subject: 'Focus', taughtBy: 'Somebody', taughtOn: '2026-01-09' },

@@ -50,9 +50,10 @@ export class MembersController {
   @Delete(':id')
   @HttpCode(204)
   @AtLeast('owner')
+  @ApiIfMatch()
   @ApiOperation({ summary: 'Remove a member and end their sessions here at once' })
   @ApiNoContentResponse()
-  remove(@CurrentMember() actor: Actor, @Param('id', IdPipe) id: string): Promise<void> {
-    return this.members.remove(actor, id);
+  remove(@CurrentMember() actor: Actor, @Param('id', IdPipe) id: string, @IfMatch() version: number): Promise<void> {
+    return this.members.remove(actor, id, version);
   }
 }

@@ -84,11 +84,14 @@ export class MembersRepository {
     return row;
   }
 
-  async markRemoved(tx: Tx, shopId: string, id: string): Promise<void> {
-    await tx
+  /** False when the version is no longer the present one. */
+  async markRemoved(tx: Tx, key: { readonly shopId: string; readonly id: string; readonly version: number }): Promise<boolean> {
+    const rows = await tx
       .update(member)
       .set({ state: 'removed', removedAt: sql`now()`, version: sql`${member.version} + 1` })
-      .where(and(eq(member.shopId, shopId), eq(member.id, id)));
+      .where(and(eq(member.shopId, key.shopId), eq(member.id, key.id), eq(member.version, key.version), eq(member.state, 'active')))
+      .returning({ id: member.id });
+    return rows.length > 0;
   }
 
   /** Addresses of the people of the shop, by member. */

@@ -79,12 +79,13 @@ export class MembersService {
   }
 
   /** Ends the membership and, at once, every session in this shop. What the member did and signed stays. */
-  async remove(actor: Actor, id: string): Promise<void> {
+  async remove(actor: Actor, id: string, version: number): Promise<void> {
     await this.unitOfWork.run(actor, async (tx) => {
       const owners = await this.repository.lockOwners(tx, actor.shopId);
       const before = await this.getActiveRow(tx, actor.shopId, id);
       if (isLastOwner(owners, id)) throw new LastOwnerError();
-      await this.repository.markRemoved(tx, actor.shopId, id);
+      const isRemoved = await this.repository.markRemoved(tx, { shopId: actor.shopId, id, version });
+      if (!isRemoved) throw new StaleError(await this.toDto(tx, actor, before));
       await this.repository.endSessions(tx, id, 'member removed');
       await this.ledger.record(tx, { actor, action: 'member.removed', ...subject(id), before: told(before) });
     });

@@ -66,6 +66,7 @@ describe('the people page', () => {
     expect(server.requests.filter(({ method }) => method === 'DELETE')).toEqual([]);
     await user.click(within(dialog).getByRole('button', { name: 'Remove Jonah Pell' }));
     expect(await screen.findByText('Jonah Pell is removed.')).toBeVisible();
+    expect(server.requests.find(({ method }) => method === 'DELETE')?.headers.get('if-match')).toBe('"v2"');
   });
 
   it('keeps the typed address when an invitation is refused', async () => {

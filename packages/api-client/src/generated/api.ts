@@ -8273,7 +8273,10 @@ export interface operations {
     MembersController_remove: {
         parameters: {
             query?: never;
-            header?: never;
+            header: {
+                /** @description ETag of the version that was read, such as "v3" */
+                "If-Match": string;
+            };
             path: {
                 id: string;
             };

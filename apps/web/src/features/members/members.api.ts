@@ -60,8 +60,8 @@ export async function changeRole({ id, version }: Member, role: Role): Promise<v
   await revalidate(MEMBERS);
 }
 
-export async function removeMember({ id }: Member): Promise<void> {
-  await request<void>('delete', `${MEMBERS}/${id}`);
+export async function removeMember({ id, version }: Member): Promise<void> {
+  await request<void>('delete', `${MEMBERS}/${id}`, { version });
   await revalidate(MEMBERS);
 }
 
