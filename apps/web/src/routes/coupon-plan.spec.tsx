@@ -18,7 +18,7 @@ const preview = {
     columns: 2,
     rowFactor: null,
     markingTime: {
-      ...{ totalS: 73, beamOnS: 60, errorS: 1.2, missingBecause: null, quickestCellS: 30, slowestCellS: 43 },
+      ...{ totalS: 73, beamOnS: 60, errorS: null, missingBecause: null, quickestCellS: 30, slowestCellS: 43 },
       overheads: { basis: 'profile', jumpSpeedMmPerS: 5000, notFittedBecause: 'no time is logged; it takes 3' },
     },
     plate: { widthMm: 60, heightMm: 31.4 },

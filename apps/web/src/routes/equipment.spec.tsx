@@ -47,7 +47,12 @@ const listOf =
 
 let server: ReturnType<typeof fakeServer>;
 function open(at: string, handlers: Parameters<typeof fakeServer>[0], role: Role = 'lead') {
-  server = fakeServer({ 'GET /api/lenses': none, 'GET /api/machines': none, 'GET /api/holds': none, ...handlers });
+  const times = {
+    ground: { physical: {}, overheads: { basis: 'not known', because: 'the machine’s page gives no jump speed' } },
+    items: [],
+  };
+  const notClocked = { 'GET /api/machines/m1/logged-times': () => ({ body: times }) };
+  server = fakeServer({ ...notClocked, 'GET /api/lenses': none, 'GET /api/machines': none, 'GET /api/holds': none, ...handlers });
   openSession(makeSessionAnswer(role));
   return renderRoutes(routes, at);
 }
