@@ -1,11 +1,11 @@
 import { Injectable } from '@nestjs/common';
 import { COUPON_LAYOUT_VERSION, cellAddress } from '@proofplate/imaging';
-import type { MarkStep } from '@proofplate/recipe-model';
+import type { MarkStep, Panel, ParameterSet } from '@proofplate/recipe-model';
 import type { Actor } from '../common/actor';
-import { ConflictError, InvalidError, NotFoundError } from '../common/errors/domain-error';
-import { UnitOfWork } from '../database/unit-of-work';
+import { ConflictError, type FieldProblem, InvalidError, NotFoundError } from '../common/errors/domain-error';
+import { type Tx, UnitOfWork } from '../database/unit-of-work';
 import { CouponPlanGroundService } from './coupon-plan-ground.service';
-import { enterSetting } from './coupon-plan-setting';
+import { enterSetting, enterValues } from './coupon-plan-setting';
 import { CouponPlansRepository, type RevisionToConfirm } from './coupon-plans.repository';
 import { acknowledged, invalidPlan } from './coupon-plans.service';
 import { CouponStoreService } from './coupon-plans-store.service';
@@ -36,7 +36,7 @@ export class CouponConfirmationService {
       const ground = await this.grounds.read(tx, actor.shopId, keys);
       const labels = dto.labelStep === undefined ? undefined : enterSetting(ground.machine, dto.labelStep, { pointer: '#/labelStep' });
       if (labels !== undefined && labels.problems.length > 0) throw invalidPlan(labels.problems);
-      const labelStep = labels?.result ?? (await this.plans.labelStepFor(tx, actor.shopId, revision));
+      const labelStep = labels?.result ?? (await this.copiedLabelStep(tx, actor.shopId, { revision, panel: ground.machine.panel }));
       const { rows, columns } = blockOf(dto.count);
       return this.store.add(tx, actor, {
         coupon: {
@@ -68,6 +68,28 @@ export class CouponConfirmationService {
       });
     });
   }
+
+  /** The setting that labelled the plates before; the panel may have changed since. */
+  private async copiedLabelStep(
+    tx: Tx,
+    shopId: string,
+    { revision, panel }: { revision: RevisionToConfirm; panel: Panel },
+  ): Promise<ParameterSet | null> {
+    const copied = await this.plans.labelStepFor(tx, shopId, revision);
+    const problems = copied === null ? [] : unshowable(panel, copied);
+    if (problems.length === 0) return copied;
+    const what = problems.map(({ detail }) => detail).join(' ');
+    throw new InvalidError(
+      `The setting of the labels comes from an earlier plate, and the panel cannot show it any more. ${what}`,
+      problems,
+    );
+  }
+}
+
+/** What the machine's panel of today cannot show of an earlier setting, each with the nearest values that it can. */
+export function unshowable(panel: Panel, { values }: Pick<ParameterSet, 'values'>): FieldProblem[] {
+  const entered = Object.fromEntries(Object.entries(values).map(([key, value]) => [key, value?.entered]));
+  return [...enterValues(panel, entered, '#/labelStep/values').problems];
 }
 
 function stepToProve({ state, content }: RevisionToConfirm, stepNumber: number): MarkStep {
