@@ -1,5 +1,5 @@
 import type { Measurement } from './log.api';
-import { type MeasuringCommon, measurementsOf, readResult, refusedCells } from './measuring';
+import { type MeasuringCommon, measurementsOf, missingConditions, readResult, refusedCells } from './measuring';
 
 const COMMON: MeasuringCommon = {
   quantity: 'lightness',
@@ -79,5 +79,22 @@ describe('typed measurements', () => {
     );
     expect([...cells]).toEqual([['d', 'too high']]);
     expect(others).toEqual(['name it']);
+  });
+});
+
+describe('missingConditions()', () => {
+  it('names every open field of a method, and asks nothing of what is given by hand', () => {
+    const names = (...given: Parameters<typeof missingConditions>) => missingConditions(...given).map(({ name }) => name);
+    expect(names('colorimeter', { instrument: ' ', illuminant: 'D65' })).toEqual(['instrument', 'observer', 'geometry']);
+    expect(names('verifier', { instrument: 'V1', apertureMil: 6, light: '', angleDeg: 45 })).toEqual(['light']);
+    expect(names('manual', { instrument: '' })).toEqual([]);
+  });
+});
+
+describe('readResult()', () => {
+  it('refuses what the quantity cannot be', () => {
+    expect(readResult('25.5', 'wipe-test', 'en-GB')).toHaveProperty('message');
+    expect(readResult('25', 'wipe-test', 'en-GB')).toEqual({ value: 25 });
+    expect(readResult('-3', 'evenness', 'en-GB')).toHaveProperty('message');
   });
 });

@@ -84,3 +84,30 @@ export function refusedCells(
   }
   return { cells, others: [...others] };
 }
+
+type Named = { name: string; label: string };
+const DEMANDED: Partial<Record<MeasurementMethod, readonly (Named & { key: keyof MeasurementConditions })[]>> = {
+  colorimeter: [
+    { key: 'illuminant', name: 'illuminant', label: 'Illuminant' },
+    { key: 'observer', name: 'observer', label: 'Observer' },
+    { key: 'geometry', name: 'geometry', label: 'Geometry of light and view' },
+  ],
+  verifier: [
+    { key: 'apertureMil', name: 'aperture', label: 'Aperture' },
+    { key: 'light', name: 'light', label: 'Light' },
+    { key: 'angleDeg', name: 'light-angle', label: 'Angle of the light' },
+  ],
+};
+
+/** What a method demands and was left open, at its field: without it the numbers cannot be compared. */
+export function missingConditions(
+  method: MeasurementMethod,
+  given: MeasurementConditions & { instrument: string },
+): (Named & { message: string })[] {
+  const instrument = method !== 'manual' && given.instrument.trim() === '' ? [{ name: 'instrument', label: 'Instrument' }] : [];
+  const conditions = (DEMANDED[method] ?? []).filter(({ key }) => (given[key] ?? '') === '');
+  return [
+    ...instrument.map((field) => ({ ...field, message: 'Name the instrument.' })),
+    ...conditions.map(({ name, label }) => ({ name, label, message: 'Say it: without it the number cannot be compared.' })),
+  ];
+}

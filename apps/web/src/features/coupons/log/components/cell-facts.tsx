@@ -36,6 +36,11 @@ export function CellFacts({ coupon, cell, inspection }: CellFactsProps) {
   return (
     <Box minW="0">
       <FactList facts={facts} />
+      {COLOUR_AND_EVENNESS.some((quantity) => !counting.has(quantity)) && (
+        <chakra.p mt="1.5" fontSize="sm" lineHeight="sm" color="fg.muted">
+          {HOW_MEASURED}
+        </chakra.p>
+      )}
       <Box fontSize="sm" lineHeight="sm">
         <FoldedNumbers summary="Numbers of this cell" label={`Numbers of ${cell.address}`} groups={groups} />
         {own.length > 0 && (
@@ -50,6 +55,10 @@ export function CellFacts({ coupon, cell, inspection }: CellFactsProps) {
     </Box>
   );
 }
+
+const COLOUR_AND_EVENNESS = ['lightness', 'contrast', 'evenness'] as const;
+const HOW_MEASURED =
+  'Colour, contrast and evenness are not worked out from a photo here yet: measure them, or judge them by hand, and enter them under “Enter measurements”. Dose and overlap follow from the setting.';
 
 function colourFact(counting: ReadonlyMap<string, Measurement>): Fact {
   const [l, a, b] = COLOUR.map((quantity) => counting.get(quantity)?.value ?? undefined);

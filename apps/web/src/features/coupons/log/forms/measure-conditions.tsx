@@ -9,16 +9,19 @@ export type MeasureConditionsProps = {
   method: MeasurementMethod;
   conditions: MeasurementConditions;
   onChange: (conditions: MeasurementConditions) => void;
+  /** Message at a field that was left open. */
+  errorAt: (name: string) => string | undefined;
   locale: string;
 };
 
 /** Conditions without which a number of the method cannot be compared. */
-export function MeasureConditions({ method, conditions, onChange, locale }: MeasureConditionsProps) {
+export function MeasureConditions({ method, conditions, onChange, errorAt, locale }: MeasureConditionsProps) {
   if (method === 'colorimeter') {
     return (
       <>
         <Choice
           name="illuminant"
+          error={errorAt('illuminant')}
           label="Illuminant"
           values={ILLUMINANTS}
           value={conditions.illuminant}
@@ -26,6 +29,7 @@ export function MeasureConditions({ method, conditions, onChange, locale }: Meas
         />
         <Choice
           name="observer"
+          error={errorAt('observer')}
           label="Observer"
           values={OBSERVERS}
           value={conditions.observer}
@@ -33,6 +37,7 @@ export function MeasureConditions({ method, conditions, onChange, locale }: Meas
         />
         <Choice
           name="geometry"
+          error={errorAt('geometry')}
           label="Geometry of light and view"
           values={GEOMETRIES}
           value={conditions.geometry}
@@ -46,6 +51,7 @@ export function MeasureConditions({ method, conditions, onChange, locale }: Meas
     <>
       <Typed
         name="aperture"
+        error={errorAt('aperture')}
         label="Aperture"
         unit="mil"
         most={100}
@@ -54,6 +60,7 @@ export function MeasureConditions({ method, conditions, onChange, locale }: Meas
       />
       <TextField
         name="light"
+        error={errorAt('light')}
         label="Light"
         help="Wavelength or kind, such as 660 nm"
         maxLength={60}
@@ -62,6 +69,7 @@ export function MeasureConditions({ method, conditions, onChange, locale }: Meas
       />
       <Typed
         name="light-angle"
+        error={errorAt('light-angle')}
         label="Angle of the light"
         unit="°"
         most={90}
@@ -78,14 +86,16 @@ type ChoiceProps<T extends string> = {
   values: readonly T[];
   value: T | undefined;
   onChoose: (value: T) => void;
+  error: string | undefined;
 };
 
-function Choice<T extends string>({ name, label, values, value, onChoose }: ChoiceProps<T>) {
+function Choice<T extends string>({ name, label, values, value, onChoose, error }: ChoiceProps<T>) {
   return (
     <SelectField
       name={name}
       label={label}
       placeholder="Choose"
+      error={error}
       value={value ?? ''}
       onChange={({ target }) => {
         const chosen = values.find((each) => each === target.value);
@@ -96,9 +106,17 @@ function Choice<T extends string>({ name, label, values, value, onChoose }: Choi
   );
 }
 
-type TypedProps = { name: string; label: string; unit: string; most: number; locale: string; onRead: (value: number | undefined) => void };
+type TypedProps = {
+  name: string;
+  label: string;
+  unit: string;
+  most: number;
+  locale: string;
+  error: string | undefined;
+  onRead: (value: number | undefined) => void;
+};
 
-function Typed({ name, label, unit, most, locale, onRead }: TypedProps) {
+function Typed({ name, label, unit, most, locale, error, onRead }: TypedProps) {
   const [text, setText] = useState('');
   const read = readOptionalNumber(text, { what: `The ${label.toLowerCase()}`, unit, least: 0, most }, locale);
   const handleChange = (next: string) => {
@@ -111,7 +129,7 @@ function Typed({ name, label, unit, most, locale, onRead }: TypedProps) {
       name={name}
       label={label}
       unit={unit}
-      error={'message' in read ? read.message : undefined}
+      error={'message' in read ? read.message : error}
       value={text}
       onChange={({ target }) => handleChange(target.value)}
     />

@@ -1,8 +1,9 @@
 import { Box, chakra, Flex } from '@chakra-ui/react';
 import { MEASUREMENT_QUANTITIES, METHOD_LABELS, QUANTITIES } from '@proofplate/recipe-model';
-import { useState } from 'react';
+import { useEffect, useRef, useState } from 'react';
 import { Button } from '../../../../components/button';
 import { Dialog } from '../../../../components/dialog';
+import { ErrorSummary, type SummaryEntry } from '../../../../components/error-summary';
 import { NumberField, SelectField, TextField } from '../../../../components/field';
 import { ProblemNotice } from '../../../../components/problem-notice';
 import { ProblemError } from '../../../../lib/api';
@@ -11,7 +12,7 @@ import { useIdempotencyKey } from '../../../../lib/idempotency-key';
 import { readOptionalNumber } from '../../../../lib/read-number';
 import type { CouponCell, TestGrid } from '../../coupons.api';
 import { addMeasurements, type Inspection, type MeasurementConditions } from '../log.api';
-import { counting, measurementsOf, readResult, refusedCells, typedMethods } from '../measuring';
+import { counting, measurementsOf, missingConditions, readResult, refusedCells, typedMethods } from '../measuring';
 import { MeasureConditions } from './measure-conditions';
 import { MeasureGrid } from './measure-grid';
 
@@ -40,6 +41,9 @@ export function MeasureDialog({ couponId, grid, cells, inspection, locale, onClo
   const [refused, setRefused] = useState<Texts>(NO_TEXTS);
   const [notice, setNotice] = useState<{ what: string; todo: string }>();
   const [isBusy, setIsBusy] = useState(false);
+  const [missing, setMissing] = useState<readonly SummaryEntry[]>([]);
+  const [isLeaving, setIsLeaving] = useState(false);
+  const summary = useRef<HTMLDivElement>(null);
   const key = useIdempotencyKey();
 
   const { unit, label } = QUANTITIES[quantity];
@@ -63,9 +67,21 @@ export function MeasureDialog({ couponId, grid, cells, inspection, locale, onClo
   const handleMethod = (next: typeof method) => {
     setMethod(next);
     setConditions({});
+    setMissing([]);
   };
+  useEffect(() => {
+    if (missing.length > 0) summary.current?.focus();
+  }, [missing]);
+  const handleClose = () => {
+    if (typedIds.length > 0 && !isLeaving) setIsLeaving(true);
+    else onClose();
+  };
+  const missingAt = (name: string) => missing.find((entry) => entry.name === name)?.message;
   const handleSave = async () => {
     setNotice(undefined);
+    const open = missingConditions(method, { ...conditions, instrument });
+    setMissing(open);
+    if (open.length > 0) return;
     if ('message' in spread) return setNotice({ what: 'The uncertainty cannot be read.', todo: spread.message });
     const common = { quantity, method, instrument: instrument.trim(), methodDetail: conditions, uncertainty: spread.value };
     const reason = replaces && replaceReason.trim() !== '' ? replaceReason.trim() : undefined;
@@ -93,7 +109,7 @@ export function MeasureDialog({ couponId, grid, cells, inspection, locale, onClo
     <Dialog
       title="Enter measurements"
       width="broad"
-      onClose={onClose}
+      onClose={handleClose}
       actions={
         <>
           <Button disabled={grids.undo === undefined} onClick={() => grids.undo?.()}>
@@ -105,6 +121,19 @@ export function MeasureDialog({ couponId, grid, cells, inspection, locale, onClo
         </>
       }
     >
+      {isLeaving && (
+        <ProblemNotice
+          what="The values that you typed are not saved."
+          todo="Save them, or close and lose them."
+          actions={
+            <>
+              <Button onClick={() => setIsLeaving(false)}>Keep typing</Button>
+              <Button onClick={onClose}>Close without saving</Button>
+            </>
+          }
+        />
+      )}
+      <ErrorSummary ref={summary} entries={missing} />
       {notice !== undefined && <ProblemNotice what={notice.what} safe="What you typed is still here." todo={notice.todo} />}
       <Box display="grid" gridTemplateColumns={{ base: '1fr', sm: 'repeat(3, minmax(0, 1fr))' }} gap="3" my="3">
         <SelectField
@@ -126,11 +155,12 @@ export function MeasureDialog({ couponId, grid, cells, inspection, locale, onClo
             name="instrument"
             label="Instrument"
             maxLength={120}
+            error={missingAt('instrument')}
             value={instrument}
             onChange={({ target }) => setInstrument(target.value)}
           />
         )}
-        <MeasureConditions method={method} conditions={conditions} onChange={setConditions} locale={locale} />
+        <MeasureConditions method={method} conditions={conditions} onChange={setConditions} errorAt={missingAt} locale={locale} />
         <NumberField
           name="uncertainty"
           label="Uncertainty"
