@@ -1,5 +1,7 @@
 import { chakra, Flex } from '@chakra-ui/react';
-import type { ComponentProps, ReactNode } from 'react';
+import { type ComponentProps, type ReactNode, useState } from 'react';
+import { shopLocale } from '../lib/format';
+import { conversionWords, type NumberRule, shownUnit } from '../lib/read-number';
 import { ChevronDownIcon } from './icons';
 import { StateShape } from './state-mark';
 import { VisuallyHidden } from './visually-hidden';
@@ -134,12 +136,30 @@ export function TextField({ name, label, help, error, unit, isOptional, size = '
   );
 }
 
+/** With its rule, a field has the rule's unit and says under it what a number with another unit is in its own. */
+export type NumberFieldProps = TextFieldProps & { rule?: NumberRule };
+
 /**
  * A number with its unit, as text: a wheel or an arrow key must never change a setting. What was typed stays as typed; reading it
  * ("0,03 mm", "850 lpi") is the caller's.
  */
-export function NumberField(props: TextFieldProps) {
-  return <TextField inputMode="decimal" autoComplete="off" spellCheck={false} {...props} />;
+export function NumberField({ rule, unit = rule === undefined ? undefined : shownUnit(rule), onChange, ...props }: NumberFieldProps) {
+  const [typed, setTyped] = useState('');
+  const conversion = rule === undefined ? undefined : conversionWords(typed, rule, shopLocale());
+  return (
+    <TextField
+      inputMode="decimal"
+      autoComplete="off"
+      spellCheck={false}
+      {...props}
+      {...(unit === undefined ? {} : { unit })}
+      {...(conversion === undefined ? {} : { help: conversion })}
+      onChange={(event) => {
+        setTyped(event.target.value);
+        onChange?.(event);
+      }}
+    />
+  );
 }
 
 const TextArea = chakra('textarea', {

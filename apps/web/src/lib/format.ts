@@ -76,6 +76,9 @@ export function formatEntered(value: number): string {
   return showNumber(value, shopDecimalSign());
 }
 
+/** How the shop that is open writes. */
+export const shopLocale = (): string => shopStyle.locale;
+
 /** Decimal sign of the shop that is open, for sentences that packages write. */
 export function shopDecimalSign(): DecimalSign {
   return decimalSignOf(shopStyle.locale);
@@ -99,6 +102,28 @@ const POINT_NUMBER = /(?<![\p{L}\p{N}.,-])(\d+)\.(\d+)(?![\p{L}\p{N}]|\.\d)/gu;
 /** A sentence that was computed with points, in the shop's way of writing. Not for words that people typed. */
 export function inShopNumbers(sentence: string): string {
   return sentence.replace(POINT_NUMBER, `$1${shopDecimalSign()}$2`);
+}
+
+export const MM_PER_INCH = 25.4;
+const SHOWN_LENGTH_DIGITS = 6;
+
+/** What lengths outside of a machine's panel are read in: those of lenses, materials and coupons. */
+export function shopLengthUnit(): 'mm' | 'in' {
+  return shopStyle.unitSystem === 'inch' ? 'in' : 'mm';
+}
+
+/** A length in the shop's unit; every digit of millimetres, which somebody entered, and inches without the noise of the division. */
+export const inShopLength = (mm: number): number =>
+  shopLengthUnit() === 'in' ? Number((mm / MM_PER_INCH).toPrecision(SHOWN_LENGTH_DIGITS)) : mm;
+
+/** "1.5 mm", or "0.0590551 in" in a shop that works in inches. */
+export function formatLength(mm: number): string {
+  return formatQuantity(inShopLength(mm), shopLengthUnit());
+}
+
+/** "81 × 72 mm", or the same in inches. */
+export function formatLengths(widthMm: number, heightMm: number): string {
+  return formatSize(inShopLength(widthMm), inShopLength(heightMm), shopLengthUnit());
 }
 
 /** "81 × 72 mm". */

@@ -9,6 +9,7 @@ import { NumberField, SelectField, TextField } from '../../../components/field';
 import { Form, messageAt, useSummaryForm } from '../../../components/form';
 import { SkeletonForm } from '../../../components/skeletons';
 import { ProblemError } from '../../../lib/api';
+import { shopLengthUnit } from '../../../lib/format';
 import {
   type Choice,
   type Coupon,
@@ -88,7 +89,7 @@ export function ImportCoupon({ locale, onImported }: ImportCouponProps) {
             />
             <SelectField label="Finish" {...choose} {...form.register('finishId')} error={at('finishId')} options={optionsOf(finishes)} />
             <SelectField label="Effect" {...choose} {...form.register('effectId')} error={at('effectId')} options={optionsOf(effects)} />
-            <NumberField label="Thickness" unit="mm" isOptional {...form.register('thicknessMm')} error={at('thicknessMm')} />
+            <NumberField label="Thickness" unit={shopLengthUnit()} isOptional {...form.register('thicknessMm')} error={at('thicknessMm')} />
             <TextField label="Lot" isOptional {...form.register('lot')} error={at('lot')} />
             <TextField label="What it is for" isOptional {...form.register('title')} error={at('title')} />
           </chakra.div>

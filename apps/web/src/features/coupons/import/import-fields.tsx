@@ -7,6 +7,7 @@ import { messageAt } from '../../../components/form';
 import { Panel as Card } from '../../../components/page';
 import { Segmented } from '../../../components/segmented';
 import { Switch } from '../../../components/switch';
+import { shopLengthUnit } from '../../../lib/format';
 import type { ImportValues } from './import-values';
 
 const NOT_KNOWN = { value: '', label: 'Not known' };
@@ -118,8 +119,8 @@ export function CommonFields({ form, panel }: FieldsProps) {
           ))}
         <SelectField label="Fill" {...form.register('fill')} options={optionsOf(FILL_LABELS)} />
         <SelectField label="Assist" {...form.register('assist')} options={optionsOf(ASSIST_LABELS)} />
-        <NumberField label="Cell" unit="mm" {...form.register('cellMm')} error={messageAt(form.formState.errors, 'cellMm')} />
-        <NumberField label="Gap" unit="mm" {...form.register('gapMm')} error={messageAt(form.formState.errors, 'gapMm')} />
+        <NumberField label="Cell" unit={shopLengthUnit()} {...form.register('cellMm')} error={messageAt(form.formState.errors, 'cellMm')} />
+        <NumberField label="Gap" unit={shopLengthUnit()} {...form.register('gapMm')} error={messageAt(form.formState.errors, 'gapMm')} />
       </chakra.div>
     </Card>
   );

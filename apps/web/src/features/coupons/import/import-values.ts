@@ -45,9 +45,9 @@ export const emptyImport = (): ImportValues => ({
 });
 
 const RULES = {
-  cellMm: { what: 'The side of a cell', unit: 'mm', least: 1, most: 30 },
-  gapMm: { what: 'The gap between cells', unit: 'mm', least: 0.3, most: 10 },
-  thicknessMm: { what: 'The thickness', unit: 'mm', least: 0.001, most: 1000 },
+  cellMm: { what: 'The side of a cell', unit: 'mm', least: 1, most: 30, isShopLength: true },
+  gapMm: { what: 'The gap between cells', unit: 'mm', least: 0.3, most: 10, isShopLength: true },
+  thicknessMm: { what: 'The thickness', unit: 'mm', least: 0.001, most: 1000, isShopLength: true },
   rows: { what: 'The number of rows', unit: '', least: 1, most: 26, isWhole: true },
   columns: { what: 'The number of columns', unit: '', least: 1, most: 26, isWhole: true },
 } as const satisfies Record<string, NumberRule>;

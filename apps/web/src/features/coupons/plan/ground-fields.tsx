@@ -2,6 +2,7 @@ import { chakra } from '@chakra-ui/react';
 import type { UseFormReturn } from 'react-hook-form';
 import { NumberField, SelectField, TextField } from '../../../components/field';
 import { messageAt } from '../../../components/form';
+import { shopLengthUnit } from '../../../lib/format';
 import type { Choice, Machine, MachineLens, ShopCaution } from '../coupons.api';
 import { NeverMarked } from './never-marked';
 import type { PlanValues } from './plan-values';
@@ -71,7 +72,7 @@ export function GroundFields({ form, choices, never }: GroundFieldsProps) {
           options={optionsOf(choices.effects)}
         />
       </chakra.div>
-      <NumberField label="Thickness" unit="mm" isOptional {...form.register('thicknessMm')} error={at('thicknessMm')} />
+      <NumberField label="Thickness" unit={shopLengthUnit()} isOptional {...form.register('thicknessMm')} error={at('thicknessMm')} />
       <TextField label="Lot" isOptional {...form.register('lot')} error={at('lot')} />
       <chakra.div gridColumn="1 / -1">
         <TextField label="What it is for" isOptional {...form.register('title')} error={at('title')} />

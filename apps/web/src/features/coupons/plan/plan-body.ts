@@ -18,9 +18,9 @@ type Factor = PlanBody['columns'];
 type Typed = NonNullable<PlanBody['labelStep']>;
 
 const RULES = {
-  cellMm: { what: 'The side of a cell', unit: 'mm', least: 1, most: 30 },
-  gapMm: { what: 'The gap between cells', unit: 'mm', least: 0.3, most: 10 },
-  thicknessMm: { what: 'The thickness', unit: 'mm', least: 0.001, most: 1000 },
+  cellMm: { what: 'The side of a cell', unit: 'mm', least: 1, most: 30, isShopLength: true },
+  gapMm: { what: 'The gap between cells', unit: 'mm', least: 0.3, most: 10, isShopLength: true },
+  thicknessMm: { what: 'The thickness', unit: 'mm', least: 0.001, most: 1000, isShopLength: true },
   doseCautionJPerMm2: { what: 'The dose', unit: 'J/mm²', least: 1e-6, most: 1e6 },
   count: { what: 'The number of levels', unit: '', least: 1, most: 26, isWhole: true },
 } as const satisfies Record<string, NumberRule>;

@@ -222,6 +222,6 @@ function placeOf(preview: CouponPreview | undefined, chosen: string | undefined)
 }
 
 function sizeOf(text: string, locale: string, usual: number): number {
-  const read = readNumber(text, { what: 'The size', unit: 'mm', least: 0.3, most: 30 }, locale);
+  const read = readNumber(text, { what: 'The size', unit: 'mm', least: 0.3, most: 30, isShopLength: true }, locale);
   return 'value' in read ? read.value : usual;
 }

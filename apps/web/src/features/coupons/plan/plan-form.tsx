@@ -9,6 +9,7 @@ import { Panel as Card } from '../../../components/page';
 import { Segmented } from '../../../components/segmented';
 import { SkeletonForm } from '../../../components/skeletons';
 import { Switch } from '../../../components/switch';
+import { shopLengthUnit } from '../../../lib/format';
 import type { CouponPreview, ShopCaution } from '../coupons.api';
 import { FactorFields } from './factor-fields';
 import { type GroundChoices, GroundFields } from './ground-fields';
@@ -88,8 +89,8 @@ function PlateFields({ form }: { form: UseFormReturn<PlanValues> }) {
     <>
       <Card p="4" display="grid" gap="3" aria-label="Plate">
         <chakra.div display="grid" gridTemplateColumns="repeat(2, minmax(0, 1fr))" gap="2" rowGap="3" alignItems="start">
-          <NumberField label="Cell" unit="mm" {...form.register('cellMm')} error={at('cellMm')} />
-          <NumberField label="Gap" unit="mm" {...form.register('gapMm')} error={at('gapMm')} />
+          <NumberField label="Cell" unit={shopLengthUnit()} {...form.register('cellMm')} error={at('cellMm')} />
+          <NumberField label="Gap" unit={shopLengthUnit()} {...form.register('gapMm')} error={at('gapMm')} />
         </chakra.div>
         <div>
           <chakra.div fontWeight="semibold" fontSize="sm" lineHeight="sm" mb="1">

@@ -10,7 +10,7 @@ import { Plate } from '../../../components/plate/plate';
 import type { PlateCells } from '../../../components/plate/plate-types';
 import { type PlateFactor, PlateWithLevels } from '../../../components/plate/plate-with-levels';
 import { responseScale } from '../../../components/plate/response-scale';
-import { asSentence, formatEntered, formatNumber, formatSize, inShopNumbers } from '../../../lib/format';
+import { asSentence, formatEntered, formatLengths, formatNumber, inShopNumbers } from '../../../lib/format';
 import { basisWords, headOverheadsOf, timeText, timeWithError } from '../../../lib/time-words';
 import type { CouponPreview } from '../coupons.api';
 
@@ -111,7 +111,7 @@ export function PlanFacts({ preview, children }: { preview: CouponPreview; child
       >
         {totalS === null ? 'not known' : timeWithError({ totalS, errorS })}
       </Fact>
-      <Fact label="Plate needed">{formatSize(Math.ceil(plate.widthMm), Math.ceil(plate.heightMm), 'mm')}</Fact>
+      <Fact label="Plate needed">{formatLengths(Math.ceil(plate.widthMm), Math.ceil(plate.heightMm))}</Fact>
       <chakra.p flexBasis="full" order="3" fontSize="sm" lineHeight="sm" color="fg.muted">
         {BASIS_WORDS[powerBasis]}
         {spotUm !== null && `, spot ${formatNumber(spotUm, { decimals: 0 })} µm`}. Time{' '}

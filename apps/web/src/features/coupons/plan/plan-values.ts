@@ -7,8 +7,8 @@ import {
   type ParameterKey,
   showValue,
 } from '@proofplate/recipe-model';
-import { formatEntered } from '../../../lib/format';
-import { typedNumber } from '../../../lib/read-number';
+import { formatEntered, shopLengthUnit } from '../../../lib/format';
+import { typedLength, typedNumber } from '../../../lib/read-number';
 import type { Coupon, ParameterSet } from '../coupons.api';
 
 export type FactorValues = { parameter: ParameterKey | ''; from: string; to: string; count: string; spacing: LevelSpacing };
@@ -59,8 +59,8 @@ export function emptyPlan(): PlanValues {
       hasLabelStep: true,
       isRandom: true,
       runOrderSeed: newSeed(),
-      cellMm: '5',
-      gapMm: formatEntered(1.2),
+      cellMm: shopLengthUnit() === 'in' ? formatEntered(0.2) : '5',
+      gapMm: formatEntered(shopLengthUnit() === 'in' ? 0.05 : 1.2),
       fillDrawnBy: 'machine',
       doseCautionJPerMm2: '',
     },
@@ -92,7 +92,7 @@ export function planFrom(coupon: Coupon, panel: Panel, locale: string): PlanValu
     machineId: coupon.machine.id,
     lensId: coupon.lens.id,
     lot: coupon.lot,
-    thicknessMm: typedNumber(coupon.thicknessMm, locale),
+    thicknessMm: typedLength(coupon.thicknessMm, locale),
   };
   if (grid === undefined) return { ...empty, ...keys, ...place, title: coupon.title };
   const factor = (stored: typeof grid.rowFactor, usual: FactorValues): FactorValues => {
@@ -113,8 +113,8 @@ export function planFrom(coupon: Coupon, panel: Panel, locale: string): PlanValu
     labelStep: grid.labelStep === null ? empty.labelStep : settingFrom(grid.labelStep, panel, locale),
     hasLabelStep: grid.labelStep !== null,
     isRandom: grid.runOrderSeed !== null,
-    cellMm: typedNumber(grid.cellMm, locale),
-    gapMm: typedNumber(grid.gapMm, locale),
+    cellMm: typedLength(grid.cellMm, locale),
+    gapMm: typedLength(grid.gapMm, locale),
     fillDrawnBy: grid.fillDrawnBy,
   };
 }

@@ -8,7 +8,7 @@ import { type Coupon, planConfirmation } from '../coupons.api';
 type ProofValues = { count: string; lot: string; thicknessMm: string; storedAt: string };
 
 const COUNT: NumberRule = { what: 'The number of cells', unit: '', least: 1, most: 60, isWhole: true };
-const THICKNESS: NumberRule = { what: 'The thickness', unit: 'mm', least: 0.001, most: 1000 };
+const THICKNESS: NumberRule = { what: 'The thickness', unit: 'mm', least: 0.001, most: 1000, isShopLength: true };
 const LABELS = { count: 'Equal cells', lot: 'Lot', thicknessMm: 'Thickness', storedAt: 'Kept at' };
 /** What a shop asks for unless it says otherwise, and one to spare. */
 const USUAL_COUNT = '5';
@@ -43,7 +43,7 @@ export function ProveDraft({ revisionId, locale, onPlanned }: ProveDraftProps) {
       />
       <NumberField
         label={LABELS.thicknessMm}
-        unit="mm"
+        rule={THICKNESS}
         isOptional
         {...form.register('thicknessMm', { validate: (text) => messageOf(readOptionalNumber(text, THICKNESS, locale)) })}
         error={at('thicknessMm')}

@@ -10,7 +10,7 @@ import { SettingCard } from '../../../components/setting-card';
 import { revisionNumbers } from '../../../components/setting-numbers';
 import { besidePanel, settingRows, stepTitle } from '../../../components/setting-rows';
 import { SignatureLine } from '../../../components/signature-line';
-import { formatDate, formatEntered, formatTime } from '../../../lib/format';
+import { formatDate, formatNumber, formatTime, inShopLength, shopLengthUnit } from '../../../lib/format';
 import { settingTick, useKeptTicks } from '../../../lib/kept-ticks';
 import { paths } from '../../../lib/paths';
 import { decimalSignOf } from '../../../lib/read-number';
@@ -85,7 +85,9 @@ function SettingCards({ answer, ticks, onTick }: { answer: FinderAnswer } & Tick
 function Beside({ answer: { steps, panel, focus } }: { answer: FinderAnswer }) {
   const { shop } = useSession();
   const focusFacts = [
-    ...(focus?.workingDistanceMm == null ? [] : [{ label: 'Working distance', value: formatEntered(focus.workingDistanceMm), unit: 'mm' }]),
+    ...(focus?.workingDistanceMm == null
+      ? []
+      : [{ label: 'Working distance', value: formatNumber(inShopLength(focus.workingDistanceMm)), unit: shopLengthUnit() }]),
     ...(focus === null || focus.focusMethod === '' ? [] : [{ label: 'Focus found by', value: focus.focusMethod }]),
   ];
   return (

@@ -8,7 +8,7 @@ import { ReadProblem } from '../../../components/read-problem';
 import { SkeletonTable } from '../../../components/skeletons';
 import { useStatusLine } from '../../../components/status-line';
 import { useArchiving } from '../../../components/use-archiving';
-import { formatQuantity, formatSize } from '../../../lib/format';
+import { formatLength, formatLengths } from '../../../lib/format';
 import { LensForm } from '../forms/lens-form';
 import { type Lens, setLensArchived, useLenses } from '../lenses.api';
 
@@ -66,8 +66,8 @@ type ColumnOptions = { onEdit: (lens: Lens) => void; onArchive: (lens: Lens, isA
 function columns({ onEdit, onArchive }: ColumnOptions): readonly Column<Lens>[] {
   return [
     { key: 'name', header: 'Lens', onPhone: 'title', cell: ({ name }) => <b>{name}</b> },
-    { key: 'focal', header: 'Focal length', align: 'end', cell: ({ focalLengthMm }) => formatQuantity(focalLengthMm, 'mm') },
-    { key: 'field', header: 'Marking field', align: 'end', cell: ({ fieldSizeMm }) => formatSize(fieldSizeMm, fieldSizeMm, 'mm') },
+    { key: 'focal', header: 'Focal length', align: 'end', cell: ({ focalLengthMm }) => formatLength(focalLengthMm) },
+    { key: 'field', header: 'Marking field', align: 'end', cell: ({ fieldSizeMm }) => formatLengths(fieldSizeMm, fieldSizeMm) },
     { key: 'notes', header: 'Notes', cell: ({ notes }) => notes },
     {
       key: 'acts',

@@ -1,7 +1,7 @@
 import { Button } from '../../../components/button';
 import { NumberField, TextAreaField, TextField } from '../../../components/field';
 import { Form, useSummaryForm } from '../../../components/form';
-import { messageOf, type NumberRule, readNumber, typedNumber } from '../../../lib/read-number';
+import { messageOf, type NumberRule, readNumber, typedLength } from '../../../lib/read-number';
 import { useSession } from '../../../lib/session';
 import { changeLens, createLens, type Lens, type LensBody } from '../lenses.api';
 
@@ -13,8 +13,8 @@ const LABELS: Readonly<Record<keyof Values, string>> = {
   fieldSizeMm: 'Side of the marking field',
   notes: 'Notes',
 };
-const FOCAL: NumberRule = { what: 'The focal length', unit: 'mm', least: 10, most: 2000 };
-const FIELD: NumberRule = { what: 'The field size', unit: 'mm', least: 1, most: 3000 };
+const FOCAL: NumberRule = { what: 'The focal length', unit: 'mm', least: 10, most: 2000, isShopLength: true };
+const FIELD: NumberRule = { what: 'The field size', unit: 'mm', least: 1, most: 3000, isShopLength: true };
 
 /** A lens; without one, a new lens. */
 export function LensForm({ lens, onDone }: { lens?: Lens | undefined; onDone: () => void }) {
@@ -22,8 +22,8 @@ export function LensForm({ lens, onDone }: { lens?: Lens | undefined; onDone: ()
   const form = useSummaryForm<Values>({
     defaultValues: {
       name: lens?.name ?? '',
-      focalLengthMm: typedNumber(lens?.focalLengthMm, locale),
-      fieldSizeMm: typedNumber(lens?.fieldSizeMm, locale),
+      focalLengthMm: typedLength(lens?.focalLengthMm, locale),
+      fieldSizeMm: typedLength(lens?.fieldSizeMm, locale),
       notes: lens?.notes ?? '',
     },
   });
@@ -46,13 +46,13 @@ export function LensForm({ lens, onDone }: { lens?: Lens | undefined; onDone: ()
       />
       <NumberField
         label={LABELS.focalLengthMm}
-        unit="mm"
+        rule={FOCAL}
         error={errors.focalLengthMm?.message}
         {...form.register('focalLengthMm', { validate: (text) => messageOf(readNumber(text, FOCAL, locale)) })}
       />
       <NumberField
         label={LABELS.fieldSizeMm}
-        unit="mm"
+        rule={FIELD}
         help="Of the square that the lens can mark."
         error={errors.fieldSizeMm?.message}
         {...form.register('fieldSizeMm', { validate: (text) => messageOf(readNumber(text, FIELD, locale)) })}

@@ -7,7 +7,7 @@ import { PlusIcon } from '../../../components/icons';
 import { ReadProblem } from '../../../components/read-problem';
 import { SkeletonTable } from '../../../components/skeletons';
 import { useStatusLine } from '../../../components/status-line';
-import { formatDay, formatQuantity } from '../../../lib/format';
+import { formatDay, formatLength, formatQuantity } from '../../../lib/format';
 import { AddMachineLensForm, ChangeMachineLensForm } from '../forms/machine-lens-form';
 import { type LensChoice, type Machine, type MachineLens, useMachineLenses } from '../machines.api';
 import { LensSpots } from './lens-spots';
@@ -78,7 +78,7 @@ function columns(onEdit: (pair: MachineLens) => void): readonly Column<MachineLe
         <chakra.div py="1.5">
           <b>{lensName}</b>
           <chakra.span display="block" color="fg.muted" fontWeight="normal">
-            {formatQuantity(focalLengthMm, 'mm')}
+            {formatLength(focalLengthMm)}
             {isMounted && ', mounted now'}
           </chakra.span>
         </chakra.div>
@@ -88,7 +88,7 @@ function columns(onEdit: (pair: MachineLens) => void): readonly Column<MachineLe
       key: 'distance',
       header: 'Working distance',
       align: 'end',
-      cell: ({ workingDistanceMm }) => (workingDistanceMm === null ? <Missing>not set</Missing> : formatQuantity(workingDistanceMm, 'mm')),
+      cell: ({ workingDistanceMm }) => (workingDistanceMm === null ? <Missing>not set</Missing> : formatLength(workingDistanceMm)),
     },
     {
       key: 'focus',

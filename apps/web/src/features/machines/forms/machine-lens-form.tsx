@@ -2,7 +2,7 @@ import { type UseFormReturn, useWatch } from 'react-hook-form';
 import { Button } from '../../../components/button';
 import { NumberField, SelectField, TextField } from '../../../components/field';
 import { Form, useSummaryForm } from '../../../components/form';
-import { messageOf, type NumberRule, readOptionalNumber, typedNumber } from '../../../lib/read-number';
+import { messageOf, type NumberRule, readOptionalNumber, typedLength, typedNumber } from '../../../lib/read-number';
 import { useSession } from '../../../lib/session';
 import { addMachineLens, changeMachineLens, type LensChoice, type MachineLens, type MachineLensBody } from '../machines.api';
 
@@ -23,7 +23,7 @@ const LABELS: Readonly<Record<keyof Values, string>> = {
   spotMethod: 'How the spot was measured',
   spotMeasuredOn: 'Measured on',
 };
-const DISTANCE: NumberRule = { what: 'The working distance', unit: 'mm', least: 1, most: 3000 };
+const DISTANCE: NumberRule = { what: 'The working distance', unit: 'mm', least: 1, most: 3000, isShopLength: true };
 const SPOT: NumberRule = { what: 'The measured spot', unit: 'µm', least: 0.5, most: 5000 };
 const EMPTY: Values = { lensId: '', workingDistanceMm: '', focusMethod: '', measuredSpotUm: '', spotMethod: '', spotMeasuredOn: '' };
 
@@ -84,7 +84,7 @@ function PairFields({ form }: { form: UseFormReturn<Values> }) {
     <>
       <NumberField
         label={LABELS.workingDistanceMm}
-        unit="mm"
+        rule={DISTANCE}
         isOptional
         help="From the lens to the work at focus."
         error={errors.workingDistanceMm?.message}
@@ -99,7 +99,7 @@ function PairFields({ form }: { form: UseFormReturn<Values> }) {
       />
       <NumberField
         label={LABELS.measuredSpotUm}
-        unit="µm"
+        rule={SPOT}
         isOptional
         help="Diameter where the intensity is 1/e² of the middle. Leave it out if nobody measured it."
         error={errors.measuredSpotUm?.message}
@@ -129,7 +129,7 @@ function PairFields({ form }: { form: UseFormReturn<Values> }) {
 function valuesOf(pair: MachineLens, locale: string): Values {
   return {
     lensId: pair.lensId,
-    workingDistanceMm: typedNumber(pair.workingDistanceMm, locale),
+    workingDistanceMm: typedLength(pair.workingDistanceMm, locale),
     focusMethod: pair.focusMethod,
     measuredSpotUm: typedNumber(pair.measuredSpotUm, locale),
     spotMethod: pair.spotMethod ?? '',

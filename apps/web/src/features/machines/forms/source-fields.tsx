@@ -76,6 +76,7 @@ function SourceNumberField({ form, rule }: FormProps & { rule: SourceNumberRule 
   return (
     <NumberField
       label={rule.label}
+      rule={rule}
       {...(rule.unit === '' ? {} : { unit: formatUnit(rule.unit) })}
       {...(rule.help === undefined ? {} : { help: rule.help })}
       isOptional={rule.isNeeded !== true}

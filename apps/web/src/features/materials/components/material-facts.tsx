@@ -2,7 +2,7 @@ import { chakra } from '@chakra-ui/react';
 import { Fragment } from 'react';
 import { type Fact, FactList } from '../../../components/fact-list';
 import { Panel } from '../../../components/page';
-import { formatNumber, formatQuantity } from '../../../lib/format';
+import { formatLength, formatNumber } from '../../../lib/format';
 import { useSession } from '../../../lib/session';
 import { PROPERTY_RULES } from '../forms/material-values';
 import type { Material } from '../materials.api';
@@ -52,6 +52,6 @@ function plainFacts({ familyLabel, grade, standardDesignation, supplier, thickne
     ...(grade === '' ? [] : [{ label: 'Grade or alloy', value: grade }]),
     ...(standardDesignation === '' ? [] : [{ label: 'Designation', value: standardDesignation }]),
     ...(supplier === '' ? [] : [{ label: 'Supplier', value: supplier }]),
-    ...(thicknessMm === null ? [] : [{ label: 'Usual thickness', value: formatQuantity(thicknessMm, 'mm') }]),
+    ...(thicknessMm === null ? [] : [{ label: 'Usual thickness', value: formatLength(thicknessMm) }]),
   ];
 }

@@ -1,7 +1,7 @@
 import { chakra } from '@chakra-ui/react';
 import { type Column, DataTable } from '../../../components/data-table';
 import { TextLink } from '../../../components/text-link';
-import { formatQuantity } from '../../../lib/format';
+import { formatLength } from '../../../lib/format';
 import { paths } from '../../../lib/paths';
 import type { Material } from '../materials.api';
 import { CautionSummary } from './caution-summary';
@@ -31,7 +31,7 @@ const COLUMNS: readonly Column<Material>[] = [
     key: 'thickness',
     header: 'Thickness',
     align: 'end',
-    cell: ({ thicknessMm }) => (thicknessMm === null ? <NotEntered /> : formatQuantity(thicknessMm, 'mm')),
+    cell: ({ thicknessMm }) => (thicknessMm === null ? <NotEntered /> : formatLength(thicknessMm)),
   },
   { key: 'cautions', header: 'Cautions', width: '40%', cell: ({ cautions }) => <CautionSummary cautions={cautions} /> },
 ];

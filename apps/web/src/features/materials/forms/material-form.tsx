@@ -59,7 +59,7 @@ export function MaterialForm({ material, onSubmit }: MaterialFormProps) {
       <TextField label="Supplier" isOptional error={errors.supplier?.message} {...form.register('supplier')} />
       <NumberField
         label="Usual thickness"
-        unit="mm"
+        rule={THICKNESS}
         isOptional
         error={errors.thicknessMm?.message}
         {...form.register('thicknessMm', { validate: (text) => messageOf(readOptionalNumber(text, THICKNESS, locale)) })}

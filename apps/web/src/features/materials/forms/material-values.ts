@@ -1,5 +1,5 @@
 import { MATERIAL_FAMILIES } from '@proofplate/recipe-model';
-import { type NumberRule, readOptionalNumber, typedNumber } from '../../../lib/read-number';
+import { type NumberRule, readOptionalNumber, typedLength, typedNumber } from '../../../lib/read-number';
 import type { Material, MaterialBody, PropertyKey } from '../materials.api';
 
 /** The form as it is typed: everything is text. Names follow the request. */
@@ -14,7 +14,7 @@ export type MaterialValues = {
   notes: string;
 };
 
-export const THICKNESS: NumberRule = { what: 'The thickness', unit: 'mm', least: 0.001, most: 1000 };
+export const THICKNESS: NumberRule = { what: 'The thickness', unit: 'mm', least: 0.001, most: 1000, isShopLength: true };
 export const PROPERTY_RULES: readonly { key: PropertyKey; label: string; rule: NumberRule }[] = [
   {
     key: 'thermalConductivityWPerMK',
@@ -36,7 +36,7 @@ export function materialValues(material: Material | undefined, locale: string): 
     grade: material?.grade ?? '',
     standardDesignation: material?.standardDesignation ?? '',
     supplier: material?.supplier ?? '',
-    thicknessMm: typedNumber(material?.thicknessMm, locale),
+    thicknessMm: typedLength(material?.thicknessMm, locale),
     properties: {
       thermalConductivityWPerMK: property('thermalConductivityWPerMK'),
       densityKgPerM3: property('densityKgPerM3'),

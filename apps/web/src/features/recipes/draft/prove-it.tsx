@@ -17,7 +17,7 @@ const LABELS = {
   storedAt: 'Where it will be kept',
 };
 const COUNT = { what: 'The number of cells', unit: '', least: 1, most: 60, isWhole: true };
-const THICKNESS = { what: 'The thickness', unit: 'mm', least: 0.001, most: 1000 };
+const THICKNESS = { what: 'The thickness', unit: 'mm', least: 0.001, most: 1000, isShopLength: true };
 const USUAL_COUNT = '5';
 
 export type ProveItDialogProps = {
@@ -77,7 +77,7 @@ export function ProveItDialog({ revision, acknowledged, flush, onClose }: ProveI
         <TextField label={LABELS.lot} isOptional help="Another lot proves more." error={errors.lot?.message} {...form.register('lot')} />
         <NumberField
           label={LABELS.thicknessMm}
-          unit="mm"
+          rule={THICKNESS}
           isOptional
           error={errors.thicknessMm?.message}
           {...form.register('thicknessMm', { validate: (text) => text.trim() === '' || problemOf(text, THICKNESS) })}

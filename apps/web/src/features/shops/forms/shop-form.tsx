@@ -28,7 +28,7 @@ export function ShopForm({ shop }: { shop: Shop }) {
       />
       <SelectField
         label={LABELS.unitSystem}
-        help="What pages show first. Stored settings stay as they were typed."
+        help="Lengths of lenses, materials and coupons are typed and read in it; a length with its unit (“25.4 mm”) is taken in either. Settings stay in the units of each machine’s panel; spots in µm, optics of a machine, limits of use and marking time in mm. Round parts have a choice of their own."
         options={UNIT_SYSTEM_OPTIONS}
         error={errors.unitSystem?.message}
         {...form.register('unitSystem')}

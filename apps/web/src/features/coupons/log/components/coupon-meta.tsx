@@ -1,7 +1,7 @@
 import { chakra } from '@chakra-ui/react';
 import { StateMark } from '../../../../components/state-mark';
 import { TextLink } from '../../../../components/text-link';
-import { formatCount, formatDate, formatDay, formatQuantity, formatTime } from '../../../../lib/format';
+import { formatCount, formatDate, formatDay, formatLength, formatTime } from '../../../../lib/format';
 import { paths } from '../../../../lib/paths';
 import { couponMark } from '../../coupon-words';
 import type { Coupon } from '../../coupons.api';
@@ -13,10 +13,7 @@ const Fact = chakra('span', { base: { display: { base: 'none', sm: 'inline' } } 
 export function CouponMeta({ coupon, inspection, timeZone }: { coupon: Coupon; inspection: Inspection | undefined; timeZone: string }) {
   const { shape, word } = couponMark(coupon.state);
   const { marked, profile, machine, lens, calibration, confirms } = coupon;
-  const ground = [
-    coupon.lot === '' ? '' : `Lot ${coupon.lot}`,
-    coupon.thicknessMm === null ? '' : formatQuantity(coupon.thicknessMm, 'mm'),
-  ];
+  const ground = [coupon.lot === '' ? '' : `Lot ${coupon.lot}`, coupon.thicknessMm === null ? '' : formatLength(coupon.thicknessMm)];
   return (
     <>
       <StateMark state={shape}>{word}</StateMark>
