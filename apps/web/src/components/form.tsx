@@ -37,6 +37,8 @@ export function Form<T extends FieldValues>({ form, labels, onSubmit, explain, u
   const [problem, setProblem] = useState<ProblemError>();
   const { summary, notice, focusNext } = useRefusalFocus();
   const idempotencyKey = useIdempotencyKey();
+  // Read at every render: the form works out only what it was asked for before.
+  const { isDirty } = form.formState;
   // The names of `labels` are the form's own fields.
   const names = Object.keys(labels) as FieldPath<T>[];
 
@@ -59,7 +61,7 @@ export function Form<T extends FieldValues>({ form, labels, onSubmit, explain, u
       <ErrorSummary ref={summary} entries={form.formState.isSubmitted ? summaryEntries(form.formState.errors, labels) : []} />
       {problem !== undefined && (
         <div ref={notice} tabIndex={-1}>
-          <FormProblem problem={problem} explanation={explain?.(problem)} unanswered={unanswered} />
+          <FormProblem problem={problem} explanation={explain?.(problem)} unanswered={unanswered} isTyped={isDirty} />
         </div>
       )}
       {children}
@@ -90,12 +92,14 @@ type FormProblemProps = {
   problem: ProblemError;
   explanation: { what: string; todo?: ReactNode } | undefined;
   unanswered: UnansweredWords;
+  /** Something was typed or chosen that could be lost. */
+  isTyped: boolean;
 };
 
-function FormProblem({ problem, explanation, unanswered }: FormProblemProps) {
+function FormProblem({ problem, explanation, unanswered, isTyped }: FormProblemProps) {
   if (problem.status === 0) return <ProblemNotice {...unanswered} />;
   const { what, todo } = explanation ?? { what: `${problem.title}.`, todo: problem.detail };
-  return <ProblemNotice what={what} safe="What you typed is still here." todo={todo} />;
+  return <ProblemNotice what={what} safe={isTyped ? 'What you typed is still here.' : 'Nothing was changed.'} todo={todo} />;
 }
 
 function summaryEntries(errors: FieldErrors, labels: Readonly<Record<string, string>>): SummaryEntry[] {

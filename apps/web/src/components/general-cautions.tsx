@@ -30,10 +30,11 @@ export function GeneralCautions({ cautions, lead = 'With every job' }: GeneralCa
         <chakra.span lineHeight="none">
           <CautionIcon size={20} />
         </chakra.span>
-        <span>
+        {/* On a phone two lines of them keep the setting near; the press that tells why shows each one whole. */}
+        <chakra.span lineClamp={{ base: 2, sm: 'none' }}>
           <b>{lead}: </b>
           {cautions.map(({ subject }) => asSentence(subject)).join(' ')}
-        </span>
+        </chakra.span>
         <chakra.span pl="4" color="brand.fg" textDecoration="underline">
           Why
         </chakra.span>

@@ -48,6 +48,17 @@ describe('the setting card', () => {
     expect(screen.getByText('1 of 3 set')).toBeVisible();
   });
 
+  it('keeps the reason of a short note behind a press', async () => {
+    const reason = 'No calibration fits. Add a power calibration to the machine.';
+    const power = { key: 'power', label: 'Power', note: 'watts not known', noteReason: reason, value: '30', unit: '%' };
+    const { user } = renderPiece(<SettingCard code="R-0031" revision={3} state="draft" caption="Draft" rows={[power]} />);
+    const note = await screen.findByText('watts not known');
+    expect(note.closest('details')).not.toHaveAttribute('open');
+    await user.click(note);
+    expect(note.closest('details')).toHaveAttribute('open');
+    expect(screen.getByText(reason)).toBeVisible();
+  });
+
   it('has nothing to tick where nobody dials it', async () => {
     renderPiece(<SettingCard code="R-0031" revision={3} state="draft" caption="Draft" rows={rows} />);
     const card = await screen.findByRole('region', { name: 'Setting of R-0031 revision 3' });

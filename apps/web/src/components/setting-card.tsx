@@ -3,15 +3,14 @@ import type { ReactNode } from 'react';
 import { TickIcon } from './icons';
 import { type MarkState, StateMark } from './state-mark';
 
-/** So many rows keep numerals that are read from a step away; more rows get smaller ones, never below 48 px. */
-const ROWS_AT_FULL_SIZE = 8;
-
 export type SettingRow = {
   key: string;
   /** As on the machine's panel. */
   label: string;
   /** Physical value or hint under the label. */
   note?: ReactNode;
+  /** Why the note says no more; behind a press, so that the row stays a row. */
+  noteReason?: string;
   /** As typed at the panel, true minus and the panel's decimals. */
   value: string;
   unit?: string;
@@ -35,7 +34,6 @@ export type SettingCardProps = {
 export function SettingCard({ code, revision, state, caption, rows, ticked = NONE, onTick }: SettingCardProps) {
   const next = onTick === undefined ? undefined : rows.find(({ key }) => !ticked.has(key))?.key;
   const revisionWords = revision === null ? 'draft' : `revision ${revision}`;
-  const isLarge = rows.length <= ROWS_AT_FULL_SIZE;
   return (
     <chakra.section
       aria-label={`Setting of ${code} ${revisionWords}`}
@@ -68,15 +66,7 @@ export function SettingCard({ code, revision, state, caption, rows, ticked = NON
       </Flex>
       <chakra.ol mt="2">
         {rows.map((row, index) => (
-          <Row
-            key={row.key}
-            row={row}
-            order={index + 1}
-            isNext={row.key === next}
-            isTicked={ticked.has(row.key)}
-            isLarge={isLarge}
-            onTick={onTick}
-          />
+          <Row key={row.key} row={row} order={index + 1} isNext={row.key === next} isTicked={ticked.has(row.key)} onTick={onTick} />
         ))}
       </chakra.ol>
     </chakra.section>
@@ -90,20 +80,18 @@ type RowProps = {
   order: number;
   isNext: boolean;
   isTicked: boolean;
-  isLarge: boolean;
   onTick: SettingCardProps['onTick'];
 };
 
-function Row({ row, order, isNext, isTicked, isLarge, onTick }: RowProps) {
+function Row({ row, order, isNext, isTicked, onTick }: RowProps) {
   return (
     <chakra.li
       display="grid"
-      gridTemplateColumns={{
-        base: onTick === undefined ? '22px minmax(0, 1fr) auto 58px' : '22px minmax(0, 1fr) auto 58px 44px',
-        sm: onTick === undefined ? '28px minmax(0, 1fr) auto 84px' : '28px minmax(0, 1fr) auto 84px 64px',
-      }}
+      gridTemplateColumns={
+        onTick === undefined ? '28px minmax(0, 1fr)' : { base: '22px minmax(0, 1fr) 44px', sm: '28px minmax(0, 1fr) 64px' }
+      }
       alignItems="center"
-      minHeight={{ base: 'glove', sm: isLarge ? '72px' : 'glove' }}
+      minHeight={{ base: 'glove', sm: '72px' }}
       borderTop="hairline"
       mx={{ base: '-4', sm: '-7' }}
       px={{ base: '4', sm: '7' }}
@@ -113,29 +101,49 @@ function Row({ row, order, isNext, isTicked, isLarge, onTick }: RowProps) {
       <chakra.span color="fg.subtle" fontSize="sm" aria-hidden="true">
         {order}
       </chakra.span>
-      <chakra.span fontSize={{ base: 'lg', sm: 'xl' }} lineHeight="22px" pr="2">
-        {row.label}
-        {row.note !== undefined && (
-          <chakra.span display="block" fontSize="sm" lineHeight="18px" color="fg.muted">
-            {row.note}
+      {/* The value keeps its size and takes a line of its own where the label leaves too little room: on a narrow phone, in large text. */}
+      <chakra.span display="flex" flexWrap="wrap" alignItems="center" columnGap="2" py="1">
+        <chakra.span flex="1 1 0" minWidth="min-content" fontSize={{ base: 'lg', sm: 'xl' }} lineHeight="1.15">
+          {row.label}
+          {row.note !== undefined && <Note note={row.note} reason={row.noteReason} />}
+        </chakra.span>
+        <chakra.span display="flex" alignItems="center" justifyContent="flex-end" ml="auto" maxWidth="full">
+          <chakra.span whiteSpace="nowrap" fontSize={NUMERAL} lineHeight="none" fontWeight="semibold" letterSpacing="tight">
+            {row.value}
           </chakra.span>
-        )}
-      </chakra.span>
-      <chakra.span
-        textAlign="right"
-        whiteSpace="nowrap"
-        fontSize={{ base: 'numeralMany', sm: isLarge ? '7xl' : 'numeralMany' }}
-        lineHeight="none"
-        fontWeight="semibold"
-        letterSpacing="tight"
-      >
-        {row.value}
-      </chakra.span>
-      <chakra.span pl={{ base: '1.5', sm: '2.5' }} fontSize={{ base: 'lg', sm: 'xl' }} lineHeight="22px" color="fg.muted">
-        {row.unit}
+          <chakra.span
+            pl={{ base: '1.5', sm: '2.5' }}
+            minWidth={{ base: '58px', sm: '84px' }}
+            fontSize={{ base: 'lg', sm: 'xl' }}
+            lineHeight="22px"
+            color="fg.muted"
+          >
+            {row.unit}
+          </chakra.span>
+        </chakra.span>
       </chakra.span>
       {onTick !== undefined && <Tick label={`${row.label} is set`} isTicked={isTicked} onChange={(isOn) => onTick(row.key, isOn)} />}
     </chakra.li>
+  );
+}
+
+/** 64 px, read from a step away; text of double size grows no further than a phone is wide. */
+const NUMERAL = 'min(4rem, max(64px, 17vw))';
+
+function Note({ note, reason }: { note: ReactNode; reason: string | undefined }) {
+  if (reason === undefined)
+    return (
+      <chakra.span display="block" fontSize="sm" lineHeight="sm" color="fg.muted">
+        {note}
+      </chakra.span>
+    );
+  return (
+    <chakra.details fontSize="sm" lineHeight="sm" color="fg.muted">
+      <chakra.summary display="list-item" listStyle="none" py="1" cursor="pointer" textDecoration="underline" textUnderlineOffset="3px">
+        {note}
+      </chakra.summary>
+      {reason}
+    </chakra.details>
   );
 }
 

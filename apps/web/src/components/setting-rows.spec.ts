@@ -48,6 +48,12 @@ describe('settingRows()', () => {
     expect(notes.speedMmPerS).toBeUndefined();
   });
 
+  it('says in a word that the watts are not known, and keeps the reason apart', () => {
+    const power = { watts: null, reason: 'No calibration fits.' };
+    const rows = settingRows({ ...step, parameters: { ...step.parameters, power } }, panel, '.');
+    expect(rows.find(({ key }) => key === 'powerPercent')).toMatchObject({ note: 'watts not known', noteReason: 'No calibration fits.' });
+  });
+
   it('writes the decimal sign of the shop', () => {
     expect(settingRows(step, panel, ',').map(({ value }) => value)).toEqual(['900', '30,0', '0,030', '+0,5']);
   });

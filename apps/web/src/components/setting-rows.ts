@@ -48,6 +48,7 @@ export function settingRows(step: Step, panel: Panel, decimalSign: DecimalSign):
         key: field.parameter,
         label: field.label,
         ...(note === undefined ? {} : { note }),
+        ...(field.parameter === 'powerPercent' && power.watts === null && power.reason !== undefined ? { noteReason: power.reason } : {}),
         value: asPanelShows(shown?.text ?? enteredText(value, decimalSign), field, decimalSign),
         unit: shown?.symbol ?? PANEL_UNITS[value.entered.unit].symbol,
       },
@@ -69,7 +70,7 @@ export function enteredText({ entered }: SetValue, decimalSign: DecimalSign): st
 }
 
 export function powerNote(power: Step['parameters']['power']): string {
-  if (power.watts === null) return `watts not known: ${power.reason ?? 'no reason given'}`;
+  if (power.watts === null) return 'watts not known';
   const watts = formatQuantity(power.watts, 'W', { significantDigits: 3 });
   return power.basis === 'calibration' ? `${watts} at the work` : `about ${watts}, not calibrated`;
 }

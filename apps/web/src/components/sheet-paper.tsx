@@ -27,6 +27,14 @@ export const Paper = chakra('article', {
     lineHeight: '15pt',
     border: 'hairline',
     '@media print': { border: 'none' },
+    // On a narrow screen nothing of it may stand outside: columns come one below the other. What prints stays the page.
+    '@media screen and (max-width: 819px)': {
+      width: 'full',
+      minHeight: '0',
+      p: '4mm',
+      '& [data-fold]': { gridTemplateColumns: 'minmax(0, 1fr)', rowGap: '3mm' },
+      '& > header': { gridTemplateColumns: '26mm minmax(0, 1fr)', rowGap: '3mm' },
+    },
   },
 });
 export const Title = chakra('h2', { base: { fontSize: '12pt', lineHeight: '16pt', borderBottom: '0.4mm solid #000', mb: '0.5mm' } });

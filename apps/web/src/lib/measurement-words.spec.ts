@@ -1,4 +1,4 @@
-import { quantityWords, withSymbol } from './measurement-words';
+import { byMethod, quantityWords, withSymbol } from './measurement-words';
 
 describe('withSymbol()', () => {
   it('puts the symbol behind the label, and says nothing twice', () => {
@@ -7,4 +7,9 @@ describe('withSymbol()', () => {
     expect(withSymbol('Roughness Ra', 'roughness-ra')).toBe('Roughness Ra');
     expect(withSymbol('Depth', 'depth')).toBe('Depth d');
   });
+});
+
+it('says by what or by whom a number was found, with one “by”', () => {
+  expect(byMethod('profilometer')).toBe('by profilometer');
+  expect(byMethod('manual')).toBe('by hand');
 });

@@ -26,6 +26,12 @@ export function methodWord(method: string): string {
   );
 }
 
+/** "by profilometer", "by hand". */
+export function byMethod(method: string): string {
+  const word = methodWord(method);
+  return word.startsWith('by ') ? word : `by ${word}`;
+}
+
 /** Colour numbers to a tenth, contrast to a hundredth. */
 export function decimalsOf(quantity: string): number {
   return quantity === 'contrast' ? 2 : 1;

@@ -1,4 +1,4 @@
-import { screen, waitFor, within } from '@testing-library/react';
+import { fireEvent, screen, waitFor, within } from '@testing-library/react';
 import { StatusLineProvider } from '../components/status-line';
 import { closeSession, openSession } from '../lib/session';
 import { type FakeRequest, fakeServer, problem } from '../testing/fake-server';
@@ -125,6 +125,14 @@ describe('the answer', () => {
     openPage(answered(), '/machine?words=blk');
     expect(await screen.findByRole('button', { name: /effect: white mark/i })).toBeVisible();
     expect(JSON.parse(localStorage.getItem('proofplate.machine-and-lens') ?? '{}')).toMatchObject({ machine: 'bench2', lens: 'f160' });
+  });
+
+  it('folds the sentence to its words on a phone, and opens its slots again by one press', async () => {
+    openPage(answered(), '/machine?material=black');
+    const change = await screen.findByRole('button', { name: 'Change', hidden: true });
+    expect(change.parentElement).toHaveTextContent('On Bench 2 with the F160 lens: black anodised 6061, sealed satin, white mark.');
+    fireEvent.click(change);
+    expect(screen.queryByRole('button', { name: 'Change', hidden: true })).toBeNull();
   });
 
   it('keeps ticks of the card and of the steps over a reload', async () => {

@@ -65,6 +65,8 @@ describe('the sign-in page', () => {
     serve({ 'POST /api/auth/sign-in': lostConnection });
     await signIn();
     expect(await screen.findByText('No answer came from the server.')).toBeVisible();
+    expect(screen.getByText(/^You are not signed in\./)).toBeVisible();
+    expect(screen.queryByText(/Whether it was saved/)).toBeNull();
     expect(screen.getByLabelText('E-mail')).toHaveValue('hanne@tidewater.example');
   });
 

@@ -8,7 +8,18 @@ import type { Session } from '../../lib/session';
 import { type NavigationEntry, navigationFor } from './navigation';
 
 const BrandLink = chakra(Link, {
-  base: { display: 'flex', alignItems: 'center', gap: '2.5', px: '2', fontWeight: 'bold', fontSize: 'lg', color: 'fg', borderRadius: 'md' },
+  base: {
+    display: 'flex',
+    flexShrink: '0',
+    alignItems: 'center',
+    gap: '2.5',
+    px: '2',
+    fontWeight: 'bold',
+    overflowWrap: 'anywhere',
+    fontSize: 'lg',
+    color: 'fg',
+    borderRadius: 'md',
+  },
 });
 
 const EntryLink = chakra(NavLink, {
@@ -16,7 +27,7 @@ const EntryLink = chakra(NavLink, {
     display: 'flex',
     alignItems: 'center',
     gap: '2.5',
-    height: 'control',
+    minHeight: 'control',
     px: '2',
     borderRadius: 'md',
     color: 'fg',
@@ -45,7 +56,9 @@ const FindButton = chakra('button', {
     display: 'flex',
     alignItems: 'center',
     gap: '2',
-    height: 'control',
+    minHeight: 'control',
+    flexShrink: '0',
+    flexWrap: 'wrap',
     width: 'full',
     px: '2',
     mb: '3',
@@ -93,7 +106,7 @@ export function Rail({ session, onFind }: RailProps) {
           Ctrl K
         </Keycap>
       </FindButton>
-      <chakra.nav aria-label="Main">
+      <chakra.nav aria-label="Main" flexShrink="0">
         <EntryList entries={entries.filter(({ group }) => group === 'work')} />
         {shopEntries.length > 0 && (
           <>
@@ -130,7 +143,7 @@ const AccountLink = chakra(NavLink, {
 
 function PersonLink({ session }: { session: Session }) {
   return (
-    <Box mt="auto" pt="2" borderTop="hairline">
+    <Box mt="auto" pt="2" borderTop="hairline" flexShrink="0">
       <AccountLink to={paths.account}>
         <Flex
           boxSize="8"

@@ -10,6 +10,7 @@ import { refreshSession, type Session, useSessionState } from '../../lib/session
 import { useShortcut } from '../../lib/shortcuts';
 import { BottomBar } from './bottom-bar';
 import { Rail } from './rail';
+import { RoleGate } from './role-gate';
 import { SkipLink } from './skip-link';
 
 const CommandPalette = lazy(async () => ({ default: (await import('./command-palette')).CommandPalette }));
@@ -58,7 +59,9 @@ function ShopFrame({ session }: { session: Session }) {
           pt={{ base: '4', sm: '5', lg: '6' }}
           pb={{ base: '184px', lg: '6' }}
         >
-          <Outlet context={{ onFind: handleFind } satisfies ShopOutlet} />
+          <RoleGate role={session.member.role}>
+            <Outlet context={{ onFind: handleFind } satisfies ShopOutlet} />
+          </RoleGate>
         </chakra.main>
       </Box>
       <BottomBar role={session.member.role} />

@@ -4,7 +4,7 @@ const Anchor = chakra('a', {
   base: {
     position: 'fixed',
     left: '4',
-    top: '-16',
+    top: '-10rem',
     zIndex: 'status',
     px: '4',
     py: '3',

@@ -34,7 +34,10 @@ export type NumbersGroup = {
 export function reasonsOf(numbers: readonly ShownNumber[]): [reason: string, labels: string[]][] {
   const byReason = new Map<string, string[]>();
   for (const { text, reason, label } of numbers) {
-    if (text === undefined) byReason.set(reason, [...(byReason.get(reason) ?? []), label]);
+    if (text !== undefined) continue;
+    // It goes on in a sentence of the panel, which has its own full stop.
+    const because = reason.replace(/\.$/, '');
+    byReason.set(because, [...(byReason.get(because) ?? []), label]);
   }
   return [...byReason];
 }

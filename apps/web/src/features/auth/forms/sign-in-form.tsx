@@ -8,11 +8,17 @@ import { emailRules } from './credentials';
 
 const LABELS = { email: 'E-mail', password: 'Password' };
 
+const UNANSWERED = {
+  what: 'No answer came from the server.',
+  safe: 'You are not signed in. What you typed is still here.',
+  todo: 'Check the network, then try again.',
+};
+
 export function SignInForm() {
   const form = useSummaryForm({ defaultValues: { email: '', password: '' } });
   const { errors, isSubmitting } = form.formState;
   return (
-    <Form form={form} labels={LABELS} onSubmit={signIn} explain={explain}>
+    <Form form={form} labels={LABELS} onSubmit={signIn} explain={explain} unanswered={UNANSWERED}>
       <TextField
         label={LABELS.email}
         type="email"

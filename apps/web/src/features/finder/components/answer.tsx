@@ -44,7 +44,7 @@ export function Answer({ answer, time }: { answer: FinderAnswer; time: ReactNode
       <chakra.div display={{ base: 'block', sm: 'none' }} mt="4">
         <Signature answer={answer} />
       </chakra.div>
-      <ActBar lead={<Signature answer={answer} />}>
+      <ActBar lead={<Signature answer={answer} />} isInFlowOnPhone>
         <SheetAct answer={answer} />
         <StartAct answer={answer} />
       </ActBar>

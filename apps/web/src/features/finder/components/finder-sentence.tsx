@@ -22,7 +22,7 @@ export function FinderSentence({ result, choice, onChoose, trailing }: FinderSen
   return (
     <chakra.div
       fontSize={{ base: 'lg', sm: '2xl' }}
-      lineHeight={{ base: '44px', sm: '40px' }}
+      lineHeight={{ base: '2.75rem', sm: '2.5rem' }}
       display={{ base: 'block', sm: 'flex' }}
       flexWrap="wrap"
       columnGap="2.5"

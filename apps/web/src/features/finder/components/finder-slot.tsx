@@ -44,7 +44,7 @@ export function FinderSlot({ slot, view, shownId, onChoose }: FinderSlotProps) {
         <chakra.span
           display={{ base: 'none', sm: 'block' }}
           fontSize="sm"
-          lineHeight="24px"
+          lineHeight="1.5rem"
           fontWeight="normal"
           color="fg.muted"
           pl="2.5"
@@ -88,7 +88,7 @@ const Blank = chakra('button', {
     borderRadius: 'md',
     textAlign: 'start',
     // 64 px and a gap of 8 for a gloved finger; the words of the sentence keep to the middle.
-    lineHeight: { base: '24px', sm: 'inherit' },
+    lineHeight: { base: '1.5rem', sm: 'inherit' },
     minHeight: { base: 'glove', sm: '0' },
     py: { base: '5', sm: '0' },
     my: { base: '1', sm: '0' },

@@ -7,6 +7,7 @@ import type { Choice, FinderAnswer, FinderResult } from '../finder.api';
 import { useSentence } from '../use-sentence';
 import { FinderSentence } from './finder-sentence';
 import { FirstSteps } from './first-steps';
+import { FoldedOnPhone } from './folded-on-phone';
 import { Outcome } from './outcome';
 import { WordsField } from './words-field';
 
@@ -36,23 +37,25 @@ export function Finder({ holds, leadActs, time, ask }: FinderProps) {
   if (data.approvedCount === 0 && data.withdrawn.length === 0) return <FirstSteps result={data} />;
   return (
     <chakra.div display="grid" gap={{ base: '3', sm: '4' }} gridTemplateColumns="minmax(0, 1fr)">
-      <FinderSentence
-        result={data}
-        choice={choice}
-        onChoose={choose}
-        trailing={
-          <>
-            <WordsField words={choice.words ?? ''} onWords={setWords} />
-            <Flex align="center" gap={{ base: '3', sm: '4' }} wrap="wrap" justify="flex-end" ml="auto">
-              {!isLoading && data.answer !== null && leadActs(data.answer)}
-              <chakra.b role="status" whiteSpace="nowrap">
-                {isLoading ? 'Looking' : countWords(data, choice)}
-              </chakra.b>
-              <StartOver onClick={startOver} />
-            </Flex>
-          </>
-        }
-      />
+      <FoldedOnPhone result={data} isAnswered={!isLoading && data.answer !== null}>
+        <FinderSentence
+          result={data}
+          choice={choice}
+          onChoose={choose}
+          trailing={
+            <>
+              <WordsField words={choice.words ?? ''} onWords={setWords} />
+              <Flex align="center" gap={{ base: '3', sm: '4' }} wrap="wrap" justify="flex-end" ml="auto">
+                {!isLoading && data.answer !== null && leadActs(data.answer)}
+                <chakra.b role="status" whiteSpace="nowrap">
+                  {isLoading ? 'Looking' : countWords(data, choice)}
+                </chakra.b>
+                <StartOver onClick={startOver} />
+              </Flex>
+            </>
+          }
+        />
+      </FoldedOnPhone>
       {/* The last answer stays in the slots while the next is fetched, but never its setting: it belongs to another sentence. */}
       {isLoading ? (
         <SkeletonBlock height="420px" label="Looking" />

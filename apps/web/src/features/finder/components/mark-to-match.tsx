@@ -3,7 +3,7 @@ import { Panel } from '../../../components/page';
 import { CellCloseUp, EvidencePlate } from '../../../components/plate/evidence-plate';
 import { platePhotoOf } from '../../../components/plate/plate-photo';
 import { formatDate, formatNumber, inShopNumbers } from '../../../lib/format';
-import { decimalsOf, methodWord, symbolOf } from '../../../lib/measurement-words';
+import { byMethod, decimalsOf, symbolOf } from '../../../lib/measurement-words';
 import { useSession } from '../../../lib/session';
 import type { ReferenceCell } from '../finder.api';
 
@@ -57,6 +57,6 @@ export function measurementWords({ quantity, value, grade, unit, method, criteri
   const name = quantity === 'contrast' ? 'Contrast' : symbolOf(quantity);
   const number = value === null ? (grade ?? '') : formatNumber(value, { decimals: decimalsOf(quantity) });
   const ending = unit === '1' || value === null ? '' : ` ${unit}`;
-  const by = method === 'photo' ? '' : `, by ${methodWord(method)}`;
+  const by = method === 'photo' ? '' : `, ${byMethod(method)}`;
   return `${name} ${number}${ending}${criterion === null ? '' : `, ${inShopNumbers(criterion)}`}${by}`;
 }

@@ -23,7 +23,7 @@ export function Sheet({ answer, cautions, time }: SheetProps) {
     <Paper aria-label={`Set-up sheet of ${answer.code}`}>
       <Head answer={answer} />
       <SheetCautions cautions={cautions} />
-      <chakra.div display="grid" gridTemplateColumns="minmax(0, 1fr) 56mm" columnGap="8mm" mt="4mm">
+      <chakra.div data-fold="" display="grid" gridTemplateColumns="minmax(0, 1fr) 56mm" columnGap="8mm" mt="4mm">
         <Settings answer={answer} />
         <chakra.div>
           {answer.reference !== null && <Match reference={answer.reference} />}
@@ -89,6 +89,7 @@ function SheetCautions({ cautions }: { cautions: readonly FinderCaution[] }) {
       </chakra.h2>
       {own.length > 0 && (
         <chakra.ul
+          data-fold=""
           display="grid"
           gridTemplateColumns={`repeat(${Math.min(3, own.length)}, minmax(0, 1fr))`}
           columnGap="4mm"
@@ -229,7 +230,7 @@ function Foot({ answer }: { answer: FinderAnswer }) {
     holdsUntil === null ? '' : `${isOverdue ? 'Was to be proved again by' : 'Holds until'} ${formatDate(holdsUntil, shop.timeZone)}. `;
   return (
     <chakra.footer mt="auto">
-      <chakra.div display="grid" gridTemplateColumns="1.2fr 1fr 1fr" columnGap="8mm" alignItems="end">
+      <chakra.div data-fold="" display="grid" gridTemplateColumns="1.2fr 1fr 1fr" columnGap="8mm" alignItems="end">
         <Line name={signature?.printedName ?? ''}>
           {signature === null
             ? ''
@@ -241,6 +242,7 @@ function Foot({ answer }: { answer: FinderAnswer }) {
       </chakra.div>
       <chakra.p
         display="flex"
+        flexWrap="wrap"
         justifyContent="space-between"
         gap="4mm"
         mt="4mm"
