@@ -1,6 +1,14 @@
 import { chakra } from '@chakra-ui/react';
 import { type FormEvent, type ReactNode, useCallback, useEffect, useRef, useState } from 'react';
-import { type FieldErrors, type FieldPath, type FieldValues, type UseFormProps, type UseFormReturn, useForm } from 'react-hook-form';
+import {
+  type FieldErrors,
+  type FieldPath,
+  type FieldValues,
+  type UseFormProps,
+  type UseFormReturn,
+  useForm,
+  useFormState,
+} from 'react-hook-form';
 import { ProblemError } from '../lib/api';
 import { showFieldProblems } from '../lib/form-problem';
 import { useIdempotencyKey } from '../lib/idempotency-key';
@@ -35,6 +43,8 @@ const UNANSWERED: UnansweredWords = {
 
 export function Form<T extends FieldValues>({ form, labels, onSubmit, explain, unanswered = UNANSWERED, children }: FormProps<T>) {
   const [problem, setProblem] = useState<ProblemError>();
+  // a form that is not drawn again by its page still shows its own messages
+  const { errors, isSubmitted } = useFormState({ control: form.control });
   const { summary, notice, focusNext } = useRefusalFocus();
   const idempotencyKey = useIdempotencyKey();
   // Read at every render: the form works out only what it was asked for before.
@@ -58,7 +68,7 @@ export function Form<T extends FieldValues>({ form, labels, onSubmit, explain, u
 
   return (
     <chakra.form noValidate onSubmit={handleSubmit} display="grid" gap="4" maxW="form">
-      <ErrorSummary ref={summary} entries={form.formState.isSubmitted ? summaryEntries(form.formState.errors, labels) : []} />
+      <ErrorSummary ref={summary} entries={isSubmitted ? summaryEntries(errors, labels) : []} />
       {problem !== undefined && (
         <div ref={notice} tabIndex={-1}>
           <FormProblem problem={problem} explanation={explain?.(problem)} unanswered={unanswered} isTyped={isDirty} />

@@ -1,7 +1,7 @@
 import { chakra } from '@chakra-ui/react';
 import { PANEL_UNITS } from '@proofplate/physics';
 import { LEVEL_SPACING_LABELS, type LevelSpacing, type Panel } from '@proofplate/recipe-model';
-import { type UseFormReturn, useWatch } from 'react-hook-form';
+import { type UseFormReturn, useFormState, useWatch } from 'react-hook-form';
 import { NumberField, SelectField } from '../../../components/field';
 import { messageAt } from '../../../components/form';
 import { Panel as Card } from '../../../components/page';
@@ -26,7 +26,8 @@ export function FactorFields({ form, name, panel, stored }: FactorFieldsProps) {
   const field = panel.fields.find((own) => own.parameter === parameter);
   const unit = field === undefined ? '' : PANEL_UNITS[field.unit].symbol;
   const title = name === 'rows' ? 'Rows' : 'Columns';
-  const at = (key: string) => messageAt(form.formState.errors, `${name}.${key}`);
+  const { errors } = useFormState({ control: form.control });
+  const at = (key: string) => messageAt(errors, `${name}.${key}`);
   const options = varying(panel);
   return (
     <Card p="4" display="grid" gap="3" aria-label={title}>

@@ -1,5 +1,5 @@
 import { chakra } from '@chakra-ui/react';
-import type { UseFormReturn } from 'react-hook-form';
+import { type UseFormReturn, useFormState } from 'react-hook-form';
 import { NumberField, SelectField, TextField } from '../../../components/field';
 import { messageAt } from '../../../components/form';
 import { shopLengthUnit } from '../../../lib/format';
@@ -26,7 +26,8 @@ export type GroundFieldsProps = {
 
 /** Which coupon it is: machine, lens, material, finish and the effect that is wanted. */
 export function GroundFields({ form, choices, never }: GroundFieldsProps) {
-  const at = (name: string) => messageAt(form.formState.errors, name);
+  const { errors } = useFormState({ control: form.control });
+  const at = (name: string) => messageAt(errors, name);
   return (
     <chakra.div display="grid" gridTemplateColumns="repeat(2, minmax(0, 1fr))" gap="2" rowGap="3" alignItems="start">
       <SelectField

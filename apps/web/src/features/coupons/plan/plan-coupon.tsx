@@ -1,7 +1,7 @@
 import { chakra } from '@chakra-ui/react';
 import type { Panel } from '@proofplate/recipe-model';
-import { type ReactNode, useDeferredValue, useRef, useState } from 'react';
-import { useWatch } from 'react-hook-form';
+import { type ReactNode, useCallback, useDeferredValue, useEffect, useMemo, useRef, useState } from 'react';
+import { type UseFormReturn, useWatch } from 'react-hook-form';
 import { ActBar } from '../../../components/act-bar';
 import { Button } from '../../../components/button';
 import { EmptyState } from '../../../components/empty-state';
@@ -12,15 +12,19 @@ import { ProblemError } from '../../../lib/api';
 import { asSentence } from '../../../lib/format';
 import { readNumber } from '../../../lib/read-number';
 import { headOverheadsOf } from '../../../lib/time-words';
+import { useSame } from '../../../lib/use-same';
 import {
   type Coupon,
   type CouponPreview,
+  type Machine,
+  type MachineLens,
   planCoupon,
   useCautionsFor,
   useGroundChoices,
   useLensChoices,
   useMachineChoices,
 } from '../coupons.api';
+import type { GroundChoices } from './ground-fields';
 import { keptPlan } from './kept-plan';
 import { planBody } from './plan-body';
 import { PlanForm } from './plan-form';
@@ -55,17 +59,17 @@ export function PlanCoupon({ initial, keepAs, locale, onPlanned }: PlanCouponPro
   });
   const [materialId, finishId, effectId] = useWatch({ control: form.control, name: ['materialId', 'finishId', 'effectId'] });
   const machines = useMachineChoices().data?.items;
-  const lenses = useLensChoices(machineId).data?.items ?? [];
+  const lenses = useLensChoices(machineId).data?.items ?? NONE;
   const { materials, finishes, effects } = useGroundChoices();
   const machine = machines?.find(({ id }) => id === machineId);
   const panel = machine?.profile.panel;
-  const never = useCautionsFor({ materialId, finishId, effectId, machineId }).filter(({ level }) => level === 'never');
+  const never = useSame(useCautionsFor({ materialId, finishId, effectId, machineId }).filter(({ level }) => level === 'never'));
   const [forbidding] = never;
   const live = useLivePlan(form, { machine, never: forbidding, locale });
   const [chosen, setChosen] = useState<string>();
   useUsualChoices(form, panel, lenses);
 
-  const handleSubmit = async (values: PlanValues, { idempotencyKey }: { idempotencyKey: string }) => {
+  const handleSubmit = useLatest(async (values: PlanValues, { idempotencyKey }: { idempotencyKey: string }) => {
     const read = planBody(values, machine?.profile, locale);
     const ground = groundMessages(forbidding, live.preview?.cautions, values);
     if (forbidding !== undefined) throw unreadable(ground);
@@ -73,9 +77,20 @@ export function PlanCoupon({ initial, keepAs, locale, onPlanned }: PlanCouponPro
     const coupon = await planCoupon({ ...read.body, acknowledgedCautionIds: values.acknowledgedCautionIds }, idempotencyKey);
     kept.forget();
     onPlanned(coupon);
-  };
-  if (machines === undefined || materials === undefined || finishes === undefined || effects === undefined)
-    return <SkeletonForm fields={8} />;
+  });
+  const numbers = usePlanNumbers(form, live.preview, {
+    machine,
+    lens: lenses.find((own) => own.lensId === lensId),
+    chosen,
+    cellMm,
+    locale,
+  });
+  const choices = useMemo(
+    () => choicesOf({ machines, lenses, materials, finishes, effects }),
+    [machines, lenses, materials, finishes, effects],
+  );
+  const [rowFactor, columnFactor] = [useSame(live.preview?.rowFactor), useSame(live.preview?.columnFactor)];
+  if (choices === undefined) return <SkeletonForm fields={8} />;
   const sizes = { cellMm: sizeOf(cellMm, locale, 5), gapMm: sizeOf(gapMm, locale, 1.2) };
   return (
     <chakra.div
@@ -88,25 +103,13 @@ export function PlanCoupon({ initial, keepAs, locale, onPlanned }: PlanCouponPro
         {kept.isRestored && <RestoredPlan onStartAfresh={kept.startAfresh} />}
         <PlanForm
           form={form}
-          choices={{ machines, lenses, materials, finishes, effects }}
+          choices={choices}
           panel={panel}
           isMachineChosen={machineId !== ''}
           never={never}
-          preview={live.preview}
-          numbers={
-            machine !== undefined && (
-              <PlanNumbers
-                form={form}
-                machine={machine}
-                lens={lenses.find((own) => own.lensId === lensId)}
-                place={placeOf(live.preview, chosen)}
-                doseCaution={live.preview?.doseCaution ?? null}
-                overheads={live.preview === undefined ? undefined : headOverheadsOf(live.preview.markingTime.overheads)}
-                cellMm={sizes.cellMm}
-                locale={locale}
-              />
-            )
-          }
+          rowFactor={rowFactor}
+          columnFactor={columnFactor}
+          numbers={numbers}
           onSubmit={handleSubmit}
         />
       </chakra.div>
@@ -142,6 +145,49 @@ export function PlanCoupon({ initial, keepAs, locale, onPlanned }: PlanCouponPro
     </chakra.div>
   );
 }
+
+/** All choices, once all are known. */
+function choicesOf({ machines, lenses, materials, finishes, effects }: Partial<GroundChoices> & Pick<GroundChoices, 'lenses'>) {
+  if (machines === undefined || materials === undefined || finishes === undefined || effects === undefined) return undefined;
+  return { machines, lenses, materials, finishes, effects };
+}
+
+type NumbersGround = {
+  machine: Machine | undefined;
+  lens: MachineLens | undefined;
+  chosen: string | undefined;
+  cellMm: string;
+  locale: string;
+};
+
+/** The numbers beside the fields: the same element until what they rest on differs, beside what is typed, which they watch themselves. */
+function usePlanNumbers(
+  form: UseFormReturn<PlanValues>,
+  preview: CouponPreview | undefined,
+  { machine, lens, chosen, cellMm, locale }: NumbersGround,
+): ReactNode {
+  const place = useSame(placeOf(preview, chosen));
+  const doseCaution = useSame(preview?.doseCaution ?? null);
+  const overheads = useSame(preview === undefined ? undefined : headOverheadsOf(preview.markingTime.overheads));
+  return useMemo(
+    () =>
+      machine !== undefined && (
+        <PlanNumbers {...{ form, machine, lens, place, doseCaution, overheads, locale }} cellMm={sizeOf(cellMm, locale, 5)} />
+      ),
+    [form, machine, lens, place, doseCaution, overheads, cellMm, locale],
+  );
+}
+
+/** The same function all along, which does what the newest one does. */
+function useLatest<Args extends unknown[], Result>(act: (...args: Args) => Result): (...args: Args) => Result {
+  const latest = useRef(act);
+  useEffect(() => {
+    latest.current = act;
+  });
+  return useCallback((...args: Args) => latest.current(...args), []);
+}
+
+const NONE: readonly MachineLens[] = [];
 
 type ConsequenceProps = {
   live: LivePlan;

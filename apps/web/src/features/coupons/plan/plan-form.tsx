@@ -1,7 +1,7 @@
 import { chakra } from '@chakra-ui/react';
 import type { Panel } from '@proofplate/recipe-model';
-import type { ReactNode } from 'react';
-import { type UseFormReturn, useWatch } from 'react-hook-form';
+import { memo, type ReactNode } from 'react';
+import { type UseFormReturn, useFormState, useWatch } from 'react-hook-form';
 import { Button } from '../../../components/button';
 import { NumberField } from '../../../components/field';
 import { Form, messageAt } from '../../../components/form';
@@ -30,14 +30,17 @@ export type PlanFormProps = {
   isMachineChosen: boolean;
   /** Cautions that forbid the work that is chosen: the fields behind them are not asked for. */
   never: readonly ShopCaution[];
-  preview: CouponPreview | undefined;
+  rowFactor: CouponPreview['rowFactor'] | undefined;
+  columnFactor: CouponPreview['columnFactor'] | undefined;
   /** What follows from what is typed, under the fields of the setting. */
   numbers: ReactNode;
   onSubmit: (values: PlanValues, submit: { idempotencyKey: string }) => Promise<unknown>;
 };
 
-/** The left half of the plan: what is typed. */
-export function PlanForm({ form, choices, panel, isMachineChosen, never, preview, numbers, onSubmit }: PlanFormProps) {
+/** The left half of the plan: what is typed. An answer of the server that changes nothing in it does not draw its fields again. */
+export const PlanForm = memo(PlanFields);
+
+function PlanFields({ form, choices, panel, isMachineChosen, never, rowFactor, columnFactor, numbers, onSubmit }: PlanFormProps) {
   const [rows, columns] = useWatch({ control: form.control, name: ['rows.parameter', 'columns.parameter'] });
   return (
     <Form form={form} labels={labelsOf(panel)} onSubmit={onSubmit}>
@@ -50,8 +53,8 @@ export function PlanForm({ form, choices, panel, isMachineChosen, never, preview
         isMachineChosen && <SkeletonForm fields={6} />
       ) : (
         <>
-          <FactorFields form={form} name="rows" panel={panel} stored={preview?.rowFactor} />
-          <FactorFields form={form} name="columns" panel={panel} stored={preview?.columnFactor} />
+          <FactorFields form={form} name="rows" panel={panel} stored={rowFactor} />
+          <FactorFields form={form} name="columns" panel={panel} stored={columnFactor} />
           <Card p="4" display="grid" gap="3" aria-labelledby="plan-base">
             <chakra.h2 id="plan-base" fontSize="md" lineHeight="md">
               The same in every cell
@@ -84,7 +87,8 @@ function LabelStepFields({ form, panel }: { form: UseFormReturn<PlanValues>; pan
 
 function PlateFields({ form }: { form: UseFormReturn<PlanValues> }) {
   const [isRandom, seed, drawnBy] = useWatch({ control: form.control, name: ['isRandom', 'runOrderSeed', 'fillDrawnBy'] });
-  const at = (name: string) => messageAt(form.formState.errors, name);
+  const { errors } = useFormState({ control: form.control });
+  const at = (name: string) => messageAt(errors, name);
   return (
     <>
       <Card p="4" display="grid" gap="3" aria-label="Plate">

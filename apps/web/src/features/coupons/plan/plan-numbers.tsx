@@ -1,6 +1,6 @@
 import { chakra } from '@chakra-ui/react';
 import { cellAddress, type DoseCaution, type HeadOverheads, stepNumbers } from '@proofplate/recipe-model';
-import { useMemo } from 'react';
+import { memo, useMemo } from 'react';
 import { type UseFormReturn, useWatch } from 'react-hook-form';
 import { NumbersPanel } from '../../../components/numbers-panel/numbers-panel';
 import { Panel } from '../../../components/page';
@@ -23,7 +23,9 @@ export type PlanNumbersProps = {
 };
 
 /** What follows from the chosen cell. */
-export function PlanNumbers(props: PlanNumbersProps) {
+export const PlanNumbers = memo(NumbersOfPlan);
+
+function NumbersOfPlan(props: PlanNumbersProps) {
   const { lens, place } = props;
   const address = cellAddress(place.row, place.column);
   return (

@@ -1,7 +1,7 @@
 import { chakra } from '@chakra-ui/react';
 import { PANEL_UNITS } from '@proofplate/physics';
 import { ASSIST_LABELS, FILL_LABELS, type Panel, type ParameterKey } from '@proofplate/recipe-model';
-import { type UseFormReturn, useWatch } from 'react-hook-form';
+import { type UseFormReturn, useFormState, useWatch } from 'react-hook-form';
 import { NumberField, SelectField } from '../../../components/field';
 import { messageAt } from '../../../components/form';
 import type { PlanValues } from './plan-values';
@@ -20,6 +20,7 @@ export type SettingFieldsProps = {
 
 /** A setting typed as the panel shows it, in the panel's order. */
 export function SettingFields({ form, name, panel, varied = [] }: SettingFieldsProps) {
+  const { errors } = useFormState({ control: form.control });
   const fill = useWatch({ control: form.control, name: `${name}.fill` });
   const fields = panel.fields.filter(
     ({ parameter }) => !varied.includes(parameter) && !(parameter === 'lineSpacingUm' && fill === 'outline'),
@@ -32,7 +33,7 @@ export function SettingFields({ form, name, panel, varied = [] }: SettingFieldsP
           label={label}
           unit={PANEL_UNITS[unit].symbol}
           {...form.register(`${name}.values.${parameter}`)}
-          error={messageAt(form.formState.errors, `${name}.values.${parameter}`)}
+          error={messageAt(errors, `${name}.values.${parameter}`)}
         />
       ))}
       <SelectField label="Fill" {...form.register(`${name}.fill`)} options={FILL_OPTIONS} />

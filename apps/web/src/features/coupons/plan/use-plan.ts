@@ -1,4 +1,4 @@
-import { startTransition, useEffect, useMemo, useState } from 'react';
+import { startTransition, useEffect, useMemo, useRef, useState } from 'react';
 import type { FieldPath, UseFormReturn } from 'react-hook-form';
 import { ProblemError } from '../../../lib/api';
 import { fieldNameFromPointer } from '../../../lib/form-problem';
@@ -39,12 +39,16 @@ export function useLivePlan(
 function useFieldMessages(form: UseFormReturn<PlanValues>, messages: readonly FieldMessage[]): void {
   const { setError, clearErrors } = form;
   const isSubmitted = form.formState.isSubmitted;
+  const shown = useRef('[]');
   useEffect(() => {
+    const said = messages.filter(({ isMissing }) => !isMissing || isSubmitted);
+    const text = JSON.stringify(said);
+    // to say the same again would draw every field again
+    if (text === shown.current && !isSubmitted) return;
+    shown.current = text;
     clearErrors();
-    for (const { name, message, isMissing } of messages) {
-      // the names come from the plan's own fields
-      if (!isMissing || isSubmitted) setError(name as FieldPath<PlanValues>, { type: 'read', message });
-    }
+    // the names come from the plan's own fields
+    for (const { name, message } of said) setError(name as FieldPath<PlanValues>, { type: 'read', message });
   }, [messages, setError, clearErrors, isSubmitted]);
 }
 
