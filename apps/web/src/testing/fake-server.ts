@@ -3,6 +3,17 @@ export type FakeRequest = { method: string; path: string; query: URLSearchParams
 export type FakeAnswer = { status?: number; body?: unknown; headers?: Record<string, string> };
 export type FakeHandler = (request: FakeRequest) => FakeAnswer | Promise<FakeAnswer>;
 
+const underWay = new Set<Promise<Response>>();
+const MOST_TURNS = 50;
+
+/** Lets answers arrive that a page asked for before it left, so that the next test's page does not wait for them; one that never comes is left. */
+export async function settleRequests(): Promise<void> {
+  const turn = () => new Promise((resolve) => setTimeout(resolve, 0));
+  for (let turns = 0; underWay.size > 0 && turns < MOST_TURNS; turns += 1) await turn();
+  // what waits for the answer takes its own turn
+  await turn();
+}
+
 /**
  * Stands in for the api in a page's test: answers by "METHOD /path" and keeps what was asked.
  * A request that no handler expects fails the test loudly instead of hanging it.
@@ -10,7 +21,7 @@ export type FakeHandler = (request: FakeRequest) => FakeAnswer | Promise<FakeAns
 export function fakeServer(handlers: Readonly<Record<string, FakeHandler>>) {
   const requests: FakeRequest[] = [];
   const original = globalThis.fetch;
-  globalThis.fetch = async (input, init) => {
+  const answer = async (input: RequestInfo | URL, init?: RequestInit): Promise<Response> => {
     const asked = await read(new Request(input instanceof Request ? input : new URL(String(input), globalThis.location.origin), init));
     requests.push(asked);
     const handler = handlers[`${asked.method} ${asked.path}`];
@@ -20,6 +31,11 @@ export function fakeServer(handlers: Readonly<Record<string, FakeHandler>>) {
       status,
       headers: { 'content-type': status >= 400 ? 'application/problem+json' : 'application/json', ...headers },
     });
+  };
+  globalThis.fetch = (input, init) => {
+    const answered = answer(input, init).finally(() => underWay.delete(answered));
+    underWay.add(answered);
+    return answered;
   };
   return {
     requests,
