@@ -32,8 +32,9 @@ export const Paper = chakra('article', {
       width: 'full',
       minHeight: '0',
       p: '4mm',
-      '& [data-fold]': { gridTemplateColumns: 'minmax(0, 1fr)', rowGap: '3mm' },
-      '& > header': { gridTemplateColumns: '26mm minmax(0, 1fr)', rowGap: '3mm' },
+      // The columns are said at each grid; only an important rule reaches them from here.
+      '& [data-fold]': { gridTemplateColumns: 'minmax(0, 1fr) !important', rowGap: '3mm' },
+      '& > header': { gridTemplateColumns: '26mm minmax(0, 1fr) !important', rowGap: '3mm' },
     },
   },
 });

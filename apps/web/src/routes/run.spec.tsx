@@ -97,7 +97,7 @@ describe('a run under way', () => {
       reason: 'The tint came off',
       approvedNumber: null,
     };
-    openPage(makeRun({ stop, allowedActions: ['tick', 'finish', 'bad-result'] }));
+    openPage(makeRun({ stop, firstPiece: { ...released, ok: false }, allowedActions: ['tick', 'finish', 'bad-result'] }));
     const banner = await screen.findByRole('alert');
     expect(banner).toHaveTextContent('R-0031 revision 3 was withdrawn. Mark no more pieces.');
     expect(banner).toHaveTextContent('The tint came off');
@@ -105,6 +105,7 @@ describe('a run under way', () => {
     expect(banner).toHaveTextContent('without a released first piece every part counts as scrap');
     expect(within(banner).getByRole('link', { name: 'Look for another setting' })).toHaveAttribute('href', '/machine');
     expect(screen.queryByRole('button', { name: 'Power is set' })).toBeNull();
+    expect(screen.queryByText(/then mark another piece/)).toBeNull();
   });
 
   it('leads from a superseded revision to the one that took its place', async () => {

@@ -43,7 +43,7 @@ export function FirstPiece({ run, onChange }: { run: Run; onChange: (run: Run) =
           {firstPiece.note === '' ? '' : `: ${firstPiece.note}`}
         </chakra.p>
       )}
-      {firstPiece?.ok === false && run.state === 'started' && (
+      {firstPiece?.ok === false && mayJudge && (
         <NextStep>
           <b>Stop the batch.</b> Check lens, focus and every value against the card, then mark another piece. If that does not match either,
           tell a lead: a lead can put the setting on hold.
