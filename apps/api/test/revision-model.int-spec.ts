@@ -161,9 +161,11 @@ class RevisionCommand implements fc.AsyncCommand<Model, Real> {
     if (answer.statusCode < 300) advance(model, this, target, answer.statusCode === 204 ? undefined : await this.seenAfter(answer.json()));
   }
 
-  /** A copy says nothing of its reason yet, and without one nothing is submitted. */
+  /** A copy says nothing of its reason and grounds yet, and without them nothing is submitted; a lead gives grounds. */
   private async seenAfter(answered: RecipeRevisionDto): Promise<RecipeRevisionDto> {
-    return this.act === 'copy' ? changeDraft(test, people[this.who], answered, { reason: 'Proposed again.' }) : answered;
+    if (this.act !== 'copy') return answered;
+    const reasoned = await changeDraft(test, people[this.who], answered, { reason: 'Proposed again.' });
+    return changeDraft(test, people.lead, reasoned, { grounds: 'Customer drawing.' });
   }
 
   toString(): string {

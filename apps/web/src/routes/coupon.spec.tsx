@@ -181,8 +181,8 @@ describe('the coupon’s page', () => {
     expect(cellOf('B2')).toHaveAttribute('aria-selected', 'true');
     expect(cellOf('B2')).toHaveAccessibleName('B2, power 50 percent, scan speed 400 millimetres per second');
     // 10 W over 400 mm/s and 10 µm; 1 − 400 / (400 kHz · 43 µm)
-    expect(within(panel('B2')).getByText('Dose').nextSibling).toHaveTextContent('2.50 J/mm²');
-    expect(within(panel('B2')).getByText('Pulse overlap').nextSibling).toHaveTextContent('97.7 %');
+    expect(within(panel('B2')).getByText('Dose', { selector: 'dt' }).nextSibling).toHaveTextContent('2.5 J/mm²');
+    expect(within(panel('B2')).getByText('Pulse overlap', { selector: 'dt' }).nextSibling).toHaveTextContent('97.7 %');
     expect(screen.getByText('Lot 316L-2291, 1.5 mm')).toBeInTheDocument();
   });
 

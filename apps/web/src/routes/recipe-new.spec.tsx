@@ -22,7 +22,7 @@ afterEach(() => {
 function openPage(answer: FakeHandler) {
   server = fakeServer({
     'GET /api/machines': () => list({ id: 'x1', name: 'Bench 1', profile }),
-    'GET /api/machines/x1/lenses': () => list({ lensId: 'l1', lensName: 'F160' }),
+    'GET /api/machines/x1/lenses': () => list({ lensId: 'l1', lensName: 'F160', focalLengthMm: 160, measuredSpotUm: null }),
     'GET /api/materials': () => list({ id: 'm1', name: '316L' }),
     'GET /api/finishes': () => list({ id: 'f1', name: 'brushed' }),
     'GET /api/effects': () => list({ id: 'e1', name: 'Black anneal' }),
