@@ -135,7 +135,7 @@ function StoppedSteps({ run }: { run: Run }) {
       <chakra.summary
         display="list-item"
         py="2.5"
-        minHeight={{ base: 'touch', lg: '0' }}
+        minHeight={{ base: 'glove', lg: '0' }}
         width="fit-content"
         color="brand.fg"
         cursor="pointer"

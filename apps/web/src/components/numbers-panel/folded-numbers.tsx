@@ -13,7 +13,7 @@ export function FoldedNumbers({ summary, ...panel }: FoldedNumbersProps) {
       <chakra.summary
         display="list-item"
         py="2.5"
-        minHeight={{ base: 'touch', lg: '0' }}
+        minHeight={{ base: 'glove', lg: '0' }}
         width="fit-content"
         color="brand.fg"
         cursor="pointer"

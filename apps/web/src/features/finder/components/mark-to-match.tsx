@@ -17,7 +17,12 @@ export function MarkToMatch({ reference }: { reference: ReferenceCell }) {
     <Panel px="4" py="3.5" aria-label="The mark to match">
       <chakra.div
         display="grid"
-        gridTemplateColumns={{ base: '120px minmax(0, 1fr)', sm: '148px minmax(0, 1fr) 104px' }}
+        gridTemplateColumns={{
+          base: '120px minmax(0, 1fr)',
+          sm: '148px minmax(0, 1fr) 104px',
+          lg: '120px minmax(0, 1fr)',
+          xl: '148px minmax(0, 1fr) 104px',
+        }}
         gap={{ base: '4', sm: '4' }}
         alignItems="start"
       >
@@ -34,7 +39,7 @@ export function MarkToMatch({ reference }: { reference: ReferenceCell }) {
           </chakra.ul>
           <TakenAt reference={reference} />
         </div>
-        <chakra.div display={{ base: 'none', sm: 'block' }}>
+        <chakra.div display={{ base: 'none', sm: 'block', lg: 'none', xl: 'block' }}>
           <EvidencePlate shape={shape} photo={platePhotoOf(photo, 'small')} chosen={address} />
         </chakra.div>
       </chakra.div>
