@@ -137,7 +137,10 @@ async function markFirstCell(person) {
   const cell = person.page.getByRole('heading', { level: 2, name: /^Cell / });
   // Where the journey ran before, the labels are marked already.
   await start.or(cell).first().waitFor();
-  if (await start.isVisible()) await start.click();
+  if (await start.isVisible()) {
+    await person.page.getByRole('checkbox', { name: /^I have read/ }).check();
+    await start.click();
+  }
   await cell.waitFor();
 }
 
