@@ -67,8 +67,9 @@ function brokenWords({ mostLetters }) {
 /** Runs in the page: controls that are drawn as such. Words that are links within a text or the breadcrumbs keep the height of their line. */
 function smallControls({ selector, leastPx }) {
   return [...document.querySelectorAll(`main :is(${selector})`)].flatMap((control) => {
-    // A summary within a list gives its row the tap.
-    const target = (control.tagName === 'SUMMARY' ? control.closest('li') : null) ?? control;
+    // A summary within a list gives its row the tap, and a tick its label.
+    const wider = { SUMMARY: 'li', INPUT: 'label' }[control.tagName];
+    const target = (wider === undefined ? null : control.closest(wider)) ?? control;
     const { width, height } = target.getBoundingClientRect();
     const isDrawn = width > 1 && height > 1 && control.checkVisibility();
     const isInText = control.tagName === 'A' && (getComputedStyle(control).display === 'inline' || control.closest('nav') !== null);

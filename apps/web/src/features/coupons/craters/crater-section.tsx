@@ -44,8 +44,8 @@ function Found({ found }: { found: CraterFit }) {
       {refusedBecause !== null && <Look isRefused>No line: {refusedBecause}</Look>}
       <Box
         display="grid"
-        gap={{ base: '4', lg: '8' }}
-        gridTemplateColumns={{ base: 'minmax(0, 1fr)', lg: 'minmax(0, 640px) minmax(0, 1fr)' }}
+        gap={{ base: '4', xl: '8' }}
+        gridTemplateColumns={{ base: 'minmax(0, 1fr)', xl: 'minmax(0, 640px) minmax(0, 1fr)' }}
         alignItems="start"
       >
         <Box minW="0">

@@ -42,7 +42,7 @@ export function ReadCautions({ cautions, readIds, onRead, error }: ReadCautionsP
         ))}
       </chakra.ul>
       <chakra.details fontSize="sm" lineHeight="sm">
-        <chakra.summary py="1" minHeight={{ base: 'touch', lg: '7' }} cursor="pointer" color="brand.fg">
+        <chakra.summary py={{ base: '5', lg: '1' }} minHeight={{ base: 'glove', lg: '7' }} cursor="pointer" color="brand.fg">
           Reasons and sources
         </chakra.summary>
         <CautionList
@@ -50,7 +50,7 @@ export function ReadCautions({ cautions, readIds, onRead, error }: ReadCautionsP
           label="Reasons and sources"
         />
       </chakra.details>
-      <chakra.label htmlFor={id} display="flex" alignItems="center" gap="2.5" minHeight={{ base: 'touch', lg: '8' }} cursor="pointer">
+      <chakra.label htmlFor={id} display="flex" alignItems="center" gap="2.5" minHeight={{ base: 'glove', lg: '8' }} cursor="pointer">
         <Checkbox
           id={id}
           checked={isRead}

@@ -30,7 +30,7 @@ export function TransferBody({ revisionId, ground, chosen, onChoose }: TransferB
     );
   }
   return (
-    <chakra.div display="grid" gap="4" gridTemplateColumns={{ base: 'minmax(0, 1fr)', lg: '340px minmax(0, 1fr)' }} alignItems="start">
+    <chakra.div display="grid" gap="4" gridTemplateColumns={{ base: 'minmax(0, 1fr)', xl: '340px minmax(0, 1fr)' }} alignItems="start">
       <TargetChoice ground={ground} chosen={chosen} onChoose={onChoose} />
       {target === undefined ? (
         <EmptyState kind="none-match" title="Choose a machine and a lens">

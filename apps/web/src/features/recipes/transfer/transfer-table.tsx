@@ -75,7 +75,10 @@ function Row({ row: { label, unit, source, target, share, change }, isEquivalent
   return (
     <tr>
       <chakra.th {...CELL} scope="row" textAlign="start" fontWeight="normal">
-        {label} <chakra.span color="fg.muted">{unit}</chakra.span>
+        {label}{' '}
+        <chakra.span color="fg.muted" whiteSpace="nowrap">
+          {unit}
+        </chakra.span>
       </chakra.th>
       <chakra.td {...CELL} textAlign="end">
         {source}
