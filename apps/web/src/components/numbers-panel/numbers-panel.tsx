@@ -1,4 +1,4 @@
-import { type ReactNode, useCallback, useEffect, useState } from 'react';
+import { memo, type ReactNode, useCallback, useDeferredValue, useEffect, useState } from 'react';
 import { CautionIcon } from '../icons';
 import { MemoNumberRow } from './number-row';
 import { NUMBERS_CLASS } from './numbers-style';
@@ -35,25 +35,34 @@ type GroupProps = { group: NumbersGroup; hasTitle: boolean; openKey: string | un
 function Group({ group, hasTitle, openKey, onToggle }: GroupProps) {
   const { key, title, numbers, remarks } = group;
   const meant = numbers.filter(({ isRuledOut }) => !isRuledOut);
-  const rest = meant.filter(({ isFirst }) => !isFirst);
   const rows = { group: key, openKey, onToggle };
+  // while somebody types, the numbers that stand first are drawn first
+  const settled = useDeferredValue(group);
   return (
     <div>
       {hasTitle && <h4>{title}</h4>}
       <Rows {...rows} numbers={meant.filter(({ isFirst }) => isFirst)} />
       <Notes numbers={meant} remarks={remarks} />
-      {rest.length > 0 && (
-        <details>
-          <summary>{rest.length} more numbers</summary>
-          <Rows {...rows} numbers={rest} />
-          {reasonsOf(numbers.filter(({ isRuledOut }) => isRuledOut)).map(([reason, labels]) => (
-            <p key={reason} className="aside">
-              Has none of {listed(labels)}: {reason}.
-            </p>
-          ))}
-        </details>
-      )}
+      <Rest group={settled} openKey={openKey} onToggle={onToggle} />
     </div>
+  );
+}
+
+const Rest = memo(RestOfNumbers);
+
+function RestOfNumbers({ group: { key, numbers }, openKey, onToggle }: Omit<GroupProps, 'hasTitle'>) {
+  const rest = numbers.filter(({ isRuledOut, isFirst }) => !isRuledOut && !isFirst);
+  if (rest.length === 0) return null;
+  return (
+    <details>
+      <summary>{rest.length} more numbers</summary>
+      <Rows group={key} openKey={openKey} onToggle={onToggle} numbers={rest} />
+      {reasonsOf(numbers.filter(({ isRuledOut }) => isRuledOut)).map(([reason, labels]) => (
+        <p key={reason} className="aside">
+          Has none of {listed(labels)}: {reason}.
+        </p>
+      ))}
+    </details>
   );
 }
 
